@@ -1,0 +1,124 @@
+import { z } from "@restband/solver";
+import { claimSchema, sessionSchema, signInSchema, signUpSchema } from "./accounts/accounts-schema.ts";
+import { memberAddSchema, memberChangeSchema, memberSchema } from "./members/members-schema.ts";
+import { projectDraftSchema, projectSchema } from "./projects/projects-schema.ts";
+import { scenarioDraftSchema, scenarioSchema } from "./scenarios/scenarios-schema.ts";
+
+export * from "./accounts/accounts-schema.ts";
+export * from "./members/members-schema.ts";
+export * from "./projects/projects-schema.ts";
+export * from "./scenarios/scenarios-schema.ts";
+
+/** One route of the server: what goes in, what comes out. Paths are express paths under `/api`; every object is strict. */
+export interface Route {
+  readonly method: "GET" | "POST" | "PUT" | "PATCH" | "DELETE";
+  readonly path: string;
+  readonly params?: z.ZodObject;
+  readonly body?: z.ZodType;
+  readonly query?: z.ZodObject;
+  /** Status of success. */
+  readonly status: 200 | 201 | 202 | 204;
+  readonly response?: z.ZodType;
+  /** True where the request must carry `If-Match: "<version>"`. */
+  readonly ifMatch?: boolean;
+}
+
+const id = z.uuid();
+const projectParams = z.strictObject({ projectId: id });
+const memberParams = z.strictObject({ projectId: id, accountId: id });
+const scenarioParams = z.strictObject({ projectId: id, scenarioId: id });
+
+/**
+ * Every route, by name. The server registers from it, the page's client infers its types from it, the role test walks it.
+ * A route is allowed to whom `middleware/permit.ts` says.
+ */
+export const routes = {
+  signUp: { method: "POST", path: "/accounts", body: signUpSchema, status: 202 },
+  claimAccount: { method: "POST", path: "/accounts/claim", body: claimSchema, status: 200, response: sessionSchema },
+  readSession: { method: "GET", path: "/session", status: 200, response: sessionSchema },
+  signIn: { method: "POST", path: "/session", body: signInSchema, status: 200, response: sessionSchema },
+  signOut: { method: "DELETE", path: "/session", status: 204 },
+
+  listProjects: { method: "GET", path: "/projects", status: 200, response: z.array(projectSchema) },
+  createProject: { method: "POST", path: "/projects", body: projectDraftSchema, status: 201, response: projectSchema },
+  readProject: { method: "GET", path: "/projects/:projectId", params: projectParams, status: 200, response: projectSchema },
+  changeProject: {
+    method: "PATCH",
+    path: "/projects/:projectId",
+    params: projectParams,
+    body: projectDraftSchema,
+    status: 200,
+    response: projectSchema,
+  },
+
+  listMembers: {
+    method: "GET",
+    path: "/projects/:projectId/members",
+    params: projectParams,
+    status: 200,
+    response: z.array(memberSchema),
+  },
+  addMember: {
+    method: "POST",
+    path: "/projects/:projectId/members",
+    params: projectParams,
+    body: memberAddSchema,
+    status: 201,
+    response: memberSchema,
+  },
+  changeMember: {
+    method: "PATCH",
+    path: "/projects/:projectId/members/:accountId",
+    params: memberParams,
+    body: memberChangeSchema,
+    status: 200,
+    response: memberSchema,
+  },
+  removeMember: { method: "DELETE", path: "/projects/:projectId/members/:accountId", params: memberParams, status: 204 },
+
+  listScenarios: {
+    method: "GET",
+    path: "/projects/:projectId/scenarios",
+    params: projectParams,
+    status: 200,
+    response: z.array(scenarioSchema),
+  },
+  createScenario: {
+    method: "POST",
+    path: "/projects/:projectId/scenarios",
+    params: projectParams,
+    body: scenarioDraftSchema,
+    status: 201,
+    response: scenarioSchema,
+  },
+  readScenario: {
+    method: "GET",
+    path: "/projects/:projectId/scenarios/:scenarioId",
+    params: scenarioParams,
+    status: 200,
+    response: scenarioSchema,
+  },
+  saveScenario: {
+    method: "PUT",
+    path: "/projects/:projectId/scenarios/:scenarioId",
+    params: scenarioParams,
+    body: scenarioDraftSchema,
+    ifMatch: true,
+    status: 200,
+    response: scenarioSchema,
+  },
+} as const satisfies Record<string, Route>;
+
+export type RouteName = keyof typeof routes;
+
+/** Every failure: a code for programs, a sentence for people, and the fields it concerns. */
+export const failureSchema = z.strictObject({
+  error: z.strictObject({
+    code: z.string(),
+    message: z.string(),
+    fields: z.array(z.strictObject({ path: z.string(), message: z.string() })),
+    /** On a 409 of `saveScenario`: the version now stored. */
+    current: scenarioSchema.optional(),
+  }),
+});
+export type Failure = z.infer<typeof failureSchema>["error"];
