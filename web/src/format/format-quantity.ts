@@ -1,0 +1,47 @@
+import { formatExactly, formatFully, formatNumber } from "./format-number.ts";
+import { fromSi, type Measure, type Unit } from "./unit.ts";
+import { siOf, unitFor } from "./units.ts";
+
+/** A value ready to be shown: its number, its unit, and all its digits for those who ask. */
+export interface Reading {
+  readonly text: string;
+  readonly unit: string;
+  readonly full: string;
+}
+
+/** A computed value (SI in) to `digits` significant digits, in the unit chosen or the customary one. */
+export function readQuantity(value: number, measure: Measure, options: { unit?: Unit; digits?: number } = {}): Reading {
+  const unit = options.unit ?? unitFor(value, measure);
+  return reading(value, measure, unit, formatNumber(fromSi(value, unit), options.digits ?? 3));
+}
+
+/** A value somebody entered (SI in), with every digit it was given. */
+export function readInput(value: number, measure: Measure, chosen?: Unit): Reading {
+  const unit = chosen ?? unitFor(value, measure);
+  return reading(value, measure, unit, formatExactly(fromSi(value, unit)));
+}
+
+/** A computed value in running text: "77.2 μm", "38 %", "12°". */
+export function say(value: number, measure: Measure, options: { unit?: Unit; digits?: number } = {}): string {
+  return joined(readQuantity(value, measure, options));
+}
+
+/** An entered value in running text. */
+export function sayInput(value: number, measure: Measure, chosen?: Unit): string {
+  return joined(readInput(value, measure, chosen));
+}
+
+/** Number and unit kept on one line; a degree sign stands without a space. */
+export function joined({ text, unit }: Pick<Reading, "text" | "unit">): string {
+  if (unit === "") return text;
+  return unit.startsWith("°") ? text + unit : `${text}\u00a0${unit}`;
+}
+
+/** A share (0…1) as a percentage: "39.6 %". */
+export function sayShare(value: number, digits = 3): string {
+  return `${formatNumber(value * 100, digits)}\u00a0%`;
+}
+
+function reading(value: number, measure: Measure, unit: Unit, text: string): Reading {
+  return { text, unit: unit.label, full: joined({ text: formatFully(value), unit: siOf(measure) }) };
+}
