@@ -1,0 +1,32 @@
+import { defineConfig } from "vitest/config";
+
+/** One project per kind of test; `vitest run --project NAME` runs one of them. */
+const project = (name: string, include: string[], more: object = {}) => ({
+  extends: true as const,
+  test: { name, include, environment: "node", ...more },
+});
+
+const minutes = (n: number) => n * 60_000;
+
+export default defineConfig({
+  test: {
+    projects: [
+      project("unit", ["test/solver/**/*.test.ts", "test/laws/**/*.test.ts"]),
+      project("reference", ["test/reference/**/*.test.ts"], { testTimeout: minutes(1) }),
+      {
+        ...project("web", ["test/web/**/*.test.{ts,tsx}"], {
+          environment: "jsdom",
+          setupFiles: ["test/support/web.ts"],
+        }),
+        oxc: { jsx: { runtime: "automatic" as const } },
+      },
+      // Needs a database, given by the environment (`npm test` starts one).
+      project("api", ["test/api/**/*.test.ts"], { testTimeout: minutes(1), hookTimeout: minutes(1) }),
+      project("journeys", ["test/journeys/**/*.test.ts"], {
+        testTimeout: minutes(3),
+        hookTimeout: minutes(2),
+        fileParallelism: false,
+      }),
+    ],
+  },
+});
