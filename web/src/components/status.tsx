@@ -1,0 +1,57 @@
+import { useSyncExternalStore } from "react";
+import { Button } from "./button.tsx";
+import { Icon } from "./icon.tsx";
+
+interface Notice {
+  id: number;
+  text: string;
+}
+
+const shownFor = 8000;
+let notices: readonly Notice[] = [];
+let count = 0;
+const listeners = new Set<() => void>();
+
+function set(next: readonly Notice[]): void {
+  notices = next;
+  for (const listener of listeners) listener();
+}
+
+/** Tells what was done, in one sentence that is also read out. It goes away by itself: nothing that must be acted on. */
+export function announce(text: string): void {
+  const notice = { id: ++count, text };
+  set([...notices.slice(-2), notice]);
+  setTimeout(() => dismiss(notice.id), shownFor);
+}
+
+function dismiss(id: number): void {
+  set(notices.filter((notice) => notice.id !== id));
+}
+
+function subscribe(listener: () => void): () => void {
+  listeners.add(listener);
+  return () => listeners.delete(listener);
+}
+
+/** Where announcements appear; once, at the root of the page. */
+export function StatusRegion() {
+  const shown = useSyncExternalStore(subscribe, () => notices);
+  return (
+    <div
+      role="status"
+      className="pointer-events-none fixed inset-x-4 bottom-[max(16px,env(safe-area-inset-bottom))] z-40 flex flex-col items-start gap-2 print:hidden"
+    >
+      {shown.map(({ id, text }) => (
+        <div
+          key={id}
+          className="pointer-events-auto flex max-w-[480px] items-start gap-3 rounded border-[1.5px] border-ink bg-raised py-2 pr-2 pl-4"
+        >
+          <span className="py-1">{text}</span>
+          <Button kind="quiet" aria-label="Dismiss" onClick={() => dismiss(id)}>
+            <Icon name="cross" size={13} />
+          </Button>
+        </div>
+      ))}
+    </div>
+  );
+}
