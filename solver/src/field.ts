@@ -32,7 +32,7 @@ export interface Bounds {
 }
 
 /**
- * One number (or list, or choice) a kind asks for, described once: forms, sentences, validation and reports read it.
+ * One number a kind asks for, described once: forms, sentences, validation and reports read it.
  * `key` lives in saved scenarios: never renamed, never reused.
  */
 export interface Field extends Bounds {
@@ -46,8 +46,42 @@ export interface Field extends Bounds {
   readonly default?: number;
   /** A value a new scenario starts from, in SI; not a recommendation. */
   readonly initial: number;
-  /** True where the member may be absent and has no default (a ramp without an end). */
+  /** The same for a term of the base where it differs: metres, not newtons. */
+  readonly initialOnBase?: number;
+  /** True where the member may be absent and has no default number (a ramp without an end): the canonical form writes "none". */
   readonly optional?: boolean;
+  /** Follows the kind's sentence where an optional member is given: ", until {stop}". */
+  readonly clause?: string;
   /** One short line under the field. */
   readonly help?: string;
+}
+
+/**
+ * A member with a fixed list of words (shape, spacing). An option with a `field` is stored as `{ [field.key]: number }`
+ * in place of its word: `"at": { "hz": 12 }`, `"counterface": { "velocity": 0.2 }`. The first option is the one to start from.
+ */
+export interface Choice {
+  readonly key: string;
+  readonly label: string;
+  readonly options: readonly ChoiceOption[];
+}
+
+export interface ChoiceOption {
+  readonly value: string;
+  /** As a sentence or a menu says it. */
+  readonly label: string;
+  readonly field?: Field;
+}
+
+/** Rows of two numbers a kind asks for: the points of a friction table, the times and values of a record. */
+export interface Rows {
+  readonly columns: readonly [Field, Field];
+  /** What a new scenario starts from. */
+  readonly initial: readonly (readonly [number, number])[];
+}
+
+/** A fault of a kind's own rules; the path is relative to the kind: `static`, `times[2]`. */
+export interface KindFault {
+  readonly path: string;
+  readonly message: string;
 }

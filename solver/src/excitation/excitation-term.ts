@@ -1,4 +1,4 @@
-import type { Field } from "../field.ts";
+import type { Choice, Field, KindFault, Rows } from "../field.ts";
 
 /** A cos(2π hz (t − origin) + phase); amplitude in the term's unit, phase in rad. */
 export interface Harmonic {
@@ -27,12 +27,36 @@ export interface CompiledTerm {
   readonly nature: "constant" | "ramp" | "harmonic" | "transient";
   /** Rate of a ramp that never stops, per second; else 0. */
   readonly endlessRate: number;
-  /** Travels of a moving base, for settle time and lost motion: start, end and signed distance of each, in time order. */
+  /**
+   * Travels of a moving base, for settle time and lost motion: start, end and signed distance, in time order. Of many (a
+   * staircase, a record) only those a run is judged by: the first in each direction and the last. A ramp without an end
+   * travels to Infinity.
+   */
   readonly travels: readonly Travel[];
-  /** Not a sum of polynomials and harmonics (chirp): only the adaptive method applies, and reads these. */
-  readonly smooth?: { value(t: number): number; rate(t: number): number; fastestHz: number };
+  /** Not a sum of polynomials and harmonics (chirp): only the adaptive method applies, and reads this. */
+  readonly smooth?: SmoothPart;
   /** True where the term gives ÿ, not y or F (acceleration record). */
   readonly isAcceleration: boolean;
+}
+
+/**
+ * A smooth function that acts from `from` to `to` (corners of its term), zero outside. `value` and `rate` go on past both
+ * ends, so that a step that ends there reads the left-hand value.
+ */
+export interface SmoothPart {
+  readonly from: number;
+  readonly to: number;
+  value(t: number): number;
+  /** d value/dt. */
+  rate(t: number): number;
+  /** The highest frequency met, Hz: bounds the step. */
+  readonly fastestHz: number;
+}
+
+/** The points of a record, by position; times strictly rising, at least two. */
+export interface RecordPoints {
+  readonly times: ArrayLike<number>;
+  readonly values: ArrayLike<number>;
 }
 
 export interface Travel {
@@ -50,17 +74,17 @@ export interface ExcitationTerm<Kind extends string = string, Values = unknown> 
   readonly places: readonly ("force" | "base")[];
   /** Bodies it has a place on; absent: both. */
   readonly motions?: readonly ("linear" | "angular")[];
-  /** Sentences by place; `{key}` marks a value edited in place. */
+  /** Whole sentences by place, without the full stop; `{key}` marks a value edited in place. */
   readonly sentence: { readonly force?: string; readonly base?: string };
   /** `displacement` and `force` dimensions follow the place: write "force" for a member that is F or y alike. */
   readonly fields: readonly Field[];
   /** Members with a fixed list of words (shape, spacing). */
-  readonly choices?: readonly { key: string; label: string; options: readonly { value: string; label: string }[] }[];
-  /** True for records: `times` and `values`, inline or stored. */
-  readonly isRecord?: boolean;
+  readonly choices?: readonly Choice[];
+  /** Records only: `times` and `values`, one column each, inline or stored. */
+  readonly rows?: Rows;
   readonly source: string;
-  /** Faults across members; paths relative to the term. */
-  faults(term: Values): readonly { path: string; message: string }[];
+  /** Faults that no single field's bounds can tell; a member faulty in itself reads NaN, so rules about it stay silent. */
+  faults(term: Values): readonly KindFault[];
   /** `points` are the arrays of a record term, inline or stored; absent for all others. */
-  compile(term: Values, points?: { times: ArrayLike<number>; values: ArrayLike<number> }): CompiledTerm;
+  compile(term: Values, points?: RecordPoints): CompiledTerm;
 }

@@ -1,4 +1,4 @@
-import type { Field } from "../field.ts";
+import type { Field, KindFault, Rows } from "../field.ts";
 
 /** A friction law as the run needs it. v is the speed of the faces, m/s, ≥ 0; coefficients have no unit. */
 export interface CompiledLaw {
@@ -17,7 +17,12 @@ export interface CompiledLaw {
   /** Speeds at which μ(v) is not smooth (nodes of a table): the adaptive method restarts there. */
   readonly corners: readonly number[];
   /** Laws with a deflection of their own (LuGre): present only there. */
-  readonly bristle?: { readonly stiffness: number; readonly damping: number; readonly kinetic: number; readonly velocity: number };
+  readonly bristle?: {
+    readonly stiffness: number;
+    readonly damping: number;
+    readonly kinetic: number;
+    readonly velocity: number;
+  };
 }
 
 /**
@@ -33,9 +38,11 @@ export interface FrictionLaw<Model extends string = string, Values = unknown> {
   /** Part of the contact sentence; `{key}` marks a value edited in place. */
   readonly sentence: string;
   readonly fields: readonly Field[];
+  /** Laws given by measured points: `points`, rows of speed and coefficient. */
+  readonly rows?: Rows;
   /** Published source of the law. */
   readonly source: string;
-  /** Faults that no single field's bounds can tell (static below kinetic); paths are relative to the law. */
-  faults(law: Values): readonly { path: string; message: string }[];
+  /** Faults that no single field's bounds can tell (static below kinetic). A member faulty in itself reads NaN, so rules about it stay silent. */
+  faults(law: Values): readonly KindFault[];
   compile(law: Values): CompiledLaw;
 }

@@ -1,3 +1,12 @@
+import type { Term } from "../excitation/index.ts";
+import type { Law } from "../friction/index.ts";
+import type { Solid } from "../solid/index.ts";
+
+export type { Term, TermKind } from "../excitation/index.ts";
+export type { RecordTerm } from "../excitation/record-term.ts";
+export type { Law } from "../friction/index.ts";
+export type { Solid } from "../solid/index.ts";
+
 /**
  * `restband-scenario/1` in its canonical form: every default written out. SI base units (m, kg, s, N, rad, N·m),
  * frequencies in Hz, incline and phases in degrees. Angular bodies read moment of inertia for mass, torque for force,
@@ -34,26 +43,6 @@ export interface Body {
   viscous: number;
 }
 
-export type Solid =
-  | { model: "none" }
-  | { model: "equivalent-viscous"; lossFactor: number; at: "natural" | "drive" | { hz: number } }
-  | { model: "displacement-proportional"; lossFactor: number };
-
-export type Law =
-  | { model: "none" }
-  | { model: "coulomb"; static: number; kinetic: number }
-  | { model: "stribeck"; static: number; kinetic: number; velocity: number; exponent: number; fluid: number }
-  | { model: "table"; points: [number, number][] }
-  | {
-      model: "bristle";
-      static: number;
-      kinetic: number;
-      velocity: number;
-      stiffness: number;
-      damping: number;
-      fluid: number;
-    };
-
 export type Counterface = "ground" | "base" | { velocity: number };
 
 export interface Contact {
@@ -68,47 +57,6 @@ export interface Contact {
   radius: number;
   counterface: Counterface;
 }
-
-export type Term =
-  | { kind: "constant"; value: number }
-  | { kind: "ramp"; rate: number; start: number; stop: number | "none" }
-  | { kind: "step"; value: number; start: number }
-  | { kind: "harmonic"; amplitude: number; hz: number; phase: number }
-  | { kind: "unbalance"; mass: number; eccentricity: number; hz: number; phase: number }
-  | {
-      kind: "pulse";
-      shape: "half-sine" | "rectangle" | "triangle";
-      peak: number;
-      start: number;
-      duration: number;
-    }
-  | {
-      kind: "chirp";
-      amplitude: number;
-      fromHz: number;
-      toHz: number;
-      seconds: number;
-      spacing: "linear" | "log";
-    }
-  | { kind: "move"; distance: number; speed: number; acceleration: number; start: number }
-  | {
-      kind: "staircase";
-      increment: number;
-      count: number;
-      dwell: number;
-      speed: number;
-      acceleration: number;
-      start: number;
-    }
-  | RecordTerm<"record">
-  | RecordTerm<"acceleration-record">;
-
-/** Points carried inline, or named by the SHA-256 of the little-endian Float64 times, then values. */
-export type RecordTerm<Kind extends string> =
-  | { kind: Kind; times: number[]; values: number[] }
-  | { kind: Kind; digest: string; points: number };
-
-export type TermKind = Term["kind"];
 
 export interface Limit {
   quantity: string;
