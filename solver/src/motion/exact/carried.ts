@@ -1,0 +1,97 @@
+import type { Inputs } from "../inputs.ts";
+
+/** What a body is held against: fixed ground, a belt at constant velocity, or the moving base. */
+export type Carrier = "ground" | "belt" | "base";
+
+/**
+ * A body carried along: ḋ = u̇ − ẏ is given, and what is asked is the force that it takes and whether that can be had.
+ *
+ *   need = m ü − F − W + C ḋ + K d + slide·N(t),   room = grip·N(t) + constant.
+ *
+ * In a stick the carrier is the counterface, slide = 0 and grip = μs r; between the two set-valued elements of
+ * displacement-proportional damping (ḋ = 0 while the contact slips) the carrier is the base, slide = s r μk is the
+ * friction that acts, and constant = ρ k |d|.
+ */
+export class Carried {
+  need = 0;
+  needRate = 0;
+  needSecond = 0;
+  room = 0;
+  roomRate = 0;
+  roomSecond = 0;
+  /** d and ḋ at the last `evaluate`. */
+  position = 0;
+  velocity = 0;
+  /** u̇ of the carrier there, and ü. */
+  carrierVelocity = 0;
+  carrierAcceleration = 0;
+
+  private inputs!: Inputs;
+  private carrier: Carrier = "ground";
+  private inertia = 0;
+  private stiffness = 0;
+  private viscous = 0;
+  private slide = 0;
+  private grip = 0;
+  private constant = 0;
+  private start = 0;
+  private beltVelocity = 0;
+  private startBase = 0;
+
+  begin(
+    inputs: Inputs,
+    carrier: Carrier,
+    beltVelocity: number,
+    body: { inertia: number; stiffness: number; viscous: number },
+    friction: { slide: number; grip: number; constant: number },
+    position: number,
+  ): void {
+    this.inputs = inputs;
+    this.carrier = carrier;
+    this.beltVelocity = carrier === "belt" ? beltVelocity : 0;
+    this.inertia = body.inertia;
+    this.stiffness = body.stiffness;
+    this.viscous = body.viscous;
+    this.slide = friction.slide;
+    this.grip = friction.grip;
+    this.constant = friction.constant;
+    this.start = position;
+    this.startBase = inputs.evaluate(0).base;
+  }
+
+  evaluate(tau: number): void {
+    const v = this.inputs.evaluate(tau);
+    const isOnBase = this.carrier === "base";
+    this.carrierVelocity = isOnBase ? v.baseVelocity : this.beltVelocity;
+    this.carrierAcceleration = isOnBase ? v.baseAcceleration : 0;
+    this.velocity = isOnBase ? 0 : this.beltVelocity - v.baseVelocity;
+    this.position = isOnBase ? this.start : this.start + this.beltVelocity * tau - (v.base - this.startBase);
+    this.need = this.slide * v.normal - v.force + this.stiffness * this.position;
+    this.needRate = this.slide * v.normalRate - v.forceRate;
+    this.needSecond = this.slide * v.normalSecond - v.forceSecond;
+    if (isOnBase) {
+      this.need += this.inertia * v.baseAcceleration;
+      this.needRate += this.inertia * v.baseJerk;
+      this.needSecond += this.inertia * v.baseSnap;
+    } else {
+      this.need += this.viscous * this.velocity;
+      this.needRate += this.stiffness * this.velocity - this.viscous * v.baseAcceleration;
+      this.needSecond -= this.stiffness * v.baseAcceleration + this.viscous * v.baseJerk;
+    }
+    this.room = this.grip * v.normal + this.constant;
+    this.roomRate = this.grip * v.normalRate;
+    this.roomSecond = this.grip * v.normalSecond;
+  }
+
+  /** A bound of |need‴| and of |room‴| together, good to the inputs' next corner. */
+  thirdBound(): number {
+    const { inputs } = this;
+    const ripple = (Math.abs(this.slide) + this.grip) * inputs.rippleBound(3);
+    const force = inputs.forceBound(3) + 6 * Math.abs(inputs.force[3]);
+    const jerkPolynomial = 6 * Math.abs(inputs.base[3]);
+    if (this.carrier === "base") return ripple + force + this.inertia * inputs.baseBound(5);
+    return (
+      ripple + force + this.stiffness * (inputs.baseBound(3) + jerkPolynomial) + this.viscous * inputs.baseBound(4)
+    );
+  }
+}

@@ -1,0 +1,105 @@
+import type { Problem } from "../../scenario/problem.ts";
+import { Inputs } from "../inputs.ts";
+import { Carried, type Carrier } from "./carried.ts";
+import { Oscillation } from "./oscillation.ts";
+import type { Stance } from "./stance.ts";
+
+/** Which of the three forms a segment has: a slip; a slip with ḋ held at 0 by the spring's own element; a stick. */
+export type Form = "slip" | "lock" | "stick";
+
+/** The closed forms of one problem, set up for one segment at a time. */
+export class ClosedForm {
+  readonly inputs: Inputs;
+  readonly oscillation: Oscillation;
+  readonly carried = new Carried();
+  /** c + c_h. */
+  readonly viscous: number;
+  /** ρ k, the slope of the second set-valued element, N/m. */
+  readonly elementSlope: number;
+  readonly hasElement: boolean;
+  /** μs r and μk r: force per N of pressing. */
+  readonly grip: number;
+  readonly slide: number;
+  readonly contactCarrier: Carrier;
+  form: Form = "slip";
+
+  private readonly body = { inertia: 0, stiffness: 0, viscous: 0 };
+  private readonly friction = { slide: 0, grip: 0, constant: 0 };
+
+  constructor(readonly problem: Problem) {
+    this.inputs = new Inputs(problem);
+    this.oscillation = new Oscillation(this.inputs.omega.length + 1);
+    this.viscous = problem.viscous + problem.solid.viscous;
+    this.elementSlope = problem.solid.proportional * problem.stiffness;
+    this.hasElement = this.elementSlope > 0;
+    this.grip = problem.law.atRest * problem.radius;
+    this.slide = (problem.law.constant ?? NaN) * problem.radius;
+    this.contactCarrier = problem.counterface;
+    this.body.inertia = problem.inertia;
+    this.body.viscous = this.viscous;
+  }
+
+  /** Locates the inputs at the stance and makes its closed form ready; `oscillation` or `carried` then evaluate in τ. */
+  begin(s: Stance): void {
+    this.inputs.locate(s.t);
+    this.take(s);
+  }
+
+  /** As `begin`, for inputs already located at s.t. */
+  take(s: Stance): void {
+    const { inputs, problem } = this;
+    if (s.contact === 0) return this.takeStick(s);
+    const slide = s.contact * this.slide;
+    if (s.spring === 0) {
+      this.form = "lock";
+      this.friction.slide = slide;
+      this.friction.grip = 0;
+      this.friction.constant = this.elementSlope * Math.abs(s.position);
+      this.body.stiffness = problem.stiffness;
+      this.carried.begin(inputs, "base", 0, this.body, this.friction, s.position);
+      return;
+    }
+    this.form = "slip";
+    const stiffness = this.stiffnessOf(s);
+    this.oscillation.begin(
+      inputs,
+      problem.inertia,
+      stiffness,
+      this.viscous,
+      slide,
+      s.position,
+      s.velocity,
+      s.acceleration,
+    );
+  }
+
+  /** k (1 ± ρ) by the quadrant, or k where the element holds or is absent. */
+  stiffnessOf(s: Stance): number {
+    return this.problem.stiffness + s.spring * s.side * this.elementSlope;
+  }
+
+  /** The counterface's velocity u̇ at the inputs' last evaluated instant. */
+  counterfaceVelocity(): number {
+    if (this.contactCarrier === "base") return this.inputs.values.baseVelocity;
+    return this.problem.beltVelocity;
+  }
+
+  /** True where u̇ = ẏ up to the next corner, so that a stuck body keeps its deflection. */
+  isCarriedWithBase(): boolean {
+    if (this.contactCarrier === "base") return true;
+    const { base } = this.inputs;
+    const isSteady = base[2] === 0 && base[3] === 0 && this.inputs.baseBound(1) === 0;
+    return isSteady && base[1] === this.problem.beltVelocity;
+  }
+
+  private takeStick(s: Stance): void {
+    this.form = "stick";
+    const isHeldByBoth = s.spring === 0;
+    this.friction.slide = 0;
+    this.friction.grip = this.grip;
+    this.friction.constant = isHeldByBoth ? this.elementSlope * Math.abs(s.position) : 0;
+    this.body.stiffness = this.stiffnessOf(s);
+    const { contactCarrier: carrier, problem } = this;
+    this.carried.begin(this.inputs, carrier, problem.beltVelocity, this.body, this.friction, s.position);
+  }
+}

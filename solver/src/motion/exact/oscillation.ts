@@ -1,0 +1,331 @@
+import type { Inputs } from "../inputs.ts";
+import { Chain } from "./chain.ts";
+
+const terms = 26;
+const unitRoundoff = 2 ** -53;
+
+/**
+ * The closed form of one slip: m d̈ + C ḋ + K d = F + W − m ÿ + f, with f = −slide·N(t) (slide = s r μk), from the
+ * state (d₀, ḋ₀) at the origin of the inputs to their next corner. Deflections are told from d₀, so that a short slip
+ * far out on the spring keeps its digits.
+ *
+ * d − d₀ = ḋ₀ S + Σ A_j S_j + Σ harmonics, with the chain S, S_j of `chain.ts` and A_j τ^j/j! the polynomial part of
+ * (F + W − mÿ + f − K d₀)/m. A harmonic H e^{iΩτ} answers with P e^{iΩτ}, P = H/(ω₀² − Ω² + 2iσΩ), less the free motion
+ * that P starts with; where iΩ is within 5 % of the root λ = −σ + iω_d that difference cancels and is written as
+ * τ e^{λτ} (e^{(iΩ−λ)τ} − 1)/((iΩ−λ)τ), which stays exact at resonance. While every rate times τ is ≤ 1 all of it is
+ * one power series instead: so a slip that starts with v = a = 0 has v ~ t² to full relative accuracy.
+ */
+export class Oscillation {
+  /** d, ḋ, d̈, d⃛ and d⁗ at the last `evaluate`. */
+  position = 0;
+  velocity = 0;
+  acceleration = 0;
+  jerk = 0;
+  snap = 0;
+  /** What rounding may have done to `velocity`: ulps of the sum of its terms' magnitudes, m/s. */
+  noise = 0;
+
+  /** K/m = ω₀². */
+  squared = 0;
+  private sigma = 0;
+  private start = 0;
+  private startVelocity = 0;
+  /** d̈ at the start. */
+  private known = 0;
+  private readonly chain = new Chain();
+  /** A_j, so that the polynomial part is Σ A_j τ^j/j!, m/s². */
+  private readonly push = new Float64Array(4);
+  private count = 0;
+  private readonly omega: Float64Array;
+  private readonly re: Float64Array;
+  private readonly im: Float64Array;
+  /** P of each harmonic; 0 for the resonant ones. */
+  private readonly particularRe: Float64Array;
+  private readonly particularIm: Float64Array;
+  private readonly isResonant: Uint8Array;
+  private sumRe = 0;
+  private sumRate = 0;
+  private magnitude = 0;
+  private readonly series = new Float64Array(terms);
+  private hasSeries = false;
+  /** Up to this τ the power series is used. */
+  private seriesReach = Infinity;
+  /** ∂³ and ∂² bounds of the harmonic forcing per m. */
+  private secondForcing = 0;
+  private thirdForcing = 0;
+  private readonly response = { position: 0, velocity: 0 };
+  private readonly phi = { re: 0, im: 0 };
+  /** Room for the harmonics' derivatives while the series is made. */
+  private readonly turned: Float64Array;
+
+  constructor(room: number) {
+    this.omega = new Float64Array(room);
+    this.re = new Float64Array(room);
+    this.im = new Float64Array(room);
+    this.particularRe = new Float64Array(room);
+    this.particularIm = new Float64Array(room);
+    this.isResonant = new Uint8Array(room);
+    this.turned = new Float64Array(2 * room);
+  }
+
+  /**
+   * Starts a slip at the inputs' origin. `acceleration` is d̈ there where it is known better than the equation tells it
+   * (NaN where not): at break-away the force is exactly what could just be held, and a few ulps off that would decide
+   * whether the body moves on or turns back.
+   */
+  begin(
+    inputs: Inputs,
+    inertia: number,
+    stiffness: number,
+    viscous: number,
+    slide: number,
+    position: number,
+    velocity: number,
+    acceleration: number,
+  ): void {
+    this.sigma = viscous / (2 * inertia);
+    this.squared = stiffness / inertia;
+    this.chain.set(this.sigma, this.squared);
+    this.start = position;
+    this.startVelocity = velocity;
+    const { push } = this;
+    const { force, acceleration: base } = inputs;
+    push[0] = (force[0] - slide * inputs.normal) / inertia - base[0] - this.squared * position;
+    push[1] = force[1] / inertia - base[1];
+    push[2] = 2 * (force[2] / inertia - base[2]);
+    push[3] = 6 * (force[3] / inertia - base[3]);
+    this.takeHarmonics(inputs, inertia, slide);
+    const byEquation = this.startAcceleration();
+    this.known = Number.isNaN(acceleration) ? byEquation : acceleration;
+    push[0] += this.known - byEquation;
+    const fastest = Math.max(2 * this.sigma, Math.sqrt(this.squared), inputs.fastest());
+    this.seriesReach = fastest > 0 ? 1 / fastest : Infinity;
+    this.hasSeries = false;
+  }
+
+  private startAcceleration(): number {
+    let sum = this.push[0];
+    for (let i = 0; i < this.count; i++) sum += this.re[i];
+    return sum - 2 * this.sigma * this.startVelocity;
+  }
+
+  /** The fastest rate of the free motion, 1/s, and the time after which its fast part has died away (Infinity: never). */
+  get freeRates(): { fast: number; slow: number; fastDies: number } {
+    const q = this.chain.discriminant;
+    if (q <= 0) {
+      const natural = Math.sqrt(this.squared);
+      return { fast: natural, slow: 0, fastDies: this.sigma > 0 ? 40 / this.sigma : Infinity };
+    }
+    const fast = this.sigma + Math.sqrt(q);
+    return { fast, slow: this.squared / fast, fastDies: 40 / fast };
+  }
+
+  evaluate(tau: number): void {
+    if (tau <= this.seriesReach) this.evaluateSeries(tau);
+    else this.evaluateClosed(tau);
+  }
+
+  /** Bound of |d⁗| on [τ, τ + reach], from the energy of the twice differentiated equation (see `first-zero.ts`). */
+  snapBound(reach: number): number {
+    return Math.sqrt(this.snap * this.snap + this.squared * this.jerk * this.jerk) + reach * this.thirdForcing;
+  }
+
+  /** Bound of |d⃛| on [τ, τ + reach], likewise. */
+  jerkBound(reach: number): number {
+    const now = this.jerk * this.jerk + this.squared * this.acceleration * this.acceleration;
+    return Math.sqrt(now) + reach * this.secondForcing;
+  }
+
+  private takeHarmonics(inputs: Inputs, inertia: number, slide: number): void {
+    this.count = 0;
+    this.sumRe = this.sumRate = this.magnitude = 0;
+    this.secondForcing = Math.abs(this.push[2]);
+    this.thirdForcing = Math.abs(this.push[3]);
+    for (let i = 0; i < inputs.count; i++) {
+      const w = inputs.omega[i];
+      const re = inputs.forceRe[i] / inertia + w * w * inputs.baseRe[i];
+      const im = inputs.forceIm[i] / inertia + w * w * inputs.baseIm[i];
+      this.addHarmonic(w, re, im);
+    }
+    if (inputs.rippleOmega > 0) {
+      const share = -slide / inertia;
+      this.addHarmonic(inputs.rippleOmega, share * inputs.rippleRe, share * inputs.rippleIm);
+    }
+  }
+
+  private addHarmonic(omega: number, re: number, im: number): void {
+    const i = this.count++;
+    this.omega[i] = omega;
+    this.re[i] = re;
+    this.im[i] = im;
+    const amplitude = Math.hypot(re, im);
+    this.secondForcing += amplitude * omega ** 2;
+    this.thirdForcing += amplitude * omega ** 3;
+    const { sigma, squared } = this;
+    const damped = Math.sqrt(Math.max(0, -this.chain.discriminant));
+    this.isResonant[i] = damped > 0 && Math.hypot(sigma, omega - damped) < 0.05 * Math.sqrt(squared) ? 1 : 0;
+    if (this.isResonant[i]) {
+      this.particularRe[i] = this.particularIm[i] = 0;
+      this.magnitude += amplitude / damped;
+      return;
+    }
+    const natural = Math.sqrt(squared);
+    const zRe = (natural - omega) * (natural + omega);
+    const zIm = 2 * sigma * omega;
+    const z2 = zRe * zRe + zIm * zIm;
+    const pRe = (re * zRe + im * zIm) / z2;
+    const pIm = (im * zRe - re * zIm) / z2;
+    this.particularRe[i] = pRe;
+    this.particularIm[i] = pIm;
+    this.sumRe += pRe;
+    this.sumRate -= omega * pIm;
+    this.magnitude += Math.hypot(pRe, pIm) * omega;
+  }
+
+  private evaluateClosed(tau: number): void {
+    const { chain, push, sigma, squared } = this;
+    chain.evaluate(tau);
+    const { rate, impulse, integrals } = chain;
+    const free = this.startVelocity - this.sumRate;
+    const fromRest = rate + 2 * sigma * impulse;
+    let position = free * impulse - this.sumRe * fromRest;
+    let velocity = free * rate + this.sumRe * squared * impulse + push[0] * impulse;
+    position += push[0] * integrals[0] + push[1] * integrals[1] + push[2] * integrals[2] + push[3] * integrals[3];
+    velocity += push[1] * integrals[0] + push[2] * integrals[1] + push[3] * integrals[2];
+    let forcing = push[0] + tau * (push[1] + tau * (push[2] / 2 + (tau * push[3]) / 6));
+    let forcingRate = push[1] + tau * (push[2] + (tau * push[3]) / 2);
+    let forcingSecond = push[2] + tau * push[3];
+    for (let i = 0; i < this.count; i++) {
+      const w = this.omega[i];
+      const c = Math.cos(w * tau);
+      const s = Math.sin(w * tau);
+      const value = this.re[i] * c - this.im[i] * s;
+      forcing += value;
+      forcingRate -= w * (this.re[i] * s + this.im[i] * c);
+      forcingSecond -= w * w * value;
+      if (this.isResonant[i]) {
+        this.respondResonant(i, tau, c, s);
+        position += this.response.position;
+        velocity += this.response.velocity;
+      } else {
+        position += this.particularRe[i] * c - this.particularIm[i] * s;
+        velocity -= w * (this.particularRe[i] * s + this.particularIm[i] * c);
+      }
+    }
+    this.position = this.start + position;
+    this.velocity = velocity;
+    this.acceleration = forcing - 2 * sigma * velocity - squared * position;
+    this.jerk = forcingRate - 2 * sigma * this.acceleration - squared * velocity;
+    this.snap = forcingSecond - 2 * sigma * this.jerk - squared * this.acceleration;
+    this.noise =
+      8 *
+      unitRoundoff *
+      (Math.abs(free * rate) +
+        Math.abs(push[0] * impulse) +
+        Math.abs(push[1] * integrals[0]) +
+        this.magnitude +
+        Math.abs(this.sumRe * squared * impulse) +
+        Math.abs(velocity));
+  }
+
+  /** The response from rest to a harmonic next to resonance: Im-free form of exp[λ, λ̄, iΩ]τ, see the class comment. */
+  private respondResonant(i: number, tau: number, c: number, s: number): void {
+    const w = this.omega[i];
+    const damped = Math.sqrt(-this.chain.discriminant);
+    const decay = Math.exp(-this.sigma * tau);
+    const lc = decay * Math.cos(damped * tau);
+    const ls = decay * Math.sin(damped * tau);
+    // near = τ e^{λτ} φ₁(δτ) = (e^{iΩτ} − e^{λτ})/δ, δ = iΩ − λ
+    const difference = w - damped;
+    const distance = this.sigma * this.sigma + difference * difference;
+    let nearRe: number;
+    let nearIm: number;
+    if (distance * tau * tau < 1) {
+      phi1(this.sigma * tau, difference * tau, this.phi);
+      nearRe = tau * (lc * this.phi.re - ls * this.phi.im);
+      nearIm = tau * (lc * this.phi.im + ls * this.phi.re);
+    } else {
+      nearRe = ((c - lc) * this.sigma + (s - ls) * difference) / distance;
+      nearIm = ((s - ls) * this.sigma - (c - lc) * difference) / distance;
+    }
+    // far = (e^{iΩτ} − e^{λ̄τ})/(iΩ − λ̄)
+    const sum = w + damped;
+    const size = this.sigma * this.sigma + sum * sum;
+    const farRe = ((c - lc) * this.sigma + (s + ls) * sum) / size;
+    const farIm = ((s + ls) * this.sigma - (c - lc) * sum) / size;
+    // Both obey D' = iΩ D + e^{bτ}; G = (near − far)/(2i ω_d).
+    const gRe = (nearIm - farIm) / (2 * damped);
+    const gIm = -(nearRe - farRe) / (2 * damped);
+    const rateRe = -w * gIm + ls / damped;
+    const rateIm = w * gRe;
+    this.response.position = this.re[i] * gRe - this.im[i] * gIm;
+    this.response.velocity = this.re[i] * rateRe - this.im[i] * rateIm;
+  }
+
+  private evaluateSeries(tau: number): void {
+    if (!this.hasSeries) this.makeSeries();
+    const { series } = this;
+    let p = 0;
+    let v = 0;
+    let a = 0;
+    let j = 0;
+    let s = 0;
+    for (let n = terms - 1; n >= 1; n--) {
+      const c = series[n];
+      p = p * tau + c;
+      v = v * tau + n * c;
+      if (n >= 2) a = a * tau + n * (n - 1) * c;
+      if (n >= 3) j = j * tau + n * (n - 1) * (n - 2) * c;
+      if (n >= 4) s = s * tau + n * (n - 1) * (n - 2) * (n - 3) * c;
+    }
+    this.position = this.start + p * tau;
+    this.velocity = v;
+    this.acceleration = a;
+    this.jerk = j;
+    this.snap = s;
+    this.noise = 4 * unitRoundoff * (Math.abs(this.startVelocity) + Math.abs(v) + Math.abs(tau * series[2]));
+  }
+
+  /** Coefficients of (d − d₀) = Σ c_n τ^n from the equation itself. */
+  private makeSeries(): void {
+    const { series, push, sigma, squared, count } = this;
+    series[0] = 0;
+    series[1] = this.startVelocity;
+    const turned = this.turned;
+    for (let i = 0; i < count; i++) {
+      turned[2 * i] = this.re[i];
+      turned[2 * i + 1] = this.im[i];
+    }
+    let factorial = 1;
+    for (let n = 0; n + 2 < terms; n++) {
+      let forcing = n < 4 ? push[n] / factorial : 0;
+      for (let i = 0; i < count; i++) {
+        const re = turned[2 * i];
+        const im = turned[2 * i + 1];
+        forcing += re;
+        const step = this.omega[i] / (n + 1);
+        turned[2 * i] = -im * step;
+        turned[2 * i + 1] = re * step;
+      }
+      series[n + 2] =
+        n === 0
+          ? this.known / 2
+          : (forcing - 2 * sigma * (n + 1) * series[n + 1] - squared * series[n]) / ((n + 2) * (n + 1));
+      factorial *= n + 1;
+    }
+    this.hasSeries = true;
+  }
+}
+
+/** φ₁(z) = (e^z − 1)/z for z = x + iy with |z| < 1, by its series. */
+function phi1(x: number, y: number, out: { re: number; im: number }): void {
+  let re = 1;
+  let im = 0;
+  for (let n = 22; n >= 1; n--) {
+    const r = re;
+    re = 1 + (x * r - y * im) / (n + 1);
+    im = (x * im + y * r) / (n + 1);
+  }
+  out.re = re;
+  out.im = im;
+}

@@ -1,0 +1,346 @@
+import { firstZero, type Watched, type Work } from "../../numerics/first-zero.ts";
+import type { EventKind, Phase } from "../../result.ts";
+import type { Problem } from "../../scenario/problem.ts";
+import { ClosedForm } from "./closed-form.ts";
+import type { Stance } from "./stance.ts";
+import { CarriedSlipWatch, CarriedStretchWatch, HoldWatch, SlipWatch, StretchWatch, heldTolerance } from "./watch.ts";
+
+/** What happened at the end of a step; null where only the closed form changes (a corner, a spring passing its free length). */
+export type Happening = Extract<EventKind, "stop" | "turn" | "break-away"> | null;
+
+/** What ends a segment, the earliest first. */
+type Cause = "corner" | "contact" | "element" | "side";
+
+/**
+ * Takes a body from one happening to the next by closed form: the rules of stick and slip at v_r = 0, of the second
+ * set-valued element at ḋ = 0, and at the corners of the inputs (right-hand values; what falls on a corner is not lost).
+ * It knows no events list and no end of the run: `exact-run.ts` records, `look-ahead.ts` only asks.
+ */
+export class Stepper {
+  readonly form: ClosedForm;
+  private readonly slipWatch: SlipWatch;
+  private readonly stretchWatch: StretchWatch;
+  private readonly stretchRateWatch: RateWatch;
+  private readonly holdWatch: HoldWatch;
+  private readonly carriedWatch: CarriedStretchWatch;
+  private readonly carriedSlipWatch: CarriedSlipWatch;
+  private first = Infinity;
+  private cause: Cause = "corner";
+
+  constructor(
+    private readonly problem: Problem,
+    private readonly work: Work,
+  ) {
+    this.form = new ClosedForm(problem);
+    const { oscillation, inputs, carried } = this.form;
+    this.slipWatch = new SlipWatch(oscillation, inputs);
+    this.slipWatch.carrier = this.form.contactCarrier;
+    this.slipWatch.beltVelocity = problem.beltVelocity;
+    this.stretchWatch = new StretchWatch(oscillation);
+    this.stretchRateWatch = new RateWatch(oscillation);
+    this.holdWatch = new HoldWatch(carried);
+    this.carriedWatch = new CarriedStretchWatch(carried, inputs);
+    this.carriedSlipWatch = new CarriedSlipWatch(inputs);
+    this.carriedSlipWatch.beltVelocity = problem.beltVelocity;
+  }
+
+  get outOfWork(): boolean {
+    return this.work.spent > this.work.allowed;
+  }
+
+  /** Places a body at t = 0; the happening is `break-away` where it starts at rest and is not held. */
+  start(s: Stance): Happening {
+    const { inputs } = this.form;
+    const { initial, isRelative } = this.problem;
+    s.t = 0;
+    inputs.locate(0);
+    const v = inputs.evaluate(0);
+    s.position = initial.displacement - (isRelative ? 0 : v.base);
+    s.velocity = initial.velocity - (isRelative ? 0 : v.baseVelocity);
+    s.acceleration = NaN;
+    const carrier = isRelative ? 0 : this.form.counterfaceVelocity();
+    const slip = initial.velocity - carrier;
+    const scale = Math.max(Math.abs(initial.velocity), Math.abs(carrier));
+    if (Math.abs(slip) <= 1e-12 * scale) return this.meet(s, 0);
+    s.contact = slip > 0 ? 1 : -1;
+    this.orient(s);
+    return null;
+  }
+
+  /** Takes `s` to the end of its segment, not beyond `limit`, and tells what happened there. */
+  step(s: Stance, limit: number): Happening {
+    const { form } = this;
+    const end = Math.min(form.inputs.end, limit);
+    form.take(s);
+    this.first = end - s.t;
+    this.cause = "corner";
+    if (form.form === "slip") this.watchSlip(s);
+    else if (form.form === "stick") this.watchStick(s);
+    else this.watchLock(s);
+    if (this.outOfWork) return null;
+    const tau = this.first;
+    if (this.cause === "corner") return this.pass(s, end, end < limit || end === form.inputs.end);
+    if (s.t + tau >= end && end === form.inputs.end) return this.pass(s, end, true);
+    this.carry(s, tau);
+    if (this.cause === "contact") return form.form === "stick" ? this.breakAway(s) : this.meet(s, s.contact);
+    if (this.cause === "element") return this.meetElement(s);
+    s.side = -s.side as Phase;
+    return null;
+  }
+
+  private watchSlip(s: Stance): void {
+    const { oscillation, hasElement, inputs, contactCarrier } = this.form;
+    const { fast } = oscillation.freeRates;
+    const rate = Math.max(fast, inputs.fastest());
+    const scale = rate > 0 ? 2 / rate : Infinity;
+    this.slipWatch.sign = s.contact;
+    this.look(this.slipWatch, scale, "contact");
+    if (!hasElement) return;
+    this.stretchWatch.sign = s.side;
+    this.look(this.stretchWatch, scale, "side");
+    if (contactCarrier === "base" || this.form.isCarriedWithBase()) return;
+    this.stretchRateWatch.sign = s.spring;
+    this.look(this.stretchRateWatch, scale, "element");
+  }
+
+  private watchStick(s: Stance): void {
+    const rate = this.form.inputs.fastest();
+    const scale = rate > 0 ? 2 / rate : Infinity;
+    this.holdWatch.sign = 1;
+    this.look(this.holdWatch, scale, "contact");
+    this.holdWatch.sign = -1;
+    this.look(this.holdWatch, scale, "contact");
+    if (!this.form.hasElement || s.spring === 0) return;
+    this.carriedWatch.isRate = true;
+    this.carriedWatch.sign = s.spring;
+    this.look(this.carriedWatch, scale, "element");
+    this.carriedWatch.isRate = false;
+    this.carriedWatch.sign = s.side;
+    this.look(this.carriedWatch, scale, "side");
+  }
+
+  private watchLock(s: Stance): void {
+    const rate = this.form.inputs.fastest();
+    const scale = rate > 0 ? 2 / rate : Infinity;
+    this.holdWatch.sign = 1;
+    this.look(this.holdWatch, scale, "element");
+    this.holdWatch.sign = -1;
+    this.look(this.holdWatch, scale, "element");
+    this.carriedSlipWatch.sign = s.contact;
+    this.look(this.carriedSlipWatch, scale, "contact");
+  }
+
+  private look(watched: Watched, scale: number, cause: Cause): void {
+    const tau = firstZero(watched, this.first, scale, this.work);
+    if (!(tau <= this.first)) return;
+    this.first = tau;
+    this.cause = cause;
+  }
+
+  /** Moves the stance by τ along its closed form and locates the inputs there. */
+  private carry(s: Stance, tau: number): void {
+    const { form } = this;
+    let at = tau;
+    if (form.form === "slip") {
+      form.oscillation.evaluate(at);
+      s.position = form.oscillation.position;
+      s.velocity = form.oscillation.velocity;
+    } else {
+      if (this.cause === "contact" || this.cause === "element") at = this.atLimit(tau);
+      form.carried.evaluate(at);
+      s.position = form.carried.position;
+      s.velocity = form.carried.velocity;
+    }
+    s.t += at;
+    s.acceleration = NaN;
+    form.inputs.locate(s.t);
+    form.inputs.evaluate(0);
+  }
+
+  /** The stick was found to end where need passes room (1 + tolerance); its time is where need equals room, a hair earlier. */
+  private atLimit(tau: number): number {
+    const { carried } = this.form;
+    carried.evaluate(tau);
+    const sign = Math.sign(carried.need);
+    const over = sign * carried.need - carried.room;
+    const rate = sign * carried.needRate - carried.roomRate;
+    const isEnd = Math.abs(over) <= 1e-9 * carried.room && rate > 0;
+    return isEnd ? Math.max(0, tau - over / rate) : tau;
+  }
+
+  /** The end of a stick: the force is exactly what could just be held, so the acceleration is known exactly. */
+  private breakAway(s: Stance): Happening {
+    const { carried, inputs } = this.form;
+    this.placeOnCounterface(s);
+    const side = -Math.sign(carried.need) as Phase;
+    const relative = (side * ((this.form.grip - this.form.slide) * inputs.values.normal)) / this.problem.inertia;
+    const isMoved = this.form.contactCarrier === "base";
+    s.acceleration = isMoved ? relative : relative - (this.problem.isRelative ? 0 : inputs.values.baseAcceleration);
+    s.contact = side;
+    this.orient(s);
+    return "break-away";
+  }
+
+  /** Sets ḋ = u̇ − ẏ exactly. */
+  private placeOnCounterface(s: Stance): void {
+    const { form } = this;
+    s.velocity = form.contactCarrier === "base" ? 0 : this.problem.beltVelocity - form.inputs.values.baseVelocity;
+  }
+
+  /**
+   * Judges a body whose v_r is 0 at s.t (inputs located there): held, it sticks; else it slips to the side of the force
+   * that cannot be held. `before` is the phase it came in (0: the start of the run, or a stick that a corner has ended).
+   */
+  private meet(s: Stance, before: Phase): Happening {
+    const { form, problem } = this;
+    this.placeOnCounterface(s);
+    s.contact = 0;
+    s.acceleration = NaN;
+    this.orient(s);
+    form.take(s);
+    form.carried.evaluate(0);
+    const { need, room } = form.carried;
+    const canHold = room > 0 || before === 0 || problem.model !== "none";
+    if (canHold && Math.abs(need) <= room * (1 + heldTolerance)) return before === 0 ? null : "stop";
+    s.contact = need > 0 ? -1 : need < 0 ? 1 : before;
+    this.orient(s);
+    if (before === 0) return "break-away";
+    return s.contact === before ? null : "turn";
+  }
+
+  /** ḋ has reached 0, or has been held there as long as it could be; the contact slips or sticks on. */
+  private meetElement(s: Stance): Happening {
+    const { form } = this;
+    s.velocity = 0;
+    if (s.contact === 0) return this.turnInStick(s);
+    if (form.form === "lock") {
+      s.acceleration = 0; // need is exactly what could just be held
+      s.spring = -Math.sign(form.carried.need) as Phase;
+      this.orientSide(s);
+      return null;
+    }
+    this.orient(s);
+    return null;
+  }
+
+  /** The base turns under a stuck body: S changes its sign at once, and what is left over may be too much for the contact. */
+  private turnInStick(s: Stance): Happening {
+    const { form } = this;
+    s.spring = -s.spring as Phase;
+    form.take(s);
+    form.carried.evaluate(0);
+    const { need, room } = form.carried;
+    if (Math.abs(need) <= room * (1 + heldTolerance)) return null;
+    s.contact = -Math.sign(need) as Phase;
+    this.orient(s);
+    return "break-away";
+  }
+
+  /** Chooses the quadrant (signs of ḋ and d just after s.t) or the lock. Inputs are located at s.t. */
+  private orient(s: Stance): void {
+    const { form } = this;
+    if (!form.hasElement) {
+      s.spring = 1;
+      s.side = 1;
+      return;
+    }
+    if (s.contact === 0) s.spring = this.springOfStick(s);
+    else if (form.isCarriedWithBase()) s.spring = s.contact;
+    else if (s.velocity !== 0) s.spring = Math.sign(s.velocity) as Phase;
+    else s.spring = this.springOfSlip(s);
+    this.orientSide(s);
+  }
+
+  private orientSide(s: Stance): void {
+    s.side = (Math.sign(s.position) || s.spring || 1) as Phase;
+  }
+
+  private springOfStick(s: Stance): Phase {
+    if (this.form.isCarriedWithBase()) return 0;
+    if (s.velocity !== 0) return Math.sign(s.velocity) as Phase;
+    return (-Math.sign(this.form.inputs.evaluate(0).baseAcceleration) || 1) as Phase;
+  }
+
+  /** At ḋ = 0 in a slip: 0 where |need| ≤ ρ k |d|, else the side of the force that cannot be held. */
+  private springOfSlip(s: Stance): Phase {
+    const { form } = this;
+    const wasSpring = s.spring;
+    s.spring = 0;
+    form.take(s);
+    form.carried.evaluate(0);
+    s.spring = wasSpring;
+    const { need, room } = form.carried;
+    if (Math.abs(need) <= room * (1 + heldTolerance)) return 0;
+    return -Math.sign(need) as Phase;
+  }
+
+  /** A corner of the inputs, or the limit of the step: right-hand values from here on. */
+  private pass(s: Stance, end: number, isCorner: boolean): Happening {
+    const { form, problem } = this;
+    const tau = end - s.t;
+    const wasSlip = form.form === "slip";
+    const isZero = wasSlip && this.cause === "contact";
+    const startSpeed = Math.abs(form.inputs.evaluate(0).baseVelocity);
+    if (wasSlip) form.oscillation.evaluate(tau);
+    else form.carried.evaluate(tau);
+    const moved = wasSlip ? form.oscillation : form.carried;
+    s.position = moved.position;
+    s.velocity = moved.velocity;
+    s.acceleration = NaN;
+    const before = form.inputs.evaluate(tau).baseVelocity;
+    const carrierBefore = form.counterfaceVelocity();
+    s.t = end;
+    if (!isCorner) return null;
+    form.inputs.locate(end);
+    const after = form.inputs.evaluate(0).baseVelocity;
+    const carrierAfter = form.counterfaceVelocity();
+    const scale = Math.max(startSpeed, Math.abs(before), Math.abs(after));
+    const isJump = Math.abs(after - before) > 1e-12 * scale;
+    if (isJump && !problem.isRelative) s.velocity += before - after;
+    const slipsNow = isJump && form.contactCarrier === "base" && !problem.isRelative;
+    return this.enter(s, slipsNow ? carrierBefore - carrierAfter : 0, isZero, 1e-12 * scale);
+  }
+
+  /** What a corner does to the contact: `jump` is added to v_r there. */
+  private enter(s: Stance, jump: number, isZero: boolean, tolerance: number): Happening {
+    const { form } = this;
+    const was = s.contact;
+    if (was === 0 && jump === 0) return this.meet(s, 0);
+    if (was !== 0 && jump === 0) {
+      if (isZero) return this.meet(s, was);
+      this.orient(s);
+      return null;
+    }
+    const slip = s.velocity; // v_r = ḋ: only a base that jumps under its own counterface gets here
+    if (Math.abs(slip) <= tolerance) return this.meet(s, was);
+    s.contact = slip > 0 ? 1 : -1;
+    form.inputs.evaluate(0);
+    this.orient(s);
+    if (was === 0) return "break-away";
+    return s.contact === was ? null : "turn";
+  }
+}
+
+/** sign·ḋ of an oscillation. */
+class RateWatch implements Watched {
+  value = 0;
+  first = 0;
+  second = 0;
+  noise = 0;
+  sign = 1;
+
+  constructor(private readonly oscillation: ClosedForm["oscillation"]) {}
+
+  evaluate(tau: number): void {
+    const { oscillation, sign } = this;
+    oscillation.evaluate(tau);
+    this.value = sign * oscillation.velocity;
+    this.first = sign * oscillation.acceleration;
+    this.second = sign * oscillation.jerk;
+    this.noise = oscillation.noise;
+  }
+
+  thirdBound(reach: number): number {
+    return this.oscillation.snapBound(reach);
+  }
+}

@@ -1,0 +1,213 @@
+import type { CompiledTerm, Harmonic } from "../excitation/excitation-term.ts";
+import type { Problem } from "../scenario/problem.ts";
+
+/** What acts at one instant; units of `Problem`. */
+export interface InputValues {
+  /** F + W, and its first two time derivatives. */
+  force: number;
+  forceRate: number;
+  forceSecond: number;
+  /** y … y⁗ of the base; all 0 in relative motion but for ÿ and what follows it. */
+  base: number;
+  baseVelocity: number;
+  baseAcceleration: number;
+  baseJerk: number;
+  baseSnap: number;
+  /** N, Ṅ, N̈ (never negative: the exact method is only used where N stays positive). */
+  normal: number;
+  normalRate: number;
+  normalSecond: number;
+}
+
+/** Room for the harmonics of one term; none of today's kinds has more than one. */
+const harmonicsPerTerm = 4;
+
+/**
+ * The inputs between two corners, laid out for closed forms: polynomials about `origin` and harmonics as complex
+ * amplitudes at `origin` (value Re(A e^{iωτ}), τ = t − origin). `locate` moves the origin; everything is a pure function
+ * of t, so that a run can be looked at again at any instant.
+ */
+export class Inputs {
+  origin = 0;
+  /** The first corner after the origin, Infinity where none is left. */
+  end = Infinity;
+  /** Σ force[j] τ^j = F without harmonics, plus the weight W. */
+  readonly force = new Float64Array(4);
+  /** Σ base[j] τ^j = y without harmonics. */
+  readonly base = new Float64Array(4);
+  /** Σ acceleration[j] τ^j = ÿ without harmonics. */
+  readonly acceleration = new Float64Array(4);
+  /** Number of harmonics; each has a share in the force or the base. */
+  count = 0;
+  readonly omega: Float64Array;
+  readonly forceRe: Float64Array;
+  readonly forceIm: Float64Array;
+  readonly baseRe: Float64Array;
+  readonly baseIm: Float64Array;
+  readonly normal: number;
+  rippleOmega = 0;
+  rippleRe = 0;
+  rippleIm = 0;
+  readonly values: InputValues = {
+    force: 0,
+    forceRate: 0,
+    forceSecond: 0,
+    base: 0,
+    baseVelocity: 0,
+    baseAcceleration: 0,
+    baseJerk: 0,
+    baseSnap: 0,
+    normal: 0,
+    normalRate: 0,
+    normalSecond: 0,
+  };
+
+  private readonly problem: Problem;
+  private readonly rotated = { re: 0, im: 0 };
+
+  constructor(problem: Problem) {
+    this.problem = problem;
+    this.normal = problem.normal;
+    const room = harmonicsPerTerm * (problem.force.length + problem.base.length);
+    this.omega = new Float64Array(room);
+    this.forceRe = new Float64Array(room);
+    this.forceIm = new Float64Array(room);
+    this.baseRe = new Float64Array(room);
+    this.baseIm = new Float64Array(room);
+  }
+
+  /** Takes t as origin, with right-hand values where an input has a corner there. */
+  locate(t: number): void {
+    const { problem } = this;
+    this.origin = t;
+    this.force.fill(0);
+    this.base.fill(0);
+    this.acceleration.fill(0);
+    this.force[0] = problem.weight;
+    this.count = 0;
+    let end = Infinity;
+    for (const term of problem.force) {
+      term.addPolynomial(t, this.force);
+      end = Math.min(end, term.nextCorner(t));
+      this.addHarmonics(term, t, this.forceRe, this.forceIm);
+    }
+    for (const term of problem.base) {
+      term.addPolynomial(t, term.isAcceleration ? this.acceleration : this.base);
+      end = Math.min(end, term.nextCorner(t));
+      this.addHarmonics(term, t, this.baseRe, this.baseIm);
+    }
+    if (!problem.isRelative) {
+      this.acceleration[0] = 2 * this.base[2];
+      this.acceleration[1] = 6 * this.base[3];
+    }
+    this.end = end;
+    this.locateRipple(t);
+  }
+
+  /** Fills `values` at τ = t − origin. */
+  evaluate(tau: number): InputValues {
+    const { values: v, force: p, base: y, acceleration: a } = this;
+    v.force = p[0] + tau * (p[1] + tau * (p[2] + tau * p[3]));
+    v.forceRate = p[1] + tau * (2 * p[2] + tau * 3 * p[3]);
+    v.forceSecond = 2 * p[2] + tau * 6 * p[3];
+    v.base = y[0] + tau * (y[1] + tau * (y[2] + tau * y[3]));
+    v.baseVelocity = y[1] + tau * (2 * y[2] + tau * 3 * y[3]);
+    v.baseAcceleration = a[0] + tau * (a[1] + tau * (a[2] + tau * a[3]));
+    v.baseJerk = a[1] + tau * (2 * a[2] + tau * 3 * a[3]);
+    v.baseSnap = 2 * a[2] + tau * 6 * a[3];
+    v.normal = this.normal;
+    v.normalRate = 0;
+    v.normalSecond = 0;
+    for (let i = 0; i < this.count; i++) this.addHarmonicValues(i, tau);
+    if (this.rippleOmega > 0) this.addRippleValues(tau);
+    return v;
+  }
+
+  /** Σ |A| ω^n over the force harmonics: no n-th derivative of their sum is larger. */
+  forceBound(power: number): number {
+    let sum = 0;
+    for (let i = 0; i < this.count; i++) {
+      sum += Math.hypot(this.forceRe[i], this.forceIm[i]) * this.omega[i] ** power;
+    }
+    return sum;
+  }
+
+  /** Σ |Y| ω^n over the base harmonics. */
+  baseBound(power: number): number {
+    let sum = 0;
+    for (let i = 0; i < this.count; i++) {
+      sum += Math.hypot(this.baseRe[i], this.baseIm[i]) * this.omega[i] ** power;
+    }
+    return sum;
+  }
+
+  /** |A| ω^n of the ripple of N. */
+  rippleBound(power: number): number {
+    return this.rippleOmega > 0 ? Math.hypot(this.rippleRe, this.rippleIm) * this.rippleOmega ** power : 0;
+  }
+
+  /** The fastest angular frequency acting, rad/s; 0 without harmonics. */
+  fastest(): number {
+    let fastest = this.rippleOmega;
+    for (let i = 0; i < this.count; i++) fastest = Math.max(fastest, this.omega[i]);
+    return fastest;
+  }
+
+  private addHarmonics(term: CompiledTerm, t: number, re: Float64Array, im: Float64Array): void {
+    for (const harmonic of term.harmonics(t)) {
+      const i = this.count++;
+      this.omega[i] = 2 * Math.PI * harmonic.hz;
+      this.forceRe[i] = this.forceIm[i] = this.baseRe[i] = this.baseIm[i] = 0;
+      rotate(harmonic, t, this.rotated);
+      re[i] = this.rotated.re;
+      im[i] = this.rotated.im;
+    }
+  }
+
+  private locateRipple(t: number): void {
+    const { ripple } = this.problem;
+    if (ripple === null) return;
+    rotate(ripple, t, this.rotated);
+    this.rippleOmega = 2 * Math.PI * ripple.hz;
+    this.rippleRe = this.rotated.re;
+    this.rippleIm = this.rotated.im;
+  }
+
+  private addHarmonicValues(i: number, tau: number): void {
+    const v = this.values;
+    const w = this.omega[i];
+    const c = Math.cos(w * tau);
+    const s = Math.sin(w * tau);
+    const w2 = w * w;
+    const force = this.forceRe[i] * c - this.forceIm[i] * s;
+    v.force += force;
+    v.forceRate -= w * (this.forceRe[i] * s + this.forceIm[i] * c);
+    v.forceSecond -= w2 * force;
+    const base = this.baseRe[i] * c - this.baseIm[i] * s;
+    const quadrature = this.baseRe[i] * s + this.baseIm[i] * c;
+    v.base += base;
+    v.baseVelocity -= w * quadrature;
+    v.baseAcceleration -= w2 * base;
+    v.baseJerk += w2 * w * quadrature;
+    v.baseSnap += w2 * w2 * base;
+  }
+
+  private addRippleValues(tau: number): void {
+    const v = this.values;
+    const w = this.rippleOmega;
+    const c = Math.cos(w * tau);
+    const s = Math.sin(w * tau);
+    const ripple = this.rippleRe * c - this.rippleIm * s;
+    v.normal += ripple;
+    v.normalRate -= w * (this.rippleRe * s + this.rippleIm * c);
+    v.normalSecond -= w * w * ripple;
+  }
+}
+
+/** A e^{i(2π hz (t − origin) + phase)}; whole turns are taken out before the multiplication by 2π. */
+function rotate(harmonic: Harmonic, t: number, out: { re: number; im: number }): void {
+  const turns = harmonic.hz * (t - harmonic.origin);
+  const angle = 2 * Math.PI * (turns - Math.round(turns)) + harmonic.phase;
+  out.re = harmonic.amplitude * Math.cos(angle);
+  out.im = harmonic.amplitude * Math.sin(angle);
+}

@@ -1,0 +1,115 @@
+/**
+ * A function whose first zero is looked for: smooth on the interval, with its first two derivatives at hand and a bound
+ * of the third ahead. `evaluate(τ)` fills `value`, `first`, `second` and `noise` (what rounding may have done to `value`).
+ */
+export interface Watched {
+  value: number;
+  first: number;
+  second: number;
+  noise: number;
+  evaluate(tau: number): void;
+  /** An upper bound of |w‴| on [τ, τ + reach], τ being where `evaluate` was last called. */
+  thirdBound(reach: number): number;
+}
+
+/** Counts certificate steps against a cap; one object a run. */
+export interface Work {
+  spent: number;
+  readonly allowed: number;
+}
+
+const ulp = 2 ** -52;
+
+/**
+ * The first τ in (0, end] at which w, positive just after 0, reaches zero or touches it (to within its own rounding);
+ * Infinity where there is none; NaN where the work ran out.
+ *
+ * No zero is missed: from a point with w ≥ 0 and |w‴| ≤ M ahead, w(τ + h) ≥ w + w'h + w''h²/2 − Mh³/6, so there is no
+ * zero before the first positive root h of that cubic, and the search moves on by h (or to where the bound ends). Near a
+ * simple zero this converges quadratically from the left by itself. To save steps a zero r ahead is guessed by Newton's
+ * method; the same inequality looking back from r (w(r − h) ≥ −w'h + w''h²/2 − Mh³/6) rules out zeros in (r − h, r), and
+ * r is proven the first when the two ruled-out stretches meet. "Proven" is up to rounding of w, w', w'' and M: no
+ * outward-rounded interval arithmetic is done.
+ *
+ * Source: the remainder form of Taylor's theorem; for the scheme of certified marching compare R. E. Moore, Interval
+ * Analysis (1966), ch. 7 (from memory).
+ *
+ * @param scale a time in which w changes appreciably (sets the first reach; the result does not depend on it)
+ */
+export function firstZero(w: Watched, end: number, scale: number, work: Work): number {
+  if (!(end > 0)) return Infinity;
+  let tau = 0;
+  let reach = Math.min(scale, end);
+  let guess = Infinity;
+  let clearFrom = Infinity; // no zero lies in (clearFrom, guess)
+  w.evaluate(0);
+  for (;;) {
+    if (++work.spent > work.allowed) return NaN;
+    const span = Math.min(reach, end - tau);
+    const { value, first, second } = w;
+    if (tau > 0 && value <= w.noise && first <= 0) return tau;
+    const safe = safeStep(Math.max(0, value), first, second, w.thirdBound(span), span);
+    if (tau + safe >= clearFrom) return guess;
+    if (tau + safe >= end) return touchesAt(w, end) ? end : Infinity;
+    const step = Math.max(safe, 2 * ulp * tau, value > 0 ? 0 : 1e3 * ulp * span);
+    if (guess === Infinity && safe < span) {
+      const ahead = Math.min(end - tau, 4 * step + span);
+      const bound = w.thirdBound(ahead);
+      guess = newton(w, tau + step, tau + ahead, tau + modelZero(value, first, second));
+      if (guess !== Infinity) clearFrom = guess - safeStep(0, -w.first, w.second, bound, guess - tau);
+      if (tau + safe >= clearFrom) return guess;
+    }
+    reach = safe < span ? 4 * step : 2 * reach;
+    tau += step;
+    w.evaluate(tau);
+  }
+}
+
+function touchesAt(w: Watched, end: number): boolean {
+  w.evaluate(end);
+  return w.value <= w.noise && w.first <= 0;
+}
+
+/** The first positive zero of w + w'h + w''h²/2, Infinity without one. */
+function modelZero(value: number, first: number, second: number): number {
+  return firstRoot(value, first, second / 2);
+}
+
+/**
+ * A step h ≤ span with w + w'h + w''h²/2 − Mh³/6 > 0 on (0, h). On (0, H) the cubic is at least the parabola with
+ * curvature w'' − MH/3, whose root is a safe step; a smaller H makes that parabola tighter.
+ */
+function safeStep(value: number, first: number, second: number, bound: number, span: number): number {
+  if (value === 0 && first === 0) return second > 0 ? Math.min(span, (2.999 * second) / bound) : 0;
+  let stretch = span;
+  let safe = 0;
+  for (let i = 0; i < 4; i++) {
+    const root = firstRoot(value, first, second / 2 - (bound * stretch) / 6);
+    if (root >= stretch) return stretch;
+    safe = Math.max(safe, root);
+    stretch = Math.min(stretch, root * 1.7);
+  }
+  return safe;
+}
+
+/** The first positive zero of w + w'h + κh² for w ≥ 0 (h = 0 not counted), without cancellation; Infinity without one. */
+function firstRoot(value: number, first: number, kappa: number): number {
+  const square = first * first - 4 * kappa * value;
+  if (square < 0) return Infinity;
+  if (first < 0) return (2 * value) / (-first + Math.sqrt(square));
+  return kappa < 0 ? (first + Math.sqrt(square)) / (-2 * kappa) : Infinity;
+}
+
+/** A falling zero in (from, to] by Newton's method, w being left evaluated there; Infinity where it does not lead to one. */
+function newton(w: Watched, from: number, to: number, start: number): number {
+  let r = start;
+  for (let i = 0; i < 12; i++) {
+    if (!(r > from && r <= to)) return Infinity;
+    w.evaluate(r);
+    if (!(w.first < 0)) return Infinity;
+    const step = w.value / w.first;
+    if (Math.abs(w.value) <= w.noise / 8 || Math.abs(step) <= ulp * r) return r;
+    r -= step;
+  }
+  return Infinity;
+}
