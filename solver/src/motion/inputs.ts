@@ -44,6 +44,9 @@ export class Inputs {
   readonly forceIm: Float64Array;
   readonly baseRe: Float64Array;
   readonly baseIm: Float64Array;
+  /** |A| and |Y| of each harmonic. */
+  readonly forceSize: Float64Array;
+  readonly baseSize: Float64Array;
   readonly normal: number;
   rippleOmega = 0;
   rippleRe = 0;
@@ -74,6 +77,8 @@ export class Inputs {
     this.forceIm = new Float64Array(room);
     this.baseRe = new Float64Array(room);
     this.baseIm = new Float64Array(room);
+    this.forceSize = new Float64Array(room);
+    this.baseSize = new Float64Array(room);
   }
 
   /** Takes t as origin, with right-hand values where an input has a corner there. */
@@ -89,12 +94,12 @@ export class Inputs {
     for (const term of problem.force) {
       term.addPolynomial(t, this.force);
       end = Math.min(end, term.nextCorner(t));
-      this.addHarmonics(term, t, this.forceRe, this.forceIm);
+      this.addHarmonics(term, t, this.forceRe, this.forceIm, this.forceSize);
     }
     for (const term of problem.base) {
       term.addPolynomial(t, term.isAcceleration ? this.acceleration : this.base);
       end = Math.min(end, term.nextCorner(t));
-      this.addHarmonics(term, t, this.baseRe, this.baseIm);
+      this.addHarmonics(term, t, this.baseRe, this.baseIm, this.baseSize);
     }
     if (!problem.isRelative) {
       this.acceleration[0] = 2 * this.base[2];
@@ -126,24 +131,20 @@ export class Inputs {
   /** Σ |A| ω^n over the force harmonics: no n-th derivative of their sum is larger. */
   forceBound(power: number): number {
     let sum = 0;
-    for (let i = 0; i < this.count; i++) {
-      sum += Math.hypot(this.forceRe[i], this.forceIm[i]) * this.omega[i] ** power;
-    }
+    for (let i = 0; i < this.count; i++) sum += this.forceSize[i] * raised(this.omega[i], power);
     return sum;
   }
 
   /** Σ |Y| ω^n over the base harmonics. */
   baseBound(power: number): number {
     let sum = 0;
-    for (let i = 0; i < this.count; i++) {
-      sum += Math.hypot(this.baseRe[i], this.baseIm[i]) * this.omega[i] ** power;
-    }
+    for (let i = 0; i < this.count; i++) sum += this.baseSize[i] * raised(this.omega[i], power);
     return sum;
   }
 
   /** |A| ω^n of the ripple of N. */
   rippleBound(power: number): number {
-    return this.rippleOmega > 0 ? Math.hypot(this.rippleRe, this.rippleIm) * this.rippleOmega ** power : 0;
+    return this.problem.ripple === null ? 0 : Math.abs(this.problem.ripple.amplitude) * raised(this.rippleOmega, power);
   }
 
   /** The fastest angular frequency acting, rad/s; 0 without harmonics. */
@@ -153,14 +154,17 @@ export class Inputs {
     return fastest;
   }
 
-  private addHarmonics(term: CompiledTerm, t: number, re: Float64Array, im: Float64Array): void {
-    for (const harmonic of term.harmonics(t)) {
+  private addHarmonics(term: CompiledTerm, t: number, re: Float64Array, im: Float64Array, size: Float64Array): void {
+    const harmonics = term.harmonics(t);
+    for (let n = 0; n < harmonics.length; n++) {
       const i = this.count++;
-      this.omega[i] = 2 * Math.PI * harmonic.hz;
+      this.omega[i] = 2 * Math.PI * harmonics[n].hz;
       this.forceRe[i] = this.forceIm[i] = this.baseRe[i] = this.baseIm[i] = 0;
-      rotate(harmonic, t, this.rotated);
+      this.forceSize[i] = this.baseSize[i] = 0;
+      rotate(harmonics[n], t, this.rotated);
       re[i] = this.rotated.re;
       im[i] = this.rotated.im;
+      size[i] = Math.abs(harmonics[n].amplitude);
     }
   }
 
@@ -210,4 +214,10 @@ function rotate(harmonic: Harmonic, t: number, out: { re: number; im: number }):
   const angle = 2 * Math.PI * (turns - Math.round(turns)) + harmonic.phase;
   out.re = harmonic.amplitude * Math.cos(angle);
   out.im = harmonic.amplitude * Math.sin(angle);
+}
+
+function raised(base: number, power: number): number {
+  let product = 1;
+  for (let n = 0; n < power; n++) product *= base;
+  return product;
 }

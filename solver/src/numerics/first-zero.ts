@@ -21,7 +21,7 @@ export interface Work {
 const ulp = 2 ** -52;
 
 /**
- * The first τ in (0, end] at which w, positive just after 0, reaches zero or touches it (to within its own rounding);
+ * The first τ in (from, end] at which w, positive just after `from`, reaches zero or touches it (to within its own rounding);
  * Infinity where there is none; NaN where the work ran out.
  *
  * No zero is missed: from a point with w ≥ 0 and |w‴| ≤ M ahead, w(τ + h) ≥ w + w'h + w''h²/2 − Mh³/6, so there is no
@@ -35,22 +35,23 @@ const ulp = 2 ** -52;
  * Analysis (1966), ch. 7 (from memory).
  *
  * @param scale a time in which w changes appreciably (sets the first reach; the result does not depend on it)
+ * @param blur rounding of the clock at `end`, s: a zero that falls on `end` to within it is found there, not lost
  */
-export function firstZero(w: Watched, end: number, scale: number, work: Work): number {
-  if (!(end > 0)) return Infinity;
-  let tau = 0;
-  let reach = Math.min(scale, end);
+export function firstZero(w: Watched, from: number, end: number, scale: number, work: Work, blur = 0): number {
+  if (!(end > from)) return Infinity;
+  let tau = from;
+  let reach = Math.min(scale, end - from);
   let guess = Infinity;
   let clearFrom = Infinity; // no zero lies in (clearFrom, guess)
-  w.evaluate(0);
+  w.evaluate(from);
   for (;;) {
     if (++work.spent > work.allowed) return NaN;
     const span = Math.min(reach, end - tau);
     const { value, first, second } = w;
-    if (tau > 0 && value <= w.noise && first <= 0) return tau;
+    if (tau > from && value <= w.noise && first <= 0) return tau;
     const safe = safeStep(Math.max(0, value), first, second, w.thirdBound(span), span);
     if (tau + safe >= clearFrom) return guess;
-    if (tau + safe >= end) return touchesAt(w, end) ? end : Infinity;
+    if (tau + safe >= end) return touchesAt(w, end, blur) ? end : Infinity;
     const step = Math.max(safe, 2 * ulp * tau, value > 0 ? 0 : 1e3 * ulp * span);
     if (guess === Infinity && safe < span) {
       const ahead = Math.min(end - tau, 4 * step + span);
@@ -65,9 +66,9 @@ export function firstZero(w: Watched, end: number, scale: number, work: Work): n
   }
 }
 
-function touchesAt(w: Watched, end: number): boolean {
+function touchesAt(w: Watched, end: number, blur: number): boolean {
   w.evaluate(end);
-  return w.value <= w.noise && w.first <= 0;
+  return w.value <= w.noise - blur * w.first && w.first <= 0;
 }
 
 /** The first positive zero of w + w'h + w''h²/2, Infinity without one. */

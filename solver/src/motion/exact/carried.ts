@@ -83,6 +83,24 @@ export class Carried {
     this.roomSecond = this.grip * v.normalSecond;
   }
 
+  /** True where need provably stays within room up to τ = end: its constant part and the sum of all amplitudes do. */
+  alwaysHolds(end: number): boolean {
+    const { inputs } = this;
+    this.evaluate(0);
+    let harmonics = (Math.abs(this.slide) + this.grip) * inputs.rippleBound(0) + inputs.forceBound(0);
+    let polynomial = Math.abs(inputs.force[1]) * end;
+    if (inputs.force[2] !== 0 || inputs.force[3] !== 0 || inputs.acceleration[1] !== 0) return false;
+    if (this.carrier === "base") harmonics += this.inertia * inputs.baseBound(2);
+    else {
+      if (inputs.base[2] !== 0 || inputs.base[3] !== 0) return false;
+      harmonics += this.stiffness * inputs.baseBound(0) + this.viscous * inputs.baseBound(1);
+      polynomial += this.stiffness * Math.abs(this.beltVelocity - inputs.base[1]) * end;
+    }
+    // |need(0)| already holds one swing of the harmonics; from there they go at most twice their amplitude
+    const most = Math.abs(this.need) + 2 * harmonics + polynomial;
+    return most <= this.grip * inputs.normal + this.constant;
+  }
+
   /** A bound of |need‴| and of |room‴| together, good to the inputs' next corner. */
   thirdBound(): number {
     const { inputs } = this;

@@ -158,12 +158,12 @@ export class Oscillation {
     this.omega[i] = omega;
     this.re[i] = re;
     this.im[i] = im;
-    const amplitude = Math.hypot(re, im);
-    this.secondForcing += amplitude * omega ** 2;
-    this.thirdForcing += amplitude * omega ** 3;
+    const amplitude = Math.sqrt(re * re + im * im);
+    this.secondForcing += amplitude * omega * omega;
+    this.thirdForcing += amplitude * omega * omega * omega;
     const { sigma, squared } = this;
     const damped = Math.sqrt(Math.max(0, -this.chain.discriminant));
-    this.isResonant[i] = damped > 0 && Math.hypot(sigma, omega - damped) < 0.05 * Math.sqrt(squared) ? 1 : 0;
+    this.isResonant[i] = damped > 0 && sigma * sigma + (omega - damped) ** 2 < 0.0025 * squared ? 1 : 0;
     if (this.isResonant[i]) {
       this.particularRe[i] = this.particularIm[i] = 0;
       this.magnitude += amplitude / damped;
@@ -179,7 +179,7 @@ export class Oscillation {
     this.particularIm[i] = pIm;
     this.sumRe += pRe;
     this.sumRate -= omega * pIm;
-    this.magnitude += Math.hypot(pRe, pIm) * omega;
+    this.magnitude += Math.sqrt(pRe * pRe + pIm * pIm) * omega;
   }
 
   private evaluateClosed(tau: number): void {

@@ -25,6 +25,8 @@ export class Stepper {
   private readonly carriedWatch: CarriedStretchWatch;
   private readonly carriedSlipWatch: CarriedSlipWatch;
   private first = Infinity;
+  /** What rounding may have done to the clock at the end of the step, s. */
+  private blur = 0;
   private cause: Cause = "corner";
 
   constructor(
@@ -73,6 +75,7 @@ export class Stepper {
     const end = Math.min(form.inputs.end, limit);
     form.take(s);
     this.first = end - s.t;
+    this.blur = 2 ** -49 * end;
     this.cause = "corner";
     if (form.form === "slip") this.watchSlip(s);
     else if (form.form === "stick") this.watchStick(s);
@@ -104,13 +107,9 @@ export class Stepper {
   }
 
   private watchStick(s: Stance): void {
-    const rate = this.form.inputs.fastest();
-    const scale = rate > 0 ? 2 / rate : Infinity;
-    this.holdWatch.sign = 1;
-    this.look(this.holdWatch, scale, "contact");
-    this.holdWatch.sign = -1;
-    this.look(this.holdWatch, scale, "contact");
+    this.watchHold("contact");
     if (!this.form.hasElement || s.spring === 0) return;
+    const scale = this.inputScale();
     this.carriedWatch.isRate = true;
     this.carriedWatch.sign = s.spring;
     this.look(this.carriedWatch, scale, "element");
@@ -119,19 +118,34 @@ export class Stepper {
     this.look(this.carriedWatch, scale, "side");
   }
 
-  private watchLock(s: Stance): void {
-    const rate = this.form.inputs.fastest();
-    const scale = rate > 0 ? 2 / rate : Infinity;
-    this.holdWatch.sign = 1;
-    this.look(this.holdWatch, scale, "element");
-    this.holdWatch.sign = -1;
-    this.look(this.holdWatch, scale, "element");
-    this.carriedSlipWatch.sign = s.contact;
-    this.look(this.carriedSlipWatch, scale, "contact");
+  /** The first instant at which need leaves ±room, told window by window so that neither side is followed past the other. */
+  private watchHold(cause: Cause): void {
+    if (this.form.carried.alwaysHolds(this.first)) return;
+    const scale = this.inputScale();
+    const end = this.first;
+    for (let from = 0; from < end && this.first === end; from += 4 * scale) {
+      const to = Math.min(end, from + 4 * scale);
+      this.holdWatch.sign = 1;
+      this.look(this.holdWatch, scale, cause, from, to);
+      this.holdWatch.sign = -1;
+      this.look(this.holdWatch, scale, cause, from, Math.min(to, this.first));
+      if (this.outOfWork) return;
+    }
   }
 
-  private look(watched: Watched, scale: number, cause: Cause): void {
-    const tau = firstZero(watched, this.first, scale, this.work);
+  private inputScale(): number {
+    const rate = this.form.inputs.fastest();
+    return rate > 0 ? 2 / rate : Infinity;
+  }
+
+  private watchLock(s: Stance): void {
+    this.watchHold("element");
+    this.carriedSlipWatch.sign = s.contact;
+    this.look(this.carriedSlipWatch, this.inputScale(), "contact");
+  }
+
+  private look(watched: Watched, scale: number, cause: Cause, from = 0, to = this.first): void {
+    const tau = firstZero(watched, from, to, scale, this.work, to === this.first ? this.blur : 0);
     if (!(tau <= this.first)) return;
     this.first = tau;
     this.cause = cause;

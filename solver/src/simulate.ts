@@ -1,0 +1,55 @@
+import { judge } from "./judge.ts";
+import { runExact } from "./motion/exact/exact-run.ts";
+import type { Motion } from "./motion/motion.ts";
+import { emptyState } from "./motion/state.ts";
+import type { Refusal, SimulateOptions } from "./options.ts";
+import type { MotionEvent, Result } from "./result.ts";
+import { sampleMotion, valuesAt } from "./samples.ts";
+import { compileProblem } from "./scenario/compile-problem.ts";
+import type { Fault, Scenario } from "./scenario/scenario.ts";
+import { unsupported } from "./scenario/unsupported.ts";
+import { solverVersion } from "./version.ts";
+
+const defaultSamples = 2001;
+
+/**
+ * Runs a checked scenario (see `checkScenario`) and computes what is asked of it.
+ *
+ * @returns the result, all numbers finite; or a refusal naming the field where this version has no method for it. A run
+ * that cannot go on is no refusal: `ended` says why, and the motion so far is returned.
+ */
+export function simulate(scenario: Scenario, options: SimulateOptions = {}): Result | Refusal {
+  const fault = unsupported(scenario) ?? methodFault(options);
+  if (fault !== null) return { error: { ...fault, faults: [fault] } };
+  const motion = runExact(compileProblem(scenario, options.records), options.progress);
+  return describe(motion, options);
+}
+
+/** What a run says, whatever the method that made it. */
+function describe(motion: Motion, options: SimulateOptions): Result {
+  const judged = judge(motion, { quantities: options.quantities, energy: options.energy ?? true });
+  const points = options.samples ?? defaultSamples;
+  return {
+    format: "restband-result/1",
+    method: motion.method,
+    solverVersion,
+    ended: motion.ended,
+    ...judged,
+    events: options.events === false ? [] : eventsOf(motion),
+    samples: points > 0 ? sampleMotion(motion, points) : null,
+    ...(options.at === undefined ? {} : { at: valuesAt(motion, options.at) }),
+  };
+}
+
+function eventsOf(motion: Motion): MotionEvent[] {
+  const state = emptyState();
+  return motion.events.map(({ t, kind, segment }) => {
+    motion.read(segment, t, state);
+    return { t, kind, x: state.x, v: state.v, f: state.f };
+  });
+}
+
+function methodFault(options: SimulateOptions): Fault | null {
+  if (options.method !== "adaptive") return null;
+  return { path: "method", message: "not computed by this version" };
+}
