@@ -1,11 +1,14 @@
+import { fileURLToPath } from "node:url";
 import tailwindcss from "@tailwindcss/vite";
 import react from "@vitejs/plugin-react";
 import { defineConfig } from "vite";
+import { licences } from "./licences-plugin.ts";
 
-const apiPort = process.env.RESTBAND_API_PORT ?? "3000";
+const apiPort = process.env.RESTBAND_PORT ?? "4780";
+const workspaces = ["../solver", "../api", "."].map((path) => fileURLToPath(new URL(path, import.meta.url)));
 
 export default defineConfig({
-  plugins: [react(), tailwindcss()],
+  plugins: [react(), tailwindcss(), licences(workspaces)],
   worker: { format: "es" },
   build: {
     outDir: "dist",

@@ -1,4 +1,5 @@
-import { useEffect, useRef, useState, useSyncExternalStore } from "react";
+import { useEffect, useRef, useState } from "react";
+import { sharedValue, useSharedValue } from "../shared-value.ts";
 import { Checkbox } from "./choices.tsx";
 import { Dialog } from "./dialog.tsx";
 
@@ -10,9 +11,8 @@ interface Shortcut {
 }
 
 const storageKey = "restband-shortcuts";
-let shortcuts: readonly Shortcut[] = [];
-let isOn = read();
-const listeners = new Set<() => void>();
+const shortcuts = sharedValue<readonly Shortcut[]>([]);
+const areSingleKeysOn = sharedValue(read());
 
 function read(): boolean {
   try {
@@ -22,24 +22,14 @@ function read(): boolean {
   }
 }
 
-function tell(): void {
-  for (const listener of listeners) listener();
-}
-
-function subscribe(listener: () => void): () => void {
-  listeners.add(listener);
-  return () => listeners.delete(listener);
-}
-
 // Single keys can be turned off, for those who speak to their computer or brush the keyboard (WCAG 2.1.4).
-function setOn(next: boolean): void {
-  isOn = next;
+function allowSingleKeys(next: boolean): void {
+  areSingleKeysOn.set(next);
   try {
     localStorage.setItem(storageKey, next ? "on" : "off");
   } catch {
     // Storage is refused: the choice lasts as long as the page.
   }
-  tell();
 }
 
 const writingTags = new Set(["INPUT", "TEXTAREA", "SELECT"]);
@@ -57,8 +47,8 @@ function press(event: KeyboardEvent): void {
   if (event.defaultPrevented || event.altKey) return;
   const keys = keysOf(event);
   const isSingle = !keys.startsWith("Ctrl+");
-  if (isSingle && (!isOn || isWriting(event.target) || document.querySelector("dialog[open]"))) return;
-  const shortcut = [...shortcuts].reverse().find((each) => each.keys === keys);
+  if (isSingle && (!areSingleKeysOn.get() || isWriting(event.target) || document.querySelector("dialog[open]"))) return;
+  const shortcut = [...shortcuts.get()].reverse().find((each) => each.keys === keys);
   if (!shortcut) return;
   event.preventDefault();
   shortcut.run();
@@ -77,12 +67,8 @@ export function useShortcut(keys: string, label: string, run: () => void): void 
   });
   useEffect(() => {
     const shortcut = { keys, label, run: () => latest.current() };
-    shortcuts = [...shortcuts, shortcut];
-    tell();
-    return () => {
-      shortcuts = shortcuts.filter((each) => each !== shortcut);
-      tell();
-    };
+    shortcuts.set([...shortcuts.get(), shortcut]);
+    return () => shortcuts.set(shortcuts.get().filter((each) => each !== shortcut));
   }, [keys, label]);
 }
 
@@ -100,8 +86,8 @@ export function useShortcutsDialog() {
 }
 
 function ShortcutsDialog({ isOpen, onClose }: { isOpen: boolean; onClose: () => void }) {
-  const listed = useSyncExternalStore(subscribe, () => shortcuts);
-  const areOn = useSyncExternalStore(subscribe, () => isOn);
+  const listed = useSharedValue(shortcuts);
+  const areOn = useSharedValue(areSingleKeysOn);
   return (
     <Dialog isOpen={isOpen} title="Keyboard" onClose={onClose}>
       <dl className="mb-5">
@@ -122,7 +108,7 @@ function ShortcutsDialog({ isOpen, onClose }: { isOpen: boolean; onClose: () => 
         label="Use single keys"
         help="Without them, keys with Ctrl still work and everything stays within reach of Tab."
         checked={areOn}
-        onChange={(event) => setOn(event.target.checked)}
+        onChange={(event) => allowSingleKeys(event.target.checked)}
       />
     </Dialog>
   );

@@ -1,4 +1,4 @@
-import { useSyncExternalStore } from "react";
+import { sharedValue, useSharedValue } from "../shared-value.ts";
 import { Button } from "./button.tsx";
 import { Icon } from "./icon.tsx";
 
@@ -8,34 +8,23 @@ interface Notice {
 }
 
 const shownFor = 8000;
-let notices: readonly Notice[] = [];
+const notices = sharedValue<readonly Notice[]>([]);
 let count = 0;
-const listeners = new Set<() => void>();
-
-function set(next: readonly Notice[]): void {
-  notices = next;
-  for (const listener of listeners) listener();
-}
 
 /** Tells what was done, in one sentence that is also read out. It goes away by itself: nothing that must be acted on. */
 export function announce(text: string): void {
   const notice = { id: ++count, text };
-  set([...notices.slice(-2), notice]);
+  notices.set([...notices.get().slice(-2), notice]);
   setTimeout(() => dismiss(notice.id), shownFor);
 }
 
 function dismiss(id: number): void {
-  set(notices.filter((notice) => notice.id !== id));
-}
-
-function subscribe(listener: () => void): () => void {
-  listeners.add(listener);
-  return () => listeners.delete(listener);
+  notices.set(notices.get().filter((notice) => notice.id !== id));
 }
 
 /** Where announcements appear; once, at the root of the page. */
 export function StatusRegion() {
-  const shown = useSyncExternalStore(subscribe, () => notices);
+  const shown = useSharedValue(notices);
   return (
     <div
       role="status"

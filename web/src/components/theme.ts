@@ -1,10 +1,10 @@
-import { useSyncExternalStore } from "react";
+import { sharedValue, useSharedValue } from "../shared-value.ts";
 
 export type Theme = "light" | "dark";
 
 // `public/theme.js` reads the same key before the first paint.
 const key = "restband-theme";
-const listeners = new Set<() => void>();
+const shown = sharedValue<Theme>(document.documentElement.dataset.theme === "dark" ? "dark" : "light");
 const system = () => window.matchMedia?.("(prefers-color-scheme: dark)");
 
 /** The theme a person chose, or null where the page follows the system. */
@@ -35,7 +35,7 @@ export function chooseTheme(theme: Theme | null): void {
 
 function apply(theme: Theme): void {
   document.documentElement.dataset.theme = theme;
-  for (const listener of listeners) listener();
+  shown.set(theme);
 }
 
 /** Lets the page follow the system's own change from light to dark, and a choice made in another tab. */
@@ -45,14 +45,5 @@ export function followSystemTheme(): void {
   window.addEventListener("storage", (event) => event.key === key && follow());
 }
 
-const shownTheme = (): Theme => (document.documentElement.dataset.theme === "dark" ? "dark" : "light");
-
-function subscribe(listener: () => void): () => void {
-  listeners.add(listener);
-  return () => listeners.delete(listener);
-}
-
 /** The theme the page shows, and a new render when it changes: for drawings that read the tokens. */
-export function useTheme(): Theme {
-  return useSyncExternalStore(subscribe, shownTheme);
-}
+export const useTheme = () => useSharedValue(shown);

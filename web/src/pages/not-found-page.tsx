@@ -1,0 +1,1 @@
+export { NothingHere as NotFoundPage } from "./route-failure.tsx";

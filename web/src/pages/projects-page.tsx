@@ -1,0 +1,53 @@
+import { useSuspenseQuery } from "@tanstack/react-query";
+import { useState } from "react";
+import { useNavigate } from "react-router-dom";
+import { projectsQuery, useCreateProject } from "../api/projects.ts";
+import { Button } from "../components/button.tsx";
+import { Dialog } from "../components/dialog.tsx";
+import { EmptyState } from "../components/empty-state.tsx";
+import { useShortcut } from "../components/shortcuts.tsx";
+import { WorkHeader } from "../features/account/work-header.tsx";
+import { ProjectForm } from "../features/project-home/project-form.tsx";
+import { ProjectList, projectsHeadline } from "../features/project-home/project-list.tsx";
+import { paths } from "../paths.ts";
+
+/** All projects of the person signed in. */
+export function ProjectsPage() {
+  const { data: projects } = useSuspenseQuery(projectsQuery);
+  const [isNew, setNew] = useState(false);
+  const create = useCreateProject();
+  const navigate = useNavigate();
+  const open = () => setNew(true);
+  useShortcut("n", "New project", open);
+  const newProject = (
+    <Button kind="primary" onClick={open}>
+      New project
+    </Button>
+  );
+  return (
+    <>
+      <title>All projects · Restband</title>
+      <WorkHeader title="All projects" actions={newProject} />
+      <main id="content" tabIndex={-1} className="page-width grow py-8 desk:py-9">
+        <div className="max-w-[972px]">
+          <h1 className="mb-6 text-24 font-semibold desk:text-34">{projectsHeadline(projects.length)}</h1>
+          {projects.length > 0 ? (
+            <ProjectList projects={projects} />
+          ) : (
+            <EmptyState action={<Button onClick={open}>Begin a project</Button>}>
+              A project holds scenarios and the people who work on them. Begin one, or ask its owner to add you to
+              theirs.
+            </EmptyState>
+          )}
+        </div>
+      </main>
+      <Dialog isOpen={isNew} title="New project" onClose={() => setNew(false)}>
+        <ProjectForm
+          action="Begin the project"
+          save={async (draft) => navigate(paths.project((await create.mutateAsync(draft)).id))}
+          onCancel={() => setNew(false)}
+        />
+      </Dialog>
+    </>
+  );
+}
