@@ -2,8 +2,17 @@ import { firstZero, type Watched, type Work } from "../../numerics/first-zero.ts
 import type { EventKind, Phase } from "../../result.ts";
 import type { Problem } from "../../scenario/problem.ts";
 import { ClosedForm } from "./closed-form.ts";
+import { orient, orientSide } from "./spring-element.ts";
 import type { Stance } from "./stance.ts";
-import { CarriedSlipWatch, CarriedStretchWatch, HoldWatch, SlipWatch, StretchWatch, heldTolerance } from "./watch.ts";
+import {
+  BaseSlipWatch,
+  CarriedStretchWatch,
+  HoldWatch,
+  SlipWatch,
+  StretchRateWatch,
+  StretchWatch,
+  heldTolerance,
+} from "./watch.ts";
 
 /** What happened at the end of a step; null where only the closed form changes (a corner, a spring passing its free length). */
 export type Happening = Extract<EventKind, "stop" | "turn" | "break-away"> | null;
@@ -20,10 +29,10 @@ export class Stepper {
   readonly form: ClosedForm;
   private readonly slipWatch: SlipWatch;
   private readonly stretchWatch: StretchWatch;
-  private readonly stretchRateWatch: RateWatch;
+  private readonly stretchRateWatch: StretchRateWatch;
   private readonly holdWatch: HoldWatch;
   private readonly carriedWatch: CarriedStretchWatch;
-  private readonly carriedSlipWatch: CarriedSlipWatch;
+  private readonly baseSlipWatch: BaseSlipWatch;
   private first = Infinity;
   /** What rounding may have done to the clock at the end of the step, s. */
   private blur = 0;
@@ -35,15 +44,12 @@ export class Stepper {
   ) {
     this.form = new ClosedForm(problem);
     const { oscillation, inputs, carried } = this.form;
-    this.slipWatch = new SlipWatch(oscillation, inputs);
-    this.slipWatch.carrier = this.form.contactCarrier;
-    this.slipWatch.beltVelocity = problem.beltVelocity;
+    this.slipWatch = new SlipWatch(oscillation, inputs, this.form.contactCarrier, problem.beltVelocity);
     this.stretchWatch = new StretchWatch(oscillation);
-    this.stretchRateWatch = new RateWatch(oscillation);
+    this.stretchRateWatch = new StretchRateWatch(oscillation);
     this.holdWatch = new HoldWatch(carried);
     this.carriedWatch = new CarriedStretchWatch(carried, inputs);
-    this.carriedSlipWatch = new CarriedSlipWatch(inputs);
-    this.carriedSlipWatch.beltVelocity = problem.beltVelocity;
+    this.baseSlipWatch = new BaseSlipWatch(inputs, problem.beltVelocity);
   }
 
   get outOfWork(): boolean {
@@ -65,7 +71,7 @@ export class Stepper {
     const scale = Math.max(Math.abs(initial.velocity), Math.abs(carrier));
     if (Math.abs(slip) <= 1e-12 * scale) return this.meet(s, 0);
     s.contact = slip > 0 ? 1 : -1;
-    this.orient(s);
+    orient(this.form, s);
     return null;
   }
 
@@ -110,10 +116,8 @@ export class Stepper {
     this.watchHold("contact");
     if (!this.form.hasElement || s.spring === 0) return;
     const scale = this.inputScale();
-    this.carriedWatch.isRate = true;
-    this.carriedWatch.sign = s.spring;
-    this.look(this.carriedWatch, scale, "element");
-    this.carriedWatch.isRate = false;
+    this.baseSlipWatch.sign = -s.spring;
+    this.look(this.baseSlipWatch, scale, "element");
     this.carriedWatch.sign = s.side;
     this.look(this.carriedWatch, scale, "side");
   }
@@ -140,8 +144,8 @@ export class Stepper {
 
   private watchLock(s: Stance): void {
     this.watchHold("element");
-    this.carriedSlipWatch.sign = s.contact;
-    this.look(this.carriedSlipWatch, this.inputScale(), "contact");
+    this.baseSlipWatch.sign = s.contact;
+    this.look(this.baseSlipWatch, this.inputScale(), "contact");
   }
 
   private look(watched: Watched, scale: number, cause: Cause, from = 0, to = this.first): void {
@@ -191,7 +195,7 @@ export class Stepper {
     const isMoved = this.form.contactCarrier === "base";
     s.acceleration = isMoved ? relative : relative - (this.problem.isRelative ? 0 : inputs.values.baseAcceleration);
     s.contact = side;
-    this.orient(s);
+    orient(this.form, s);
     return "break-away";
   }
 
@@ -210,14 +214,14 @@ export class Stepper {
     this.placeOnCounterface(s);
     s.contact = 0;
     s.acceleration = NaN;
-    this.orient(s);
+    orient(this.form, s);
     form.take(s);
     form.carried.evaluate(0);
     const { need, room } = form.carried;
     const canHold = room > 0 || before === 0 || problem.model !== "none";
     if (canHold && Math.abs(need) <= room * (1 + heldTolerance)) return before === 0 ? null : "stop";
     s.contact = need > 0 ? -1 : need < 0 ? 1 : before;
-    this.orient(s);
+    orient(this.form, s);
     if (before === 0) return "break-away";
     return s.contact === before ? null : "turn";
   }
@@ -230,10 +234,10 @@ export class Stepper {
     if (form.form === "lock") {
       s.acceleration = 0; // need is exactly what could just be held
       s.spring = -Math.sign(form.carried.need) as Phase;
-      this.orientSide(s);
+      orientSide(s);
       return null;
     }
-    this.orient(s);
+    orient(this.form, s);
     return null;
   }
 
@@ -246,46 +250,8 @@ export class Stepper {
     const { need, room } = form.carried;
     if (Math.abs(need) <= room * (1 + heldTolerance)) return null;
     s.contact = -Math.sign(need) as Phase;
-    this.orient(s);
+    orient(this.form, s);
     return "break-away";
-  }
-
-  /** Chooses the quadrant (signs of ḋ and d just after s.t) or the lock. Inputs are located at s.t. */
-  private orient(s: Stance): void {
-    const { form } = this;
-    if (!form.hasElement) {
-      s.spring = 1;
-      s.side = 1;
-      return;
-    }
-    if (s.contact === 0) s.spring = this.springOfStick(s);
-    else if (form.isCarriedWithBase()) s.spring = s.contact;
-    else if (s.velocity !== 0) s.spring = Math.sign(s.velocity) as Phase;
-    else s.spring = this.springOfSlip(s);
-    this.orientSide(s);
-  }
-
-  private orientSide(s: Stance): void {
-    s.side = (Math.sign(s.position) || s.spring || 1) as Phase;
-  }
-
-  private springOfStick(s: Stance): Phase {
-    if (this.form.isCarriedWithBase()) return 0;
-    if (s.velocity !== 0) return Math.sign(s.velocity) as Phase;
-    return (-Math.sign(this.form.inputs.evaluate(0).baseAcceleration) || 1) as Phase;
-  }
-
-  /** At ḋ = 0 in a slip: 0 where |need| ≤ ρ k |d|, else the side of the force that cannot be held. */
-  private springOfSlip(s: Stance): Phase {
-    const { form } = this;
-    const wasSpring = s.spring;
-    s.spring = 0;
-    form.take(s);
-    form.carried.evaluate(0);
-    s.spring = wasSpring;
-    const { need, room } = form.carried;
-    if (Math.abs(need) <= room * (1 + heldTolerance)) return 0;
-    return -Math.sign(need) as Phase;
   }
 
   /** A corner of the inputs, or the limit of the step: right-hand values from here on. */
@@ -322,39 +288,15 @@ export class Stepper {
     if (was === 0 && jump === 0) return this.meet(s, 0);
     if (was !== 0 && jump === 0) {
       if (isZero) return this.meet(s, was);
-      this.orient(s);
+      orient(this.form, s);
       return null;
     }
     const slip = s.velocity; // v_r = ḋ: only a base that jumps under its own counterface gets here
     if (Math.abs(slip) <= tolerance) return this.meet(s, was);
     s.contact = slip > 0 ? 1 : -1;
     form.inputs.evaluate(0);
-    this.orient(s);
+    orient(this.form, s);
     if (was === 0) return "break-away";
     return s.contact === was ? null : "turn";
-  }
-}
-
-/** sign·ḋ of an oscillation. */
-class RateWatch implements Watched {
-  value = 0;
-  first = 0;
-  second = 0;
-  noise = 0;
-  sign = 1;
-
-  constructor(private readonly oscillation: ClosedForm["oscillation"]) {}
-
-  evaluate(tau: number): void {
-    const { oscillation, sign } = this;
-    oscillation.evaluate(tau);
-    this.value = sign * oscillation.velocity;
-    this.first = sign * oscillation.acceleration;
-    this.second = sign * oscillation.jerk;
-    this.noise = oscillation.noise;
-  }
-
-  thirdBound(reach: number): number {
-    return this.oscillation.snapBound(reach);
   }
 }

@@ -6,35 +6,45 @@ import type { Oscillation } from "./oscillation.ts";
 /** Held means |need| ≤ room (1 + this), so that rounding never decides. */
 export const heldTolerance = 1e-12;
 
-/** sign·v_r of a slip against ground, belt or base. */
-export class SlipWatch implements Watched {
+/** What is watched for its first zero, always times `sign` so that it starts positive. */
+abstract class Watch implements Watched {
+  sign = 1;
   value = 0;
   first = 0;
   second = 0;
   noise = 0;
-  sign = 1;
-  carrier: Carrier = "ground";
-  beltVelocity = 0;
+  abstract evaluate(tau: number): void;
+  abstract thirdBound(reach: number): number;
 
+  protected take(value: number, first: number, second: number): void {
+    this.value = this.sign * value;
+    this.first = this.sign * first;
+    this.second = this.sign * second;
+  }
+}
+
+/** v_r of a slip against ground, belt or base. */
+export class SlipWatch extends Watch {
   constructor(
     private readonly oscillation: Oscillation,
     private readonly inputs: Inputs,
-  ) {}
+    private readonly carrier: Carrier,
+    private readonly beltVelocity: number,
+  ) {
+    super();
+  }
 
   evaluate(tau: number): void {
-    const { oscillation, sign } = this;
+    const { oscillation } = this;
     oscillation.evaluate(tau);
     this.noise = oscillation.noise;
-    if (this.carrier === "base") {
-      this.value = sign * oscillation.velocity;
-      this.first = sign * oscillation.acceleration;
-      this.second = sign * oscillation.jerk;
-      return;
-    }
+    if (this.carrier === "base") return this.take(oscillation.velocity, oscillation.acceleration, oscillation.jerk);
     const v = this.inputs.evaluate(tau);
-    this.value = sign * (oscillation.velocity + v.baseVelocity - this.beltVelocity);
-    this.first = sign * (oscillation.acceleration + v.baseAcceleration);
-    this.second = sign * (oscillation.jerk + v.baseJerk);
+    this.take(
+      oscillation.velocity + v.baseVelocity - this.beltVelocity,
+      oscillation.acceleration + v.baseAcceleration,
+      oscillation.jerk + v.baseJerk,
+    );
     this.noise += 2 ** -51 * (Math.abs(v.baseVelocity) + Math.abs(this.beltVelocity));
   }
 
@@ -44,23 +54,16 @@ export class SlipWatch implements Watched {
   }
 }
 
-/** sign·d of an oscillation: where the spring passes through its free length. */
-export class StretchWatch implements Watched {
-  value = 0;
-  first = 0;
-  second = 0;
-  noise = 0;
-  sign = 1;
-
-  constructor(private readonly oscillation: Oscillation) {}
+/** d of an oscillation: where the spring passes through its free length. */
+export class StretchWatch extends Watch {
+  constructor(private readonly oscillation: Oscillation) {
+    super();
+  }
 
   evaluate(tau: number): void {
-    const { oscillation, sign } = this;
+    const { oscillation } = this;
     oscillation.evaluate(tau);
-    this.value = sign * oscillation.position;
-    this.first = sign * oscillation.velocity;
-    this.second = sign * oscillation.acceleration;
-    this.noise = 2 ** -50 * Math.abs(oscillation.position);
+    this.take(oscillation.position, oscillation.velocity, oscillation.acceleration);
   }
 
   thirdBound(reach: number): number {
@@ -68,15 +71,29 @@ export class StretchWatch implements Watched {
   }
 }
 
-/** room (1 + tolerance) − sign·need of a body carried along. */
-export class HoldWatch implements Watched {
-  value = 0;
-  first = 0;
-  second = 0;
-  noise = 0;
-  sign = 1;
+/** ḋ of an oscillation. */
+export class StretchRateWatch extends Watch {
+  constructor(private readonly oscillation: Oscillation) {
+    super();
+  }
 
-  constructor(private readonly carried: Carried) {}
+  evaluate(tau: number): void {
+    const { oscillation } = this;
+    oscillation.evaluate(tau);
+    this.take(oscillation.velocity, oscillation.acceleration, oscillation.jerk);
+    this.noise = oscillation.noise;
+  }
+
+  thirdBound(reach: number): number {
+    return this.oscillation.snapBound(reach);
+  }
+}
+
+/** room (1 + tolerance) − sign·need of a body carried along. */
+export class HoldWatch extends Watch {
+  constructor(private readonly carried: Carried) {
+    super();
+  }
 
   evaluate(tau: number): void {
     const { carried, sign } = this;
@@ -84,7 +101,6 @@ export class HoldWatch implements Watched {
     this.value = carried.room * (1 + heldTolerance) - sign * carried.need;
     this.first = carried.roomRate - sign * carried.needRate;
     this.second = carried.roomSecond - sign * carried.needSecond;
-    this.noise = 0;
   }
 
   thirdBound(): number {
@@ -92,56 +108,37 @@ export class HoldWatch implements Watched {
   }
 }
 
-/** sign·(u̇ − ẏ) or sign·d of a body carried along: where the second set-valued element changes its side. */
-export class CarriedStretchWatch implements Watched {
-  value = 0;
-  first = 0;
-  second = 0;
-  noise = 0;
-  sign = 1;
-  /** True to watch ḋ, false to watch d. */
-  isRate = true;
-
+/** d of a body carried along. */
+export class CarriedStretchWatch extends Watch {
   constructor(
     private readonly carried: Carried,
     private readonly inputs: Inputs,
-  ) {}
+  ) {
+    super();
+  }
 
   evaluate(tau: number): void {
-    const { carried, sign } = this;
-    carried.evaluate(tau);
-    const v = this.inputs.values;
-    const chain = [carried.position, carried.velocity, -v.baseAcceleration, -v.baseJerk];
-    const at = this.isRate ? 1 : 0;
-    this.value = sign * chain[at];
-    this.first = sign * chain[at + 1];
-    this.second = sign * chain[at + 2] || 0;
-    this.noise = 2 ** -50 * Math.abs(chain[at]);
+    this.carried.evaluate(tau);
+    this.take(this.carried.position, this.carried.velocity, -this.inputs.values.baseAcceleration);
   }
 
   thirdBound(): number {
-    const power = this.isRate ? 4 : 3;
-    const polynomial = this.isRate ? 0 : 6 * Math.abs(this.inputs.base[3]);
-    return this.inputs.baseBound(power) + polynomial;
+    return this.inputs.baseBound(3) + 6 * Math.abs(this.inputs.base[3]);
   }
 }
 
-/** sign·v_r of a body that moves with its base (ḋ = 0) over ground or belt. */
-export class CarriedSlipWatch implements Watched {
-  value = 0;
-  first = 0;
-  second = 0;
-  noise = 0;
-  sign = 1;
-  beltVelocity = 0;
-
-  constructor(private readonly inputs: Inputs) {}
+/** ẏ − u̇: −ḋ of a body stuck to ground or belt, and v_r of one that moves with its base. */
+export class BaseSlipWatch extends Watch {
+  constructor(
+    private readonly inputs: Inputs,
+    private readonly beltVelocity: number,
+  ) {
+    super();
+  }
 
   evaluate(tau: number): void {
     const v = this.inputs.evaluate(tau);
-    this.value = this.sign * (v.baseVelocity - this.beltVelocity);
-    this.first = this.sign * v.baseAcceleration;
-    this.second = this.sign * v.baseJerk;
+    this.take(v.baseVelocity - this.beltVelocity, v.baseAcceleration, v.baseJerk);
     this.noise = 2 ** -50 * (Math.abs(v.baseVelocity) + Math.abs(this.beltVelocity));
   }
 
