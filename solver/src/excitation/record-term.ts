@@ -20,7 +20,7 @@ function countFaults(times: number, values: number): KindFault[] {
   if (times < 2) faults.push({ path: "times", message: `A record has at least two points; it has ${times}.` });
   if (times > maximumPoints)
     faults.push({ path: "times", message: `A record has at most ${maximumPoints} points; it has ${times}.` });
-  if (times !== values)
+  if (times > 0 && times !== values)
     faults.push({
       path: "values",
       message: `There is one value for each time; there are ${values} for ${times} times.`,

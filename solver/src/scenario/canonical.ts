@@ -1,0 +1,50 @@
+import { sha256 } from "@noble/hashes/sha2.js";
+import { bytesToHex, utf8ToBytes } from "@noble/hashes/utils.js";
+import type { Scenario, Term } from "./scenario.ts";
+
+/** Records longer than this are named by their digest in the canonical form. */
+const inlinePoints = 1000;
+
+/**
+ * The canonical text of a checked scenario (RFC 8785): keys sorted, numbers as ECMAScript prints them, −0 as 0, every
+ * default written, long records by their digest. The same scenario gives the same bytes, whoever wrote it.
+ */
+export function canonicalText(scenario: Scenario): string {
+  return jsonText(canonicalForm(scenario));
+}
+
+/** SHA-256 of the canonical text, lower-case hex. */
+export function digestOf(scenario: Scenario): string {
+  return bytesToHex(sha256(utf8ToBytes(canonicalText(scenario))));
+}
+
+/** A checked scenario with its long records named by digest; their points then travel beside it. */
+export function canonicalForm(scenario: Scenario): Scenario {
+  return { ...scenario, force: scenario.force.map(storedForm), base: scenario.base.map(storedForm) };
+}
+
+function storedForm(term: Term): Term {
+  if (!("times" in term) || term.times.length <= inlinePoints) return term;
+  const { kind, times, values } = term;
+  return { kind, digest: recordDigest(times, values), points: times.length } as Term;
+}
+
+/** What a stored record is named by: SHA-256 of its times, then its values, as little-endian Float64, −0 as 0. */
+export function recordDigest(times: ArrayLike<number>, values: ArrayLike<number>): string {
+  const view = new DataView(new ArrayBuffer(8 * (times.length + values.length)));
+  for (let i = 0; i < times.length; i++) view.setFloat64(8 * i, times[i] + 0, true);
+  for (let i = 0; i < values.length; i++) view.setFloat64(8 * (times.length + i), values[i] + 0, true);
+  return bytesToHex(sha256(new Uint8Array(view.buffer)));
+}
+
+/**
+ * JSON text with sorted keys and no space. ECMAScript's own printing of numbers and strings is the one RFC 8785 asks for;
+ * sorting by `<` compares UTF-16 units, as it asks. Members that are undefined are left out.
+ */
+export function jsonText(value: unknown): string {
+  if (Array.isArray(value)) return `[${value.map(jsonText).join(",")}]`;
+  if (typeof value !== "object" || value === null) return JSON.stringify(value);
+  const members = Object.entries(value).filter(([, member]) => member !== undefined);
+  members.sort(([a], [b]) => (a < b ? -1 : 1));
+  return `{${members.map(([key, member]) => `${JSON.stringify(key)}:${jsonText(member)}`).join(",")}}`;
+}
