@@ -1,5 +1,5 @@
 import type { Scenario } from "@restband/solver";
-import { readNormal, type Stretch } from "./inputs.ts";
+import { forceOn, readNormal, type Stretch } from "./inputs.ts";
 
 /** The body's constants, read from the scenario by the judge itself. */
 export interface JudgedBody {
@@ -48,12 +48,17 @@ function solidViscous({ body, solid, force, base }: Scenario): number {
  * To which side a body at x that rides on its counterface at time t begins to slip: 0 where it is held.
  * The needed force is m ü − F + (c + c_h) ḋ + k d + S − W; displacement-proportional damping adds its own hold where ḋ = 0.
  */
-export function slipSide(body: JudgedBody, { force, base, face }: Stretch, t: number, x: number): -1 | 0 | 1 {
+export function slipSide(body: JudgedBody, stretch: Stretch, t: number, x: number): -1 | 0 | 1 {
+  const { base, face } = stretch;
   const stretchRate = face.rate(t) - base.rate(t);
   const spring = body.stiffness * (x - base.at(t));
   const solid = body.proportional * Math.abs(spring);
   const need =
-    body.inertia * face.bend(t) - force(t) + body.damping * stretchRate + spring + solid * Math.sign(stretchRate);
+    body.inertia * face.bend(t) -
+    forceOn(stretch, t) +
+    body.damping * stretchRate +
+    spring +
+    solid * Math.sign(stretchRate);
   const limit = body.holding(t) + (stretchRate === 0 ? solid : 0);
   if (Math.abs(need) <= limit * (1 + 1e-12)) return 0;
   return need > 0 ? -1 : 1;

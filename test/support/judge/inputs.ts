@@ -5,8 +5,12 @@ const GRAVITY = 9.80665;
 
 /** Everything that acts on the body from outside, smooth between two corners. */
 export interface Stretch {
-  /** F + W, and −m ÿ under an acceleration record, N. */
-  readonly force: (t: number) => number;
+  /** F, N. */
+  readonly applied: (t: number) => number;
+  /** −m ÿ under an acceleration record, else 0, N. */
+  readonly shake: (t: number) => number;
+  /** W, N. */
+  readonly weight: number;
   /** Base: position and its first two derivatives. */
   readonly base: Path;
   /** Counterface: the same. */
@@ -44,13 +48,12 @@ export function readInputs(scenario: Scenario): Inputs {
     corners,
     jumpFloor: 1e-9 * fastestOf(base),
     stretchFrom(t) {
-      const pushing = activeAt(force, t);
-      const shaking = activeAt(base, t);
-      const applied = pathOf(pushing);
-      const moving = relative ? still : pathOf(shaking);
-      const shake = pathOf(relative ? shaking : []);
+      const shaking = pathOf(activeAt(base, t));
+      const moving = relative ? still : shaking;
       return {
-        force: (at) => applied.at(at) + weight - inertia * shake.at(at),
+        applied: pathOf(activeAt(force, t)).at,
+        shake: relative ? (at) => -inertia * shaking.at(at) : () => 0,
+        weight,
         base: moving,
         face: faceOf(scenario, moving),
       };
@@ -58,6 +61,11 @@ export function readInputs(scenario: Scenario): Inputs {
     isConstantAfter: (t) =>
       corners.every((corner) => corner <= t) && [...scenario.force, ...scenario.base].every(isQuietAtLast),
   };
+}
+
+/** All that pushes the body from outside: F + W, and −m ÿ under an acceleration record, N. */
+export function forceOn({ applied, shake, weight }: Stretch, t: number): number {
+  return applied(t) + shake(t) + weight;
 }
 
 /** W = −m g sin θ, N. */

@@ -1,6 +1,6 @@
 import type { EventKind, Phase } from "@restband/solver";
 import { slipSide, type JudgedBody } from "./body.ts";
-import type { Stretch } from "./inputs.ts";
+import { forceOn, type Stretch } from "./inputs.ts";
 
 export interface JudgedState {
   t: number;
@@ -54,19 +54,14 @@ function moveTo(state: JudgedState, t: number, x: number, v: number): void {
 }
 
 /** ẋ at the end of a step of h with contact force f: midpoint rule, the displacement-proportional force projected onto its set. */
-function endVelocity(
-  { t, x, v }: JudgedState,
-  body: JudgedBody,
-  { force, base }: Stretch,
-  h: number,
-  f: number,
-): number {
+function endVelocity({ t, x, v }: JudgedState, body: JudgedBody, stretch: Stretch, h: number, f: number): number {
   const { inertia, stiffness, damping, proportional } = body;
+  const { base } = stretch;
   const middle = t + h / 2;
   const given = inertia / h + damping / 2 + (stiffness * h) / 4;
   const known =
     (inertia / h) * v +
-    force(middle) +
+    forceOn(stretch, middle) +
     f -
     damping * (v / 2 - base.rate(middle)) -
     stiffness * (x + (h / 4) * v - base.at(middle));
