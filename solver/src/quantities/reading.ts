@@ -1,0 +1,87 @@
+import type { Motion } from "../motion/motion.ts";
+import { emptyState, type State } from "../motion/state.ts";
+import type { EventKind } from "../result.ts";
+import type { Problem } from "../scenario/problem.ts";
+import { channelsOf, type ChannelName, type Channels } from "./channels.ts";
+import { isFed, lowestHz } from "./drive.ts";
+import { Extent } from "./extent.ts";
+import { restTimeOf } from "./rest.ts";
+import { steadyWindow, type SteadyWindow } from "./steady-window.ts";
+
+/** A run with what quantities, outcome, notes and ledger read of it, each part worked out once and only when asked for. */
+export class Reading {
+  readonly problem: Problem;
+  readonly window: SteadyWindow;
+  /** Times in s. */
+  readonly breakAways: readonly number[];
+  readonly stops: readonly number[];
+  readonly turns: readonly number[];
+  /** True where the base feeds: then displacements are told of d. */
+  readonly isFed: boolean;
+  /** Over the whole run, and over its steady window. */
+  readonly whole: Extent;
+  readonly steady: Extent;
+  private readonly channels: Channels;
+  private rest: number | null | undefined;
+
+  /** @param whole, steady channels to survey in one pass when the first of them is read */
+  constructor(
+    readonly motion: Motion,
+    whole: readonly ChannelName[] = [],
+    steady: readonly ChannelName[] = [],
+  ) {
+    const { problem, end } = motion;
+    this.problem = problem;
+    this.window = steadyWindow(problem, end);
+    this.breakAways = timesOf(motion, "break-away");
+    this.stops = timesOf(motion, "stop");
+    this.turns = timesOf(motion, "turn");
+    this.isFed = isFed(problem);
+    this.channels = channelsOf(problem);
+    this.whole = new Extent(motion, this.channels, 0, end, whole);
+    this.steady = new Extent(motion, this.channels, this.window.from, this.window.to, steady);
+  }
+
+  /** Any other stretch of the run. */
+  over(from: number, to: number, ...names: ChannelName[]): Extent {
+    return new Extent(this.motion, this.channels, from, to, names);
+  }
+
+  /** All there is to know at t, right-hand values at an event. */
+  at(t: number): State {
+    const state = emptyState();
+    this.motion.read(this.motion.find(t), t, state);
+    return state;
+  }
+
+  /** The break-aways within the steady window. */
+  get steadyBreakAways(): readonly number[] {
+    return this.within(this.breakAways);
+  }
+
+  /** The stops within the steady window. */
+  get steadyStops(): readonly number[] {
+    return this.within(this.stops);
+  }
+
+  /** Periods of the lowest input frequency that fit in the steady window; null without a harmonic input. */
+  get cycles(): number | null {
+    const hz = lowestHz(this.problem);
+    const length = this.window.to - this.window.from;
+    return hz === null || length === 0 ? null : length * hz;
+  }
+
+  /** When the body stands still for good, s; null where it does not. */
+  get restTime(): number | null {
+    if (this.rest === undefined) this.rest = restTimeOf(this.motion);
+    return this.rest;
+  }
+
+  private within(times: readonly number[]): readonly number[] {
+    return times.filter((t) => t >= this.window.from);
+  }
+}
+
+function timesOf({ events }: Motion, kind: EventKind): readonly number[] {
+  return events.filter((mark) => mark.kind === kind).map(({ t }) => t);
+}

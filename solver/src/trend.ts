@@ -1,0 +1,57 @@
+import type { Reading } from "./quantities/reading.ts";
+
+/** Where the motion of the steady window is going: the excursion (x, or d under a feed) in its parts, one after another. */
+export interface Trend {
+  /** Half peak-to-peak of each part. */
+  readonly amplitudes: readonly number[];
+  /** What the amplitudes tend to, by Aitken's Δ²; null where their differences do not shrink. */
+  readonly limit: number | null;
+  /** True where each amplitude is above the one before. */
+  readonly isRising: boolean;
+  /** Half peak-to-peak and mean of the whole window, and the means of its halves. */
+  readonly amplitude: number;
+  readonly mean: number;
+  readonly halves: readonly [number, number];
+}
+
+/** Amplitudes that differ by less, relative, count as equal; a last one below this share of the run's peak counts as 0. */
+const resolution = 1e-9;
+
+/** Source of the extrapolation: A. C. Aitken 1926, Proc. R. Soc. Edinburgh 46:289 (not held). */
+export function trendOf(reading: Reading): Trend {
+  const { from, to, parts } = reading.window;
+  const extents = Array.from({ length: parts }, (_, i) =>
+    reading.over(from + ((to - from) * i) / parts, from + ((to - from) * (i + 1)) / parts, "excursion"),
+  );
+  const amplitudes = extents.map((extent) => extent.halfSwing("excursion"));
+  const means = extents.map((extent) => extent.mean("excursion"));
+  const last = amplitudes[parts - 1];
+  const isZero = last < resolution * reading.whole.peak("excursion");
+  const highest = Math.max(...extents.map((extent) => extent.max("excursion")));
+  const lowest = Math.min(...extents.map((extent) => extent.min("excursion")));
+  return {
+    amplitudes,
+    limit: isZero ? last : limitOf(amplitudes),
+    isRising: !isZero && rises(amplitudes),
+    amplitude: (highest - lowest) / 2,
+    mean: average(means),
+    halves: [average(means.slice(0, parts / 2)), average(means.slice(parts / 2))],
+  };
+}
+
+function rises(amplitudes: readonly number[]): boolean {
+  return amplitudes.every((value, i) => i === 0 || value > amplitudes[i - 1] * (1 + resolution));
+}
+
+/** a₃ − Δ₂²/(Δ₂ − Δ₁) of the last three; the last where the last two are equal, null where |Δ₂| ≥ |Δ₁|. */
+function limitOf(amplitudes: readonly number[]): number | null {
+  const [first, second, last] = amplitudes.slice(-3);
+  const before = second - first;
+  const step = last - second;
+  if (Math.abs(step) <= resolution * last) return last;
+  return Math.abs(step) < Math.abs(before) ? last - (step * step) / (step - before) : null;
+}
+
+function average(values: readonly number[]): number {
+  return values.reduce((sum, value) => sum + value, 0) / values.length;
+}
