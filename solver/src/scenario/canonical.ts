@@ -1,5 +1,6 @@
 import { sha256 } from "@noble/hashes/sha2.js";
 import { bytesToHex, utf8ToBytes } from "@noble/hashes/utils.js";
+import { jsonText } from "../json-text.ts";
 import type { Scenario, Term } from "./scenario.ts";
 
 /** Records longer than this are named by their digest in the canonical form. */
@@ -7,10 +8,11 @@ const inlinePoints = 1000;
 
 /**
  * The canonical text of a checked scenario (RFC 8785): keys sorted, numbers as ECMAScript prints them, −0 as 0, every
- * default written, long records by their digest. The same scenario gives the same bytes, whoever wrote it.
+ * default written, long records by their digest. The same scenario gives the same bytes, whoever wrote it, and the text
+ * checked and written again is itself.
  */
 export function canonicalText(scenario: Scenario): string {
-  return jsonText(canonicalForm(scenario));
+  return jsonText(canonicalForm(scenario), "sorted");
 }
 
 /** SHA-256 of the canonical text, lower-case hex. */
@@ -35,16 +37,4 @@ export function recordDigest(times: ArrayLike<number>, values: ArrayLike<number>
   for (let i = 0; i < times.length; i++) view.setFloat64(8 * i, times[i] + 0, true);
   for (let i = 0; i < values.length; i++) view.setFloat64(8 * (times.length + i), values[i] + 0, true);
   return bytesToHex(sha256(new Uint8Array(view.buffer)));
-}
-
-/**
- * JSON text with sorted keys and no space. ECMAScript's own printing of numbers and strings is the one RFC 8785 asks for;
- * sorting by `<` compares UTF-16 units, as it asks. Members that are undefined are left out.
- */
-export function jsonText(value: unknown): string {
-  if (Array.isArray(value)) return `[${value.map(jsonText).join(",")}]`;
-  if (typeof value !== "object" || value === null) return JSON.stringify(value);
-  const members = Object.entries(value).filter(([, member]) => member !== undefined);
-  members.sort(([a], [b]) => (a < b ? -1 : 1));
-  return `{${members.map(([key, member]) => `${JSON.stringify(key)}:${jsonText(member)}`).join(",")}}`;
 }

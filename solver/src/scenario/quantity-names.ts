@@ -33,3 +33,5 @@ export const quantityNames = [
   "frictionPowerMean",
   "transmissibility",
 ] as const;
+
+export type QuantityName = (typeof quantityNames)[number];

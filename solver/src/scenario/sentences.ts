@@ -23,12 +23,11 @@ export function numberSentence(field: Field, value: unknown): string {
   return demand(field.label, field.integer ? allowed(field) : rangeOf(field), value);
 }
 
-/** What the bounds allow, in words: "a whole number of 1 or more". */
+/** What the bounds allow, in words: "a whole number, 1 or more". */
 export function allowed(bounds: Bounds): string {
+  const noun = bounds.integer ? "a whole number" : "a number";
   const range = rangeOf(bounds);
-  if (bounds.integer)
-    return `a whole number ${range.startsWith("between") || range === "" ? "" : "of "}${range}`.trimEnd();
-  return range === "" ? "a number" : `a number, ${range}`;
+  return range === "" ? noun : `${noun}, ${range}`;
 }
 
 function rangeOf({ minimum, exclusiveMinimum, maximum, exclusiveMaximum }: Bounds): string {

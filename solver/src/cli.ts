@@ -1,0 +1,89 @@
+import { readFile } from "node:fs/promises";
+import { answerText, parse, refusal, written } from "./cli/answer.ts";
+import { type Command, readArguments, usage, UsageError } from "./cli/arguments.ts";
+import { answerCell, cellsFormat, checkCells } from "./cli/cells.ts";
+import { linesOf, writeLine } from "./cli/lines.ts";
+import { jsonText } from "./json-text.ts";
+import type { Refusal, SimulateOptions } from "./options.ts";
+import { ownMember } from "./scenario/own-member.ts";
+
+const refusedStatus = 1;
+const badUsage = 2;
+
+/** Answers one file: the result on standard output, or every fault on standard error, a line each. */
+async function solveFile(file: string, options: SimulateOptions): Promise<number> {
+  const { text, refused } = written(answerText(await readScenarioFile(file), options));
+  if (refused === null) {
+    await writeLine(process.stdout, text);
+    return 0;
+  }
+  for (const { path, message } of refused.error.faults) process.stderr.write(`${told(path, message)}\n`);
+  return refusedStatus;
+}
+
+async function readScenarioFile(file: string): Promise<string> {
+  try {
+    return await readFile(file, "utf8");
+  } catch (error) {
+    throw new UsageError(`The file cannot be read: ${(error as Error).message}.`);
+  }
+}
+
+/** Answers each line in its place. A first line that is a header of cells makes the others cells. */
+async function solveLines(options: SimulateOptions): Promise<number> {
+  const lines = linesOf(process.stdin);
+  const first = await lines.next();
+  if (first.done) return 0;
+  const header = parse(first.value);
+  if ("value" in header && ownMember(header.value, "format") === cellsFormat)
+    return solveCells(header.value, lines, options);
+  let status = await solveLine(first.value, 1, options);
+  let number = 1;
+  for await (const line of lines) status = Math.max(status, await solveLine(line, ++number, options));
+  return status;
+}
+
+async function solveLine(line: string, number: number, options: SimulateOptions): Promise<number> {
+  const { text, refused } = written(answerText(line, options));
+  await writeLine(process.stdout, text);
+  return refused === null ? 0 : tellRefused(refused, `line ${number}: `);
+}
+
+/** A refused cell is a cell of the sweep: only a header that is refused is a failure. */
+async function solveCells(header: unknown, lines: AsyncIterable<string>, options: SimulateOptions): Promise<number> {
+  const { cells, faults } = checkCells(header);
+  if (cells === null) {
+    const refused = refusal(faults);
+    await writeLine(process.stdout, jsonText(refused));
+    return tellRefused(refused, "line 1: ");
+  }
+  for await (const line of lines) await writeLine(process.stdout, jsonText(answerCell(cells, line, options)));
+  return 0;
+}
+
+function tellRefused({ error: { path, message } }: Refusal, where: string): number {
+  process.stderr.write(`${where}${told(path, message)}\n`);
+  return refusedStatus;
+}
+
+const told = (path: string, message: string) => (path === "" ? message : `${path}: ${message}`);
+
+async function main(): Promise<number> {
+  const command: Command | null = readArguments(process.argv.slice(2));
+  if (command === null) {
+    process.stdout.write(usage);
+    return 0;
+  }
+  return command.file === null ? solveLines(command.options) : solveFile(command.file, command.options);
+}
+
+// A reader that has seen enough closes the pipe: that ends the work and is no failure.
+process.stdout.on("error", (error: NodeJS.ErrnoException) => process.exit(error.code === "EPIPE" ? 0 : 1));
+
+try {
+  process.exitCode = await main();
+} catch (error) {
+  if (!(error instanceof UsageError)) throw error;
+  process.stderr.write(`${error.message}\n\n${usage}`);
+  process.exitCode = badUsage;
+}
