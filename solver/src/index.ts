@@ -19,3 +19,5 @@ export { fieldPaths } from "./scenario/field-paths.ts";
 export * from "./scenario/fields.ts";
 export { quantityNames } from "./scenario/quantity-names.ts";
 export { unsupported } from "./scenario/unsupported.ts";
+export { quantities, quantityOf } from "./quantities/index.ts";
+export type { Quantity } from "./quantities/quantity.ts";
