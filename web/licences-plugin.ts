@@ -1,8 +1,7 @@
 import { existsSync, readdirSync, readFileSync } from "node:fs";
 import { dirname, join } from "node:path";
 import type { Plugin } from "vite";
-
-const id = "virtual:licences";
+import type { LicensedPackage } from "./src/licences.ts";
 
 interface Manifest {
   name: string;
@@ -11,17 +10,17 @@ interface Manifest {
   dependencies?: Record<string, string>;
 }
 
-/** Gives the page `virtual:licences`: every package the product is made of, with its licence in its own words. */
+/** Fills `src/licences.ts`: every package the workspaces are made of, with its licence in its own words. */
 export function licences(workspaces: readonly string[]): Plugin {
   return {
     name: "licences",
-    resolveId: (source) => (source === id ? `\0${id}` : null),
-    load: (source) => (source === `\0${id}` ? `export const packages = ${JSON.stringify(gather(workspaces))};` : null),
+    load: (id) =>
+      id.endsWith("/web/src/licences.ts") ? `export const packages = ${JSON.stringify(gather(workspaces))};` : null,
   };
 }
 
-function gather(workspaces: readonly string[]) {
-  const found = new Map<string, { name: string; version: string; licence: string; text: string }>();
+function gather(workspaces: readonly string[]): LicensedPackage[] {
+  const found = new Map<string, LicensedPackage>();
   const visit = (folder: string) => {
     for (const name of Object.keys(manifestOf(folder).dependencies ?? {})) {
       const place = locate(name, folder);

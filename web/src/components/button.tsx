@@ -24,6 +24,7 @@ export function buttonClass(kind: ButtonKind = "plain", className?: string): str
 }
 
 interface ButtonProps extends ComponentProps<"button"> {
+  "data-first-focus"?: boolean;
   kind?: ButtonKind;
   /** While true the button keeps the focus but does nothing, and says so. */
   isBusy?: boolean;

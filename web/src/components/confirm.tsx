@@ -43,7 +43,9 @@ export function Confirm({ isOpen, title, children, action, onConfirm, onClose }:
         <Button kind="danger" isBusy={isBusy} onClick={confirm}>
           {action}
         </Button>
-        <Button onClick={close}>Leave it as it is</Button>
+        <Button data-first-focus onClick={close}>
+          Cancel
+        </Button>
       </DialogActions>
     </Dialog>
   );

@@ -14,13 +14,20 @@ interface DialogProps {
   children: ReactNode;
 }
 
-/** The browser's own modal dialog in our look: it keeps the focus inside and gives it back at the end. */
+/**
+ * The browser's own modal dialog in our look: it keeps the focus inside and gives it back at the end. What carries
+ * `data-first-focus` has the focus at first.
+ */
 export function Dialog({ isOpen, title, onClose, canClose = true, isWide, children }: DialogProps) {
   const dialog = useRef<HTMLDialogElement>(null);
   const titleId = useId();
   useEffect(() => {
     const element = dialog.current;
-    if (isOpen && element && !element.open) element.showModal();
+    if (isOpen && element && !element.open) {
+      element.showModal();
+      // Without a mark the browser takes the first thing it finds, which is the cross.
+      element.querySelector<HTMLElement>("[data-first-focus]")?.focus();
+    }
     if (!isOpen && element?.open) element.close();
   }, [isOpen]);
   return (

@@ -4,6 +4,7 @@ import { TextField } from "./text-field.tsx";
 /** A password, with a button that shows what is typed. */
 export function PasswordField(props: Omit<ComponentProps<typeof TextField>, "type" | "inset">) {
   const [isShown, setShown] = useState(false);
+  const act = isShown ? "hide" : "show";
   return (
     <TextField
       {...props}
@@ -11,9 +12,8 @@ export function PasswordField(props: Omit<ComponentProps<typeof TextField>, "typ
       autoCapitalize="off"
       spellCheck={false}
       inset={
-        <button type="button" className="link" aria-pressed={isShown} onClick={() => setShown(!isShown)}>
-          {isShown ? "hide" : "show"}
-          <span className="sr-only"> the password</span>
+        <button type="button" className="link" aria-label={`${act} the password`} onClick={() => setShown(!isShown)}>
+          {act}
         </button>
       }
     />

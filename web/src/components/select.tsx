@@ -38,7 +38,7 @@ export function PlainSelect({ choices, isQuiet, className, ...select }: PlainSel
 }
 
 const quietClass =
-  "min-h-6 appearance-none rounded bg-transparent pr-3.5 text-13 text-slip underline underline-offset-3 pointer-coarse:min-h-[44px] [&>option]:bg-raised [&>option]:text-ink";
+  "field-sizing-content min-h-6 appearance-none rounded bg-transparent pr-3.5 text-13 text-slip underline underline-offset-3 pointer-coarse:min-h-[44px] [&>option]:bg-raised [&>option]:text-ink";
 
 interface SelectFieldProps extends Omit<PlainSelectProps, "id" | "className">, FieldProps {}
 

@@ -3,6 +3,8 @@ import { classNames } from "./class-names.ts";
 import { controlClass, Field, type FieldProps } from "./field.tsx";
 
 interface TextFieldProps extends Omit<ComponentProps<"input">, "id" | "className">, FieldProps {
+  /** Has the focus when the dialog around it opens. */
+  "data-first-focus"?: boolean;
   /** Numbers stand in the mono face. */
   isFigure?: boolean;
   /** Inside the control, at its right end. */

@@ -2,9 +2,9 @@ import { useQueryClient } from "@tanstack/react-query";
 import { useEffect } from "react";
 import { call } from "../api/client.ts";
 import { useLostSince } from "../api/connection.ts";
+import { sayClock } from "../format/words.ts";
 
 const everyMs = 3000;
-const clock = new Intl.DateTimeFormat(undefined, { hour: "2-digit", minute: "2-digit" });
 
 /** Says that no server answers and since when, asks again until one does, then has everything on the page read anew. */
 export function ConnectionLine() {
@@ -23,7 +23,7 @@ export function ConnectionLine() {
       {lostSince && (
         <p className="border-b-2 border-broken bg-raised">
           <span className="page-width block py-2">
-            No answer from the server since {clock.format(lostSince)}. Trying again; what you typed stays.
+            No answer from the server since {sayClock(lostSince)}. Trying again; what you typed stays.
           </span>
         </p>
       )}

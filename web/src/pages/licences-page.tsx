@@ -1,11 +1,11 @@
 import { Link } from "react-router-dom";
-import { packages } from "virtual:licences";
 import monoText from "../../../fonts/atkinson-hyperlegible-mono/LICENSE.txt?raw";
 import nextText from "../../../fonts/atkinson-hyperlegible-next/LICENSE.txt?raw";
 import symbolsText from "../../../fonts/restband-symbols/LICENSE.txt?raw";
 import stixText from "../../../fonts/stix-two-text/LICENSE.txt?raw";
 import { Mark } from "../components/mark.tsx";
 import { Section, WorkedPage } from "../components/section.tsx";
+import { packages } from "../licences.ts";
 import { paths } from "../paths.ts";
 
 const fonts = [

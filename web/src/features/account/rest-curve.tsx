@@ -51,12 +51,15 @@ export function RestCurve() {
         style={{ left: `${restAt / 10}%`, top: percent(rest) }}
       />
       <span
-        className="absolute -translate-x-1/2 -translate-y-full pb-2.5 text-13 whitespace-nowrap"
+        className="absolute -translate-x-1/4 -translate-y-full pb-2.5 text-13 whitespace-nowrap desk:-translate-x-1/2"
         style={{ left: `${restAt / 10}%`, top: percent(1) }}
       >
         stops here, and stays
       </span>
-      <span className="absolute right-(--page-pad) pt-2 text-13 text-band-line" style={{ top: percent(-1) }}>
+      <span
+        className="absolute right-(--page-pad) pt-2 text-right text-13 text-band-line max-desk:w-[38%]"
+        style={{ top: percent(-1) }}
+      >
         rest band: wherever it stops in here, friction holds it
       </span>
     </figure>

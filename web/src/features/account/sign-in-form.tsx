@@ -53,6 +53,7 @@ export function SignInForm({ email = "", onSignedIn }: SignInFormProps) {
       <PasswordField
         label="Password"
         autoComplete="current-password"
+        data-first-focus={email !== "" || undefined}
         error={errors.password?.message}
         {...register("password")}
       />

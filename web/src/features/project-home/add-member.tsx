@@ -53,7 +53,7 @@ function AddMemberForm({ projectId, onDone }: { projectId: string; onDone: () =>
         type="email"
         autoCapitalize="off"
         spellCheck={false}
-        autoFocus
+        data-first-focus
         help="They need an account first."
         error={formState.errors.email?.message}
         {...register("email", { setValueAs: (value: string) => value.trim() })}

@@ -1,5 +1,5 @@
 import type { LimitVerdict } from "@restband/solver";
-import { capitalised, sayCount, sayMany } from "../../format/words.ts";
+import { capitalised, listed, sayCount, sayMany } from "../../format/words.ts";
 
 /** How a scenario stands against its limits; `unjudged` where at least one cannot be judged and none is broken. */
 export type Standing = "broken" | "unjudged" | "kept" | "no-limits";
@@ -31,20 +31,24 @@ export function limitsWords(limits: readonly LimitVerdict[]): string {
 export function headline(count: number, standings: readonly Standing[]): string {
   if (count === 0) return "No scenario yet.";
   const opening = `${capitalised(sayMany(count, "scenario"))}.`;
-  const judged = standings.length;
-  if (judged === 0) return opening;
-  const broken = standings.filter((standing) => standing === "broken").length;
-  const withLimits = standings.filter((standing) => standing !== "no-limits").length;
-  if (judged < count && broken === 0) return opening;
-  const verdict = verdictWords(broken, withLimits, judged === count && standings.every((s) => s === "kept"));
-  if (verdict === "") return opening;
-  const sofar = judged < count ? `, of ${sayCount(judged)} computed so far` : "";
-  return `${opening} ${capitalised(verdict)}${sofar}.`;
+  const of = (standing: Standing) => standings.filter((each) => each === standing).length;
+  const isWhole = standings.length === count;
+  const faults = listed([breaking(of("broken")), isWhole ? unjudged(of("unjudged")) : ""].filter(Boolean));
+  if (faults && !isWhole) return `${opening} ${capitalised(faults)}, of ${sayCount(standings.length)} computed so far.`;
+  const verdict = faults || (isWhole ? keeping(of("kept"), count) : "");
+  return verdict ? `${opening} ${capitalised(verdict)}.` : opening;
 }
 
-function verdictWords(broken: number, withLimits: number, allKept: boolean): string {
-  if (broken === 1) return "one breaks its limits";
-  if (broken > 1) return `${sayCount(broken)} break their limits`;
-  if (allKept) return withLimits === 1 ? "it keeps its limits" : "all keep their limits";
-  return withLimits > 0 ? "none breaks its limits" : "";
+function breaking(count: number): string {
+  if (count === 0) return "";
+  return count === 1 ? "one breaks its limits" : `${sayCount(count)} break their limits`;
+}
+
+const unjudged = (count: number): string => (count === 0 ? "" : `${sayCount(count)} cannot be judged`);
+
+/** Where none is broken and none in doubt. */
+function keeping(kept: number, count: number): string {
+  if (kept === 0) return "";
+  if (kept < count) return "none breaks its limits";
+  return count === 1 ? "it keeps its limits" : "all keep their limits";
 }

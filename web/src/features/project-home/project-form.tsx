@@ -39,7 +39,7 @@ export function ProjectForm({ project, action, save, onCancel }: ProjectFormProp
   });
   return (
     <form onSubmit={submit} noValidate className="flex flex-col gap-5">
-      <TextField label="Name" autoFocus error={errors.name?.message} {...register("name")} />
+      <TextField label="Name" data-first-focus error={errors.name?.message} {...register("name")} />
       <TextArea
         label="What it is about"
         help="Shown under the name to everybody in the project. May be left empty."

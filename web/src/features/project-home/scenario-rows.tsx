@@ -28,7 +28,7 @@ export function ScenarioRows({ scenarios, row }: ScenarioRowsProps) {
 
 function SeenItem({ children }: { children: (isSeen: boolean) => ReactNode }) {
   const item = useRef<HTMLLIElement>(null);
-  const [isSeen, setSeen] = useState(typeof IntersectionObserver === "undefined");
+  const [isSeen, setSeen] = useState(false);
   useEffect(() => {
     if (isSeen || !item.current) return;
     const see = (entries: IntersectionObserverEntry[]) => entries.some((each) => each.isIntersecting) && setSeen(true);
