@@ -25,14 +25,17 @@ export function trendOf(reading: Reading): Trend {
   );
   const amplitudes = extents.map((extent) => extent.halfSwing("excursion"));
   const means = extents.map((extent) => extent.mean("excursion"));
+  const limit = limitOf(amplitudes);
+  const isRising = rises(amplitudes);
   const last = amplitudes[parts - 1];
-  const isZero = last < resolution * reading.whole.peak("excursion");
+  // Asked only where it matters: it takes a look at the whole run.
+  const isZero = (isRising || limit !== last) && last < resolution * reading.whole.peak("excursion");
   const highest = Math.max(...extents.map((extent) => extent.max("excursion")));
   const lowest = Math.min(...extents.map((extent) => extent.min("excursion")));
   return {
     amplitudes,
-    limit: isZero ? last : limitOf(amplitudes),
-    isRising: !isZero && rises(amplitudes),
+    limit: isZero ? last : limit,
+    isRising: isRising && !isZero,
     amplitude: (highest - lowest) / 2,
     mean: average(means),
     halves: [average(means.slice(0, parts / 2)), average(means.slice(parts / 2))],
