@@ -1,4 +1,4 @@
-import { useEffect, useId, useRef, type ReactNode } from "react";
+import { Suspense, useEffect, useId, useRef, type ReactNode, type RefObject } from "react";
 import { Button } from "./button.tsx";
 import { classNames } from "./class-names.ts";
 import { Icon } from "./icon.tsx";
@@ -16,7 +16,7 @@ interface DialogProps {
 
 /**
  * The browser's own modal dialog in our look: it keeps the focus inside and gives it back at the end. What carries
- * `data-first-focus` has the focus at first.
+ * `data-first-focus` has the focus at first. What is inside may be loaded lazily.
  */
 export function Dialog({ isOpen, title, onClose, canClose = true, isWide, children }: DialogProps) {
   const dialog = useRef<HTMLDialogElement>(null);
@@ -25,8 +25,7 @@ export function Dialog({ isOpen, title, onClose, canClose = true, isWide, childr
     const element = dialog.current;
     if (isOpen && element && !element.open) {
       element.showModal();
-      // Without a mark the browser takes the first thing it finds, which is the cross.
-      element.querySelector<HTMLElement>("[data-first-focus]")?.focus();
+      focusFirst(dialog);
     }
     if (!isOpen && element?.open) element.close();
   }, [isOpen]);
@@ -55,9 +54,24 @@ export function Dialog({ isOpen, title, onClose, canClose = true, isWide, childr
           </Button>
         )}
       </header>
-      {isOpen && children}
+      {isOpen && (
+        <Suspense fallback={<p className="late text-quiet">Opening</p>}>
+          <Contents dialog={dialog}>{children}</Contents>
+        </Suspense>
+      )}
     </dialog>
   );
+}
+
+/** Tells when what is inside has come, at once or later. */
+function Contents({ dialog, children }: { dialog: RefObject<HTMLDialogElement | null>; children: ReactNode }) {
+  useEffect(() => focusFirst(dialog), [dialog]);
+  return children;
+}
+
+/** Without a mark the browser takes the first thing it finds, which is the cross. */
+function focusFirst({ current }: RefObject<HTMLDialogElement | null>): void {
+  current?.querySelector<HTMLElement>("[data-first-focus]")?.focus();
 }
 
 function isOutside({ currentTarget, clientX, clientY }: React.MouseEvent<HTMLDialogElement>): boolean {

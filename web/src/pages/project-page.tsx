@@ -1,6 +1,6 @@
 import type { Project } from "@restband/api/contract";
 import { useSuspenseQueries } from "@tanstack/react-query";
-import { useState } from "react";
+import { lazy, useState } from "react";
 import { useNavigate, useParams } from "react-router-dom";
 import { membersQuery } from "../api/members.ts";
 import { projectQuery, useChangeProject } from "../api/projects.ts";
@@ -15,11 +15,15 @@ import { WorkHeader } from "../features/account/work-header.tsx";
 import { headline, type Standing } from "../features/project-home/headline.ts";
 import { newScenario } from "../features/project-home/new-scenario.ts";
 import { PeopleColumn } from "../features/project-home/people-column.tsx";
-import { ProjectForm } from "../features/project-home/project-form.tsx";
 import { mayEdit } from "../features/project-home/roles.ts";
 import { ScenarioRows } from "../features/project-home/scenario-rows.tsx";
 import { paths } from "../paths.ts";
 import { AnsweredRow } from "./answered-row.tsx";
+
+// Forms are loaded when one is opened: they are no part of the first paint.
+const ProjectForm = lazy(async () => ({
+  default: (await import("../features/project-home/project-form.tsx")).ProjectForm,
+}));
 
 /** One project: its scenarios with their answers, and its people. */
 export function ProjectPage() {
