@@ -1,23 +1,27 @@
 /** The door of the solver: all that others may use. */
 export { z } from "./scenario/zod.ts";
 export * from "./scenario/scenario.ts";
-export * from "./result.ts";
-export type { Bounds, Dimension, Field } from "./field.ts";
-export type { Refusal, SimulateOptions } from "./options.ts";
-export type { Choice, ChoiceOption, Rows } from "./field.ts";
+export { canonicalForm, canonicalText, digestOf, recordDigest } from "./scenario/canonical.ts";
+export { checkScenario, type Checked } from "./scenario/check-scenario.ts";
+export { compileProblem, gravity, normalForce } from "./scenario/compile-problem.ts";
+export { fieldPaths } from "./scenario/field-paths.ts";
+export * from "./scenario/fields.ts";
+export type { Problem } from "./scenario/problem.ts";
+export { quantityNames, type QuantityName } from "./scenario/quantity-names.ts";
+export { unsupported } from "./scenario/unsupported.ts";
+
+export type { Bounds, Choice, ChoiceOption, Dimension, Field, Rows } from "./field.ts";
 export { frictionLaws, lawOf } from "./friction/index.ts";
 export type { FrictionLaw } from "./friction/friction-law.ts";
 export { excitationTerms, termOf } from "./excitation/index.ts";
 export type { ExcitationTerm } from "./excitation/excitation-term.ts";
 export { solidDampings, solidOf } from "./solid/index.ts";
 export type { SolidDamping } from "./solid/solid-damping.ts";
-export { canonicalForm, canonicalText, digestOf, recordDigest } from "./scenario/canonical.ts";
-export { checkScenario, type Checked } from "./scenario/check-scenario.ts";
-export { compileProblem, gravity, normalForce } from "./scenario/compile-problem.ts";
-export type { Problem } from "./scenario/problem.ts";
-export { fieldPaths } from "./scenario/field-paths.ts";
-export * from "./scenario/fields.ts";
-export { quantityNames } from "./scenario/quantity-names.ts";
-export { unsupported } from "./scenario/unsupported.ts";
+
+export type { Refusal, SimulateOptions } from "./options.ts";
+export * from "./result.ts";
+export { jsonText } from "./json-text.ts";
+export { simulate } from "./simulate.ts";
+export { solverVersion } from "./version.ts";
 export { quantities, quantityOf } from "./quantities/index.ts";
 export type { Quantity } from "./quantities/quantity.ts";

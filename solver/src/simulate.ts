@@ -19,7 +19,7 @@ const defaultSamples = 2001;
  * that cannot go on is no refusal: `ended` says why, and the motion so far is returned.
  */
 export function simulate(scenario: Scenario, options: SimulateOptions = {}): Result | Refusal {
-  const fault = unsupported(scenario) ?? methodFault(options);
+  const fault = unsupported(scenario, options.records) ?? methodFault(options);
   if (fault !== null) return { error: { ...fault, faults: [fault] } };
   const motion = runExact(compileProblem(scenario, options.records), options.progress);
   return describe(motion, options);
