@@ -1,5 +1,5 @@
 import { emptyState, type State } from "./motion/state.ts";
-import type { ChannelName } from "./quantities/channels.ts";
+import type { IntegrandName } from "./quantities/channels.ts";
 import type { Reading } from "./quantities/reading.ts";
 import type { Energy } from "./result.ts";
 import type { Problem } from "./scenario/problem.ts";
@@ -10,13 +10,13 @@ const powers = {
   workBase: "basePower",
   workWeight: "weightPower",
   workCounterface: "counterfacePower",
-  heatContact: "frictionPower",
-  heatViscous: "viscousPower",
-  heatSolid: "solidPower",
-} as const satisfies Partial<Record<keyof Energy, ChannelName>>;
+  heatContact: "contactHeat",
+  heatViscous: "viscousHeat",
+  heatSolid: "solidHeat",
+} as const satisfies Partial<Record<keyof Energy, IntegrandName>>;
 
 /** The channels the ledger integrates over the whole run. */
-export const energyChannels: readonly ChannelName[] = Object.values(powers);
+export const energyChannels: readonly IntegrandName[] = Object.values(powers);
 
 /**
  * The energy ledger of a run, J: what force, base, weight and counterface put in; what contact, damper and solid damping

@@ -7,6 +7,6 @@ export const driftPerCycle: Quantity = {
   signed: true,
   meaning: "∫v_r dt per period of the lowest input frequency, over the steady window",
   absent: "no input is harmonic",
-  steady: ["slip"],
-  value: ({ cycles, steady }) => (cycles === null ? null : steady.integral("slip") / cycles),
+  steady: ["drift"],
+  value: ({ cycles, steady }) => (cycles === null ? null : steady.integral("drift") / cycles),
 };

@@ -1,33 +1,37 @@
 import type { Motion } from "../motion/motion.ts";
-import { survey, type Survey } from "../motion/survey.ts";
-import type { ChannelName, Channels } from "./channels.ts";
+import { emptyState } from "../motion/state.ts";
+import type { Survey } from "../motion/survey.ts";
+import type { AnyChannel, ChannelName, Channels } from "./channels.ts";
+
+/** An integral below this share of ∫ |channel| dt is the rounding of a sum of panels, and 0. */
+const rounding = 1e-14;
 
 /**
  * Extremes, means and integrals of channels over a window of a run. The channels named beforehand are surveyed together
  * when the first of them is asked for; one not named costs a pass of its own.
  */
 export class Extent {
-  private readonly surveys = new Map<ChannelName, Survey>();
+  private readonly surveys = new Map<AnyChannel, Survey>();
 
   constructor(
     private readonly motion: Motion,
     private readonly channels: Channels,
     readonly from: number,
     readonly to: number,
-    private readonly named: readonly ChannelName[],
+    private readonly named: readonly AnyChannel[],
   ) {}
 
   min(name: ChannelName): number {
-    return this.surveyOf(name).min(this.channels[name]);
+    return this.surveyOf(name).min(this.channels.of(name));
   }
 
   max(name: ChannelName): number {
-    return this.surveyOf(name).max(this.channels[name]);
+    return this.surveyOf(name).max(this.channels.of(name));
   }
 
   /** Larger of |min| and |max|. */
   peak(name: ChannelName): number {
-    return this.surveyOf(name).peak(this.channels[name]);
+    return this.surveyOf(name).peak(this.channels.of(name));
   }
 
   /** Half peak-to-peak. */
@@ -35,28 +39,32 @@ export class Extent {
     return (this.max(name) - this.min(name)) / 2;
   }
 
-  integral(name: ChannelName): number {
-    return this.surveyOf(name).integral(this.channels[name]);
+  /** ∫ dt over the window; 0 where rounding is all there is of it. */
+  integral(name: AnyChannel): number {
+    const surveyed = this.surveyOf(name);
+    const channel = this.channels.of(name);
+    const integral = surveyed.integral(channel);
+    return Math.abs(integral) <= rounding * surveyed.gross(channel) ? 0 : integral;
   }
 
   /** Mean over time; the value itself where the window is an instant. */
-  mean(name: ChannelName): number {
+  mean(name: AnyChannel): number {
     const { from, to } = this;
-    return to > from ? this.integral(name) / (to - from) : this.max(name);
+    return to > from ? this.integral(name) / (to - from) : this.valueAt(to, name);
   }
 
-  private surveyOf(name: ChannelName): Survey {
-    return this.surveys.get(name) ?? this.survey(this.named.includes(name) ? this.named : [name], name);
+  private valueAt(t: number, name: AnyChannel): number {
+    const state = emptyState();
+    this.motion.read(this.motion.find(t), t, state);
+    return this.channels.of(name)(state);
   }
 
-  private survey(names: readonly ChannelName[], wanted: ChannelName): Survey {
-    const made = survey(
-      this.motion,
-      this.from,
-      this.to,
-      names.map((name) => this.channels[name]),
-    );
-    for (const name of [...names, wanted]) this.surveys.set(name, made);
-    return made;
+  private surveyOf(name: AnyChannel): Survey {
+    const made = this.surveys.get(name);
+    if (made !== undefined) return made;
+    const together = this.named.includes(name) ? this.named : [name];
+    const survey = this.channels.survey(this.motion, this.from, this.to, together);
+    for (const each of together) this.surveys.set(each, survey);
+    return survey;
   }
 }

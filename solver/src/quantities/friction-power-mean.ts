@@ -6,6 +6,6 @@ export const frictionPowerMean: Quantity = {
   dimension: "power",
   signed: false,
   meaning: "mean of −f v_r over the steady window, what the contact turns into heat",
-  steady: ["frictionPower"],
-  value: ({ steady }) => steady.mean("frictionPower"),
+  steady: ["contactHeat"],
+  value: ({ steady }) => steady.mean("contactHeat"),
 };

@@ -1,6 +1,6 @@
 import type { Dimension } from "../field.ts";
 import type { quantityNames } from "../scenario/quantity-names.ts";
-import type { ChannelName } from "./channels.ts";
+import type { AnyChannel } from "./channels.ts";
 import type { Reading } from "./reading.ts";
 
 /**
@@ -21,8 +21,8 @@ export interface Quantity {
   /** Where the value may be null: why a run has none, as the end of "… has no value here: ". */
   readonly absent?: string;
   /** Channels read over the whole run, and over the steady window: those of all quantities asked for are surveyed in one pass. */
-  readonly whole?: readonly ChannelName[];
-  readonly steady?: readonly ChannelName[];
+  readonly whole?: readonly AnyChannel[];
+  readonly steady?: readonly AnyChannel[];
   /** The value in SI; null exactly where it has no meaning. */
   value(reading: Reading): number | null;
 }

@@ -2,7 +2,7 @@ import type { Motion } from "../motion/motion.ts";
 import { emptyState, type State } from "../motion/state.ts";
 import type { EventKind } from "../result.ts";
 import type { Problem } from "../scenario/problem.ts";
-import { channelsOf, type ChannelName, type Channels } from "./channels.ts";
+import { Channels, type AnyChannel } from "./channels.ts";
 import { isFed, lowestHz } from "./drive.ts";
 import { Extent } from "./extent.ts";
 import { restTimeOf } from "./rest.ts";
@@ -27,8 +27,8 @@ export class Reading {
   /** @param whole, steady channels to survey in one pass when the first of them is read */
   constructor(
     readonly motion: Motion,
-    whole: readonly ChannelName[] = [],
-    steady: readonly ChannelName[] = [],
+    whole: readonly AnyChannel[] = [],
+    steady: readonly AnyChannel[] = [],
   ) {
     const { problem, end } = motion;
     this.problem = problem;
@@ -37,13 +37,13 @@ export class Reading {
     this.stops = timesOf(motion, "stop");
     this.turns = timesOf(motion, "turn");
     this.isFed = isFed(problem);
-    this.channels = channelsOf(problem);
+    this.channels = new Channels(problem);
     this.whole = new Extent(motion, this.channels, 0, end, whole);
     this.steady = new Extent(motion, this.channels, this.window.from, this.window.to, steady);
   }
 
   /** Any other stretch of the run. */
-  over(from: number, to: number, ...names: ChannelName[]): Extent {
+  over(from: number, to: number, ...names: AnyChannel[]): Extent {
     return new Extent(this.motion, this.channels, from, to, names);
   }
 

@@ -11,7 +11,6 @@ export const velocityRipple: Quantity = {
   value: ({ isFed, steady }) => {
     if (!isFed) return null;
     const mean = Math.abs(steady.mean("velocity"));
-    // A mean of 0 is one but for rounding of the integral.
-    return mean <= 1e-13 * steady.peak("velocity") ? null : (2 * steady.halfSwing("velocity")) / mean;
+    return mean === 0 ? null : (2 * steady.halfSwing("velocity")) / mean;
   },
 };
