@@ -20,9 +20,13 @@ export default defineConfig({
         }),
         oxc: { jsx: { runtime: "automatic" as const } },
       },
-      // Needs a database, given by the environment (`npm test` starts one).
-      project("api", ["test/api/**/*.test.ts"], { testTimeout: minutes(1), hookTimeout: minutes(1) }),
+      project("api", ["test/api/**/*.test.ts"], {
+        testTimeout: minutes(1),
+        hookTimeout: minutes(1),
+        globalSetup: ["test/support/database-setup.ts"],
+      }),
       project("journeys", ["test/journeys/**/*.test.ts"], {
+        globalSetup: ["test/support/database-setup.ts"],
         testTimeout: minutes(3),
         hookTimeout: minutes(2),
         fileParallelism: false,

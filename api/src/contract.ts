@@ -41,7 +41,13 @@ export const routes = {
 
   listProjects: { method: "GET", path: "/projects", status: 200, response: z.array(projectSchema) },
   createProject: { method: "POST", path: "/projects", body: projectDraftSchema, status: 201, response: projectSchema },
-  readProject: { method: "GET", path: "/projects/:projectId", params: projectParams, status: 200, response: projectSchema },
+  readProject: {
+    method: "GET",
+    path: "/projects/:projectId",
+    params: projectParams,
+    status: 200,
+    response: projectSchema,
+  },
   changeProject: {
     method: "PATCH",
     path: "/projects/:projectId",
@@ -74,7 +80,12 @@ export const routes = {
     status: 200,
     response: memberSchema,
   },
-  removeMember: { method: "DELETE", path: "/projects/:projectId/members/:accountId", params: memberParams, status: 204 },
+  removeMember: {
+    method: "DELETE",
+    path: "/projects/:projectId/members/:accountId",
+    params: memberParams,
+    status: 204,
+  },
 
   listScenarios: {
     method: "GET",

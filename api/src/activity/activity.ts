@@ -1,0 +1,22 @@
+export type Act =
+  | "account.signed-up"
+  | "account.claimed"
+  | "project.created"
+  | "project.changed"
+  | "member.added"
+  | "member.changed"
+  | "member.removed"
+  | "scenario.created"
+  | "scenario.saved";
+
+export interface Activity {
+  /** Null for what concerns no project. */
+  readonly projectId: string | null;
+  /** Who did it. */
+  readonly accountId: string;
+  readonly act: Act;
+  /** The member or scenario it was done to. */
+  readonly subjectId?: string;
+  /** What is worth telling of it; never a secret. */
+  readonly detail?: Readonly<Record<string, string | number>>;
+}

@@ -1,0 +1,46 @@
+import type { Database } from "../database/database.ts";
+import { normaliseEmail } from "../accounts/email.ts";
+import { demoPeople } from "./demo-people.ts";
+
+/**
+ * Takes the demo away again: the projects that people of the demo own, all that is in them, and the people themselves
+ * where no other project has them. Needs the migrations account, for the trail of those projects goes too.
+ */
+export async function removeDemo(database: Database): Promise<void> {
+  await database.transaction(async (transaction) => {
+    const people = await peopleOf(transaction);
+    const projects = transaction("members")
+      .whereIn("account_id", people)
+      .where({ role: "owner" })
+      .distinct("project_id");
+    const ids = (await projects).map((row: { project_id: string }) => row.project_id);
+    for (const table of ["activity", "scenarios", "members"])
+      await transaction(table).whereIn("project_id", ids).delete();
+    await transaction("projects").whereIn("id", ids).delete();
+    await removePeople(transaction, people);
+  });
+}
+
+async function peopleOf(transaction: Database): Promise<string[]> {
+  const emails = Object.values(demoPeople).map((person) => normaliseEmail(person.email));
+  const rows = await transaction("accounts").whereIn("email_normalised", emails).select<{ id: string }[]>("id");
+  return rows.map((row) => row.id);
+}
+
+/** Somebody who was added to a project of other people stays: what they did there names them. */
+async function removePeople(transaction: Database, people: string[]): Promise<void> {
+  const kept = new Set<string>();
+  for (const [table, column] of [
+    ["members", "account_id"],
+    ["scenarios", "updated_by"],
+  ] as const) {
+    const rows = await transaction(table).whereIn(column, people).distinct<{ id: string }[]>(`${column} as id`);
+    for (const { id } of rows) kept.add(id);
+  }
+  await transaction("accounts")
+    .whereIn(
+      "id",
+      people.filter((id) => !kept.has(id)),
+    )
+    .delete();
+}

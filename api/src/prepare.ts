@@ -1,0 +1,36 @@
+import { parseArgs } from "node:util";
+import { openDatabase } from "./database/database.ts";
+import { grantToServer } from "./database/grants.ts";
+import { migrateUp } from "./database/migrate.ts";
+import { demoPeople } from "./demo/demo-people.ts";
+import { removeDemo } from "./demo/remove-demo.ts";
+import { seedDemo } from "./demo/seed-demo.ts";
+
+/**
+ * Makes a database ready for the server: migrations, rights of the server's account, the demo where nobody has an account
+ * yet (or anew with `--reset-demo`). The last line of its output is JSON: the migrations carried out, and who can sign in
+ * to the demo.
+ */
+const { values: options } = parseArgs({ options: { "reset-demo": { type: "boolean", default: false } } });
+const { RESTBAND_MIGRATIONS_URL: url, RESTBAND_GRANT_TO: grantTo, RESTBAND_DEMO_PASSWORD: password } = process.env;
+if (!url || !password) throw new Error("RESTBAND_MIGRATIONS_URL and RESTBAND_DEMO_PASSWORD have to be set.");
+
+const database = openDatabase(url);
+try {
+  const migrated = await migrateUp(database);
+  if (grantTo) await grantToServer(database, grantTo);
+  if (options["reset-demo"]) await removeDemo(database);
+  if (options["reset-demo"] || (await isEmpty())) await seedDemo(database, password);
+  console.log(JSON.stringify({ migrated, demoPeople: await findDemoPeople() }));
+} finally {
+  await database.destroy();
+}
+
+async function isEmpty(): Promise<boolean> {
+  return (await database("accounts").first("id")) === undefined;
+}
+
+async function findDemoPeople() {
+  const emails = Object.values(demoPeople).map((person) => person.email);
+  return database("accounts").whereIn("email", emails).orderBy("created_at").select<object[]>("name", "email");
+}

@@ -1,0 +1,44 @@
+import express, { type RequestHandler, Router } from "express";
+import { type Route, type RouteName, routes } from "./contract.ts";
+import { csrf } from "./middleware/csrf.ts";
+import { type FindCaller, permit } from "./middleware/permit.ts";
+import type { Throttle } from "./middleware/throttle.ts";
+import { validate } from "./middleware/validate.ts";
+import type { Call, Handler, Handlers } from "./route-handler.ts";
+
+/** Routes that anybody may try passwords or tokens at. */
+const throttled = new Set<RouteName>(["signUp", "signIn", "claimAccount"]);
+
+const methods = { GET: "get", POST: "post", PUT: "put", PATCH: "patch", DELETE: "delete" } as const;
+
+const readJson = express.json({ limit: "1mb" });
+
+/**
+ * Registers every route of the contract, all by the same steps: permitted? from our pages? too often? well formed?
+ * then the handler, whose answer is checked as strictly as the request, so that nothing leaves by accident.
+ */
+export function createRouter(handlers: Handlers, findCaller: FindCaller, throttle: Throttle): Router {
+  const router = Router();
+  for (const name of Object.keys(routes) as RouteName[]) {
+    const route: Route = routes[name];
+    router[methods[route.method]](
+      route.path,
+      permit(name, findCaller),
+      csrf,
+      ...(throttled.has(name) ? [throttle.countOrigin] : []),
+      ...(route.body ? [readJson] : []),
+      validate(route),
+      handle(route, handlers[name] as Handler<RouteName>),
+    );
+  }
+  return router;
+}
+
+function handle(route: Route, handler: Handler<RouteName>): RequestHandler {
+  return async (request, response) => {
+    const answer = await handler({ ...response.locals, request } as Call<RouteName>);
+    response.status(route.status);
+    if (route.response) response.json(route.response.parse(answer));
+    else response.end();
+  };
+}

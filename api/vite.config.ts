@@ -1,0 +1,18 @@
+import { defineConfig } from "vite";
+
+/** Bundles our own TypeScript, the solver's too; packages of npm stay outside and are loaded from node_modules. */
+export default defineConfig({
+  build: {
+    ssr: true,
+    target: "node20",
+    outDir: "dist",
+    rollupOptions: {
+      input: {
+        server: "src/server.ts",
+        prepare: "src/prepare.ts",
+        "create-administrator": "src/create-administrator.ts",
+      },
+    },
+  },
+  ssr: { noExternal: ["@restband/solver"] },
+});

@@ -1,0 +1,20 @@
+import * as createAccounts from "./20261201100000-create-accounts.ts";
+import * as createSessions from "./20261201100100-create-sessions.ts";
+import * as createThrottles from "./20261201100200-create-throttles.ts";
+import * as createOneTimeLinks from "./20261201100300-create-one-time-links.ts";
+import * as createProjects from "./20261201100400-create-projects.ts";
+import * as createMembers from "./20261201100500-create-members.ts";
+import * as createScenarios from "./20261201100600-create-scenarios.ts";
+import * as createActivity from "./20261201100700-create-activity.ts";
+
+/** Every change of the database, in order. The names are recorded in it: never renamed, never edited once merged. */
+export const migrations = [
+  { name: "20261201100000-create-accounts", ...createAccounts },
+  { name: "20261201100100-create-sessions", ...createSessions },
+  { name: "20261201100200-create-throttles", ...createThrottles },
+  { name: "20261201100300-create-one-time-links", ...createOneTimeLinks },
+  { name: "20261201100400-create-projects", ...createProjects },
+  { name: "20261201100500-create-members", ...createMembers },
+  { name: "20261201100600-create-scenarios", ...createScenarios },
+  { name: "20261201100700-create-activity", ...createActivity },
+];

@@ -1,0 +1,156 @@
+import { afterAll, beforeAll, describe, expect, it } from "vitest";
+import { insertOneTimeLink } from "../../api/src/accounts/one-time-links-store.ts";
+import { type Role, type RouteName, roles, routes, type Session } from "../../api/src/contract.ts";
+import { permissions, permit } from "../../api/src/middleware/permit.ts";
+import type { Browser, Request } from "../support/browser.ts";
+import {
+  addMember,
+  createProject,
+  createScenario,
+  emailOf,
+  password,
+  signUp,
+  smallScenario,
+} from "../support/people.ts";
+import { startTestServer, type TestServer } from "../support/test-server.ts";
+
+type Person = "anonymous" | "stranger" | Role | "administrator";
+
+const people: readonly Person[] = ["anonymous", "stranger", ...roles, "administrator"];
+const routeNames = Object.keys(routes) as RouteName[];
+
+/** What `product.md`'s table says of each route, written out by hand and not taken from the code. */
+const mayCall: Record<RouteName, readonly Person[]> = {
+  signUp: people,
+  claimAccount: people,
+  readSession: people,
+  signIn: people,
+  signOut: people,
+  listProjects: ["stranger", "owner", "editor", "reviewer", "reader", "administrator"],
+  createProject: ["stranger", "owner", "editor", "reviewer", "reader", "administrator"],
+  readProject: ["owner", "editor", "reviewer", "reader"],
+  changeProject: ["owner"],
+  listMembers: ["owner", "editor", "reviewer", "reader"],
+  addMember: ["owner"],
+  changeMember: ["owner"],
+  removeMember: ["owner"],
+  listScenarios: ["owner", "editor", "reviewer", "reader"],
+  createScenario: ["owner", "editor"],
+  readScenario: ["owner", "editor", "reviewer", "reader"],
+  saveScenario: ["owner", "editor"],
+};
+
+let server: TestServer;
+beforeAll(async () => {
+  const generous = { account: { attempts: 1000, seconds: 60 }, origin: { attempts: 1000, seconds: 60 } };
+  server = await startTestServer({ throttle: generous });
+  const names = ["owner", "editor", "reviewer", "reader", "second", "spare", "stranger", "foreign"];
+  await Promise.all(names.map((name) => signUp(server, name)));
+  await makeAdministrator();
+});
+afterAll(() => server.stop());
+
+/** A project with one of each role, a second owner, one more reader, and a scenario; everybody freshly signed in. */
+async function layProject() {
+  const [owner, editor, reviewer, reader, spare, stranger, administrator] = await Promise.all(
+    ["owner", "editor", "reviewer", "reader", "spare", "stranger", "administrator"].map(arrive),
+  );
+  const projectId = await createProject(owner);
+  const { id: scenarioId } = await createScenario(owner, projectId);
+  for (const role of ["editor", "reviewer", "reader"] as const) await addMember(owner, projectId, emailOf(role), role);
+  await addMember(owner, projectId, emailOf("second"), "owner");
+  await addMember(owner, projectId, emailOf("spare"), "reader");
+  const anonymous = await server.browser().open();
+  const browsers: Record<Person, Browser> = { anonymous, stranger, owner, editor, reviewer, reader, administrator };
+  const { account } = await spare.get<Session>("readSession");
+  return { browsers, params: { projectId, scenarioId, accountId: account!.id }, newcomer: emailOf("stranger") };
+}
+
+const arrive = (name: string) => server.browser().signIn(emailOf(name), password);
+
+async function makeAdministrator(): Promise<void> {
+  const token = await insertOneTimeLink(server.database, { email: emailOf("administrator"), makesAdministrator: true });
+  const browser = await server.browser().open();
+  await browser.get("claimAccount", { body: { token, name: "Administrator", password } });
+}
+
+/** A request that is right in all but, perhaps, who sends it. */
+function requestFor(name: RouteName, newcomer: string): Request {
+  switch (name) {
+    case "signUp":
+      return { body: { name: "New", email: `new-${crypto.randomUUID()}@workshop.example`, password } };
+    case "claimAccount":
+      return { body: { token: "a token that nobody ever gave out", name: "New", password } };
+    case "signIn":
+      return { body: { email: newcomer, password } };
+    case "createProject":
+    case "changeProject":
+      return { body: { name: "Changed", description: "" } };
+    case "addMember":
+      return { body: { email: newcomer, role: "reader" } };
+    case "changeMember":
+      return { body: { role: "reviewer" } };
+    case "createScenario":
+      return { body: { content: smallScenario } };
+    case "saveScenario":
+      return { body: { content: smallScenario }, version: 1 };
+    default:
+      return {};
+  }
+}
+
+/** Signed out: 401. No member: 404, as if there were nothing. A member whose role does not reach: 403. */
+function statusFor(name: RouteName, person: Person): number {
+  if (mayCall[name].includes(person)) return name === "claimAccount" ? 410 : routes[name].status;
+  if (person === "anonymous") return 401;
+  return person === "stranger" || person === "administrator" ? 404 : 403;
+}
+
+describe.each(routeNames)("%s", (name) => {
+  it("does for each person what the table of roles says", async () => {
+    const { browsers, params, newcomer } = await layProject();
+    // Who may do it comes last: it changes what the others ask for.
+    const order = [...people].sort((a, b) => Number(mayCall[name].includes(a)) - Number(mayCall[name].includes(b)));
+    const seen: Record<string, number> = {};
+    let version = 1;
+    for (const person of order) {
+      const request = { params, ...requestFor(name, newcomer), version: name === "saveScenario" ? version : undefined };
+      seen[person] = (await browsers[person].call(name, request)).status;
+      if (name === "saveScenario" && seen[person] === 200) version += 1;
+    }
+    expect(seen).toEqual(Object.fromEntries(people.map((person) => [person, statusFor(name, person)])));
+  });
+});
+
+describe.each(routeNames.filter((name) => routes[name].path.includes(":projectId")))("%s", (name) => {
+  it("gives nothing of one project to the owner of another, not even that it exists", async () => {
+    const { params, newcomer } = await layProject();
+    const owner = await arrive("foreign");
+    const projectId = await createProject(owner);
+    const request = { ...requestFor(name, newcomer), version: name === "saveScenario" ? 1 : undefined };
+    const theirs = await owner.call(name, { params, ...request });
+    const none = await owner.call(name, { params: { ...params, projectId: crypto.randomUUID() }, ...request });
+    expect([theirs.status, theirs.body]).toEqual([404, none.body]);
+    // Under one's own project, with the ids of the other.
+    if (/:(scenarioId|accountId)/.test(routes[name].path)) {
+      expect((await owner.call(name, { params: { ...params, projectId }, ...request })).status).toBe(404);
+    }
+  });
+});
+
+describe("the role table", () => {
+  it("has an entry for every route, or the server does not start", () => {
+    expect(Object.keys(permissions).sort()).toEqual([...routeNames].sort());
+    expect(() => permit("forgotten" as RouteName, () => Promise.resolve(null))).toThrow(/forgotten has no entry/);
+  });
+
+  it("says what is missing where a role does not reach", async () => {
+    const { browsers, params } = await layProject();
+    const { message } = await browsers.reader.fail("saveScenario", {
+      params,
+      body: { content: smallScenario },
+      version: 1,
+    });
+    expect(message).toBe("Your role in this project is reader; this takes owner or editor.");
+  });
+});

@@ -1,0 +1,133 @@
+import fc from "fast-check";
+import { afterAll, beforeAll, describe, expect, it } from "vitest";
+import { failureSchema, type Route, type RouteName, routes } from "../../api/src/contract.ts";
+import type { Browser } from "../support/browser.ts";
+import { createProject, createScenario, emailOf, password, signUp, smallScenario } from "../support/people.ts";
+import { startTestServer, type TestServer } from "../support/test-server.ts";
+
+const names = Object.keys(routes) as RouteName[];
+const withBody = names.filter((name) => "body" in routes[name]);
+
+const goodBodies: Record<string, Record<string, unknown>> = {
+  signUp: { name: "Bo", email: emailOf("Bo"), password },
+  claimAccount: { token: "a token that nobody ever gave out", name: "Bo", password },
+  signIn: { email: emailOf("Ada"), password },
+  createProject: { name: "Hall 4", description: "" },
+  changeProject: { name: "Hall 5", description: "" },
+  addMember: { email: emailOf("Bo"), role: "reader" },
+  changeMember: { role: "owner" },
+  createScenario: { content: smallScenario },
+  saveScenario: { content: smallScenario },
+};
+
+let server: TestServer;
+let owner: Browser & { accountId: string };
+let params: { projectId: string; scenarioId: string; accountId: string };
+
+beforeAll(async () => {
+  const generous = { account: { attempts: 1e6, seconds: 60 }, origin: { attempts: 1e6, seconds: 60 } };
+  server = await startTestServer({ throttle: generous });
+  owner = await signUp(server, "Ada");
+  const projectId = await createProject(owner);
+  params = { projectId, scenarioId: (await createScenario(owner, projectId)).id, accountId: owner.accountId };
+});
+afterAll(() => server.stop());
+
+it("is tried for every route with a body", () => {
+  expect(Object.keys(goodBodies).sort()).toEqual([...withBody].sort());
+});
+
+describe.each(withBody)("the body of %s", (name) => {
+  const fail = (request: object) => owner.fail(name, { params, version: 1, ...request });
+
+  it("may hold no unknown key", async () => {
+    const failure = await fail({ body: { ...goodBodies[name], isAdministrator: true } });
+    expect(failure).toMatchObject({
+      status: 400,
+      code: "bad-request",
+      fields: [{ path: "isAdministrator", message: "There is no such field." }],
+    });
+  });
+
+  it.each(Object.keys(goodBodies[name]))("needs %s, and of the right type", async (key) => {
+    const rest = Object.fromEntries(Object.entries(goodBodies[name]).filter(([other]) => other !== key));
+    expect(await fail({ body: rest })).toMatchObject({ status: 400, fields: [{ path: key }] });
+    expect(await fail({ body: { ...rest, [key]: 7 } })).toMatchObject({ status: 400, fields: [{ path: key }] });
+  });
+
+  it.each([
+    ["no JSON", { text: '{"name": ' }, 400, "not-json"],
+    ["a bare number", { text: "7" }, 400, "not-json"],
+    ["a list", { text: "[]" }, 400, "bad-request"],
+    [
+      "another type",
+      { text: "name=Bo", headers: { "Content-Type": "application/x-www-form-urlencoded" } },
+      415,
+      "not-json",
+    ],
+    ["too much", { text: JSON.stringify({ name: "x".repeat(1_100_000) }) }, 413, "too-large"],
+    ["nothing", { headers: { "Content-Type": "application/json" } }, 400, undefined],
+  ])("may not be %s", async (_, request, status, code) => {
+    const failure = await fail(request);
+    expect(failure.status).toBe(status);
+    if (code) expect(failure.code).toBe(code);
+  });
+});
+
+describe.each(names)("%s", (name) => {
+  it("takes no query parameter it does not know", async () => {
+    const request = { params, version: 1, body: goodBodies[name], query: "?as=administrator" };
+    expect(await owner.fail(name, request)).toMatchObject({ status: 400, fields: [{ path: "as" }] });
+  });
+});
+
+describe("paths", () => {
+  it("with an id that is none are refused at the parameter, in one's own project", async () => {
+    const failure = await owner.fail("readScenario", { params: { ...params, scenarioId: "1 OR 1=1" } });
+    expect(failure).toMatchObject({ status: 400, fields: [{ path: "scenarioId" }] });
+  });
+
+  it.each(["1", "é", "%00", "' OR '1'='1"])("with a project id like %j lead nowhere", async (projectId) => {
+    const answer = await owner.send("GET", `/api/projects/${encodeURIComponent(projectId)}`);
+    expect(answer.status).toBe(404);
+  });
+
+  it("that are malformed or unknown get the same kind of answer as all failures", async () => {
+    const malformed = await owner.send("GET", "/api/projects/%E0%A4%A");
+    const unknown = await owner.send("GET", "/api/nothing/here");
+    expect([malformed.status, unknown.status]).toEqual([400, 404]);
+    for (const { body } of [malformed, unknown]) expect(failureSchema.safeParse(body).success).toBe(true);
+  });
+});
+
+describe("If-Match", () => {
+  it.each(["1", '"x"', 'W/"1"', '"-1"', '"1", "2"', '"99999999999"', "*"])("is refused as %s", async (value) => {
+    const request = { params, body: goodBodies.saveScenario, headers: { "If-Match": value } };
+    expect(await owner.fail("saveScenario", request)).toMatchObject({ status: 400, fields: [{ path: "If-Match" }] });
+  });
+});
+
+it("answers random bodies with a failure of the contract, never with a 5xx", async () => {
+  const value = fc.oneof({ maxDepth: 3 }, fc.jsonValue({ maxDepth: 3 }), fc.constantFrom("", "__proto__", 1e308, -0));
+  const attempt = fc.record({
+    name: fc.constantFrom(...withBody.filter((name) => name !== "signUp")),
+    body: fc.oneof(
+      value,
+      fc.dictionary(
+        fc.constantFrom("name", "email", "password", "role", "content", "token", "description", "__proto__"),
+        value,
+      ),
+    ),
+  });
+  await fc.assert(
+    fc.asyncProperty(attempt, async ({ name, body }) => {
+      const route: Route = routes[name];
+      const answer = await owner.call(name, { params, version: 1, body });
+      expect(answer.status).toBeLessThan(500);
+      if (answer.status >= 400) expect(failureSchema.safeParse(answer.body).error).toBeUndefined();
+      else expect(route.status).toBe(answer.status);
+      if (name === "signIn" && answer.status === 200) await owner.open();
+    }),
+    { numRuns: 1500, seed: 20261201 },
+  );
+});
