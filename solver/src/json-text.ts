@@ -5,22 +5,41 @@
  * canonical form of RFC 8785.
  * @throws RangeError where a number is not finite, naming its place: JSON has no such number, and none may become null.
  */
-export function jsonText(value: unknown, order: "as given" | "sorted" = "as given", path = ""): string {
-  if (typeof value === "number") return numberText(value, path);
-  if (value instanceof Float64Array) return numbersText(value, path);
-  if (Array.isArray(value)) return `[${value.map((item, i) => jsonText(item, order, `${path}[${i}]`)).join(",")}]`;
+export function jsonText(value: unknown, order: "as given" | "sorted" = "as given"): string {
+  const place = placeOfNonFinite(value);
+  if (place !== null) throw new RangeError(`${place || "the value"} is not finite, and JSON has no such number`);
+  return textOf(value, order === "sorted");
+}
+
+function textOf(value: unknown, isSorted: boolean): string {
+  if (value instanceof Float64Array) return `[${value.join(",")}]`;
+  if (Array.isArray(value)) return `[${value.map((item) => textOf(item, isSorted)).join(",")}]`;
   if (typeof value !== "object" || value === null) return JSON.stringify(value ?? null);
-  const members = Object.entries(value).filter(([, member]) => member !== undefined);
-  if (order === "sorted") members.sort(([a], [b]) => (a < b ? -1 : 1));
-  return `{${members.map(([key, member]) => `${JSON.stringify(key)}:${jsonText(member, order, `${path}.${key}`)}`).join(",")}}`;
+  const keys = isSorted ? Object.keys(value).sort() : Object.keys(value);
+  let members = "";
+  for (const key of keys) {
+    const member = (value as Record<string, unknown>)[key];
+    if (member !== undefined) members += `${members && ","}${JSON.stringify(key)}:${textOf(member, isSorted)}`;
+  }
+  return `{${members}}`;
 }
 
-function numberText(value: number, path: string): string {
-  if (!Number.isFinite(value)) throw new RangeError(`${path || "the value"} is ${value}, which JSON cannot hold`);
-  return String(value);
+/** Where the first number lies that is not finite, as `samples.t[3]`; null where all are. */
+function placeOfNonFinite(value: unknown): string | null {
+  if (typeof value === "number") return Number.isFinite(value) ? null : "";
+  if (typeof value !== "object" || value === null) return null;
+  if (Array.isArray(value) || value instanceof Float64Array) {
+    for (let i = 0; i < value.length; i++) {
+      const place = placeOfNonFinite(value[i]);
+      if (place !== null) return joined(`[${i}]`, place);
+    }
+    return null;
+  }
+  for (const key in value) {
+    const place = placeOfNonFinite((value as Record<string, unknown>)[key]);
+    if (place !== null) return joined(key, place);
+  }
+  return null;
 }
 
-function numbersText(values: Float64Array, path: string): string {
-  const bad = values.findIndex((value) => !Number.isFinite(value));
-  return bad < 0 ? `[${values.join(",")}]` : numberText(values[bad], `${path}[${bad}]`);
-}
+const joined = (step: string, rest: string) => (rest === "" || rest.startsWith("[") ? step + rest : `${step}.${rest}`);
