@@ -4,7 +4,7 @@ import react from "@vitejs/plugin-react";
 import { defineConfig } from "vite";
 import { licences } from "./licences-plugin.ts";
 
-const apiPort = process.env.RESTBAND_PORT ?? "4780";
+const apiPort = process.env.RESTBAND_API_PORT ?? "4780";
 const workspaces = ["../solver", "../api", "."].map((path) => fileURLToPath(new URL(path, import.meta.url)));
 
 export default defineConfig({

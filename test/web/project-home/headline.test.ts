@@ -11,6 +11,8 @@ describe("the project in a sentence", () => {
     [1, [], "One scenario."],
     [7, standings(["kept", 6], ["broken", 1]), "Seven scenarios. One breaks its limits."],
     [7, standings(["kept", 5], ["broken", 2]), "Seven scenarios. Two break their limits."],
+    [7, standings(["broken", 7]), "Seven scenarios. All break their limits."],
+    [1, standings(["broken", 1]), "One scenario. It breaks its limits."],
     [7, standings(["kept", 7]), "Seven scenarios. All keep their limits."],
     [1, standings(["kept", 1]), "One scenario. It keeps its limits."],
     [2, standings(["kept", 1], ["no-limits", 1]), "Two scenarios. None breaks its limits."],

@@ -59,7 +59,7 @@ describe("the projects of a person", () => {
     });
     const { user, address } = openPage("/projects");
     await user.click(await screen.findByRole("button", { name: "Begin a project" }));
-    await user.click(screen.getByRole("button", { name: "Begin the project" }));
+    await user.click(await screen.findByRole("button", { name: "Begin the project" }));
     expect(await screen.findByLabelText("Name")).toHaveAccessibleDescription(
       "Give the project a name of up to 120 characters.",
     );
@@ -137,7 +137,7 @@ describe("the people of a project", () => {
     });
     const { user } = openPage(at);
     await user.click(await screen.findByRole("button", { name: "Add someone" }));
-    await user.type(screen.getByLabelText("E-mail"), "j.falk@okarin.example");
+    await user.type(await screen.findByLabelText("E-mail"), "j.falk@okarin.example");
     await user.click(screen.getByRole("radio", { name: /^reviewer/u }));
     await user.click(screen.getByRole("button", { name: "Add" }));
     await waitFor(() =>

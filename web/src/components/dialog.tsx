@@ -44,7 +44,7 @@ export function Dialog({ isOpen, title, onClose, canClose = true, isWide, childr
       onClose={() => isOpen && canClose && onClose()}
       onMouseDown={(event) => canClose && event.target === event.currentTarget && isOutside(event) && onClose()}
     >
-      <header className="mb-4 flex items-start justify-between gap-4">
+      <div className="mb-4 flex items-start justify-between gap-4">
         <h2 id={titleId} className="text-24 font-semibold">
           {title}
         </h2>
@@ -53,7 +53,7 @@ export function Dialog({ isOpen, title, onClose, canClose = true, isWide, childr
             <Icon name="cross" />
           </Button>
         )}
-      </header>
+      </div>
       {isOpen && (
         <Suspense fallback={<p className="late text-quiet">Opening</p>}>
           <Contents dialog={dialog}>{children}</Contents>

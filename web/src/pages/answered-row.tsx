@@ -1,6 +1,8 @@
 import type { StoredScenario } from "@restband/api/contract";
 import { useEffect } from "react";
+import type { RunOptions } from "../compute/solver-job.ts";
 import { useRun } from "../compute/use-run.ts";
+import { SentenceGlance, StripGlance } from "../features/answer/answer-glance.tsx";
 import { standingOf, type Standing } from "../features/project-home/headline.ts";
 import { LimitsLine } from "../features/project-home/limits-line.tsx";
 import { ScenarioRow } from "../features/project-home/scenario-row.tsx";
@@ -14,9 +16,12 @@ interface AnsweredRowProps {
   onStanding: (standing: Standing) => void;
 }
 
+/** A strip needs no samples but those at the events, which are always there. */
+const options: RunOptions = { samples: 2, energy: false };
+
 /** A row of the project home with its answer, computed here. */
 export function AnsweredRow({ stored, ownId, isSeen, onStanding }: AnsweredRowProps) {
-  const { computed } = useRun(isSeen ? stored.content : null);
+  const { computed } = useRun(isSeen ? stored.content : null, options);
   const result = computed && "result" in computed ? computed.result : null;
   const standing = result && standingOf(result.limits);
   useEffect(() => {
@@ -28,8 +33,8 @@ export function AnsweredRow({ stored, ownId, isSeen, onStanding }: AnsweredRowPr
     <ScenarioRow
       stored={stored}
       ownId={ownId}
-      strip={null}
-      sentence={null}
+      strip={computed && <StripGlance computed={computed} />}
+      sentence={computed && <SentenceGlance computed={computed} />}
       limits={result && <LimitsLine limits={result.limits} />}
     />
   );

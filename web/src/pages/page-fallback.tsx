@@ -3,9 +3,11 @@ export function PageFallback() {
   return (
     <>
       <div className="h-(--header) border-b border-line" />
-      <p className="late page-width py-9 text-quiet" role="status">
-        Opening the page
-      </p>
+      <main id="content" tabIndex={-1} className="page-width py-9">
+        <p className="late text-quiet" role="status">
+          Opening the page
+        </p>
+      </main>
     </>
   );
 }

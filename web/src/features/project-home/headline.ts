@@ -31,24 +31,36 @@ export function limitsWords(limits: readonly LimitVerdict[]): string {
 export function headline(count: number, standings: readonly Standing[]): string {
   if (count === 0) return "No scenario yet.";
   const opening = `${capitalised(sayMany(count, "scenario"))}.`;
-  const of = (standing: Standing) => standings.filter((each) => each === standing).length;
   const isWhole = standings.length === count;
-  const faults = listed([breaking(of("broken")), isWhole ? unjudged(of("unjudged")) : ""].filter(Boolean));
-  if (faults && !isWhole) return `${opening} ${capitalised(faults)}, of ${sayCount(standings.length)} computed so far.`;
-  const verdict = faults || (isWhole ? keeping(of("kept"), count) : "");
-  return verdict ? `${opening} ${capitalised(verdict)}.` : opening;
+  const verdict = isWhole ? wholeVerdict(standings) : breaking(standings, count);
+  if (verdict === "") return opening;
+  return `${opening} ${capitalised(verdict)}${isWhole ? "" : `, of ${sayCount(standings.length)} computed so far`}.`;
 }
 
-function breaking(count: number): string {
-  if (count === 0) return "";
-  return count === 1 ? "one breaks its limits" : `${sayCount(count)} break their limits`;
+const numberOf = (standing: Standing, standings: readonly Standing[]): number =>
+  standings.filter((each) => each === standing).length;
+
+/** "it" or "all" where it is true of every scenario, else how many. */
+function who(number: number, count: number): string {
+  if (number < count) return sayCount(number);
+  return count === 1 ? "it" : "all";
 }
 
-const unjudged = (count: number): string => (count === 0 ? "" : `${sayCount(count)} cannot be judged`);
+function breaking(standings: readonly Standing[], count: number): string {
+  const broken = numberOf("broken", standings);
+  if (broken === 0) return "";
+  return `${who(broken, count)} ${broken === 1 ? "breaks its" : "break their"} limits`;
+}
 
-/** Where none is broken and none in doubt. */
-function keeping(kept: number, count: number): string {
-  if (kept === 0) return "";
-  if (kept < count) return "none breaks its limits";
-  return count === 1 ? "it keeps its limits" : "all keep their limits";
+/** Faults first; without any, what is kept. */
+function wholeVerdict(standings: readonly Standing[]): string {
+  const count = standings.length;
+  const unjudged = numberOf("unjudged", standings);
+  const doubt = unjudged > 0 ? `${who(unjudged, count)} cannot be judged` : "";
+  const faults = listed([breaking(standings, count), doubt].filter(Boolean));
+  const kept = numberOf("kept", standings);
+  if (faults !== "" || kept === 0) return faults;
+  return kept < count
+    ? "none breaks its limits"
+    : `${who(kept, count)} ${kept === 1 ? "keeps its" : "keep their"} limits`;
 }
