@@ -4,22 +4,15 @@ import { join } from "node:path";
 import { run } from "./processes.mjs";
 import { readIfThere, root, say } from "./project.mjs";
 
-const shared = ["package-lock.json", "tsconfig.base.json", "solver/package.json", "solver/src"];
-const ofServer = ["api/package.json", "api/vite.config.ts", "api/src", "migrations"];
-const ofPages = [
-  "web/package.json",
-  "web/vite.config.ts",
-  "web/index.html",
-  "web/public",
-  "web/src",
-  "fonts",
-  "api/src",
-];
+const shared = ["package-lock.json", "tsconfig.base.json", "solver"];
 
 const parts = [
-  { workspace: "api", inputs: [...shared, ...ofServer], output: "api/dist/server.js" },
-  { workspace: "web", inputs: [...shared, ...ofPages], output: "web/dist/index.html" },
+  { workspace: "api", inputs: [...shared, "api", "migrations"], output: "api/dist/server.js" },
+  { workspace: "web", inputs: [...shared, "web", "fonts", "api/src"], output: "web/dist/index.html" },
 ];
+
+/** What lies among the sources and is no source. */
+const products = new Set(["dist", "node_modules"]);
 
 /** Builds the server and the pages where they are missing or a source has changed since. */
 export async function build(workspaces = ["api", "web"]) {
@@ -53,14 +46,16 @@ function hashOf(inputs) {
 
 function filesOf(path) {
   if (!existsSync(join(root, path))) return [];
-  const entries = safeEntries(path);
+  const entries = namesIn(path);
   return entries ? entries.flatMap((name) => filesOf(join(path, name))) : [path];
 }
 
-/** The names in a folder, sorted; null for a file. */
-function safeEntries(path) {
+/** The names in a folder, sorted, so that the hash is the same everywhere; null for a file. */
+function namesIn(path) {
   try {
-    return readdirSync(join(root, path)).sort();
+    return readdirSync(join(root, path))
+      .filter((name) => !products.has(name))
+      .sort();
   } catch (error) {
     if (error.code === "ENOTDIR") return null;
     throw error;

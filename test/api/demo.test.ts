@@ -1,4 +1,4 @@
-import { checkScenario } from "@restband/solver";
+import { checkScenario, simulate } from "@restband/solver";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import type { Member, Project, StoredScenario } from "../../api/src/contract.ts";
 import { demoPeople } from "../../api/src/demo/demo-people.ts";
@@ -19,11 +19,35 @@ afterAll(() => server.stop());
 const signIn = async (person: keyof typeof demoPeople) =>
   (await server.browser().open()).signIn(demoPeople[person].email, password);
 
+/** Title, outcome and the number of limits not kept. */
+function answerOf(content: object) {
+  const scenario = checkScenario(content).scenario!;
+  const result = simulate(scenario, {});
+  if ("error" in result) throw new Error(result.error.message);
+  return [scenario.title, result.outcome, result.limits.filter(({ kept }) => !kept).length];
+}
+
 describe("the demo", () => {
   it("has three projects with ten scenarios, all of which the solver accepts", () => {
     const contents = demoProjects.flatMap(({ scenarios }) => scenarios.map(({ content }) => content));
     expect([demoProjects.length, contents.length]).toEqual([3, 10]);
     for (const content of contents) expect(checkScenario(content).faults).toEqual([]);
+  });
+
+  it("shows every outcome it is there to show", () => {
+    const answers = demoProjects.flatMap(({ scenarios }) => scenarios.map(({ content }) => answerOf(content)));
+    expect(answers).toEqual([
+      ["Inclined stage, power off", "never-moved", 0],
+      ["Fan on rubbed springs, near resonance", "smooth-sliding", 2],
+      ["Coupon, ring-down in its grips", "came-to-rest", 0],
+      ["Hanger C-2, released", "came-to-rest", 0],
+      ["Tail clamp, shaken by the mill", "never-moved", 0],
+      ["Sorting belt, carton against the stop", "stick-slip", 0],
+      ["Turret, two-pad brake", "came-to-rest", 0],
+      ["Z carriage, rapid return", "smooth-sliding", 0],
+      ["Z carriage, oil damper", "smooth-sliding", 0],
+      ["Z carriage, creep feed", "stick-slip", 2],
+    ]);
   });
 
   it("shows each of its people what their role allows", async () => {

@@ -52,14 +52,13 @@ const oilDamper = {
 };
 
 const rapidReturn = {
-  ...carriage,
+  ...oilDamper,
   title: "Z carriage, rapid return",
   base: [{ kind: "ramp", rate: -0.02 }],
   limits: [
     { quantity: "stickFraction", max: 0 },
     { quantity: "followingErrorPeak", max: 200e-6 },
   ],
-  origins,
 };
 
 const padBrake = {
