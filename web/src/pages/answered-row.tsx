@@ -1,7 +1,6 @@
 import type { StoredScenario } from "@restband/api/contract";
 import { useEffect } from "react";
-import type { RunOptions } from "../compute/solver-job.ts";
-import { useRun } from "../compute/use-run.ts";
+import { useRun, type Computed } from "../compute/use-run.ts";
 import { SentenceGlance, StripGlance } from "../features/answer/answer-glance.tsx";
 import { standingOf, type Standing } from "../features/project-home/headline.ts";
 import { LimitsLine } from "../features/project-home/limits-line.tsx";
@@ -16,14 +15,10 @@ interface AnsweredRowProps {
   onStanding: (standing: Standing) => void;
 }
 
-/** A strip needs no samples but those at the events, which are always there. */
-const options: RunOptions = { samples: 2, energy: false };
-
 /** A row of the project home with its answer, computed here. */
 export function AnsweredRow({ stored, ownId, isSeen, onStanding }: AnsweredRowProps) {
-  const { computed } = useRun(isSeen ? stored.content : null, options);
-  const result = computed && "result" in computed ? computed.result : null;
-  const standing = result && standingOf(result.limits);
+  const { computed, failure } = useRun(isSeen ? stored.content : null);
+  const standing = computed && standingOfRun(computed);
   useEffect(() => {
     if (standing) onStanding(standing);
     // Told once for each standing; the callback is a new one with each render.
@@ -34,8 +29,18 @@ export function AnsweredRow({ stored, ownId, isSeen, onStanding }: AnsweredRowPr
       stored={stored}
       ownId={ownId}
       strip={computed && <StripGlance computed={computed} />}
-      sentence={computed && <SentenceGlance computed={computed} />}
-      limits={result && <LimitsLine limits={result.limits} />}
+      sentence={computed ? <SentenceGlance computed={computed} /> : <Waiting failure={failure} />}
+      limits={computed && "result" in computed && <LimitsLine limits={computed.result.limits} />}
     />
   );
+}
+
+/** A scenario that this version cannot compute keeps no limit and breaks none. */
+function standingOfRun(computed: Computed): Standing {
+  if ("result" in computed) return standingOf(computed.result.limits);
+  return computed.scenario.limits.length > 0 ? "unjudged" : "no-limits";
+}
+
+function Waiting({ failure }: { failure: string | null }) {
+  return <p className={failure ? "text-quiet" : "late text-quiet"}>{failure ?? "Computing"}</p>;
 }

@@ -32,7 +32,7 @@ function SeenItem({ children }: { children: (isSeen: boolean) => ReactNode }) {
   useEffect(() => {
     if (isSeen || !item.current) return;
     const see = (entries: IntersectionObserverEntry[]) => entries.some((each) => each.isIntersecting) && setSeen(true);
-    const observer = new IntersectionObserver(see, { rootMargin: "400px" });
+    const observer = new IntersectionObserver(see, { rootMargin: "1500px" });
     observer.observe(item.current);
     return () => observer.disconnect();
   }, [isSeen]);
