@@ -1,4 +1,5 @@
-import { join } from "node:path";
+import { createRequire } from "node:module";
+import { dirname, join } from "node:path";
 import { parseArgs } from "node:util";
 import { demoPassword } from "./demo-password.mjs";
 import { demandNode, installPackages } from "./install.mjs";
@@ -63,7 +64,8 @@ function serve({ urls }, port) {
 }
 
 function servePages(port, apiPort) {
-  const args = [join(root, "node_modules/vite/bin/vite.js"), "--port", String(port)];
+  const vite = createRequire(join(root, "web/package.json")).resolve("vite/package.json");
+  const args = [join(dirname(vite), "bin/vite.js"), "--port", String(port)];
   const env = { RESTBAND_API_PORT: String(apiPort) };
   return startService(process.execPath, args, { stdio: ["ignore", "inherit", "inherit"], env, cwd: join(root, "web") });
 }
