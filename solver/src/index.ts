@@ -25,3 +25,4 @@ export { simulate } from "./simulate.ts";
 export { solverVersion } from "./version.ts";
 export { quantities, quantityOf } from "./quantities/index.ts";
 export type { Quantity } from "./quantities/quantity.ts";
+export { agreementOf, compareResults, type Agreement, type Comparison, type Deviation } from "./agreement.ts";

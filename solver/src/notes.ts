@@ -36,8 +36,11 @@ function firstWithoutContact({ normal, ripple }: Problem): number {
   return ((start < 0.5 ? 0.5 : 1.5) - half - start) / hz;
 }
 
-/** How near, relative, an input must be to 1/(2n) of the natural frequency to count as being there. */
-const nearness = 1e-6;
+/**
+ * How near, relative, an input must be to 1/(2n) of the natural frequency to count as being there. Measured on motions
+ * without stops: 0.1 % off, two starts are still told apart after 400 cycles; 1 % off, most of it is forgotten by then.
+ */
+const nearness = 1e-3;
 
 function dependsOnStart({ problem }: Reading, outcome: Outcome | null): Note | null {
   const hasStopped = outcome === "never-moved" || outcome === "came-to-rest" || outcome === "too-short";
@@ -81,7 +84,7 @@ function solidSteadyOnly({ problem, window }: Reading, outcome: Outcome | null):
 function oneSided({ quantity, min, max }: Limit): Note | null {
   const { signed, label } = quantityOf(quantity);
   if (!signed || (min !== undefined && max !== undefined)) return null;
-  const [given, missing] = min === undefined ? ["an upper", "lower"] : ["a lower", "upper"];
-  const message = `${label} can be of either sign and has only ${given} limit. Add a ${missing} one if both sides matter.`;
+  const [given, missing] = min === undefined ? ["an upper", "a lower"] : ["a lower", "an upper"];
+  const message = `${label} can be of either sign and has only ${given} limit. Add ${missing} one if both sides matter.`;
   return { code: "one-sided-limit", message };
 }

@@ -1,5 +1,5 @@
 import type { Dimension } from "../field.ts";
-import type { quantityNames } from "../scenario/quantity-names.ts";
+import type { QuantityName } from "../scenario/quantity-names.ts";
 import type { AnyChannel } from "./channels.ts";
 import type { Reading } from "./reading.ts";
 
@@ -9,7 +9,7 @@ import type { Reading } from "./reading.ts";
  */
 export interface Quantity {
   /** As limits and results name it: never renamed, never reused. */
-  readonly name: (typeof quantityNames)[number];
+  readonly name: QuantityName;
   /** As the trade writes it. */
   readonly symbol?: string;
   readonly label: string;
