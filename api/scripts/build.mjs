@@ -28,7 +28,10 @@ function isStale(part) {
 
 async function buildPart(part) {
   const hash = hashOf(part.inputs);
-  await run("npm", ["run", "build", "--workspace", part.workspace], { quiet: true, env: { NODE_ENV: "production" } });
+  await run("npm", ["run", "--silent", "build", "--workspace", part.workspace], {
+    quiet: true,
+    env: { NODE_ENV: "production", NO_COLOR: "1" },
+  });
   writeFileSync(stampOf(part), hash);
 }
 
