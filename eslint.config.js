@@ -169,6 +169,9 @@ export default tseslint.config(
       "@typescript-eslint/switch-exhaustiveness-check": ["error", { considerDefaultExhaustiveForUnions: true }],
       // An async handler given to a component or to express 5 is meant: both await it.
       "@typescript-eslint/no-misused-promises": ["error", { checksVoidReturn: false }],
+      // Contracts are objects of closures: nothing here is bound to a `this`.
+      "@typescript-eslint/unbound-method": "off",
+      "@typescript-eslint/no-unused-vars": ["error", { argsIgnorePattern: "^_", varsIgnorePattern: "^_" }],
       "no-restricted-exports": ["error", { restrictDefaultExports: { direct: true } }],
       eqeqeq: "error",
       ...sizes(60),
