@@ -6,7 +6,7 @@ import { classNames } from "./class-names.ts";
 export type ButtonKind = "primary" | "plain" | "danger" | "quiet";
 
 const looks: Record<ButtonKind, string> = {
-  primary: "border-slip bg-slip text-on-slip hover:brightness-110 active:brightness-95",
+  primary: "border-slip bg-slip text-on-slip forced-color-adjust-none hover:brightness-110 active:brightness-95",
   plain: "border-edge bg-raised text-ink hover:border-ink",
   danger: "border-broken bg-raised text-broken hover:bg-broken hover:text-paper",
   quiet:
