@@ -1,10 +1,12 @@
 import { chmodSync, existsSync, mkdirSync, readFileSync, writeFileSync } from "node:fs";
-import { dirname, join } from "node:path";
+import { dirname, join, resolve } from "node:path";
 import { fileURLToPath } from "node:url";
 
-/** Where the project lies, and the folder in it for what a machine keeps to itself (ignored by git). */
+/** Where the project lies. */
 export const root = dirname(dirname(dirname(fileURLToPath(import.meta.url))));
-export const local = join(root, ".local");
+
+/** What a machine keeps to itself: database, passwords, logs. Ignored by git; `RESTBAND_LOCAL` puts it elsewhere. */
+export const local = resolve(process.env.RESTBAND_LOCAL ?? join(root, ".local"));
 
 /** Something that only the person at the terminal can put right: shown as its sentence, without a stack. */
 export class Trouble extends Error {}
