@@ -6,7 +6,7 @@ import { sayClock } from "../format/words.ts";
 
 const everyMs = 3000;
 
-/** Says that no server answers and since when, asks again until one does, then has everything on the page read anew. */
+/** Over the page, so that nothing shifts: says that no server answers and since when, asks again until one does, then has everything on the page read anew. */
 export function ConnectionLine() {
   const lostSince = useLostSince();
   const client = useQueryClient();
@@ -19,7 +19,7 @@ export function ConnectionLine() {
     };
   }, [lostSince, client]);
   return (
-    <div role="status">
+    <div role="status" className="fixed inset-x-0 top-0 z-10 print:hidden [#root:has(>header)_&]:top-(--header)">
       {lostSince && (
         <p className="border-b-2 border-broken bg-raised">
           <span className="page-width block py-2">
