@@ -43,16 +43,21 @@ export function firstZero(w: Watched, from: number, end: number, scale: number, 
   let reach = Math.min(scale, end - from);
   let guess = Infinity;
   let clearFrom = Infinity; // no zero lies in (clearFrom, guess)
+  let last = 0;
   w.evaluate(from);
+  let hasRisen = w.value > w.noise;
   for (;;) {
     if (++work.spent > work.allowed) return NaN;
     const span = Math.min(reach, end - tau);
-    const { value, first, second } = w;
-    if (tau > from && value <= w.noise && first <= 0) return tau;
+    const { value, first, second, noise } = w;
+    if (tau > from && isZero(value, first, noise, hasRisen)) return tau;
+    hasRisen ||= value > noise;
     const safe = safeStep(Math.max(0, value), first, second, w.thirdBound(span), span);
     if (tau + safe >= clearFrom) return guess;
     if (tau + safe >= end) return touchesAt(w, end, blur) ? end : Infinity;
-    const step = Math.max(safe, 2 * ulp * tau, value > 0 ? 0 : 1e3 * ulp * span);
+    // below its own rounding a start from zero tells nothing: leave it by doubling steps
+    const step = Math.max(safe, 2 * ulp * tau, hasRisen ? 0 : Math.max(2 * last, 1e3 * ulp * span));
+    if (tau + step >= end) return Infinity;
     if (guess === Infinity && safe < span) {
       const ahead = Math.min(end - tau, 4 * step + span);
       const bound = w.thirdBound(ahead);
@@ -61,9 +66,15 @@ export function firstZero(w: Watched, from: number, end: number, scale: number, 
       if (tau + safe >= clearFrom) return guess;
     }
     reach = safe < span ? 4 * step : 2 * reach;
+    last = step;
     tau += step;
     w.evaluate(tau);
   }
+}
+
+/** Down to zero again, or clearly through it where w has not risen above its rounding yet. */
+function isZero(value: number, first: number, noise: number, hasRisen: boolean): boolean {
+  return hasRisen ? value <= noise && first <= 0 : value < -noise;
 }
 
 function touchesAt(w: Watched, end: number, blur: number): boolean {

@@ -83,22 +83,28 @@ export class Carried {
     this.roomSecond = this.grip * v.normalSecond;
   }
 
-  /** True where need provably stays within room up to τ = end: its constant part and the sum of all amplitudes do. */
-  alwaysHolds(end: number): boolean {
+  /**
+   * A τ up to which need provably stays within room: what is constant, the amplitudes of all harmonics and the drift of
+   * linear inputs cannot use it up sooner. 0 where the inputs are curved or nothing is left over.
+   */
+  holdsUntil(): number {
     const { inputs } = this;
     this.evaluate(0);
-    let harmonics = (Math.abs(this.slide) + this.grip) * inputs.rippleBound(0) + inputs.forceBound(0);
-    let polynomial = Math.abs(inputs.force[1]) * end;
-    if (inputs.force[2] !== 0 || inputs.force[3] !== 0 || inputs.acceleration[1] !== 0) return false;
-    if (this.carrier === "base") harmonics += this.inertia * inputs.baseBound(2);
-    else {
-      if (inputs.base[2] !== 0 || inputs.base[3] !== 0) return false;
-      harmonics += this.stiffness * inputs.baseBound(0) + this.viscous * inputs.baseBound(1);
-      polynomial += this.stiffness * Math.abs(this.beltVelocity - inputs.base[1]) * end;
+    let swing = (Math.abs(this.slide) + this.grip) * inputs.rippleBound(0) + inputs.forceBound(0);
+    let drift = Math.abs(inputs.force[1]);
+    let isCurved = inputs.force[2] !== 0 || inputs.force[3] !== 0;
+    if (this.carrier === "base") {
+      swing += this.inertia * inputs.baseBound(2);
+      isCurved ||= inputs.acceleration[1] !== 0;
+    } else {
+      swing += this.stiffness * inputs.baseBound(0) + this.viscous * inputs.baseBound(1);
+      drift += this.stiffness * Math.abs(this.beltVelocity - inputs.base[1]);
+      isCurved ||= inputs.base[2] !== 0 || inputs.base[3] !== 0;
     }
-    // |need(0)| already holds one swing of the harmonics; from there they go at most twice their amplitude
-    const most = Math.abs(this.need) + 2 * harmonics + polynomial;
-    return most <= this.grip * inputs.normal + this.constant;
+    // need(0) already holds one swing of the harmonics; from there they go at most twice their amplitude
+    const left = this.grip * inputs.normal + this.constant - Math.abs(this.need) - 2 * swing;
+    if (isCurved || left < 0) return 0;
+    return drift > 0 ? left / drift : Infinity;
   }
 
   /** A bound of |need‴| and of |room‴| together, good to the inputs' next corner. */

@@ -28,13 +28,13 @@ export class ClosedForm {
 
   constructor(readonly problem: Problem) {
     this.inputs = new Inputs(problem);
-    this.oscillation = new Oscillation(this.inputs.omega.length + 1);
     this.viscous = problem.viscous + problem.solid.viscous;
     this.elementSlope = problem.solid.proportional * problem.stiffness;
     this.hasElement = this.elementSlope > 0;
     this.grip = problem.law.atRest * problem.radius;
     this.slide = (problem.law.constant ?? NaN) * problem.radius;
     this.contactCarrier = problem.counterface;
+    this.oscillation = new Oscillation(this.inputs.omega.length + 1, problem.counterface, problem.beltVelocity);
     this.body.inertia = problem.inertia;
     this.body.viscous = this.viscous;
   }
@@ -60,17 +60,8 @@ export class ClosedForm {
       return;
     }
     this.form = "slip";
-    const stiffness = this.stiffnessOf(s);
-    this.oscillation.begin(
-      inputs,
-      problem.inertia,
-      stiffness,
-      this.viscous,
-      slide,
-      s.position,
-      s.velocity,
-      s.acceleration,
-    );
+    this.body.stiffness = this.stiffnessOf(s);
+    this.oscillation.begin(inputs, this.body, slide, s);
   }
 
   /** k (1 ± ρ) by the quadrant, or k where the element holds or is absent. */

@@ -3,21 +3,13 @@ import type { Problem } from "../../scenario/problem.ts";
 import type { Motion, MotionMark } from "../motion.ts";
 import type { State } from "../state.ts";
 import { ClosedForm } from "./closed-form.ts";
-import type { Segments, Stance } from "./stance.ts";
+import { newStance, type Segments } from "./stance.ts";
 
 /** A run by closed form, asked again at any instant: each segment's form is made anew from its start state. */
 export class ExactMotion implements Motion {
   readonly method = "exact";
   private readonly form: ClosedForm;
-  private readonly stance: Stance = {
-    t: 0,
-    position: 0,
-    velocity: 0,
-    acceleration: NaN,
-    contact: 0,
-    spring: 1,
-    side: 1,
-  };
+  private readonly stance = newStance();
   private loaded = -1;
 
   constructor(

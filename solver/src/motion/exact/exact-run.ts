@@ -4,10 +4,12 @@ import type { Problem } from "../../scenario/problem.ts";
 import type { Motion, MotionMark } from "../motion.ts";
 import { ExactMotion } from "./exact-motion.ts";
 import { nextBreakAway } from "./look-ahead.ts";
-import { Segments, type Stance } from "./stance.ts";
+import { newStance, Segments, type Stance } from "./stance.ts";
 import { Stepper } from "./stepper.ts";
 
 const segmentsPerReport = 512;
+/** Certificate steps spent at most on what comes after the run. */
+const workAhead = 2e6;
 
 /**
  * Runs a problem by closed form from event to event: no step size, no tolerance, and no drift, since each segment starts
@@ -21,7 +23,7 @@ export function runExact(problem: Problem, progress?: (fraction: number) => bool
   const stepper = new Stepper(problem, work);
   const segments = new Segments();
   const marks: MotionMark[] = [];
-  const stance: Stance = { t: 0, position: 0, velocity: 0, acceleration: NaN, contact: 0, spring: 1, side: 1 };
+  const stance = newStance();
   let count = 0;
   let ended: Ended | null = null;
   const happening = stepper.start(stance);
@@ -48,7 +50,7 @@ export function runExact(problem: Problem, progress?: (fraction: number) => bool
     if (stance.contact === 0 && restsForEver(problem, stance)) ended = "rest";
   }
   const end = stance.t;
-  const next = stance.contact === 0 ? nextBreakAway(problem, stance, problem.maxWork) : NaN;
+  const next = stance.contact === 0 ? nextBreakAway(problem, stance, workAhead) : NaN;
   marks.push({ t: end, kind: "end", segment: segments.count - 1 });
   return new ExactMotion(problem, segments, marks, ended, end, next);
 }
@@ -58,5 +60,5 @@ function restsForEver(problem: Problem, s: Stance): boolean {
   if (!problem.untilRest || s.contact !== 0) return false;
   if (!problem.force.every((term) => term.isConstantFrom(s.t))) return false;
   if (!problem.base.every((term) => term.isConstantFrom(s.t))) return false;
-  return nextBreakAway(problem, s, problem.maxWork) === Infinity;
+  return nextBreakAway(problem, s, workAhead) === Infinity;
 }

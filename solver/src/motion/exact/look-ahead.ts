@@ -20,11 +20,19 @@ export function nextBreakAway(problem: Problem, stance: Stance, allowed: number)
   inputs.locate(s.t);
   while (inputs.end < Infinity) {
     if (++work.spent > allowed) return NaN;
-    const happening = stepper.step(s, inputs.end);
-    if (happening === "break-away") return s.t;
+    const end = inputs.end;
+    if (stepper.step(s, end) === "break-away") return s.t;
     if (stepper.outOfWork) return NaN;
   }
-  const limit = s.t + horizon(problem, stepper, s);
+  const period = commonPeriod(problem, inputs);
+  const drift = endlessRate(problem, inputs);
+  if (drift === 0) return breaksBefore(stepper, s, s.t + period);
+  const horizon = driftHorizon(problem, stepper, s) / Math.abs(drift);
+  if (period === 0) return breaksBefore(stepper, s, s.t + horizon);
+  return afterManyPeriods(problem, stepper, s, period, Math.ceil(horizon / period));
+}
+
+function breaksBefore(stepper: Stepper, s: Stance, limit: number): number {
   while (s.t < limit) {
     if (stepper.step(s, limit) === "break-away") return s.t;
     if (stepper.outOfWork) return NaN;
@@ -32,21 +40,39 @@ export function nextBreakAway(problem: Problem, stance: Stance, allowed: number)
   return Infinity;
 }
 
-/** How long after the last corner the stick must be watched. */
-function horizon(problem: Problem, stepper: Stepper, s: Stance): number {
-  const { inputs, carried } = stepper.form;
-  const periods = commonPeriod(problem, inputs);
-  const drift = endlessRate(problem, inputs);
-  if (drift === 0) return periods;
+/**
+ * Periodic inputs with a drift on top: what breaks the stick in one period breaks it in every later one, so the first
+ * such period is found by bisection and only that one is followed.
+ */
+function afterManyPeriods(problem: Problem, stepper: Stepper, s: Stance, period: number, most: number): number {
+  const stretchRate = problem.counterface === "base" ? 0 : problem.beltVelocity - stepper.form.inputs.base[1];
+  const breakIn = (n: number): number => {
+    const then = { ...s, t: s.t + n * period, position: s.position + n * period * stretchRate };
+    stepper.form.inputs.locate(then.t);
+    if (stepper.rejudge(then) === "break-away") return then.t;
+    return breaksBefore(stepper, then, then.t + period);
+  };
+  let low = -1;
+  let high = most;
+  while (high - low > 1) {
+    const middle = Math.floor((low + high) / 2);
+    const t = breakIn(middle);
+    if (Number.isNaN(t)) return NaN;
+    if (t < Infinity) high = middle;
+    else low = middle;
+  }
+  return breakIn(high);
+}
+
+/** A force that nothing here can hold, N: room, what is needed now, and twice every swing. */
+function driftHorizon(problem: Problem, stepper: Stepper, s: Stance): number {
+  const { inputs, carried, elementSlope, grip, viscous } = stepper.form;
   stepper.form.take(s);
   carried.evaluate(0);
-  const swing =
-    inputs.forceBound(0) + problem.stiffness * inputs.baseBound(0) + stepper.form.viscous * inputs.baseBound(1);
-  const element = stepper.form.elementSlope * Math.abs(s.position);
-  const grip = stepper.form.grip * (inputs.normal + inputs.rippleBound(0));
-  // twice over: the second set-valued element takes less than the spring does (ρ < 1)
-  const slope = Math.abs(drift) * (1 - problem.solid.proportional);
-  return (2 * (Math.abs(carried.need) + grip + 2 * swing + 2 * element)) / slope + periods;
+  const swing = inputs.forceBound(0) + problem.stiffness * inputs.baseBound(0) + viscous * inputs.baseBound(1);
+  const room = grip * (inputs.normal + inputs.rippleBound(0)) + elementSlope * Math.abs(s.position);
+  // the second set-valued element takes its share of the growing spring force (ρ < 1)
+  return (2 * (Math.abs(carried.need) + room + 2 * swing)) / (1 - problem.solid.proportional);
 }
 
 /** Rate at which the needed force grows for ever, N/s. */
@@ -56,6 +82,7 @@ function endlessRate(problem: Problem, inputs: Inputs): number {
   return problem.stiffness * stretchRate - inputs.force[1];
 }
 
+/** A period that all harmonics and the ripple share, s; 0 without any, 1,000 of the slowest where none is so short. */
 function commonPeriod(problem: Problem, inputs: Inputs): number {
   const rates: number[] = [];
   for (const term of [...problem.force, ...problem.base]) {

@@ -1,7 +1,9 @@
 import type { Inputs } from "../inputs.ts";
+import type { Carrier } from "./carried.ts";
 import { Chain } from "./chain.ts";
+import { StartSeries } from "./start-series.ts";
+import type { Stance } from "./stance.ts";
 
-const terms = 26;
 const unitRoundoff = 2 ** -53;
 
 /**
@@ -13,7 +15,7 @@ const unitRoundoff = 2 ** -53;
  * (F + W − mÿ + f − K d₀)/m. A harmonic H e^{iΩτ} answers with P e^{iΩτ}, P = H/(ω₀² − Ω² + 2iσΩ), less the free motion
  * that P starts with; where iΩ is within 5 % of the root λ = −σ + iω_d that difference cancels and is written as
  * τ e^{λτ} (e^{(iΩ−λ)τ} − 1)/((iΩ−λ)τ), which stays exact at resonance. While every rate times τ is ≤ 1 all of it is
- * one power series instead: so a slip that starts with v = a = 0 has v ~ t² to full relative accuracy.
+ * one power series instead (`start-series.ts`): so a slip that starts with v = a = 0 has v ~ t² to full relative accuracy.
  */
 export class Oscillation {
   /** d, ḋ, d̈, d⃛ and d⁗ at the last `evaluate`. */
@@ -22,7 +24,11 @@ export class Oscillation {
   acceleration = 0;
   jerk = 0;
   snap = 0;
-  /** What rounding may have done to `velocity`: ulps of the sum of its terms' magnitudes, m/s. */
+  /** v_r and its first two derivatives at the last `evaluateSlip`. */
+  slip = 0;
+  slipRate = 0;
+  slipSecond = 0;
+  /** What rounding may have done to `velocity` (or `slip`): ulps of the sum of its terms' magnitudes, m/s. */
   noise = 0;
 
   /** K/m = ω₀². */
@@ -30,8 +36,8 @@ export class Oscillation {
   private sigma = 0;
   private start = 0;
   private startVelocity = 0;
-  /** d̈ at the start. */
-  private known = 0;
+  private inputs!: Inputs;
+  private readonly series = new StartSeries();
   private readonly chain = new Chain();
   /** A_j, so that the polynomial part is Σ A_j τ^j/j!, m/s². */
   private readonly push = new Float64Array(4);
@@ -46,8 +52,6 @@ export class Oscillation {
   private sumRe = 0;
   private sumRate = 0;
   private magnitude = 0;
-  private readonly series = new Float64Array(terms);
-  private hasSeries = false;
   /** Up to this τ the power series is used. */
   private seriesReach = Infinity;
   /** ∂³ and ∂² bounds of the harmonic forcing per m. */
@@ -55,52 +59,53 @@ export class Oscillation {
   private thirdForcing = 0;
   private readonly response = { position: 0, velocity: 0 };
   private readonly phi = { re: 0, im: 0 };
-  /** Room for the harmonics' derivatives while the series is made. */
-  private readonly turned: Float64Array;
 
-  constructor(room: number) {
+  /** @param room the most harmonics there can be, the ripple of N included */
+  constructor(
+    room: number,
+    private readonly carrier: Carrier,
+    private readonly beltVelocity: number,
+  ) {
     this.omega = new Float64Array(room);
     this.re = new Float64Array(room);
     this.im = new Float64Array(room);
     this.particularRe = new Float64Array(room);
     this.particularIm = new Float64Array(room);
     this.isResonant = new Uint8Array(room);
-    this.turned = new Float64Array(2 * room);
   }
 
-  /**
-   * Starts a slip at the inputs' origin. `acceleration` is d̈ there where it is known better than the equation tells it
-   * (NaN where not): at break-away the force is exactly what could just be held, and a few ulps off that would decide
-   * whether the body moves on or turns back.
-   */
+  /** Starts a slip from a stance at the inputs' origin; `slide` = s r μk. */
   begin(
     inputs: Inputs,
-    inertia: number,
-    stiffness: number,
-    viscous: number,
+    body: { inertia: number; stiffness: number; viscous: number },
     slide: number,
-    position: number,
-    velocity: number,
-    acceleration: number,
+    stance: Stance,
   ): void {
-    this.sigma = viscous / (2 * inertia);
-    this.squared = stiffness / inertia;
+    const { inertia } = body;
+    this.inputs = inputs;
+    this.sigma = body.viscous / (2 * inertia);
+    this.squared = body.stiffness / inertia;
     this.chain.set(this.sigma, this.squared);
-    this.start = position;
-    this.startVelocity = velocity;
+    this.start = stance.position;
+    this.startVelocity = stance.velocity;
     const { push } = this;
     const { force, acceleration: base } = inputs;
-    push[0] = (force[0] - slide * inputs.normal) / inertia - base[0] - this.squared * position;
+    push[0] = (force[0] - slide * inputs.normal) / inertia - base[0] - this.squared * stance.position;
     push[1] = force[1] / inertia - base[1];
     push[2] = 2 * (force[2] / inertia - base[2]);
     push[3] = 6 * (force[3] / inertia - base[3]);
     this.takeHarmonics(inputs, inertia, slide);
-    const byEquation = this.startAcceleration();
-    this.known = Number.isNaN(acceleration) ? byEquation : acceleration;
-    push[0] += this.known - byEquation;
+    const isOnBase = this.carrier === "base";
+    this.series.begin(inputs, body, slide, stance, isOnBase);
+    if (!Number.isNaN(stance.acceleration)) push[0] += this.knownAcceleration(stance) - this.startAcceleration();
     const fastest = Math.max(2 * this.sigma, Math.sqrt(this.squared), inputs.fastest());
     this.seriesReach = fastest > 0 ? 1 / fastest : Infinity;
-    this.hasSeries = false;
+  }
+
+  /** d̈ at the start, from v̇_r known exactly. */
+  private knownAcceleration(stance: Stance): number {
+    if (this.carrier === "base") return stance.acceleration;
+    return stance.acceleration - this.inputs.evaluate(0).baseAcceleration;
   }
 
   private startAcceleration(): number {
@@ -121,8 +126,37 @@ export class Oscillation {
   }
 
   evaluate(tau: number): void {
-    if (tau <= this.seriesReach) this.evaluateSeries(tau);
-    else this.evaluateClosed(tau);
+    if (tau > this.seriesReach) return this.evaluateClosed(tau);
+    const { series } = this;
+    series.evaluate(tau);
+    this.position = this.start + series.position;
+    this.velocity = series.velocity;
+    this.acceleration = series.acceleration;
+    this.jerk = series.jerk;
+    this.snap = series.snap;
+    this.noise = series.noise;
+  }
+
+  /** As `evaluate`, and v_r with its derivatives. */
+  evaluateSlip(tau: number): void {
+    this.evaluate(tau);
+    if (this.carrier === "base") {
+      this.slip = this.velocity;
+      this.slipRate = this.acceleration;
+      this.slipSecond = this.jerk;
+    } else if (tau <= this.seriesReach) {
+      this.series.evaluateSlip(tau);
+      this.slip = this.series.slip;
+      this.slipRate = this.series.slipRate;
+      this.slipSecond = this.series.slipSecond;
+      this.noise = this.series.noise;
+    } else {
+      const v = this.inputs.evaluate(tau);
+      this.slip = this.velocity + v.baseVelocity - this.beltVelocity;
+      this.slipRate = this.acceleration + v.baseAcceleration;
+      this.slipSecond = this.jerk + v.baseJerk;
+      this.noise += 4 * unitRoundoff * (Math.abs(v.baseVelocity) + Math.abs(this.beltVelocity));
+    }
   }
 
   /** Bound of |d⁗| on [τ, τ + reach], from the energy of the twice differentiated equation (see `first-zero.ts`). */
@@ -188,11 +222,14 @@ export class Oscillation {
     const { rate, impulse, integrals } = chain;
     const free = this.startVelocity - this.sumRate;
     const fromRest = rate + 2 * sigma * impulse;
+    const push0 = push[0] + this.sumRe * squared;
     let position = free * impulse - this.sumRe * fromRest;
-    let velocity = free * rate + this.sumRe * squared * impulse + push[0] * impulse;
     position += push[0] * integrals[0] + push[1] * integrals[1] + push[2] * integrals[2] + push[3] * integrals[3];
+    let velocity = free * rate + push0 * impulse;
     velocity += push[1] * integrals[0] + push[2] * integrals[1] + push[3] * integrals[2];
-    let forcing = push[0] + tau * (push[1] + tau * (push[2] / 2 + (tau * push[3]) / 6));
+    // by derivative, not from the equation: a free motion that has died away must not leave the forces' rounding behind
+    let acceleration = push0 * rate - free * (2 * sigma * rate + squared * impulse);
+    acceleration += push[1] * impulse + push[2] * integrals[0] + push[3] * integrals[1];
     let forcingRate = push[1] + tau * (push[2] + (tau * push[3]) / 2);
     let forcingSecond = push[2] + tau * push[3];
     for (let i = 0; i < this.count; i++) {
@@ -200,21 +237,22 @@ export class Oscillation {
       const c = Math.cos(w * tau);
       const s = Math.sin(w * tau);
       const value = this.re[i] * c - this.im[i] * s;
-      forcing += value;
       forcingRate -= w * (this.re[i] * s + this.im[i] * c);
       forcingSecond -= w * w * value;
       if (this.isResonant[i]) {
         this.respondResonant(i, tau, c, s);
         position += this.response.position;
         velocity += this.response.velocity;
+        acceleration += value - 2 * sigma * this.response.velocity - squared * this.response.position;
       } else {
         position += this.particularRe[i] * c - this.particularIm[i] * s;
         velocity -= w * (this.particularRe[i] * s + this.particularIm[i] * c);
+        acceleration -= w * w * (this.particularRe[i] * c - this.particularIm[i] * s);
       }
     }
     this.position = this.start + position;
     this.velocity = velocity;
-    this.acceleration = forcing - 2 * sigma * velocity - squared * position;
+    this.acceleration = acceleration;
     this.jerk = forcingRate - 2 * sigma * this.acceleration - squared * velocity;
     this.snap = forcingSecond - 2 * sigma * this.jerk - squared * this.acceleration;
     this.noise =
@@ -260,60 +298,6 @@ export class Oscillation {
     const rateIm = w * gRe;
     this.response.position = this.re[i] * gRe - this.im[i] * gIm;
     this.response.velocity = this.re[i] * rateRe - this.im[i] * rateIm;
-  }
-
-  private evaluateSeries(tau: number): void {
-    if (!this.hasSeries) this.makeSeries();
-    const { series } = this;
-    let p = 0;
-    let v = 0;
-    let a = 0;
-    let j = 0;
-    let s = 0;
-    for (let n = terms - 1; n >= 1; n--) {
-      const c = series[n];
-      p = p * tau + c;
-      v = v * tau + n * c;
-      if (n >= 2) a = a * tau + n * (n - 1) * c;
-      if (n >= 3) j = j * tau + n * (n - 1) * (n - 2) * c;
-      if (n >= 4) s = s * tau + n * (n - 1) * (n - 2) * (n - 3) * c;
-    }
-    this.position = this.start + p * tau;
-    this.velocity = v;
-    this.acceleration = a;
-    this.jerk = j;
-    this.snap = s;
-    this.noise = 4 * unitRoundoff * (Math.abs(this.startVelocity) + Math.abs(v) + Math.abs(tau * series[2]));
-  }
-
-  /** Coefficients of (d − d₀) = Σ c_n τ^n from the equation itself. */
-  private makeSeries(): void {
-    const { series, push, sigma, squared, count } = this;
-    series[0] = 0;
-    series[1] = this.startVelocity;
-    const turned = this.turned;
-    for (let i = 0; i < count; i++) {
-      turned[2 * i] = this.re[i];
-      turned[2 * i + 1] = this.im[i];
-    }
-    let factorial = 1;
-    for (let n = 0; n + 2 < terms; n++) {
-      let forcing = n < 4 ? push[n] / factorial : 0;
-      for (let i = 0; i < count; i++) {
-        const re = turned[2 * i];
-        const im = turned[2 * i + 1];
-        forcing += re;
-        const step = this.omega[i] / (n + 1);
-        turned[2 * i] = -im * step;
-        turned[2 * i + 1] = re * step;
-      }
-      series[n + 2] =
-        n === 0
-          ? this.known / 2
-          : (forcing - 2 * sigma * (n + 1) * series[n + 1] - squared * series[n]) / ((n + 2) * (n + 1));
-      factorial *= n + 1;
-    }
-    this.hasSeries = true;
   }
 }
 

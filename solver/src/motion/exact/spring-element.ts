@@ -40,3 +40,34 @@ function springOfSlip(form: ClosedForm, s: Stance): Phase {
   const { need, room } = form.carried;
   return Math.abs(need) <= room * (1 + heldTolerance) ? 0 : (-Math.sign(need) as Phase);
 }
+
+/**
+ * Judges the instant at which v_r and ḋ are both 0 though u̇ = ẏ does not last: the acceleration a solves
+ * m a ∈ F + W − k d − ρk|d| Sgn(a − ÿ) − friction Sgn(a − ü), which is monotone in a and so has one solution: stuck
+ * (a = ü), locked to the base (a = ÿ), or a slip of both with the signs that its own a confirms. Sets `contact` and `spring`.
+ */
+export function chooseBoth(form: ClosedForm, s: Stance): void {
+  const { inertia, stiffness } = form.problem;
+  const v = form.inputs.evaluate(0);
+  const carrier = form.contactCarrier === "base" ? v.baseAcceleration : 0;
+  const free = v.force - stiffness * s.position;
+  const element = form.elementSlope * Math.abs(s.position);
+  const slide = form.slide * v.normal;
+  const grip = form.grip * v.normal;
+  const ahead = Math.sign(carrier - v.baseAcceleration) || 1;
+  const isWithin = (force: number, room: number): boolean => room > 0 && Math.abs(force) <= room * (1 + heldTolerance);
+  if (isWithin(inertia * carrier - free + ahead * element, grip)) {
+    s.contact = 0;
+    s.spring = ahead as Phase;
+  } else if (isWithin(inertia * v.baseAcceleration - free - ahead * slide, element)) {
+    s.contact = -ahead as Phase;
+    s.spring = 0;
+  } else {
+    const middle = Math.max(carrier, v.baseAcceleration);
+    const above = free - slide - element > inertia * middle;
+    const below = free + slide + element < inertia * Math.min(carrier, v.baseAcceleration);
+    s.contact = (above ? 1 : below ? -1 : -ahead) as Phase;
+    s.spring = (above ? 1 : below ? -1 : ahead) as Phase;
+  }
+  orientSide(s);
+}

@@ -7,7 +7,9 @@ export interface Stance {
   position: number;
   /** ḋ. */
   velocity: number;
-  /** d̈ where it is known exactly (break-away), else NaN. */
+  /** v_r: exactly 0 where a slip starts from rest on the counterface. */
+  slip: number;
+  /** v̇_r where it is known better than the equation tells it (break-away), else NaN. */
   acceleration: number;
   contact: Phase;
   /** Sign of ḋ, 0 where the spring's own set-valued element holds ḋ = 0; 1 without displacement-proportional damping. */
@@ -16,12 +18,18 @@ export interface Stance {
   side: Phase;
 }
 
+/** A stance at t = 0 with everything still to be judged. */
+export function newStance(): Stance {
+  return { t: 0, position: 0, velocity: 0, slip: 0, acceleration: NaN, contact: 0, spring: 1, side: 1 };
+}
+
 /** The segments of a run in flat arrays that grow by doubling. */
 export class Segments {
   count = 0;
   private t = new Float64Array(64);
   private position = new Float64Array(64);
   private velocity = new Float64Array(64);
+  private slip = new Float64Array(64);
   private acceleration = new Float64Array(64);
   private contact = new Int8Array(64);
   private spring = new Int8Array(64);
@@ -33,6 +41,7 @@ export class Segments {
     this.t[i] = s.t;
     this.position[i] = s.position;
     this.velocity[i] = s.velocity;
+    this.slip[i] = s.slip;
     this.acceleration[i] = s.acceleration;
     this.contact[i] = s.contact;
     this.spring[i] = s.spring;
@@ -43,6 +52,7 @@ export class Segments {
     into.t = this.t[i];
     into.position = this.position[i];
     into.velocity = this.velocity[i];
+    into.slip = this.slip[i];
     into.acceleration = this.acceleration[i];
     into.contact = this.contact[i] as Phase;
     into.spring = this.spring[i] as Phase;
@@ -74,6 +84,7 @@ export class Segments {
     this.t = grown(this.t, new Float64Array(size));
     this.position = grown(this.position, new Float64Array(size));
     this.velocity = grown(this.velocity, new Float64Array(size));
+    this.slip = grown(this.slip, new Float64Array(size));
     this.acceleration = grown(this.acceleration, new Float64Array(size));
     this.contact = grown(this.contact, new Int8Array(size));
     this.spring = grown(this.spring, new Int8Array(size));

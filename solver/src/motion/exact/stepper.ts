@@ -2,7 +2,7 @@ import { firstZero, type Watched, type Work } from "../../numerics/first-zero.ts
 import type { EventKind, Phase } from "../../result.ts";
 import type { Problem } from "../../scenario/problem.ts";
 import { ClosedForm } from "./closed-form.ts";
-import { orient, orientSide } from "./spring-element.ts";
+import { chooseBoth, orient, orientSide } from "./spring-element.ts";
 import type { Stance } from "./stance.ts";
 import {
   BaseSlipWatch,
@@ -44,7 +44,7 @@ export class Stepper {
   ) {
     this.form = new ClosedForm(problem);
     const { oscillation, inputs, carried } = this.form;
-    this.slipWatch = new SlipWatch(oscillation, inputs, this.form.contactCarrier, problem.beltVelocity);
+    this.slipWatch = new SlipWatch(oscillation, inputs, this.form.contactCarrier);
     this.stretchWatch = new StretchWatch(oscillation);
     this.stretchRateWatch = new StretchRateWatch(oscillation);
     this.holdWatch = new HoldWatch(carried);
@@ -70,9 +70,15 @@ export class Stepper {
     const slip = initial.velocity - carrier;
     const scale = Math.max(Math.abs(initial.velocity), Math.abs(carrier));
     if (Math.abs(slip) <= 1e-12 * scale) return this.meet(s, 0);
+    s.slip = slip;
     s.contact = slip > 0 ? 1 : -1;
     orient(this.form, s);
     return null;
+  }
+
+  /** Judges anew a body that is stuck at s.t, the inputs being located there. */
+  rejudge(s: Stance): Happening {
+    return this.meet(s, 0);
   }
 
   /** Takes `s` to the end of its segment, not beyond `limit`, and tells what happened there. */
@@ -91,7 +97,10 @@ export class Stepper {
     if (this.cause === "corner") return this.pass(s, end, end < limit || end === form.inputs.end);
     if (s.t + tau >= end && end === form.inputs.end) return this.pass(s, end, true);
     this.carry(s, tau);
-    if (this.cause === "contact") return form.form === "stick" ? this.breakAway(s) : this.meet(s, s.contact);
+    if (this.cause === "contact") {
+      if (form.form === "stick") return this.breakAway(s);
+      return form.form === "lock" ? this.meetBoth(s, s.contact) : this.meet(s, s.contact);
+    }
     if (this.cause === "element") return this.meetElement(s);
     s.side = -s.side as Phase;
     return null;
@@ -124,10 +133,9 @@ export class Stepper {
 
   /** The first instant at which need leaves ±room, told window by window so that neither side is followed past the other. */
   private watchHold(cause: Cause): void {
-    if (this.form.carried.alwaysHolds(this.first)) return;
     const scale = this.inputScale();
     const end = this.first;
-    for (let from = 0; from < end && this.first === end; from += 4 * scale) {
+    for (let from = this.form.carried.holdsUntil(); from < end && this.first === end; from += 4 * scale) {
       const to = Math.min(end, from + 4 * scale);
       this.holdWatch.sign = 1;
       this.look(this.holdWatch, scale, cause, from, to);
@@ -160,14 +168,16 @@ export class Stepper {
     const { form } = this;
     let at = tau;
     if (form.form === "slip") {
-      form.oscillation.evaluate(at);
+      form.oscillation.evaluateSlip(at);
       s.position = form.oscillation.position;
       s.velocity = form.oscillation.velocity;
+      s.slip = form.oscillation.slip;
     } else {
       if (this.cause === "contact" || this.cause === "element") at = this.atLimit(tau);
       form.carried.evaluate(at);
       s.position = form.carried.position;
       s.velocity = form.carried.velocity;
+      s.slip = this.slipOfCarried();
     }
     s.t += at;
     s.acceleration = NaN;
@@ -192,8 +202,7 @@ export class Stepper {
     this.placeOnCounterface(s);
     const side = -Math.sign(carried.need) as Phase;
     const relative = (side * ((this.form.grip - this.form.slide) * inputs.values.normal)) / this.problem.inertia;
-    const isMoved = this.form.contactCarrier === "base";
-    s.acceleration = isMoved ? relative : relative - (this.problem.isRelative ? 0 : inputs.values.baseAcceleration);
+    s.acceleration = relative;
     s.contact = side;
     orient(this.form, s);
     return "break-away";
@@ -202,6 +211,7 @@ export class Stepper {
   /** Sets ḋ = u̇ − ẏ exactly. */
   private placeOnCounterface(s: Stance): void {
     const { form } = this;
+    s.slip = 0;
     s.velocity = form.contactCarrier === "base" ? 0 : this.problem.beltVelocity - form.inputs.values.baseVelocity;
   }
 
@@ -230,9 +240,9 @@ export class Stepper {
   private meetElement(s: Stance): Happening {
     const { form } = this;
     s.velocity = 0;
-    if (s.contact === 0) return this.turnInStick(s);
+    if (s.contact === 0) return this.meetBoth(s, 0);
     if (form.form === "lock") {
-      s.acceleration = 0; // need is exactly what could just be held
+      s.acceleration = form.inputs.values.baseAcceleration; // need is exactly what could just be held: d̈ = 0
       s.spring = -Math.sign(form.carried.need) as Phase;
       orientSide(s);
       return null;
@@ -241,17 +251,14 @@ export class Stepper {
     return null;
   }
 
-  /** The base turns under a stuck body: S changes its sign at once, and what is left over may be too much for the contact. */
-  private turnInStick(s: Stance): Happening {
-    const { form } = this;
-    s.spring = -s.spring as Phase;
-    form.take(s);
-    form.carried.evaluate(0);
-    const { need, room } = form.carried;
-    if (Math.abs(need) <= room * (1 + heldTolerance)) return null;
-    s.contact = -Math.sign(need) as Phase;
-    orient(this.form, s);
-    return "break-away";
+  /** v_r and ḋ are 0 at once, for an instant only. */
+  private meetBoth(s: Stance, before: Phase): Happening {
+    this.placeOnCounterface(s);
+    s.acceleration = NaN;
+    chooseBoth(this.form, s);
+    if (s.contact === before) return null;
+    if (s.contact === 0) return "stop";
+    return before === 0 ? "break-away" : "turn";
   }
 
   /** A corner of the inputs, or the limit of the step: right-hand values from here on. */
@@ -261,40 +268,43 @@ export class Stepper {
     const wasSlip = form.form === "slip";
     const isZero = wasSlip && this.cause === "contact";
     const startSpeed = Math.abs(form.inputs.evaluate(0).baseVelocity);
-    if (wasSlip) form.oscillation.evaluate(tau);
+    if (wasSlip) form.oscillation.evaluateSlip(tau);
     else form.carried.evaluate(tau);
     const moved = wasSlip ? form.oscillation : form.carried;
+    s.slip = wasSlip ? form.oscillation.slip : this.slipOfCarried();
     s.position = moved.position;
     s.velocity = moved.velocity;
     s.acceleration = NaN;
     const before = form.inputs.evaluate(tau).baseVelocity;
-    const carrierBefore = form.counterfaceVelocity();
     s.t = end;
     if (!isCorner) return null;
     form.inputs.locate(end);
     const after = form.inputs.evaluate(0).baseVelocity;
-    const carrierAfter = form.counterfaceVelocity();
     const scale = Math.max(startSpeed, Math.abs(before), Math.abs(after));
     const isJump = Math.abs(after - before) > 1e-12 * scale;
     if (isJump && !problem.isRelative) s.velocity += before - after;
     const slipsNow = isJump && form.contactCarrier === "base" && !problem.isRelative;
-    return this.enter(s, slipsNow ? carrierBefore - carrierAfter : 0, isZero, 1e-12 * scale);
+    if (slipsNow) s.slip = s.velocity;
+    return this.enter(s, slipsNow, isZero, 1e-12 * scale);
   }
 
-  /** What a corner does to the contact: `jump` is added to v_r there. */
-  private enter(s: Stance, jump: number, isZero: boolean, tolerance: number): Happening {
-    const { form } = this;
+  /** v_r of a stick (0), or of a body locked to its base over ground or belt. */
+  private slipOfCarried(): number {
+    if (this.form.form === "stick") return 0;
+    return this.form.inputs.values.baseVelocity - this.problem.beltVelocity;
+  }
+
+  /** What a corner does to the contact; `isJump` where the counterface itself has jumped, so that v_r has too. */
+  private enter(s: Stance, isJump: boolean, isZero: boolean, tolerance: number): Happening {
     const was = s.contact;
-    if (was === 0 && jump === 0) return this.meet(s, 0);
-    if (was !== 0 && jump === 0) {
+    if (was === 0 && !isJump) return this.meet(s, 0);
+    if (!isJump) {
       if (isZero) return this.meet(s, was);
       orient(this.form, s);
       return null;
     }
-    const slip = s.velocity; // v_r = ḋ: only a base that jumps under its own counterface gets here
-    if (Math.abs(slip) <= tolerance) return this.meet(s, was);
-    s.contact = slip > 0 ? 1 : -1;
-    form.inputs.evaluate(0);
+    if (Math.abs(s.slip) <= tolerance) return this.meet(s, was);
+    s.contact = s.slip > 0 ? 1 : -1;
     orient(this.form, s);
     if (was === 0) return "break-away";
     return s.contact === was ? null : "turn";

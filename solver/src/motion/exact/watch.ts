@@ -23,29 +23,21 @@ abstract class Watch implements Watched {
   }
 }
 
-/** v_r of a slip against ground, belt or base. */
+/** v_r of a slip. */
 export class SlipWatch extends Watch {
   constructor(
     private readonly oscillation: Oscillation,
     private readonly inputs: Inputs,
     private readonly carrier: Carrier,
-    private readonly beltVelocity: number,
   ) {
     super();
   }
 
   evaluate(tau: number): void {
     const { oscillation } = this;
-    oscillation.evaluate(tau);
+    oscillation.evaluateSlip(tau);
+    this.take(oscillation.slip, oscillation.slipRate, oscillation.slipSecond);
     this.noise = oscillation.noise;
-    if (this.carrier === "base") return this.take(oscillation.velocity, oscillation.acceleration, oscillation.jerk);
-    const v = this.inputs.evaluate(tau);
-    this.take(
-      oscillation.velocity + v.baseVelocity - this.beltVelocity,
-      oscillation.acceleration + v.baseAcceleration,
-      oscillation.jerk + v.baseJerk,
-    );
-    this.noise += 2 ** -51 * (Math.abs(v.baseVelocity) + Math.abs(this.beltVelocity));
   }
 
   thirdBound(reach: number): number {

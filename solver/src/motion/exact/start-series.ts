@@ -1,0 +1,170 @@
+import type { Inputs } from "../inputs.ts";
+import { newStance, type Stance } from "./stance.ts";
+
+const terms = 26;
+const unitRoundoff = 2 ** -53;
+
+/**
+ * A slip just after its start as power series in τ, good while every rate times τ is ≤ 1 (the last of 26 terms is then
+ * below rounding). d − d₀ = Σ c_n τ^n comes from the equation itself; against ground or belt v_r has a series of its own,
+ * from m ẍ = F + W + f − C ḋ − K d, so that v_r near 0 is no difference of ḋ and ẏ.
+ */
+export class StartSeries {
+  position = 0;
+  velocity = 0;
+  acceleration = 0;
+  jerk = 0;
+  snap = 0;
+  slip = 0;
+  slipRate = 0;
+  slipSecond = 0;
+  noise = 0;
+
+  private inputs!: Inputs;
+  private inertia = 0;
+  private sigma = 0;
+  private squared = 0;
+  private slide = 0;
+  private isOnBase = true;
+  private readonly stance = newStance();
+  private isMade = false;
+  private readonly stretch = new Float64Array(terms);
+  private readonly sliding = new Float64Array(terms);
+  private turned = new Float64Array(0);
+
+  /** Nothing is computed until it is asked for; the inputs must stay where they are until then. */
+  begin(
+    inputs: Inputs,
+    body: { inertia: number; stiffness: number; viscous: number },
+    slide: number,
+    stance: Stance,
+    isOnBase: boolean,
+  ): void {
+    this.inputs = inputs;
+    this.inertia = body.inertia;
+    this.sigma = body.viscous / (2 * body.inertia);
+    this.squared = body.stiffness / body.inertia;
+    this.slide = slide;
+    this.isOnBase = isOnBase;
+    Object.assign(this.stance, stance);
+    this.isMade = false;
+  }
+
+  evaluate(tau: number): void {
+    if (!this.isMade) this.make();
+    const { stretch } = this;
+    let p = 0;
+    let v = 0;
+    let a = 0;
+    let j = 0;
+    let s = 0;
+    for (let n = terms - 1; n >= 1; n--) {
+      const c = stretch[n];
+      p = p * tau + c;
+      v = v * tau + n * c;
+      if (n >= 2) a = a * tau + n * (n - 1) * c;
+      if (n >= 3) j = j * tau + n * (n - 1) * (n - 2) * c;
+      if (n >= 4) s = s * tau + n * (n - 1) * (n - 2) * (n - 3) * c;
+    }
+    this.position = p * tau;
+    this.velocity = v;
+    this.acceleration = a;
+    this.jerk = j;
+    this.snap = s;
+    this.noise = this.noiseOf(v, stretch[1], stretch[2], tau);
+  }
+
+  evaluateSlip(tau: number): void {
+    if (!this.isMade) this.make();
+    const { sliding } = this;
+    let v = 0;
+    let a = 0;
+    let j = 0;
+    for (let n = terms - 2; n >= 0; n--) {
+      const c = sliding[n];
+      v = v * tau + c;
+      if (n >= 1) a = a * tau + n * c;
+      if (n >= 2) j = j * tau + n * (n - 1) * c;
+    }
+    this.slip = v;
+    this.slipRate = a;
+    this.slipSecond = j;
+    this.noise = this.noiseOf(v, sliding[0], sliding[1], tau);
+  }
+
+  /** A known start (at rest, acceleration exact) leaves only the rounding of what is there. */
+  private noiseOf(value: number, first: number, second: number, tau: number): number {
+    return 4 * unitRoundoff * (Math.abs(value) + Math.abs(first) + 2 * Math.abs(second * tau));
+  }
+
+  private make(): void {
+    this.isMade = true;
+    const { stretch, sliding, sigma, squared, stance, isOnBase } = this;
+    const known = stance.acceleration / 2;
+    this.startTurning();
+    stretch[0] = 0;
+    stretch[1] = stance.velocity;
+    sliding[0] = stance.slip;
+    for (let n = 0; n + 2 < terms; n++) {
+      const held = n === 0 ? stance.position : stretch[n];
+      const pull = 2 * sigma * (n + 1) * stretch[n + 1] + squared * held;
+      let next = (this.forceAt(n) - pull) / ((n + 2) * (n + 1));
+      const base = this.baseAt(n + 2);
+      if (isOnBase) next -= base;
+      if (n === 0 && !Number.isNaN(known)) next = known;
+      stretch[n + 2] = isOnBase ? next : next - base;
+      sliding[n + 1] = (n + 2) * next;
+      this.turn(n);
+    }
+  }
+
+  /** The harmonics' complex amplitudes (force per m; base), to be turned by iω/(n + 1) from one coefficient to the next. */
+  private startTurning(): void {
+    const { inputs, inertia } = this;
+    const size = 4 * (inputs.count + 1);
+    if (this.turned.length < size) this.turned = new Float64Array(size);
+    const { turned } = this;
+    for (let i = 0; i < inputs.count; i++) {
+      turned[4 * i] = inputs.forceRe[i] / inertia;
+      turned[4 * i + 1] = inputs.forceIm[i] / inertia;
+      turned[4 * i + 2] = inputs.baseRe[i];
+      turned[4 * i + 3] = inputs.baseIm[i];
+    }
+    const ripple = 4 * inputs.count;
+    turned[ripple] = (-this.slide * inputs.rippleRe) / inertia;
+    turned[ripple + 1] = (-this.slide * inputs.rippleIm) / inertia;
+  }
+
+  private turn(n: number): void {
+    const { inputs, turned } = this;
+    for (let i = 0; i <= inputs.count; i++) {
+      const step = (i < inputs.count ? inputs.omega[i] : inputs.rippleOmega) / (n + 1);
+      for (let k = 4 * i; k < 4 * i + 4; k += 2) {
+        const re = turned[k];
+        turned[k] = -turned[k + 1] * step;
+        turned[k + 1] = re * step;
+      }
+    }
+  }
+
+  /** Coefficient n of (F + W + f)/m; with an acceleration record that of (F + f)/m − ÿ. */
+  private forceAt(n: number): number {
+    const { inputs, inertia, turned } = this;
+    let sum = 0;
+    if (n < 4) sum = (inputs.force[n] - (n === 0 ? this.slide * inputs.normal : 0)) / inertia;
+    for (let i = 0; i <= inputs.count; i++) sum += turned[4 * i];
+    return sum;
+  }
+
+  /** Coefficient n of y (n ≥ 2), by way of ÿ so that an acceleration record counts too. */
+  private baseAt(n: number): number {
+    const { inputs, turned } = this;
+    if (n === 2) return inputs.evaluate(0).baseAcceleration / 2; // the very number a known start is told from
+    let sum = n < 6 ? inputs.acceleration[n - 2] / (n * (n - 1)) : 0;
+    for (let i = 0; i < inputs.count; i++) {
+      const w = inputs.omega[i];
+      sum -= (turned[4 * i + 2] * w * w) / (n * (n - 1));
+    }
+    return sum;
+  }
+}
