@@ -1,6 +1,6 @@
 import { beforeEach, describe, expect, it, vi } from "vitest";
 import type { Result } from "@restband/solver";
-import { createPool, type Pool } from "../../../web/src/compute/pool.ts";
+import { Pool } from "../../../web/src/compute/pool.ts";
 import type { SolverJob, SolverWorker } from "../../../web/src/compute/solver-job.ts";
 
 /** A worker that runs nothing by itself: the test says when a run ends, fails or the worker dies. */
@@ -37,7 +37,7 @@ describe("the pool of workers", () => {
   beforeEach(() => {
     vi.useFakeTimers();
     workers = [];
-    pool = createPool({
+    pool = new Pool({
       size: 1,
       patience: 250,
       start: () => {
@@ -106,7 +106,8 @@ describe("the pool of workers", () => {
     workers[0].crash();
     expect(titles(1)).toEqual(["a"]);
     workers[1].crash();
-    await expect(a).resolves.toMatchObject({ kind: "failed", message: expect.stringContaining("broke off twice") });
+    const reply = await a;
+    expect(reply.kind === "failed" && reply.message).toContain("broke off twice");
   });
 
   it("tells progress, and never that of a run it has ended", () => {
@@ -124,8 +125,19 @@ describe("the pool of workers", () => {
     await expect(a).resolves.toEqual({ kind: "failed", message: "The computation failed: no root" });
   });
 
+  it("says so where no worker can be started", async () => {
+    pool = new Pool({
+      size: 1,
+      patience: 250,
+      start: () => {
+        throw new Error("Worker is not defined");
+      },
+    });
+    await expect(pool.request(first, job("a"))).resolves.toMatchObject({ kind: "failed" });
+  });
+
   it("runs two clients at once on two workers", () => {
-    pool = createPool({
+    pool = new Pool({
       size: 2,
       patience: 250,
       start: () => (workers.push(new HandWorker()), workers[workers.length - 1]),

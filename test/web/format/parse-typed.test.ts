@@ -48,7 +48,7 @@ describe("what a person types becomes SI", () => {
     ["300 rpm", { dimension: "frequency", motion: "linear" }, 5],
     ["10 rad/s", { dimension: "frequency", motion: "linear" }, 10 / (2 * Math.PI)],
     ["4 N/um", { dimension: "stiffness", motion: "linear" }, 4e6],
-    ["10 lbf/in", { dimension: "stiffness", motion: "linear" }, 1751.2683524647636],
+    ["10 lbf/in", { dimension: "stiffness", motion: "linear" }, 1751.268352464764],
     ["0.35 N s/mm", { dimension: "damping", motion: "linear" }, 350],
     ["12 N*m", { dimension: "force", motion: "angular" }, 12],
     ["15 %", { dimension: "none", motion: "linear" }, 0.15],

@@ -1,12 +1,13 @@
 import type { SolverJob, SolverReply } from "./solver-job.ts";
 
-const ROOM = 60;
+/** Runs kept at most, and samples in all of them: about 40 MB. */
+const MOST_RUNS = 300;
+const MOST_SAMPLES = 800_000;
 const kept = new Map<string, SolverReply>();
 
 /** The identity of a run: all that the solver reads; title, purpose and origins change no result. */
 export function runKey({ scenario, options }: SolverJob): string {
-  const { title: _title, purpose: _purpose, origins: _origins, ...read } = scenario;
-  return JSON.stringify([read, options]);
+  return JSON.stringify([{ ...scenario, title: "", purpose: "", origins: {} }, options]);
 }
 
 /** A reply computed before, by its key; looked at again it stays longer. */
@@ -21,8 +22,12 @@ export function remember(key: string, reply: SolverReply): void {
   if (reply.kind !== "result" && reply.kind !== "refusal") return;
   kept.delete(key);
   kept.set(key, reply);
-  for (const oldest of kept.keys()) {
-    if (kept.size <= ROOM) return;
+  let samples = [...kept.values()].reduce((sum, each) => sum + sizeOf(each), 0);
+  for (const [oldest, dropped] of kept) {
+    if (kept.size <= MOST_RUNS && samples <= MOST_SAMPLES) return;
     kept.delete(oldest);
+    samples -= sizeOf(dropped);
   }
 }
+
+const sizeOf = (reply: SolverReply): number => (reply.kind === "result" ? (reply.result.samples?.t.length ?? 0) : 0);

@@ -1,8 +1,8 @@
-import { createPool } from "./pool.ts";
+import { Pool } from "./pool.ts";
 import { startWorker } from "./start-worker.ts";
 
 /** The page's one pool: a second worker only where the machine has a core to spare. */
-export const solverPool = createPool({
+export const solverPool = new Pool({
   start: startWorker,
   size: (navigator.hardwareConcurrency || 2) > 2 ? 2 : 1,
   patience: 250,

@@ -16,9 +16,9 @@ export interface Run {
   readonly progress: number | null;
   /** A sentence where the run broke off or was cancelled. */
   readonly failure: string | null;
-  cancel(): void;
+  readonly cancel: () => void;
   /** Runs once more what was cancelled or failed. */
-  again(): void;
+  readonly again: () => void;
 }
 
 interface RunState {

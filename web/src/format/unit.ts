@@ -18,6 +18,8 @@ export type Motion = "linear" | "angular";
 export interface Measure {
   readonly dimension: Dimension;
   readonly motion: Motion;
+  /** A plain number that is a share of something, read as a percentage. */
+  readonly isShare?: boolean;
 }
 
 /** The value in SI of `value` in `unit`. Powers of ten shift the decimal point, so that 1.2 mm is 0.0012 m to the last bit. */

@@ -174,16 +174,22 @@ const table: Record<Dimension, { linear: readonly Unit[]; angular?: readonly Uni
   },
   energy: {
     linear: [
-      { label: "J", factor: 1, from: 0.1 },
-      { label: "mJ", factor: 1e-3, from: 0.1 },
+      { label: "J", factor: 1, from: 1 },
+      { label: "mJ", factor: 1e-3, from: 1 },
       { label: "μJ", factor: 1e-6, from: 0 },
       { label: "kJ", factor: 1e3, from: 10 },
     ],
   },
 };
 
+const shareUnits: readonly Unit[] = [
+  { label: "%", factor: 0.01, from: 0 },
+  { label: "", factor: 1 },
+];
+
 /** The units a number can be typed and read in, the usual one first. */
-export function unitsOf({ dimension, motion }: Measure): readonly Unit[] {
+export function unitsOf({ dimension, motion, isShare }: Measure): readonly Unit[] {
+  if (isShare) return shareUnits;
   const entry = table[dimension];
   return motion === "angular" && entry.angular ? entry.angular : entry.linear;
 }

@@ -1,0 +1,114 @@
+import type { Data } from "plotly.js-dist-min";
+import { faded, type PlotTheme } from "../../components/plot-theme.ts";
+import { fromSi, type Unit } from "../../format/unit.ts";
+import { curveOf, type Line } from "./curve.ts";
+import { axes, layoutOf, type FigureLayout } from "./evidence-layout.ts";
+import type { Frame, PanelFrame } from "./frame.ts";
+import type { RunView } from "./run-view.ts";
+import { bandTimes, driveSpeed } from "./scales.ts";
+import { thinned } from "./thin.ts";
+
+const MOST_POINTS = 4000;
+const channels = { displacement: "x", velocity: "v", friction: "f" } as const;
+
+/** Displacement with its rest band, velocity and friction force over one time axis, as plotly wants it. */
+export function evidenceFigure(view: RunView, frame: Frame, theme: PlotTheme): { data: Data[]; layout: FigureLayout } {
+  const data = frame.panels.flatMap((panel) => [
+    ...(panel.key === "displacement" ? bandTraces(view, frame, panel, theme) : []),
+    ...(panel.key === "velocity" ? speedTraces(view, frame, panel, theme) : []),
+    ...(panel.key === "friction" ? holdTraces(view, frame, panel, theme) : []),
+    ...curveTraces(view, frame, panel, theme),
+  ]);
+  return { data, layout: layoutOf(frame, theme) };
+}
+
+/** Sliding thin, stuck thick: told apart by width as well as by colour. */
+function curveTraces(view: RunView, frame: Frame, panel: PanelFrame, theme: PlotTheme): Data[] {
+  const { samples, eventIndices } = view;
+  const channel = channels[panel.key];
+  const seen = eventIndices.filter((i) => samples.t[i] >= frame.from && samples.t[i] <= frame.to);
+  const isDense = seen.length > MOST_POINTS / 4;
+  const indices = thinned(
+    samples.t,
+    samples[channel],
+    frame,
+    MOST_POINTS / 2,
+    isDense ? [] : seen.flatMap((i) => [i - 1, i]),
+  );
+  const { slip, stick } = curveOf(samples, channel, indices, panel.unit, isDense);
+  return [line(panel, slip, { color: theme.slip, width: 2 }), line(panel, stick, { color: theme.stick, width: 3 })];
+}
+
+/** The band in which friction can hold the body, about its equilibrium, and that equilibrium itself. */
+function bandTraces(view: RunView, frame: Frame, panel: PanelFrame, theme: PlotTheme): Data[] {
+  const { equilibrium, restBand } = view.inputs;
+  if (restBand === null) return [];
+  const times = bandTimes(view, frame);
+  const edge = (offset: number): Line => at(times, (t) => (equilibrium(t) ?? 0) + offset, panel.unit);
+  const drawn = { color: theme["band-line"], width: 1.5 };
+  const fill: Partial<Data> = {
+    fill: "tonexty",
+    fillcolor: faded(theme.band, 0.2),
+    fillpattern: {
+      shape: "-",
+      size: 5,
+      solidity: 0.16,
+      fgcolor: theme["band-line"],
+      bgcolor: faded(theme.band, 0.2),
+      fgopacity: 0.5,
+    },
+  };
+  return [
+    line(panel, edge(-restBand), drawn),
+    { ...line(panel, edge(restBand), drawn), ...fill } as Data,
+    line(panel, edge(0), { color: theme.quiet, width: 1, dash: "dash" }),
+  ];
+}
+
+function speedTraces(view: RunView, frame: Frame, panel: PanelFrame, theme: PlotTheme): Data[] {
+  return driveSpeed(view).map((speed) =>
+    line(
+      panel,
+      at([frame.from, frame.to], () => speed, panel.unit),
+      { color: theme.quiet, width: 1, dash: "dash" },
+    ),
+  );
+}
+
+/** What friction can hold, to both sides. */
+function holdTraces(view: RunView, frame: Frame, panel: PanelFrame, theme: PlotTheme): Data[] {
+  const { inputs, scenario } = view;
+  if (inputs.hold(frame.from) === 0) return [];
+  const times = scenario.contact.normal.ripple ? bandTimes(view, frame) : [frame.from, frame.to];
+  return [1, -1].map((side) =>
+    line(
+      panel,
+      at(times, (t) => side * inputs.hold(t), panel.unit),
+      { color: theme.stick, width: 1.5, dash: "dot" },
+    ),
+  );
+}
+
+const at = (times: readonly number[], value: (t: number) => number, unit: Unit): Line => ({
+  x: Float64Array.from(times),
+  y: Float64Array.from(times, (t) => fromSi(value(t), unit)),
+});
+
+interface Stroke {
+  color: string;
+  width: number;
+  dash?: "dash" | "dot";
+}
+
+function line(panel: PanelFrame, { x, y }: Line, stroke: Stroke): Data {
+  return {
+    type: "scatter",
+    mode: "lines",
+    x,
+    y,
+    yaxis: axes[panel.key],
+    line: { ...stroke, simplify: false },
+    hoverinfo: "skip",
+    showlegend: false,
+  };
+}

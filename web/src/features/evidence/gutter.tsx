@@ -1,0 +1,48 @@
+import { classNames } from "../../components/class-names.ts";
+import { Figure } from "../../components/figure.tsx";
+import type { Frame } from "./frame.ts";
+import { readingsAt, type CursorReading } from "./readings.ts";
+import type { RunView } from "./run-view.ts";
+
+const tones: Record<CursorReading["tone"], string> = {
+  slip: "text-slip",
+  quiet: "text-quiet",
+  ink: "text-ink",
+  band: "text-band-line",
+  stick: "text-stick",
+};
+
+/** The values at the cursor beside their panels, in the colours of their curves. */
+export function Gutter({ view, frame, t }: { view: RunView; frame: Frame; t: number }) {
+  const readings = readingsAt(view, t);
+  return frame.panels.map(({ key, top }) => (
+    <dl key={key} className="absolute" style={{ top: top - 6, left: frame.width - frame.right + 20, right: 8 }}>
+      {readings[key].map((reading) => (
+        <ReadingItem key={reading.name} reading={reading} className="mb-1" />
+      ))}
+    </dl>
+  ));
+}
+
+/** On the phone: the first value of each panel, above the plots. */
+export function ReadingsRow({ view, t }: { view: RunView; t: number }) {
+  const readings = readingsAt(view, t);
+  return (
+    <dl className="mb-3 grid grid-cols-3 gap-3">
+      {[readings.displacement[0], readings.velocity[0], readings.friction[0]].map((reading) => (
+        <ReadingItem key={reading.name} reading={reading} />
+      ))}
+    </dl>
+  );
+}
+
+function ReadingItem({ reading, className }: { reading: CursorReading; className?: string }) {
+  return (
+    <div className={classNames("leading-[1.25]", className)}>
+      <dt className={classNames("text-13 font-semibold", tones[reading.tone])}>{reading.name}</dt>
+      <dd className={classNames("text-18 font-semibold", tones[reading.tone])}>
+        <Figure {...reading} />
+      </dd>
+    </div>
+  );
+}

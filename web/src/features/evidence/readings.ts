@@ -1,0 +1,80 @@
+import { instantAt, type Instant } from "../../compute/instant.ts";
+import { readQuantity, say, type Reading } from "../../format/format-quantity.ts";
+import { nounOf } from "../../format/noun.ts";
+import type { Measure } from "../../format/unit.ts";
+import type { PanelKey } from "./frame.ts";
+import type { RunView } from "./run-view.ts";
+
+/** A figure at the cursor, in the colour of its curve. */
+export interface CursorReading extends Reading {
+  readonly name: string;
+  readonly tone: "slip" | "quiet" | "ink" | "band" | "stick";
+}
+
+/** What stands in the gutter beside each panel: the values at the cursor, exact where an event is. */
+export function readingsAt(view: RunView, t: number): Record<PanelKey, CursorReading[]> {
+  const here = instantAt(view.samples, t);
+  return {
+    displacement: displacementReadings(view, here),
+    velocity: [
+      reading(view, "velocity", here.v, "velocity", "slip"),
+      reading(view, "acceleration", here.a, "acceleration", "ink"),
+    ],
+    friction: frictionReadings(view, here),
+  };
+}
+
+function displacementReadings(view: RunView, { t, x }: Instant): CursorReading[] {
+  const { scenario, inputs } = view;
+  const own = reading(view, nounOf(scenario), x, "displacement", "slip");
+  const band = inputs.restBand === null ? [] : [bandReading(view, inputs.restBand)];
+  if (scenario.base.length === 0) return [own, ...band];
+  const y = inputs.base(t);
+  const isBehind = view.scenario.base.some(({ kind }) => kind === "ramp");
+  return [
+    own,
+    reading(view, "drive", y, "displacement", "quiet"),
+    reading(view, isBehind && x < y ? "behind drive" : "ahead of drive", x - y, "displacement", "ink"),
+    ...band,
+  ];
+}
+
+function bandReading(view: RunView, restBand: number): CursorReading {
+  const band = reading(view, "rest band", restBand, "displacement", "band", 3);
+  return { ...band, text: `±${band.text}` };
+}
+
+function frictionReadings(view: RunView, { t, f, v, phase }: Instant): CursorReading[] {
+  const { scenario, inputs } = view;
+  const { counterface } = scenario.contact;
+  const own = reading(view, "friction", f, "force", phase === 0 ? "stick" : "slip");
+  const hold = inputs.hold(t);
+  const holding = hold > 0 ? [reading(view, "holds up to", hold, "force", "stick")] : [];
+  if (counterface === "base") return [own, ...holding];
+  const sliding = v - (typeof counterface === "object" ? counterface.velocity : 0);
+  const heat = phase === 0 ? 0 : -f * sliding;
+  return [own, reading(view, "heat in contact", heat, "power", "ink", 3), ...holding];
+}
+
+function reading(
+  { scenario }: RunView,
+  name: string,
+  value: number,
+  dimension: Measure["dimension"],
+  tone: CursorReading["tone"],
+  digits = 4,
+): CursorReading {
+  return { name, tone, ...readQuantity(value, { dimension, motion: scenario.motion }, { digits }) };
+}
+
+/** "slipping forward for 13.2 ms": the phase at a time and how long it has lasted. */
+export function phaseWords({ intervals, scenario }: RunView, t: number): { phase: string; since: string } {
+  const interval = intervals.find(({ from, to }) => t >= from && t < to) ?? intervals[intervals.length - 1];
+  if (!interval) return { phase: "", since: "" };
+  const words = { [-1]: "slipping back", 0: "stuck", 1: "slipping forward" }[interval.phase];
+  const lasted = Math.max(0, t - interval.from);
+  return {
+    phase: words,
+    since: lasted > 0 ? ` for ${say(lasted, { dimension: "time", motion: scenario.motion })}` : "",
+  };
+}

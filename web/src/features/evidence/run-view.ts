@@ -1,0 +1,81 @@
+import type { Result, Samples, Scenario } from "@restband/solver";
+import { inputsOf, type Inputs } from "../../compute/inputs.ts";
+import { intervalsOf, shownEnd, type Interval } from "../../compute/intervals.ts";
+
+/** A run made ready to be looked at: everything that does not hang on what part of it is seen. */
+export interface RunView {
+  readonly scenario: Scenario;
+  readonly result: Result;
+  readonly samples: Samples;
+  readonly intervals: readonly Interval[];
+  readonly inputs: Inputs;
+  /** The samples at which something happens, sorted. */
+  readonly eventIndices: readonly number[];
+  /** Times of the events, sorted, each once. */
+  readonly eventTimes: readonly number[];
+  /** What is shown ends here, s. */
+  readonly end: number;
+}
+
+/** Null where a result has no samples to draw. */
+export function runViewOf(scenario: Scenario, result: Result): RunView | null {
+  const { samples } = result;
+  if (!samples || samples.t.length === 0) return null;
+  const end = shownEnd(scenario, result);
+  const held = standingOn(samples, end);
+  return {
+    scenario,
+    result,
+    samples: held,
+    intervals: intervalsOf(held, end),
+    inputs: inputsOf(scenario),
+    eventIndices: phaseChanges(held),
+    eventTimes: [...new Set(result.events.map(({ t }) => t))],
+    end,
+  };
+}
+
+/** A body that rests goes on standing to the end of what is shown. */
+function standingOn(samples: Samples, end: number): Samples {
+  const last = samples.t.length - 1;
+  if (samples.t[last] >= end) return samples;
+  const longer = (values: Float64Array, value: number): Float64Array => Float64Array.from([...values, value]);
+  const { t, x, v, a, f, phase } = samples;
+  return {
+    t: longer(t, end),
+    x: longer(x, x[last]),
+    v: longer(v, v[last]),
+    a: longer(a, a[last]),
+    f: longer(f, f[last]),
+    phase: longer(phase, phase[last]),
+  };
+}
+
+function phaseChanges({ phase }: Samples): number[] {
+  const indices: number[] = [];
+  for (let i = 1; i < phase.length; i++) if (phase[i] !== phase[i - 1]) indices.push(i);
+  return indices;
+}
+
+/** The event before or after a time, or null; events at the time itself do not count. */
+export function neighbourEvent({ eventTimes }: RunView, t: number, direction: 1 | -1): number | null {
+  const beyond = direction === 1 ? eventTimes.find((time) => time > t) : lastBefore(eventTimes, t);
+  return beyond ?? null;
+}
+
+function lastBefore(times: readonly number[], t: number): number | undefined {
+  for (let i = times.length - 1; i >= 0; i--) if (times[i] < t) return times[i];
+  return undefined;
+}
+
+/** Where the cursor stands until somebody moves it: at the event in the middle of the run. */
+export function firstCursor({ eventTimes }: RunView): number {
+  return eventTimes[Math.floor(eventTimes.length / 2)] ?? 0;
+}
+
+/** The last three cycles from break-away to break-away, where there are as many; null elsewhere. */
+export function lastCycles({ result, end }: RunView): { from: number; to: number } | null {
+  const starts = result.events.filter(({ kind }) => kind === "break-away").map(({ t }) => t);
+  if (starts.length < 5) return null;
+  return { from: starts[starts.length - 4], to: Math.min(end, starts[starts.length - 1]) };
+}

@@ -1,0 +1,114 @@
+import type { Scenario } from "@restband/solver";
+import { without, writePath } from "../path.ts";
+import { checkSheet } from "./check-sheet.ts";
+import type { Draft, DraftAction, Sheet } from "./draft.ts";
+
+const STEPS_KEPT = 200;
+
+/** A draft of a scenario that is valid. */
+export function openDraft(scenario: Scenario, units: Sheet["units"] = unitsEntered(scenario)): Draft {
+  const sheet: Sheet = { wanted: scenario, unread: {}, units };
+  return { sheet, inForce: scenario, faults: [], past: [], future: [], merging: null };
+}
+
+/** A draft with some values as they were left, refused or unread. */
+export function resumeDraft(inForce: Scenario, sheet: Sheet): Draft {
+  return { sheet, ...checkSheet(sheet, inForce), past: [], future: [], merging: null };
+}
+
+/** All that can happen to a draft. Pure: the same action on the same draft gives the same draft. */
+export function draftReducer(draft: Draft, action: DraftAction): Draft {
+  switch (action.type) {
+    case "undo":
+      return goBack(draft);
+    case "redo":
+      return goForward(draft);
+    case "settle":
+      return draft.merging === null ? draft : { ...draft, merging: null };
+    case "show-in":
+      return { ...draft, sheet: withUnit(draft.sheet, action.path, action.unit) };
+    case "set":
+    case "leave-unread":
+      return step(draft, edited(draft.sheet, action), action.path);
+    case "change":
+      return step(draft, changed(draft.sheet, action.apply, action.rename), null);
+    case "replace":
+      return step(draft, { wanted: action.scenario, unread: {}, units: draft.sheet.units }, null);
+  }
+}
+
+function step(draft: Draft, sheet: Sheet, merging: string | null): Draft {
+  const isSameStep = merging !== null && merging === draft.merging;
+  const past = isSameStep ? draft.past : [...draft.past, draft.sheet].slice(-STEPS_KEPT);
+  return { sheet, ...checkSheet(sheet, draft.inForce), past, future: [], merging };
+}
+
+function goBack(draft: Draft): Draft {
+  const sheet = draft.past[draft.past.length - 1];
+  if (!sheet) return draft;
+  const future = [draft.sheet, ...draft.future];
+  return { sheet, ...checkSheet(sheet, draft.inForce), past: draft.past.slice(0, -1), future, merging: null };
+}
+
+function goForward(draft: Draft): Draft {
+  const [sheet, ...future] = draft.future;
+  if (!sheet) return draft;
+  return { sheet, ...checkSheet(sheet, draft.inForce), past: [...draft.past, draft.sheet], future, merging: null };
+}
+
+type Edit = Extract<DraftAction, { type: "set" | "leave-unread" }>;
+
+function edited(sheet: Sheet, action: Edit): Sheet {
+  if (action.type === "leave-unread") {
+    const { path, text, message } = action;
+    return { ...sheet, unread: { ...sheet.unread, [path]: { text, message } } };
+  }
+  const unread = without(sheet.unread, action.clears ?? action.path);
+  const wanted = withEntered(writePath(sheet.wanted, action.path, action.value), action.path, action.entered);
+  const next = { ...sheet, wanted, unread };
+  return action.unit === undefined ? next : withUnit(next, action.path, action.unit);
+}
+
+/** A value's origin tells how it was typed; a new value drops the old words. */
+function withEntered(scenario: Scenario, path: string, entered: string | undefined): Scenario {
+  const origin = scenario.origins[path];
+  if (!origin) return scenario;
+  const renewed = entered === undefined ? without(origin, "entered") : { ...origin, entered };
+  return { ...scenario, origins: { ...scenario.origins, [path]: renewed } };
+}
+
+function withUnit(sheet: Sheet, path: string, unit: string): Sheet {
+  return sheet.units[path] === unit ? sheet : { ...sheet, units: { ...sheet.units, [path]: unit } };
+}
+
+/** A change of structure: what is kept by path goes with its value, or away with it. */
+function changed(
+  sheet: Sheet,
+  apply: (s: Scenario) => Scenario,
+  rename = (path: string): string | null => path,
+): Sheet {
+  return {
+    wanted: apply(sheet.wanted),
+    unread: renamed(sheet.unread, rename),
+    units: renamed(sheet.units, rename),
+  };
+}
+
+function renamed<T>(record: Readonly<Record<string, T>>, rename: (path: string) => string | null): Record<string, T> {
+  return Object.fromEntries(
+    Object.entries(record).flatMap(([path, value]) => {
+      const name = rename(path);
+      return name === null ? [] : [[name, value]];
+    }),
+  );
+}
+
+/** The units values were entered in, where their origins tell: "0.25 in" is shown in inches again. */
+function unitsEntered(scenario: Scenario): Record<string, string> {
+  return Object.fromEntries(
+    Object.entries(scenario.origins).flatMap(([path, { entered }]) => {
+      const unit = entered?.replace(/^[\d\s.,'’+\-−eE·^⁻⁰-⁹¹²³]*/, "");
+      return unit ? [[path, unit]] : [];
+    }),
+  );
+}

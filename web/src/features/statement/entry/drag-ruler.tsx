@@ -1,0 +1,133 @@
+import type { Outcome, Scenario } from "@restband/solver";
+import { useMemo, useState } from "react";
+import { useWidth } from "../../../components/use-width.ts";
+import { useScan } from "../../../compute/use-scan.ts";
+import { runKey } from "../../../compute/run-cache.ts";
+import { formatExactly, formatNumber } from "../../../format/format-number.ts";
+import { outcomeWords } from "../../../format/outcomes.ts";
+import { fromSi } from "../../../format/unit.ts";
+import { useDraftContext } from "../draft/draft-context.ts";
+import { writePath } from "../path.ts";
+import { stretchesOf, ticksOf, type Stretch } from "./ruler-scale.ts";
+import type { NumberEntry } from "./use-number-entry.ts";
+
+interface DragRulerProps {
+  path: string;
+  /** The value when the editor opened: the middle of the scale, in SI, not 0. */
+  before: number;
+  entry: NumberEntry;
+  label: string;
+}
+
+/** Decades to each side of the value that was there. */
+const REACH = 1;
+const POINTS = 33;
+
+/** A logarithmic scale to drag the value along; beneath it what the body would do at each value. */
+export function DragRuler({ path, before, entry, label }: DragRulerProps) {
+  const [ref, width] = useWidth<HTMLDivElement>(440);
+  const outcomes = useOutcomesAlong(path, before);
+  const position = Math.log10((entry.value ?? before) / before);
+  const x = (at: number): number => ((at + REACH) / (2 * REACH)) * width;
+  const inUnit = (si: number): number => fromSi(si, entry.unit);
+  return (
+    <div ref={ref} className="relative mt-4 w-full desk:w-[440px]">
+      <svg width="100%" height={52} className="block overflow-visible" aria-hidden="true">
+        {ticksOf(inUnit(before), REACH).map(({ at, value, isLabelled }) => (
+          <g key={at}>
+            <path d={`M${x(at)} 26v${isLabelled ? -9 : -5}`} className="stroke-edge" />
+            {isLabelled && (
+              <text x={x(at)} y={12} textAnchor="middle" className="figures fill-quiet text-[12.5px]">
+                {formatNumber(value)}
+              </text>
+            )}
+          </g>
+        ))}
+        <path d={`M0 26H${width}`} className="stroke-edge" />
+        <path d={`M${x(0)} 12V40`} className="stroke-ink" strokeDasharray="3 3" />
+        {stretchesOf(outcomes, REACH).map((stretch) => (
+          <Beneath key={stretch.from} stretch={stretch} x={x} />
+        ))}
+      </svg>
+      <input
+        type="range"
+        min={-REACH}
+        max={REACH}
+        step={0.002}
+        value={Number.isFinite(position) ? Math.min(Math.max(position, -REACH), REACH) : 0}
+        aria-label={`Drag ${label}`}
+        aria-valuetext={`${formatExactly(inUnit(entry.value ?? before))} ${entry.unit.label}`}
+        className="drag-ruler absolute inset-x-0 top-[18px] m-0 h-6 w-full"
+        onChange={(event) => entry.set(rounded(before * 10 ** Number(event.currentTarget.value), before), entry.unit)}
+        onKeyDown={(event) => {
+          if (event.key !== "ArrowUp" && event.key !== "ArrowDown") return;
+          event.preventDefault();
+          entry.nudge(event.key === "ArrowUp" ? 1 : -1, event.shiftKey);
+        }}
+      />
+      <Words stretches={stretchesOf(outcomes, REACH)} before={before} entry={entry} />
+    </div>
+  );
+}
+
+/** Three significant digits: finer than a hand drags. The value that was there stays within reach. */
+function rounded(value: number, before: number): number {
+  return Math.abs(value / before - 1) < 2e-3 ? before : Number(value.toPrecision(3));
+}
+
+/** The outcomes at equal steps of the scale, of the scenario as it was opened with this one value changed. */
+function useOutcomesAlong(path: string, before: number): readonly (Outcome | null | undefined)[] {
+  const { draft } = useDraftContext();
+  const [opened] = useState<Scenario>(draft.inForce);
+  const scenarios = useMemo(
+    () =>
+      Array.from({ length: POINTS }, (_, i) => {
+        const at = before * 10 ** (-REACH + (2 * REACH * i) / (POINTS - 1));
+        return writePath(opened, path, at);
+      }),
+    [opened, path, before],
+  );
+  return useScan(scenarios, `${path} ${before} ${runKey({ scenario: opened, options: {} })}`);
+}
+
+const fills: Partial<Record<Outcome, string>> = {
+  "stick-slip": "url(#hatch-stick)",
+  "never-moved": "url(#hatch-never)",
+  "came-to-rest": "url(#hatch-rest)",
+  growing: "url(#hatch-broken)",
+  "not-settled": "url(#hatch-not-settled)",
+  "too-short": "url(#hatch-ground)",
+  "smooth-sliding": "var(--slip)",
+  settles: "var(--slip)",
+};
+
+function Beneath({ stretch, x }: { stretch: Stretch; x: (at: number) => number }) {
+  const [left, right] = [x(stretch.from), x(stretch.to)];
+  const fill = stretch.outcome ? fills[stretch.outcome] : "none";
+  return (
+    <rect
+      x={left}
+      y={28}
+      width={Math.max(0, right - left)}
+      height={10}
+      fill={fill}
+      className="stroke-edge"
+      strokeWidth={0.75}
+    />
+  );
+}
+
+/** The outcomes in words, in the order of the scale, each with where it begins. */
+function Words({ stretches, before, entry }: { stretches: readonly Stretch[]; before: number; entry: NumberEntry }) {
+  const told = stretches.filter(({ outcome }) => outcome);
+  return (
+    <p className="flex min-h-5 flex-wrap justify-between gap-x-4 text-13 text-quiet">
+      {told.slice(0, 6).map(({ from, outcome }) => (
+        <span key={from}>
+          {outcome && outcomeWords[outcome]}
+          {from > -REACH && ` from about ${formatNumber(fromSi(before * 10 ** from, entry.unit), 2)}`}
+        </span>
+      ))}
+    </p>
+  );
+}

@@ -1,0 +1,88 @@
+import { useState } from "react";
+import { joined, readInput } from "../../../format/format-quantity.ts";
+import { parseTyped, type TypedReading } from "../../../format/parse-typed.ts";
+import { parseUnit } from "../../../format/parse-unit.ts";
+import type { Measure, Unit } from "../../../format/unit.ts";
+import { unitFor, unitsOf } from "../../../format/units.ts";
+import { useDraftContext } from "../draft/draft-context.ts";
+import { measureOf, numberAt, type PathField } from "../scenario-fields.ts";
+import { nudged } from "./nudge.ts";
+
+/** A number while it is typed: its text, unit and complaint, and what can be done to it. */
+export interface NumberEntry {
+  readonly text: string;
+  readonly value: number | undefined;
+  readonly unit: Unit;
+  readonly units: readonly Unit[];
+  /** What is to be put right, in words. */
+  readonly fault: string | undefined;
+  /** Where a text can be read in two ways: both, to choose from. */
+  readonly choices: Extract<TypedReading, { kind: "ambiguous" }>["choices"];
+  readonly type: (text: string) => void;
+  readonly set: (value: number, unit?: Unit) => void;
+  readonly showIn: (label: string) => void;
+  /** One arrow key: up or down by 1 %, or 10 %. */
+  readonly nudge: (direction: 1 | -1, isLarge: boolean) => void;
+  /** The field is left: its text is the value again, and the step of undo is closed. */
+  readonly leave: () => void;
+}
+
+/** The entry of the number at a path. `empty` is what an empty text stands for where the number may be left out. */
+export function useNumberEntry(path: string, field: PathField, empty?: unknown): NumberEntry {
+  const { draft, dispatch } = useDraftContext();
+  const { wanted, unread, units } = draft.sheet;
+  const [typing, setTyping] = useState<{ text: string; value: number | undefined } | null>(null);
+  const measure = measureOf(wanted, field);
+  const value = numberAt(wanted, path);
+  const unit = unitTyped(units[path], measure) ?? unitFor(value ?? field.initial, measure);
+  // What is being typed stands as long as the draft holds what it meant: undo takes it back.
+  const isTyping = typing !== null && (typing.value === value || typing.text === unread[path]?.text);
+  const text =
+    (isTyping ? typing.text : unread[path]?.text) ?? (value === undefined ? "" : readInput(value, measure, unit).text);
+  const reading = unread[path] && parseTyped(unread[path].text, measure, unit);
+
+  const set = (next: number, nextUnit = unit): void => {
+    const entered = joined(readInput(next, measure, nextUnit));
+    dispatch({ type: "set", path, value: next, unit: nextUnit.label, entered });
+  };
+  const type = (typed: string): void => {
+    if (typed.trim() === "" && empty !== undefined) {
+      setTyping({ text: typed, value: undefined });
+      return dispatch({ type: "set", path, value: leftOut(empty) });
+    }
+    const read = parseTyped(typed, measure, unit);
+    setTyping({ text: typed, value: read.kind === "value" ? read.value : value });
+    if (read.kind === "value") set(read.value, read.unit);
+    else dispatch({ type: "leave-unread", path, text: typed, message: read.message });
+  };
+  return {
+    text,
+    value,
+    unit,
+    units: unitsOf(measure).some(({ label }) => label === unit.label) ? unitsOf(measure) : [unit, ...unitsOf(measure)],
+    fault: draft.faults.find((fault) => fault.path === path)?.message,
+    choices: reading?.kind === "ambiguous" ? reading.choices : [],
+    type,
+    set: (next, nextUnit) => {
+      setTyping(null);
+      set(next, nextUnit);
+    },
+    showIn: (label) => dispatch({ type: "show-in", path, unit: label }),
+    nudge: (direction, isLarge) => {
+      setTyping(null);
+      set(nudged(value ?? 0, direction * (isLarge ? 0.1 : 0.01), field, unit));
+    },
+    leave: () => {
+      setTyping(null);
+      dispatch({ type: "settle" });
+    },
+  };
+}
+
+/** The unit a value was last typed in; none once it measures something else. */
+export const unitTyped = (label: string | undefined, measure: Measure): Unit | null =>
+  label === undefined ? null : parseUnit(label, measure);
+
+/** Marks a member that is taken away rather than set to a word. */
+export const ABSENT = Symbol("absent");
+const leftOut = (empty: unknown): unknown => (empty === ABSENT ? undefined : empty);

@@ -1,0 +1,147 @@
+import type { StoredScenario } from "@restband/api/contract";
+import { digestOf, type Scenario } from "@restband/solver";
+
+/** How it stands with keeping what was typed. */
+export type Saving =
+  /** All of it is on the server; `at` null where nothing has been changed since the page was opened. */
+  | { kind: "saved"; at: Date | null }
+  | { kind: "saving" }
+  /** No server answers; it is tried again. */
+  | { kind: "unreachable"; since: Date }
+  /** Somebody else saved meanwhile; nothing is sent until it is decided field by field. */
+  | { kind: "conflict"; current: StoredScenario }
+  /** The session has ended; it goes on once somebody is signed in again. */
+  | { kind: "signed-out" }
+  | { kind: "refused"; message: string };
+
+/** What the server said to a save. */
+export type SaveReply =
+  | { kind: "saved"; stored: StoredScenario }
+  | { kind: "conflict"; current: StoredScenario }
+  | { kind: "unreachable" }
+  | { kind: "signed-out" }
+  | { kind: "refused"; message: string };
+
+/** The version a draft was made from, and what it held. */
+export interface Base {
+  readonly version: number;
+  readonly content: Scenario;
+}
+
+interface AutosaveSettings {
+  readonly base: Base;
+  readonly save: (scenario: Scenario, version: number) => Promise<SaveReply>;
+  readonly tell: (saving: Saving) => void;
+  /** All that is wanted is on the server now. */
+  readonly onKept: (base: Base) => void;
+}
+
+/** ms of quiet before a change is sent, and between attempts while no server answers. */
+const QUIET = 800;
+const RETRY = 3000;
+
+/** Keeps a draft on the server: after a moment of quiet, one save at a time, the newest last, each over the version before. */
+export class Autosave {
+  /** What the server is known to have. */
+  base: Base;
+  private readonly settings: AutosaveSettings;
+  private wanted: Scenario;
+  private timer: ReturnType<typeof setTimeout> | undefined;
+  private isSending = false;
+  /** A conflict waits for its decision. */
+  private isHalted = false;
+  private lostSince: Date | null = null;
+  private keptAt: Date | null = null;
+
+  constructor(settings: AutosaveSettings) {
+    this.settings = settings;
+    this.base = settings.base;
+    this.wanted = settings.base.content;
+  }
+
+  /** The newest state to be kept; anything older that was not sent yet is forgotten. */
+  want(scenario: Scenario): void {
+    this.wanted = scenario;
+    if (this.isSending || this.isHalted) return;
+    if (this.isKept()) return this.settle();
+    if (!this.lostSince) this.settings.tell({ kind: "saving" });
+    this.schedule(QUIET);
+  }
+
+  /** Sends what is waiting at once. */
+  flush(): void {
+    if (!this.isKept()) void this.send();
+  }
+
+  /** A conflict is decided: `current` is the base from now on, and `scenario` what is wanted. */
+  decide({ version, content }: StoredScenario, scenario: Scenario): void {
+    this.base = { version, content };
+    this.isHalted = false;
+    this.wanted = scenario;
+    this.next();
+  }
+
+  /** A newer version of the server's is taken over as it is. */
+  adopt({ version, content }: StoredScenario): void {
+    this.base = { version, content };
+    this.wanted = content;
+    this.settle();
+  }
+
+  private isKept(): boolean {
+    return digestOf(this.wanted) === digestOf(this.base.content);
+  }
+
+  private schedule(delay: number): void {
+    clearTimeout(this.timer);
+    this.timer = setTimeout(() => void this.send(), delay);
+  }
+
+  private async send(): Promise<void> {
+    clearTimeout(this.timer);
+    if (this.isSending || this.isHalted) return;
+    this.isSending = true;
+    if (!this.lostSince) this.settings.tell({ kind: "saving" });
+    const sent = this.wanted;
+    const reply = await this.settings.save(sent, this.base.version);
+    this.isSending = false;
+    this.take(reply, sent);
+  }
+
+  private take(reply: SaveReply, sent: Scenario): void {
+    if (reply.kind === "unreachable") return this.lost();
+    this.lostSince = null;
+    if (reply.kind === "saved") return this.kept(reply.stored);
+    // The answer to an earlier try was lost on the way: it was saved after all.
+    if (reply.kind === "conflict" && digestOf(reply.current.content) === digestOf(sent))
+      return this.kept(reply.current);
+    this.isHalted = reply.kind === "conflict";
+    this.settings.tell(reply);
+    if (reply.kind === "refused" && this.wanted !== sent) this.schedule(0);
+  }
+
+  private kept({ version, content }: StoredScenario): void {
+    this.base = { version, content };
+    this.keptAt = new Date();
+    this.next();
+  }
+
+  private lost(): void {
+    this.lostSince ??= new Date();
+    this.settings.tell({ kind: "unreachable", since: this.lostSince });
+    this.schedule(RETRY);
+  }
+
+  private next(): void {
+    if (this.isKept()) this.settle();
+    else this.schedule(0);
+  }
+
+  /** Nothing is left to be sent. */
+  private settle(): void {
+    clearTimeout(this.timer);
+    this.lostSince = null;
+    this.settings.tell({ kind: "saved", at: this.keptAt });
+    this.settings.onKept(this.base);
+  }
+}

@@ -1,0 +1,117 @@
+import type { StoredScenario } from "@restband/api/contract";
+import type { Scenario } from "@restband/solver";
+import { useEffect, useReducer, useRef, useState } from "react";
+import { ApiFailure } from "../../../api/api-failure.ts";
+import { useSaveScenario } from "../../../api/scenarios.ts";
+import { useHasSessionEnded } from "../../../api/session-end.ts";
+import { draftReducer, openDraft, resumeDraft } from "../draft/draft-reducer.ts";
+import type { Dispatch, Draft } from "../draft/draft.ts";
+import { Autosave, type Base, type SaveReply, type Saving } from "./autosave.ts";
+import { isSameScenario } from "./differences.ts";
+import { dropLocal, keepLocally, readLocal, type LocalDraft } from "./local-draft.ts";
+
+interface UseDraftSettings {
+  stored: StoredScenario;
+  /** Whose draft it is: another person on the same browser has their own. */
+  accountId: string;
+  /** False for those who may only read: everything can be tried, nothing is sent or kept. */
+  canEdit: boolean;
+}
+
+export interface OpenDraft {
+  readonly draft: Draft;
+  readonly dispatch: Dispatch;
+  readonly saving: Saving;
+  /** The version the draft is a change of. */
+  readonly base: Base;
+  /** Decides a conflict: the scenario to go on with, over the version now stored. */
+  readonly decide: (current: StoredScenario, scenario: Scenario) => void;
+}
+
+/**
+ * The open scenario: what is typed, undone and kept. It begins from what was left in this browser, else from the server's
+ * copy, and takes a newer version of the server's over only while nothing of its own is waiting.
+ */
+export function useDraft({ stored, accountId, canEdit }: UseDraftSettings): OpenDraft {
+  const [left] = useState(() => (canEdit ? leftBehind(accountId, stored) : null));
+  const [draft, dispatch] = useReducer(draftReducer, stored.content, (content) =>
+    left ? resumeDraft(left.inForce, left.sheet) : openDraft(content),
+  );
+  const [saving, setSaving] = useState<Saving>({ kind: "saved", at: null });
+  const [base, setBase] = useState<Base>(() => left?.base ?? { version: stored.version, content: stored.content });
+  const autosave = useAutosave(stored, base, setSaving, setBase);
+  const hasEnded = useHasSessionEnded();
+  const hasFaults = draft.faults.length > 0;
+
+  useEffect(() => {
+    if (!canEdit) return;
+    if (hasFaults || !isSameScenario(draft.inForce, autosave.base.content))
+      keepLocally(accountId, stored.id, draft, autosave.base);
+    else dropLocal(accountId, stored.id);
+  }, [canEdit, accountId, stored.id, draft, base, hasFaults, autosave]);
+
+  useEffect(() => {
+    if (canEdit && !hasEnded) autosave.want(draft.inForce);
+  }, [canEdit, hasEnded, draft.inForce, autosave]);
+
+  // A newer version of the server's, read again in the background: shown at once where nothing of one's own is waiting.
+  const seen = useRef(stored.version);
+  useEffect(() => {
+    if (stored.version <= seen.current || stored.version <= autosave.base.version) return;
+    seen.current = stored.version;
+    if (hasFaults || !isSameScenario(draft.inForce, autosave.base.content)) return;
+    autosave.adopt(stored);
+    dispatch({ type: "replace", scenario: stored.content });
+  }, [stored, draft.inForce, hasFaults, autosave]);
+
+  const decide = (current: StoredScenario, scenario: Scenario): void => {
+    autosave.decide(current, scenario);
+    dispatch({ type: "replace", scenario });
+  };
+  return { draft, dispatch, saving, base, decide };
+}
+
+/** What this browser kept, unless the server has it by now. */
+function leftBehind(accountId: string, stored: StoredScenario): LocalDraft | null {
+  const left = readLocal(accountId, stored.id);
+  if (!left) return null;
+  const isAllThere = isSameScenario(left.inForce, stored.content) && left.sheet.wanted === left.inForce;
+  if (!isAllThere || Object.keys(left.sheet.unread).length > 0) return left;
+  dropLocal(accountId, stored.id);
+  return null;
+}
+
+function useAutosave(
+  { projectId, id }: StoredScenario,
+  base: Base,
+  tell: (saving: Saving) => void,
+  onKept: (base: Base) => void,
+): Autosave {
+  const mutation = useSaveScenario(projectId, id);
+  const save = useRef<(scenario: Scenario, version: number) => Promise<SaveReply>>(null);
+  useEffect(() => {
+    save.current = (scenario, version) =>
+      mutation.mutateAsync({ scenario, version }).then((stored) => ({ kind: "saved", stored }), replyOf);
+  });
+  const [autosave] = useState(
+    () =>
+      new Autosave({
+        base,
+        tell,
+        onKept,
+        save: (scenario, version) => save.current?.(scenario, version) ?? Promise.resolve({ kind: "unreachable" }),
+      }),
+  );
+  useEffect(() => () => autosave.flush(), [autosave]);
+  return autosave;
+}
+
+/** A failed call as what it means for saving. */
+function replyOf(error: unknown): SaveReply {
+  if (!(error instanceof ApiFailure))
+    return { kind: "refused", message: "The page failed to send it. Load the page again; the draft is kept." };
+  if (error.isUnreachable) return { kind: "unreachable" };
+  if (error.isSignedOut) return { kind: "signed-out" };
+  if (error.status === 409 && error.current) return { kind: "conflict", current: error.current };
+  return { kind: "refused", message: error.message };
+}

@@ -1,0 +1,148 @@
+import type { Fault } from "@restband/solver";
+import { useEffect, useId, useRef, useState } from "react";
+import { Button } from "../../components/button.tsx";
+import { FieldError } from "../../components/field.tsx";
+import { sayMany } from "../../format/words.ts";
+import { useDraftContext } from "./draft/draft-context.ts";
+import { ValueEditor } from "./entry/value-editor.tsx";
+import { GroupForm } from "./form/group-form.tsx";
+import { faultsIn, type Group } from "./groups.ts";
+import { Keeps } from "./keeps.tsx";
+import { fieldAt } from "./scenario-fields.ts";
+import { SentenceLine } from "./sentence-line.tsx";
+
+interface StatementGroupProps {
+  group: Group;
+  /** What this version cannot do with it. */
+  remarks: readonly Fault[];
+}
+
+/** One group: its sentence, or its whole form in the sentence's place. */
+export function StatementGroup({ group, remarks }: StatementGroupProps) {
+  const { draft } = useDraftContext();
+  const [isForm, setForm] = useState(false);
+  const formId = useId();
+  const faults = faultsIn(draft.faults, group);
+  const toggle = useRef<HTMLButtonElement>(null);
+  const close = (): void => {
+    setForm(false);
+    toggle.current?.focus();
+  };
+  return (
+    <div
+      role="group"
+      aria-label={group.name}
+      className="grid grid-cols-[minmax(0,1fr)_auto] gap-x-4 border-line py-3 not-first:border-t desk:grid-cols-[116px_minmax(0,1fr)_auto]"
+    >
+      <h3 className="pt-1 text-15 text-quiet">{group.name}</h3>
+      <div className="min-w-0 max-desk:order-last max-desk:col-span-2">
+        {isForm ? (
+          <div id={formId}>
+            <GroupForm group={group} />
+            <div className="mt-5 flex flex-wrap items-center gap-4">
+              <Button onClick={close}>Back to the sentence</Button>
+              {faults.length > 0 && <ToPutRight count={faults.length} />}
+            </div>
+          </div>
+        ) : (
+          <SentenceWithEditor group={group} faults={faults} onAllFields={() => setForm(true)} />
+        )}
+        {remarks.map((remark) => (
+          <p key={remark.path} className="mt-2 max-w-(--measure) text-15 text-quiet">
+            {sentenceOf(remark)}
+          </p>
+        ))}
+      </div>
+      <button
+        ref={toggle}
+        type="button"
+        className="link hit self-start text-13"
+        aria-expanded={isForm}
+        aria-controls={isForm ? formId : undefined}
+        onClick={() => setForm(!isForm)}
+      >
+        {isForm ? "the sentence" : "all fields"}
+        <span className="sr-only"> of {group.name}</span>
+      </button>
+    </div>
+  );
+}
+
+export function ToPutRight({ count }: { count: number }) {
+  return (
+    <p className="text-13 font-semibold text-broken">{sayMany(count, "field").replace(/^one/, "1")} to put right</p>
+  );
+}
+
+const sentenceOf = ({ path, message }: Fault): string =>
+  message === "not computed by this version"
+    ? `Part of this is valid but not computed by this version (${path}). It stays as it is.`
+    : message;
+
+interface SentenceProps {
+  group: Group;
+  faults: readonly Fault[];
+  onAllFields: () => void;
+}
+
+function SentenceWithEditor({ group, faults, onAllFields }: SentenceProps) {
+  const { draft } = useDraftContext();
+  const [open, setOpen] = useState<{ path: string; nib: number } | null>(null);
+  const place = useRef<HTMLDivElement>(null);
+  const wanted = draft.sheet.wanted;
+  const pieces = group.sentence(wanted);
+  const field = open && fieldAt(wanted, open.path);
+
+  const nibOf = (path: string): number => {
+    const button = place.current?.querySelector(`[data-path="${CSS.escape(path)}"]`);
+    if (!button || !place.current) return 0;
+    const box = button.getBoundingClientRect();
+    return box.left + box.width / 2 - place.current.getBoundingClientRect().left;
+  };
+  const openAt = (path: string): void => setOpen(open?.path === path ? null : { path, nib: nibOf(path) });
+  const close = (): void => {
+    const button = open && place.current?.querySelector<HTMLElement>(`[data-path="${CSS.escape(open.path)}"]`);
+    setOpen(null);
+    button?.focus();
+  };
+  useOpenNewValue(
+    pieces.flatMap((piece) => (piece.kind === "value" ? piece.path : [])),
+    openAt,
+  );
+  return (
+    <div ref={place}>
+      <SentenceLine pieces={pieces} openPath={open?.path ?? null} onOpen={openAt} onAllFields={onAllFields} />
+      {open && field && <ValueEditor key={open.path} path={open.path} field={field} nib={open.nib} onClose={close} />}
+      {faults.map(
+        (fault) =>
+          fault.path !== open?.path && <SentenceFault key={fault.path + fault.message} fault={fault} onOpen={openAt} />,
+      )}
+    </div>
+  );
+}
+
+/** A limit or term that has just been added is waiting for its numbers: its first value opens by itself. */
+function useOpenNewValue(paths: readonly string[], openAt: (path: string) => void): void {
+  const known = useRef(paths);
+  useEffect(() => {
+    const added = paths.filter((path) => !known.current.includes(path));
+    const isOnlyMore = known.current.every((path) => paths.includes(path));
+    known.current = paths;
+    if (isOnlyMore && added.length > 0 && added.some((path) => path.includes("["))) openAt(added[0]);
+  });
+}
+
+function SentenceFault({ fault, onOpen }: { fault: Fault; onOpen: (path: string) => void }) {
+  const { draft } = useDraftContext();
+  const field = fieldAt(draft.sheet.wanted, fault.path);
+  return (
+    <FieldError>
+      {fault.message} <Keeps path={fault.path} />{" "}
+      {field && (
+        <button type="button" className="link" onClick={() => onOpen(fault.path)}>
+          put it right
+        </button>
+      )}
+    </FieldError>
+  );
+}

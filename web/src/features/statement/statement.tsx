@@ -1,0 +1,26 @@
+import type { Fault, Refusal } from "@restband/solver";
+import type { Dispatch, Draft } from "./draft/draft.ts";
+import { DraftContext } from "./draft/draft-context.ts";
+import { groupOf, groups } from "./groups.ts";
+import { StatementGroup } from "./statement-group.tsx";
+import { useMemo } from "react";
+
+interface StatementProps {
+  draft: Draft;
+  dispatch: Dispatch;
+  /** A valid scenario that this version does not compute: said at the group it concerns. */
+  refusal: Refusal["error"] | null;
+}
+
+/** What is asked, in five sentences whose values are edited in place. */
+export function Statement({ draft, dispatch, refusal }: StatementProps) {
+  const context = useMemo(() => ({ draft, dispatch }), [draft, dispatch]);
+  const remarks: readonly Fault[] = refusal?.faults.length ? refusal.faults : refusal ? [refusal] : [];
+  return (
+    <DraftContext.Provider value={context}>
+      {groups.map((group) => (
+        <StatementGroup key={group.key} group={group} remarks={remarks.filter(({ path }) => groupOf(path) === group)} />
+      ))}
+    </DraftContext.Provider>
+  );
+}

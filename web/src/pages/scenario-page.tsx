@@ -1,0 +1,126 @@
+import type { Project, StoredScenario } from "@restband/api/contract";
+import { useSuspenseQueries } from "@tanstack/react-query";
+import { useMemo, useState } from "react";
+import { useParams } from "react-router-dom";
+import { projectQuery } from "../api/projects.ts";
+import { scenarioQuery } from "../api/scenarios.ts";
+import { useAccount } from "../api/session.ts";
+import { Section, WorkedPage } from "../components/section.tsx";
+import { samplesFor } from "../compute/samples-for.ts";
+import { useRun, type Computed } from "../compute/use-run.ts";
+import { WorkHeader } from "../features/account/work-header.tsx";
+import { Answer } from "../features/answer/answer.tsx";
+import { Cautions } from "../features/cautions/cautions.tsx";
+import { Checks } from "../features/checks/checks.tsx";
+import { EventTable } from "../features/evidence/event-table.tsx";
+import { Evidence } from "../features/evidence/evidence.tsx";
+import { firstCursor, runViewOf } from "../features/evidence/run-view.ts";
+import { ConflictDialog } from "../features/statement/saving/conflict-dialog.tsx";
+import { savedWords } from "../features/statement/saving/saved-words.ts";
+import { useDraft } from "../features/statement/saving/use-draft.ts";
+import { isSameScenario } from "../features/statement/saving/differences.ts";
+import { Statement } from "../features/statement/statement.tsx";
+import { UndoButtons } from "../features/statement/undo-buttons.tsx";
+import { mayEdit } from "../features/project-home/roles.ts";
+import { paths } from "../paths.ts";
+
+/** One scenario as a worked page: answer, statement, evidence, checks, cautions. */
+export function ScenarioPage() {
+  const { projectId = "", scenarioId = "" } = useParams();
+  const [{ data: project }, { data: stored }] = useSuspenseQueries({
+    queries: [projectQuery(projectId), scenarioQuery(projectId, scenarioId)],
+  });
+  return <OpenScenario key={scenarioId} project={project} stored={stored} />;
+}
+
+function OpenScenario({ project, stored }: { project: Project; stored: StoredScenario }) {
+  const { id: accountId } = useAccount();
+  const canEdit = mayEdit(project.role);
+  const { draft, dispatch, saving, base, decide } = useDraft({ stored, accountId, canEdit });
+  const { inForce, faults } = draft;
+  const samples = samplesFor(inForce);
+  const run = useRun(
+    inForce,
+    useMemo(() => ({ samples }), [samples]),
+  );
+  const before = useBeforeEdit(run.computed, draft.merging !== null);
+  const isTrying = !canEdit && !isSameScenario(inForce, stored.content);
+  const title = inForce.title || "Untitled";
+  return (
+    <>
+      <title>{`${title} · Restband`}</title>
+      <WorkHeader
+        trail={[{ label: project.name, to: paths.project(project.id) }]}
+        title={title}
+        state={savedWords({ saving, canEdit, role: project.role, isTrying, faults: faults.length })}
+        actions={<UndoButtons draft={draft} dispatch={dispatch} />}
+      />
+      <WorkedPage className="max-desk:pb-40">
+        <Section name="Answer" help="Computed here, anew with every change.">
+          <Answer run={run} before={before} />
+        </Section>
+        <Section name="Statement" help="Tab moves from value to value, Enter opens one, Esc puts it back.">
+          <Statement
+            draft={draft}
+            dispatch={dispatch}
+            refusal={run.computed && "refusal" in run.computed ? run.computed.refusal : null}
+          />
+        </Section>
+        <RunSections computed={run.computed} isStale={run.isStale} />
+      </WorkedPage>
+      {saving.kind === "conflict" && (
+        <ConflictDialog
+          base={base.content}
+          mine={inForce}
+          current={saving.current}
+          onDecide={(scenario) => decide(saving.current, scenario)}
+        />
+      )}
+    </>
+  );
+}
+
+/** The run from before a value is typed or dragged, to be seen beside the new one; null while nothing is edited. */
+function useBeforeEdit(computed: Computed | null, isEditing: boolean): Computed | null {
+  const [settled, setSettled] = useState(computed);
+  if (!isEditing && settled !== computed) setSettled(computed);
+  return isEditing && settled !== computed ? settled : null;
+}
+
+/** Everything that shows the run itself, under one time cursor. */
+function RunSections({ computed, isStale }: { computed: Computed | null; isStale: boolean }) {
+  const result = computed && "result" in computed ? computed.result : null;
+  const view = useMemo(() => (computed && result ? runViewOf(computed.scenario, result) : null), [computed, result]);
+  const [cursor, setCursor] = useState<number | null>(null);
+  if (!computed || !result || !view) return computed && <CautionSection computed={computed} />;
+  const t = Math.min(cursor ?? firstCursor(view), view.end);
+  return (
+    <>
+      <Section
+        id="evidence"
+        name="Evidence"
+        help={
+          <>
+            One cursor for everything. <span className="whitespace-nowrap">← →</span> next event.
+          </>
+        }
+      >
+        <Evidence view={view} t={t} onMove={setCursor} isStale={isStale} />
+      </Section>
+      <Section id="checks" name="Checks" help="The run checks itself each time it is computed.">
+        <Checks scenario={computed.scenario} result={result} />
+        <h3 className="mt-8 mb-2 text-15 font-semibold">Events</h3>
+        <EventTable view={view} t={t} onMove={setCursor} />
+      </Section>
+      <CautionSection computed={computed} />
+    </>
+  );
+}
+
+function CautionSection({ computed }: { computed: Computed }) {
+  return (
+    <Section name="Cautions" help="Always shown where they apply.">
+      <Cautions scenario={computed.scenario} result={"result" in computed ? computed.result : null} />
+    </Section>
+  );
+}
