@@ -2,6 +2,7 @@ import { describe, expect, test } from "vitest";
 import { compileProblem } from "../../../solver/src/scenario/compile-problem.ts";
 import { checkScenario } from "../../../solver/src/scenario/check-scenario.ts";
 import { Inputs } from "../../../solver/src/motion/inputs.ts";
+import { newStance } from "../../../solver/src/motion/exact/stance.ts";
 import { Oscillation } from "../../../solver/src/motion/exact/oscillation.ts";
 
 // m, k, c, F, ω, φ, x0, v0, t, then x and ẋ: the matrix exponential of the forced oscillator at 40 digits (mpmath 1.3.0).
@@ -41,13 +42,14 @@ function oscillationOf(
   if (scenario === null) throw new Error("the test's scenario is refused");
   const inputs = new Inputs(compileProblem(scenario));
   inputs.locate(0);
-  return [inputs, new Oscillation(2)];
+  return [inputs, new Oscillation(2, "ground", 0)];
 }
 
 describe("the closed form of a slip", () => {
   test.each(rows)("m %d k %d c %d F %d ω %d φ %d x0 %d v0 %d t %d", (m, k, c, force, omega, phase, x0, v0, t, x, v) => {
     const [inputs, oscillation] = oscillationOf(m, k, c, force, omega, phase);
-    oscillation.begin(inputs, m, k, c, 0, x0, v0, NaN);
+    const stance = { ...newStance(), contact: 1 as const, position: x0, velocity: v0, slip: v0 };
+    oscillation.begin(inputs, { inertia: m, stiffness: k, viscous: c }, 0, stance);
     oscillation.evaluate(t);
     // Rounding ω through Hz and φ through degrees moves the input itself by about 1e-16 relative, hence ω t in the bound.
     const turns = 1 + omega * t + Math.sqrt(k / m) * t;

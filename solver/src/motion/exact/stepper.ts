@@ -266,7 +266,7 @@ export class Stepper {
     const { form, problem } = this;
     const tau = end - s.t;
     const wasSlip = form.form === "slip";
-    const isZero = wasSlip && this.cause === "contact";
+    const isZero = form.form !== "stick" && this.cause === "contact";
     const startSpeed = Math.abs(form.inputs.evaluate(0).baseVelocity);
     if (wasSlip) form.oscillation.evaluateSlip(tau);
     else form.carried.evaluate(tau);
