@@ -19,7 +19,7 @@ export function checkScenario(input: unknown): Checked {
   const parsed = scenarioSchema.safeParse(input);
   const shape = parsed.success ? [] : parsed.error.issues.flatMap(faultsOf);
   const rules = ruleFaults(parsed.success ? parsed.data : draftSchema.parse(input));
-  const faults = [...shape, ...rules.filter((fault) => !isCovered(fault, shape))];
+  const faults = [...shape, ...uncovered(rules, shape)];
   if (parsed.success && faults.length === 0) return { scenario: parsed.data, faults: [] };
   return { scenario: null, faults: shortened(faults) };
 }
@@ -33,14 +33,15 @@ function faultsOf(issue: z.core.$ZodIssue): Fault[] {
 }
 
 /**
- * True where a member's own fault says all: the rule speaks of the same member, or of the origin of a number whose kind
- * cannot be told.
+ * The faults of rules that say more than the members' own: not those of a member that is faulty itself, nor of the origin of
+ * a number whose kind cannot be told.
  */
-function isCovered(fault: Fault, shape: readonly Fault[]): boolean {
-  return shape.some(({ path }) => {
-    const owner = path.replace(/(?:model|kind)$/, "");
-    return path === fault.path || (owner !== path && fault.path.startsWith(`origins.${owner}`));
-  });
+function uncovered(rules: readonly Fault[], shape: readonly Fault[]): Fault[] {
+  const paths = new Set(shape.map((fault) => fault.path));
+  const untold = shape.flatMap(({ path }) =>
+    /\.(?:model|kind)$/.test(path) ? [`origins.${path.replace(/\w+$/, "")}`] : [],
+  );
+  return rules.filter(({ path }) => !paths.has(path) && !untold.some((owner) => path.startsWith(owner)));
 }
 
 function shortened(faults: Fault[]): Fault[] {

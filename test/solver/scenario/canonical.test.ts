@@ -43,7 +43,9 @@ describe("canonical JSON", () => {
 
   it("refuses numbers that JSON cannot hold, naming their place", () => {
     expect(() => jsonText({ a: [1, NaN] })).toThrow(/a\[1\] is not finite/);
-    expect(() => jsonText({ samples: { t: new Float64Array([0, Infinity]) } })).toThrow(/samples\.t\[1\] is not finite/);
+    expect(() => jsonText({ samples: { t: new Float64Array([0, Infinity]) } })).toThrow(
+      /samples\.t\[1\] is not finite/,
+    );
   });
 
   it("sorts keys by UTF-16 units, as the example of RFC 8785 does", () => {

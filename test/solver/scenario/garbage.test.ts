@@ -62,7 +62,7 @@ const anything = fc.anything({
   withNullPrototype: true,
 });
 
-describe("checkScenario never throws", () => {
+describe("checkScenario never throws", { timeout: 60_000 }, () => {
   it("on any JSON", () => {
     fc.assert(fc.property(fc.jsonValue(), expectAnswer), { numRuns: 500 });
   });
@@ -102,15 +102,15 @@ describe("checkScenario never throws", () => {
 
   it("on what is huge, and names no more faults than a person can use", () => {
     const huge = [
-      { force: Array(300_000).fill(7) },
-      { force: [{ kind: "record", times: Array(300_000).fill("x"), values: Array(300_000).fill(1) }] },
+      { force: Array(100_000).fill(7) },
+      { force: [{ kind: "record", times: Array(200_000).fill("x"), values: Array(200_000).fill(1) }] },
       {
         force: [
           { kind: "record", times: Array.from({ length: 200_000 }, (_, i) => -i), values: Array(200_000).fill(1) },
         ],
       },
-      { origins: Object.fromEntries(Array.from({ length: 200_000 }, (_, i) => [`x${i}`, i])) },
-      Object.fromEntries(Array.from({ length: 200_000 }, (_, i) => [`x${i}`, i])),
+      { origins: Object.fromEntries(Array.from({ length: 100_000 }, (_, i) => [`x${i}`, i])) },
+      Object.fromEntries(Array.from({ length: 100_000 }, (_, i) => [`x${i}`, i])),
     ];
     for (const part of huge) {
       const { faults } = checkScenario({ ...rich, ...part });
