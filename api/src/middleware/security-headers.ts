@@ -22,6 +22,7 @@ const policy = {
 export const securityHeaders: RequestHandler[] = [
   helmet({
     contentSecurityPolicy: { useDefaults: false, directives: policy },
+    strictTransportSecurity: { includeSubDomains: false },
     xFrameOptions: { action: "deny" },
     referrerPolicy: { policy: "no-referrer" },
   }),
