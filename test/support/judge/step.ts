@@ -36,7 +36,11 @@ function slip(state: JudgedState, body: JudgedBody, stretch: Stretch, end: numbe
   if (state.phase * (free - faceRate) > 0) return slipOn(state, end, free, state.phase, null);
   const side = slipSide(body, stretch, end, state.x + (h / 2) * (state.v + faceRate));
   if (side === 0) return slipOn(state, end, faceRate, 0, "stop");
-  const reversed = endVelocity(state, body, stretch, h, -side * sliding);
+  // A turn: the force is −sgn v_r μk N r on either side of it, weighed by the shares of the step.
+  const before = state.v - stretch.face.rate(state.t);
+  const share = before / (before - (free - faceRate));
+  const mean = -sliding * (state.phase * share + side * (1 - share));
+  const reversed = endVelocity(state, body, stretch, h, mean);
   const isPast = side * (reversed - faceRate) > 0;
   return slipOn(state, end, isPast ? reversed : faceRate, side, side === state.phase ? null : "turn");
 }

