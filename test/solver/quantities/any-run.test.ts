@@ -35,7 +35,8 @@ function reversed(term: Term): Term {
   if ("values" in term) return { ...term, values: term.values.map((value) => -value) };
   const directed = ["value", "rate", "amplitude", "mass", "peak", "distance", "increment"];
   const turn = ([key, value]: [string, unknown]) => [key, directed.includes(key) ? -(value as number) : value];
-  return Object.fromEntries(Object.entries(term).map((entry) => turn(entry))) as unknown as Term;
+  const turned: unknown = Object.fromEntries(Object.entries(term).map((entry) => turn(entry)));
+  return turned as Term;
 }
 
 describe.each(drawn)("run $seed, $drive", ({ scenario }) => {
