@@ -3,6 +3,7 @@ import { afterEach, describe, expect, it, vi } from "vitest";
 import { fakeServer, ines, members, ok, project, refuse, session, type Answers } from "../support/fake-server.ts";
 import { openPage } from "../support/open-page.tsx";
 
+vi.setConfig({ testTimeout: 20_000 });
 afterEach(() => vi.unstubAllGlobals());
 
 const nobody: Answers = { "GET /session": ok(session(null)) };

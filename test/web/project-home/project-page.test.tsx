@@ -15,6 +15,7 @@ import {
 } from "../support/fake-server.ts";
 import { openPage } from "../support/open-page.tsx";
 
+vi.setConfig({ testTimeout: 20_000 });
 afterEach(() => vi.unstubAllGlobals());
 
 const at = `/projects/${project.id}`;
