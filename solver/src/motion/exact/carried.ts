@@ -101,10 +101,23 @@ export class Carried {
       drift += this.stiffness * Math.abs(this.beltVelocity - inputs.base[1]);
       isCurved ||= inputs.base[2] !== 0 || inputs.base[3] !== 0;
     }
-    // need(0) already holds one swing of the harmonics; from there they go at most twice their amplitude
-    const left = this.grip * inputs.normal + this.constant - Math.abs(this.need) - 2 * swing;
+    const constant = this.need - this.swingAtStart();
+    const left = this.grip * inputs.normal + this.constant - Math.abs(constant) - swing;
     if (isCurved || left < 0) return 0;
     return drift > 0 ? left / drift : Infinity;
+  }
+
+  /** What the harmonics have in need(0). */
+  private swingAtStart(): number {
+    const { inputs } = this;
+    let sum = this.slide * inputs.rippleRe;
+    for (let i = 0; i < inputs.count; i++) {
+      const w = inputs.omega[i];
+      sum -= inputs.forceRe[i];
+      if (this.carrier === "base") sum -= this.inertia * w * w * inputs.baseRe[i];
+      else sum -= this.stiffness * inputs.baseRe[i] - this.viscous * w * inputs.baseIm[i];
+    }
+    return sum;
   }
 
   /** A bound of |need‴| and of |room‴| together, good to the inputs' next corner. */

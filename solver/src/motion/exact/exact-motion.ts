@@ -63,6 +63,8 @@ export class ExactMotion implements Motion {
     else if (form.form === "stick") this.readStick(state);
     else this.readLock(state);
     state.x = state.d + state.base;
+    const isOnGround = form.form === "stick" && form.contactCarrier !== "base";
+    if (isOnGround) state.x = stance.place + problem.beltVelocity * tau;
   }
 
   panel(i: number, t: number): number {

@@ -3,6 +3,8 @@ import type { Phase } from "../../result.ts";
 /** Where a body stands at the start of a segment, and by which closed form it goes on from there. */
 export interface Stance {
   t: number;
+  /** x; carried on unchanged while stuck to ground, so that a body at rest stays where it is to the last digit. */
+  place: number;
   /** d. */
   position: number;
   /** ḋ. */
@@ -20,13 +22,14 @@ export interface Stance {
 
 /** A stance at t = 0 with everything still to be judged. */
 export function newStance(): Stance {
-  return { t: 0, position: 0, velocity: 0, slip: 0, acceleration: NaN, contact: 0, spring: 1, side: 1 };
+  return { t: 0, place: 0, position: 0, velocity: 0, slip: 0, acceleration: NaN, contact: 0, spring: 1, side: 1 };
 }
 
 /** The segments of a run in flat arrays that grow by doubling. */
 export class Segments {
   count = 0;
   private t = new Float64Array(64);
+  private place = new Float64Array(64);
   private position = new Float64Array(64);
   private velocity = new Float64Array(64);
   private slip = new Float64Array(64);
@@ -39,6 +42,7 @@ export class Segments {
     if (this.count === this.t.length) this.grow();
     const i = this.count++;
     this.t[i] = s.t;
+    this.place[i] = s.place;
     this.position[i] = s.position;
     this.velocity[i] = s.velocity;
     this.slip[i] = s.slip;
@@ -50,6 +54,7 @@ export class Segments {
 
   load(i: number, into: Stance): void {
     into.t = this.t[i];
+    into.place = this.place[i];
     into.position = this.position[i];
     into.velocity = this.velocity[i];
     into.slip = this.slip[i];
@@ -82,6 +87,7 @@ export class Segments {
   private grow(): void {
     const size = 2 * this.t.length;
     this.t = grown(this.t, new Float64Array(size));
+    this.place = grown(this.place, new Float64Array(size));
     this.position = grown(this.position, new Float64Array(size));
     this.velocity = grown(this.velocity, new Float64Array(size));
     this.slip = grown(this.slip, new Float64Array(size));

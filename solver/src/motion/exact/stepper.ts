@@ -63,6 +63,7 @@ export class Stepper {
     s.t = 0;
     inputs.locate(0);
     const v = inputs.evaluate(0);
+    s.place = initial.displacement;
     s.position = initial.displacement - (isRelative ? 0 : v.base);
     s.velocity = initial.velocity - (isRelative ? 0 : v.baseVelocity);
     s.acceleration = NaN;
@@ -182,7 +183,15 @@ export class Stepper {
     s.t += at;
     s.acceleration = NaN;
     form.inputs.locate(s.t);
-    form.inputs.evaluate(0);
+    const { base } = form.inputs.evaluate(0);
+    this.place(s, at, base);
+  }
+
+  /** Keeps x: y + d, or where it was stuck (moved on by the belt). */
+  private place(s: Stance, tau: number, base: number): void {
+    const isStuckToBase = this.form.contactCarrier === "base";
+    if (this.form.form === "stick" && !isStuckToBase) s.place += this.problem.beltVelocity * tau;
+    else s.place = s.position + (this.problem.isRelative ? 0 : base);
   }
 
   /** The stick was found to end where need passes room (1 + tolerance); its time is where need equals room, a hair earlier. */
@@ -277,6 +286,7 @@ export class Stepper {
     s.acceleration = NaN;
     const before = form.inputs.evaluate(tau).baseVelocity;
     s.t = end;
+    this.place(s, tau, form.inputs.values.base);
     if (!isCorner) return null;
     form.inputs.locate(end);
     const after = form.inputs.evaluate(0).baseVelocity;
