@@ -1,4 +1,3 @@
-
 import type { Fault, Records } from "./scenario/scenario.ts";
 
 /** What a caller asks of `simulate`. Only what is asked is computed. */

@@ -30,12 +30,7 @@ export interface MotionEvent {
 }
 
 export interface Note {
-  code:
-    | "contact-lost"
-    | "steady-state-depends-on-start"
-    | "next-break-away"
-    | "solid-steady-only"
-    | "one-sided-limit";
+  code: "contact-lost" | "steady-state-depends-on-start" | "next-break-away" | "solid-steady-only" | "one-sided-limit";
   message: string;
   t?: number;
 }

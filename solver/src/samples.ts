@@ -48,8 +48,6 @@ function fill(motion: Motion, segment: number, t: number, samples: Samples, i: n
   samples.phase[i] = state.phase;
 }
 
-
-
 function emptySamples(length: number): Samples {
   const column = (): Float64Array => new Float64Array(length);
   return { t: column(), x: column(), v: column(), a: column(), f: column(), phase: column() };

@@ -23,6 +23,8 @@ export interface Motion {
   read(i: number, t: number, state: State): void;
   /** A stretch from t on over which the segment turns by no more than about one radian of its fastest living rate, s. */
   panel(i: number, t: number): number;
+  /** The period with which all of segment i repeats itself exactly from t on, s; 0 where it does not. */
+  period(i: number, t: number): number;
   /** Events in order, `start` first, `end` last. */
   readonly events: readonly MotionMark[];
   /**

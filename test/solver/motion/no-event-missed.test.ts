@@ -6,7 +6,7 @@ import type { Motion } from "../../../solver/src/motion/motion.ts";
 import { emptyState, type State } from "../../../solver/src/motion/state.ts";
 import { hardScenario } from "../../support/hard-scenario.ts";
 
-const runs = Number(process.env.RESTBAND_PROPERTY_RUNS ?? 1000);
+const runs = Number(process.env.RESTBAND_PROPERTY_RUNS ?? 400);
 const looks = 40;
 
 interface Scale {
@@ -67,7 +67,9 @@ function jumpAt(motion: Motion, next: number, state: State, scale: Scale): strin
   const { x, v } = state;
   motion.read(next, motion.from(next), state);
   if (Math.abs(state.v - v) > 1e-9 * scale.slip) return `ẋ jumps from ${v} to ${state.v} into segment ${next}`;
-  const isFar = Math.abs(state.x - x) > 1e-11 * scale.length;
+  // a corner's own time is rounded: what moves then may be off by its speed times that
+  const clock = 1e-15 * motion.end * scale.slip;
+  const isFar = Math.abs(state.x - x) > 1e-11 * scale.length + clock;
   return isFar ? `x jumps from ${x} to ${state.x} into segment ${next}` : null;
 }
 
@@ -78,4 +80,4 @@ test("no event is missed and nothing jumps, wherever one looks", () => {
     }),
     { numRuns: runs, seed: Number(process.env.RESTBAND_SEED ?? 20261201), endOnFailure: true },
   );
-});
+}, 300_000);

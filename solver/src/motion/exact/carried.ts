@@ -33,7 +33,8 @@ export class Carried {
   private viscous = 0;
   private slide = 0;
   private grip = 0;
-  private constant = 0;
+  /** The part of room that the contact does not give: ρ k |d|. */
+  constant = 0;
   private start = 0;
   private beltVelocity = 0;
   private startBase = 0;

@@ -3,6 +3,7 @@ import type { Problem } from "../../scenario/problem.ts";
 import type { Motion, MotionMark } from "../motion.ts";
 import type { State } from "../state.ts";
 import { ClosedForm } from "./closed-form.ts";
+import { commonPeriod, ratesOf } from "./common-period.ts";
 import { newStance, type Segments } from "./stance.ts";
 
 /** A run by closed form, asked again at any instant: each segment's form is made anew from its start state. */
@@ -76,6 +77,17 @@ export class ExactMotion implements Motion {
       rate = Math.max(rate, t - this.stance.t < fastDies ? fast : slow);
     }
     return rate > 0 ? 1 / rate : Infinity;
+  }
+
+  period(i: number, t: number): number {
+    this.load(i);
+    const { inputs, oscillation, form } = this.form;
+    if (form === "slip" && t - this.stance.t < oscillation.freeRates.fastDies) return 0;
+    const { force, base, acceleration } = inputs;
+    for (let j = 1; j < 4; j++) if (force[j] !== 0 || base[j] !== 0 || acceleration[j] !== 0) return 0;
+    if (form !== "slip" && this.form.contactCarrier === "belt") return 0;
+    const isSlowing = oscillation.freeRates.slow > 0;
+    return form === "slip" && isSlowing ? 0 : (commonPeriod(ratesOf(this.problem, inputs)) ?? 0);
   }
 
   private load(i: number): void {

@@ -1,6 +1,7 @@
 import type { Work } from "../../numerics/first-zero.ts";
 import type { Problem } from "../../scenario/problem.ts";
 import type { Inputs } from "../inputs.ts";
+import { commonPeriod, ratesOf } from "./common-period.ts";
 import type { Stance } from "./stance.ts";
 import { Stepper } from "./stepper.ts";
 
@@ -24,7 +25,7 @@ export function nextBreakAway(problem: Problem, stance: Stance, allowed: number)
     if (stepper.step(s, end) === "break-away") return s.t;
     if (stepper.outOfWork) return NaN;
   }
-  const period = commonPeriod(problem, inputs);
+  const period = lookOver(ratesOf(problem, inputs));
   const drift = endlessRate(problem, inputs);
   if (drift === 0) return breaksBefore(stepper, s, s.t + period);
   const horizon = driftHorizon(problem, stepper, s) / Math.abs(drift);
@@ -82,18 +83,8 @@ function endlessRate(problem: Problem, inputs: Inputs): number {
   return problem.stiffness * stretchRate - inputs.force[1];
 }
 
-/** A period that all harmonics and the ripple share, s; 0 without any, 1,000 of the slowest where none is so short. */
-function commonPeriod(problem: Problem, inputs: Inputs): number {
-  const rates: number[] = [];
-  for (const term of [...problem.force, ...problem.base]) {
-    for (const harmonic of term.harmonics(inputs.origin)) rates.push(harmonic.hz);
-  }
-  if (problem.ripple !== null) rates.push(problem.ripple.hz);
+/** How long periodic inputs are looked at, s: a hair over their common period, or 1,000 of the slowest; 0 without any. */
+function lookOver(rates: readonly number[]): number {
   if (rates.length === 0) return 0;
-  const slowest = Math.min(...rates);
-  for (let n = 1; n < cyclesAhead; n++) {
-    const isCommon = rates.every((hz) => Math.abs((n * hz) / slowest - Math.round((n * hz) / slowest)) <= 1e-9 * n);
-    if (isCommon) return (n / slowest) * (1 + 1e-9);
-  }
-  return cyclesAhead / slowest;
+  return (commonPeriod(rates) ?? cyclesAhead / Math.min(...rates)) * (1 + 1e-9);
 }

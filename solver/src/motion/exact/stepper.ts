@@ -8,6 +8,7 @@ import {
   BaseSlipWatch,
   CarriedStretchWatch,
   HoldWatch,
+  ShareWatch,
   SlipWatch,
   StretchRateWatch,
   StretchWatch,
@@ -18,7 +19,7 @@ import {
 export type Happening = Extract<EventKind, "stop" | "turn" | "break-away"> | null;
 
 /** What ends a segment, the earliest first. */
-type Cause = "corner" | "contact" | "element" | "side";
+type Cause = "corner" | "contact" | "element" | "side" | "share";
 
 /**
  * Takes a body from one happening to the next by closed form: the rules of stick and slip at v_r = 0, of the second
@@ -31,6 +32,7 @@ export class Stepper {
   private readonly stretchWatch: StretchWatch;
   private readonly stretchRateWatch: StretchRateWatch;
   private readonly holdWatch: HoldWatch;
+  private readonly shareWatch: ShareWatch;
   private readonly carriedWatch: CarriedStretchWatch;
   private readonly baseSlipWatch: BaseSlipWatch;
   private first = Infinity;
@@ -48,6 +50,7 @@ export class Stepper {
     this.stretchWatch = new StretchWatch(oscillation);
     this.stretchRateWatch = new StretchRateWatch(oscillation);
     this.holdWatch = new HoldWatch(carried);
+    this.shareWatch = new ShareWatch(carried);
     this.carriedWatch = new CarriedStretchWatch(carried, inputs);
     this.baseSlipWatch = new BaseSlipWatch(inputs, problem.beltVelocity);
   }
@@ -103,7 +106,7 @@ export class Stepper {
       return form.form === "lock" ? this.meetBoth(s, s.contact) : this.meet(s, s.contact);
     }
     if (this.cause === "element") return this.meetElement(s);
-    s.side = -s.side as Phase;
+    if (this.cause === "side") s.side = -s.side as Phase;
     return null;
   }
 
@@ -124,7 +127,8 @@ export class Stepper {
 
   private watchStick(s: Stance): void {
     this.watchHold("contact");
-    if (!this.form.hasElement || s.spring === 0) return;
+    if (!this.form.hasElement) return;
+    if (s.spring === 0) return this.watchShares();
     const scale = this.inputScale();
     this.baseSlipWatch.sign = -s.spring;
     this.look(this.baseSlipWatch, scale, "element");
@@ -143,6 +147,13 @@ export class Stepper {
       this.holdWatch.sign = -1;
       this.look(this.holdWatch, scale, cause, from, Math.min(to, this.first));
       if (this.outOfWork) return;
+    }
+  }
+
+  private watchShares(): void {
+    for (const side of [1, -1] as const) {
+      this.shareWatch.begin(side);
+      this.look(this.shareWatch, this.inputScale(), "share");
     }
   }
 

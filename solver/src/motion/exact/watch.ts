@@ -100,6 +100,43 @@ export class HoldWatch extends Watch {
   }
 }
 
+/**
+ * grip·N − side·need of a body that contact and spring hold together: where the contact's share is used up and the spring's
+ * element begins to give the rest. No event, but f and S have a corner there.
+ */
+export class ShareWatch extends Watch {
+  side = 1;
+
+  constructor(private readonly carried: Carried) {
+    super();
+  }
+
+  evaluate(tau: number): void {
+    const { carried, side } = this;
+    carried.evaluate(tau);
+    const share = carried.room - carried.constant;
+    this.take(
+      share - side * carried.need,
+      carried.roomRate - side * carried.needRate,
+      carried.roomSecond - side * carried.needSecond,
+    );
+    this.noise = 2 ** -50 * share;
+  }
+
+  thirdBound(): number {
+    return this.carried.thirdBound();
+  }
+
+  /** Looks for the next crossing on one side, whichever way it goes; at a crossing the rate tells which. */
+  begin(side: 1 | -1): void {
+    this.side = side;
+    this.sign = 1;
+    this.evaluate(0);
+    const isAtCrossing = Math.abs(this.value) <= 1e-12 * this.carried.room;
+    this.sign = (isAtCrossing ? this.first : this.value) < 0 ? -1 : 1;
+  }
+}
+
 /** d of a body carried along. */
 export class CarriedStretchWatch extends Watch {
   constructor(
