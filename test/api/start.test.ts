@@ -18,8 +18,8 @@ beforeAll(async () => (local = await mkdtemp(join(tmpdir(), "start-"))));
 afterAll(async () => {
   for (const child of children) child.kill("SIGKILL");
   // Only where a test failed half-way: the database would go on without its folder.
-  const pid = await databasePid();
-  if (isAlive(pid)) process.kill(pid, "SIGKILL");
+  const pid = await databasePid().catch(() => null);
+  if (pid && isAlive(pid)) process.kill(pid, "SIGKILL");
   await rm(local, { recursive: true });
 });
 
