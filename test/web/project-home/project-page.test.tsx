@@ -87,8 +87,7 @@ describe("a project", () => {
     const requests = fakeServer({ ...seenBy("editor", [stored("New scenario")]), [`POST ${at}/scenarios`]: answer });
     const { user, address } = openPage(at);
     await user.click(await screen.findByRole("button", { name: "New scenario" }));
-    // The scenario page is loaded first, with the solver.
-    await waitFor(() => expect(address()).toBe(`${at}/scenarios/${stored("").id}`), { timeout: 15_000 });
+    await waitFor(() => expect(address()).toBe(`${at}/scenarios/${stored("").id}`));
     const sent = requests.find(({ method }) => method === "POST")?.body as { content: { title: string } };
     expect(sent.content).toEqual(newScenario(["New scenario"]));
     expect(sent.content.title).toBe("New scenario 2");

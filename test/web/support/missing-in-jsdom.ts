@@ -11,14 +11,15 @@ export function allowDialogs(): void {
   };
 }
 
-/** jsdom lays nothing out: nothing scrolls, and nothing comes into sight. */
+class IdleObserver {
+  observe(): void {}
+  unobserve(): void {}
+  disconnect(): void {}
+}
+
+/** jsdom lays nothing out: nothing scrolls, nothing comes into sight, nothing changes its size. */
 export function allowLayout(): void {
   window.scrollTo = () => undefined;
-  vi.stubGlobal(
-    "IntersectionObserver",
-    class {
-      observe(): void {}
-      disconnect(): void {}
-    },
-  );
+  vi.stubGlobal("IntersectionObserver", IdleObserver);
+  vi.stubGlobal("ResizeObserver", IdleObserver);
 }

@@ -23,7 +23,6 @@ export function MotionStrip({ intervals, from, to, label, height = 20, isNever, 
     () => stripShapes(intervals, { from, to, width, height }),
     [intervals, from, to, width, height],
   );
-  const standing = isNever ? "never" : "stick";
   return (
     <svg
       ref={ref}
@@ -33,8 +32,15 @@ export function MotionStrip({ intervals, from, to, label, height = 20, isNever, 
       height={height}
       className={classNames("block forced-color-adjust-none", className)}
     >
-      <path d={`M0 ${height / 2}H${width}`} className="stroke-edge" strokeWidth={1} />
-      <path d={shapes.stick} fill={`url(#hatch-${standing})`} />
+      {isNever ? (
+        // Whole rows of the dots' own grid.
+        <rect y={6} width={width} height={12} fill="url(#hatch-never)" />
+      ) : (
+        <>
+          <path d={`M0 ${height / 2}H${width}`} className="stroke-edge" strokeWidth={1} />
+          <path d={shapes.stick} fill="url(#hatch-stick)" />
+        </>
+      )}
       <path d={shapes.back} fill="url(#hatch-back)" className="stroke-slip" strokeWidth={0.75} />
       <path d={shapes.forward} className="fill-slip" />
     </svg>

@@ -17,7 +17,11 @@ export function formatNumber(value: number, digits = 3, keepZeros = false): stri
 
 /** An input as it was given: all its digits, free of the noise that unit conversion leaves after the twelfth. */
 export function formatExactly(value: number): string {
-  return formatNumber(value, 12);
+  const size = Number(Math.abs(value).toPrecision(12));
+  const isPlain = size === 0 || (size >= 1e-6 && size < 1e12);
+  return isPlain
+    ? signed(value, grouped(withoutTrailingZeros(size === 0 ? "0" : plain(size, 12))))
+    : formatNumber(value, 12);
 }
 
 /** A number to a fixed number of decimals, for columns and readouts that must not jump. */

@@ -1,6 +1,7 @@
 import type { LimitVerdict, Outcome, Result, Scenario } from "@restband/solver";
 import { formatNumber } from "../../format/format-number.ts";
 import { say, sayShare } from "../../format/format-quantity.ts";
+import type { Measure } from "../../format/unit.ts";
 import { capitalised, sayCount, sayMany } from "../../format/words.ts";
 import { readingOf, type ResultReading } from "./result-reading.ts";
 
@@ -34,7 +35,9 @@ function holding({ value }: ResultReading): string {
   return use > 0 ? `${most}; it could hold ${formatNumber(1 / use)} times as much.` : `${most}.`;
 }
 
-function resting({ value, measure }: ResultReading): string {
+function resting({ scenario, value, measure }: ResultReading): string {
+  if (scenario.body.stiffness === 0) return wayTravelled(scenario, value("restDisplacement"), measure("displacement"));
+
   const swings = value("halfCycles");
   const band = value("restBand");
   const place = value("restDisplacement");
@@ -42,6 +45,14 @@ function resting({ value, measure }: ResultReading): string {
   const at = place === null ? "" : `It stands at ${say(place, measure("displacement"))} ${count}`.trim();
   const within = band === null ? "" : `, where friction can hold it within ±${say(band, measure("displacement"))}`;
   return at === "" ? "" : `${at}${within}.`;
+}
+
+/** Without a spring there is no place to come back to: what counts is how far it went. */
+function wayTravelled({ motion, initial }: Scenario, place: number | null, measure: Measure): string {
+  if (place === null) return "";
+  const way = Math.abs(place - initial.displacement);
+  const turns = motion === "angular" ? `, ${formatNumber(way / (2 * Math.PI))} turns` : "";
+  return `That is ${say(way, measure)}${turns} from where it began.`;
 }
 
 function nextBreakAway({ result, measure, scenario }: ResultReading): string {
@@ -76,7 +87,8 @@ function sliding({ value, measure, drive }: ResultReading): string {
   }
   const place = value("meanDisplacement");
   const peak = value("peakVelocity");
-  const at = place === null ? "" : `On average it is at ${say(place, measure("displacement"))}`;
+  const isCentred = Math.abs(place ?? 0) < 0.01 * (value("amplitude") ?? 0);
+  const at = place === null || isCentred ? "" : `On average it is at ${say(place, measure("displacement"))}`;
   return sentenceOf([at, peak === null ? "" : `its peak velocity is ${say(peak, measure("velocity"))}`]);
 }
 
@@ -98,12 +110,12 @@ export function limitsLine(scenario: Scenario, limits: readonly LimitVerdict[]):
   const open = limits.filter(({ kept }) => kept === null).length;
   if (broken > 0) return `${ofAll(broken, limits.length)} broken${asEntered}.`;
   if (open > 0) return `${ofAll(open, limits.length)} not to be judged${asEntered}.`;
-  return `${limits.length === 1 ? "The limit is" : `All ${sayCount(limits.length)} limits are`} kept${asEntered}.`;
+  return `${ofAll(limits.length, limits.length)} kept${asEntered}.`;
 }
 
 function ofAll(count: number, all: number): string {
   if (all === 1) return "The limit is";
-  if (count === all) return `All ${sayCount(all)} limits are`;
+  if (count === all) return all === 2 ? "Both limits are" : `All ${sayCount(all)} limits are`;
   return `${capitalised(sayCount(count))} of ${sayCount(all)} limits ${count === 1 ? "is" : "are"}`;
 }
 

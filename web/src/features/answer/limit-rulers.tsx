@@ -29,7 +29,7 @@ function LimitRuler({ limit, scenario, asEntered }: { limit: LimitVerdict; scena
   const format = (at: number): string => joined({ text: formatNumber(fromSi(at, unit)), unit: unit.label });
   const words = [value, remark].filter(Boolean);
   return (
-    <li className="grid items-center gap-x-7 gap-y-1 border-b border-line py-2.5 desk:grid-cols-[minmax(150px,220px)_minmax(0,550px)_minmax(0,1fr)]">
+    <li className="grid items-center gap-x-7 gap-y-1 border-b border-line py-2.5 desk:grid-cols-[minmax(140px,200px)_minmax(0,500px)_minmax(220px,1fr)]">
       <p className="leading-snug max-desk:flex max-desk:flex-wrap max-desk:items-baseline max-desk:gap-x-2">
         <span className="font-semibold">{name}</span>
         <span className="text-13 text-quiet desk:block">{demand}</span>

@@ -1,7 +1,7 @@
 import type { Energy, Result } from "@restband/solver";
 import { classNames } from "../../components/class-names.ts";
 import { Icon } from "../../components/icon.tsx";
-import { formatFully, formatNumber } from "../../format/format-number.ts";
+import { formatFixed, formatFully, formatNumber } from "../../format/format-number.ts";
 import { fromSi, type Unit } from "../../format/unit.ts";
 import { unitFor } from "../../format/units.ts";
 import { balanceOf, allowedShare, largestEntry, ledgerRows, type LedgerRow } from "./ledger.ts";
@@ -30,6 +30,13 @@ export function EnergyLedger({ energy, method }: { energy: Energy; method: Resul
           </tr>
         </thead>
         <tbody>
+          {largest === 0 && (
+            <tr>
+              <td colSpan={3} className="py-1.5 text-quiet">
+                Nothing moves, so no energy is exchanged.
+              </td>
+            </tr>
+          )}
           {ledgerRows(energy).map((row) => (
             <Row key={row.name} row={row} unit={unit} largest={largest} />
           ))}
@@ -64,7 +71,7 @@ function Row({ row: { name, value }, unit, largest }: { row: LedgerRow; unit: Un
         {name}
       </th>
       <td className="figures py-1.5 text-right whitespace-nowrap" title={`${formatFully(value)} J`}>
-        <PowerText text={formatNumber(fromSi(value, unit), 6, true)} />
+        {formatFixed(fromSi(value, unit), decimalsFor(fromSi(largest, unit)))}
       </td>
       <td className="py-1.5 pl-6">
         <span
@@ -76,5 +83,8 @@ function Row({ row: { name, value }, unit, largest }: { row: LedgerRow; unit: Un
     </tr>
   );
 }
+
+/** Six digits of the largest entry; all others to the same decimal. */
+const decimalsFor = (largest: number): number => Math.min(12, Math.max(0, 5 - Math.floor(Math.log10(largest))));
 
 const toneOf = (name: string): string => (name.startsWith("Heat") ? "bg-stick" : "bg-slip");

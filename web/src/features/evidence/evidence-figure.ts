@@ -55,7 +55,7 @@ function bandTraces(view: RunView, frame: Frame, panel: PanelFrame, theme: PlotT
       solidity: 0.16,
       fgcolor: theme["band-line"],
       bgcolor: faded(theme.band, 0.2),
-      fgopacity: 0.5,
+      fgopacity: 0.4,
     },
   };
   return [

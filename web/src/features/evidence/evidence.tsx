@@ -54,7 +54,7 @@ export function Evidence({ view, t, onMove, isStale }: EvidenceProps) {
           <StripRow view={view} frame={frame} t={t} />
           <div className="relative">
             <Plot data={data} layout={layout} label={figureWords(view)} />
-            <Heads frame={frame} />
+            <Heads frame={frame} motion={view.scenario.motion} />
             <TimeCursor view={view} frame={frame} t={t} onMove={onMove} />
             {frame.right > 100 && <Gutter view={view} frame={frame} t={t} />}
           </div>
@@ -121,15 +121,18 @@ function StripRow({ view, frame, t }: { view: RunView; frame: Frame; t: number }
   );
 }
 
-const names = { displacement: "displacement", velocity: "velocity", friction: "friction on the body" };
+const names = {
+  linear: { displacement: "displacement", velocity: "velocity", friction: "friction on the body" },
+  angular: { displacement: "angle", velocity: "angular velocity", friction: "friction torque on the rotor" },
+};
 
 /** The unit at the head of each axis, with what is drawn. */
-function Heads({ frame }: { frame: Frame }) {
+function Heads({ frame, motion }: { frame: Frame; motion: "linear" | "angular" }) {
   return (
     <>
       {frame.panels.map(({ key, top, unit }) => (
         <p key={key} className="absolute text-13 text-quiet" style={{ top: top - 24, left: frame.left > 60 ? 16 : 8 }}>
-          <span className="text-ink">{names[key]}</span>, {unit.label}
+          <span className="text-ink">{names[motion][key]}</span>, {unit.label}
         </p>
       ))}
       <p className="absolute text-13 text-quiet" style={{ bottom: 2, right: frame.right }}>

@@ -61,10 +61,9 @@ export function timeAt(frame: Frame, x: number): number {
 export const yOf = ({ top, height, low, high }: PanelFrame, value: number): number =>
   top + ((high - value) / (high - low)) * height;
 
-/** A range that holds all values with a little air; never of no height. */
-export function padded(low: number, high: number, share = 0.06): { low: number; high: number } {
+/** A range that holds all values with a little air; one of no height is opened by `least`, or by its own size. */
+export function padded(low: number, high: number, least: number): { low: number; high: number } {
   const size = high - low;
-  if (size > 0) return { low: low - share * size, high: high + share * size };
-  const around = Math.abs(high) > 0 ? Math.abs(high) : 1;
-  return { low: low - 0.5 * around, high: high + 0.5 * around };
+  const air = size > 0 ? 0.06 * size : Math.max(least, 0.5 * Math.abs(high));
+  return { low: low - air, high: high + air };
 }

@@ -68,9 +68,10 @@ function lastBefore(times: readonly number[], t: number): number | undefined {
   return undefined;
 }
 
-/** Where the cursor stands until somebody moves it: at the event in the middle of the run. */
-export function firstCursor({ eventTimes }: RunView): number {
-  return eventTimes[Math.floor(eventTimes.length / 2)] ?? 0;
+/** Where the cursor stands until somebody moves it: half way from the event in the middle of the run to the next. */
+export function firstCursor({ eventTimes, end }: RunView): number {
+  const middle = Math.floor((eventTimes.length - 1) / 2);
+  return ((eventTimes[middle] ?? 0) + (eventTimes[middle + 1] ?? end)) / 2;
 }
 
 /** The last three cycles from break-away to break-away, where there are as many; null elsewhere. */

@@ -23,7 +23,8 @@ export function scalesOf(view: RunView, range: Range): PanelScale[] {
 
 function scale(key: PanelKey, values: number[], measure: Measure): PanelScale {
   const [low, high] = [Math.min(...values), Math.max(...values)];
-  return { key, ...padded(low, high), unit: unitFor(Math.max(Math.abs(low), Math.abs(high)), measure) };
+  const unit = unitFor(Math.max(Math.abs(low), Math.abs(high)), measure);
+  return { key, ...padded(low, high, unit.factor), unit };
 }
 
 function extremesOf(samples: Samples, channel: "x" | "v" | "f", { from, to }: Range): [number, number] {

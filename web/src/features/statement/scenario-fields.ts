@@ -110,7 +110,6 @@ function fieldOfLimit(scenario: Scenario, index: number, bound: string): PathFie
     initial: 0,
     optional: true,
     isShare: isShare(quantity.name),
-    help: quantity.meaning,
   };
 }
 

@@ -9,6 +9,8 @@ import { GroupForm } from "./form/group-form.tsx";
 import { faultsIn, type Group } from "./groups.ts";
 import { Keeps } from "./keeps.tsx";
 import { fieldAt } from "./scenario-fields.ts";
+import { originsIn } from "./origin-words.ts";
+import { remarkWords } from "./remark-words.ts";
 import { SentenceLine } from "./sentence-line.tsx";
 
 interface StatementGroupProps {
@@ -47,9 +49,10 @@ export function StatementGroup({ group, remarks }: StatementGroupProps) {
         ) : (
           <SentenceWithEditor group={group} faults={faults} onAllFields={() => setForm(true)} />
         )}
+        <Origins group={group} />
         {remarks.map((remark) => (
           <p key={remark.path} className="mt-2 max-w-(--measure) text-15 text-quiet">
-            {sentenceOf(remark)}
+            {remarkWords(draft.inForce, remark)}
           </p>
         ))}
       </div>
@@ -68,16 +71,27 @@ export function StatementGroup({ group, remarks }: StatementGroupProps) {
   );
 }
 
+/** Where values come from, quietly. */
+function Origins({ group }: { group: Group }) {
+  const { draft } = useDraftContext();
+  const origins = originsIn(draft.sheet.wanted, group);
+  if (origins.length === 0) return null;
+  return (
+    <ul className="mt-1.5 flex flex-wrap gap-x-2 gap-y-1.5" aria-label={`Where values of ${group.name} come from`}>
+      {origins.map(({ path, text }) => (
+        <li key={path} className="rounded border border-edge px-2 text-13 text-quiet">
+          {text}
+        </li>
+      ))}
+    </ul>
+  );
+}
+
 export function ToPutRight({ count }: { count: number }) {
   return (
     <p className="text-13 font-semibold text-broken">{sayMany(count, "field").replace(/^one/, "1")} to put right</p>
   );
 }
-
-const sentenceOf = ({ path, message }: Fault): string =>
-  message === "not computed by this version"
-    ? `Part of this is valid but not computed by this version (${path}). It stays as it is.`
-    : message;
 
 interface SentenceProps {
   group: Group;

@@ -10,6 +10,7 @@ import { useDraftContext } from "../draft/draft-context.ts";
 import { writePath } from "../path.ts";
 import { stretchesOf, ticksOf, type Stretch } from "./ruler-scale.ts";
 import type { NumberEntry } from "./use-number-entry.ts";
+import "./drag-ruler.css";
 
 interface DragRulerProps {
   path: string;
@@ -20,15 +21,17 @@ interface DragRulerProps {
 }
 
 /** Decades to each side of the value that was there. */
-const REACH = 1;
+const REACH = 1.5;
 const POINTS = 33;
+/** Width of the ring, px: the browser keeps it inside the track, so the scale begins and ends half a ring from the edges. */
+const THUMB = 18;
 
 /** A logarithmic scale to drag the value along; beneath it what the body would do at each value. */
 export function DragRuler({ path, before, entry, label }: DragRulerProps) {
   const [ref, width] = useWidth<HTMLDivElement>(440);
   const outcomes = useOutcomesAlong(path, before);
   const position = Math.log10((entry.value ?? before) / before);
-  const x = (at: number): number => ((at + REACH) / (2 * REACH)) * width;
+  const x = (at: number): number => THUMB / 2 + ((at + REACH) / (2 * REACH)) * (width - THUMB);
   const inUnit = (si: number): number => fromSi(si, entry.unit);
   return (
     <div ref={ref} className="relative mt-4 w-full desk:w-[440px]">

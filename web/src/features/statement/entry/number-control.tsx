@@ -48,7 +48,9 @@ export function NumberControl({ entry, label, autoFocus, onEnter, ...control }: 
 
 function UnitChoice({ entry, label }: { entry: NumberEntry; label: string }) {
   const { units, unit } = entry;
-  if (units.length === 1) return unit.label === "" ? null : <span className="text-13 text-quiet">{unit.label}</span>;
+  const isPlain = unit.label === "" && units.every(({ label: each }) => each === "" || each === "%");
+  if (isPlain) return null;
+  if (units.length === 1) return <span className="text-13 text-quiet">{unit.label}</span>;
   return (
     <PlainSelect
       aria-label={`Unit of ${label}`}

@@ -11,7 +11,7 @@ export interface Tick {
 export function ticksOf(middle: number, reach: number): Tick[] {
   const size = Math.abs(middle);
   const first = Math.floor(Math.log10(size) - reach);
-  const decades = Array.from({ length: 2 * reach + 2 }, (_, i) => first + i);
+  const decades = Array.from({ length: Math.ceil(2 * reach) + 2 }, (_, i) => first + i);
   return decades
     .flatMap((decade) => [1, 2, 3, 4, 5, 6, 7, 8, 9].map((digit) => tick(digit, decade, middle)))
     .filter(({ at }) => Math.abs(at) <= reach + 1e-9);

@@ -1,4 +1,4 @@
-import { digestOf, type Scenario } from "@restband/solver";
+import { digestOf, jsonText, type Scenario } from "@restband/solver";
 import { readPath, writePath } from "../path.ts";
 import { fieldAt, measureOf } from "../scenario-fields.ts";
 import { joined, readInput } from "../../../format/format-quantity.ts";
@@ -76,7 +76,8 @@ export function merged(mine: Scenario, theirs: Scenario, choices: Readonly<Recor
   );
 }
 
-const isSame = (a: unknown, b: unknown): boolean => JSON.stringify(a) === JSON.stringify(b);
+/** Whatever the order of their members. */
+const isSame = (a: unknown, b: unknown): boolean => jsonText(a, "sorted") === jsonText(b, "sorted");
 
 /** What stands at a path, in words. */
 function say(scenario: Scenario, path: string): string {

@@ -1,4 +1,4 @@
-import { counterfaceChoice, frictionLaws, lawOf, type Scenario } from "@restband/solver";
+import { counterfaceChoice, frictionLaws, lawOf, type Choice, type Scenario } from "@restband/solver";
 import { setLaw, setRipple } from "../changes.ts";
 import { value } from "./body-sentence.ts";
 import { text, type Piece, type WordPiece } from "./piece.ts";
@@ -10,7 +10,7 @@ export function contactSentence(scenario: Scenario): Piece[] {
   const rubs = scenario.contact.law.model === "none" ? "It moves on " : "It rubs on ";
   return [
     text(rubs),
-    ...word(scenario, "contact.counterface", counterfaceChoice),
+    ...word(scenario, "contact.counterface", counterfaceFor(scenario)),
     text(" "),
     ...fromTemplate(scenario, kind.sentence, { path: "contact.law", ...kind }),
     text(" "),
@@ -18,6 +18,15 @@ export function contactSentence(scenario: Scenario): Piece[] {
     ...(scenario.contact.law.model === "none" ? [] : pressingWords(scenario)),
     text("."),
   ];
+}
+
+/** A rotor has no ways: what stands still against it is a pad. */
+function counterfaceFor({ motion }: Scenario): Choice {
+  if (motion === "linear") return counterfaceChoice;
+  const options = counterfaceChoice.options.map((option) =>
+    option.value === "ground" ? { ...option, label: "a fixed pad" } : option,
+  );
+  return { ...counterfaceChoice, options };
 }
 
 function lawWord({ contact }: Scenario): WordPiece {
