@@ -1,5 +1,5 @@
 import { judge } from "./judge.ts";
-import { runExact } from "./motion/exact/exact-run.ts";
+import { runExact } from "./motion/exact/run-exact.ts";
 import type { Motion } from "./motion/motion.ts";
 import { emptyState } from "./motion/state.ts";
 import type { Refusal, SimulateOptions } from "./options.ts";

@@ -1,5 +1,5 @@
 import { describe, expect, test } from "vitest";
-import { runExact } from "../../solver/src/motion/exact/exact-run.ts";
+import { runExact } from "../../solver/src/motion/exact/run-exact.ts";
 import type { Motion } from "../../solver/src/motion/motion.ts";
 import { notesOf } from "../../solver/src/notes.ts";
 import { Reading } from "../../solver/src/quantities/reading.ts";

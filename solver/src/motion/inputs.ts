@@ -147,6 +147,14 @@ export class Inputs {
     return this.problem.ripple === null ? 0 : Math.abs(this.problem.ripple.amplitude) * raised(this.rippleOmega, power);
   }
 
+  /** True where the polynomials or a sweep move the inputs on, so that nothing repeats itself. */
+  isSwept(): boolean {
+    for (let j = 1; j < 4; j++) {
+      if (this.force[j] !== 0 || this.base[j] !== 0 || this.acceleration[j] !== 0) return true;
+    }
+    return false;
+  }
+
   /** The fastest angular frequency acting, rad/s; 0 without harmonics. */
   fastest(): number {
     let fastest = this.rippleOmega;

@@ -1,7 +1,7 @@
 import fc from "fast-check";
 import { expect, test } from "vitest";
 import { compileProblem } from "../../../solver/src/scenario/compile-problem.ts";
-import { runExact } from "../../../solver/src/motion/exact/exact-run.ts";
+import { runExact } from "../../../solver/src/motion/exact/run-exact.ts";
 import type { Motion } from "../../../solver/src/motion/motion.ts";
 import { emptyState, type State } from "../../../solver/src/motion/state.ts";
 import { hardScenario } from "../../support/hard-scenario.ts";

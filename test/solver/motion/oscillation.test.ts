@@ -2,7 +2,7 @@ import { describe, expect, test } from "vitest";
 import { compileProblem } from "../../../solver/src/scenario/compile-problem.ts";
 import { checkScenario } from "../../../solver/src/scenario/check-scenario.ts";
 import { Inputs } from "../../../solver/src/motion/inputs.ts";
-import { newStance } from "../../../solver/src/motion/exact/stance.ts";
+import { newStance } from "../../../solver/src/motion/stance.ts";
 import { Oscillation } from "../../../solver/src/motion/exact/oscillation.ts";
 
 // m, k, c, F, ω, φ, x0, v0, t, then x and ẋ: the matrix exponential of the forced oscillator at 40 digits (mpmath 1.3.0).

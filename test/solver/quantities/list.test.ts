@@ -1,7 +1,7 @@
 import { quantities, quantityNames, quantityOf } from "@restband/solver";
 import { describe, expect, test } from "vitest";
 import { judge } from "../../../solver/src/judge.ts";
-import { runExact } from "../../../solver/src/motion/exact/exact-run.ts";
+import { runExact } from "../../../solver/src/motion/exact/run-exact.ts";
 import { compileProblem } from "../../../solver/src/scenario/compile-problem.ts";
 import { buildScenario, coulombForces } from "../../support/scenario-builder.ts";
 

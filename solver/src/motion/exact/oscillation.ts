@@ -1,8 +1,8 @@
 import type { Inputs } from "../inputs.ts";
-import type { Carrier } from "./carried.ts";
+import type { Carrier } from "../carried.ts";
 import { Chain } from "./chain.ts";
 import { StartSeries } from "./start-series.ts";
-import type { Stance } from "./stance.ts";
+import type { Stance } from "../stance.ts";
 
 const unitRoundoff = 2 ** -53;
 

@@ -1,5 +1,5 @@
 import type { Inputs } from "../inputs.ts";
-import { newStance, type Stance } from "./stance.ts";
+import { newStance, type Stance } from "../stance.ts";
 
 const terms = 26;
 const unitRoundoff = 2 ** -53;

@@ -1,13 +1,12 @@
-import type { Watched } from "../../numerics/first-zero.ts";
-import type { Inputs } from "../inputs.ts";
-import type { Carried, Carrier } from "./carried.ts";
-import type { Oscillation } from "./oscillation.ts";
+import type { Watched } from "../numerics/first-zero.ts";
+import type { Inputs } from "./inputs.ts";
+import type { Carried } from "./carried.ts";
 
 /** Held means |need| ≤ room (1 + this), so that rounding never decides. */
 export const heldTolerance = 1e-12;
 
 /** What is watched for its first zero, always times `sign` so that it starts positive. */
-abstract class Watch implements Watched {
+export abstract class Watch implements Watched {
   sign = 1;
   value = 0;
   first = 0;
@@ -20,64 +19,6 @@ abstract class Watch implements Watched {
     this.value = this.sign * value;
     this.first = this.sign * first;
     this.second = this.sign * second;
-  }
-}
-
-/** v_r of a slip. */
-export class SlipWatch extends Watch {
-  constructor(
-    private readonly oscillation: Oscillation,
-    private readonly inputs: Inputs,
-    private readonly carrier: Carrier,
-  ) {
-    super();
-  }
-
-  evaluate(tau: number): void {
-    const { oscillation } = this;
-    oscillation.evaluateSlip(tau);
-    this.take(oscillation.slip, oscillation.slipRate, oscillation.slipSecond);
-    this.noise = oscillation.noise;
-  }
-
-  thirdBound(reach: number): number {
-    const own = this.oscillation.snapBound(reach);
-    return this.carrier === "base" ? own : own + this.inputs.baseBound(4);
-  }
-}
-
-/** d of an oscillation: where the spring passes through its free length. */
-export class StretchWatch extends Watch {
-  constructor(private readonly oscillation: Oscillation) {
-    super();
-  }
-
-  evaluate(tau: number): void {
-    const { oscillation } = this;
-    oscillation.evaluate(tau);
-    this.take(oscillation.position, oscillation.velocity, oscillation.acceleration);
-  }
-
-  thirdBound(reach: number): number {
-    return this.oscillation.jerkBound(reach);
-  }
-}
-
-/** ḋ of an oscillation. */
-export class StretchRateWatch extends Watch {
-  constructor(private readonly oscillation: Oscillation) {
-    super();
-  }
-
-  evaluate(tau: number): void {
-    const { oscillation } = this;
-    oscillation.evaluate(tau);
-    this.take(oscillation.velocity, oscillation.acceleration, oscillation.jerk);
-    this.noise = oscillation.noise;
-  }
-
-  thirdBound(reach: number): number {
-    return this.oscillation.snapBound(reach);
   }
 }
 

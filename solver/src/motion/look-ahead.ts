@@ -1,6 +1,7 @@
-import type { Work } from "../../numerics/first-zero.ts";
-import type { Problem } from "../../scenario/problem.ts";
-import type { Inputs } from "../inputs.ts";
+import type { Work } from "../numerics/first-zero.ts";
+import type { Problem } from "../scenario/problem.ts";
+import type { Inputs } from "./inputs.ts";
+import type { SlipMaker } from "./form.ts";
 import { commonPeriod, ratesOf } from "./common-period.ts";
 import type { Stance } from "./stance.ts";
 import { Stepper } from "./stepper.ts";
@@ -13,9 +14,9 @@ const cyclesAhead = 1000;
  * break the stick in a time that their rate bounds, and harmonics (the ripple of N like one) are followed over a common
  * period, or 1,000 periods of the slowest where there is none so short.
  */
-export function nextBreakAway(problem: Problem, stance: Stance, allowed: number): number {
+export function nextBreakAway(problem: Problem, stance: Stance, allowed: number, makeSlip: SlipMaker): number {
   const work: Work = { spent: 0, allowed };
-  const stepper = new Stepper(problem, work);
+  const stepper = new Stepper(problem, work, makeSlip);
   const s = { ...stance };
   const { inputs } = stepper.form;
   inputs.locate(s.t);

@@ -1,4 +1,4 @@
-import type { Phase } from "../../result.ts";
+import type { Phase } from "../result.ts";
 
 /** Where a body stands at the start of a segment, and by which closed form it goes on from there. */
 export interface Stance {

@@ -1,5 +1,5 @@
-import type { Problem } from "../../scenario/problem.ts";
-import type { Inputs } from "../inputs.ts";
+import type { Problem } from "../scenario/problem.ts";
+import type { Inputs } from "./inputs.ts";
 
 const mostPeriods = 1000;
 

@@ -1,4 +1,4 @@
-import type { Inputs } from "../inputs.ts";
+import type { Inputs } from "./inputs.ts";
 
 /** What a body is held against: fixed ground, a belt at constant velocity, or the moving base. */
 export type Carrier = "ground" | "belt" | "base";

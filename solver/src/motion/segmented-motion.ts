@@ -1,27 +1,28 @@
-import type { Ended, Phase } from "../../result.ts";
-import type { Problem } from "../../scenario/problem.ts";
-import type { Motion, MotionMark } from "../motion.ts";
-import type { State } from "../state.ts";
-import { ClosedForm } from "./closed-form.ts";
+import type { Ended, Phase } from "../result.ts";
+import type { Problem } from "../scenario/problem.ts";
+import type { Motion, MotionMark } from "./motion.ts";
+import type { State } from "./state.ts";
+import { type Form } from "./form.ts";
 import { commonPeriod, ratesOf } from "./common-period.ts";
+import { slidingFriction } from "./sliding-friction.ts";
 import { newStance, type Segments } from "./stance.ts";
 
-/** A run by closed form, asked again at any instant: each segment's form is made anew from its start state. */
-export class ExactMotion implements Motion {
-  readonly method = "exact";
-  private readonly form: ClosedForm;
+/** A run as a chain of segments, asked again at any instant: each is set up anew from its start. */
+export class SegmentedMotion implements Motion {
+  readonly problem: Problem;
   private readonly stance = newStance();
   private loaded = -1;
 
   constructor(
-    readonly problem: Problem,
+    private readonly form: Form,
+    readonly method: Motion["method"],
     private readonly segments: Segments,
     readonly events: readonly MotionMark[],
     readonly ended: Ended,
     readonly end: number,
     readonly nextBreakAway: number,
   ) {
-    this.form = new ClosedForm(problem);
+    this.problem = form.problem;
   }
 
   get count(): number {
@@ -48,8 +49,8 @@ export class ExactMotion implements Motion {
     this.load(i);
     const { form, problem, stance } = this;
     const tau = t - stance.t;
-    const isSlip = form.form === "slip";
-    if (isSlip) form.oscillation.evaluate(tau);
+    const isSlip = form.kind === "slip";
+    if (isSlip) form.slip.evaluate(tau);
     else form.carried.evaluate(tau);
     const v = form.inputs.evaluate(tau);
     state.t = t;
@@ -61,33 +62,28 @@ export class ExactMotion implements Motion {
     state.counterfaceVelocity = form.counterfaceVelocity();
     state.normal = v.normal;
     if (isSlip) this.readSlip(state);
-    else if (form.form === "stick") this.readStick(state);
+    else if (form.kind === "stick") this.readStick(state);
     else this.readLock(state);
     state.x = state.d + state.base;
-    const isOnGround = form.form === "stick" && form.contactCarrier !== "base";
+    const isOnGround = form.kind === "stick" && form.contactCarrier !== "base";
     if (isOnGround) state.x = stance.place + problem.beltVelocity * tau;
   }
 
   panel(i: number, t: number): number {
     this.load(i);
-    const { inputs, oscillation, form } = this.form;
-    let rate = inputs.fastest();
-    if (form === "slip") {
-      const { fast, slow, fastDies } = oscillation.freeRates;
-      rate = Math.max(rate, t - this.stance.t < fastDies ? fast : slow);
-    }
+    const { inputs, slip, kind } = this.form;
+    if (kind === "slip") return slip.panel(t - this.stance.t);
+    const rate = inputs.fastest();
     return rate > 0 ? 1 / rate : Infinity;
   }
 
   period(i: number, t: number): number {
     this.load(i);
-    const { inputs, oscillation, form } = this.form;
-    if (form === "slip" && t - this.stance.t < oscillation.freeRates.fastDies) return 0;
-    const { force, base, acceleration } = inputs;
-    for (let j = 1; j < 4; j++) if (force[j] !== 0 || base[j] !== 0 || acceleration[j] !== 0) return 0;
-    if (form !== "slip" && this.form.contactCarrier === "belt") return 0;
-    const isSlowing = oscillation.freeRates.slow > 0;
-    return form === "slip" && isSlowing ? 0 : (commonPeriod(ratesOf(this.problem, inputs)) ?? 0);
+    const { inputs, slip, kind } = this.form;
+    if (kind === "slip" && !slip.isSteady(t - this.stance.t)) return 0;
+    if (kind !== "slip" && this.form.contactCarrier === "belt") return 0;
+    if (inputs.isSwept()) return 0;
+    return commonPeriod(ratesOf(this.problem, inputs)) ?? 0;
   }
 
   private load(i: number): void {
@@ -99,13 +95,13 @@ export class ExactMotion implements Motion {
 
   private readSlip(state: State): void {
     const { form, problem, stance } = this;
-    const { oscillation } = form;
-    state.d = oscillation.position;
-    state.stretchRate = oscillation.velocity;
-    state.v = oscillation.velocity + state.baseVelocity;
-    state.slip = form.contactCarrier === "base" ? oscillation.velocity : state.v - state.counterfaceVelocity;
-    state.a = oscillation.acceleration + (problem.isRelative ? 0 : state.baseAcceleration);
-    state.f = -stance.contact * form.slide * state.normal || 0;
+    const { slip } = form;
+    state.d = slip.position;
+    state.stretchRate = slip.velocity;
+    state.v = slip.velocity + state.baseVelocity;
+    state.slip = slip.slip;
+    state.a = slip.acceleration + (problem.isRelative ? 0 : state.baseAcceleration);
+    state.f = -stance.contact * slidingFriction(problem, state.slip, state.normal) || 0;
     const element = stance.spring * stance.side * form.elementSlope * state.d;
     state.solid = problem.solid.viscous * state.stretchRate + element;
   }
@@ -135,7 +131,7 @@ export class ExactMotion implements Motion {
     state.v = state.baseVelocity;
     state.slip = state.v - state.counterfaceVelocity;
     state.a = problem.isRelative ? 0 : state.baseAcceleration;
-    state.f = -stance.contact * form.slide * state.normal || 0;
+    state.f = -stance.contact * slidingFriction(problem, state.slip, state.normal) || 0;
     state.solid = -form.carried.need;
   }
 

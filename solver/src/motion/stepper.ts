@@ -1,54 +1,37 @@
-import { firstZero, type Watched, type Work } from "../../numerics/first-zero.ts";
-import type { EventKind, Phase } from "../../result.ts";
-import type { Problem } from "../../scenario/problem.ts";
-import { ClosedForm } from "./closed-form.ts";
+import { firstZero, type Watched, type Work } from "../numerics/first-zero.ts";
+import type { EventKind, Phase } from "../result.ts";
+import type { Problem } from "../scenario/problem.ts";
+import { Form, type SlipMaker } from "./form.ts";
+import type { Cause, Ending } from "./slip.ts";
 import { chooseBoth, orient, orientSide } from "./spring-element.ts";
 import type { Stance } from "./stance.ts";
-import {
-  BaseSlipWatch,
-  CarriedStretchWatch,
-  HoldWatch,
-  ShareWatch,
-  SlipWatch,
-  StretchRateWatch,
-  StretchWatch,
-  heldTolerance,
-} from "./watch.ts";
+import { BaseSlipWatch, CarriedStretchWatch, HoldWatch, ShareWatch, heldTolerance } from "./watch.ts";
 
-/** What happened at the end of a step; null where only the closed form changes (a corner, a spring passing its free length). */
+/** What happened at the end of a step; null where only the segment changes (a corner, a spring passing its free length). */
 export type Happening = Extract<EventKind, "stop" | "turn" | "break-away"> | null;
 
-/** What ends a segment, the earliest first. */
-type Cause = "corner" | "contact" | "element" | "side" | "share";
-
 /**
- * Takes a body from one happening to the next by closed form: the rules of stick and slip at v_r = 0, of the second
+ * Takes a body from one happening to the next: the rules of stick and slip at v_r = 0, of the second
  * set-valued element at ḋ = 0, and at the corners of the inputs (right-hand values; what falls on a corner is not lost).
- * It knows no events list and no end of the run: `exact-run.ts` records, `look-ahead.ts` only asks.
+ * It knows no events list and no end of the run: `run.ts` records, `look-ahead.ts` only asks.
  */
 export class Stepper {
-  readonly form: ClosedForm;
-  private readonly slipWatch: SlipWatch;
-  private readonly stretchWatch: StretchWatch;
-  private readonly stretchRateWatch: StretchRateWatch;
+  readonly form: Form;
   private readonly holdWatch: HoldWatch;
   private readonly shareWatch: ShareWatch;
   private readonly carriedWatch: CarriedStretchWatch;
   private readonly baseSlipWatch: BaseSlipWatch;
-  private first = Infinity;
+  private readonly ending: Ending = { tau: Infinity, cause: "corner" };
   /** What rounding may have done to the clock at the end of the step, s. */
   private blur = 0;
-  private cause: Cause = "corner";
 
   constructor(
     private readonly problem: Problem,
     private readonly work: Work,
+    makeSlip: SlipMaker,
   ) {
-    this.form = new ClosedForm(problem);
-    const { oscillation, inputs, carried } = this.form;
-    this.slipWatch = new SlipWatch(oscillation, inputs, this.form.contactCarrier);
-    this.stretchWatch = new StretchWatch(oscillation);
-    this.stretchRateWatch = new StretchRateWatch(oscillation);
+    this.form = new Form(problem, makeSlip);
+    const { inputs, carried } = this.form;
     this.holdWatch = new HoldWatch(carried);
     this.shareWatch = new ShareWatch(carried);
     this.carriedWatch = new CarriedStretchWatch(carried, inputs);
@@ -90,39 +73,30 @@ export class Stepper {
     const { form } = this;
     const end = Math.min(form.inputs.end, limit);
     form.take(s);
-    this.first = end - s.t;
+    this.ending.tau = end - s.t;
     this.blur = 2 ** -49 * end;
-    this.cause = "corner";
-    if (form.form === "slip") this.watchSlip(s);
-    else if (form.form === "stick") this.watchStick(s);
+    this.ending.cause = "corner";
+    if (form.kind === "slip") this.watchSlip();
+    else if (form.kind === "stick") this.watchStick(s);
     else this.watchLock(s);
     if (this.outOfWork) return null;
-    const tau = this.first;
-    if (this.cause === "corner") return this.pass(s, end, end < limit || end === form.inputs.end);
+    const tau = this.ending.tau;
+    if (this.ending.cause === "corner") return this.pass(s, end, end < limit || end === form.inputs.end);
     if (s.t + tau >= end && end === form.inputs.end) return this.pass(s, end, true);
     this.carry(s, tau);
-    if (this.cause === "contact") {
-      if (form.form === "stick") return this.breakAway(s);
-      return form.form === "lock" ? this.meetBoth(s, s.contact) : this.meet(s, s.contact);
+    if (this.ending.cause === "contact") {
+      if (form.kind === "stick") return this.breakAway(s);
+      return form.kind === "lock" ? this.meetBoth(s, s.contact) : this.meet(s, s.contact);
     }
-    if (this.cause === "element") return this.meetElement(s);
-    if (this.cause === "side") s.side = -s.side as Phase;
+    if (this.ending.cause === "element") return this.meetElement(s);
+    if (this.ending.cause === "side") s.side = -s.side as Phase;
     return null;
   }
 
-  private watchSlip(s: Stance): void {
-    const { oscillation, hasElement, inputs, contactCarrier } = this.form;
-    const { fast } = oscillation.freeRates;
-    const rate = Math.max(fast, inputs.fastest());
-    const scale = rate > 0 ? 2 / rate : Infinity;
-    this.slipWatch.sign = s.contact;
-    this.look(this.slipWatch, scale, "contact");
-    if (!hasElement) return;
-    this.stretchWatch.sign = s.side;
-    this.look(this.stretchWatch, scale, "side");
-    if (contactCarrier === "base" || this.form.isCarriedWithBase()) return;
-    this.stretchRateWatch.sign = s.spring;
-    this.look(this.stretchRateWatch, scale, "element");
+  private watchSlip(): void {
+    const { slip, hasElement, contactCarrier } = this.form;
+    const isApart = contactCarrier !== "base" && !this.form.isCarriedWithBase();
+    slip.follow(this.ending, { side: hasElement, element: hasElement && isApart }, this.blur, this.work);
   }
 
   private watchStick(s: Stance): void {
@@ -139,13 +113,13 @@ export class Stepper {
   /** The first instant at which need leaves ±room, told window by window so that neither side is followed past the other. */
   private watchHold(cause: Cause): void {
     const scale = this.inputScale();
-    const end = this.first;
-    for (let from = this.form.carried.holdsUntil(); from < end && this.first === end; from += 4 * scale) {
+    const end = this.ending.tau;
+    for (let from = this.form.carried.holdsUntil(); from < end && this.ending.tau === end; from += 4 * scale) {
       const to = Math.min(end, from + 4 * scale);
       this.holdWatch.sign = 1;
       this.look(this.holdWatch, scale, cause, from, to);
       this.holdWatch.sign = -1;
-      this.look(this.holdWatch, scale, cause, from, Math.min(to, this.first));
+      this.look(this.holdWatch, scale, cause, from, Math.min(to, this.ending.tau));
       if (this.outOfWork) return;
     }
   }
@@ -168,24 +142,24 @@ export class Stepper {
     this.look(this.baseSlipWatch, this.inputScale(), "contact");
   }
 
-  private look(watched: Watched, scale: number, cause: Cause, from = 0, to = this.first): void {
-    const tau = firstZero(watched, from, to, scale, this.work, to === this.first ? this.blur : 0);
-    if (!(tau <= this.first)) return;
-    this.first = tau;
-    this.cause = cause;
+  private look(watched: Watched, scale: number, cause: Cause, from = 0, to = this.ending.tau): void {
+    const tau = firstZero(watched, from, to, scale, this.work, to === this.ending.tau ? this.blur : 0);
+    if (!(tau <= this.ending.tau)) return;
+    this.ending.tau = tau;
+    this.ending.cause = cause;
   }
 
-  /** Moves the stance by τ along its closed form and locates the inputs there. */
+  /** Moves the stance by τ along its segment and locates the inputs there. */
   private carry(s: Stance, tau: number): void {
     const { form } = this;
     let at = tau;
-    if (form.form === "slip") {
-      form.oscillation.evaluateSlip(at);
-      s.position = form.oscillation.position;
-      s.velocity = form.oscillation.velocity;
-      s.slip = form.oscillation.slip;
+    if (form.kind === "slip") {
+      form.slip.evaluate(at);
+      s.position = form.slip.position;
+      s.velocity = form.slip.velocity;
+      s.slip = form.slip.slip;
     } else {
-      if (this.cause === "contact" || this.cause === "element") at = this.atLimit(tau);
+      if (this.ending.cause === "contact" || this.ending.cause === "element") at = this.atLimit(tau);
       form.carried.evaluate(at);
       s.position = form.carried.position;
       s.velocity = form.carried.velocity;
@@ -201,7 +175,7 @@ export class Stepper {
   /** Keeps x: y + d, or where it was stuck (moved on by the belt). */
   private place(s: Stance, tau: number, base: number): void {
     const isStuckToBase = this.form.contactCarrier === "base";
-    if (this.form.form === "stick" && !isStuckToBase) s.place += this.problem.beltVelocity * tau;
+    if (this.form.kind === "stick" && !isStuckToBase) s.place += this.problem.beltVelocity * tau;
     else s.place = s.position + (this.problem.isRelative ? 0 : base);
   }
 
@@ -261,7 +235,7 @@ export class Stepper {
     const { form } = this;
     s.velocity = 0;
     if (s.contact === 0) return this.meetBoth(s, 0);
-    if (form.form === "lock") {
+    if (form.kind === "lock") {
       s.acceleration = form.inputs.values.baseAcceleration; // need is exactly what could just be held: d̈ = 0
       s.spring = -Math.sign(form.carried.need) as Phase;
       orientSide(s);
@@ -285,13 +259,13 @@ export class Stepper {
   private pass(s: Stance, end: number, isCorner: boolean): Happening {
     const { form, problem } = this;
     const tau = end - s.t;
-    const wasSlip = form.form === "slip";
-    const isZero = form.form !== "stick" && this.cause === "contact";
+    const wasSlip = form.kind === "slip";
+    const isZero = form.kind !== "stick" && this.ending.cause === "contact";
     const startSpeed = Math.abs(form.inputs.evaluate(0).baseVelocity);
-    if (wasSlip) form.oscillation.evaluateSlip(tau);
+    if (wasSlip) form.slip.evaluate(tau);
     else form.carried.evaluate(tau);
-    const moved = wasSlip ? form.oscillation : form.carried;
-    s.slip = wasSlip ? form.oscillation.slip : this.slipOfCarried();
+    const moved = wasSlip ? form.slip : form.carried;
+    s.slip = wasSlip ? form.slip.slip : this.slipOfCarried();
     s.position = moved.position;
     s.velocity = moved.velocity;
     s.acceleration = NaN;
@@ -311,7 +285,7 @@ export class Stepper {
 
   /** v_r of a stick (0), or of a body locked to its base over ground or belt. */
   private slipOfCarried(): number {
-    if (this.form.form === "stick") return 0;
+    if (this.form.kind === "stick") return 0;
     return this.form.inputs.values.baseVelocity - this.problem.beltVelocity;
   }
 

@@ -1,5 +1,5 @@
-import type { Phase } from "../../result.ts";
-import type { ClosedForm } from "./closed-form.ts";
+import type { Phase } from "../result.ts";
+import type { Form } from "./form.ts";
 import type { Stance } from "./stance.ts";
 import { heldTolerance } from "./watch.ts";
 
@@ -7,7 +7,7 @@ import { heldTolerance } from "./watch.ts";
  * The second set-valued element, S = ρ k |d| sgn(ḋ) of displacement-proportional damping: chooses the quadrant (signs of ḋ
  * and d just after s.t), or the lock at ḋ = 0. The inputs are located at s.t. Without the element both signs read 1.
  */
-export function orient(form: ClosedForm, s: Stance): void {
+export function orient(form: Form, s: Stance): void {
   if (!form.hasElement) {
     s.spring = 1;
     s.side = 1;
@@ -26,14 +26,14 @@ export function orientSide(s: Stance): void {
 }
 
 /** 0 where a stuck body keeps its deflection (both elements hold together), else the sign of ḋ = u̇ − ẏ. */
-function springOfStick(form: ClosedForm, s: Stance): Phase {
+function springOfStick(form: Form, s: Stance): Phase {
   if (form.isCarriedWithBase()) return 0;
   if (s.velocity !== 0) return Math.sign(s.velocity) as Phase;
   return (-Math.sign(form.inputs.evaluate(0).baseAcceleration) || 1) as Phase;
 }
 
 /** At ḋ = 0 in a slip: 0 where |need| ≤ ρ k |d|, else the side of the force that cannot be held. */
-function springOfSlip(form: ClosedForm, s: Stance): Phase {
+function springOfSlip(form: Form, s: Stance): Phase {
   s.spring = 0;
   form.take(s);
   form.carried.evaluate(0);
@@ -46,7 +46,7 @@ function springOfSlip(form: ClosedForm, s: Stance): Phase {
  * m a ∈ F + W − k d − ρk|d| Sgn(a − ÿ) − friction Sgn(a − ü), which is monotone in a and so has one solution: stuck
  * (a = ü), locked to the base (a = ÿ), or a slip of both with the signs that its own a confirms. Sets `contact` and `spring`.
  */
-export function chooseBoth(form: ClosedForm, s: Stance): void {
+export function chooseBoth(form: Form, s: Stance): void {
   const { inertia, stiffness } = form.problem;
   const v = form.inputs.evaluate(0);
   const carrier = form.contactCarrier === "base" ? v.baseAcceleration : 0;

@@ -1,45 +1,51 @@
-import type { Problem } from "../../scenario/problem.ts";
-import { Inputs } from "../inputs.ts";
+import type { Problem } from "../scenario/problem.ts";
+import { Inputs } from "./inputs.ts";
 import { Carried, type Carrier } from "./carried.ts";
-import { Oscillation } from "./oscillation.ts";
+import type { Slip } from "./slip.ts";
 import type { Stance } from "./stance.ts";
 
-/** Which of the three forms a segment has: a slip; a slip with ḋ held at 0 by the spring's own element; a stick. */
-export type Form = "slip" | "lock" | "stick";
+/** Which of the three kinds a segment is of: a slip; a slip with ḋ held at 0 by the spring's own element; a stick. */
+export type Kind = "slip" | "lock" | "stick";
 
-/** The closed forms of one problem, set up for one segment at a time. */
-export class ClosedForm {
+/** Makes the method's slip for a problem. */
+export type SlipMaker = (problem: Problem, inputs: Inputs) => Slip;
+
+/** How one problem's segments go, set up for one segment at a time. */
+export class Form {
   readonly inputs: Inputs;
-  readonly oscillation: Oscillation;
+  readonly slip: Slip;
   readonly carried = new Carried();
   /** c + c_h. */
   readonly viscous: number;
   /** ρ k, the slope of the second set-valued element, N/m. */
   readonly elementSlope: number;
   readonly hasElement: boolean;
-  /** μs r and μk r: force per N of pressing. */
+  /** μs r, and μ r right after break-away: force per N of pressing. */
   readonly grip: number;
   readonly slide: number;
   readonly contactCarrier: Carrier;
-  form: Form = "slip";
+  kind: Kind = "slip";
 
   private readonly body = { inertia: 0, stiffness: 0, viscous: 0 };
   private readonly friction = { slide: 0, grip: 0, constant: 0 };
 
-  constructor(readonly problem: Problem) {
+  constructor(
+    readonly problem: Problem,
+    makeSlip: SlipMaker,
+  ) {
     this.inputs = new Inputs(problem);
     this.viscous = problem.viscous + problem.solid.viscous;
     this.elementSlope = problem.solid.proportional * problem.stiffness;
     this.hasElement = this.elementSlope > 0;
     this.grip = problem.law.atRest * problem.radius;
-    this.slide = (problem.law.constant ?? NaN) * problem.radius;
+    this.slide = problem.law.atOnset * problem.radius;
     this.contactCarrier = problem.counterface;
-    this.oscillation = new Oscillation(this.inputs.omega.length + 1, problem.counterface, problem.beltVelocity);
+    this.slip = makeSlip(problem, this.inputs);
     this.body.inertia = problem.inertia;
     this.body.viscous = this.viscous;
   }
 
-  /** Locates the inputs at the stance and makes its closed form ready; `oscillation` or `carried` then evaluate in τ. */
+  /** Locates the inputs at the stance and makes its segment ready; `slip` or `carried` then evaluate in τ. */
   begin(s: Stance): void {
     this.inputs.locate(s.t);
     this.take(s);
@@ -51,7 +57,7 @@ export class ClosedForm {
     if (s.contact === 0) return this.takeStick(s);
     const slide = s.contact * this.slide;
     if (s.spring === 0) {
-      this.form = "lock";
+      this.kind = "lock";
       this.friction.slide = slide;
       this.friction.grip = 0;
       this.friction.constant = this.elementSlope * Math.abs(s.position);
@@ -59,9 +65,9 @@ export class ClosedForm {
       this.carried.begin(inputs, "base", 0, this.body, this.friction, s.position);
       return;
     }
-    this.form = "slip";
+    this.kind = "slip";
     this.body.stiffness = this.stiffnessOf(s);
-    this.oscillation.begin(inputs, this.body, slide, s);
+    this.slip.begin(inputs, this.body, s);
   }
 
   /** k (1 ± ρ) by the quadrant, or k where the element holds or is absent. */
@@ -84,7 +90,7 @@ export class ClosedForm {
   }
 
   private takeStick(s: Stance): void {
-    this.form = "stick";
+    this.kind = "stick";
     const isHeldByBoth = s.spring === 0;
     this.friction.slide = 0;
     this.friction.grip = this.grip;

@@ -1,0 +1,89 @@
+import { firstZero, type Watched, type Work } from "../../numerics/first-zero.ts";
+import type { Problem } from "../../scenario/problem.ts";
+import type { Inputs } from "../inputs.ts";
+import type { BodyValues, Cause, Ending, Slip, SlipWatches } from "../slip.ts";
+import { newStance, type Stance } from "../stance.ts";
+import { Oscillation } from "./oscillation.ts";
+import { SlipWatch, StretchRateWatch, StretchWatch } from "./slip-watch.ts";
+
+/** A slip by closed form, its end found by `firstZero`, which cannot miss it. Friction is one constant while it lasts. */
+export class ExactSlip implements Slip {
+  private readonly oscillation: Oscillation;
+  private readonly slipWatch: SlipWatch;
+  private readonly stretchWatch: StretchWatch;
+  private readonly stretchRateWatch: StretchRateWatch;
+  private readonly slide: number;
+  private readonly stance = newStance();
+
+  constructor(
+    problem: Problem,
+    private readonly inputs: Inputs,
+  ) {
+    const { counterface, beltVelocity } = problem;
+    this.slide = (problem.law.constant ?? NaN) * problem.radius;
+    this.oscillation = new Oscillation(inputs.omega.length + 1, counterface, beltVelocity);
+    this.slipWatch = new SlipWatch(this.oscillation, inputs, counterface);
+    this.stretchWatch = new StretchWatch(this.oscillation);
+    this.stretchRateWatch = new StretchRateWatch(this.oscillation);
+  }
+
+  get position(): number {
+    return this.oscillation.position;
+  }
+
+  get velocity(): number {
+    return this.oscillation.velocity;
+  }
+
+  get acceleration(): number {
+    return this.oscillation.acceleration;
+  }
+
+  get slip(): number {
+    return this.oscillation.slip;
+  }
+
+  begin(inputs: Inputs, body: BodyValues, stance: Stance): void {
+    Object.assign(this.stance, stance);
+    this.oscillation.begin(inputs, body, stance.contact * this.slide, stance);
+  }
+
+  follow(ending: Ending, watches: SlipWatches, blur: number, work: Work): void {
+    const { stance } = this;
+    const look = (watched: Watched, cause: Cause): void => {
+      const tau = firstZero(watched, 0, ending.tau, this.scale, work, blur);
+      if (!(tau <= ending.tau)) return;
+      ending.tau = tau;
+      ending.cause = cause;
+    };
+    this.slipWatch.sign = stance.contact;
+    look(this.slipWatch, "contact");
+    if (watches.side) {
+      this.stretchWatch.sign = stance.side;
+      look(this.stretchWatch, "side");
+    }
+    if (!watches.element) return;
+    this.stretchRateWatch.sign = stance.spring;
+    look(this.stretchRateWatch, "element");
+  }
+
+  evaluate(tau: number): void {
+    this.oscillation.evaluateSlip(tau);
+  }
+
+  panel(tau: number): number {
+    const { fast, slow, fastDies } = this.oscillation.freeRates;
+    const rate = Math.max(this.inputs.fastest(), tau < fastDies ? fast : slow);
+    return rate > 0 ? 1 / rate : Infinity;
+  }
+
+  isSteady(tau: number): boolean {
+    const { slow, fastDies } = this.oscillation.freeRates;
+    return tau >= fastDies && slow === 0;
+  }
+
+  private get scale(): number {
+    const rate = Math.max(this.oscillation.freeRates.fast, this.inputs.fastest());
+    return rate > 0 ? 2 / rate : Infinity;
+  }
+}
