@@ -115,7 +115,6 @@ describe("autosave", () => {
     await sent[0].reply({ kind: "conflict", current });
     expect(last()).toEqual({ kind: "conflict", current });
     autosave.want(damped(500));
-    autosave.flush();
     await pass(10_000);
     expect(sent).toHaveLength(1);
     autosave.decide(current, damped(500));
@@ -156,10 +155,19 @@ describe("autosave", () => {
     expect(sent[1]).toMatchObject({ viscous: 400, version: 3 });
   });
 
-  it("sends what waits at once when the page is left", async () => {
+  it("sends what waits at once when the page is left, and does not try again", async () => {
     autosave.want(damped(400));
-    autosave.flush();
+    autosave.close();
     await pass(0);
     expect(sent).toMatchObject([{ viscous: 400 }]);
+    await sent[0].reply({ kind: "unreachable" });
+    await pass(60_000);
+    expect(sent).toHaveLength(1);
+  });
+
+  it("sends nothing when the page is left with everything kept", async () => {
+    autosave.close();
+    await pass(60_000);
+    expect(sent).toEqual([]);
   });
 });

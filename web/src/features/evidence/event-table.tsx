@@ -1,6 +1,6 @@
 import type { MotionEvent } from "@restband/solver";
 import { useVirtualizer } from "@tanstack/react-virtual";
-import { useRef } from "react";
+import { useRef, type ReactNode, type RefObject } from "react";
 import { classNames } from "../../components/class-names.ts";
 import { announce } from "../../components/status.tsx";
 import { formatNumber } from "../../format/format-number.ts";
@@ -16,25 +16,26 @@ interface EventTableProps {
 }
 
 const ROW = 34;
+/** Up to here all rows are there; of longer lists only those in sight. */
+const ALL_UP_TO = 200;
 
-/** Every event of the run. It scrolls within itself; of a long list only the rows in sight are there. */
+/** Every event of the run. It scrolls within itself. */
 export function EventTable({ view, t, onMove }: EventTableProps) {
   const scroller = useRef<HTMLDivElement>(null);
   const { events } = view.result;
   const columns = columnsOf(view);
-  const rows = useVirtualizer({
-    count: events.length,
-    getScrollElement: () => scroller.current,
-    estimateSize: () => ROW,
-    overscan: 12,
-    initialRect: { width: 800, height: 360 },
-  });
-  const current = currentIndex(events, t);
-  const copy = (): void =>
-    void navigator.clipboard.writeText(eventsCsv(view)).then(
-      () => announce(`${events.length} events copied.`),
-      () => announce("The browser does not allow copying here."),
-    );
+  const current = events.findIndex((event) => event.t === t);
+  const row = (index: number, top?: number): ReactNode => (
+    <EventRow
+      key={index}
+      event={events[index]}
+      index={index}
+      top={top}
+      columns={columns}
+      isCurrent={index === current}
+      onMove={onMove}
+    />
+  );
   return (
     <div>
       <div
@@ -45,40 +46,53 @@ export function EventTable({ view, t, onMove }: EventTableProps) {
         className="max-h-[352px] overflow-auto border-b border-edge"
       >
         <table className="grid w-full min-w-[640px]" aria-rowcount={events.length + 1}>
-          <thead className="sticky top-0 z-10 grid bg-paper">
-            <tr className={rowClass(columns.length)}>
-              <th scope="col" className="text-left text-13 font-semibold text-quiet">
-                Event
-              </th>
-              {columns.map(({ head }) => (
-                <th key={head} scope="col" className="text-right text-13 font-semibold text-quiet">
-                  {head}
-                </th>
-              ))}
-            </tr>
-          </thead>
-          <tbody className="relative grid" style={{ height: rows.getTotalSize() }}>
-            {rows.getVirtualItems().map(({ index, start }) => (
-              <EventRow
-                key={index}
-                event={events[index]}
-                index={index}
-                top={start}
-                columns={columns}
-                isCurrent={index === current}
-                onMove={onMove}
-              />
-            ))}
-          </tbody>
+          <EventHead columns={columns} />
+          {events.length > ALL_UP_TO ? (
+            <VirtualRows count={events.length} scroller={scroller} row={row} />
+          ) : (
+            <tbody className="grid">{events.map((_, index) => row(index))}</tbody>
+          )}
         </table>
       </div>
-      <p className="mt-2 text-13 text-quiet">
-        {formatNumber(events.length, 7)} events ·{" "}
-        <button type="button" className="link" onClick={copy}>
-          copy as CSV
-        </button>
-      </p>
+      <EventFoot view={view} />
     </div>
+  );
+}
+
+interface VirtualRowsProps {
+  count: number;
+  scroller: RefObject<HTMLDivElement | null>;
+  row: (index: number, top: number) => ReactNode;
+}
+
+function VirtualRows({ count, scroller, row }: VirtualRowsProps) {
+  const rows = useVirtualizer({
+    count,
+    getScrollElement: () => scroller.current,
+    estimateSize: () => ROW,
+    overscan: 12,
+  });
+  return (
+    <tbody className="relative grid" style={{ height: rows.getTotalSize() }}>
+      {rows.getVirtualItems().map(({ index, start }) => row(index, start))}
+    </tbody>
+  );
+}
+
+function EventHead({ columns }: { columns: readonly EventColumn[] }) {
+  return (
+    <thead className="sticky top-0 z-10 grid bg-paper">
+      <tr className={rowClass(columns.length)}>
+        <th scope="col" className="pb-1 text-left text-13 font-semibold text-quiet">
+          Event
+        </th>
+        {columns.map(({ head }) => (
+          <th key={head} scope="col" className="pb-1 text-right text-13 font-semibold text-quiet">
+            {head}
+          </th>
+        ))}
+      </tr>
+    </thead>
   );
 }
 
@@ -91,7 +105,8 @@ const rowClass = (columns: number): string =>
 interface EventRowProps {
   event: MotionEvent;
   index: number;
-  top: number;
+  /** Where a row stands that is laid out by its place in a long list, px. */
+  top: number | undefined;
   columns: readonly EventColumn[];
   isCurrent: boolean;
   onMove: (t: number) => void;
@@ -102,7 +117,12 @@ function EventRow({ event, index, top, columns, isCurrent, onMove }: EventRowPro
     <tr
       aria-rowindex={index + 2}
       aria-current={isCurrent || undefined}
-      className={classNames(rowClass(columns.length), "absolute inset-x-0 text-15", isCurrent && "bg-tint")}
+      className={classNames(
+        rowClass(columns.length),
+        "text-15",
+        top !== undefined && "absolute inset-x-0",
+        isCurrent && "bg-tint",
+      )}
       style={{ top, height: ROW }}
     >
       <th scope="row" className="truncate text-left font-normal">
@@ -120,7 +140,19 @@ function EventRow({ event, index, top, columns, isCurrent, onMove }: EventRowPro
   );
 }
 
-/** The row of the event the cursor stands on; −1 in between. */
-function currentIndex(events: readonly MotionEvent[], t: number): number {
-  return events.findIndex((event) => event.t === t);
+function EventFoot({ view }: { view: RunView }) {
+  const { events } = view.result;
+  const copy = (): void =>
+    void navigator.clipboard.writeText(eventsCsv(view)).then(
+      () => announce(`${events.length} events copied.`),
+      () => announce("The browser does not allow copying here."),
+    );
+  return (
+    <p className="mt-2 text-13 text-quiet">
+      {formatNumber(events.length, 7)} events ·{" "}
+      <button type="button" className="link" onClick={copy}>
+        copy as CSV
+      </button>
+    </p>
+  );
 }

@@ -64,8 +64,7 @@ export function StatementGroup({ group, remarks }: StatementGroupProps) {
         aria-controls={isForm ? formId : undefined}
         onClick={() => setForm(!isForm)}
       >
-        {isForm ? "the sentence" : "all fields"}
-        <span className="sr-only"> of {group.name}</span>
+        {isForm ? "the sentence" : "all fields"} <span className="sr-only">of {group.name}</span>
       </button>
     </div>
   );

@@ -8,12 +8,12 @@ const STEPS_KEPT = 200;
 /** A draft of a scenario that is valid. */
 export function openDraft(scenario: Scenario, units: Sheet["units"] = unitsEntered(scenario)): Draft {
   const sheet: Sheet = { wanted: scenario, unread: {}, units };
-  return { sheet, inForce: scenario, faults: [], past: [], future: [], merging: null };
+  return { sheet, inForce: scenario, faults: [], past: [], future: [], merging: null, anchor: scenario };
 }
 
 /** A draft with some values as they were left, refused or unread. */
 export function resumeDraft(inForce: Scenario, sheet: Sheet): Draft {
-  return { sheet, ...checkSheet(sheet, inForce), past: [], future: [], merging: null };
+  return { sheet, ...checkSheet(sheet, inForce), past: [], future: [], merging: null, anchor: inForce };
 }
 
 /** All that can happen to a draft. Pure: the same action on the same draft gives the same draft. */
@@ -40,28 +40,31 @@ export function draftReducer(draft: Draft, action: DraftAction): Draft {
 function step(draft: Draft, sheet: Sheet, merging: string | null): Draft {
   const isSameStep = merging !== null && merging === draft.merging;
   const past = isSameStep ? draft.past : [...draft.past, draft.sheet].slice(-STEPS_KEPT);
-  return { sheet, ...checkSheet(sheet, draft.inForce), past, future: [], merging };
+  const anchor = isSameStep ? draft.anchor : draft.inForce;
+  return { sheet, ...checkSheet(sheet, anchor), past, future: [], merging, anchor };
 }
 
 function goBack(draft: Draft): Draft {
   const sheet = draft.past[draft.past.length - 1];
-  if (!sheet) return draft;
-  const future = [draft.sheet, ...draft.future];
-  return { sheet, ...checkSheet(sheet, draft.inForce), past: draft.past.slice(0, -1), future, merging: null };
+  return sheet ? restored(draft, sheet, draft.past.slice(0, -1), [draft.sheet, ...draft.future]) : draft;
 }
 
 function goForward(draft: Draft): Draft {
   const [sheet, ...future] = draft.future;
-  if (!sheet) return draft;
-  return { sheet, ...checkSheet(sheet, draft.inForce), past: [...draft.past, draft.sheet], future, merging: null };
+  return sheet ? restored(draft, sheet, [...draft.past, draft.sheet], future) : draft;
+}
+
+function restored({ inForce }: Draft, sheet: Sheet, past: readonly Sheet[], future: readonly Sheet[]): Draft {
+  return { sheet, ...checkSheet(sheet, inForce), past, future, merging: null, anchor: inForce };
 }
 
 type Edit = Extract<DraftAction, { type: "set" | "leave-unread" }>;
 
 function edited(sheet: Sheet, action: Edit): Sheet {
   if (action.type === "leave-unread") {
-    const { path, text, message } = action;
-    return { ...sheet, unread: { ...sheet.unread, [path]: { text, message } } };
+    const { path, text, message, value } = action;
+    const wanted = value === undefined ? sheet.wanted : writePath(sheet.wanted, path, value);
+    return { ...sheet, wanted, unread: { ...sheet.unread, [path]: { text, message } } };
   }
   const unread = without(sheet.unread, action.clears ?? action.path);
   const wanted = withEntered(writePath(sheet.wanted, action.path, action.value), action.path, action.entered);

@@ -26,13 +26,16 @@ export interface Draft {
   readonly future: readonly Sheet[];
   /** While a value is typed or dragged, its path: all of that is one step of undo. */
   readonly merging: string | null;
+  /** What was in force when that step began: a value refused at its end falls back to it, not to one on the way. */
+  readonly anchor: Scenario;
 }
 
 /** One thing a person does to a draft. */
 export type DraftAction =
   /** `clears`: where the text that stood for the value is kept, if not at its own path. */
   | { type: "set"; path: string; value: unknown; unit?: string; entered?: string; clears?: string }
-  | { type: "leave-unread"; path: string; text: string; message: string }
+  /** `value`: what stood there before anything was typed, and stands again. */
+  | { type: "leave-unread"; path: string; text: string; message: string; value?: unknown }
   | { type: "show-in"; path: string; unit: string }
   | { type: "change"; apply: (scenario: Scenario) => Scenario; rename?: (path: string) => string | null }
   | { type: "settle" }

@@ -31,7 +31,9 @@ export interface NumberEntry {
 export function useNumberEntry(path: string, field: PathField, empty?: unknown): NumberEntry {
   const { draft, dispatch } = useDraftContext();
   const { wanted, unread, units } = draft.sheet;
-  const [typing, setTyping] = useState<{ text: string; value: number | undefined } | null>(null);
+  const [typing, setTyping] = useState<{ text: string; value: number | undefined; before: number | undefined } | null>(
+    null,
+  );
   const measure = measureOf(wanted, field);
   const value = numberAt(wanted, path);
   const unit = unitTyped(units[path], measure) ?? unitFor(value ?? field.initial, measure);
@@ -46,14 +48,13 @@ export function useNumberEntry(path: string, field: PathField, empty?: unknown):
     dispatch({ type: "set", path, value: next, unit: nextUnit.label, entered });
   };
   const type = (typed: string): void => {
-    if (typed.trim() === "" && empty !== undefined) {
-      setTyping({ text: typed, value: undefined });
-      return dispatch({ type: "set", path, value: leftOut(empty) });
-    }
-    const read = parseTyped(typed, measure, unit);
-    setTyping({ text: typed, value: read.kind === "value" ? read.value : value });
-    if (read.kind === "value") set(read.value, read.unit);
-    else dispatch({ type: "leave-unread", path, text: typed, message: read.message });
+    const before = isTyping ? typing.before : value;
+    const read = typed.trim() === "" && empty !== undefined ? null : parseTyped(typed, measure, unit);
+    if (read === null) dispatch({ type: "set", path, value: leftOut(empty) });
+    else if (read.kind === "value") set(read.value, read.unit);
+    // "1,200" passes by 1,2: what cannot be read leaves the value from before, not one on the way.
+    else dispatch({ type: "leave-unread", path, text: typed, message: read.message, value: before });
+    setTyping({ text: typed, value: read?.kind === "value" ? read.value : read ? before : undefined, before });
   };
   return {
     text,

@@ -48,6 +48,7 @@ export class Autosave {
   private wanted: Scenario;
   private timer: ReturnType<typeof setTimeout> | undefined;
   private isSending = false;
+  private isClosed = false;
   /** A conflict waits for its decision. */
   private isHalted = false;
   private lostSince: Date | null = null;
@@ -68,9 +69,15 @@ export class Autosave {
     this.schedule(QUIET);
   }
 
-  /** Sends what is waiting at once. */
-  flush(): void {
+  /** The page is there: what waits is sent in its time, and tried again. */
+  open(): void {
+    this.isClosed = false;
+  }
+
+  /** The page is left: what waits is sent at once and once only. What then fails is in the browser's own copy. */
+  close(): void {
     if (!this.isKept()) void this.send();
+    this.isClosed = true;
   }
 
   /** A conflict is decided: `current` is the base from now on, and `scenario` what is wanted. */
@@ -94,6 +101,7 @@ export class Autosave {
 
   private schedule(delay: number): void {
     clearTimeout(this.timer);
+    if (this.isClosed) return;
     this.timer = setTimeout(() => void this.send(), delay);
   }
 

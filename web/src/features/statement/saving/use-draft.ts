@@ -102,7 +102,10 @@ function useAutosave(
         save: (scenario, version) => save.current?.(scenario, version) ?? Promise.resolve({ kind: "unreachable" }),
       }),
   );
-  useEffect(() => () => autosave.flush(), [autosave]);
+  useEffect(() => {
+    autosave.open();
+    return () => autosave.close();
+  }, [autosave]);
   return autosave;
 }
 
