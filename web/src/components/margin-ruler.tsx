@@ -24,7 +24,10 @@ const BAR = 6;
 /** A limit as a notch, the value as a needle: a solid bar where the limit is kept, cross-hatched where it is broken. */
 export function MarginRuler({ min, max, value, verdict, from, to, format, label }: MarginRulerProps) {
   const [ref, width] = useWidth<SVGSVGElement>(360);
-  const x = (at: number): number => ((Math.min(Math.max(at, from), to) - from) / (to - from)) * (width - 2) + 1;
+  const x = (at: number): number => {
+    const share = (Math.min(Math.max(at, from), to) - from) / (to - from);
+    return Math.round(100 * (share * (width - 2) + 1)) / 100;
+  };
   const [keptFrom, keptTo] = [x(min ?? from), x(max ?? to)];
   const bounds = [min, max].filter((bound) => bound !== undefined);
   return (

@@ -1,3 +1,4 @@
+import { jsonText } from "@restband/solver";
 import type { SolverJob, SolverReply } from "./solver-job.ts";
 
 /** Runs kept at most, and samples in all of them: about 40 MB. */
@@ -7,7 +8,7 @@ const kept = new Map<string, SolverReply>();
 
 /** The identity of a run: all that the solver reads; title, purpose and origins change no result. */
 export function runKey({ scenario, options }: SolverJob): string {
-  return JSON.stringify([{ ...scenario, title: "", purpose: "", origins: {} }, options]);
+  return jsonText([{ ...scenario, title: "", purpose: "", origins: {} }, options], "sorted");
 }
 
 /** A reply computed before, by its key; looked at again it stays longer. */
