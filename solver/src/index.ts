@@ -25,4 +25,17 @@ export { simulate } from "./simulate.ts";
 export { solverVersion } from "./version.ts";
 export { quantities, quantityOf } from "./quantities/index.ts";
 export type { Quantity } from "./quantities/quantity.ts";
+export {
+  compareWithTextbook,
+  type TextbookComparison,
+  type TextbookMismatch,
+  type TextbookPage,
+  type TextbookSymbol,
+} from "./textbook/compare-with-textbook.ts";
+export { textbookCompanions } from "./textbook/index.ts";
+export type { TextbookSettings } from "./textbook/textbook-case.ts";
+export type { TextbookCompanion } from "./textbook/textbook-companion.ts";
 export { agreementOf, compareResults, type Agreement, type Comparison, type Deviation } from "./agreement.ts";
+export { exploreRanges, type RangeReport, type RangeVerdict } from "./explore/range-verdict.ts";
+export type { BoundaryValue, PointReply, RangeStep } from "./explore/range-verdict-boundary.ts";
+export { planRanges, type KnownRange } from "./explore/range-verdict-plan.ts";
