@@ -78,10 +78,13 @@ function Refused({ message }: { message: string }) {
   );
 }
 
-/** "now" alone, or with "before this edit" under it while a value is changed. */
+/**
+ * "now" alone, or with "before this edit" under it while a value is changed. Its room is always there: a press that ends
+ * an edit would else miss its button, moved up before the finger is lifted.
+ */
 function Strips({ computed, before }: { computed: Computed; before: Computed | null }) {
   return (
-    <div className="mt-5 grid max-w-[640px] gap-y-2">
+    <div className="mt-5 grid min-h-12 max-w-[640px] content-start gap-y-2">
       <StripRow label="now" computed={computed} isOnly={before === null} />
       {before && <StripRow label="before this edit" computed={before} isFaint />}
     </div>

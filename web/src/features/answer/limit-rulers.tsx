@@ -13,7 +13,7 @@ export function LimitRulers({ scenario, limits }: { scenario: Scenario; limits: 
   if (limits.length === 0) return null;
   const asEntered = hasRanges(scenario);
   return (
-    <ul className="mt-6 border-t border-line" aria-label="Limits">
+    <ul className="mt-3 border-t border-line" aria-label="Limits">
       {limits.map((limit, i) => (
         <LimitRuler key={`${limit.quantity}${i}`} limit={limit} scenario={scenario} asEntered={asEntered} />
       ))}

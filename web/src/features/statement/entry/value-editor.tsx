@@ -45,7 +45,8 @@ export function ValueEditor({ path, field, nib, onClose }: ValueEditorProps) {
     <div
       role="group"
       aria-label={`Change ${field.label}`}
-      className="relative mt-3 mb-4 w-fit max-w-full min-w-[min(100%,480px)] rounded border-[1.5px] border-ink bg-raised p-4 desk:px-6"
+      className="relative mt-3 mb-4 w-fit max-w-full rounded border-[1.5px] border-ink bg-raised p-4 desk:px-6"
+      style={{ minWidth: `min(100%, ${Math.max(480, nib + 32)}px)` }}
       onKeyDown={press}
     >
       <Nib at={nib} />
