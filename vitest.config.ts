@@ -26,7 +26,7 @@ export default defineConfig({
         globalSetup: ["test/support/database-setup.ts"],
       }),
       project("journeys", ["test/journeys/**/*.test.ts"], {
-        globalSetup: ["test/support/database-setup.ts"],
+        globalSetup: ["test/support/build-setup.ts", "test/support/database-setup.ts"],
         testTimeout: minutes(3),
         hookTimeout: minutes(2),
         fileParallelism: false,

@@ -19,7 +19,7 @@ export interface TestServer {
   stop(): Promise<void>;
 }
 
-/** The server on a free port, with a database of its own unless the settings name one. */
+/** The server on a free port (or the one asked for), with a database of its own unless the settings name one. */
 export async function startTestServer(settings: Partial<Config> = {}): Promise<TestServer> {
   const own = settings.databaseUrl ? null : await createTestDatabase();
   const config: Config = {
@@ -36,7 +36,7 @@ export async function startTestServer(settings: Partial<Config> = {}): Promise<T
   const log: string[] = [];
   const database = openDatabase(config.databaseUrl);
   const server = createServer(createApp(config, database, createLog("info", { write: (line) => void log.push(line) })));
-  await new Promise<void>((resolve) => server.listen(0, config.host, resolve));
+  await new Promise<void>((resolve) => server.listen(config.port, config.host, resolve));
   const address = `http://127.0.0.1:${(server.address() as AddressInfo).port}`;
   const stop = async () => {
     server.closeAllConnections();

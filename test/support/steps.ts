@@ -1,0 +1,72 @@
+import type { Locator, Page } from "playwright-core";
+import { expect } from "vitest";
+import { password } from "./people.ts";
+
+/** What is read on a page, its gaps made plain spaces. */
+export async function textOf(locator: Locator): Promise<string> {
+  return ((await locator.textContent()) ?? "").replace(/\s+/g, " ").trim();
+}
+
+/** Expects the text of something, waiting for it. */
+export const expectText = (locator: Locator) => expect.poll(() => textOf(locator), { timeout: 15_000 });
+
+/** The answer: the one sentence at the head of a scenario. */
+export const answerOf = (page: Page): Locator => page.getByRole("heading", { level: 1 });
+
+/** The state of saving, in the header. */
+export const savingOf = (page: Page): Locator => page.getByRole("banner").getByRole("status");
+
+/** A value in its sentence, which a press opens. */
+export const valueOf = (page: Page, label: string): Locator =>
+  page.getByRole("button", { name: new RegExp(`^${label}: `) });
+
+export const editorOf = (page: Page, label: string): Locator => page.getByRole("group", { name: `Change ${label}` });
+
+/** A figure beside the plots, at the cursor, by the name above it. */
+export const readingOf = (page: Page, name: string): Locator => page.locator(`dt:text-is("${name}") + dd`);
+
+export async function signIn(page: Page, email: string): Promise<void> {
+  await page.goto("/");
+  await page.getByLabel("E-mail").fill(email);
+  await page.getByLabel("Password", { exact: true }).fill(password);
+  await page.getByRole("button", { name: "Sign in" }).click();
+  await page.getByRole("heading", { level: 1, name: /project/ }).waitFor();
+}
+
+/** Opens a value of the sentence and types another. */
+export async function change(page: Page, label: string, text: string): Promise<void> {
+  await valueOf(page, label).click();
+  await fill(page, label, text);
+}
+
+/** Types into the editor that is open and closes it. */
+export async function fill(page: Page, label: string, text: string): Promise<void> {
+  const editor = editorOf(page, label);
+  await editor.getByRole("textbox", { name: label, exact: true }).fill(text);
+  await editor.getByRole("button", { name: "Done" }).click();
+  await editor.waitFor({ state: "detached" });
+}
+
+/** Chooses another word of a sentence. */
+export async function choose(page: Page, label: string, word: string): Promise<void> {
+  await page.getByRole("combobox", { name: label, exact: true }).selectOption({ label: word });
+}
+
+/** One row of the event table: what happened, and its figures in the table's units. */
+export interface EventRow {
+  readonly event: string;
+  readonly figures: readonly number[];
+}
+
+export async function eventRows(page: Page): Promise<EventRow[]> {
+  const rows = await page.locator("[aria-label=Events] tbody tr").evaluateAll((elements) =>
+    elements.map((row) => ({
+      event: row.querySelector("th button")?.textContent ?? "",
+      cells: [...row.querySelectorAll("td")].map((cell) => cell.textContent ?? ""),
+    })),
+  );
+  return rows.map(({ event, cells }) => ({ event, figures: cells.map(figureOf) }));
+}
+
+/** A figure as it is printed: with narrow gaps and a true minus. */
+export const figureOf = (text: string): number => Number(text.replace(/\s/g, "").replace("\u2212", "-"));
