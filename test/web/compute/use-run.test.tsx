@@ -4,7 +4,7 @@ import { beforeEach, describe, expect, it, vi } from "vitest";
 import { recall, remember, runKey } from "../../../web/src/compute/run-cache.ts";
 import type { SolverJob } from "../../../web/src/compute/solver-job.ts";
 import { useRun } from "../../../web/src/compute/use-run.ts";
-import { useScan } from "../../../web/src/compute/use-scan.ts";
+import { nextPlace, useScan, type ScanPoint } from "../../../web/src/compute/use-scan.ts";
 import { creepFeed, variant } from "../support/scenarios.ts";
 
 interface HandRun {
@@ -134,17 +134,34 @@ describe("the cache of runs", () => {
 
 describe("a scan along a scale", () => {
   it("tells outcomes as they come, ends and middle first", async () => {
-    const scenarios = Array.from({ length: 9 }, (_, i) => damped(i + 1));
-    const { result: hook } = renderHook(() => useScan(scenarios, `scan of mass ${mass}`));
+    const { result: hook } = renderHook(() => useScan((at) => damped(at), `scan of mass ${mass}`));
     expect(hook.current).toEqual([]);
-    await waitFor(() => expect(runs()).toHaveLength(1));
-    await finish(0, "");
-    await waitFor(() => expect(runs()).toHaveLength(2));
-    await finish(1, "");
-    await waitFor(() => expect(runs()).toHaveLength(3));
-    expect(runs().map(({ job }) => job.scenario.body.viscous)).toEqual([1, 9, 5]);
-    expect(hook.current[0]).toBe("stick-slip");
-    expect(hook.current[8]).toBe("stick-slip");
-    expect(hook.current[4]).toBeUndefined();
+    for (const index of [0, 1, 2]) {
+      await waitFor(() => expect(runs()).toHaveLength(index + 1));
+      await finish(index, "");
+    }
+    expect(
+      runs()
+        .map(({ job }) => job.scenario.body.viscous)
+        .slice(0, 3),
+    ).toEqual([0, 1, 0.5]);
+    expect(hook.current).toEqual([
+      { at: 0, outcome: "stick-slip" },
+      { at: 0.5, outcome: "stick-slip" },
+      { at: 1, outcome: "stick-slip" },
+    ]);
+  });
+
+  it("looks at 33 places, then closes in on where the outcome changes", () => {
+    const boundary = 0.6180339;
+    let points: ScanPoint[] = [];
+    for (let at = nextPlace(points); at !== null; at = nextPlace(points)) {
+      const outcome = at < boundary ? "stick-slip" : "smooth-sliding";
+      points = [...points, { at, outcome } as const].sort((a, b) => a.at - b.at);
+    }
+    expect(points).toHaveLength(33 + 6);
+    const after = points.find(({ outcome }) => outcome === "smooth-sliding")?.at ?? 0;
+    expect(after).toBeGreaterThan(boundary);
+    expect(after - boundary).toBeLessThan(1 / 32 / 64);
   });
 });

@@ -1,4 +1,5 @@
 import { describe, expect, it } from "vitest";
+import type { ScanPoint } from "../../../web/src/compute/use-scan.ts";
 import { equivalentsOf } from "../../../web/src/features/statement/entry/equivalents.ts";
 import { nudged } from "../../../web/src/features/statement/entry/nudge.ts";
 import { stretchesOf, ticksOf } from "../../../web/src/features/statement/entry/ruler-scale.ts";
@@ -73,8 +74,13 @@ describe("the drag ruler", () => {
   });
 
   it("joins neighbours of one outcome and puts the boundary half way", () => {
-    const outcomes = ["stick-slip", "stick-slip", undefined, null, "smooth-sliding"] as const;
-    expect(stretchesOf(outcomes, 1)).toEqual([
+    const points: ScanPoint[] = [
+      { at: 0, outcome: "stick-slip" },
+      { at: 0.5, outcome: "stick-slip" },
+      { at: 0.75, outcome: null },
+      { at: 1, outcome: "smooth-sliding" },
+    ];
+    expect(stretchesOf(points, 1)).toEqual([
       { from: -1, to: 0.25, outcome: "stick-slip" },
       { from: 0.25, to: 0.75, outcome: null },
       { from: 0.75, to: 1, outcome: "smooth-sliding" },

@@ -4,27 +4,38 @@ import { recall, remember, runKey } from "./run-cache.ts";
 import type { SolverJob } from "./solver-job.ts";
 import { solverPool } from "./solver-pool.ts";
 
-/** What a run of a scan came to: its outcome, null where there is none (refused, cut off), undefined while it is not known. */
-export type ScanOutcome = Outcome | null | undefined;
+/** What a run of a scan came to, at its place (0…1) on the scale; null where there is no outcome: refused, or cut off. */
+export interface ScanPoint {
+  readonly at: number;
+  readonly outcome: Outcome | null;
+}
 
+/** Equal steps of the scale, a power of two; then each boundary is halved so many times. */
+const STEPS = 32;
+const HALVINGS = 6;
+/** A scan begins when its scale has been left alone for so long. */
 const REST_BEFORE_MS = 250;
 /** Runs that take longer are not repeated along a whole scale. */
 const TOO_LONG_MS = 400;
 
 /**
- * Runs scenarios one after the other, as far apart first, and tells their outcomes as they come. Waits until the list has
- * been left alone for a moment; gives up where single runs take long. `key` stands for the list: the same key, no new scan.
+ * Runs the scenarios of a scale one after the other, as far apart first, then closer and closer about each change of the
+ * outcome. Tells what it has found so far, in the order of the scale; gives up where single runs take long.
+ *
+ * @param scenarioAt the scenario at a place of the scale, 0…1
+ * @param key stands for the scale: with the same key nothing is run again
  */
-export function useScan(scenarios: readonly Scenario[], key: string): readonly ScanOutcome[] {
+export function useScan(scenarioAt: (at: number) => Scenario, key: string): readonly ScanPoint[] {
   const [client] = useState(() => Symbol("scan"));
-  const [scan, setScan] = useState<{ key: string; outcomes: ScanOutcome[] }>({ key: "", outcomes: [] });
+  const [scan, setScan] = useState<{ key: string; points: readonly ScanPoint[] }>({ key, points: [] });
 
   useEffect(() => {
     let isWanted = true;
-    const tell = (outcomes: ScanOutcome[]): void => {
-      if (isWanted) setScan({ key, outcomes: [...outcomes] });
+    const tell = (points: readonly ScanPoint[]): boolean => {
+      if (isWanted) setScan({ key, points });
+      return isWanted;
     };
-    const timer = setTimeout(() => void runAll(client, scenarios, () => isWanted, tell), REST_BEFORE_MS);
+    const timer = setTimeout(() => void runAll(client, scenarioAt, tell), REST_BEFORE_MS);
     return () => {
       isWanted = false;
       clearTimeout(timer);
@@ -34,23 +45,38 @@ export function useScan(scenarios: readonly Scenario[], key: string): readonly S
     // eslint-disable-next-line react-hooks/exhaustive-deps
   }, [client, key]);
 
-  return scan.key === key ? scan.outcomes : [];
+  return scan.key === key ? scan.points : [];
 }
 
+/** Goes on as long as `tell` wants more. */
 async function runAll(
   client: symbol,
-  scenarios: readonly Scenario[],
-  isWanted: () => boolean,
-  tell: (outcomes: ScanOutcome[]) => void,
+  scenarioAt: (at: number) => Scenario,
+  tell: (points: readonly ScanPoint[]) => boolean,
 ): Promise<void> {
-  const outcomes: ScanOutcome[] = scenarios.map(() => undefined);
-  for (const index of spread(scenarios.length)) {
+  let points: readonly ScanPoint[] = [];
+  for (let at = nextPlace(points); at !== null; at = nextPlace(points)) {
     const started = performance.now();
-    outcomes[index] = await outcomeOf(client, scenarios[index]);
-    if (!isWanted()) return;
-    tell(outcomes);
-    if (performance.now() - started > TOO_LONG_MS) return;
+    const point = { at, outcome: await outcomeOf(client, scenarioAt(at)) };
+    points = [...points, point].sort((a, b) => a.at - b.at);
+    if (!tell(points) || performance.now() - started > TOO_LONG_MS) return;
   }
+}
+
+/** Both ends, then the middle of the widest gap; gaps between unlike outcomes go on to be halved. Null when all is known. */
+export function nextPlace(points: readonly ScanPoint[]): number | null {
+  if (points.length < 2) return points.length;
+  let place: number | null = null;
+  let widest = 0;
+  for (let i = 1; i < points.length; i++) {
+    const [left, right] = [points[i - 1], points[i]];
+    const finest = left.outcome === right.outcome ? 1 / STEPS : 1 / STEPS / 2 ** HALVINGS;
+    const gap = right.at - left.at;
+    if (gap <= finest || gap <= widest) continue;
+    widest = gap;
+    place = (left.at + right.at) / 2;
+  }
+  return place;
 }
 
 async function outcomeOf(client: symbol, scenario: Scenario): Promise<Outcome | null> {
@@ -59,11 +85,4 @@ async function outcomeOf(client: symbol, scenario: Scenario): Promise<Outcome | 
   const reply = recall(key) ?? (await solverPool.request(client, job));
   remember(key, reply);
   return reply.kind === "result" ? reply.result.outcome : null;
-}
-
-/** The numbers below `count`, every eighth first, then the ones between: the whole scale shows early. */
-function spread(count: number): number[] {
-  const indices = Array.from({ length: count }, (_, i) => i);
-  const rank = (i: number): number => (i % 8 === 0 ? 0 : i % 4 === 0 ? 1 : i % 2 === 0 ? 2 : 3);
-  return indices.sort((a, b) => rank(a) - rank(b) || a - b);
 }

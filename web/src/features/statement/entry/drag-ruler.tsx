@@ -1,7 +1,7 @@
 import type { Outcome, Scenario } from "@restband/solver";
-import { useMemo, useState } from "react";
+import { useState } from "react";
 import { useWidth } from "../../../components/use-width.ts";
-import { useScan } from "../../../compute/use-scan.ts";
+import { useScan, type ScanPoint } from "../../../compute/use-scan.ts";
 import { runKey } from "../../../compute/run-cache.ts";
 import { formatExactly, formatNumber } from "../../../format/format-number.ts";
 import { outcomeWords } from "../../../format/outcomes.ts";
@@ -22,19 +22,18 @@ interface DragRulerProps {
 
 /** Decades to each side of the value that was there. */
 const REACH = 1.5;
-const POINTS = 33;
 /** Width of the ring, px: the browser keeps it inside the track, so the scale begins and ends half a ring from the edges. */
 const THUMB = 18;
 
 /** A logarithmic scale to drag the value along; beneath it what the body would do at each value. */
 export function DragRuler({ path, before, entry, label }: DragRulerProps) {
   const [ref, width] = useWidth<HTMLDivElement>(440);
-  const outcomes = useOutcomesAlong(path, before);
+  const stretches = stretchesOf(useOutcomesAlong(path, before), REACH);
   const position = Math.log10((entry.value ?? before) / before);
   const x = (at: number): number => THUMB / 2 + ((at + REACH) / (2 * REACH)) * (width - THUMB);
   const inUnit = (si: number): number => fromSi(si, entry.unit);
   return (
-    <div ref={ref} className="relative mt-4 w-full desk:w-[440px]">
+    <div ref={ref} className="relative mt-4 w-full desk:min-w-[480px]">
       <svg width="100%" height={52} className="block overflow-visible" aria-hidden="true">
         {ticksOf(inUnit(before), REACH).map(({ at, value, isLabelled }) => (
           <g key={at}>
@@ -48,7 +47,7 @@ export function DragRuler({ path, before, entry, label }: DragRulerProps) {
         ))}
         <path d={`M0 26H${width}`} className="stroke-edge" />
         <path d={`M${x(0)} 12V40`} className="stroke-ink" strokeDasharray="3 3" />
-        {stretchesOf(outcomes, REACH).map((stretch) => (
+        {stretches.map((stretch) => (
           <Beneath key={stretch.from} stretch={stretch} x={x} />
         ))}
       </svg>
@@ -68,7 +67,7 @@ export function DragRuler({ path, before, entry, label }: DragRulerProps) {
           entry.nudge(event.key === "ArrowUp" ? 1 : -1, event.shiftKey);
         }}
       />
-      <Words stretches={stretchesOf(outcomes, REACH)} before={before} entry={entry} />
+      <Words stretches={stretches} before={before} entry={entry} />
     </div>
   );
 }
@@ -78,19 +77,12 @@ function rounded(value: number, before: number): number {
   return Math.abs(value / before - 1) < 2e-3 ? before : Number(value.toPrecision(3));
 }
 
-/** The outcomes at equal steps of the scale, of the scenario as it was opened with this one value changed. */
-function useOutcomesAlong(path: string, before: number): readonly (Outcome | null | undefined)[] {
+/** What the scenario as it was opened would do with this one value anywhere on the scale. */
+function useOutcomesAlong(path: string, before: number): readonly ScanPoint[] {
   const { draft } = useDraftContext();
   const [opened] = useState<Scenario>(draft.inForce);
-  const scenarios = useMemo(
-    () =>
-      Array.from({ length: POINTS }, (_, i) => {
-        const at = before * 10 ** (-REACH + (2 * REACH * i) / (POINTS - 1));
-        return writePath(opened, path, at);
-      }),
-    [opened, path, before],
-  );
-  return useScan(scenarios, `${path} ${before} ${runKey({ scenario: opened, options: {} })}`);
+  const scenarioAt = (at: number): Scenario => writePath(opened, path, before * 10 ** (REACH * (2 * at - 1)));
+  return useScan(scenarioAt, `${path} ${before} ${runKey({ scenario: opened, options: {} })}`);
 }
 
 const fills: Partial<Record<Outcome, string>> = {
@@ -128,7 +120,7 @@ function Words({ stretches, before, entry }: { stretches: readonly Stretch[]; be
       {told.slice(0, 6).map(({ from, outcome }) => (
         <span key={from}>
           {outcome && outcomeWords[outcome]}
-          {from > -REACH && ` from about ${formatNumber(fromSi(before * 10 ** from, entry.unit), 2)}`}
+          {from > -REACH && ` from about ${formatNumber(fromSi(before * 10 ** from, entry.unit), 3)}`}
         </span>
       ))}
     </p>

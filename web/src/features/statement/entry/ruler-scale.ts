@@ -1,4 +1,5 @@
 import type { Outcome } from "@restband/solver";
+import type { ScanPoint } from "../../../compute/use-scan.ts";
 
 /** A tick of a logarithmic scale: its place in decades from the middle, and its value. */
 export interface Tick {
@@ -22,30 +23,23 @@ function tick(digit: number, decade: number, middle: number): Tick {
   return { at: Math.log10(value / middle), value, isLabelled: digit === 1 || digit === 2 || digit === 5 };
 }
 
-/** Neighbouring points of one outcome; between two outcomes the boundary is drawn half way. */
+/** Neighbouring points of one outcome, in decades from the middle; between two outcomes the boundary is half way. */
 export interface Stretch {
   readonly from: number;
   readonly to: number;
-  readonly outcome: Outcome | null | undefined;
+  readonly outcome: Outcome | null;
 }
 
-/** Joins outcomes at equal steps over [−reach, reach]; points not known yet take the nearest known one before them. */
-export function stretchesOf(outcomes: readonly (Outcome | null | undefined)[], reach: number): Stretch[] {
-  if (outcomes.length < 2) return [];
-  const step = (2 * reach) / (outcomes.length - 1);
-  const filled = filledUp(outcomes);
+/** Joins what a scan has found, its places 0…1 spread over [−reach, reach]. */
+export function stretchesOf(points: readonly ScanPoint[], reach: number): Stretch[] {
+  if (points.length < 2) return [];
+  const place = (at: number): number => reach * (2 * at - 1);
   const stretches: Stretch[] = [];
-  filled.forEach((outcome, i) => {
-    const from = i === 0 ? -reach : -reach + (i - 0.5) * step;
-    const to = i === filled.length - 1 ? reach : -reach + (i + 0.5) * step;
+  points.forEach(({ at, outcome }, i) => {
+    const to = i === points.length - 1 ? reach : place((at + points[i + 1].at) / 2);
     const last = stretches.at(-1);
     if (last && last.outcome === outcome) stretches[stretches.length - 1] = { ...last, to };
-    else stretches.push({ from, to, outcome });
+    else stretches.push({ from: last?.to ?? -reach, to, outcome });
   });
   return stretches;
-}
-
-function filledUp<T>(values: readonly (T | undefined)[]): (T | undefined)[] {
-  let last: T | undefined;
-  return values.map((value) => (last = value === undefined ? last : value));
 }

@@ -1,6 +1,6 @@
 import { counterfaceChoice, frictionLaws, lawOf, normalForce } from "@restband/solver";
 import { Checkbox, RadioChoices } from "../../../components/choices.tsx";
-import { sayInput } from "../../../format/format-quantity.ts";
+import { say } from "../../../format/format-quantity.ts";
 import { setLaw, setRipple } from "../changes.ts";
 import { useDraftContext } from "../draft/draft-context.ts";
 import { ChoiceField } from "./choice-field.tsx";
@@ -53,7 +53,7 @@ function PressingColumn() {
   const { wanted } = draft.sheet;
   const { normal } = wanted.contact;
   const together = normalForce(wanted);
-  const force = (value: number): string => sayInput(value, { dimension: "pressing", motion: wanted.motion });
+  const force = (value: number): string => say(value, { dimension: "pressing", motion: wanted.motion }, { digits: 5 });
   return (
     <FormColumn title="What presses the faces together">
       <NumberField path="contact.normal.preload" />
