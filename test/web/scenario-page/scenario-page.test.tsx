@@ -75,7 +75,7 @@ describe("the page of a scenario", () => {
     expect(
       screen.getByRole("img", { name: /^Share of time stuck, none allowed: broken\. 39\.6.%/ }),
     ).toBeInTheDocument();
-    expect(screen.getByRole("img", { name: /^Over 0\.5.s: displacement of the carriage/ })).toBeInTheDocument();
+    expect(await screen.findByRole("img", { name: /^Over 0\.5.s: displacement of the carriage/ })).toBeInTheDocument();
     expect(screen.getByRole("slider", { name: "Time cursor" })).toBeInTheDocument();
     expect(
       within(screen.getByRole("table", { name: "Energy over the run" })).getByText("balances"),
@@ -197,7 +197,7 @@ describe("the time cursor", () => {
     const cursor = await screen.findByRole("slider", { name: "Time cursor" });
     fireEvent.keyDown(cursor, { key: "Home" });
     expect(cursor).toHaveAttribute("aria-valuetext", "0\u00a0s, stuck");
-    expect(screen.getByText("cursor is here").closest("tr")).toHaveTextContent(/^starts/);
+    expect((await screen.findByText("cursor is here")).closest("tr")).toHaveTextContent(/^starts/);
     fireEvent.keyDown(cursor, { key: "ArrowRight" });
     expect(cursor).toHaveAttribute("aria-valuetext", "36.977\u00a0ms, slipping forward");
     expect(screen.getByText("cursor is here").closest("tr")).toHaveTextContent(/^breaks away/);

@@ -127,7 +127,7 @@ describe("a refused value", () => {
   it("is counted under the form", async () => {
     const user = open();
     await user.click(screen.getByRole("button", { name: "all fields of Contact" }));
-    const kinetic = screen.getByRole("textbox", { name: "Kinetic friction, μk" });
+    const kinetic = await screen.findByRole("textbox", { name: "Kinetic friction, μk" });
     await user.clear(kinetic);
     await user.type(kinetic, "0.16");
     expect(screen.getByText("1 field to put right")).toBeInTheDocument();
@@ -180,6 +180,7 @@ describe("all fields", () => {
     const user = open(full);
     const names = ["Body", "Contact", "Drive", "Start, span", "Limits"];
     for (const name of names) await user.click(screen.getByRole("button", { name: `all fields of ${name}` }));
+    await screen.findByRole("textbox", { name: "At most" });
     // Body 4, solid 2, friction 2, pressing 2 and ripple 3, counterface 1, ramp 3, incline, start 2, span 3, band, limit 2; and the title.
     expect(screen.getAllByRole("textbox")).toHaveLength(27);
     for (const box of screen.getAllByRole("textbox")) expect(box).toHaveAccessibleName();
@@ -195,6 +196,7 @@ describe("all fields", () => {
       }),
     );
     await user.click(screen.getByRole("button", { name: "all fields of Drive" }));
+    await screen.findByRole("group", { name: "Step, 2 of 2" });
     await user.click(group("Step, 2 of 2").getByRole("button", { name: "Move up" }));
     expect(draft.inForce.force.map(({ kind }) => kind)).toEqual(["step", "constant"]);
     await user.click(group("Step, 1 of 2").getByRole("button", { name: "Remove" }));
@@ -204,17 +206,17 @@ describe("all fields", () => {
   it("leave an optional number out when it is emptied", async () => {
     const user = open(variant({ settleBand: 1e-5, limits: [{ quantity: "peakVelocity", min: 0, max: 1 }] }));
     await user.click(screen.getByRole("button", { name: "all fields of Start, span" }));
-    await user.clear(screen.getByRole("textbox", { name: "Settle band" }));
+    await user.clear(await screen.findByRole("textbox", { name: "Settle band" }));
     expect(draft.inForce.settleBand).toBeNull();
     await user.click(screen.getByRole("button", { name: "all fields of Limits" }));
-    await user.clear(screen.getByRole("textbox", { name: "At least" }));
+    await user.clear(await screen.findByRole("textbox", { name: "At least" }));
     expect(draft.inForce.limits).toEqual([{ quantity: "peakVelocity", max: 1 }]);
   });
 
   it("take a pasted table of friction against speed", async () => {
     const user = open(variant({ contact: { ...creepFeed.contact, law: { model: "table", points: [[0, 0.2]] } } }));
     await user.click(screen.getByRole("button", { name: "all fields of Contact" }));
-    const rows = screen.getByRole("textbox", { name: "Sliding speed and friction" });
+    const rows = await screen.findByRole("textbox", { name: "Sliding speed and friction" });
     await user.clear(rows);
     await user.click(rows);
     await user.paste("0\t0.21\n0.05\t0.12");

@@ -1,6 +1,6 @@
 import type { Project, StoredScenario } from "@restband/api/contract";
 import { useSuspenseQueries } from "@tanstack/react-query";
-import { useMemo, useState } from "react";
+import { lazy, Suspense, useMemo, useState } from "react";
 import { useParams } from "react-router-dom";
 import { projectQuery } from "../api/projects.ts";
 import { scenarioQuery } from "../api/scenarios.ts";
@@ -12,10 +12,7 @@ import { WorkHeader } from "../features/account/work-header.tsx";
 import { Answer } from "../features/answer/answer.tsx";
 import { Cautions } from "../features/cautions/cautions.tsx";
 import { Checks } from "../features/checks/checks.tsx";
-import { EventTable } from "../features/evidence/event-table.tsx";
-import { Evidence } from "../features/evidence/evidence.tsx";
 import { firstCursor, runViewOf } from "../features/evidence/run-view.ts";
-import { ConflictDialog } from "../features/statement/saving/conflict-dialog.tsx";
 import { savedWords } from "../features/statement/saving/saved-words.ts";
 import { useDraft } from "../features/statement/saving/use-draft.ts";
 import { isSameScenario } from "../features/statement/saving/differences.ts";
@@ -23,6 +20,13 @@ import { Statement } from "../features/statement/statement.tsx";
 import { UndoButtons } from "../features/statement/undo-buttons.tsx";
 import { mayEdit } from "../features/project-home/roles.ts";
 import { paths } from "../paths.ts";
+
+// None of these is needed for the first answer: they come after it.
+const Evidence = lazy(async () => ({ default: (await import("../features/evidence/evidence.tsx")).Evidence }));
+const EventTable = lazy(async () => ({ default: (await import("../features/evidence/event-table.tsx")).EventTable }));
+const ConflictDialog = lazy(async () => ({
+  default: (await import("../features/statement/saving/conflict-dialog.tsx")).ConflictDialog,
+}));
 
 /** One scenario as a worked page: answer, statement, evidence, checks, cautions. */
 export function ScenarioPage() {
@@ -69,12 +73,14 @@ function OpenScenario({ project, stored }: { project: Project; stored: StoredSce
         <RunSections computed={run.computed} isStale={run.isStale} />
       </WorkedPage>
       {saving.kind === "conflict" && (
-        <ConflictDialog
-          base={base.content}
-          mine={inForce}
-          current={saving.current}
-          onDecide={(scenario) => decide(saving.current, scenario)}
-        />
+        <Suspense>
+          <ConflictDialog
+            base={base.content}
+            mine={inForce}
+            current={saving.current}
+            onDecide={(scenario) => decide(saving.current, scenario)}
+          />
+        </Suspense>
       )}
     </>
   );
@@ -105,12 +111,16 @@ function RunSections({ computed, isStale }: { computed: Computed | null; isStale
           </>
         }
       >
-        <Evidence view={view} t={t} onMove={setCursor} isStale={isStale} />
+        <Suspense fallback={<div className="min-h-[600px]" />}>
+          <Evidence view={view} t={t} onMove={setCursor} isStale={isStale} />
+        </Suspense>
       </Section>
       <Section id="checks" name="Checks" help="The run checks itself each time it is computed.">
         <Checks scenario={computed.scenario} result={result} />
         <h3 className="mt-8 mb-2 text-15 font-semibold">Events</h3>
-        <EventTable view={view} t={t} onMove={setCursor} />
+        <Suspense fallback={<div className="min-h-[380px]" />}>
+          <EventTable view={view} t={t} onMove={setCursor} />
+        </Suspense>
       </Section>
       <CautionSection computed={computed} />
     </>

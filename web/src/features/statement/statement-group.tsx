@@ -1,17 +1,19 @@
 import type { Fault } from "@restband/solver";
-import { useEffect, useId, useRef, useState } from "react";
+import { lazy, Suspense, useEffect, useId, useRef, useState } from "react";
 import { Button } from "../../components/button.tsx";
 import { FieldError } from "../../components/field.tsx";
 import { sayMany } from "../../format/words.ts";
 import { useDraftContext } from "./draft/draft-context.ts";
 import { ValueEditor } from "./entry/value-editor.tsx";
-import { GroupForm } from "./form/group-form.tsx";
 import { faultsIn, type Group } from "./groups.ts";
 import { Keeps } from "./keeps.tsx";
 import { fieldAt } from "./scenario-fields.ts";
 import { originsIn } from "./origin-words.ts";
 import { remarkWords } from "./remark-words.ts";
 import { SentenceLine } from "./sentence-line.tsx";
+
+// Sentences come first; a form is loaded when it is first opened.
+const GroupForm = lazy(async () => ({ default: (await import("./form/group-form.tsx")).GroupForm }));
 
 interface StatementGroupProps {
   group: Group;
@@ -40,7 +42,9 @@ export function StatementGroup({ group, remarks }: StatementGroupProps) {
       <div className="min-w-0 max-desk:order-last max-desk:col-span-2">
         {isForm ? (
           <div id={formId}>
-            <GroupForm group={group} />
+            <Suspense>
+              <GroupForm group={group} />
+            </Suspense>
             <div className="mt-5 flex flex-wrap items-center gap-4">
               <Button onClick={close}>Back to the sentence</Button>
               {faults.length > 0 && <ToPutRight count={faults.length} />}
