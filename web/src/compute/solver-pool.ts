@@ -7,3 +7,6 @@ export const solverPool = new Pool({
   size: (navigator.hardwareConcurrency || 2) > 2 ? 2 : 1,
   patience: 250,
 });
+
+/** Ranges are gone through by a worker of their own, so that no run of the page waits for them; an edit ends it soon. */
+export const rangePool = new Pool({ start: startWorker, size: 1, patience: 50 });

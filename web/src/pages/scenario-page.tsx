@@ -7,6 +7,7 @@ import { scenarioQuery } from "../api/scenarios.ts";
 import { useAccount } from "../api/session.ts";
 import { Section, WorkedPage } from "../components/section.tsx";
 import { samplesFor } from "../compute/samples-for.ts";
+import { useRanges } from "../compute/use-ranges.ts";
 import { useRun, type Computed } from "../compute/use-run.ts";
 import { WorkHeader } from "../features/account/work-header.tsx";
 import { Answer } from "../features/answer/answer.tsx";
@@ -16,6 +17,7 @@ import { firstCursor, runViewOf } from "../features/evidence/run-view.ts";
 import { savedWords } from "../features/statement/saving/saved-words.ts";
 import { useDraft } from "../features/statement/saving/use-draft.ts";
 import { isSameScenario } from "../features/statement/saving/differences.ts";
+import { sayField } from "../features/statement/say-field.ts";
 import { Statement } from "../features/statement/statement.tsx";
 import { UndoButtons } from "../features/statement/undo-buttons.tsx";
 import { mayEdit } from "../features/project-home/roles.ts";
@@ -47,6 +49,9 @@ function OpenScenario({ project, stored }: { project: Project; stored: StoredSce
     inForce,
     useMemo(() => ({ samples }), [samples]),
   );
+  const ranges = useRanges(run.computed, run.isStale);
+  const subject = run.computed?.scenario ?? inForce;
+  const say = (path: string, value: number, towards: number) => sayField(subject, path, value, towards);
   const before = useBeforeEdit(run.computed, draft.merging !== null);
   const isTrying = !canEdit && !isSameScenario(inForce, stored.content);
   const title = inForce.title || "Untitled";
@@ -61,7 +66,7 @@ function OpenScenario({ project, stored }: { project: Project; stored: StoredSce
       />
       <WorkedPage className="max-desk:pb-40">
         <Section name="Answer" help="Computed here, anew with every change.">
-          <Answer run={run} before={before} />
+          <Answer run={run} before={before} ranges={ranges} say={say} />
         </Section>
         <Section name="Statement" help="Tab moves from value to value, Enter opens one, Esc puts it back.">
           <Statement

@@ -5,26 +5,32 @@ import { ErrorNote } from "../../components/error-note.tsx";
 import { MotionStrip } from "../../components/motion-strip.tsx";
 import { ProgressLine } from "../../components/progress-line.tsx";
 import { intervalsOf, shownEnd } from "../../compute/intervals.ts";
+import type { RangeRun } from "../../compute/use-ranges.ts";
 import type { Computed, Run } from "../../compute/use-run.ts";
 import { answerSentence } from "./answer-sentence.ts";
 import { leadLine } from "./lead-line.ts";
 import { LimitRulers } from "./limit-rulers.tsx";
+import { RangeCoverage } from "./range-coverage.tsx";
+import { rangesLine, type SayValue } from "./range-words.ts";
 import { Verdict } from "./verdict.tsx";
 
 interface AnswerProps {
   run: Run;
   /** A run to compare with, while a value is being changed: the one before the edit. */
   before: Computed | null;
+  ranges: RangeRun;
+  /** Says a number of the scenario the run is of. */
+  say: SayValue;
 }
 
 /** What the body will do, in one sentence; how it moves; what became of the limits. */
-export function Answer({ run, before }: AnswerProps) {
+export function Answer({ run, before, ranges, say }: AnswerProps) {
   const { computed, isStale, progress, failure } = run;
   return (
     <div aria-busy={isStale || computed === null}>
       <div className={classNames(isStale && "stale")}>
         {computed ? (
-          <Computation computed={computed} before={before} />
+          <Computation computed={computed} before={before} ranges={ranges} say={say} />
         ) : (
           <p className="late text-24 text-quiet">Running the scenario</p>
         )}
@@ -43,9 +49,10 @@ export function Answer({ run, before }: AnswerProps) {
   );
 }
 
-function Computation({ computed, before }: { computed: Computed; before: Computed | null }) {
+function Computation({ computed, before, ranges, say }: Omit<AnswerProps, "run"> & { computed: Computed }) {
   if ("refusal" in computed) return <Refused message={computed.refusal.message} />;
   const { scenario, result } = computed;
+  const report = ranges.state.kind === "done" ? ranges.state.report : null;
   const { before: subject, verdict, after, outcome } = answerSentence(scenario, result);
   return (
     <>
@@ -57,9 +64,12 @@ function Computation({ computed, before }: { computed: Computed; before: Compute
         <Verdict outcome={outcome}>{verdict}</Verdict>
         {after}
       </h1>
-      <p className="mt-3 max-w-(--measure) text-18 text-quiet">{leadLine(scenario, result)}</p>
+      <p className="mt-3 max-w-(--measure) text-18 text-quiet">
+        {leadLine(scenario, result, report && rangesLine(report, say))}
+      </p>
       <Strips computed={computed} before={before} />
-      <LimitRulers scenario={scenario} limits={result.limits} />
+      <LimitRulers scenario={scenario} limits={result.limits} report={report} say={say} />
+      <RangeCoverage ranges={ranges} />
     </>
   );
 }

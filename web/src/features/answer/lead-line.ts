@@ -2,14 +2,15 @@ import type { LimitVerdict, Outcome, Result, Scenario } from "@restband/solver";
 import { formatNumber } from "../../format/format-number.ts";
 import { say, sayShare } from "../../format/format-quantity.ts";
 import type { Measure } from "../../format/unit.ts";
-import { capitalised, sayCount, sayMany } from "../../format/words.ts";
+import { capitalised, sayMany } from "../../format/words.ts";
+import { some } from "./range-words.ts";
 import { readingOf, type ResultReading } from "./result-reading.ts";
 
-/** The line under the answer: what the motion is like, then what became of the limits. */
-export function leadLine(scenario: Scenario, result: Result): string {
+/** The line under the answer: what the motion is like, then what became of the limits; over the ranges once they are run. */
+export function leadLine(scenario: Scenario, result: Result, overRanges: string | null = null): string {
   const reading = readingOf(scenario, result);
   const motion = result.outcome === null ? "" : motionLines[result.outcome](reading);
-  return [motion, limitsLine(scenario, result.limits)].filter(Boolean).join(" ");
+  return [motion, overRanges ?? limitsLine(scenario, result.limits)].filter(Boolean).join(" ");
 }
 
 const motionLines: Record<Outcome, (reading: ResultReading) => string> = {
@@ -108,15 +109,9 @@ export function limitsLine(scenario: Scenario, limits: readonly LimitVerdict[]):
   const asEntered = hasRanges(scenario) ? ", as entered only" : "";
   const broken = limits.filter(({ kept }) => kept === false).length;
   const open = limits.filter(({ kept }) => kept === null).length;
-  if (broken > 0) return `${ofAll(broken, limits.length)} broken${asEntered}.`;
-  if (open > 0) return `${ofAll(open, limits.length)} not to be judged${asEntered}.`;
-  return `${ofAll(limits.length, limits.length)} kept${asEntered}.`;
-}
-
-function ofAll(count: number, all: number): string {
-  if (all === 1) return "The limit is";
-  if (count === all) return all === 2 ? "Both limits are" : `All ${sayCount(all)} limits are`;
-  return `${capitalised(sayCount(count))} of ${sayCount(all)} limits ${count === 1 ? "is" : "are"}`;
+  if (broken > 0) return `${some(broken, limits.length)} broken${asEntered}.`;
+  if (open > 0) return `${some(open, limits.length)} not to be judged${asEntered}.`;
+  return `${some(limits.length, limits.length)} kept${asEntered}.`;
 }
 
 /** Whether a value is known only as a range, which this run has not gone through. */
