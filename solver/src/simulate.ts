@@ -1,4 +1,5 @@
 import { judge } from "./judge.ts";
+import { runAdaptive } from "./motion/adaptive/run-adaptive.ts";
 import { runExact } from "./motion/exact/run-exact.ts";
 import type { Motion } from "./motion/motion.ts";
 import { emptyState } from "./motion/state.ts";
@@ -6,23 +7,28 @@ import type { Refusal, SimulateOptions } from "./options.ts";
 import type { MotionEvent, Result } from "./result.ts";
 import { sampleMotion, valuesAt } from "./samples.ts";
 import { compileProblem } from "./scenario/compile-problem.ts";
-import type { Fault, Scenario } from "./scenario/scenario.ts";
+import type { Scenario } from "./scenario/scenario.ts";
+import { needsAdaptive } from "./scenario/needs-adaptive.ts";
 import { unsupported } from "./scenario/unsupported.ts";
 import { solverVersion } from "./version.ts";
 
 const defaultSamples = 2001;
 
 /**
- * Runs a checked scenario (see `checkScenario`) and computes what is asked of it.
+ * Runs a checked scenario (see `checkScenario`) and computes what is asked of it: by the exact method where it applies,
+ * else by the adaptive one, unless `options.method` says which.
  *
  * @returns the result, all numbers finite; or a refusal naming the field where this version has no method for it. A run
  * that cannot go on is no refusal: `ended` says why, and the motion so far is returned.
  */
 export function simulate(scenario: Scenario, options: SimulateOptions = {}): Result | Refusal {
-  const fault = unsupported(scenario, options.records) ?? methodFault(options);
+  const { method = "auto", records, progress } = options;
+  const reason = needsAdaptive(scenario);
+  const fault = unsupported(scenario, records) ?? (method === "exact" ? reason : null);
   if (fault !== null) return { error: { ...fault, faults: [fault] } };
-  const motion = runExact(compileProblem(scenario, options.records), options.progress);
-  return describe(motion, options);
+  const isExact = method === "exact" || (method === "auto" && reason === null);
+  const problem = compileProblem(scenario, records);
+  return describe(isExact ? runExact(problem, progress) : runAdaptive(problem, progress), options);
 }
 
 /** What a run says, whatever the method that made it. */
@@ -47,9 +53,4 @@ function eventsOf(motion: Motion): MotionEvent[] {
     motion.read(segment, t, state);
     return { t, kind, x: state.x, v: state.v, f: state.f };
   });
-}
-
-function methodFault(options: SimulateOptions): Fault | null {
-  if (options.method !== "adaptive") return null;
-  return { path: "method", message: "not computed by this version" };
 }

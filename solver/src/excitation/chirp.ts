@@ -53,11 +53,24 @@ function sweep({ amplitude, fromHz, toHz, seconds, spacing }: Chirp): SmoothPart
   const hzAt = (t: number) => fromHz * Math.exp(growth * t) + gain * t;
   const cyclesAt = (t: number) =>
     growth === 0 ? t * (fromHz + (gain * t) / 2) : (fromHz * Math.expm1(growth * t)) / growth;
+  const hzRateAt = (t: number) => gain + fromHz * growth * Math.exp(growth * t);
+  const turn = 2 * Math.PI;
+  const fastestHz = Math.max(fromHz, toHz);
+  // the phase's own derivatives at their largest: ω, ω̇, ω̈
+  const omega = turn * fastestHz;
+  const swept = turn * (Math.abs(gain) + Math.abs(growth) * fastestHz);
+  const bent = turn * growth * growth * fastestHz;
+  const bounds = [1, omega, omega ** 2 + swept, omega ** 3 + 3 * omega * swept + bent];
   return {
     from: 0,
     to: seconds,
-    value: (t) => amplitude * Math.cos(2 * Math.PI * cyclesAt(t)),
-    rate: (t) => -amplitude * 2 * Math.PI * hzAt(t) * Math.sin(2 * Math.PI * cyclesAt(t)),
-    fastestHz: Math.max(fromHz, toHz),
+    value: (t) => amplitude * Math.cos(turn * cyclesAt(t)),
+    rate: (t) => -amplitude * turn * hzAt(t) * Math.sin(turn * cyclesAt(t)),
+    second: (t) => {
+      const angle = turn * cyclesAt(t);
+      return -amplitude * turn * (turn * hzAt(t) ** 2 * Math.cos(angle) + hzRateAt(t) * Math.sin(angle));
+    },
+    bound: (n) => Math.abs(amplitude) * bounds[n],
+    fastestHz,
   };
 }

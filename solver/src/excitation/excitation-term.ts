@@ -49,6 +49,10 @@ export interface SmoothPart {
   value(t: number): number;
   /** d value/dt. */
   rate(t: number): number;
+  /** d² value/dt². */
+  second(t: number): number;
+  /** A bound of the n-th derivative, n from 0 to 3. */
+  bound(n: number): number;
   /** The highest frequency met, Hz: bounds the step. */
   readonly fastestHz: number;
 }

@@ -6,7 +6,7 @@ export type Carrier = "ground" | "belt" | "base";
 /**
  * A body carried along: ḋ = u̇ − ẏ is given, and what is asked is the force that it takes and whether that can be had.
  *
- *   need = m ü − F − W + C ḋ + K d + slide·N(t),   room = grip·N(t) + constant.
+ *   need = m ü − F − W + C ḋ + K d + k3 d³ + slide·N(t),   room = grip·N(t) + constant.
  *
  * In a stick the carrier is the counterface, slide = 0 and grip = μs r; between the two set-valued elements of
  * displacement-proportional damping (ḋ = 0 while the contact slips) the carrier is the base, slide = s r μk is the
@@ -31,6 +31,7 @@ export class Carried {
   private inertia = 0;
   private stiffness = 0;
   private viscous = 0;
+  private cubic = 0;
   private slide = 0;
   private grip = 0;
   /** The part of room that the contact does not give: ρ k |d|. */
@@ -43,7 +44,7 @@ export class Carried {
     inputs: Inputs,
     carrier: Carrier,
     beltVelocity: number,
-    body: { inertia: number; stiffness: number; viscous: number },
+    body: { inertia: number; stiffness: number; viscous: number; cubic: number },
     friction: { slide: number; grip: number; constant: number },
     position: number,
   ): void {
@@ -53,6 +54,7 @@ export class Carried {
     this.inertia = body.inertia;
     this.stiffness = body.stiffness;
     this.viscous = body.viscous;
+    this.cubic = body.cubic;
     this.slide = friction.slide;
     this.grip = friction.grip;
     this.constant = friction.constant;
@@ -79,9 +81,29 @@ export class Carried {
       this.needRate += this.stiffness * this.velocity - this.viscous * v.baseAcceleration;
       this.needSecond -= this.stiffness * v.baseAcceleration + this.viscous * v.baseJerk;
     }
+    if (this.cubic !== 0) this.addCubic(v.baseAcceleration);
     this.room = this.grip * v.normal + this.constant;
     this.roomRate = this.grip * v.normalRate;
     this.roomSecond = this.grip * v.normalSecond;
+  }
+
+  private addCubic(baseAcceleration: number): void {
+    const { cubic, position: d, velocity } = this;
+    const curvature = this.carrier === "base" ? 0 : -baseAcceleration;
+    this.need += cubic * d * d * d;
+    this.needRate += 3 * cubic * d * d * velocity;
+    this.needSecond += 3 * cubic * d * (2 * velocity * velocity + d * curvature);
+  }
+
+  /** A bound of |(k3 d³)‴| on [τ, τ + reach]. */
+  private cubicBound(reach: number): number {
+    const { inputs, cubic } = this;
+    if (cubic === 0 || this.carrier === "base") return 0;
+    const jerk = 6 * Math.abs(inputs.base[3]) + inputs.baseBound(3);
+    const acceleration = Math.abs(2 * inputs.base[2]) + inputs.baseBound(2) + jerk * reach;
+    const velocity = Math.abs(this.velocity) + acceleration * reach;
+    const d = Math.abs(this.position) + velocity * reach;
+    return Math.abs(cubic) * (6 * velocity ** 3 + 18 * d * velocity * acceleration + 3 * d * d * jerk);
   }
 
   /**
@@ -100,7 +122,7 @@ export class Carried {
     } else {
       swing += this.stiffness * inputs.baseBound(0) + this.viscous * inputs.baseBound(1);
       drift += this.stiffness * Math.abs(this.beltVelocity - inputs.base[1]);
-      isCurved ||= inputs.base[2] !== 0 || inputs.base[3] !== 0;
+      isCurved ||= inputs.base[2] !== 0 || inputs.base[3] !== 0 || this.cubic !== 0;
     }
     const constant = this.need - this.swingAtStart();
     const left = this.grip * inputs.normal + this.constant - Math.abs(constant) - swing;
@@ -121,15 +143,19 @@ export class Carried {
     return sum;
   }
 
-  /** A bound of |need‴| and of |room‴| together, good to the inputs' next corner. */
-  thirdBound(): number {
+  /** A bound of |need‴| and of |room‴| together on [τ, τ + reach], up to the inputs' next corner. */
+  thirdBound(reach: number): number {
     const { inputs } = this;
     const ripple = (Math.abs(this.slide) + this.grip) * inputs.rippleBound(3);
     const force = inputs.forceBound(3) + 6 * Math.abs(inputs.force[3]);
     const jerkPolynomial = 6 * Math.abs(inputs.base[3]);
     if (this.carrier === "base") return ripple + force + this.inertia * inputs.baseBound(5);
     return (
-      ripple + force + this.stiffness * (inputs.baseBound(3) + jerkPolynomial) + this.viscous * inputs.baseBound(4)
+      ripple +
+      force +
+      this.stiffness * (inputs.baseBound(3) + jerkPolynomial) +
+      this.viscous * inputs.baseBound(4) +
+      this.cubicBound(reach)
     );
   }
 }

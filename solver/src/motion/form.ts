@@ -1,6 +1,7 @@
 import type { Problem } from "../scenario/problem.ts";
 import { Inputs } from "./inputs.ts";
 import { Carried, type Carrier } from "./carried.ts";
+import { slidingFriction } from "./sliding-friction.ts";
 import type { Slip } from "./slip.ts";
 import type { Stance } from "./stance.ts";
 
@@ -26,7 +27,7 @@ export class Form {
   readonly contactCarrier: Carrier;
   kind: Kind = "slip";
 
-  private readonly body = { inertia: 0, stiffness: 0, viscous: 0 };
+  private readonly body = { inertia: 0, stiffness: 0, viscous: 0, cubic: 0 };
   private readonly friction = { slide: 0, grip: 0, constant: 0 };
 
   constructor(
@@ -43,6 +44,7 @@ export class Form {
     this.slip = makeSlip(problem, this.inputs);
     this.body.inertia = problem.inertia;
     this.body.viscous = this.viscous;
+    this.body.cubic = problem.cubic;
   }
 
   /** Locates the inputs at the stance and makes its segment ready; `slip` or `carried` then evaluate in τ. */
@@ -55,10 +57,9 @@ export class Form {
   take(s: Stance): void {
     const { inputs, problem } = this;
     if (s.contact === 0) return this.takeStick(s);
-    const slide = s.contact * this.slide;
     if (s.spring === 0) {
       this.kind = "lock";
-      this.friction.slide = slide;
+      this.friction.slide = s.contact * this.slideAt(s.slip);
       this.friction.grip = 0;
       this.friction.constant = this.elementSlope * Math.abs(s.position);
       this.body.stiffness = problem.stiffness;
@@ -68,6 +69,14 @@ export class Form {
     this.kind = "slip";
     this.body.stiffness = this.stiffnessOf(s);
     this.slip.begin(inputs, this.body, s);
+  }
+
+  /** Friction per N of pressing at a sliding velocity that lasts (a body at rest over a belt). */
+  private slideAt(slip: number): number {
+    const { law } = this.problem;
+    if (law.constant !== null) return this.slide;
+    const normal = this.inputs.evaluate(0).normal;
+    return normal > 0 ? slidingFriction(this.problem, slip, normal) / normal : 0;
   }
 
   /** k (1 ± ρ) by the quadrant, or k where the element holds or is absent. */

@@ -1,4 +1,4 @@
-import type { CompiledTerm, Harmonic } from "../excitation/excitation-term.ts";
+import type { CompiledTerm, Harmonic, SmoothPart } from "../excitation/excitation-term.ts";
 import type { Problem } from "../scenario/problem.ts";
 
 /** What acts at one instant; units of `Problem`. */
@@ -13,7 +13,7 @@ export interface InputValues {
   baseAcceleration: number;
   baseJerk: number;
   baseSnap: number;
-  /** N, Ṅ, N̈ (never negative: the exact method is only used where N stays positive). */
+  /** N, Ṅ, N̈ (0 while the contact is lost). */
   normal: number;
   normalRate: number;
   normalSecond: number;
@@ -48,6 +48,8 @@ export class Inputs {
   readonly forceSize: Float64Array;
   readonly baseSize: Float64Array;
   readonly normal: number;
+  /** False while the ripple of N has let the contact go: N then reads 0. */
+  isInContact = true;
   rippleOmega = 0;
   rippleRe = 0;
   rippleIm = 0;
@@ -66,11 +68,15 @@ export class Inputs {
   };
 
   private readonly problem: Problem;
+  /** Parts of the force that are neither polynomial nor harmonic, and those acting at the origin. */
+  private readonly smooth: readonly SmoothPart[];
+  private acting: readonly SmoothPart[] = [];
   private readonly rotated = { re: 0, im: 0 };
 
   constructor(problem: Problem) {
     this.problem = problem;
     this.normal = problem.normal;
+    this.smooth = problem.force.flatMap((term) => (term.smooth === undefined ? [] : [term.smooth]));
     const room = harmonicsPerTerm * (problem.force.length + problem.base.length);
     this.omega = new Float64Array(room);
     this.forceRe = new Float64Array(room);
@@ -105,8 +111,8 @@ export class Inputs {
       this.acceleration[0] = 2 * this.base[2];
       this.acceleration[1] = 6 * this.base[3];
     }
-    this.end = end;
-    this.locateRipple(t);
+    if (this.smooth.length > 0) this.acting = this.smooth.filter((part) => part.from <= t && t < part.to);
+    this.end = Math.min(end, this.locateRipple(t));
   }
 
   /** Fills `values` at τ = t − origin. */
@@ -125,13 +131,19 @@ export class Inputs {
     v.normalSecond = 0;
     for (let i = 0; i < this.count; i++) this.addHarmonicValues(i, tau);
     if (this.rippleOmega > 0) this.addRippleValues(tau);
+    for (const part of this.acting) {
+      v.force += part.value(this.origin + tau);
+      v.forceRate += part.rate(this.origin + tau);
+      v.forceSecond += part.second(this.origin + tau);
+    }
     return v;
   }
 
-  /** Σ |A| ω^n over the force harmonics: no n-th derivative of their sum is larger. */
+  /** Σ |A| ω^n over the force harmonics (n ≤ 3 with a sweep): no n-th derivative of their sum is larger. */
   forceBound(power: number): number {
     let sum = 0;
     for (let i = 0; i < this.count; i++) sum += this.forceSize[i] * raised(this.omega[i], power);
+    for (const part of this.acting) sum += part.bound(power);
     return sum;
   }
 
@@ -152,13 +164,14 @@ export class Inputs {
     for (let j = 1; j < 4; j++) {
       if (this.force[j] !== 0 || this.base[j] !== 0 || this.acceleration[j] !== 0) return true;
     }
-    return false;
+    return this.acting.length > 0;
   }
 
   /** The fastest angular frequency acting, rad/s; 0 without harmonics. */
   fastest(): number {
     let fastest = this.rippleOmega;
     for (let i = 0; i < this.count; i++) fastest = Math.max(fastest, this.omega[i]);
+    for (const part of this.acting) fastest = Math.max(fastest, 2 * Math.PI * part.fastestHz);
     return fastest;
   }
 
@@ -176,13 +189,23 @@ export class Inputs {
     }
   }
 
-  private locateRipple(t: number): void {
-    const { ripple } = this.problem;
-    if (ripple === null) return;
+  /** The instant at which the ripple next lets the contact go or takes it up again; Infinity where it never does. */
+  private locateRipple(t: number): number {
+    const { ripple, model } = this.problem;
+    if (ripple === null) return Infinity;
     rotate(ripple, t, this.rotated);
     this.rippleOmega = 2 * Math.PI * ripple.hz;
     this.rippleRe = this.rotated.re;
     this.rippleIm = this.rotated.im;
+    const swing = Math.abs(ripple.amplitude);
+    if (swing <= this.normal || model === "none") return Infinity;
+    // N = normal + swing·cos θ is positive for |θ| < α
+    const alpha = Math.acos(-this.normal / swing);
+    const theta = Math.atan2(this.rippleIm, this.rippleRe);
+    const atCorner = 1e-9;
+    this.isInContact = theta > -alpha - atCorner && theta < alpha - atCorner;
+    const next = this.isInContact ? alpha : 2 * Math.PI - alpha;
+    return t + ((next - theta) % (2 * Math.PI)) / this.rippleOmega;
   }
 
   private addHarmonicValues(i: number, tau: number): void {
@@ -213,6 +236,7 @@ export class Inputs {
     v.normal += ripple;
     v.normalRate -= w * (this.rippleRe * s + this.rippleIm * c);
     v.normalSecond -= w * w * ripple;
+    if (!this.isInContact) v.normal = v.normalRate = v.normalSecond = 0;
   }
 }
 

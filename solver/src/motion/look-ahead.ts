@@ -27,7 +27,7 @@ export function nextBreakAway(problem: Problem, stance: Stance, allowed: number,
     if (stepper.outOfWork) return NaN;
   }
   const period = lookOver(ratesOf(problem, inputs));
-  const drift = endlessRate(problem, inputs);
+  const drift = endlessRate(problem, inputs, s);
   if (drift === 0) return breaksBefore(stepper, s, s.t + period);
   const horizon = driftHorizon(problem, stepper, s) / Math.abs(drift);
   if (period === 0) return breaksBefore(stepper, s, s.t + horizon);
@@ -77,11 +77,12 @@ function driftHorizon(problem: Problem, stepper: Stepper, s: Stance): number {
   return (2 * (Math.abs(carried.need) + room + 2 * swing)) / (1 - problem.solid.proportional);
 }
 
-/** Rate at which the needed force grows for ever, N/s. */
-function endlessRate(problem: Problem, inputs: Inputs): number {
+/** Rate at which the needed force grows for ever, N/s; of a spring that stiffens (k3) at least this, up to its sign. */
+function endlessRate(problem: Problem, inputs: Inputs, s: Stance): number {
   if (problem.counterface === "base") return inputs.force[1];
   const stretchRate = problem.beltVelocity - inputs.base[1];
-  return problem.stiffness * stretchRate - inputs.force[1];
+  const stiffness = problem.stiffness + problem.cubic * s.position ** 2;
+  return stiffness * stretchRate - inputs.force[1];
 }
 
 /** How long periodic inputs are looked at, s: a hair over their common period, or 1,000 of the slowest; 0 without any. */

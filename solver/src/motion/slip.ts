@@ -27,6 +27,8 @@ export interface BodyValues {
   readonly stiffness: number;
   /** c + c_h. */
   readonly viscous: number;
+  /** k3. */
+  readonly cubic: number;
 }
 
 /**

@@ -50,7 +50,7 @@ export function chooseBoth(form: Form, s: Stance): void {
   const { inertia, stiffness } = form.problem;
   const v = form.inputs.evaluate(0);
   const carrier = form.contactCarrier === "base" ? v.baseAcceleration : 0;
-  const free = v.force - stiffness * s.position;
+  const free = v.force - stiffness * s.position - form.problem.cubic * s.position ** 3;
   const element = form.elementSlope * Math.abs(s.position);
   const slide = form.slide * v.normal;
   const grip = form.grip * v.normal;

@@ -36,8 +36,8 @@ export class HoldWatch extends Watch {
     this.second = carried.roomSecond - sign * carried.needSecond;
   }
 
-  thirdBound(): number {
-    return this.carried.thirdBound();
+  thirdBound(reach: number): number {
+    return this.carried.thirdBound(reach);
   }
 }
 
@@ -64,8 +64,8 @@ export class ShareWatch extends Watch {
     this.noise = 2 ** -50 * share;
   }
 
-  thirdBound(): number {
-    return this.carried.thirdBound();
+  thirdBound(reach: number): number {
+    return this.carried.thirdBound(reach);
   }
 
   /** Looks for the next crossing on one side, whichever way it goes; at a crossing the rate tells which. */

@@ -5,7 +5,7 @@ import type { TextbookCompanion } from "./textbook-companion.ts";
 export const restPosition: TextbookCompanion = {
   key: "rest-position",
   label: "Rests off the equilibrium by",
-  formula: "x_n = B x_n−1 − (1 + B) F_k/k",
+  formula: "x_n = B x_{n−1} − (1 + B) F_k/k",
   source: "Exact between turning points, textbook knowledge, from memory",
   dimension: "displacement",
   conditions: restsByFriction,

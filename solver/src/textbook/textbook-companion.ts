@@ -12,7 +12,7 @@ export interface TextbookCompanion {
   /** Never renamed, never reused. */
   readonly key: string;
   readonly label: string;
-  /** As a book writes it; `_` begins a subscript and `^` a power, each up to the next sign that is no letter or figure. */
+  /** As a book writes it; `_` sets the letters and figures after it, or what stands in braces, lower, `^` higher. */
   readonly formula: string;
   /** Who published it; "from memory" where nobody of us has held it. */
   readonly source: string;

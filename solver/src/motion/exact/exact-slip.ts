@@ -45,7 +45,7 @@ export class ExactSlip implements Slip {
 
   begin(inputs: Inputs, body: BodyValues, stance: Stance): void {
     Object.assign(this.stance, stance);
-    this.oscillation.begin(inputs, body, stance.contact * this.slide, stance);
+    this.oscillation.begin(inputs, body, inputs.isInContact ? stance.contact * this.slide : 0, stance);
   }
 
   follow(ending: Ending, watches: SlipWatches, blur: number, work: Work): void {

@@ -1,0 +1,223 @@
+import { bracketedRoot, firstFall } from "../../numerics/bracketed-root.ts";
+import type { Work } from "../../numerics/first-zero.ts";
+import type { Problem } from "../../scenario/problem.ts";
+import type { Inputs } from "../inputs.ts";
+import { slidingFriction } from "../sliding-friction.ts";
+import type { BodyValues, Cause, Ending, Slip, SlipWatches } from "../slip.ts";
+import { newStance, type Stance } from "../stance.ts";
+import { integrate } from "./integrate.ts";
+import { StepStore } from "./step-store.ts";
+
+const tolerance = 1e-10;
+/** A v_r below this share of its typical size is the integrator's own error: a slip must first rise out of it. */
+const noiseShare = 100 * tolerance;
+/** No step turns by more than this, rad: events are looked for within steps. */
+const longestTurn = 1;
+
+/**
+ * A slip by integration: friction that varies with speed, a spring that stiffens, a sweep. The sign of v_r is kept while a
+ * step goes on, so that the right-hand side is smooth past the event; the step's dense output is then searched for the
+ * first zero, and the run goes on from there. Steps are kept, so that the slip can be read again.
+ */
+export class IntegratedSlip implements Slip {
+  position = 0;
+  velocity = 0;
+  acceleration = 0;
+  slip = 0;
+
+  private readonly store = new StepStore(2);
+  /** Where each slip followed so far starts: its time, and its first step. */
+  private readonly starts: number[] = [];
+  private readonly firstSteps: number[] = [];
+  private readonly stance = newStance();
+  private body: BodyValues = { inertia: 1, stiffness: 0, viscous: 0, cubic: 0 };
+  private first = 0;
+  private last = -1;
+  /** What v_r must rise above before its fall counts, m/s; and whether it has. */
+  private noise = 0;
+  private hasRisen = true;
+  private readonly at = new Float64Array(2);
+
+  constructor(
+    private readonly problem: Problem,
+    private readonly inputs: Inputs,
+  ) {}
+
+  begin(_: Inputs, body: BodyValues, stance: Stance): void {
+    Object.assign(this.stance, stance);
+    this.body = { ...body };
+    const i = this.lastStartedAt(stance.t);
+    if (i < 0) return;
+    this.first = this.firstSteps[i];
+    this.last = (this.firstSteps[i + 1] ?? this.store.count) - 1;
+  }
+
+  follow(ending: Ending, watches: SlipWatches, _: number, work: Work): void {
+    const { stance, store } = this;
+    const limit = stance.t + ending.tau;
+    this.starts.push(stance.t);
+    this.firstSteps.push(store.count);
+    this.first = store.count;
+    this.last = this.first - 1;
+    const rate = this.rate();
+    const sizes = this.sizes(rate);
+    this.noise = noiseShare * sizes[1];
+    this.hasRisen = Math.abs(stance.slip) > this.noise;
+    const reached = integrate({
+      from: stance.t,
+      to: limit,
+      start: [stance.position, stance.velocity],
+      rates: (t, [position, velocity], out) => {
+        out[0] = velocity;
+        out[1] = this.accelerationAt(t - stance.t, position, velocity);
+      },
+      sizes,
+      unit: 1 / rate,
+      longest: longestTurn / rate,
+      tolerance,
+      work,
+      onStep: (from, to, dense) => {
+        store.push(from, to, dense);
+        this.last = store.count - 1;
+        return !this.endsWithin(from, to, ending, watches);
+      },
+    });
+    if (ending.cause !== "corner") return;
+    if (reached < limit) work.spent = Infinity;
+    else if (this.stopsAt(ending.tau, 1e-9 / rate)) ending.cause = "contact";
+  }
+
+  /** True where v_r reaches 0 at τ to within `blur` s. */
+  private stopsAt(tau: number, blur: number): boolean {
+    const { stance, problem } = this;
+    this.evaluate(tau);
+    const carrier = problem.counterface === "base" ? 0 : this.inputs.values.baseAcceleration;
+    const rate = stance.contact * (this.acceleration + carrier);
+    return this.hasRisen && rate < 0 && stance.contact * this.slip <= -rate * blur;
+  }
+
+  evaluate(tau: number): void {
+    const { store, inputs, problem } = this;
+    const t = this.stance.t + tau;
+    if (this.last < this.first) this.at.set([this.stance.position, this.stance.velocity]);
+    else store.evaluate(store.find(t, this.first, this.last), t, this.at);
+    [this.position, this.velocity] = this.at;
+    this.acceleration = this.accelerationAt(tau, this.position, this.velocity);
+    const base = inputs.values.baseVelocity;
+    this.slip = problem.counterface === "base" ? this.velocity : this.velocity + base - problem.beltVelocity;
+  }
+
+  panel(tau: number): number {
+    const { store } = this;
+    const t = this.stance.t + tau;
+    if (this.last < this.first) return Infinity;
+    const step = store.find(t, this.first, this.last);
+    return step === this.last ? Infinity : (store.to(step) - t) / 2;
+  }
+
+  isSteady(): boolean {
+    return false;
+  }
+
+  /** The last slip followed from t on, −1 without one. */
+  private lastStartedAt(t: number): number {
+    let low = -1;
+    let high = this.starts.length - 1;
+    while (low < high) {
+      const middle = (low + high + 1) >> 1;
+      if (this.starts[middle] <= t) low = middle;
+      else high = middle - 1;
+    }
+    return low >= 0 && this.starts[low] === t ? low : -1;
+  }
+
+  /** d̈ with the sign of v_r kept. */
+  private accelerationAt(tau: number, position: number, velocity: number): number {
+    const { body, problem, stance } = this;
+    const v = this.inputs.evaluate(tau);
+    const relative = problem.counterface === "base" ? velocity : velocity + v.baseVelocity - problem.beltVelocity;
+    const speed = Math.max(0, stance.contact * relative);
+    const friction = stance.contact * slidingFriction(problem, speed, v.normal);
+    const spring = body.stiffness * position + body.cubic * position ** 3;
+    return (v.force - body.viscous * velocity - spring - friction) / body.inertia - v.baseAcceleration;
+  }
+
+  /** Looks for the first thing that ends the slip within a step. */
+  private endsWithin(from: number, to: number, ending: Ending, watches: SlipWatches): boolean {
+    const { stance, problem } = this;
+    const channel = (pick: () => number, sign: number) => (t: number) => {
+      this.evaluate(t - stance.t);
+      return sign * pick();
+    };
+    const look = (g: (t: number) => number, cause: Cause, floor = 0): void => {
+      const t = firstFall(g, from, Math.min(to, stance.t + ending.tau), floor);
+      if (t === Infinity) return;
+      ending.tau = t - stance.t;
+      ending.cause = cause;
+    };
+    look(
+      channel(() => this.slip, stance.contact),
+      "contact",
+      this.hasRisen ? 0 : -this.noise,
+    );
+    this.evaluate(to - stance.t);
+    this.hasRisen ||= stance.contact * this.slip > this.noise;
+    if (watches.side)
+      look(
+        channel(() => this.position, stance.side),
+        "side",
+      );
+    if (watches.element)
+      look(
+        channel(() => this.velocity, stance.spring),
+        "element",
+      );
+    for (const corner of problem.law.corners) {
+      this.lookForCorner(
+        channel(() => problem.radius * Math.abs(this.slip) - corner, 1),
+        from,
+        to,
+        ending,
+      );
+    }
+    return ending.cause !== "corner";
+  }
+
+  /** A corner of the law is passed either way; a slip that starts on one has left it by the end of the step. */
+  private lookForCorner(g: (t: number) => number, from: number, to: number, ending: Ending): void {
+    const looks = 8;
+    const end = Math.min(to, this.stance.t + ending.tau);
+    let last = from + (end - from) * 1e-6;
+    let gLast = g(last);
+    for (let n = 1; n <= looks; n++) {
+      const t = from + ((end - from) * n) / looks;
+      const gt = g(t);
+      if (gLast * gt < 0) {
+        ending.tau = bracketedRoot(g, last, t, gLast, gt) - this.stance.t;
+        ending.cause = "law";
+        return;
+      }
+      last = t;
+      gLast = gt;
+    }
+  }
+
+  /** The fastest rate of the body and its inputs, 1/s. */
+  private rate(): number {
+    const { body, problem, stance } = this;
+    const stiffness = body.stiffness + 3 * Math.abs(body.cubic) * stance.position ** 2;
+    const own = Math.max(Math.sqrt(stiffness / body.inertia), body.viscous / body.inertia, this.inputs.fastest());
+    return own > 0 ? own : 4 / problem.seconds;
+  }
+
+  /** Typical d and ḋ, m and m/s. */
+  private sizes(rate: number): number[] {
+    const { stance, body, problem } = this;
+    const v = this.inputs.evaluate(0);
+    const force = Math.abs(v.force) + problem.law.atRest * problem.radius * v.normal;
+    const speed = Math.max(Math.abs(stance.velocity), Math.abs(problem.beltVelocity), Math.abs(v.baseVelocity));
+    const inputs = force / body.inertia / rate ** 2 + this.inputs.baseBound(0);
+    const size = Math.max(Math.abs(stance.position), speed / rate, inputs) || 1;
+    return [size, size * rate];
+  }
+}
