@@ -8,6 +8,7 @@ import { readQuantity } from "../../format/format-quantity.ts";
 import { stripWords } from "./plot-words.ts";
 import { phaseWords } from "./readings.ts";
 import type { RunView } from "./run-view.ts";
+import "./docked-strip.css";
 
 interface DockedStripProps {
   view: RunView;
@@ -24,7 +25,7 @@ export function DockedStrip({ view, t, onMove, onStep }: DockedStripProps) {
     onMove(Math.min(1, Math.max(0, (clientX - box.left) / box.width)) * view.end);
   };
   return (
-    <div className="fixed inset-x-0 bottom-0 z-20 border-t border-edge bg-paper px-4 pt-2 pb-[max(8px,env(safe-area-inset-bottom))] print:hidden">
+    <div className="docked-strip fixed inset-x-0 bottom-0 z-20 border-t border-edge bg-paper px-4 pt-2 pb-[max(8px,env(safe-area-inset-bottom))] print:hidden">
       <p className="mb-1 flex justify-between text-13">
         <span className={classNames("font-bold", phase === "stuck" ? "text-stick" : "text-slip")}>{phase}</span>
         <Figure {...readQuantity(t, { dimension: "time", motion: "linear" }, { digits: 4 })} />

@@ -38,7 +38,7 @@ export function DragRuler({ path, before, entry, label }: DragRulerProps) {
         {ticksOf(inUnit(before), REACH).map(({ at, value, isLabelled }) => (
           <g key={at}>
             <path d={`M${x(at)} 26v${isLabelled ? -9 : -5}`} className="stroke-edge" />
-            {isLabelled && (
+            {isLabelled && (width >= WIDE || isDecade(value)) && (
               <text x={x(at)} y={12} textAnchor="middle" className="figures fill-quiet text-[12.5px]">
                 {formatNumber(value)}
               </text>
@@ -71,6 +71,10 @@ export function DragRuler({ path, before, entry, label }: DragRulerProps) {
     </div>
   );
 }
+
+/** Below this width, px, only whole decades have room for a figure. */
+const WIDE = 420;
+const isDecade = (value: number): boolean => Number.isInteger(Math.round(1e6 * Math.log10(Math.abs(value))) / 1e6);
 
 /** Three significant digits: finer than a hand drags. The value that was there stays within reach. */
 function rounded(value: number, before: number): number {

@@ -52,7 +52,8 @@ function PressingColumn() {
   const { draft, dispatch } = useDraftContext();
   const { wanted } = draft.sheet;
   const { normal } = wanted.contact;
-  const together = normalForce(wanted);
+  const together = normalForce(draft.inForce);
+  const { preload, faces } = draft.inForce.contact.normal;
   const force = (value: number): string => say(value, { dimension: "pressing", motion: wanted.motion }, { digits: 5 });
   return (
     <FormColumn title="What presses the faces together">
@@ -62,7 +63,7 @@ function PressingColumn() {
       {wanted.motion === "linear" && (
         <Checkbox
           label="Its weight presses too"
-          help={normal.weight ? `adds ${force(together - normal.faces * normal.preload)}` : undefined}
+          help={normal.weight ? `adds ${force(together - faces * preload)}` : undefined}
           checked={normal.weight}
           onChange={(event) =>
             dispatch({ type: "set", path: "contact.normal.weight", value: event.currentTarget.checked })
