@@ -1,5 +1,11 @@
 import type { Dimension } from "@restband/solver";
 
+/** What a number measures: what fields of scenarios do, and what only the way to a value needs. */
+export type Measurand =
+  | Dimension
+  | "pressure" // Pa always: elastic moduli, stresses
+  | "density"; // kg/m³ always
+
 /** A unit people type and read. SI value = value in this unit × factor. */
 export interface Unit {
   /** As it is shown and chosen: "N/μm". Micro is U+03BC. */
@@ -16,7 +22,7 @@ export type Motion = "linear" | "angular";
 
 /** What a number measures and on which kind of body: together they settle its units. */
 export interface Measure {
-  readonly dimension: Dimension;
+  readonly dimension: Measurand;
   readonly motion: Motion;
   /** A plain number that is a share of something, read as a percentage. */
   readonly isShare?: boolean;

@@ -1,5 +1,4 @@
-import type { Dimension } from "@restband/solver";
-import type { Measure, Unit } from "./unit.ts";
+import type { Measurand, Measure, Unit } from "./unit.ts";
 
 const INCH = 0.0254;
 const POUND = 0.45359237;
@@ -61,7 +60,7 @@ const accelerations: readonly Unit[] = [
 ];
 
 /** Per dimension the units of a linear body, and those of an angular one where they differ. The first is the one for zero. */
-const table: Record<Dimension, { linear: readonly Unit[]; angular?: readonly Unit[] }> = {
+const table: Record<Measurand, { linear: readonly Unit[]; angular?: readonly Unit[] }> = {
   none: {
     linear: [
       { label: "", factor: 1, from: 0 },
@@ -178,6 +177,22 @@ const table: Record<Dimension, { linear: readonly Unit[]; angular?: readonly Uni
       { label: "mJ", factor: 1e-3, from: 1 },
       { label: "μJ", factor: 1e-6, from: 0 },
       { label: "kJ", factor: 1e3, from: 10 },
+    ],
+  },
+  pressure: {
+    linear: [
+      { label: "MPa", factor: 1e6, from: 0.1, aliases: ["N/mm²"] },
+      { label: "Pa", factor: 1, from: 0 },
+      { label: "GPa", factor: 1e9, from: 1 },
+      { label: "psi", factor: POUND_FORCE / INCH ** 2 },
+      { label: "ksi", factor: (1e3 * POUND_FORCE) / INCH ** 2 },
+    ],
+  },
+  density: {
+    linear: [
+      { label: "kg/m³", factor: 1, from: 0 },
+      { label: "g/cm³", factor: 1e3, aliases: ["kg/dm³"] },
+      { label: "lb/in³", factor: POUND / INCH ** 3 },
     ],
   },
 };

@@ -1,0 +1,33 @@
+import { lazy, type ComponentType } from "react";
+import { Dialog } from "../../components/dialog.tsx";
+import type { ReckoningBodyProps } from "./reckoning-body.ts";
+import type { ReckoningKey } from "./reckonings.ts";
+
+const ChainBody = lazy(async () => ({ default: (await import("./chain/chain-body.tsx")).ChainBody }));
+const SheetBody = lazy(async () => ({ default: (await import("./sheets/sheet-body.tsx")).SheetBody }));
+const TableBody = lazy(async () => ({ default: (await import("./tables/table-body.tsx")).TableBody }));
+
+/** What each reckoning looks like inside; loaded when it is opened. */
+const bodies: Readonly<Record<ReckoningKey, ComponentType<ReckoningBodyProps>>> = {
+  "friction-pairs": TableBody,
+  "loss-factors": TableBody,
+  "loss-from-decay": SheetBody,
+  "stiffness-chain": ChainBody,
+  "inertia-sum": ChainBody,
+  damping: SheetBody,
+  bolts: SheetBody,
+  "band-brake": SheetBody,
+};
+
+/** A reckoning in a dialog; what comes out is taken into the scenario by its button, with where it comes from. */
+export function ReckoningDialog(props: ReckoningBodyProps) {
+  const Body = bodies[props.reckoning.key];
+  return (
+    // Keys pressed in here are not for the value editor the dialog was opened from.
+    <div onKeyDown={(event) => event.stopPropagation()}>
+      <Dialog isOpen title={props.reckoning.title} onClose={props.onClose} isWide>
+        <Body {...props} />
+      </Dialog>
+    </div>
+  );
+}

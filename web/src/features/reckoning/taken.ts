@@ -1,0 +1,9 @@
+import type { Origin } from "@restband/solver";
+
+/** A value a reckoning gives to a field of the scenario, with where it comes from. */
+export interface Taken {
+  readonly path: string;
+  /** SI. */
+  readonly value: number;
+  readonly origin: Origin;
+}
