@@ -139,22 +139,56 @@ function takeExtremes(motion: Motion, i: number, tally: Tally, times: Float64Arr
     if (values[n] > tally.max) tally.max = values[n];
     if (values[n] < tally.min) tally.min = values[n];
   }
-  for (let n = 1; n + 1 < nodes; n++) {
-    const isTop = values[n] >= values[n - 1] && values[n] >= values[n + 1];
-    const isBottom = values[n] <= values[n - 1] && values[n] <= values[n + 1];
-    if (isTop === isBottom) continue;
-    const sign = isTop ? 1 : -1;
-    const best = isTop ? tally.max : -tally.min;
-    const bend = Math.max(Math.abs(values[n] - values[n - 1]), Math.abs(values[n] - values[n + 1]));
-    if (sign * values[n] + bend <= best) continue;
-    const value = (t: number): number => {
-      motion.read(i, t, state);
-      return sign * tally.channel(state);
-    };
-    const top = peak(value, times[n - 1], times[n], times[n + 1], sign * values[n]);
-    if (isTop) tally.max = Math.max(tally.max, top);
-    else tally.min = Math.min(tally.min, -top);
+  for (let n = 1; n + 1 < nodes; n++) polish(motion, i, tally, times, state, n, times[n], values[n]);
+  // between the outermost node and the end of the panel no node can stand out: the parabola through three of them tells
+  for (const n of [1, nodes - 2]) {
+    const t = vertex(times, values, n);
+    const isOutside = n === 1 ? t > times[0] && t < times[1] : t > times[n] && t < times[n + 1];
+    if (!isOutside) continue;
+    motion.read(i, t, state);
+    const value = tally.channel(state);
+    const outer = n === 1 ? 0 : n + 1;
+    if (value > Math.max(values[n], values[outer]) || value < Math.min(values[n], values[outer])) {
+      polish(motion, i, tally, times, state, n, t, value);
+    }
   }
+}
+
+/** Where the parabola through nodes n − 1, n, n + 1 has its top or bottom; NaN where it is a line. */
+function vertex(times: Float64Array, values: Float64Array, n: number): number {
+  const left = times[n] - times[n - 1];
+  const right = times[n] - times[n + 1];
+  const r = left * (values[n] - values[n + 1]);
+  const q = right * (values[n] - values[n - 1]);
+  return times[n] - (0.5 * (left * r - right * q)) / (r - q);
+}
+
+/** Takes the top or bottom about t, between the nodes on both sides of n, into the tally if it could be a new extreme. */
+function polish(
+  motion: Motion,
+  i: number,
+  tally: Tally,
+  times: Float64Array,
+  state: State,
+  n: number,
+  t: number,
+  at: number,
+): void {
+  const { values } = tally;
+  const isTop = at >= values[n - 1] && at >= values[n + 1];
+  const isBottom = at <= values[n - 1] && at <= values[n + 1];
+  if (isTop === isBottom) return;
+  const sign = isTop ? 1 : -1;
+  const best = isTop ? tally.max : -tally.min;
+  const bend = Math.max(Math.abs(at - values[n - 1]), Math.abs(at - values[n + 1]));
+  if (sign * at + bend <= best) return;
+  const value = (time: number): number => {
+    motion.read(i, time, state);
+    return sign * tally.channel(state);
+  };
+  const top = peak(value, times[n - 1], t, times[n + 1], sign * at);
+  if (isTop) tally.max = Math.max(tally.max, top);
+  else tally.min = Math.min(tally.min, -top);
 }
 
 class Tallied implements Survey {

@@ -47,6 +47,8 @@ export class IntegratedSlip implements Slip {
     Object.assign(this.stance, stance);
     this.body = { ...body };
     const i = this.lastStartedAt(stance.t);
+    this.first = 0;
+    this.last = -1; // not followed yet: told by its start alone
     if (i < 0) return;
     this.first = this.firstSteps[i];
     this.last = (this.firstSteps[i + 1] ?? this.store.count) - 1;
