@@ -8,6 +8,7 @@ import { Plot } from "../../components/plot.tsx";
 import { usePlotTheme } from "../../components/plot-theme.ts";
 import { useShortcut } from "../../components/shortcuts.tsx";
 import { useIsPhone } from "../../components/use-media.ts";
+import { useThrottled } from "../../components/use-throttled.ts";
 import { useWidth } from "../../components/use-width.ts";
 import { readQuantity } from "../../format/format-quantity.ts";
 import { DockedStrip } from "./docked-strip.tsx";
@@ -29,8 +30,12 @@ interface EvidenceProps {
   isStale: boolean;
 }
 
+/** While a value is dragged the plots take the newest run five times a second: drawing them takes longer than a frame. */
+const DRAWN_EVERY_MS = 200;
+
 /** The motion strip and the plots of a run over one time axis, under one cursor. */
-export function Evidence({ view, t, onMove, isStale }: EvidenceProps) {
+export function Evidence({ view: newest, t, onMove, isStale }: EvidenceProps) {
+  const view = useThrottled(newest, DRAWN_EVERY_MS);
   const isPhone = useIsPhone();
   const [ref, width] = useWidth<HTMLDivElement>(1160);
   const [part, setPart] = useState<Range | null>(null);
