@@ -43,6 +43,11 @@ describe("a limit in words and on its ruler", () => {
     ],
   ])("%o", (limit, said, [from, to]) => expect(read(limit)).toEqual({ said, from, to }));
 
+  it("says why, not how much, where the run was cut off", () => {
+    const cut = { kept: null, margin: null, reason: "The run was cancelled before its end." };
+    expect(read(cut).said).toBe("at most 2 m/s² | cannot be judged | The run was cancelled before its end.");
+  });
+
   it("says that only the values as entered were run", () => {
     expect(read({}, true).said).toContain("kept as entered only");
     expect(read({ kept: null, margin: null, value: null, reason: "None." }, true).said).toContain(

@@ -3,6 +3,8 @@ import { inputsOf } from "../../../web/src/compute/inputs.ts";
 import { instantAt } from "../../../web/src/compute/instant.ts";
 import { intervalsOf, shownEnd } from "../../../web/src/compute/intervals.ts";
 import { eventsCsv } from "../../../web/src/features/evidence/event-columns.ts";
+import { frameOf } from "../../../web/src/features/evidence/frame.ts";
+import { scalesOf } from "../../../web/src/features/evidence/scales.ts";
 import { figureWords, stripWords } from "../../../web/src/features/evidence/plot-words.ts";
 import { phaseWords, readingsAt } from "../../../web/src/features/evidence/readings.ts";
 import {
@@ -124,12 +126,13 @@ describe("the cursor", () => {
 
   it("reads the values of its instant", () => {
     const stop = feed.result.events.find(({ kind }) => kind === "stop");
-    const readings = readingsAt(feed, stop?.t ?? 0);
+    const range = { from: 0, to: feed.end };
+    const readings = readingsAt(feed, frameOf(1160, range, scalesOf(feed, range)), stop?.t ?? 0);
     const say = (list: { name: string; text: string; unit: string }[]): string[] =>
       list.map(({ name, text, unit }) => `${name} ${text} ${unit}`);
     expect(say(readings.displacement)).toEqual([
-      "carriage 77.39 μm",
-      "drive 122.7 μm",
+      "carriage 0.07739 mm",
+      "drive 0.1227 mm",
       "behind drive −45.28 μm",
       "rest band ±74.1 μm",
     ]);

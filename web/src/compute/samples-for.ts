@@ -2,7 +2,7 @@ import type { Scenario } from "@restband/solver";
 
 const PER_CYCLE = 60;
 const FEWEST = 4001;
-const MOST = 40001;
+const MOST = 120_001;
 
 /** How many samples a run is drawn from: enough for a smooth curve through every cycle of the fastest thing in it. */
 export function samplesFor({ body, force, base, contact, span }: Scenario): number {

@@ -35,7 +35,7 @@ export function readLimit(limit: LimitVerdict, motion: Motion, asEntered: boolea
     demand: demandOf(limit, words),
     verdict: limit.kept === null ? "unknown" : limit.kept ? "kept" : "broken",
     word: wordOf(limit.kept, asEntered),
-    value: limit.value === null ? "" : words(limit.value),
+    value: limit.value === null || limit.kept === null ? "" : words(limit.value),
     remark: remarkOf(limit, words),
     from,
     to,

@@ -1,6 +1,6 @@
 import type { MotionEvent } from "@restband/solver";
 import { useVirtualizer } from "@tanstack/react-virtual";
-import { useRef, type ReactNode, type RefObject } from "react";
+import { useRef, type ReactNode } from "react";
 import { classNames } from "../../components/class-names.ts";
 import { announce } from "../../components/status.tsx";
 import { formatNumber } from "../../format/format-number.ts";
@@ -23,6 +23,13 @@ const ALL_UP_TO = 200;
 export function EventTable({ view, t, onMove }: EventTableProps) {
   const scroller = useRef<HTMLDivElement>(null);
   const { events } = view.result;
+  const isLong = events.length > ALL_UP_TO;
+  const rows = useVirtualizer({
+    count: isLong ? events.length : 0,
+    getScrollElement: () => scroller.current,
+    estimateSize: () => ROW,
+    overscan: 12,
+  });
   const columns = columnsOf(view);
   const current = events.findIndex((event) => event.t === t);
   const row = (index: number, top?: number): ReactNode => (
@@ -47,8 +54,10 @@ export function EventTable({ view, t, onMove }: EventTableProps) {
       >
         <table className="grid w-full min-w-[640px]" aria-rowcount={events.length + 1}>
           <EventHead columns={columns} />
-          {events.length > ALL_UP_TO ? (
-            <VirtualRows count={events.length} scroller={scroller} row={row} />
+          {isLong ? (
+            <tbody className="relative grid" style={{ height: rows.getTotalSize() }}>
+              {rows.getVirtualItems().map(({ index, start }) => row(index, start))}
+            </tbody>
           ) : (
             <tbody className="grid">{events.map((_, index) => row(index))}</tbody>
           )}
@@ -56,26 +65,6 @@ export function EventTable({ view, t, onMove }: EventTableProps) {
       </div>
       <EventFoot view={view} />
     </div>
-  );
-}
-
-interface VirtualRowsProps {
-  count: number;
-  scroller: RefObject<HTMLDivElement | null>;
-  row: (index: number, top: number) => ReactNode;
-}
-
-function VirtualRows({ count, scroller, row }: VirtualRowsProps) {
-  const rows = useVirtualizer({
-    count,
-    getScrollElement: () => scroller.current,
-    estimateSize: () => ROW,
-    overscan: 12,
-  });
-  return (
-    <tbody className="relative grid" style={{ height: rows.getTotalSize() }}>
-      {rows.getVirtualItems().map(({ index, start }) => row(index, start))}
-    </tbody>
   );
 }
 

@@ -53,7 +53,7 @@ export function Evidence({ view: newest, t, onMove, isStale }: EvidenceProps) {
         <CursorWords view={view} t={t} />
         <ViewChoice range={range} whole={view.end} last={lastCycles(view)} t={t} onChoose={setPart} />
       </div>
-      {isPhone && <ReadingsRow view={view} t={t} />}
+      {isPhone && <ReadingsRow view={view} frame={frame} t={t} />}
       <div className="border-line bg-raised max-desk:-mx-(--page-pad) max-desk:border-y desk:rounded desk:border">
         <div ref={ref} className="relative">
           <StripRow view={view} frame={frame} t={t} />

@@ -14,7 +14,7 @@ const tones: Record<CursorReading["tone"], string> = {
 
 /** The values at the cursor beside their panels, in the colours of their curves. */
 export function Gutter({ view, frame, t }: { view: RunView; frame: Frame; t: number }) {
-  const readings = readingsAt(view, t);
+  const readings = readingsAt(view, frame, t);
   return frame.panels.map(({ key, top }) => (
     <dl key={key} className="absolute" style={{ top: top - 6, left: frame.width - frame.right + 20, right: 8 }}>
       {readings[key].map((reading) => (
@@ -25,8 +25,8 @@ export function Gutter({ view, frame, t }: { view: RunView; frame: Frame; t: num
 }
 
 /** On the phone: the first value of each panel, above the plots. */
-export function ReadingsRow({ view, t }: { view: RunView; t: number }) {
-  const readings = readingsAt(view, t);
+export function ReadingsRow({ view, frame, t }: { view: RunView; frame: Frame; t: number }) {
+  const readings = readingsAt(view, frame, t);
   return (
     <dl className="mb-3 grid grid-cols-3 gap-3">
       {[readings.displacement[0], readings.velocity[0], readings.friction[0]].map((reading) => (

@@ -1,8 +1,9 @@
+import type { Dimension } from "@restband/solver";
 import { instantAt, type Instant } from "../../compute/instant.ts";
 import { readQuantity, say, type Reading } from "../../format/format-quantity.ts";
 import { nounOf } from "../../format/noun.ts";
-import type { Measure } from "../../format/unit.ts";
-import type { PanelKey } from "./frame.ts";
+import type { Unit } from "../../format/unit.ts";
+import type { Frame, PanelKey } from "./frame.ts";
 import type { RunView } from "./run-view.ts";
 
 /** A figure at the cursor, in the colour of its curve. */
@@ -12,59 +13,60 @@ export interface CursorReading extends Reading {
 }
 
 /** What stands in the gutter beside each panel: the values at the cursor, exact where an event is. */
-export function readingsAt(view: RunView, t: number): Record<PanelKey, CursorReading[]> {
+export function readingsAt(view: RunView, frame: Frame, t: number): Record<PanelKey, CursorReading[]> {
   const here = instantAt(view.samples, t);
+  const unitOf = (key: PanelKey): Unit | undefined => frame.panels.find((panel) => panel.key === key)?.unit;
   return {
-    displacement: displacementReadings(view, here),
+    displacement: displacementReadings(view, here, unitOf("displacement")),
     velocity: [
-      reading(view, "velocity", here.v, "velocity", "slip"),
+      reading(view, "velocity", here.v, "velocity", "slip", { unit: unitOf("velocity") }),
       reading(view, "acceleration", here.a, "acceleration", "ink"),
     ],
-    friction: frictionReadings(view, here),
+    friction: frictionReadings(view, here, unitOf("friction")),
   };
 }
 
-function displacementReadings(view: RunView, { t, x }: Instant): CursorReading[] {
+function displacementReadings(view: RunView, { t, x }: Instant, unit: Unit | undefined): CursorReading[] {
   const { scenario, inputs } = view;
-  const own = reading(view, nounOf(scenario), x, "displacement", "slip");
+  const own = reading(view, nounOf(scenario), x, "displacement", "slip", { unit });
   const band = inputs.restBand === null ? [] : [bandReading(view, inputs.restBand)];
   if (scenario.base.length === 0) return [own, ...band];
   const y = inputs.base(t);
   const isBehind = view.scenario.base.some(({ kind }) => kind === "ramp");
   return [
     own,
-    reading(view, "drive", y, "displacement", "quiet"),
+    reading(view, "drive", y, "displacement", "quiet", { unit }),
     reading(view, isBehind && x < y ? "behind drive" : "ahead of drive", x - y, "displacement", "ink"),
     ...band,
   ];
 }
 
 function bandReading(view: RunView, restBand: number): CursorReading {
-  const band = reading(view, "rest band", restBand, "displacement", "band", 3);
+  const band = reading(view, "rest band", restBand, "displacement", "band", { digits: 3 });
   return { ...band, text: `±${band.text}` };
 }
 
-function frictionReadings(view: RunView, { t, f, v, phase }: Instant): CursorReading[] {
+function frictionReadings(view: RunView, { t, f, v, phase }: Instant, unit: Unit | undefined): CursorReading[] {
   const { scenario, inputs } = view;
   const { counterface } = scenario.contact;
-  const own = reading(view, "friction", f, "force", phase === 0 ? "stick" : "slip");
+  const own = reading(view, "friction", f, "force", phase === 0 ? "stick" : "slip", { unit });
   const hold = inputs.hold(t);
   const holding = hold > 0 ? [reading(view, "holds up to", hold, "force", "stick")] : [];
   if (counterface === "base") return [own, ...holding];
   const sliding = v - (typeof counterface === "object" ? counterface.velocity : 0);
   const heat = phase === 0 ? 0 : -f * sliding;
-  return [own, reading(view, "heat in contact", heat, "power", "ink", 3), ...holding];
+  return [own, reading(view, "heat in contact", heat, "power", "ink", { digits: 3 }), ...holding];
 }
 
 function reading(
   { scenario }: RunView,
   name: string,
   value: number,
-  dimension: Measure["dimension"],
+  dimension: Dimension,
   tone: CursorReading["tone"],
-  digits = 4,
+  options: { unit?: Unit; digits?: number } = {},
 ): CursorReading {
-  return { name, tone, ...readQuantity(value, { dimension, motion: scenario.motion }, { digits }) };
+  return { name, tone, ...readQuantity(value, { dimension, motion: scenario.motion }, { digits: 4, ...options }) };
 }
 
 /** "slipping forward for 13.2 ms": the phase at a time and how long it has lasted. */
