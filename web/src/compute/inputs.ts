@@ -4,6 +4,8 @@ import { compileProblem, type Problem, type Scenario } from "@restband/solver";
 export interface Inputs {
   /** y of the base, m (rad); 0 where all is told relative to it. */
   readonly base: (t: number) => number;
+  /** The applied force, N (N·m). */
+  readonly force: (t: number) => number;
   /** Where the body would stand without friction and motion: k d + k3 d³ = F + W; null without a spring. */
   readonly equilibrium: (t: number) => number | null;
   /** μs N r: what friction can hold, N (N·m). */
@@ -21,11 +23,12 @@ export function inputsOf(scenario: Scenario): Inputs {
   const problem = compileProblem(scenario);
   const { stiffness, cubic, normal, radius, law, weight } = problem;
   const base = (t: number): number => (problem.isRelative ? 0 : sum(problem.base, t));
-  const push = (t: number): number => sum(problem.force, t) + weight;
+  const force = (t: number): number => sum(problem.force, t);
   const holds = law.atRest * radius;
   return {
     base,
-    equilibrium: (t) => (stiffness > 0 ? base(t) + stretch(push(t), stiffness, cubic) : null),
+    force,
+    equilibrium: (t) => (stiffness > 0 ? base(t) + stretch(force(t) + weight, stiffness, cubic) : null),
     hold: (t) => holds * Math.max(0, normal + rippleAt(problem, t)),
     restBand: stiffness > 0 && holds * normal > 0 ? (holds * normal) / stiffness : null,
     isConstant: [...problem.force, ...problem.base].every((term) => term.isConstantFrom(0)),

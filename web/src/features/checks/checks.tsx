@@ -1,12 +1,14 @@
 import type { Result, Scenario } from "@restband/solver";
 import { EnergyLedger } from "./energy-ledger.tsx";
 import { methodWords, noteWords } from "./method-words.ts";
+import { Textbook } from "./textbook.tsx";
 
-/** What the run says of itself: its energy, its method, its notes. */
+/** What the run says of itself: its energy, the textbook beside it, its method, its notes. */
 export function Checks({ scenario, result }: { scenario: Scenario; result: Result }) {
   return (
     <div className="grid items-start gap-x-10 gap-y-8 wide:grid-cols-2">
       {result.energy && <EnergyLedger energy={result.energy} method={result.method} />}
+      <Textbook scenario={scenario} result={result} />
       <div>
         <h3 className="border-b border-edge pb-2 text-13 font-semibold text-quiet">How it was computed</h3>
         {methodWords(scenario, result).map((sentence) => (
