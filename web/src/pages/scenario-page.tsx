@@ -1,6 +1,6 @@
 import type { Project, StoredScenario } from "@restband/api/contract";
 import { useSuspenseQueries } from "@tanstack/react-query";
-import { lazy, Suspense, useMemo, useState } from "react";
+import { lazy, Suspense, useCallback, useMemo, useState } from "react";
 import { useParams } from "react-router-dom";
 import { projectQuery } from "../api/projects.ts";
 import { scenarioQuery } from "../api/scenarios.ts";
@@ -13,7 +13,9 @@ import { WorkHeader } from "../features/account/work-header.tsx";
 import { Answer } from "../features/answer/answer.tsx";
 import { Cautions } from "../features/cautions/cautions.tsx";
 import { Checks } from "../features/checks/checks.tsx";
-import { firstCursor, runViewOf } from "../features/evidence/run-view.ts";
+import { runViewOf, type RunView } from "../features/evidence/run-view.ts";
+import { ReckoningLinks } from "../features/reckoning/reckoning-links.tsx";
+import { takeValues } from "../features/statement/changes.ts";
 import { savedWords } from "../features/statement/saving/saved-words.ts";
 import { useDraft } from "../features/statement/saving/use-draft.ts";
 import { isSameScenario } from "../features/statement/saving/differences.ts";
@@ -22,6 +24,8 @@ import { Statement } from "../features/statement/statement.tsx";
 import { UndoButtons } from "../features/statement/undo-buttons.tsx";
 import { mayEdit } from "../features/project-home/roles.ts";
 import { paths } from "../paths.ts";
+import { sharedValue } from "../shared-value.ts";
+import { CursorSketch, useCursor, type Cursor } from "./cursor-sketch.tsx";
 
 // None of these is needed for the first answer: they come after it.
 const Evidence = lazy(async () => ({ default: (await import("../features/evidence/evidence.tsx")).Evidence }));
@@ -52,9 +56,22 @@ function OpenScenario({ project, stored }: { project: Project; stored: StoredSce
   const ranges = useRanges(run.computed, run.isStale);
   const subject = run.computed?.scenario ?? inForce;
   const say = (path: string, value: number, towards: number) => sayField(subject, path, value, towards);
+  const view = useRunView(run.computed);
+  const [cursor] = useState(() => sharedValue<number | null>(null));
   const before = useBeforeEdit(run.computed, draft.merging !== null);
   const isTrying = !canEdit && !isSameScenario(inForce, stored.content);
   const title = inForce.title || "Untitled";
+  const aside = useCallback(
+    (path: string) => (
+      <ReckoningLinks
+        path={path}
+        scenario={inForce}
+        keptUnder={stored.id}
+        onTake={(taken) => dispatch(takeValues(taken))}
+      />
+    ),
+    [inForce, stored.id, dispatch],
+  );
   return (
     <>
       <title>{`${title} · Restband`}</title>
@@ -66,16 +83,23 @@ function OpenScenario({ project, stored }: { project: Project; stored: StoredSce
       />
       <WorkedPage className="max-desk:pb-40">
         <Section name="Answer" help="Computed here, anew with every change.">
-          <Answer run={run} before={before} ranges={ranges} say={say} />
+          <Answer
+            run={run}
+            before={before}
+            ranges={ranges}
+            say={say}
+            sketch={view && <CursorSketch view={view} cursor={cursor} />}
+          />
         </Section>
         <Section name="Statement" help="Tab moves from value to value, Enter opens one, Esc puts it back.">
           <Statement
             draft={draft}
             dispatch={dispatch}
+            aside={aside}
             refusal={run.computed && "refusal" in run.computed ? run.computed.refusal : null}
           />
         </Section>
-        <RunSections computed={run.computed} isStale={run.isStale} />
+        <RunSections computed={run.computed} view={view} cursor={cursor} isStale={run.isStale} />
       </WorkedPage>
       {saving.kind === "conflict" && (
         <Suspense>
@@ -98,13 +122,25 @@ function useBeforeEdit(computed: Computed | null, isEditing: boolean): Computed 
   return isEditing && settled !== computed ? settled : null;
 }
 
+/** The run made ready to be looked at; null without one that has samples. */
+function useRunView(computed: Computed | null): RunView | null {
+  return useMemo(
+    () => (computed && "result" in computed ? runViewOf(computed.scenario, computed.result) : null),
+    [computed],
+  );
+}
+
+interface RunSectionsProps {
+  computed: Computed | null;
+  view: RunView | null;
+  cursor: Cursor;
+  isStale: boolean;
+}
+
 /** Everything that shows the run itself, under one time cursor. */
-function RunSections({ computed, isStale }: { computed: Computed | null; isStale: boolean }) {
-  const result = computed && "result" in computed ? computed.result : null;
-  const view = useMemo(() => (computed && result ? runViewOf(computed.scenario, result) : null), [computed, result]);
-  const [cursor, setCursor] = useState<number | null>(null);
-  if (!computed || !result || !view) return computed && <CautionSection computed={computed} />;
-  const t = Math.min(cursor ?? firstCursor(view), view.end);
+function RunSections({ computed, view, cursor, isStale }: RunSectionsProps) {
+  const t = useCursor(cursor, view);
+  if (!computed || !view) return computed && <CautionSection computed={computed} />;
   return (
     <>
       <Section
@@ -117,14 +153,14 @@ function RunSections({ computed, isStale }: { computed: Computed | null; isStale
         }
       >
         <Suspense fallback={<div className="min-h-[600px]" />}>
-          <Evidence view={view} t={t} onMove={setCursor} isStale={isStale} />
+          <Evidence view={view} t={t} onMove={cursor.set} isStale={isStale} />
         </Suspense>
       </Section>
       <Section id="checks" name="Checks" help="The run checks itself each time it is computed.">
-        <Checks scenario={computed.scenario} result={result} />
+        <Checks scenario={view.scenario} result={view.result} />
         <h3 className="mt-8 mb-2 text-15 font-semibold">Events</h3>
         <Suspense fallback={<div className="min-h-[380px]" />}>
-          <EventTable view={view} t={t} onMove={setCursor} />
+          <EventTable view={view} t={t} onMove={cursor.set} />
         </Suspense>
       </Section>
       <CautionSection computed={computed} />

@@ -20,12 +20,12 @@ const bodies: Readonly<Record<ReckoningKey, ComponentType<ReckoningBodyProps>>> 
 };
 
 /** A reckoning in a dialog; what comes out is taken into the scenario by its button, with where it comes from. */
-export function ReckoningDialog(props: ReckoningBodyProps) {
+export function ReckoningDialog({ isOpen, ...props }: ReckoningBodyProps & { isOpen: boolean }) {
   const Body = bodies[props.reckoning.key];
   return (
     // Keys pressed in here are not for the value editor the dialog was opened from.
     <div onKeyDown={(event) => event.stopPropagation()}>
-      <Dialog isOpen title={props.reckoning.title} onClose={props.onClose} isWide>
+      <Dialog isOpen={isOpen} title={props.reckoning.title} onClose={props.onClose} isWide>
         <Body {...props} />
       </Dialog>
     </div>

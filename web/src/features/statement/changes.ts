@@ -7,6 +7,7 @@ import {
   type Field,
   type Law,
   type Limit,
+  type Origin,
   type Rows,
   type Scenario,
   type Solid,
@@ -22,6 +23,17 @@ export type Place = "force" | "base";
 function change(apply: (scenario: Scenario) => Scenario, rename?: (path: string) => string | null): DraftAction {
   return { type: "change", apply: (scenario) => withOwnOrigins(apply(renameOrigins(scenario, rename))), rename };
 }
+
+/** Values from elsewhere, each with where it comes from; what was typed in their place goes. One step of undo. */
+export const takeValues = (taken: readonly { path: string; value: number; origin: Origin }[]): DraftAction => ({
+  type: "change",
+  apply: (scenario) =>
+    taken.reduce<Scenario>((next, { path, value, origin }) => {
+      const written = writePath(next, path, value);
+      return { ...written, origins: { ...written.origins, [path]: origin } };
+    }, scenario),
+  rename: (path) => (taken.some((each) => each.path === path) ? null : path),
+});
 
 /** From straight to turning and back: what the other kind cannot have is taken out, the numbers stay. */
 export const setMotion = (motion: Scenario["motion"]): DraftAction =>

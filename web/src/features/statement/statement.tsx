@@ -3,18 +3,20 @@ import type { Dispatch, Draft } from "./draft/draft.ts";
 import { DraftContext } from "./draft/draft-context.ts";
 import { groupOf, groups } from "./groups.ts";
 import { StatementGroup } from "./statement-group.tsx";
-import { useMemo } from "react";
+import { useMemo, type ReactNode } from "react";
 
 interface StatementProps {
   draft: Draft;
   dispatch: Dispatch;
   /** A valid scenario that this version does not compute: said at the group it concerns. */
   refusal: Refusal["error"] | null;
+  /** What the page offers beside the number at a path. */
+  aside?: (path: string) => ReactNode;
 }
 
 /** What is asked, in five sentences whose values are edited in place. */
-export function Statement({ draft, dispatch, refusal }: StatementProps) {
-  const context = useMemo(() => ({ draft, dispatch }), [draft, dispatch]);
+export function Statement({ draft, dispatch, refusal, aside }: StatementProps) {
+  const context = useMemo(() => ({ draft, dispatch, aside }), [draft, dispatch, aside]);
   const remarks: readonly Fault[] = refusal?.faults.length ? refusal.faults : refusal ? [refusal] : [];
   return (
     <DraftContext.Provider value={context}>

@@ -2,6 +2,7 @@ import { say, sayShare } from "../../../format/format-quantity.ts";
 import type { Motion } from "../../../format/unit.ts";
 import { readEntries } from "../formula/entries.ts";
 import { valuesText } from "../formula/expression.ts";
+import { nameOf, unitOfResult } from "./compile-chain.ts";
 import { motionBehind, transmissionOf, type Kit } from "./kit.ts";
 import { largest, type Share } from "./network.ts";
 import { isGroup, type Group, type Member, type Part } from "./part.ts";
@@ -33,11 +34,12 @@ function partWords(part: Part, motion: Motion, kit: Kit): string {
 }
 
 /** "screw shaft (E 210 GPa, d 20 mm, L 500 mm) 132 N/μm"; a number from a sheet stands alone. */
-function memberWords({ name, formula: key, entries }: Member, kit: Kit): string {
-  const formula = kit.members.find((each) => each.key === key);
-  const values = formula && readEntries(formula, entries).values;
-  if (!formula || !values) return name;
-  const said = say(formula.value(values), formula.result.measure, { digits: 4 });
-  const numbers = formula.givens.length > 1 ? ` (${valuesText(formula, values, entries)})` : "";
-  return `${name}${numbers} ${said}`;
+function memberWords(member: Member, kit: Kit): string {
+  const formula = kit.members.find(({ key }) => key === member.formula);
+  const values = formula && readEntries(formula, member.entries).values;
+  if (!formula || !values) return nameOf(member);
+  const unit = unitOfResult(formula, member);
+  const said = say(formula.value(values), formula.result.measure, { unit, digits: 4 });
+  const numbers = unit ? "" : ` (${valuesText(formula, values, member.entries)})`;
+  return `${nameOf(member)}${numbers} ${said}`;
 }

@@ -1,5 +1,6 @@
-import type { Motion } from "../../../format/unit.ts";
-import { readEntries } from "../formula/entries.ts";
+import type { Motion, Unit } from "../../../format/unit.ts";
+import { readEntries, unitTyped } from "../formula/entries.ts";
+import type { Formula } from "../formula/formula.ts";
 import { motionBehind, transmissionOf, type Kit } from "./kit.ts";
 import type { Network } from "./network.ts";
 import { isGroup, type Group, type Member, type Part } from "./part.ts";
@@ -18,7 +19,14 @@ function compileMember(member: Member, motion: Motion, kit: Kit): Compiled {
   const { values } = readEntries(formula, member.entries);
   if (!values) return { missing: `${nameOf(member)} still wants a number.` };
   const value = formula.value(values);
-  return { network: { id: member.id, name: nameOf(member), value, measure: formula.result.measure } };
+  const { measure } = formula.result;
+  return { network: { id: member.id, name: nameOf(member), value, measure, unit: unitOfResult(formula, member) } };
+}
+
+/** A number from a sheet is said again in the unit it was typed in; what is computed, in the customary one. */
+export function unitOfResult({ givens, expression }: Formula, { entries }: Member): Unit | undefined {
+  const [{ key, measure }] = givens;
+  return expression === `{${key}}` ? unitTyped(entries[key], measure) : undefined;
 }
 
 function compileGroup(group: Group, motion: Motion, kit: Kit): Compiled {

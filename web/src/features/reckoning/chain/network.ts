@@ -1,4 +1,4 @@
-import type { Measure } from "../../../format/unit.ts";
+import type { Measure, Unit } from "../../../format/unit.ts";
 
 /** Members joined into a whole, as numbers: what a chain on the page comes down to. */
 export type Network = Leaf | Joint;
@@ -9,6 +9,8 @@ export interface Leaf {
   /** Stiffness or inertia of the member by itself, SI, above 0. */
   readonly value: number;
   readonly measure: Measure;
+  /** The unit it was typed in, where it is a number from a sheet. */
+  readonly unit?: Unit;
 }
 
 export interface Joint {

@@ -13,7 +13,7 @@ export function SharesTable({ shares, kit, measure }: { shares: readonly Share[]
       key: "own",
       head: "By itself",
       isFigure: true,
-      cell: (share) => <PowerText text={say(share.value, share.measure)} />,
+      cell: (share) => <PowerText text={say(share.value, share.measure, { unit: share.unit })} />,
     },
     { key: "seen", head: "At the body", isFigure: true, cell: ({ seen }) => <PowerText text={say(seen, measure)} /> },
     { key: "share", head: kit.shareHead, isFigure: true, cell: ({ share }) => sayShare(share) },

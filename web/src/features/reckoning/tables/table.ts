@@ -51,5 +51,5 @@ export function takenFrom({ columns, middle }: Table, row: TableRow): Taken[] {
   });
 }
 
-/** Two digits: a table that spans so much has no more. */
-const rounded = (value: number): number => Number(value.toPrecision(2));
+/** A middle to three digits: a table that spans so much has no more. */
+const rounded = (value: number): number => Number(value.toPrecision(3));

@@ -21,7 +21,7 @@ interface ValueEditorProps {
 
 /** Opens under a sentence: the number, its unit, equivalents, a ruler to drag, and the way back to what it was. */
 export function ValueEditor({ path, field, nib, onClose }: ValueEditorProps) {
-  const { draft, dispatch } = useDraftContext();
+  const { draft, dispatch, aside } = useDraftContext();
   const entry = useNumberEntry(path, field);
   const keeps = useKept(path);
   const [before] = useState({ value: entry.value, unit: entry.unit });
@@ -67,6 +67,7 @@ export function ValueEditor({ path, field, nib, onClose }: ValueEditorProps) {
         </FieldError>
       )}
       {field.help && !entry.fault && <p className="mt-1.5 text-13 text-quiet">{field.help}</p>}
+      {aside?.(path)}
       {isRulable && before.value !== undefined && (
         <DragRuler path={path} before={before.value} entry={entry} label={field.label} />
       )}

@@ -23,12 +23,16 @@ export function NumberField({ path, label, empty }: NumberFieldProps) {
 type FullFieldProps = Pick<NumberFieldProps, "path" | "empty"> & { field: NonNullable<ReturnType<typeof fieldAt>> };
 
 function FullField({ path, field, empty }: FullFieldProps) {
+  const { aside } = useDraftContext();
   const entry = useNumberEntry(path, field, empty);
   const keeps = useKept(path);
   const name = field.symbol ? `${field.label}, ${field.symbol}` : field.label;
   return (
-    <Field label={name} help={field.help} error={entry.fault && <EntryFault entry={entry} keeps={keeps} />}>
-      {(control) => <NumberControl entry={entry} label={field.label} {...control} />}
-    </Field>
+    <div>
+      <Field label={name} help={field.help} error={entry.fault && <EntryFault entry={entry} keeps={keeps} />}>
+        {(control) => <NumberControl entry={entry} label={field.label} {...control} />}
+      </Field>
+      {aside?.(path)}
+    </div>
   );
 }
