@@ -1,4 +1,4 @@
-import { useMemo } from "react";
+import { useMemo, type ReactNode } from "react";
 import { Button } from "../../components/button.tsx";
 import { classNames } from "../../components/class-names.ts";
 import { ErrorNote } from "../../components/error-note.tsx";
@@ -21,16 +21,18 @@ interface AnswerProps {
   ranges: RangeRun;
   /** Says a number of the scenario the run is of. */
   say: SayValue;
+  /** The body drawn beside the sentence. */
+  sketch: ReactNode;
 }
 
 /** What the body will do, in one sentence; how it moves; what became of the limits. */
-export function Answer({ run, before, ranges, say }: AnswerProps) {
+export function Answer({ run, before, ranges, say, sketch }: AnswerProps) {
   const { computed, isStale, progress, failure } = run;
   return (
     <div aria-busy={isStale || computed === null}>
       <div className={classNames(isStale && "stale")}>
         {computed ? (
-          <Computation computed={computed} before={before} ranges={ranges} say={say} />
+          <Computation computed={computed} before={before} ranges={ranges} say={say} sketch={sketch} />
         ) : (
           <p className="late text-24 text-quiet">Running the scenario</p>
         )}
@@ -49,25 +51,30 @@ export function Answer({ run, before, ranges, say }: AnswerProps) {
   );
 }
 
-function Computation({ computed, before, ranges, say }: Omit<AnswerProps, "run"> & { computed: Computed }) {
+function Computation({ computed, before, ranges, say, sketch }: Omit<AnswerProps, "run"> & { computed: Computed }) {
   if ("refusal" in computed) return <Refused message={computed.refusal.message} />;
   const { scenario, result } = computed;
   const report = ranges.state.kind === "done" ? ranges.state.report : null;
   const { before: subject, verdict, after, outcome } = answerSentence(scenario, result);
   return (
     <>
-      <h1
-        className="max-w-[860px] text-24 leading-[1.35] font-semibold desk:text-34 desk:leading-[1.3]"
-        aria-live="polite"
-      >
-        {subject}
-        <Verdict outcome={outcome}>{verdict}</Verdict>
-        {after}
-      </h1>
-      <p className="mt-3 max-w-(--measure) text-18 text-quiet">
-        {leadLine(scenario, result, report && rangesLine(report, say))}
-      </p>
-      <Strips computed={computed} before={before} />
+      <div className="grid gap-x-10 gap-y-6 wide:grid-cols-[minmax(0,1fr)_384px]">
+        <div className="min-w-0">
+          <h1
+            className="max-w-[860px] text-24 leading-[1.35] font-semibold desk:text-34 desk:leading-[1.3]"
+            aria-live="polite"
+          >
+            {subject}
+            <Verdict outcome={outcome}>{verdict}</Verdict>
+            {after}
+          </h1>
+          <p className="mt-3 max-w-(--measure) text-18 text-quiet">
+            {leadLine(scenario, result, report && rangesLine(report, say))}
+          </p>
+          <Strips computed={computed} before={before} />
+        </div>
+        <div className="min-w-0 max-w-[400px]">{sketch}</div>
+      </div>
       <LimitRulers scenario={scenario} limits={result.limits} report={report} say={say} />
       <RangeCoverage ranges={ranges} />
     </>
