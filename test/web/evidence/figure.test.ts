@@ -1,6 +1,8 @@
 import type { Samples } from "@restband/solver";
 import { describe, expect, it } from "vitest";
 import type { PlotTheme } from "../../../web/src/components/plot-theme.ts";
+import { instantAt } from "../../../web/src/compute/instant.ts";
+import { densified } from "../../../web/src/features/evidence/densified.ts";
 import { curveOf } from "../../../web/src/features/evidence/curve.ts";
 import { evidenceFigure } from "../../../web/src/features/evidence/evidence-figure.ts";
 import { frameOf, padded, plotWidth, timeAt, xOf, yOf } from "../../../web/src/features/evidence/frame.ts";
@@ -37,6 +39,25 @@ describe("thinning", () => {
     const kept = thinned(times, values, { from: 10.0005, to: 10.0995 }, 2000);
     expect([kept[0], kept[kept.length - 1]]).toEqual([10_000, 10_100]);
     expect(kept).toHaveLength(101);
+  });
+});
+
+describe("a part seen closely", () => {
+  const dense = densified(feed.samples, { from: 0.1, to: 0.102 });
+
+  it("gets instants between its samples, all samples and events kept", () => {
+    expect(dense.t.length).toBeGreaterThanOrEqual(1000);
+    const seen = feed.samples.t.filter((t) => t >= 0.1 && t <= 0.102);
+    for (const t of seen) expect(dense.t).toContain(t);
+    expect([...dense.t]).toEqual([...dense.t].sort((a, b) => a - b));
+    for (let i = 0; i < dense.t.length; i += 97) {
+      expect(dense.x[i]).toBe(instantAt(feed.samples, dense.t[i]).x);
+      expect(dense.phase[i]).toBe(instantAt(feed.samples, dense.t[i]).phase);
+    }
+  });
+
+  it("is left as it is where there are samples enough", () => {
+    expect(densified(feed.samples, { from: 0, to: 0.5 })).toBe(feed.samples);
   });
 });
 

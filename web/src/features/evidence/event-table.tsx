@@ -115,7 +115,8 @@ function EventRow({ event, index, top, columns, isCurrent, onMove }: EventRowPro
       style={{ top, height: ROW }}
     >
       <th scope="row" className="truncate text-left font-normal">
-        <button type="button" className="hover:underline" onClick={() => onMove(event.t)}>
+        {/* No stop of the Tab key each: the cursor itself goes from event to event by the arrow keys. */}
+        <button type="button" tabIndex={-1} className="hover:underline" onClick={() => onMove(event.t)}>
           {eventWords[event.kind]}
         </button>
         {isCurrent && <span className="ml-1.5 text-13 text-quiet">cursor is here</span>}

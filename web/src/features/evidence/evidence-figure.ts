@@ -2,9 +2,10 @@ import type { Data } from "plotly.js-dist-min";
 import { faded, type PlotTheme } from "../../components/plot-theme.ts";
 import { fromSi, type Unit } from "../../format/unit.ts";
 import { curveOf, type Line } from "./curve.ts";
+import { densified } from "./densified.ts";
 import { axes, layoutOf, type FigureLayout } from "./evidence-layout.ts";
 import type { Frame, PanelFrame } from "./frame.ts";
-import type { RunView } from "./run-view.ts";
+import { phaseChanges, type RunView } from "./run-view.ts";
 import { bandTimes, driveSpeed } from "./scales.ts";
 import { thinned } from "./thin.ts";
 
@@ -24,9 +25,10 @@ export function evidenceFigure(view: RunView, frame: Frame, theme: PlotTheme): {
 
 /** Sliding thin, stuck thick: told apart by width as well as by colour. */
 function curveTraces(view: RunView, frame: Frame, panel: PanelFrame, theme: PlotTheme): Data[] {
-  const { samples, eventIndices } = view;
+  const samples = densified(view.samples, frame);
+  const events = samples === view.samples ? view.eventIndices : phaseChanges(samples);
   const channel = channels[panel.key];
-  const seen = eventIndices.filter((i) => samples.t[i] >= frame.from && samples.t[i] <= frame.to);
+  const seen = events.filter((i) => samples.t[i] >= frame.from && samples.t[i] <= frame.to);
   const isDense = seen.length > MOST_POINTS / 4;
   // Told apart, each event costs points of its own; one dense line has them all for itself.
   const [count, keep] = isDense ? [0.9 * MOST_POINTS, []] : [MOST_POINTS / 2, seen.flatMap((i) => [i - 1, i])];

@@ -51,7 +51,8 @@ function standingOn(samples: Samples, end: number): Samples {
   };
 }
 
-function phaseChanges({ phase }: Samples): number[] {
+/** The samples at which a new phase begins. */
+export function phaseChanges({ phase }: Samples): number[] {
   const indices: number[] = [];
   for (let i = 1; i < phase.length; i++) if (phase[i] !== phase[i - 1]) indices.push(i);
   return indices;
