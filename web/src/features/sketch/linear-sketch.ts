@@ -165,7 +165,7 @@ function baseMotion({ scenario }: SketchState, { place, base, incline, isSteep }
     : [arrow(place(base - 43, height), place(base + 9, height))];
   const both = isOneWay ? [] : [arrow(place(base + 9, height), place(base - 43, height))];
   const isFalling = isSteep && fallsGently(incline);
-  const at = isFalling ? place(base - 50, height + 4) : place(base + 9, height + 15);
+  const at = isFalling ? place(base - 50, height + 20) : place(base + 9, height + 15);
   return [...line, ...both, label(at, words, isSteep && !isFalling ? outwards(incline) : "end")];
 }
 
@@ -197,10 +197,9 @@ function pressing({ scenario }: SketchState, { place, left, right, incline, isSt
   if (words === "" || !rubs(scenario)) return [];
   const middle = (left + right) / 2;
   const from = top + (scenario.contact.normal.faces > 1 ? 16 : 2);
-  const at = place(middle, from + 30);
-  const text = isSteep
-    ? label([at[0], at[1] - 10], words, outwards(incline))
-    : label([at[0] + 9, at[1]], words, "start");
+  const [x, y] = place(middle, from + 38);
+  const over = 36 * Math.sin((incline * Math.PI) / 180);
+  const text = isSteep ? label([x + over, y - 12], words, outwards(incline)) : label([x + 9, y + 8], words, "start");
   return [arrow(place(middle, from + 38), place(middle, from)), text];
 }
 
@@ -222,20 +221,22 @@ function inclineMark({ place, length, incline, left, right }: Measures): Shape[]
   if (incline === 0) return [];
   const isRising = incline > 0;
   const [x, y] = place(isRising ? 0 : length, -12);
-  const way = isRising ? 1 : -1;
+  const reach = (isRising ? 1 : -1) * (Math.abs(incline) > 60 ? 30 : 64);
   const [cx, cy] = place((left + right) / 2, 22);
   return [
     {
       kind: "line",
       points: [
         [x, y],
-        [x + way * 64, y],
+        [x + reach, y],
       ],
       tone: "quiet",
       width: 1,
       isDashed: true,
     },
-    label([x + way * 70, y], `${formatExactly(Math.abs(incline))}°`, isRising ? "start" : "end", { tone: "quiet" }),
+    label([x + reach + Math.sign(reach) * 6, y], `${formatExactly(Math.abs(incline))}°`, isRising ? "start" : "end", {
+      tone: "quiet",
+    }),
     arrow([cx, cy + 12], [cx, cy + 56]),
   ];
 }
