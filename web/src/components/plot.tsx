@@ -1,7 +1,8 @@
 import type { Data, Layout } from "plotly.js-dist-min";
-import { lazy, Suspense, useState } from "react";
+import { Suspense, useState } from "react";
+import { lazyPart } from "./lazy-part.ts";
 
-const PlotlyChart = lazy(async () => ({ default: (await import("./plotly-chart.tsx")).PlotlyChart }));
+const PlotlyChart = lazyPart(async () => (await import("./plotly-chart.tsx")).PlotlyChart);
 
 interface PlotProps {
   data: Data[];

@@ -1,15 +1,14 @@
-import { lazy, Suspense, useEffect, useRef } from "react";
+import { Suspense, useEffect, useRef } from "react";
 import { Outlet, ScrollRestoration, useLocation } from "react-router-dom";
 import { useHasSessionEnded } from "../api/session-end.ts";
 import { Hatches } from "../components/hatches.tsx";
+import { lazyPart } from "../components/lazy-part.ts";
 import { StatusRegion } from "../components/status.tsx";
 import { ConnectionLine } from "./connection-line.tsx";
 import { PageFallback } from "./page-fallback.tsx";
 
 // Loaded only when it is needed: its form is no part of the first paint.
-const SignInAgain = lazy(async () => ({
-  default: (await import("../features/account/sign-in-again.tsx")).SignInAgain,
-}));
+const SignInAgain = lazyPart(async () => (await import("../features/account/sign-in-again.tsx")).SignInAgain);
 
 /** What surrounds every page: the patterns, the announcements, the state of the connection. */
 export function RootLayout() {

@@ -1,8 +1,9 @@
-import { lazy, useState } from "react";
+import { useState } from "react";
 import { Dialog } from "../../components/dialog.tsx";
+import { lazyPart } from "../../components/lazy-part.ts";
 
 // Loaded when it is opened: it is no part of the first paint.
-const AddMemberForm = lazy(async () => ({ default: (await import("./add-member-form.tsx")).AddMemberForm }));
+const AddMemberForm = lazyPart(async () => (await import("./add-member-form.tsx")).AddMemberForm);
 
 /** Brings somebody with an account into the project. */
 export function AddMember({ projectId }: { projectId: string }) {

@@ -24,7 +24,7 @@ export function draftReducer(draft: Draft, action: DraftAction): Draft {
     case "redo":
       return goForward(draft);
     case "settle":
-      return draft.merging === null ? draft : { ...draft, merging: null };
+      return draft.merging === null ? draft : settled(draft);
     case "show-in":
       return { ...draft, sheet: withUnit(draft.sheet, action.path, action.unit) };
     case "set":
@@ -43,6 +43,16 @@ function step(draft: Draft, sheet: Sheet, merging: string | null): Draft {
   const anchor = isSameStep ? draft.anchor : draft.inForce;
   return { sheet, ...checkSheet(sheet, anchor), past, future: [], merging, anchor };
 }
+
+/** Ends a step; one that left all as it was is none. */
+function settled(draft: Draft): Draft {
+  const before = draft.past[draft.past.length - 1];
+  const isNone = before && isSameSheet(before, draft.sheet);
+  return { ...draft, past: isNone ? draft.past.slice(0, -1) : draft.past, merging: null };
+}
+
+const isSameSheet = (a: Sheet, b: Sheet): boolean =>
+  JSON.stringify([a.wanted, a.unread]) === JSON.stringify([b.wanted, b.unread]);
 
 function goBack(draft: Draft): Draft {
   const sheet = draft.past[draft.past.length - 1];

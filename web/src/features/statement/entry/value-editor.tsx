@@ -39,6 +39,7 @@ export function ValueEditor({ path, field, nib, onClose }: ValueEditorProps) {
     if (event.key !== "Escape") return;
     event.stopPropagation();
     putBack();
+    dispatch({ type: "settle" });
     onClose();
   };
   return (
@@ -71,7 +72,12 @@ export function ValueEditor({ path, field, nib, onClose }: ValueEditorProps) {
       {isRulable && before.value !== undefined && (
         <DragRuler path={path} before={before.value} entry={entry} label={field.label} />
       )}
-      <div className="mt-4 flex flex-wrap items-center gap-3 border-t border-line pt-3">
+      <div
+        className="mt-4 flex flex-wrap items-center gap-3 border-t border-line pt-3"
+        // A press here leaves the focus in the field: leaving it first would settle the edit, move the page, and the
+        // button would be gone from under the pointer.
+        onMouseDown={(event) => event.preventDefault()}
+      >
         <Button kind="primary" onClick={done}>
           Done
         </Button>
