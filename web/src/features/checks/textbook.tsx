@@ -1,5 +1,5 @@
 import { compareWithTextbook, type Result, type Scenario, type TextbookMismatch } from "@restband/solver";
-import { useId, useMemo, useState, type ReactNode } from "react";
+import { Fragment, useId, useMemo, useState, type ReactNode } from "react";
 import { PowerText } from "../../components/power-text.tsx";
 import type { Reading } from "../../format/format-quantity.ts";
 import { sayMany } from "../../format/words.ts";
@@ -32,10 +32,12 @@ export function Textbook({ scenario, result }: { scenario: Scenario; result: Res
       {page.symbols.length > 0 && (
         <p className="mt-2 text-13 text-quiet">
           {symbolWords(page.symbols, scenario.motion).map((words, i) => (
-            <span key={words} className="whitespace-nowrap">
+            <Fragment key={words}>
               {i > 0 && ", "}
-              <FormulaText text={words} />
-            </span>
+              <span className="whitespace-nowrap">
+                <FormulaText text={words} />
+              </span>
+            </Fragment>
           ))}
         </p>
       )}
@@ -57,7 +59,7 @@ const headClass = "pb-2 pl-4 text-right font-semibold whitespace-nowrap";
 
 function TableFrame({ isEmpty, children }: { isEmpty: boolean; children: ReactNode }) {
   return (
-    <div className="overflow-x-auto" tabIndex={0} role="region" aria-label="Textbook formulas beside this run">
+    <div className="relative overflow-x-auto" tabIndex={0} role="region" aria-label="Textbook formulas beside this run">
       <table className="w-full">
         <caption className="sr-only">Textbook formulas beside this run</caption>
         <thead>

@@ -31,7 +31,7 @@ export function DockedStrip({ view, t, onMove, onStep }: DockedStripProps) {
         <Figure {...readQuantity(t, { dimension: "time", motion: "linear" }, { digits: 4 })} />
       </p>
       <div className="flex items-center gap-3">
-        <Button className="size-11 px-0!" aria-label="Event before" onClick={() => onStep(-1)}>
+        <Button className="size-11 shrink-0 px-0!" aria-label="Event before" onClick={() => onStep(-1)}>
           <Icon name="previous" />
         </Button>
         <div
@@ -54,7 +54,7 @@ export function DockedStrip({ view, t, onMove, onStep }: DockedStripProps) {
             style={{ left: `${(t / view.end) * 100}%` }}
           />
         </div>
-        <Button className="size-11 px-0!" aria-label="Next event" onClick={() => onStep(1)}>
+        <Button className="size-11 shrink-0 px-0!" aria-label="Next event" onClick={() => onStep(1)}>
           <Icon name="next" />
         </Button>
       </div>
