@@ -6,6 +6,8 @@ import * as createProjects from "./20261201100400-create-projects.ts";
 import * as createMembers from "./20261201100500-create-members.ts";
 import * as createScenarios from "./20261201100600-create-scenarios.ts";
 import * as createActivity from "./20261201100700-create-activity.ts";
+import * as addScenarioTitles from "./20261201100800-add-scenario-titles.ts";
+import * as addArchivedAt from "./20261201100900-add-archived-at.ts";
 
 /** Every change of the database, in order. The names are recorded in it: never renamed, never edited once merged. */
 export const migrations = [
@@ -17,4 +19,6 @@ export const migrations = [
   { name: "20261201100500-create-members", ...createMembers },
   { name: "20261201100600-create-scenarios", ...createScenarios },
   { name: "20261201100700-create-activity", ...createActivity },
+  { name: "20261201100800-add-scenario-titles", ...addScenarioTitles },
+  { name: "20261201100900-add-archived-at", ...addArchivedAt },
 ];

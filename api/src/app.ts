@@ -3,6 +3,8 @@ import express, { type Express, type RequestHandler } from "express";
 import type { Logger } from "pino";
 import { accountsRoutes } from "./accounts/accounts-routes.ts";
 import { createAccountsService } from "./accounts/accounts-service.ts";
+import { activityRoutes } from "./activity/activity-routes.ts";
+import { createActivityService } from "./activity/activity-service.ts";
 import type { Config } from "./config.ts";
 import type { Database } from "./database/database.ts";
 import { membersRoutes } from "./members/members-routes.ts";
@@ -46,7 +48,8 @@ function createApi(config: Config, database: Database) {
     ...sessionsRoutes(sessions),
     ...projectsRoutes(createProjectsService(database, members)),
     ...membersRoutes(members),
-    ...scenariosRoutes(createScenariosService(database)),
+    ...scenariosRoutes(createScenariosService(database, members)),
+    ...activityRoutes(createActivityService(database)),
   };
   return createRouter(handlers, members.findCaller, throttle);
 }

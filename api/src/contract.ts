@@ -1,10 +1,21 @@
 import { z } from "@restband/solver";
 import { claimSchema, sessionSchema, signInSchema, signUpSchema } from "./accounts/accounts-schema.ts";
+import { activitySchema } from "./activity/activity-schema.ts";
 import { memberAddSchema, memberChangeSchema, memberSchema } from "./members/members-schema.ts";
 import { projectDraftSchema, projectSchema } from "./projects/projects-schema.ts";
-import { scenarioDraftSchema, scenarioSchema } from "./scenarios/scenarios-schema.ts";
+import {
+  casesDraftSchema,
+  contentSchema,
+  duplicateSchema,
+  moveSchema,
+  scenarioDraftSchema,
+  scenarioIdsSchema,
+  scenarioSchema,
+  scenarioSummarySchema,
+} from "./scenarios/scenarios-schema.ts";
 
 export * from "./accounts/accounts-schema.ts";
+export * from "./activity/activity-schema.ts";
 export * from "./members/members-schema.ts";
 export * from "./projects/projects-schema.ts";
 export * from "./scenarios/scenarios-schema.ts";
@@ -57,6 +68,34 @@ export const routes = {
     response: projectSchema,
   },
 
+  archiveProject: {
+    method: "POST",
+    path: "/projects/:projectId/archive",
+    params: projectParams,
+    status: 200,
+    response: projectSchema,
+  },
+  restoreProject: {
+    method: "POST",
+    path: "/projects/:projectId/restore",
+    params: projectParams,
+    status: 200,
+    response: projectSchema,
+  },
+  listActivity: {
+    method: "GET",
+    path: "/projects/:projectId/activity",
+    params: projectParams,
+    query: z.strictObject({
+      before: z
+        .string()
+        .regex(/^[0-9]{1,15}$/)
+        .optional(),
+    }),
+    status: 200,
+    response: z.array(activitySchema),
+  },
+
   listMembers: {
     method: "GET",
     path: "/projects/:projectId/members",
@@ -92,7 +131,7 @@ export const routes = {
     path: "/projects/:projectId/scenarios",
     params: projectParams,
     status: 200,
-    response: z.array(scenarioSchema),
+    response: z.array(scenarioSummarySchema),
   },
   createScenario: {
     method: "POST",
@@ -117,6 +156,49 @@ export const routes = {
     ifMatch: true,
     status: 200,
     response: scenarioSchema,
+  },
+  readContents: {
+    method: "GET",
+    path: "/projects/:projectId/contents",
+    params: projectParams,
+    query: scenarioIdsSchema,
+    status: 200,
+    response: z.array(contentSchema),
+  },
+  createCases: {
+    method: "POST",
+    path: "/projects/:projectId/cases",
+    params: projectParams,
+    body: casesDraftSchema,
+    status: 201,
+    response: z.array(scenarioSummarySchema),
+  },
+  duplicateScenario: {
+    method: "POST",
+    path: "/projects/:projectId/scenarios/:scenarioId/duplicate",
+    params: scenarioParams,
+    body: duplicateSchema,
+    status: 201,
+    response: scenarioSchema,
+  },
+  moveScenario: {
+    method: "POST",
+    path: "/projects/:projectId/scenarios/:scenarioId/move",
+    params: scenarioParams,
+    body: moveSchema,
+    status: 204,
+  },
+  archiveScenario: {
+    method: "POST",
+    path: "/projects/:projectId/scenarios/:scenarioId/archive",
+    params: scenarioParams,
+    status: 204,
+  },
+  restoreScenario: {
+    method: "POST",
+    path: "/projects/:projectId/scenarios/:scenarioId/restore",
+    params: scenarioParams,
+    status: 204,
   },
 } as const satisfies Record<string, Route>;
 

@@ -33,6 +33,10 @@ export const notFound = () => new Refusal(404, "not-found", "There is nothing at
 
 export const notAllowed = (message: string) => new Refusal(403, "not-allowed", message);
 
+/** What is archived is read as before, but not changed. */
+export const archived = (what: "project" | "scenario") =>
+  new Refusal(409, "archived", `The ${what} is archived: nothing in it changes until it is restored.`);
+
 /** One or more fields of the request are not as the contract says. */
 export const badRequest = (fields: readonly FieldFault[]) =>
   new Refusal(400, "bad-request", `${countOf(fields)} to put right.`, { fields });

@@ -1,6 +1,6 @@
 import { checkScenario, simulate } from "@restband/solver";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
-import type { Member, Project, StoredScenario } from "../../api/src/contract.ts";
+import type { Member, Project, ScenarioSummary } from "../../api/src/contract.ts";
 import { demoPeople } from "../../api/src/demo/demo-people.ts";
 import { removeDemo } from "../../api/src/demo/remove-demo.ts";
 import { demoProjects, seedDemo } from "../../api/src/demo/seed-demo.ts";
@@ -65,8 +65,8 @@ describe("the demo", () => {
       "Priya Raman reviewer",
       "Aoife Kerr reader",
     ]);
-    const scenarios = await aoife.get<StoredScenario[]>("listScenarios", { params: { projectId } });
-    expect(scenarios[0].content.title).toBe("Z carriage, creep feed");
+    const scenarios = await aoife.get<ScenarioSummary[]>("listScenarios", { params: { projectId } });
+    expect(scenarios[0].title).toBe("Z carriage, creep feed");
     expect(scenarios[0].updatedBy.name).toBe("Ines Duarte");
   });
 

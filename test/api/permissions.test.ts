@@ -30,6 +30,9 @@ const mayCall: Record<RouteName, readonly Person[]> = {
   createProject: ["stranger", "owner", "editor", "reviewer", "reader", "administrator"],
   readProject: ["owner", "editor", "reviewer", "reader"],
   changeProject: ["owner"],
+  archiveProject: ["owner"],
+  restoreProject: ["owner"],
+  listActivity: ["owner", "editor", "reviewer", "reader"],
   listMembers: ["owner", "editor", "reviewer", "reader"],
   addMember: ["owner"],
   changeMember: ["owner"],
@@ -38,6 +41,12 @@ const mayCall: Record<RouteName, readonly Person[]> = {
   createScenario: ["owner", "editor"],
   readScenario: ["owner", "editor", "reviewer", "reader"],
   saveScenario: ["owner", "editor"],
+  readContents: ["owner", "editor", "reviewer", "reader"],
+  createCases: ["owner", "editor"],
+  duplicateScenario: ["owner", "editor"],
+  moveScenario: ["owner", "editor"],
+  archiveScenario: ["owner", "editor"],
+  restoreScenario: ["owner", "editor"],
 };
 
 let server: TestServer;
@@ -60,11 +69,20 @@ async function layProject() {
   for (const role of ["editor", "reviewer", "reader"] as const) await addMember(owner, projectId, emailOf(role), role);
   await addMember(owner, projectId, emailOf("second"), "owner");
   await addMember(owner, projectId, emailOf("spare"), "reader");
+  const toProjectId = await createProject(owner, "The other hall");
+  await addMember(owner, toProjectId, emailOf("editor"), "editor");
   const anonymous = await server.browser().open();
   const browsers: Record<Person, Browser> = { anonymous, stranger, owner, editor, reviewer, reader, administrator };
   const { account } = await spare.get<Session>("readSession");
-  return { browsers, params: { projectId, scenarioId, accountId: account!.id }, newcomer: emailOf("stranger") };
+  return {
+    browsers,
+    params: { projectId, scenarioId, accountId: account!.id },
+    newcomer: emailOf("stranger"),
+    toProjectId,
+  };
 }
+
+type Laid = Awaited<ReturnType<typeof layProject>>;
 
 const arrive = (name: string) => server.browser().signIn(emailOf(name), password);
 
@@ -75,7 +93,10 @@ async function makeAdministrator(): Promise<void> {
 }
 
 /** A request that is right in all but, perhaps, who sends it. */
-function requestFor(name: RouteName, newcomer: string): Request {
+function requestFor(
+  name: RouteName,
+  { newcomer, params, toProjectId }: Pick<Laid, "newcomer" | "params" | "toProjectId">,
+): Request {
   switch (name) {
     case "signUp":
       return { body: { name: "New", email: `new-${crypto.randomUUID()}@workshop.example`, password } };
@@ -88,6 +109,14 @@ function requestFor(name: RouteName, newcomer: string): Request {
       return { body: { name: "Changed", description: "" } };
     case "addMember":
       return { body: { email: newcomer, role: "reader" } };
+    case "readContents":
+      return { query: `?ids=${params.scenarioId}` };
+    case "createCases":
+      return { body: { contents: [smallScenario] } };
+    case "duplicateScenario":
+      return { body: { title: "Copy" } };
+    case "moveScenario":
+      return { body: { toProjectId } };
     case "changeMember":
       return { body: { role: "reviewer" } };
     case "createScenario":
@@ -108,13 +137,16 @@ function statusFor(name: RouteName, person: Person): number {
 
 describe.each(routeNames)("%s", (name) => {
   it("does for each person what the table of roles says", async () => {
-    const { browsers, params, newcomer } = await layProject();
+    const laid = await layProject();
+    const { browsers, params } = laid;
     // Who may do it comes last: it changes what the others ask for.
     const order = [...people].sort((a, b) => Number(mayCall[name].includes(a)) - Number(mayCall[name].includes(b)));
     const seen: Record<string, number> = {};
     let version = 1;
     for (const person of order) {
-      const request = { params, ...requestFor(name, newcomer), version: name === "saveScenario" ? version : undefined };
+      // What one of them moves away is no longer there for the next.
+      if (name === "moveScenario") params.scenarioId = (await createScenario(browsers.owner, params.projectId)).id;
+      const request = { params, ...requestFor(name, laid), version: name === "saveScenario" ? version : undefined };
       seen[person] = (await browsers[person].call(name, request)).status;
       if (name === "saveScenario" && seen[person] === 200) version += 1;
     }
@@ -124,10 +156,11 @@ describe.each(routeNames)("%s", (name) => {
 
 describe.each(routeNames.filter((name) => routes[name].path.includes(":projectId")))("%s", (name) => {
   it("gives nothing of one project to the owner of another, not even that it exists", async () => {
-    const { params, newcomer } = await layProject();
+    const laid = await layProject();
+    const { params } = laid;
     const owner = await arrive("foreign");
     const projectId = await createProject(owner);
-    const request = { ...requestFor(name, newcomer), version: name === "saveScenario" ? 1 : undefined };
+    const request = { ...requestFor(name, laid), version: name === "saveScenario" ? 1 : undefined };
     const theirs = await owner.call(name, { params, ...request });
     const none = await owner.call(name, { params: { ...params, projectId: crypto.randomUUID() }, ...request });
     expect([theirs.status, theirs.body]).toEqual([404, none.body]);
@@ -135,6 +168,25 @@ describe.each(routeNames.filter((name) => routes[name].path.includes(":projectId
     if (/:(scenarioId|accountId)/.test(routes[name].path)) {
       expect((await owner.call(name, { params: { ...params, projectId }, ...request })).status).toBe(404);
     }
+  });
+});
+
+describe("an archived project", () => {
+  /** What goes on working: reading, taking it out again, and going. */
+  const stays = new Set<RouteName>(["archiveProject", "restoreProject", "removeMember"]);
+
+  it.each(routeNames.filter((name) => routes[name].path.includes(":projectId")))("%s", async (name) => {
+    const laid = await layProject();
+    const { owner } = laid.browsers;
+    await owner.get("archiveProject", { params: laid.params });
+    const request = { params: laid.params, ...requestFor(name, laid) };
+    const answer = await owner.call<{ error: { code: string } }>(name, {
+      ...request,
+      version: name === "saveScenario" ? 1 : undefined,
+    });
+    const isOpen = routes[name].method === "GET" || stays.has(name);
+    expect(answer.status).toBe(isOpen ? routes[name].status : 409);
+    if (!isOpen) expect(answer.body.error.code).toBe("archived");
   });
 });
 

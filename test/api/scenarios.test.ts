@@ -1,7 +1,7 @@
 import { createHash } from "node:crypto";
 import { canonicalText, checkScenario, digestOf } from "@restband/solver";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
-import type { Project, StoredScenario } from "../../api/src/contract.ts";
+import type { Project, ScenarioSummary, StoredScenario } from "../../api/src/contract.ts";
 import type { Browser } from "../support/browser.ts";
 import { addMember, createProject, createScenario, signUp, smallScenario } from "../support/people.ts";
 import { startTestServer, type TestServer } from "../support/test-server.ts";
@@ -55,7 +55,7 @@ describe("a scenario", () => {
     expect(saved).toMatchObject({ version: 2, updatedBy: { accountId: bo.accountId, name: "Bo" } });
     const project = await ada.get<Project>("readProject", { params: { projectId } });
     expect(project.updatedAt).toBe(saved.updatedAt);
-    const [newest] = await ada.get<StoredScenario[]>("listScenarios", { params: { projectId } });
+    const [newest] = await ada.get<ScenarioSummary[]>("listScenarios", { params: { projectId } });
     expect(newest.id).toBe(made.id);
   });
 

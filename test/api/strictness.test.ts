@@ -18,7 +18,13 @@ const goodBodies: Record<string, Record<string, unknown>> = {
   changeMember: { role: "owner" },
   createScenario: { content: smallScenario },
   saveScenario: { content: smallScenario },
+  createCases: { contents: [smallScenario] },
+  duplicateScenario: { title: "Copy" },
+  moveScenario: { toProjectId: crypto.randomUUID() },
 };
+
+/** What a query has to hold. */
+const goodQueries: Partial<Record<RouteName, string>> = { readContents: `?ids=${crypto.randomUUID()}&` };
 
 let server: TestServer;
 let owner: Browser & { accountId: string };
@@ -76,7 +82,12 @@ describe.each(withBody)("the body of %s", (name) => {
 
 describe.each(names)("%s", (name) => {
   it("takes no query parameter it does not know", async () => {
-    const request = { params, version: 1, body: goodBodies[name], query: "?as=administrator" };
+    const request = {
+      params,
+      version: 1,
+      body: goodBodies[name],
+      query: `${goodQueries[name] ?? "?"}as=administrator`,
+    };
     expect(await owner.fail(name, request)).toMatchObject({ status: 400, fields: [{ path: "as" }] });
   });
 });
@@ -100,6 +111,15 @@ describe("paths", () => {
   });
 });
 
+describe("the ids of contents", () => {
+  const twentyOne = Array.from({ length: 21 }, () => crypto.randomUUID()).join(",");
+  it.each(["", "1", twentyOne, `${crypto.randomUUID()},`])("are refused as %j", async (ids) => {
+    const failure = await owner.fail("readContents", { params, query: `?ids=${ids}` });
+    expect(failure.status).toBe(400);
+    expect(failure.fields[0].path).toMatch(/^ids/);
+  });
+});
+
 describe("If-Match", () => {
   it.each(["1", '"x"', 'W/"1"', '"-1"', '"1", "2"', '"99999999999"', "*"])("is refused as %s", async (value) => {
     const request = { params, body: goodBodies.saveScenario, headers: { "If-Match": value } };
@@ -114,7 +134,18 @@ it("answers 10,000 random bodies with a failure of the contract, never with a 5x
     body: fc.oneof(
       value,
       fc.dictionary(
-        fc.constantFrom("name", "email", "password", "role", "content", "token", "description", "__proto__"),
+        fc.constantFrom(
+          "name",
+          "email",
+          "password",
+          "role",
+          "content",
+          "contents",
+          "title",
+          "token",
+          "description",
+          "__proto__",
+        ),
         value,
       ),
     ),

@@ -5,6 +5,8 @@ export const patterns = {
   welcome: "/welcome/:token",
   projects: "/projects",
   project: "/projects/:projectId",
+  cases: "/projects/:projectId/cases",
+  newScenario: "/projects/:projectId/scenarios/new",
   scenario: "/projects/:projectId/scenarios/:scenarioId",
   licences: "/licences",
 } as const;
@@ -21,6 +23,9 @@ export const paths = {
   signUp: patterns.signUp,
   projects: patterns.projects,
   project: (projectId: string) => `/projects/${projectId}`,
+  /** A table of cases over a scenario, or over whichever is chosen there. */
+  cases: (projectId: string, baseId?: string) => `/projects/${projectId}/cases${baseId ? `?base=${baseId}` : ""}`,
+  newScenario: (projectId: string) => `/projects/${projectId}/scenarios/new`,
   scenario: (projectId: string, scenarioId: string) => `/projects/${projectId}/scenarios/${scenarioId}`,
   licences: patterns.licences,
 };

@@ -42,7 +42,8 @@ export function makeRoutes(client: QueryClient): RouteObject[] {
 const workPages = [
   page(patterns.projects, () => import("./pages/projects-page.tsx"), "ProjectsPage"),
   page(patterns.project, () => import("./pages/project-page.tsx"), "ProjectPage"),
-  page(patterns.scenario, () => import("./pages/scenario-page.tsx"), "ScenarioPage"),
+  page(patterns.cases, () => import("./pages/project-cases-page.tsx"), "ProjectCasesPage"),
+  page(patterns.newScenario, () => import("./pages/new-scenario-page.tsx"), "NewScenarioPage"),
   page(patterns.scenario, () => import("./pages/scenario-page.tsx"), "ScenarioPage"),
 ];
 

@@ -3,11 +3,19 @@ export type Act =
   | "account.claimed"
   | "project.created"
   | "project.changed"
+  | "project.archived"
+  | "project.restored"
   | "member.added"
   | "member.changed"
   | "member.removed"
   | "scenario.created"
-  | "scenario.saved";
+  | "scenario.saved"
+  | "scenario.duplicated"
+  | "scenario.moved-out"
+  | "scenario.moved-in"
+  | "scenario.archived"
+  | "scenario.restored"
+  | "cases.created";
 
 export interface Activity {
   /** Null for what concerns no project. */

@@ -22,7 +22,7 @@ export async function seedDemo(database: Database, password: string): Promise<vo
   const services = {
     members,
     projects: createProjectsService(database, members),
-    scenarios: createScenariosService(database),
+    scenarios: createScenariosService(database, members),
   };
   const ids = {} as Record<DemoPerson, string>;
   for (const [person, { name, email }] of Object.entries(demoPeople) as [

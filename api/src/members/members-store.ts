@@ -19,23 +19,45 @@ interface CallerRow {
   email: string;
   is_administrator: number;
   role: Role | null;
+  archived_at: Date | null;
 }
 
-/** Reads an account together with its role in a project (null: no member, or no project asked for) in one query. */
+/** Who asks, and what they are in the project asked for. */
+export interface Caller {
+  readonly account: Account;
+  /** Null: no member, or no project asked for. */
+  readonly role: Role | null;
+  /** True where the project they are a member of is archived. */
+  readonly isArchived: boolean;
+}
+
+/** Reads an account together with its role in a project in one query. */
 export async function findCaller(
   database: Database,
   accountId: string,
   projectId: string | null,
-): Promise<{ account: Account; role: Role | null } | null> {
+): Promise<Caller | null> {
   const [row] = await database("accounts")
     .leftJoin(TABLE, (join) =>
       join.on("members.account_id", "accounts.id").andOnVal("members.project_id", projectId ?? ""),
     )
+    .leftJoin("projects", "projects.id", "members.project_id")
     .where({ "accounts.id": accountId })
-    .select<CallerRow[]>("accounts.id", "accounts.name", "accounts.email", "accounts.is_administrator", "members.role");
+    .select<CallerRow[]>(
+      "accounts.id",
+      "accounts.name",
+      "accounts.email",
+      "accounts.is_administrator",
+      "members.role",
+      "projects.archived_at",
+    );
   if (!row) return null;
-  const { id, name, email, is_administrator: isAdministrator, role } = row;
-  return { account: { id, name, email, isAdministrator: isAdministrator === 1 }, role };
+  const { id, name, email, is_administrator: isAdministrator, role, archived_at: archivedAt } = row;
+  return {
+    account: { id, name, email, isAdministrator: isAdministrator === 1 },
+    role,
+    isArchived: archivedAt !== null,
+  };
 }
 
 /** Members in the order they came. */

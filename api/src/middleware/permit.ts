@@ -1,13 +1,15 @@
 import { z } from "@restband/solver";
 import type { RequestHandler } from "express";
 import { type Account, type Role, type RouteName, roles, routes } from "../contract.ts";
-import { notAllowed, notFound, notSignedIn } from "../errors.ts";
+import { archived, notAllowed, notFound, notSignedIn } from "../errors.ts";
 
 /**
  * Who may call a route: anybody, anybody signed in, or members of the project in its path who have one of the roles.
- * `orSelf`: also the person whose account the path names, whatever the role.
+ * `orSelf`: also the person whose account the path names, whatever the role. `evenArchived`: a change that is made to an
+ * archived project too; all other routes but readings are then refused.
  */
-type Permission = "public" | "signed-in" | { readonly roles: readonly Role[]; readonly orSelf?: true };
+type Permission =
+  "public" | "signed-in" | { readonly roles: readonly Role[]; readonly orSelf?: true; readonly evenArchived?: true };
 
 const everyMember = { roles } as const;
 const authors = { roles: ["owner", "editor"] } as const;
@@ -25,23 +27,35 @@ export const permissions = {
   createProject: "signed-in",
   readProject: everyMember,
   changeProject: owners,
+  archiveProject: { ...owners, evenArchived: true },
+  restoreProject: { ...owners, evenArchived: true },
+  listActivity: everyMember,
 
   listMembers: everyMember,
   addMember: owners,
   changeMember: owners,
-  removeMember: { roles: ["owner"], orSelf: true },
+  removeMember: { ...owners, orSelf: true, evenArchived: true },
 
   listScenarios: everyMember,
   createScenario: authors,
   readScenario: everyMember,
   saveScenario: authors,
+  readContents: everyMember,
+  createCases: authors,
+  duplicateScenario: authors,
+  moveScenario: authors,
+  archiveScenario: authors,
+  restoreScenario: authors,
 } as const satisfies Record<RouteName, Permission>;
 
-/** Finds who an account is and what role it has in a project, or null where there is no such account. */
+/**
+ * Finds who an account is, what role it has in a project and whether that is archived; null where there is no such
+ * account.
+ */
 export type FindCaller = (
   accountId: string,
   projectId: string | null,
-) => Promise<{ account: Account; role: Role | null } | null>;
+) => Promise<{ account: Account; role: Role | null; isArchived: boolean } | null>;
 
 /**
  * Lets a request through that the table permits. The role is read anew each time, so that a change acts at once. Who is
@@ -61,7 +75,10 @@ export function permit(name: RouteName, findCaller: FindCaller): RequestHandler 
     const projectId = idOf(request.params.projectId);
     const caller = accountId ? await findCaller(accountId, projectId) : null;
     if (!caller) throw notSignedIn();
-    if (permission !== "signed-in") demandRole(permission, caller.role, request.params.accountId === accountId);
+    if (permission !== "signed-in") {
+      demandRole(permission, caller.role, request.params.accountId === accountId);
+      if (caller.isArchived && routes[name].method !== "GET" && !permission.evenArchived) throw archived("project");
+    }
     Object.assign(response.locals, caller);
     next();
   };

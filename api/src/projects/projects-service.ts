@@ -3,13 +3,30 @@ import type { Database } from "../database/database.ts";
 import { notFound } from "../errors.ts";
 import type { MembersService } from "../members/members-service.ts";
 import type { Project } from "./projects-schema.ts";
-import { findProject, insertProject, listProjects, type ProjectDraft, updateProject } from "./projects-store.ts";
+import {
+  findProject,
+  insertProject,
+  listProjects,
+  markProjectArchived,
+  type ProjectDraft,
+  updateProject,
+} from "./projects-store.ts";
 
 export type ProjectsService = ReturnType<typeof createProjectsService>;
 
 export function createProjectsService(database: Database, members: MembersService) {
   const read = async (id: string, accountId: string): Promise<Project> =>
     (await findProject(database, id, accountId)) ?? noSuchProject();
+
+  const mark = async (projectId: string, accountId: string, act: "project.archived" | "project.restored") => {
+    await database.transaction(async (transaction) => {
+      const at = act === "project.archived" ? new Date() : null;
+      if (await markProjectArchived(transaction, projectId, at)) {
+        await recordAct(transaction, { projectId, accountId, act });
+      }
+    });
+    return read(projectId, accountId);
+  };
 
   return {
     list: (accountId: string) => listProjects(database, accountId),
@@ -25,6 +42,10 @@ export function createProjectsService(database: Database, members: MembersServic
       });
       return read(projectId, accountId);
     },
+
+    /** Puts a project away: from now on it is only read, until it is restored. Doing it twice is no fault. */
+    archive: (projectId: string, accountId: string) => mark(projectId, accountId, "project.archived"),
+    restore: (projectId: string, accountId: string) => mark(projectId, accountId, "project.restored"),
 
     async change(projectId: string, draft: ProjectDraft, accountId: string): Promise<Project> {
       await database.transaction(async (transaction) => {

@@ -16,6 +16,7 @@ interface ProjectRow {
   scenario_count: number;
   created_at: Date;
   updated_at: Date;
+  archived_at: Date | null;
   scenarios_updated_at: Date | null;
 }
 
@@ -46,6 +47,15 @@ export async function updateProject(database: Database, id: string, draft: Proje
     .update({ ...draft, updated_at: new Date() });
 }
 
+/** Sets or clears when a project was archived; false where it stands so already. */
+export async function markProjectArchived(database: Database, id: string, at: Date | null): Promise<boolean> {
+  const rows = database(TABLE).where({ id });
+  const changed = await (at ? rows.whereNull("archived_at") : rows.whereNotNull("archived_at")).update({
+    archived_at: at,
+  });
+  return changed > 0;
+}
+
 function projectsOf(database: Database, accountId: string) {
   return database(TABLE)
     .join("members", "members.project_id", "projects.id")
@@ -55,7 +65,7 @@ function projectsOf(database: Database, accountId: string) {
     .select<ProjectRow[]>(
       "projects.*",
       "members.role",
-      database.raw("COUNT(scenarios.id) AS scenario_count"),
+      database.raw("COUNT(IF(scenarios.archived_at IS NULL, scenarios.id, NULL)) AS scenario_count"),
       database.raw("MAX(scenarios.updated_at) AS scenarios_updated_at"),
     );
 }
@@ -71,5 +81,6 @@ function projectOf(row: ProjectRow): Project {
     scenarioCount: Number(row.scenario_count),
     createdAt: row.created_at.toISOString(),
     updatedAt: new Date(touchedAt).toISOString(),
+    archivedAt: row.archived_at?.toISOString() ?? null,
   };
 }

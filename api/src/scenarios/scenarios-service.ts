@@ -1,32 +1,73 @@
-import { canonicalText, checkScenario, digestOf } from "@restband/solver";
 import { recordAct } from "../activity/activity-service.ts";
+import type { Act } from "../activity/activity.ts";
 import type { Database } from "../database/database.ts";
-import { notFound, Refusal, refusedContent } from "../errors.ts";
-import type { StoredScenario } from "./scenarios-schema.ts";
+import { archived, notAllowed, notFound, Refusal } from "../errors.ts";
+import type { MembersService } from "../members/members-service.ts";
+import { canonicalCases, canonicalOf, changedMembers, retitled, type CanonicalScenario } from "./canonical-scenario.ts";
+import type { ScenarioSummary, StoredScenario } from "./scenarios-schema.ts";
 import {
-  type CanonicalScenario,
+  findContents,
   findScenario,
   insertScenario,
+  insertScenarios,
   listScenarios,
-  lockVersion,
+  lockScenario,
+  type LockedScenario,
+  markScenarioArchived,
+  moveScenario,
   updateScenario,
 } from "./scenarios-store.ts";
 
 export type ScenariosService = ReturnType<typeof createScenariosService>;
 
-export function createScenariosService(database: Database) {
+/** A scenario by the ids in a path. */
+interface Place {
+  readonly projectId: string;
+  readonly scenarioId: string;
+}
+
+export function createScenariosService(database: Database, members: MembersService) {
+  /** Writes a new scenario and the act that made it. */
+  const add = (projectId: string, content: CanonicalScenario, accountId: string, act: Act) =>
+    database.transaction(async (transaction) => {
+      const subjectId = await insertScenario(transaction, projectId, content, accountId);
+      const detail = { version: 1, digest: content.digest, title: content.title };
+      await recordAct(transaction, { projectId, accountId, act, subjectId, detail });
+      return read(transaction, projectId, subjectId);
+    });
+
+  /** Puts a scenario away or takes it out again. Doing it twice is no fault, and is told once. */
+  const mark = ({ projectId, scenarioId: subjectId }: Place, accountId: string, at: Date | null) =>
+    database.transaction(async (transaction) => {
+      const { title, isArchived } = await lock(transaction, projectId, subjectId);
+      if (isArchived === (at !== null)) return;
+      await markScenarioArchived(transaction, subjectId, at);
+      const act = at ? "scenario.archived" : "scenario.restored";
+      await recordAct(transaction, { projectId, accountId, act, subjectId, detail: { title } });
+    });
+
   return {
     list: (projectId: string) => listScenarios(database, projectId),
     read: (projectId: string, id: string) => read(database, projectId, id),
+    /** The contents of those of the scenarios that are in the project. */
+    readContents: (projectId: string, ids: readonly string[]) => findContents(database, projectId, ids),
+    create: async (projectId: string, input: unknown, accountId: string): Promise<StoredScenario> =>
+      add(projectId, canonicalOf(input), accountId, "scenario.created"),
 
-    async create(projectId: string, input: unknown, accountId: string): Promise<StoredScenario> {
-      const content = canonicalOf(input);
+    /** Makes a scenario of each input, or none of any. */
+    async createCases(projectId: string, inputs: readonly unknown[], accountId: string): Promise<ScenarioSummary[]> {
+      const contents = canonicalCases(inputs);
       return database.transaction(async (transaction) => {
-        const subjectId = await insertScenario(transaction, projectId, content, accountId);
-        const detail = { version: 1, digest: content.digest };
-        await recordAct(transaction, { projectId, accountId, act: "scenario.created", subjectId, detail });
-        return read(transaction, projectId, subjectId);
+        const ids = await insertScenarios(transaction, projectId, contents, accountId);
+        await recordAct(transaction, { projectId, accountId, act: "cases.created", detail: { count: ids.length } });
+        const made = await listScenarios(transaction, projectId, ids);
+        return ids.flatMap((id) => made.find((each) => each.id === id) ?? []);
       });
+    },
+
+    async duplicate({ projectId, scenarioId }: Place, title: string, accountId: string): Promise<StoredScenario> {
+      const { content } = await read(database, projectId, scenarioId);
+      return add(projectId, retitled(JSON.stringify(content), title), accountId, "scenario.duplicated");
     },
 
     /**
@@ -34,23 +75,51 @@ export function createScenariosService(database: Database) {
      * @throws Refusal 409 with what is stored where somebody else was faster, 422 with every faulty field
      */
     async save(
-      { projectId, scenarioId: subjectId }: { projectId: string; scenarioId: string },
+      { projectId, scenarioId: subjectId }: Place,
       seen: number,
       input: unknown,
       accountId: string,
     ): Promise<StoredScenario> {
       const content = canonicalOf(input);
       return database.transaction(async (transaction) => {
-        const stored = await lockVersion(transaction, projectId, subjectId);
-        if (stored !== seen) throw staleVersion(await read(transaction, projectId, subjectId));
+        const stored = await lock(transaction, projectId, subjectId);
+        if (stored.version !== seen) throw staleVersion(await read(transaction, projectId, subjectId));
+        if (stored.isArchived) throw archived("scenario");
         const version = seen + 1;
         await updateScenario(transaction, subjectId, version, content, accountId);
-        const detail = { version, digest: content.digest };
+        const { digest, title, text } = content;
+        const detail = { version, digest, title, changed: changedMembers(stored.content, text).join(" ") };
         await recordAct(transaction, { projectId, accountId, act: "scenario.saved", subjectId, detail });
         return read(transaction, projectId, subjectId);
       });
     },
+
+    move: (place: Place, toProjectId: string, accountId: string) =>
+      move(database, members, { place, toProjectId, accountId }),
+    archive: (place: Place, accountId: string) => mark(place, accountId, new Date()),
+    restore: (place: Place, accountId: string) => mark(place, accountId, null),
   };
+}
+
+/**
+ * Takes a scenario into another project in which the person may make scenarios. Both trails tell it.
+ * @throws Refusal 404 for a project they are no member of, 403 for a role that does not reach, 409 for an archived one
+ */
+async function move(
+  database: Database,
+  members: MembersService,
+  { place, toProjectId, accountId }: { place: Place; toProjectId: string; accountId: string },
+): Promise<void> {
+  const { projectId, scenarioId: subjectId } = place;
+  await demandAuthor(members, accountId, toProjectId);
+  await database.transaction(async (transaction) => {
+    const { title } = await lock(transaction, projectId, subjectId);
+    if (projectId === toProjectId) return;
+    await moveScenario(transaction, subjectId, toProjectId);
+    const told = { accountId, subjectId, detail: { title } };
+    await recordAct(transaction, { ...told, projectId, act: "scenario.moved-out" });
+    await recordAct(transaction, { ...told, projectId: toProjectId, act: "scenario.moved-in" });
+  });
 }
 
 async function read(database: Database, projectId: string, id: string): Promise<StoredScenario> {
@@ -59,11 +128,19 @@ async function read(database: Database, projectId: string, id: string): Promise<
   return scenario;
 }
 
-/** Checks a scenario by the solver's own rules; faults keep the paths of the format. */
-export function canonicalOf(input: unknown): CanonicalScenario {
-  const { scenario, faults } = checkScenario(input);
-  if (!scenario) throw refusedContent("refused-scenario", faults);
-  return { text: canonicalText(scenario), digest: digestOf(scenario) };
+async function lock(transaction: Database, projectId: string, id: string): Promise<LockedScenario> {
+  const scenario = await lockScenario(transaction, projectId, id);
+  if (!scenario) throw notFound();
+  return scenario;
+}
+
+async function demandAuthor(members: MembersService, accountId: string, projectId: string): Promise<void> {
+  const caller = await members.findCaller(accountId, projectId);
+  if (!caller?.role) throw notFound();
+  if (caller.role !== "owner" && caller.role !== "editor") {
+    throw notAllowed(`Your role in the other project is ${caller.role}; this takes owner or editor.`);
+  }
+  if (caller.isArchived) throw archived("project");
 }
 
 function staleVersion(current: StoredScenario): Refusal {

@@ -1,47 +1,96 @@
 import { randomUUID } from "node:crypto";
 import type { Scenario } from "@restband/solver";
 import type { Database } from "../database/database.ts";
-import type { StoredScenario } from "./scenarios-schema.ts";
+import type { CanonicalScenario } from "./canonical-scenario.ts";
+import type { ScenarioSummary, StoredScenario } from "./scenarios-schema.ts";
 
 const TABLE = "scenarios";
 
-/** What is kept of a checked scenario: its canonical text and the SHA-256 of it, lower-case hex. */
-export interface CanonicalScenario {
-  readonly text: string;
-  readonly digest: string;
-}
-
-interface ScenarioRow {
+interface SummaryRow {
   id: string;
-  project_id: string;
   version: number;
-  content: string;
+  title: string;
+  purpose: string;
   digest: Buffer;
-  created_at: Date;
   updated_at: Date;
   updated_by: string;
   updated_by_name: string;
+  archived_at: Date | null;
 }
 
-/** The scenarios of a project, last touched first. */
-export async function listScenarios(database: Database, projectId: string): Promise<StoredScenario[]> {
-  const rows = await scenariosOf(database, projectId).orderBy("scenarios.updated_at", "desc");
-  return rows.map(scenarioOf);
+interface ScenarioRow extends SummaryRow {
+  project_id: string;
+  content: string;
+  created_at: Date;
+}
+
+/** The scenarios of a project without their contents, last touched first; `ids`: of these alone. */
+export async function listScenarios(
+  database: Database,
+  projectId: string,
+  ids?: readonly string[],
+): Promise<ScenarioSummary[]> {
+  const rows = await scenariosOf(database, projectId)
+    .modify((query) => ids && void query.whereIn("scenarios.id", ids))
+    .orderBy([
+      { column: "scenarios.updated_at", order: "desc" },
+      { column: "scenarios.id", order: "asc" },
+    ])
+    .select<SummaryRow[]>(
+      "scenarios.id",
+      "scenarios.version",
+      "scenarios.title",
+      "scenarios.purpose",
+      "scenarios.digest",
+      "scenarios.updated_at",
+      "scenarios.updated_by",
+      "scenarios.archived_at",
+      "accounts.name as updated_by_name",
+    );
+  return rows.map(summaryOf);
 }
 
 /** A scenario of this very project: the id of another project's is not found. */
 export async function findScenario(database: Database, projectId: string, id: string): Promise<StoredScenario | null> {
-  const [row] = await scenariosOf(database, projectId).where({ "scenarios.id": id });
+  const [row] = await scenariosOf(database, projectId)
+    .where({ "scenarios.id": id })
+    .select<ScenarioRow[]>("scenarios.*", "accounts.name as updated_by_name");
   return row ? scenarioOf(row) : null;
 }
 
-/** The version now stored, locked until the transaction ends; null where there is no such scenario. */
-export async function lockVersion(transaction: Database, projectId: string, id: string): Promise<number | null> {
+/** The contents of those of the scenarios that are in the project. */
+export async function findContents(
+  database: Database,
+  projectId: string,
+  ids: readonly string[],
+): Promise<Pick<StoredScenario, "id" | "digest" | "content">[]> {
+  const rows = await database(TABLE)
+    .where({ project_id: projectId })
+    .whereIn("id", ids)
+    .select<Pick<ScenarioRow, "id" | "digest" | "content">[]>("id", "digest", "content");
+  return rows.map(({ id, digest, content }) => ({ id, digest: digest.toString("hex"), content: parsed(content) }));
+}
+
+export interface LockedScenario {
+  readonly version: number;
+  readonly title: string;
+  readonly content: string;
+  readonly isArchived: boolean;
+}
+
+/** What is stored now, locked until the transaction ends; null where there is no such scenario. */
+export async function lockScenario(
+  transaction: Database,
+  projectId: string,
+  id: string,
+): Promise<LockedScenario | null> {
   const row = await transaction(TABLE)
     .where({ id, project_id: projectId })
-    .first<{ version: number }>("version")
+    .first<Pick<ScenarioRow, "version" | "title" | "content" | "archived_at">>()
     .forUpdate();
-  return row?.version ?? null;
+  if (!row) return null;
+  const { version, title, content, archived_at: archivedAt } = row;
+  return { version, title, content, isArchived: archivedAt !== null };
 }
 
 export async function insertScenario(
@@ -49,17 +98,28 @@ export async function insertScenario(
   projectId: string,
   content: CanonicalScenario,
   accountId: string,
-  id: string = randomUUID(),
 ): Promise<string> {
+  const [id] = await insertScenarios(database, projectId, [content], accountId);
+  return id;
+}
+
+/** Adds scenarios in one statement; returns their ids in the same order. */
+export async function insertScenarios(
+  database: Database,
+  projectId: string,
+  contents: readonly CanonicalScenario[],
+  accountId: string,
+): Promise<string[]> {
   const now = new Date();
-  await database(TABLE).insert({
-    id,
+  const rows = contents.map((content) => ({
+    id: randomUUID(),
     project_id: projectId,
     version: 1,
     created_at: now,
     ...changesOf(content, accountId, now),
-  });
-  return id;
+  }));
+  await database(TABLE).insert(rows);
+  return rows.map(({ id }) => id);
 }
 
 export async function updateScenario(
@@ -74,15 +134,43 @@ export async function updateScenario(
     .update({ version, ...changesOf(content, accountId, new Date()) });
 }
 
-function changesOf({ text, digest }: CanonicalScenario, accountId: string, at: Date) {
-  return { content: text, digest: Buffer.from(digest, "hex"), updated_at: at, updated_by: accountId };
+export async function markScenarioArchived(database: Database, id: string, at: Date | null): Promise<void> {
+  await database(TABLE).where({ id }).update({ archived_at: at });
+}
+
+export async function moveScenario(database: Database, id: string, toProjectId: string): Promise<void> {
+  await database(TABLE).where({ id }).update({ project_id: toProjectId });
+}
+
+function changesOf({ text, digest, title, purpose }: CanonicalScenario, accountId: string, at: Date) {
+  return {
+    content: text,
+    digest: Buffer.from(digest, "hex"),
+    title,
+    purpose,
+    updated_at: at,
+    updated_by: accountId,
+  };
 }
 
 function scenariosOf(database: Database, projectId: string) {
   return database(TABLE)
     .join("accounts", "accounts.id", "scenarios.updated_by")
-    .where({ "scenarios.project_id": projectId })
-    .select<ScenarioRow[]>("scenarios.*", "accounts.name as updated_by_name");
+    .where({ "scenarios.project_id": projectId });
+}
+
+function summaryOf(row: SummaryRow): ScenarioSummary {
+  const { id, version, title, purpose, updated_by: accountId, updated_by_name: name } = row;
+  return {
+    id,
+    version,
+    title,
+    purpose,
+    digest: row.digest.toString("hex"),
+    updatedAt: row.updated_at.toISOString(),
+    updatedBy: { accountId, name },
+    archivedAt: row.archived_at?.toISOString() ?? null,
+  };
 }
 
 function scenarioOf(row: ScenarioRow): StoredScenario {
@@ -90,10 +178,12 @@ function scenarioOf(row: ScenarioRow): StoredScenario {
     id: row.id,
     projectId: row.project_id,
     version: row.version,
-    content: JSON.parse(row.content) as Scenario,
+    content: parsed(row.content),
     digest: row.digest.toString("hex"),
     createdAt: row.created_at.toISOString(),
     updatedAt: row.updated_at.toISOString(),
     updatedBy: { accountId: row.updated_by, name: row.updated_by_name },
   };
 }
+
+const parsed = (text: string): Scenario => JSON.parse(text) as Scenario;

@@ -63,6 +63,7 @@ export const project: Project = {
   scenarioCount: 0,
   createdAt: "2026-11-01T08:00:00.000Z",
   updatedAt: "2026-11-20T08:00:00.000Z",
+  archivedAt: null,
 };
 
 /** The people of that project: an owner and an editor. */

@@ -34,3 +34,17 @@ export function useChangeProject(projectId: string) {
     },
   });
 }
+
+/** Puts a project away, or takes it out again. */
+export function useArchiveProject(projectId: string) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (isArchived: boolean) =>
+      call(isArchived ? "archiveProject" : "restoreProject", { params: { projectId } }),
+    onSuccess: (project) => {
+      client.setQueryData(projectQuery(projectId).queryKey, project);
+      void client.invalidateQueries({ queryKey: ["projects", projectId, "activity"] });
+      return client.invalidateQueries({ queryKey: projectsQuery.queryKey, exact: true });
+    },
+  });
+}

@@ -3,7 +3,7 @@ import type { Scenario } from "@restband/solver";
 import { queryOptions, useMutation, useQueryClient, type QueryClient } from "@tanstack/react-query";
 import { call } from "./client.ts";
 
-/** All scenarios of a project, last touched first. */
+/** All scenarios of a project without their contents, last touched first; archived ones too. */
 export const scenariosQuery = (projectId: string) =>
   queryOptions({
     queryKey: ["projects", projectId, "scenarios"],
@@ -16,13 +16,22 @@ export const scenarioQuery = (projectId: string, scenarioId: string) =>
     queryFn: ({ signal }) => call("readScenario", { params: { projectId, scenarioId }, signal }),
   });
 
-/** Keeps an answer of the server and marks the lists that count or order scenarios as old. */
+/** Keeps an answer of the server and marks what counts, orders or tells of scenarios as old. */
 function keep(client: QueryClient, stored: StoredScenario): void {
   client.setQueryData(scenarioQuery(stored.projectId, stored.id).queryKey, stored);
-  void client.invalidateQueries({ queryKey: scenariosQuery(stored.projectId).queryKey, exact: true });
-  void client.invalidateQueries({ queryKey: ["projects", stored.projectId], exact: true });
+  refreshLists(client, stored.projectId);
+}
+
+function refreshLists(client: QueryClient, projectId: string): void {
+  void client.invalidateQueries({ queryKey: scenariosQuery(projectId).queryKey, exact: true });
+  void client.invalidateQueries({ queryKey: ["projects", projectId, "activity"] });
+  void client.invalidateQueries({ queryKey: ["projects", projectId], exact: true });
   void client.invalidateQueries({ queryKey: ["projects"], exact: true });
 }
+
+/** The contents of up to `mostContents` scenarios of a project; those that are no longer in it are missing. */
+export const readContents = (projectId: string, ids: readonly string[]) =>
+  call("readContents", { params: { projectId }, query: { ids: ids.join(",") } });
 
 export function useCreateScenario(projectId: string) {
   const client = useQueryClient();
@@ -45,4 +54,38 @@ export function useSaveScenario(projectId: string, scenarioId: string) {
       call("saveScenario", { params: { projectId, scenarioId }, body: { content: { ...scenario } }, version }),
     onSuccess: (stored) => keep(client, stored),
   });
+}
+
+/** Makes a scenario of each content, or none of any: every fault is named under `contents[i]`. */
+export function useCreateCases(projectId: string) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (scenarios: readonly Scenario[]) =>
+      call("createCases", { params: { projectId }, body: { contents: scenarios.map((each) => ({ ...each })) } }),
+    onSuccess: () => refreshLists(client, projectId),
+  });
+}
+
+/** What can be done to a scenario as a whole. The lists are read anew after each, whether it was done or not. */
+export function useScenarioActs() {
+  const client = useQueryClient();
+  const at = (projectId: string, scenarioId: string) => ({ params: { projectId, scenarioId } });
+  const then = async <Done>(projectId: string, done: Promise<Done>): Promise<Done> => {
+    try {
+      return await done;
+    } finally {
+      refreshLists(client, projectId);
+    }
+  };
+  return {
+    duplicate: (projectId: string, id: string, title: string) =>
+      then(projectId, call("duplicateScenario", { ...at(projectId, id), body: { title } })),
+    move: async (projectId: string, id: string, toProjectId: string) => {
+      await then(projectId, call("moveScenario", { ...at(projectId, id), body: { toProjectId } }));
+      client.removeQueries({ queryKey: scenarioQuery(projectId, id).queryKey });
+      refreshLists(client, toProjectId);
+    },
+    archive: (projectId: string, id: string) => then(projectId, call("archiveScenario", at(projectId, id))),
+    restore: (projectId: string, id: string) => then(projectId, call("restoreScenario", at(projectId, id))),
+  };
 }

@@ -1,46 +1,44 @@
-import type { StoredScenario } from "@restband/api/contract";
-import { useEffect } from "react";
-import { useRun, type Computed } from "../compute/use-run.ts";
+import type { ScenarioSummary } from "@restband/api/contract";
+import { memo, type ReactNode } from "react";
 import { SentenceGlance, StripGlance } from "../features/answer/answer-glance.tsx";
-import { standingOf, type Standing } from "../features/project-home/headline.ts";
+import type { Glance } from "../features/project-home/glances/glance-book.ts";
 import { LimitsLine } from "../features/project-home/limits-line.tsx";
 import { ScenarioRow } from "../features/project-home/scenario-row.tsx";
 
 interface AnsweredRowProps {
-  stored: StoredScenario;
+  projectId: string;
+  summary: ScenarioSummary;
   ownId: string;
-  /** Only a row that is seen is computed. */
-  isSeen: boolean;
-  /** Told how the scenario stands against its limits, once that is computed. */
-  onStanding: (standing: Standing) => void;
+  glance: Glance | undefined;
+  menu: ReactNode;
 }
 
-/** A row of the project home with its answer, computed here. */
-export function AnsweredRow({ stored, ownId, isSeen, onStanding }: AnsweredRowProps) {
-  const { computed, failure } = useRun(isSeen ? stored.content : null);
-  const standing = computed && standingOfRun(computed);
-  useEffect(() => {
-    if (standing) onStanding(standing);
-    // Told once for each standing; the callback is a new one with each render.
-    // eslint-disable-next-line react-hooks/exhaustive-deps
-  }, [standing]);
+/** A row of the project home with its answer, as far as it is computed. */
+export function AnsweredRow({ projectId, summary, ownId, glance, menu }: AnsweredRowProps) {
+  const computed = glance?.computed;
   return (
     <ScenarioRow
-      stored={stored}
+      projectId={projectId}
+      summary={summary}
       ownId={ownId}
-      strip={computed && <StripGlance computed={computed} />}
-      sentence={computed ? <SentenceGlance computed={computed} /> : <Waiting failure={failure} />}
+      strip={glance && <Strip glance={glance} />}
+      sentence={<Sentence glance={glance} />}
       limits={computed && "result" in computed && <LimitsLine limits={computed.result.limits} />}
+      menu={menu}
     />
   );
 }
 
-/** A scenario that this version cannot compute keeps no limit and breaks none. */
-function standingOfRun(computed: Computed): Standing {
-  if ("result" in computed) return standingOf(computed.result.limits);
-  return computed.scenario.limits.length > 0 ? "unjudged" : "no-limits";
-}
+// Drawn once for each run, however often the list around it is.
+const Strip = memo(({ glance }: { glance: Glance }) => glance.computed && <StripGlance computed={glance.computed} />);
+Strip.displayName = "Strip";
 
-function Waiting({ failure }: { failure: string | null }) {
-  return <p className={failure ? "text-quiet" : "late text-quiet"}>{failure ?? "Computing"}</p>;
-}
+const Sentence = memo(({ glance }: { glance: Glance | undefined }) => {
+  if (!glance) return <p className="late text-quiet">Computing</p>;
+  return glance.computed ? (
+    <SentenceGlance computed={glance.computed} />
+  ) : (
+    <p className="text-quiet">{glance.failure}</p>
+  );
+});
+Sentence.displayName = "Sentence";

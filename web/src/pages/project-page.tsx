@@ -1,31 +1,28 @@
-import type { Project } from "@restband/api/contract";
+import type { ScenarioSummary } from "@restband/api/contract";
 import { useSuspenseQueries } from "@tanstack/react-query";
-import { lazy, useState } from "react";
+import { useState } from "react";
 import { useNavigate, useParams } from "react-router-dom";
 import { membersQuery } from "../api/members.ts";
-import { projectQuery, useChangeProject } from "../api/projects.ts";
-import { scenariosQuery, useCreateScenario } from "../api/scenarios.ts";
+import { projectQuery } from "../api/projects.ts";
+import { scenariosQuery } from "../api/scenarios.ts";
 import { useAccount } from "../api/session.ts";
-import { Button } from "../components/button.tsx";
-import { Dialog } from "../components/dialog.tsx";
+import { Button, ButtonLink } from "../components/button.tsx";
 import { EmptyState } from "../components/empty-state.tsx";
-import { ErrorNote } from "../components/error-note.tsx";
 import { useShortcut } from "../components/shortcuts.tsx";
 import { WorkHeader } from "../features/account/work-header.tsx";
-import { headline, type Standing } from "../features/project-home/headline.ts";
-import { newScenario } from "../features/project-home/new-scenario.ts";
+import { knownOf } from "../features/project-home/arrange.ts";
+import { useGlances, type Glances } from "../features/project-home/glances/use-glances.ts";
+import { headline } from "../features/project-home/headline.ts";
+import { ImportDialog } from "../features/project-home/import-dialog.tsx";
+import { Lately } from "../features/project-home/lately.tsx";
 import { PeopleColumn } from "../features/project-home/people-column.tsx";
+import { ProjectAbout } from "../features/project-home/project-about.tsx";
+import { ProjectScenarios } from "../features/project-home/project-scenarios.tsx";
 import { mayEdit } from "../features/project-home/roles.ts";
-import { ScenarioRows } from "../features/project-home/scenario-rows.tsx";
 import { paths } from "../paths.ts";
 import { AnsweredRow } from "./answered-row.tsx";
 
-// Forms are loaded when one is opened: they are no part of the first paint.
-const ProjectForm = lazy(async () => ({
-  default: (await import("../features/project-home/project-form.tsx")).ProjectForm,
-}));
-
-/** One project: its scenarios with their answers, and its people. */
+/** One project: its scenarios with their answers, its people, and what they did lately. */
 export function ProjectPage() {
   const { projectId = "" } = useParams();
   const [{ data: project }, { data: scenarios }, { data: members }] = useSuspenseQueries({
@@ -33,99 +30,77 @@ export function ProjectPage() {
   });
   const { id: ownId } = useAccount();
   const navigate = useNavigate();
-  const [standings, setStandings] = useState<ReadonlyMap<string, Standing>>(new Map());
-  const begin = useNewScenario(
-    projectId,
-    scenarios.map(({ content }) => content.title),
-  );
-  const canEdit = mayEdit(project.role);
+  const glances = useGlances(projectId);
+  const begin = () => void navigate(paths.newScenario(projectId));
+  const [isImporting, setImporting] = useState(false);
+  const canEdit = mayEdit(project.role) && project.archivedAt === null;
   const newButton = canEdit && (
-    <Button kind="primary" isBusy={begin.isBusy} onClick={begin.run}>
+    <Button kind="primary" onClick={begin}>
       New scenario
     </Button>
   );
-  const known = scenarios.flatMap(({ id }) => standings.get(id) ?? []);
+  const actions = canEdit && (
+    <>
+      <Button onClick={() => setImporting(true)}>Bring in JSON</Button>
+      {scenarios.length > 0 && <ButtonLink to={paths.cases(projectId)}>Table of cases</ButtonLink>}
+      {newButton}
+    </>
+  );
   return (
     <>
       <title>{`${project.name} · Restband`}</title>
-      <WorkHeader trail={[{ label: "All projects", to: paths.projects }]} title={project.name} actions={newButton} />
-      {canEdit && <NewScenarioKey run={begin.run} />}
+      <WorkHeader trail={[{ label: "All projects", to: paths.projects }]} title={project.name} actions={actions} />
+      {canEdit && <NewScenarioKey run={begin} />}
       <main
         id="content"
         tabIndex={-1}
         className="page-width grid grow content-start gap-x-16 gap-y-12 py-8 desk:py-9 wide:grid-cols-[minmax(0,1fr)_292px]"
       >
         <div className="min-w-0">
-          <h1 className="text-24 font-semibold desk:text-34">{headline(scenarios.length, known)}</h1>
-          <Description project={project} />
-          {begin.failure && <ErrorNote className="mb-6">{begin.failure}</ErrorNote>}
-          {scenarios.length > 0 ? (
-            <ScenarioRows
-              scenarios={scenarios}
-              row={(stored, isSeen) => (
-                <AnsweredRow
-                  stored={stored}
-                  ownId={ownId}
-                  isSeen={isSeen}
-                  onStanding={(standing) => setStandings((before) => new Map(before).set(stored.id, standing))}
-                />
-              )}
-            />
-          ) : (
-            <EmptyState action={newButton}>
-              {canEdit
-                ? "A body, its spring, its friction and what drives it are enough for an answer."
-                : "Nobody has begun a scenario in this project so far."}
-            </EmptyState>
-          )}
+          <h1 className="text-24 font-semibold desk:text-34">{headlineOf(scenarios, glances)}</h1>
+          <ProjectAbout project={project} />
+          <ProjectScenarios
+            project={project}
+            scenarios={scenarios}
+            glances={glances}
+            ownId={ownId}
+            canEdit={canEdit}
+            row={(summary, glance, menu) => <AnsweredRow projectId={projectId} {...{ summary, ownId, glance, menu }} />}
+            empty={
+              <EmptyState action={newButton}>
+                {canEdit
+                  ? "A body, its spring, its friction and what drives it are enough for an answer."
+                  : "Nobody has begun a scenario in this project so far."}
+              </EmptyState>
+            }
+          />
         </div>
-        <PeopleColumn
-          projectId={projectId}
-          members={members}
-          ownId={ownId}
-          canManage={project.role === "owner"}
-          onLeft={() => void navigate(paths.projects)}
-        />
+        <div className="flex flex-col gap-10">
+          <PeopleColumn
+            projectId={projectId}
+            members={members}
+            ownId={ownId}
+            canManage={project.role === "owner" && project.archivedAt === null}
+            onLeft={() => void navigate(paths.projects)}
+          />
+          <Lately projectId={projectId} ownId={ownId} />
+        </div>
       </main>
+      <ImportDialog projectId={projectId} isOpen={isImporting} onClose={() => setImporting(false)} />
     </>
   );
 }
 
-/** Begins a scenario and opens it. */
-function useNewScenario(projectId: string, taken: readonly string[]) {
-  const create = useCreateScenario(projectId);
-  const navigate = useNavigate();
-  const run = () =>
-    create.mutate(newScenario(taken), { onSuccess: ({ id }) => void navigate(paths.scenario(projectId, id)) });
-  return { run, isBusy: create.isPending, failure: create.error?.message ?? null };
+/** What is archived does not count. */
+function headlineOf(scenarios: readonly ScenarioSummary[], glances: Glances): string {
+  const used = scenarios.filter(({ archivedAt }) => archivedAt === null);
+  return headline(
+    used.length,
+    used.flatMap(({ digest }) => knownOf(glances.of(digest))?.standing ?? []),
+  );
 }
 
 function NewScenarioKey({ run }: { run: () => void }) {
   useShortcut("n", "New scenario", run);
   return null;
-}
-
-/** What the project is about; an owner can change that and its name. */
-function Description({ project }: { project: Project }) {
-  const [isOpen, setOpen] = useState(false);
-  const change = useChangeProject(project.id);
-  const save = async (draft: Pick<Project, "name" | "description">) => {
-    await change.mutateAsync(draft);
-    setOpen(false);
-  };
-  return (
-    <div className="mt-3 mb-8 max-w-(--measure)">
-      {project.description && <p className="text-18 whitespace-pre-line text-quiet">{project.description}</p>}
-      {project.role === "owner" && (
-        <>
-          <button type="button" className="link mt-2 text-13" onClick={() => setOpen(true)}>
-            Change name and description
-          </button>
-          <Dialog isOpen={isOpen} title="Change the project" onClose={() => setOpen(false)}>
-            <ProjectForm project={project} action="Save" save={save} onCancel={() => setOpen(false)} />
-          </Dialog>
-        </>
-      )}
-    </div>
-  );
 }

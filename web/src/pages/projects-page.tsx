@@ -17,7 +17,10 @@ const ProjectForm = lazy(async () => ({
 
 /** All projects of the person signed in. */
 export function ProjectsPage() {
-  const { data: projects } = useSuspenseQuery(projectsQuery);
+  const { data: all } = useSuspenseQuery(projectsQuery);
+  const [areArchivedShown, showArchived] = useState(false);
+  const archived = all.filter(({ archivedAt }) => archivedAt !== null);
+  const projects = areArchivedShown ? archived : all.filter(({ archivedAt }) => archivedAt === null);
   const [isNew, setNew] = useState(false);
   const create = useCreateProject();
   const navigate = useNavigate();
@@ -34,14 +37,21 @@ export function ProjectsPage() {
       <WorkHeader title="All projects" actions={newProject} />
       <main id="content" tabIndex={-1} className="page-width grow py-8 desk:py-9">
         <div className="max-w-[972px]">
-          <h1 className="mb-6 text-24 font-semibold desk:text-34">{projectsHeadline(projects.length)}</h1>
-          {projects.length > 0 ? (
+          <h1 className="mb-6 text-24 font-semibold desk:text-34">
+            {projectsHeadline(projects.length, areArchivedShown)}
+          </h1>
+          {projects.length > 0 || areArchivedShown ? (
             <ProjectList projects={projects} />
           ) : (
             <EmptyState action={<Button onClick={open}>Begin a project</Button>}>
               A project holds scenarios and the people who work on them. Begin one, or ask its owner to add you to
               theirs.
             </EmptyState>
+          )}
+          {archived.length > 0 && (
+            <button type="button" className="link mt-4 text-13" onClick={() => showArchived(!areArchivedShown)}>
+              {areArchivedShown ? "back to those in use" : `${archived.length} archived`}
+            </button>
           )}
         </div>
       </main>

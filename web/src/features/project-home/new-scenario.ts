@@ -9,7 +9,7 @@ import type { Scenario } from "@restband/solver";
 export function newScenario(taken: readonly string[]): Scenario {
   return {
     format: "restband-scenario/1",
-    title: freeTitle(taken),
+    title: freeTitle("New scenario", taken),
     purpose: "feed",
     motion: "linear",
     body: { inertia: 100, stiffness: 2e6, cubic: 0, viscous: 500 },
@@ -34,10 +34,11 @@ export function newScenario(taken: readonly string[]): Scenario {
   };
 }
 
-function freeTitle(taken: readonly string[]): string {
+/** A title that is not taken yet: itself, or with the next free number. */
+export function freeTitle(stem: string, taken: readonly string[]): string {
   const names = new Set(taken);
   for (let n = 1; ; n++) {
-    const title = n === 1 ? "New scenario" : `New scenario ${n}`;
+    const title = n === 1 ? stem : `${stem} ${n}`;
     if (!names.has(title)) return title;
   }
 }

@@ -36,6 +36,6 @@ function ProjectRow({ project }: { project: Project }) {
   );
 }
 
-/** "Three projects." */
-export const projectsHeadline = (count: number): string =>
-  `${capitalised(sayMany(count, "project"))}${count ? "" : " yet"}.`;
+/** "Three projects.", "One archived project." */
+export const projectsHeadline = (count: number, areArchived = false): string =>
+  `${capitalised(sayMany(count, areArchived ? "archived project" : "project"))}${count || areArchived ? "" : " yet"}.`;

@@ -1,44 +1,79 @@
-import type { StoredScenario } from "@restband/api/contract";
-import { useEffect, useRef, useState, type ReactNode } from "react";
+import type { ScenarioSummary } from "@restband/api/contract";
+import { useWindowVirtualizer } from "@tanstack/react-virtual";
+import { useEffect, useLayoutEffect, useRef, useState, type ReactNode } from "react";
 
 interface ScenarioRowsProps {
-  scenarios: readonly StoredScenario[];
-  /** A row; `isSeen` turns true once it comes near the visible part of the page, and only then is it computed. */
-  row: (stored: StoredScenario, isSeen: boolean) => ReactNode;
+  rows: readonly ScenarioSummary[];
+  row: (summary: ScenarioSummary) => ReactNode;
+  /** Told which rows are near the visible part of the page, from the top. */
+  onSeen: (seen: readonly ScenarioSummary[]) => void;
 }
 
-/** The scenarios of a project, in the order last touched. */
-export function ScenarioRows({ scenarios, row }: ScenarioRowsProps) {
+/** Up to here all rows are there; of longer lists only those near the visible part. */
+const ALL_UP_TO = 60;
+const ROW = 89;
+
+/** The scenarios of a project, a row each. */
+export function ScenarioRows({ rows, row, onSeen }: ScenarioRowsProps) {
+  if (rows.length > ALL_UP_TO) return <VirtualRows rows={rows} row={row} onSeen={onSeen} />;
   return (
-    <section aria-labelledby="scenarios">
-      <div className="flex flex-wrap items-baseline gap-x-4 border-b border-edge pb-2 text-13">
-        <h2 id="scenarios" className="font-bold">
-          Scenarios
-        </h2>
-        <p className="text-quiet">in the order last touched</p>
-      </div>
-      <ul>
-        {scenarios.map((stored) => (
-          <SeenItem key={stored.id}>{(isSeen) => row(stored, isSeen)}</SeenItem>
-        ))}
-      </ul>
-    </section>
+    <ul>
+      {rows.map((summary) => (
+        <li key={summary.id} className="border-b border-line">
+          {row(summary)}
+        </li>
+      ))}
+    </ul>
   );
 }
 
-function SeenItem({ children }: { children: (isSeen: boolean) => ReactNode }) {
-  const item = useRef<HTMLLIElement>(null);
-  const [isSeen, setSeen] = useState(false);
+function VirtualRows({ rows, row, onSeen }: ScenarioRowsProps) {
+  const list = useRef<HTMLUListElement>(null);
+  const top = useTop(list);
+  const virtual = useWindowVirtualizer({
+    count: rows.length,
+    estimateSize: () => ROW,
+    overscan: 8,
+    scrollMargin: top,
+    getItemKey: (index) => rows[index].id,
+  });
+  const items = virtual.getVirtualItems();
+  const seen = items.map(({ index }) => rows[index].digest).join();
   useEffect(() => {
-    if (isSeen || !item.current) return;
-    const see = (entries: IntersectionObserverEntry[]) => entries.some((each) => each.isIntersecting) && setSeen(true);
-    const observer = new IntersectionObserver(see, { rootMargin: "1500px" });
-    observer.observe(item.current);
-    return () => observer.disconnect();
-  }, [isSeen]);
+    onSeen(items.map(({ index }) => rows[index]));
+    // Told when other rows come into sight; the callback is a new one with each render.
+    // eslint-disable-next-line react-hooks/exhaustive-deps
+  }, [seen]);
   return (
-    <li ref={item} className="border-b border-line">
-      {children(isSeen)}
-    </li>
+    <ul ref={list} className="relative" style={{ height: virtual.getTotalSize() }}>
+      {items.map(({ index, key, start }) => (
+        <li
+          key={key}
+          ref={virtual.measureElement}
+          data-index={index}
+          aria-setsize={rows.length}
+          aria-posinset={index + 1}
+          className="absolute inset-x-0 border-b border-line"
+          style={{ top: start - top }}
+        >
+          {row(rows[index])}
+        </li>
+      ))}
+    </ul>
   );
+}
+
+/** How far below the head of the page a list begins, px; what stands above it may grow. */
+function useTop(list: { current: HTMLElement | null }): number {
+  const [top, setTop] = useState(0);
+  useLayoutEffect(() => {
+    const measure = (): void => {
+      if (list.current) setTop(Math.round(list.current.getBoundingClientRect().top + window.scrollY));
+    };
+    measure();
+    const observer = new ResizeObserver(measure);
+    observer.observe(document.body);
+    return () => observer.disconnect();
+  }, [list]);
+  return top;
 }

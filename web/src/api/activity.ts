@@ -1,0 +1,42 @@
+import type { ActivityEntry } from "@restband/api/contract";
+import { infiniteQueryOptions, useQuery, useQueryClient } from "@tanstack/react-query";
+import { useEffect, useRef } from "react";
+import { call } from "./client.ts";
+
+const listActivity = (projectId: string, before: number | null, signal: AbortSignal): Promise<ActivityEntry[]> =>
+  call("listActivity", { params: { projectId }, query: before === null ? {} : { before: String(before) }, signal });
+
+/** The whole trail of a project, newest first, a page at a time. */
+export const trailQuery = (projectId: string) =>
+  infiniteQueryOptions({
+    queryKey: ["projects", projectId, "trail"],
+    queryFn: ({ pageParam, signal }) => listActivity(projectId, pageParam, signal),
+    initialPageParam: null as number | null,
+    getNextPageParam: (page) => page.at(-1)?.id ?? null,
+  });
+
+const LOOK_AGAIN_MS = 10_000;
+
+/**
+ * The newest page of the trail, looked at again every few seconds while the page is in sight. An act that is new means
+ * that somebody changed something: everything the page shows of the project is then read anew.
+ */
+export function useLately(projectId: string) {
+  const client = useQueryClient();
+  const lately = useQuery({
+    queryKey: ["projects", projectId, "activity"],
+    queryFn: ({ signal }) => listActivity(projectId, null, signal),
+    refetchInterval: LOOK_AGAIN_MS,
+  });
+  const newest = lately.data?.[0]?.id;
+  const seen = useRef(newest);
+  useEffect(() => {
+    if (seen.current !== undefined && newest !== undefined && newest > seen.current) {
+      const isOther = ({ queryKey }: { queryKey: readonly unknown[] }) =>
+        queryKey[1] === projectId && queryKey[2] !== "activity";
+      void client.invalidateQueries({ predicate: isOther });
+    }
+    seen.current = newest;
+  }, [client, projectId, newest]);
+  return lately;
+}
