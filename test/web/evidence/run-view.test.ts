@@ -112,6 +112,25 @@ describe("the inputs", () => {
   });
 });
 
+describe("the times to look at the inputs", () => {
+  it("are two where nothing changes, and hold every corner of what does", () => {
+    const still = inputsOf(variant({ base: [], limits: [] }));
+    expect(still.times(0, 10)).toEqual([0, 10]);
+    const moved = inputsOf(
+      variant({ base: [{ kind: "move", distance: 0.01, speed: 0.02, acceleration: 0.5, start: 0.333 }], limits: [] }),
+    );
+    // Speeding up for 0.04 s, 0.46 s at speed, 0.04 s down.
+    for (const corner of [0.333, 0.373, 0.833, 0.873])
+      expect(moved.times(0, 10)?.some((t) => Math.abs(t - corner) < 1e-12)).toBe(true);
+  });
+
+  it("are none where the inputs swing too often to be drawn", () => {
+    const shaken = inputsOf(variant({ force: [{ kind: "harmonic", amplitude: 1, hz: 25, phase: 0 }] }));
+    expect(shaken.times(0, 1)).toHaveLength(601);
+    expect(shaken.times(0, 600)).toBeNull();
+  });
+});
+
 describe("the cursor", () => {
   it("goes from event to event and stays at the ends", () => {
     const times = feed.eventTimes;

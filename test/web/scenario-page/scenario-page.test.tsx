@@ -2,6 +2,7 @@ import type { StoredScenario } from "@restband/api/contract";
 import { simulate, type Scenario } from "@restband/solver";
 import { act, cleanup, fireEvent, screen, waitFor, within } from "@testing-library/react";
 import { afterEach, beforeEach, describe, expect, it, vi } from "vitest";
+import { noteConnection } from "../../../web/src/api/connection.ts";
 import type { SolverJob } from "../../../web/src/compute/solver-job.ts";
 import {
   fakeServer,
@@ -17,10 +18,16 @@ import {
 import { openPage } from "../support/open-page.tsx";
 import { creepFeed, variant } from "../support/scenarios.ts";
 
+const beyond = { path: "contact.law.model", message: "not computed by this version" };
+const beyondTitle = "Beyond this version";
+
 // The solver itself, without a thread of its own; and no drawing library, which jsdom has no ground for.
 vi.mock("../../../web/src/compute/start-worker.ts", () => ({
   startWorker: () => ({
-    run: ({ scenario, options }: SolverJob) => Promise.resolve(simulate(scenario, options)),
+    run: ({ scenario, options }: SolverJob) =>
+      Promise.resolve(
+        scenario.title === beyondTitle ? { error: { ...beyond, faults: [beyond] } } : simulate(scenario, options),
+      ),
     terminate: () => undefined,
     onCrash: () => undefined,
   }),
@@ -109,6 +116,47 @@ describe("the page of a scenario", () => {
     expect(screen.getByRole("button", { name: "Damping: 8000 N·s/m" })).toBeInTheDocument();
   });
 
+  it("does not undo an undo that is made while a save is under way", async () => {
+    let answerSave = (): void => undefined;
+    const put = (request: Request) =>
+      new Promise<ReturnType<typeof saved>>((resolve) => {
+        answerSave = () => resolve(saved(request));
+      });
+    const requests = fakeServer(seen(creepFeed, "editor", { [`PUT ${at}`]: put }));
+    const { user } = openPage(at);
+    await changeDamping(user, "400");
+    await waitFor(() => expect(saves(requests)).toHaveLength(1));
+    await user.click(screen.getByRole("button", { name: "Undo" }));
+    answerSave();
+    await waitFor(() => expect(saves(requests)).toHaveLength(2));
+    expect(saves(requests)[1].body).toMatchObject({ content: { body: { viscous: 350 } } });
+    expect(saves(requests)[1].headers["If-Match"]).toBe('"4"');
+    expect(screen.getByRole("button", { name: "Damping: 350 N·s/m" })).toBeInTheDocument();
+  });
+
+  it("sends what is waiting when the page is left at once", async () => {
+    const requests = fakeServer(seen());
+    const { user } = openPage(at);
+    await changeDamping(user, "400");
+    cleanup();
+    await waitFor(() => expect(saves(requests)).toHaveLength(1));
+    expect(saves(requests)[0].body).toMatchObject({ content: { body: { viscous: 400 } } });
+  });
+
+  it("takes a newer version of somebody else's over while nothing of its own is open", async () => {
+    let content = creepFeed;
+    let version = 3;
+    fakeServer(seen(creepFeed, "editor", { [`GET ${at}`]: () => ok(stored(content, version)) }));
+    openPage(at);
+    await answer();
+    content = variant({ body: { ...creepFeed.body, viscous: 8000 } });
+    version = 4;
+    // A connection lost and found has everything on the page read again.
+    act(() => noteConnection(false));
+    act(() => noteConnection(true));
+    expect(await screen.findByRole("button", { name: "Damping: 8000 N·s/m" })).toBeInTheDocument();
+  });
+
   it("never sends what is refused, and says how many fields are open", async () => {
     const requests = fakeServer(seen());
     const { user } = openPage(at);
@@ -182,7 +230,7 @@ describe("the page of a scenario", () => {
 
   it("says which part is not computed, and keeps the scenario", async () => {
     const law = { model: "stribeck", static: 0.2, kinetic: 0.1, velocity: 0.01, exponent: 2, fluid: 0 } as const;
-    fakeServer(seen(variant({ contact: { ...creepFeed.contact, law } })));
+    fakeServer(seen(variant({ title: beyondTitle, contact: { ...creepFeed.contact, law } })));
     openPage(at);
     const part = await screen.findByText(/^Friction by the Stribeck law is valid, but not computed by this version/);
     expect(part.closest("[role=group]")).toHaveAccessibleName("Contact");

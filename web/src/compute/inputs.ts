@@ -12,9 +12,16 @@ export interface Inputs {
   readonly hold: (t: number) => number;
   /** ±μs N r/k about the equilibrium, N without ripple; null without a spring or without friction. */
   readonly restBand: number | null;
-  /** Whether the inputs stay as they are over the whole run. */
-  readonly isConstant: boolean;
+  /**
+   * The times from `from` to `to` at which to look at the inputs so that none of their corners and swings is lost; null
+   * where they swing more often than can be drawn.
+   */
+  readonly times: (from: number, to: number) => readonly number[] | null;
 }
+
+const PER_CYCLE = 24;
+const FEWEST = 200;
+const MOST = 3600;
 
 type Terms = Problem["force"];
 
@@ -31,8 +38,28 @@ export function inputsOf(scenario: Scenario): Inputs {
     equilibrium: (t) => (stiffness > 0 ? base(t) + stretch(force(t) + weight, stiffness, cubic) : null),
     hold: (t) => holds * Math.max(0, normal + rippleAt(problem, t)),
     restBand: stiffness > 0 && holds * normal > 0 ? (holds * normal) / stiffness : null,
-    isConstant: [...problem.force, ...problem.base].every((term) => term.isConstantFrom(0)),
+    times: (from, to) => timesOf(problem, from, to),
   };
+}
+
+function timesOf({ force, base, ripple }: Problem, from: number, to: number): number[] | null {
+  const terms = [...force, ...base];
+  if (ripple === null && terms.every((term) => term.isConstantFrom(from))) return [from, to];
+  const fastest = Math.max(ripple?.hz ?? 0, ...terms.map(({ hz, smooth }) => hz ?? smooth?.fastestHz ?? 0));
+  const count = Math.max(FEWEST, Math.ceil(PER_CYCLE * fastest * (to - from)));
+  if (count > MOST) return null;
+  const even = Array.from({ length: count + 1 }, (_, i) => from + (i * (to - from)) / count);
+  const corners = terms.flatMap((term) => cornersOf(term, from, to));
+  return [...new Set([...even, ...corners])].sort((a, b) => a - b);
+}
+
+/** Each corner and a moment just before it: a step is drawn as one. */
+function cornersOf(term: Terms[number], from: number, to: number): number[] {
+  const corners: number[] = [];
+  const moment = 1e-9 * (to - from);
+  for (let t = term.nextCorner(from); t < to && corners.length < MOST; t = term.nextCorner(t))
+    corners.push(t - moment, t);
+  return corners;
 }
 
 function sum(terms: Terms, t: number): number {

@@ -6,7 +6,7 @@ import { densified } from "./densified.ts";
 import { axes, layoutOf, type FigureLayout } from "./evidence-layout.ts";
 import type { Frame, PanelFrame } from "./frame.ts";
 import { phaseChanges, type RunView } from "./run-view.ts";
-import { bandTimes, driveSpeed } from "./scales.ts";
+import { driveSpeed } from "./scales.ts";
 import { thinned } from "./thin.ts";
 
 const MOST_POINTS = 4000;
@@ -37,11 +37,11 @@ function curveTraces(view: RunView, frame: Frame, panel: PanelFrame, theme: Plot
   return [line(panel, slip, { color: theme.slip, width: 2 }), line(panel, stick, { color: theme.stick, width: 3 })];
 }
 
-/** The band in which friction can hold the body, about its equilibrium, and that equilibrium itself. */
+/** The band in which friction can hold the body, about its equilibrium; left out where that swings too fast to be drawn. */
 function bandTraces(view: RunView, frame: Frame, panel: PanelFrame, theme: PlotTheme): Data[] {
   const { equilibrium, restBand } = view.inputs;
-  if (restBand === null) return [];
-  const times = bandTimes(view, frame);
+  const times = view.inputs.times(frame.from, frame.to);
+  if (restBand === null || times === null) return [];
   const edge = (offset: number): Line => at(times, (t) => (equilibrium(t) ?? 0) + offset, panel.unit);
   const drawn = { color: theme["band-line"], width: 1.5 };
   const fill: Partial<Data> = {
@@ -77,7 +77,8 @@ function speedTraces(view: RunView, frame: Frame, panel: PanelFrame, theme: Plot
 function holdTraces(view: RunView, frame: Frame, panel: PanelFrame, theme: PlotTheme): Data[] {
   const { inputs, scenario } = view;
   if (inputs.hold(frame.from) === 0) return [];
-  const times = scenario.contact.normal.ripple ? bandTimes(view, frame) : [frame.from, frame.to];
+  const ends = [frame.from, frame.to];
+  const times = scenario.contact.normal.ripple ? (inputs.times(frame.from, frame.to) ?? ends) : ends;
   return [1, -1].map((side) =>
     line(
       panel,

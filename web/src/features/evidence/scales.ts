@@ -38,16 +38,11 @@ function extremesOf(samples: Samples, channel: "x" | "v" | "f", { from, to }: Ra
   return [low, high];
 }
 
-/** Times at which a moving band is looked at. */
-export const bandTimes = ({ inputs }: RunView, { from, to }: Range): number[] => {
-  const count = inputs.isConstant ? 1 : 400;
-  return Array.from({ length: count + 1 }, (_, i) => from + (i * (to - from)) / count);
-};
-
 function bandEdges(view: RunView, range: Range): number[] {
   const { equilibrium, restBand } = view.inputs;
-  if (restBand === null) return [];
-  return bandTimes(view, range).flatMap((t) => {
+  const times = view.inputs.times(range.from, range.to);
+  if (restBand === null || times === null) return [];
+  return times.flatMap((t) => {
     const centre = equilibrium(t);
     return centre === null ? [] : [centre - restBand, centre + restBand];
   });

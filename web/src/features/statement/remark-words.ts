@@ -1,4 +1,4 @@
-import { lawOf, termOf, type Fault, type Scenario } from "@restband/solver";
+import { lawOf, solidOf, termOf, type Fault, type Scenario } from "@restband/solver";
 import { stepsOf } from "./path.ts";
 import { fieldAt } from "./scenario-fields.ts";
 
@@ -12,6 +12,8 @@ function nameOf(scenario: Scenario, path: string): string {
   const [place, index] = stepsOf(path);
   if (path.startsWith("contact.law")) return `Friction by the ${lawOf(scenario.contact.law.model).label} law`;
   if (path.startsWith("contact.normal.ripple")) return "A pressing force that ripples down to nothing";
+  if (path.startsWith("solid"))
+    return `Solid damping by the ${solidOf(scenario.solid.model).label} model together with this friction`;
   if (path === "body.cubic") return "A spring that stiffens or softens";
   if (place === "force" || place === "base") {
     const term = scenario[place][Number(index)];

@@ -95,6 +95,11 @@ export class Autosave {
     this.settle();
   }
 
+  /** Nothing of one's own is on its way or waiting to be sent. */
+  get isIdle(): boolean {
+    return !this.isSending && !this.isHalted && this.isKept();
+  }
+
   private isKept(): boolean {
     return digestOf(this.wanted) === digestOf(this.base.content);
   }

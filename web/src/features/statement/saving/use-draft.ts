@@ -59,7 +59,7 @@ export function useDraft({ stored, accountId, canEdit }: UseDraftSettings): Open
   useEffect(() => {
     if (stored.version <= seen.current || stored.version <= autosave.base.version) return;
     seen.current = stored.version;
-    if (hasFaults || !isSameScenario(draft.inForce, autosave.base.content)) return;
+    if (hasFaults || !autosave.isIdle || !isSameScenario(draft.inForce, autosave.base.content)) return;
     autosave.adopt(stored);
     dispatch({ type: "replace", scenario: stored.content });
   }, [stored, draft.inForce, hasFaults, autosave]);
