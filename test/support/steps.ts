@@ -22,8 +22,18 @@ export const valueOf = (page: Page, label: string): Locator =>
 
 export const editorOf = (page: Page, label: string): Locator => page.getByRole("group", { name: `Change ${label}` });
 
-/** A figure beside the plots, at the cursor, by the name above it. */
-export const readingOf = (page: Page, name: string): Locator => page.locator(`dt:text-is("${name}") + dd`);
+const metres: Readonly<Record<string, number>> = { m: 1, mm: 1e-3, μm: 1e-6 };
+
+/** Expects the length beside the plots, at the cursor, under its name; m, a band's half width without its ±. */
+export const expectLength = (page: Page, name: string) =>
+  expect.poll(
+    async () => {
+      const text = await textOf(page.locator(`dt:text-is("${name}") + dd`));
+      const [, figure, unit] = /^±?(.*?)([mμ]*)$/.exec(text) ?? [];
+      return figureOf(figure) * metres[unit];
+    },
+    { timeout: 15_000 },
+  );
 
 export async function signIn(page: Page, email: string): Promise<void> {
   await page.goto("/");
