@@ -1,6 +1,5 @@
 import type { ReactNode } from "react";
 import { Button } from "../../components/button.tsx";
-import { VisuallyHidden } from "../../components/visually-hidden.tsx";
 
 interface StartingPointRowProps {
   name: string;
@@ -24,8 +23,8 @@ export function StartingPointRow({ name, why, shows, strip, isBusy, onBegin }: S
         {shows && <p className="mt-1 text-quiet">{shows}</p>}
       </div>
       <div className="max-desk:order-3">
-        <Button isBusy={isBusy} onClick={onBegin}>
-          Begin<VisuallyHidden> with: {name}</VisuallyHidden>
+        <Button isBusy={isBusy} aria-label={`Begin with: ${name}`} onClick={onBegin}>
+          Begin
         </Button>
       </div>
     </li>
