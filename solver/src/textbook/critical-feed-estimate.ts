@@ -32,6 +32,6 @@ export const criticalFeedEstimate: TextbookCompanion = {
   ofRun: () => null,
   note: ({ ratio }) => {
     const over = 100 * (estimate(ratio) / criticalSpeedRatio(ratio) - 1);
-    return `For small damping; on the safe side, here by ${over.toPrecision(2)} %.`;
+    return `For small damping; on the safe side, here by ${over.toPrecision(2)}\u00a0%.`;
   },
 };

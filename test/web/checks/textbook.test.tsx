@@ -31,7 +31,7 @@ describe("the rows", () => {
 
   it("stand in one unit, with the difference in per cent", () => {
     expect(rowOf("stick-slip-period")).toMatchObject({
-      value: { text: "39", unit: "ms" },
+      value: { text: "39.00", unit: "ms" },
       ofRun: { text: "38.69", unit: "ms" },
       difference: "−0.80\u00a0%",
     });

@@ -1,7 +1,7 @@
 import type { Scenario, TextbookComparison, TextbookMismatch, TextbookSymbol } from "@restband/solver";
 import { formatFixed, formatNumber } from "../../format/format-number.ts";
 import { joined, readQuantity, type Reading } from "../../format/format-quantity.ts";
-import type { Measure, Motion } from "../../format/unit.ts";
+import { fromSi, type Measure, type Motion, type Unit } from "../../format/unit.ts";
 import { unitFor } from "../../format/units.ts";
 
 /** A formula beside the run, as the table shows it. */
@@ -36,14 +36,20 @@ export function textbookTable(comparisons: readonly TextbookComparison[], { moti
       key: companion.key,
       label: companion.label,
       formula: companion.formula,
-      value: readQuantity(value, measure, { unit, digits }),
-      ofRun: ofRun === null ? null : readQuantity(ofRun, measure, { unit, digits }),
+      value: reading(value, measure, unit),
+      ofRun: ofRun === null ? null : reading(ofRun, measure, unit),
       difference: differenceWords(difference),
       note,
       source: sources.indexOf(companion.source) + 1,
     };
   });
   return { rows, sources };
+}
+
+/** To as many digits in both columns, so that 39.00 stands beside 38.69; a count or a ratio without zeros behind it. */
+function reading(value: number, measure: Measure, unit: Unit): Reading {
+  const read = readQuantity(value, measure, { unit, digits });
+  return measure.dimension === "none" ? read : { ...read, text: formatNumber(fromSi(value, unit), digits, true) };
 }
 
 /** Differences below what four digits show are none to a reader. */

@@ -1,5 +1,6 @@
 import { compareWithTextbook, type Result, type Scenario, type TextbookMismatch } from "@restband/solver";
 import { Fragment, useId, useMemo, useState, type ReactNode } from "react";
+import { classNames } from "../../components/class-names.ts";
 import { PowerText } from "../../components/power-text.tsx";
 import type { Reading } from "../../format/format-quantity.ts";
 import { sayMany } from "../../format/words.ts";
@@ -45,7 +46,7 @@ export function Textbook({ scenario, result }: { scenario: Scenario; result: Res
         <ol className="mt-2 list-decimal pl-5 text-13 text-quiet" aria-label="Sources of the formulas">
           {sources.map((source, i) => (
             <li key={source} id={`${id}${i + 1}`}>
-              {source}.
+              <FormulaText text={`${source}.`} />
             </li>
           ))}
         </ol>
@@ -93,6 +94,8 @@ function TableFrame({ isEmpty, children }: { isEmpty: boolean; children: ReactNo
   );
 }
 
+/** Notes of up to this many signs stand beside the formula, longer ones below it. */
+const shortNote = 34;
 const figureClass = "py-1.5 pl-4 text-right align-top whitespace-nowrap";
 
 function Row({ row, sourceId }: { row: TextbookRow; sourceId: string }) {
@@ -100,16 +103,17 @@ function Row({ row, sourceId }: { row: TextbookRow; sourceId: string }) {
     <tr className="border-b border-line">
       <th scope="row" className="min-w-44 py-1.5 text-left font-normal">
         {row.label}
-        <span className="block text-13 text-quiet">
+        <br />
+        <span className="text-13 text-quiet">
           <span className="font-sym italic">
             <FormulaText text={row.formula} />
           </span>{" "}
           <a href={`#${sourceId}`} className="link" aria-label={`Source ${row.source} of ${row.label}`}>
             [{row.source}]
           </a>
-        </span>
+        </span>{" "}
         {row.note && (
-          <span className="block text-13 text-quiet">
+          <span className={classNames("text-13 text-quiet", row.note.length > shortNote && "block")}>
             <FormulaText text={row.note} />
           </span>
         )}
