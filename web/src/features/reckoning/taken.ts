@@ -7,3 +7,6 @@ export interface Taken {
   readonly value: number;
   readonly origin: Origin;
 }
+
+/** A result as it is shown, to four digits: what is taken is what was seen. */
+export const asShown = (value: number): number => Number(value.toPrecision(4));

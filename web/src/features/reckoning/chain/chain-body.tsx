@@ -8,6 +8,7 @@ import { GroupCard } from "./group-card.tsx";
 import { kits } from "./kit.ts";
 import { largest, sharesOf, valueOf } from "./network.ts";
 import { emptyGroup } from "./part.ts";
+import { asShown } from "../taken.ts";
 import { SharesTable } from "./shares-table.tsx";
 import { useKeptState } from "./use-kept-state.ts";
 
@@ -25,7 +26,7 @@ export function ChainBody({ reckoning, path, scenario, keptUnder, onTake, onClos
   const take = (): void => {
     if (!network) return;
     const source = chainSentence(root, shares, motion, kit);
-    onTake([{ path, value: valueOf(network), origin: { kind: "calculated", source } }]);
+    onTake([{ path, value: asShown(valueOf(network)), origin: { kind: "calculated", source } }]);
   };
   const missing = root.parts.length === 0 ? kit.empty : "missing" in compiled ? compiled.missing : undefined;
   const most = shares.length > 1 ? largest(shares) : null;

@@ -16,16 +16,16 @@ export function chainSentence(root: Group, shares: readonly Share[], motion: Mot
 
 function groupWords(group: Group, motion: Motion, kit: Kit): string {
   const transmission = transmissionOf(group.through);
-  const behind = motionBehind(group.through, motion);
-  const parts = group.parts.map((part) => partWords(part, behind, kit)).join(joiner(group, kit));
-  if (!transmission) return parts;
+  const parts = group.parts.map((part) => partWords(part, motionBehind(group.through, motion), kit));
+  const words =
+    parts.length < 2 || !kit.canStandInSeries ? parts.join(" + ") : `${joinWords[group.join]}: ${parts.join("; ")}`;
+  if (!transmission) return words;
   const { values } = readEntries(transmission, group.entries);
   const numbers = values ? ` (${valuesText(transmission, values, group.entries)})` : "";
-  return `behind ${transmission.label}${numbers}: [${parts}]`;
+  return `behind ${transmission.label}${numbers}: [${words}]`;
 }
 
-const joiner = ({ join }: Group, kit: Kit): string =>
-  !kit.canStandInSeries ? " + " : join === "series" ? " in series with " : " side by side with ";
+const joinWords: Readonly<Record<Group["join"], string>> = { series: "in series", parallel: "side by side" };
 
 function partWords(part: Part, motion: Motion, kit: Kit): string {
   if (!isGroup(part)) return memberWords(part, kit);

@@ -47,6 +47,7 @@ function UnitChoice({ given, entry, onChange }: Pick<GivenFieldProps, "given" | 
   const { measure } = given;
   const unit = unitTyped(entry, measure);
   const usual = unitsOf(measure).filter(({ label }) => label !== "");
+  if (measure.isShare) return <span className="text-13 text-quiet">%</span>;
   if (measure.dimension === "none") return null;
   const units = usual.some(({ label }) => label === unit.label) ? usual : [unit, ...usual];
   const choose = (label: string): void => {

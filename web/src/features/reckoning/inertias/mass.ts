@@ -3,7 +3,7 @@ import { formula, measures, textbook } from "../formula/formula.ts";
 export const mass = formula({
   key: "mass",
   label: "Mass, weighed or from the drawing",
-  givens: [{ key: "mass", label: "Mass", symbol: "m_0", measure: measures.mass, exclusiveMinimum: 0 }],
+  givens: [{ key: "mass", label: "Mass", symbol: "m", measure: measures.mass, exclusiveMinimum: 0 }],
   result: { symbol: "m", measure: measures.mass },
   expression: "{mass}",
   source: "weighed or drawn",

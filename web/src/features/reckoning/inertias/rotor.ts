@@ -9,7 +9,7 @@ export const rotor = formula({
     {
       key: "inertia",
       label: "Moment of inertia",
-      symbol: "J_0",
+      symbol: "J",
       measure: measures.inertia,
       unit: "kg·cm²",
       exclusiveMinimum: 0,

@@ -17,7 +17,7 @@ const count: Given<"count"> = {
 
 const spread: Given<"spread"> = {
   key: "spread",
-  label: "Spread of the force, ±",
+  label: "Spread up and down",
   symbol: "s",
   measure: { ...measures.number, isShare: true },
   minimum: 0,

@@ -9,7 +9,7 @@ const fromCatalogue = (key: string, label: string, turns: boolean, caveat: strin
       {
         key: "rate",
         label: turns ? "Torsional stiffness" : "Stiffness",
-        symbol: turns ? "κ_0" : "k_0",
+        symbol: turns ? "κ" : "k",
         measure: turns ? measures.torsionRate : measures.springRate,
         exclusiveMinimum: 0,
       },

@@ -24,11 +24,11 @@ export function TableBody({ reckoning, onTake, onClose }: ReckoningBodyProps) {
       key: "name",
       head: table.head,
       cell: (row) => (
-        <label className="hit flex items-center gap-2.5">
+        <label className="flex items-baseline gap-2.5 py-0.5 pointer-coarse:py-2">
           <input
             type="radio"
             name={name}
-            className="size-4 shrink-0 accent-slip"
+            className="size-4 shrink-0 translate-y-0.5 accent-slip"
             checked={row === chosen}
             onChange={() => setChosen(row)}
             data-first-focus={row === table.rows[0] || undefined}
@@ -52,6 +52,7 @@ export function TableBody({ reckoning, onTake, onClose }: ReckoningBodyProps) {
         rows={table.rows}
         keyOf={({ key }) => key}
         isCurrent={(row) => row === chosen}
+        className="min-h-72"
       />
       <Caution>
         <p>{table.caution}</p>
