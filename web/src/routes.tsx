@@ -28,7 +28,7 @@ export function makeRoutes(client: QueryClient): RouteObject[] {
       HydrateFallback: PageFallback,
       ErrorBoundary: RouteFailure,
       children: [
-        { index: true, loader: () => redirect(paths.projects) },
+        { index: true, loader: () => redirect(paths.projects), Component: PageFallback },
         { loader: demandSession(client), ErrorBoundary: RouteFailure, children: workPages },
         { loader: passSession(client), ErrorBoundary: RouteFailure, children: entryPages },
         page(patterns.welcome, () => import("./pages/welcome-page.tsx"), "WelcomePage"),
