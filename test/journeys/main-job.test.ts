@@ -51,6 +51,7 @@ describe("the main job", () => {
     await signUpOnPage(page, "Ada");
     await makeProject(page, "Refit of line 2");
     await page.getByRole("button", { name: "New scenario" }).first().click();
+    await page.getByRole("button", { name: "Begin with: Plain numbers" }).click();
     await describeCarriage(page);
     await seeStickSlip(page);
     const scenario = page.url();

@@ -21,6 +21,7 @@ it("brakes a rotor: at rest after ω/α, ω²/2α further on", async () => {
   await signIn(page, emailOf("Ada"));
   await page.getByRole("link", { name: "Brakes" }).click();
   await page.getByRole("button", { name: "New scenario" }).first().click();
+  await page.getByRole("button", { name: "Begin with: Plain numbers" }).click();
   await choose(page, "Motion", "rotor");
   await choose(page, "Purpose", "braking");
   await page.getByRole("button", { name: "all fields of Drive" }).click();
