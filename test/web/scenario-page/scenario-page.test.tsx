@@ -18,6 +18,9 @@ import {
 import { openPage } from "../support/open-page.tsx";
 import { creepFeed, variant } from "../support/scenarios.ts";
 
+// A whole page with the solver in one thread: seconds on a busy machine.
+vi.setConfig({ testTimeout: 30_000 });
+
 const beyond = { path: "contact.law.model", message: "not computed by this version" };
 const beyondTitle = "Beyond this version";
 
