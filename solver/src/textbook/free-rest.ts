@@ -4,7 +4,7 @@ import type { TextbookCase } from "./textbook-case.ts";
 import type { Condition } from "./textbook-companion.ts";
 
 const isFollowed: Condition = (kase) =>
-  freeSwings(kase).length > 0 ? null : "It would take more than 100,000 half cycles to come to rest.";
+  freeSwings(kase).length > 0 ? null : "It would take more than 10,000 half cycles to come to rest.";
 
 /** Where the swings of a body left to itself can be counted to its rest. */
 export const restsByFriction: readonly Condition[] = [

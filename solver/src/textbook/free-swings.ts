@@ -7,7 +7,7 @@ export interface TurningPoint {
 }
 
 /** Swings beyond this number are not followed: the formulas then say nothing about the rest. */
-const mostSwings = 100_000;
+const mostSwings = 10_000;
 
 /**
  * The turning points of a body left to itself with Coulomb friction and damping ζ < 1, its start (where it starts at rest)
@@ -15,7 +15,7 @@ const mostSwings = 100_000;
  * exp(−πζ/√(1−ζ²)), each half cycle lasting π/ω_d; it rests at the first turning point with |u| ≤ x_s.
  *
  * Source: exact between turning points, by the equation itself; textbook knowledge, from memory. Empty where it would take
- * more than 100,000 swings.
+ * more than 10,000 swings.
  */
 export function freeSwings(kase: TextbookCase): readonly TurningPoint[] {
   const { omega, ratio, staticForce, problem } = kase;
