@@ -26,7 +26,7 @@ describe("the list of textbook companions", () => {
 });
 
 it("on any body each formula either gives a number or says in a sentence why it has no place", () => {
-  for (let seed = 0; seed < 300; seed++) {
+  for (let seed = 0; seed < 100; seed++) {
     const scenario = randomScenario(seed);
     const result = simulate(scenario, { samples: 201 });
     if ("error" in result) continue;
@@ -39,4 +39,4 @@ it("on any body each formula either gives a number or says in a sentence why it 
       if (note !== null) expect(note).toMatch(/\.$/);
     }
   }
-});
+}, 30_000);
