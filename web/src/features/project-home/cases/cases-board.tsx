@@ -7,12 +7,13 @@ import { FileButton } from "../../../components/file-button.tsx";
 import { ProgressLine } from "../../../components/progress-line.tsx";
 import { announce } from "../../../components/status.tsx";
 import { TextArea } from "../../../components/text-field.tsx";
-import { sayMany } from "../../../format/words.ts";
+import { listed, sayMany } from "../../../format/words.ts";
 import type { Glance } from "../glances/glance-book.ts";
 import { fileNameOf, saveFile } from "../save-file.ts";
 import type { Case, Decimal } from "./build-cases.ts";
 import type { CaseField, WriteNumber } from "./case-field.ts";
 import { CasesTable } from "./cases-table.tsx";
+import type { Column } from "./columns.ts";
 import { exampleTable } from "./example-table.ts";
 import { useCaseGlances } from "./use-case-glances.ts";
 import { useCases } from "./use-cases.ts";
@@ -81,6 +82,7 @@ export function CasesBoard({ base, fields, write, text, onText, save }: CasesBoa
       )}
       {cases.length > 0 && (
         <>
+          <LeftOut columns={columns} />
           <CasesTable columns={columns} fields={fields} cases={cases} glances={glances} onChoose={table.choose} />
           <CasesFoot
             base={base}
@@ -96,10 +98,17 @@ export function CasesBoard({ base, fields, write, text, onText, save }: CasesBoa
   );
 }
 
+/** Says which columns are not used: nothing is lost unseen. */
+function LeftOut({ columns }: { columns: readonly Column[] }) {
+  const heads = columns.flatMap(({ kind, head }) => (kind === "unused" && head !== "" ? [`“${head}”`] : []));
+  if (heads.length === 0) return null;
+  return <p>{`Left out: ${listed(heads)}. Choose under a head what it is for, to use it.`}</p>;
+}
+
 interface CasesFootProps {
   base: Scenario;
   cases: readonly Case[];
-  columns: ReturnType<typeof useCases>["columns"];
+  columns: readonly Column[];
   glances: readonly (Glance | undefined)[];
   hasTableFaults: boolean;
   save: (scenarios: Scenario[]) => Promise<void>;

@@ -66,11 +66,11 @@ function CaseRow({ columns, each, glance }: { columns: readonly Column[]; each: 
           className={classNames(
             cellClass,
             column.kind === "unused" && "text-quiet line-through",
-            column.kind === "field" && "figures",
             faultsAt(i).length > 0 && "min-w-56 border-2 border-broken",
           )}
         >
-          {each.cells[i] || (column.kind === "field" && <span className="text-quiet">as in the base</span>)}
+          {each.cells[i] && <span className={column.kind === "field" ? "figures" : undefined}>{each.cells[i]}</span>}
+          {!each.cells[i] && column.kind === "field" && <span className="text-quiet">as in the base</span>}
           {faultsAt(i).map(({ message }) => (
             <FieldError key={message}>{message}</FieldError>
           ))}

@@ -52,6 +52,9 @@ function splitHead(head: string): { name: string; unit: string } {
   return name === undefined ? { name: head, unit: "" } : { name, unit };
 }
 
+/** What the trade calls a number whose field has another name. */
+const customary: Readonly<Record<string, RegExp>> = { feed: /^base\[\d+\]\.rate$/u, belt: /^contact\.counterface\./u };
+
 const plain = (text: string): string => text.toLowerCase().replace(/[\s_-]+/gu, "");
 
 function guess(name: string, fields: readonly CaseField[]): string {
@@ -67,7 +70,7 @@ function guess(name: string, fields: readonly CaseField[]): string {
     const found = fields.filter((field) => plain(nameOf(field)) === wanted);
     if (found.length > 0) return found[0].path;
   }
-  return "unused";
+  return fields.find(({ path }) => customary[wanted]?.test(path))?.path ?? "unused";
 }
 
 /** A row in which no column of a field has a number, and at least one has a unit that fits. */
