@@ -87,10 +87,10 @@ function Through({ group, motion, onChange, onRemove }: ThroughProps) {
   };
   return (
     <div className="flex flex-col gap-3">
-      <div className="flex items-end gap-3">
+      <div className="flex flex-wrap items-end gap-3">
         <SelectField
           label="The group stands"
-          className="grow"
+          className="grow basis-60"
           choices={[
             { value: "", label: "before no transmission" },
             ...transmissionsFor(motion).map(({ key, label }) => ({ value: key, label: `behind ${label}` })),

@@ -8,21 +8,21 @@ import type { Share } from "./network.ts";
 /** What each member is by itself, what the body feels of it, and its part in the whole, drawn and in figures. */
 export function SharesTable({ shares, kit, measure }: { shares: readonly Share[]; kit: Kit; measure: Measure }) {
   const columns: readonly Column<Share>[] = [
-    { key: "name", head: "Member", cell: ({ name }) => name },
-    {
-      key: "own",
-      head: "By itself",
-      isFigure: true,
-      cell: (share) => <PowerText text={say(share.value, share.measure, { unit: share.unit })} />,
-    },
-    { key: "seen", head: "At the body", isFigure: true, cell: ({ seen }) => <PowerText text={say(seen, measure)} /> },
+    { key: "name", head: "Member", cell: ({ name }) => name, className: "max-desk:whitespace-normal" },
     { key: "share", head: kit.shareHead, isFigure: true, cell: ({ share }) => sayShare(share) },
     {
       key: "bar",
       head: <span className="sr-only">Drawn</span>,
       cell: ({ share }) => <Bar share={share} />,
-      className: "w-32",
+      className: "w-32 max-desk:hidden",
     },
+    {
+      key: "own",
+      head: "by itself",
+      isFigure: true,
+      cell: (share) => <PowerText text={say(share.value, share.measure, { unit: share.unit })} />,
+    },
+    { key: "seen", head: "at the body", isFigure: true, cell: ({ seen }) => <PowerText text={say(seen, measure)} /> },
   ];
   return (
     <DataTable

@@ -23,6 +23,7 @@ export function TableBody({ reckoning, onTake, onClose }: ReckoningBodyProps) {
     {
       key: "name",
       head: table.head,
+      className: "max-desk:whitespace-normal",
       cell: (row) => (
         <label className="flex items-baseline gap-2.5 py-0.5 pointer-coarse:py-2">
           <input
@@ -33,11 +34,13 @@ export function TableBody({ reckoning, onTake, onClose }: ReckoningBodyProps) {
             onChange={() => setChosen(row)}
             data-first-focus={row === table.rows[0] || undefined}
           />
-          {row.name} <span className="sr-only">{row.condition}</span>
+          <span>
+            {row.name} <span className="text-13 text-quiet max-desk:block desk:sr-only">{row.condition}</span>
+          </span>
         </label>
       ),
     },
-    { key: "condition", head: "Condition", cell: ({ condition }) => condition },
+    { key: "condition", head: "Condition", cell: ({ condition }) => condition, className: "max-desk:hidden" },
     ...table.columns.map(({ path, label }) => ({
       key: path,
       head: label,
