@@ -54,6 +54,16 @@ describe.each(looks)("axe finds nothing, %s,", (_, options) => {
     await inDialog(page, "Keyboard", "Use single keys");
   });
 
+  it("on what a scenario can begin from", async () => {
+    const page = await journey.visit(options);
+    await signIn(page, demoPeople.ines.email);
+    await page.getByRole("link", { name: "Hall 3 refit" }).click();
+    await page.getByRole("button", { name: "New scenario" }).first().click();
+    await page.getByRole("heading", { level: 1, name: "Begin with a case like yours." }).waitFor();
+    await page.getByRole("img", { name: /^Motion over/ }).last().waitFor();
+    expect(await axeFindings(page)).toEqual([]);
+  });
+
   it("on a scenario, with an editor open, and with every field open", async () => {
     const page = await journey.visit(options);
     await signIn(page, demoPeople.ines.email);

@@ -89,6 +89,19 @@ describe("the ranges of the page", () => {
     await waitFor(() => expect(hook.current.state.kind).toBe("done"));
   });
 
+  it("wait to be asked where they would take long", async () => {
+    let now = 0;
+    // Three runs of 2 s each tell that more than thirty take over half a minute.
+    vi.spyOn(performance, "now").mockImplementation(() => (now += 2000));
+    const { result: hook } = open(withRange());
+    await pass(700);
+    await waitFor(() => expect(hook.current.state.kind).toBe("long"));
+    expect(worker.jobs).toHaveLength(3);
+    vi.mocked(performance.now).mockRestore();
+    act(() => hook.current.begin());
+    await waitFor(() => expect(hook.current.state.kind).toBe("done"));
+  });
+
   it("are known at once where they were gone through before", async () => {
     const computed = withRange();
     const first = open(computed);

@@ -18,7 +18,7 @@ export function StartingPointRow({ name, why, shows, strip, isBusy, onBegin }: S
     <li className="grid items-start gap-x-7 gap-y-3 border-b border-line py-4 desk:grid-cols-[188px_minmax(0,1fr)_auto]">
       <div className="min-h-11 max-desk:order-2">{strip}</div>
       <div className="min-w-0 max-w-(--measure)">
-        <h3 className="text-18 font-bold">{name}</h3>
+        <h2 className="text-18 font-bold">{name}</h2>
         <p>{why}</p>
         {shows && <p className="mt-1 text-quiet">{shows}</p>}
       </div>
