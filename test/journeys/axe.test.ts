@@ -60,7 +60,10 @@ describe.each(looks)("axe finds nothing, %s,", (_, options) => {
     await page.getByRole("link", { name: "Hall 3 refit" }).click();
     await page.getByRole("button", { name: "New scenario" }).first().click();
     await page.getByRole("heading", { level: 1, name: "Begin with a case like yours." }).waitFor();
-    await page.getByRole("img", { name: /^Motion over/ }).last().waitFor();
+    await page
+      .getByRole("img", { name: /^Motion over/ })
+      .last()
+      .waitFor();
     expect(await axeFindings(page)).toEqual([]);
   });
 
