@@ -7,6 +7,7 @@ import {
   type Decimal,
 } from "../../../../web/src/features/project-home/cases/build-cases.ts";
 import type { CaseField } from "../../../../web/src/features/project-home/cases/case-field.ts";
+import { casesCsv } from "../../../../web/src/features/project-home/cases/cases-csv.ts";
 import { readColumns, type ColumnChoice } from "../../../../web/src/features/project-home/cases/columns.ts";
 import { exampleTable } from "../../../../web/src/features/project-home/cases/example-table.ts";
 import { readTable } from "../../../../web/src/features/project-home/cases/read-table.ts";
@@ -101,6 +102,16 @@ describe("a table of cases", () => {
     [["μs", ...Array.from({ length: 502 }, () => "0.2")].join("\n"), /502 rows; at most 500/u],
   ])("is refused as a whole in words: %.12j", (text, sentence) => {
     expect(read(text).fault).toMatch(sentence);
+  });
+
+  it("goes into the file of results with its numbers in the units of its columns, the base's where a cell is empty", () => {
+    const { columns, cases } = read("Title;μs;Mass [g]\nA;0,2;\nB;;500");
+    const [head, ...rows] = casesCsv(columns, cases, []).split("\r\n");
+    expect(head).toContain("Title,Static friction,Mass [g],Outcome,Limits");
+    expect(rows.slice(0, 2).map((row) => row.split(",").slice(0, 3))).toEqual([
+      ["A", "0.2", "120000"],
+      ["B", "0.15", "500"],
+    ]);
   });
 
   it("offered to begin with is the base itself", () => {

@@ -12,6 +12,8 @@ export interface Case {
   readonly line: number;
   readonly title: string;
   readonly cells: readonly string[];
+  /** What each cell was read as, SI; null for a cell that gives no number. */
+  readonly values: readonly (number | null)[];
   /** Null where the row has a fault. */
   readonly scenario: Scenario | null;
   /** `column` null: of the row as a whole. */
@@ -34,21 +36,25 @@ function buildCase({ line, cells }: TableRow, index: number, { base, columns, wr
   const titleAt = columns.findIndex(({ kind }) => kind === "title");
   const title = cells[titleAt] || `${base.title || "Untitled"}, case ${index + 1}`;
   const faults: Case["faults"][number][] = [];
+  const values: (number | null)[] = cells.map(() => null);
   let scenario: Scenario = { ...base, title };
   columns.forEach((column, i) => {
     if (column.kind !== "field" || cells[i] === "") return;
     const value = valueOf(cells[i], column, decimal);
     if (typeof value === "string") faults.push({ column: i, message: value });
-    else scenario = put(scenario, column.field, value, write);
+    else {
+      values[i] = value;
+      scenario = put(scenario, column.field, value, write);
+    }
   });
   if (faults.length === 0) {
     const checked = checkScenario(scenario);
-    if (checked.scenario) return { line, title, cells, scenario: checked.scenario, faults };
+    if (checked.scenario) return { line, title, cells, values, scenario: checked.scenario, faults };
     faults.push(
       ...checked.faults.map((fault) => ({ column: columnOf(fault, columns), message: wordsOf(fault, columns) })),
     );
   }
-  return { line, title, cells, scenario: null, faults };
+  return { line, title, cells, values, scenario: null, faults };
 }
 
 /** Another number comes from elsewhere than the base's: its origin is not that of this one. */

@@ -1,9 +1,10 @@
+import { fromSi } from "../../../format/unit.ts";
 import type { Glance } from "../glances/glance-book.ts";
 import { resultsCsv } from "../results-csv.ts";
 import type { Case } from "./build-cases.ts";
 import type { Column } from "./columns.ts";
 
-/** The table with what came of each row: its own columns as they were typed, then outcome, limits and quantities. */
+/** The table with what came of each row: its own numbers in the units of its columns, then outcome, limits and quantities. */
 export function casesCsv(
   columns: readonly Column[],
   cases: readonly Case[],
@@ -15,15 +16,10 @@ export function casesCsv(
   );
   return resultsCsv(
     heads,
-    cases.map(({ title, cells }, i) => ({
+    cases.map(({ title, values }, i) => ({
       title,
-      inputs: given.map(({ index }) => asNumber(cells[index])),
+      inputs: given.map(({ column: { field, unit }, index }) => fromSi(values[index] ?? field.value, unit)),
       glance: glances[i],
     })),
   );
-}
-
-/** A plain number stays one, so that a sign at its head is no formula. */
-function asNumber(text: string): string | number {
-  return /^[+-]?(?:\d+\.?\d*|\.\d+)(?:e[+-]?\d+)?$/iu.test(text) ? Number(text) : text;
 }
