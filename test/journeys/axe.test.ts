@@ -58,7 +58,8 @@ describe.each(looks)("axe finds nothing, %s,", (_, options) => {
     const page = await journey.visit(options);
     await signIn(page, demoPeople.ines.email);
     await page.getByRole("link", { name: "Hall 3 refit" }).click();
-    await page.getByRole("button", { name: "New scenario" }).first().click();
+    await page.getByRole("heading", { level: 1, name: /^Six scenarios/ }).waitFor();
+    await page.keyboard.press("n");
     await page.getByRole("heading", { level: 1, name: "Begin with a case like yours." }).waitFor();
     await page
       .getByRole("img", { name: /^Motion over/ })
