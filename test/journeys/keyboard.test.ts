@@ -36,7 +36,7 @@ it("goes from signing in to a changed value, kept, without a mouse", async () =>
   await page.keyboard.type("2");
   await page.keyboard.press("Enter");
   // At 2 mm the spring pulls with 1.6 N, and friction holds up to 2 N.
-  await expectText(answerOf(page)).toBe("The body never moves.");
+  await expectText(answerOf(page)).toBe("The body never moves; it uses 80 % of its static friction.");
   expect(await focused(page)).toBe("Starting displacement: 2 mm");
   await page.keyboard.press("Enter");
   await page.keyboard.press("ArrowUp");

@@ -74,8 +74,8 @@ describe("the answer to runs of the solver", () => {
       force: [{ kind: "harmonic", amplitude: 320, hz: 12 }],
       span: { seconds: 1, untilRest: false },
     });
-    expect(sentenceOf(run)).toBe("The body never moves.");
-    expect(leadOf(run)).toBe("At most 53.3 % of what friction can hold is needed; it could hold 1.88 times as much.");
+    expect(sentenceOf(run)).toBe("The body never moves; it uses 53 % of its static friction.");
+    expect(leadOf(run)).toBe("Friction could hold 1.88 times as much.");
   });
 
   it("a body on a belt", () => {
@@ -131,6 +131,74 @@ describe("the answer to runs of the solver", () => {
       /^There is no answer: the run was cut off after four events, at 0\.1 s of 0\.5 s\.$/,
     );
     expect(leadOf(run)).toBe("The limit is not to be judged.");
+  });
+});
+
+describe("the answer to a move of the base", () => {
+  const move = (distance: number, start = 0) =>
+    ({ kind: "move", distance, speed: 1e-3, acceleration: 1, start }) as const;
+  // μs N/k = 5 N / 1·10⁶ N/m = 5 μm: as far as the base can go before the body follows.
+  const held = {
+    body: { inertia: 2, stiffness: 1e6 },
+    contact: coulombForces(5),
+    span: { seconds: 2, untilRest: true },
+  };
+
+  it("too short for the body to follow", () => {
+    const run = solved({ ...held, base: [move(3.1e-6)] });
+    expect(sentenceOf(run)).toBe("The body never moves; it uses 62 % of its static friction.");
+  });
+
+  // It starts on the edge of the rest band, slides from the first instant, and each ramp of speed lasts one natural period:
+  // d comes back to −μs N/k with ḋ = 0 at the end of both, and the body stops there, 0.2 + 0.02 + 0.2 s after the start.
+  it("that ends short by μs N/k", () => {
+    const [period, cruise, acceleration] = [0.2, 0.02, 0.5];
+    const inertia = 120;
+    const stiffness = inertia * ((2 * Math.PI) / period) ** 2;
+    const speed = acceleration * period;
+    const distance = speed * (period + cruise);
+    const run = solved({
+      body: { inertia, stiffness },
+      contact: coulombForces(3.1e-6 * stiffness),
+      base: [{ kind: "move", distance, speed, acceleration, start: 0 }],
+      initial: { displacement: -3.1e-6 },
+      span: { seconds: 2, untilRest: true },
+    });
+    expect(sentenceOf(run)).toBe("The body comes to rest 3.1 μm short of its target after 0.42 s.");
+  });
+
+  it("and back: what is lost is the way already held and μs N/k", () => {
+    const run = solved({ ...held, base: [move(7e-6 - 5e-6), move(-1e-4, 1)], settleBand: 1e-5 });
+    expect(leadOf(run)).toMatch(/ It loses 7 μm at the reversal\.$/);
+    expect(leadOf(run)).toMatch(/ It is within ±10 μm of its target (as soon as|[\d.]+ m?s after) the move ends\./);
+  });
+
+  it.each<[number, number, string]>([
+    [1e-4, -3.1e-6, "The body comes to rest 3.1 μm short of its target after 0.42 s."],
+    [1e-4, 3.1e-6, "The body comes to rest 3.1 μm past its target after 0.42 s."],
+    [-1e-4, 3.1e-6, "The body comes to rest 3.1 μm short of its target after 0.42 s."],
+    [-1e-4, -3.1e-6, "The body comes to rest 3.1 μm past its target after 0.42 s."],
+    [1e-4, 1e-17, "The body comes to rest at its target after 0.42 s."],
+  ])("of %d m that ends at d = %d m", (distance, settleOffset, text) => {
+    const { scenario } = solved({ ...held, base: [move(-distance), move(distance, 0.2)] }, 0);
+    const quantities = { restTime: 0.42, restOffset: settleOffset, settleOffset, lostMotion: 1.2e-5 };
+    const run = madeUp(scenario, { outcome: "came-to-rest", quantities });
+    expect(sentenceOf(run)).toBe(text);
+    expect(leadOf(run)).toBe("It loses 12 μm at the reversal.");
+  });
+});
+
+describe("a body that never moves", () => {
+  it.each<[number | null, string]>([
+    [0.62, "The body never moves; it uses 62 % of its static friction."],
+    [0.99996, "The body never moves; it uses 99.996 % of its static friction."],
+    [1, "The body never moves; it uses 100 % of its static friction."],
+    [0, "The body never moves; it uses none of its static friction."],
+    [null, "The body never moves."],
+  ])("with %d of its hold in use", (holdUse, text) => {
+    const still = buildScenario({ body: { inertia: 1, stiffness: 1 }, span: { seconds: 1 } });
+    const run = madeUp(still, { outcome: "never-moved", quantities: { holdUse } });
+    expect(sentenceOf(run)).toBe(text);
   });
 });
 

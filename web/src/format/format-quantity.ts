@@ -42,6 +42,12 @@ export function sayShare(value: number, digits = 3): string {
   return `${formatNumber(value * 100, digits)}\u00a0%`;
 }
 
+/** How much of a hold is used, to two digits; more where rounding would say that all of it is: "62 %", "99.96 %". */
+export function sayUse(value: number): string {
+  const digits = [2, 3, 4, 5, 6].find((each) => Number((100 * value).toPrecision(each)) < 100);
+  return sayShare(value, value < 1 ? (digits ?? 12) : 3);
+}
+
 function reading(value: number, measure: Measure, unit: Unit, text: string): Reading {
   return { text, unit: unit.label, full: joined({ text: formatFully(value), unit: siOf(measure) }) };
 }

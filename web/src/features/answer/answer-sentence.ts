@@ -1,8 +1,9 @@
 import type { Outcome, Result, Scenario } from "@restband/solver";
 import { formatNumber } from "../../format/format-number.ts";
-import { say } from "../../format/format-quantity.ts";
+import { say, sayUse } from "../../format/format-quantity.ts";
 import { nounOf } from "../../format/noun.ts";
 import { sayMany } from "../../format/words.ts";
+import { lastTravel } from "./last-travel.ts";
 import { readingOf, type ResultReading } from "./result-reading.ts";
 
 /** The answer in one sentence, its verdict apart so that it can be underlined: `before` + `verdict` + `after`. */
@@ -31,12 +32,12 @@ type Parts = Omit<AnswerSentence, "outcome">;
 const theBody = ({ scenario }: ResultReading): string => `The ${nounOf(scenario)} `;
 
 const sentences: Record<Outcome, (reading: ResultReading) => Parts> = {
-  "never-moved": (reading) => ({ before: theBody(reading), verdict: "never moves", after: "." }),
-  "came-to-rest": (reading) => ({
-    before: theBody(reading),
-    verdict: "comes to rest",
-    after: `${afterTime(reading)}${offCentre(reading)}.`,
-  }),
+  "never-moved": (reading) => ({ before: theBody(reading), verdict: "never moves", after: `${useOfHold(reading)}.` }),
+  "came-to-rest": (reading) => {
+    const place = offTarget(reading);
+    const after = place === null ? afterTime(reading) + offCentre(reading) : place + afterTime(reading);
+    return { before: theBody(reading), verdict: "comes to rest", after: `${after}.` };
+  },
   "too-short": (reading) => ({
     before: "The run is ",
     verdict: "too short to tell",
@@ -56,6 +57,25 @@ const sentences: Record<Outcome, (reading: ResultReading) => Parts> = {
   }),
   "smooth-sliding": smooth,
 };
+
+function useOfHold({ value }: ResultReading): string {
+  const use = value("holdUse");
+  if (use === null) return "";
+  return `; it uses ${use > 0 ? sayUse(use) : "none"} of its static friction`;
+}
+
+/** Where a move of the base has left it, against where the base has gone; null without a move. */
+function offTarget({ scenario, value, measure }: ResultReading): string | null {
+  const offset = value("settleOffset");
+  const travel = offset === null ? null : lastTravel(scenario);
+  if (offset === null || travel === null || travel === 0) return null;
+  if (Math.abs(offset) <= ROUNDING * Math.abs(travel)) return " at its target";
+  const side = offset * travel < 0 ? "short of" : "past";
+  return ` ${say(Math.abs(offset), measure("displacement"))} ${side} its target`;
+}
+
+/** Share of a move below which an offset is the noise of its sums. */
+const ROUNDING = 1e-12;
 
 function afterTime({ value, measure }: ResultReading): string {
   const time = value("restTime");

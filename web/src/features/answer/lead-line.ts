@@ -9,8 +9,8 @@ import { readingOf, type ResultReading } from "./result-reading.ts";
 /** The line under the answer: what the motion is like, then what became of the limits; over the ranges once they are run. */
 export function leadLine(scenario: Scenario, result: Result, overRanges: string | null = null): string {
   const reading = readingOf(scenario, result);
-  const motion = result.outcome === null ? "" : motionLines[result.outcome](reading);
-  return [motion, overRanges ?? limitsLine(scenario, result.limits)].filter(Boolean).join(" ");
+  const motion = result.outcome === null ? [] : [motionLines[result.outcome](reading), ...moveLines(reading)];
+  return [...motion, overRanges ?? limitsLine(scenario, result.limits)].filter(Boolean).join(" ");
 }
 
 const motionLines: Record<Outcome, (reading: ResultReading) => string> = {
@@ -31,9 +31,19 @@ const motionLines: Record<Outcome, (reading: ResultReading) => string> = {
 
 function holding({ value }: ResultReading): string {
   const use = value("holdUse");
-  if (use === null) return "";
-  const most = `At most ${sayShare(use)} of what friction can hold is needed`;
-  return use > 0 ? `${most}; it could hold ${formatNumber(1 / use)} times as much.` : `${most}.`;
+  return use === null || use === 0 ? "" : `Friction could hold ${formatNumber(1 / use)} times as much.`;
+}
+
+/** What became of a move of the base: how soon it settles, and what is lost where it turns back. */
+function moveLines({ scenario: { settleBand }, value, measure }: ResultReading): string[] {
+  const [settled, lost] = [value("settleTime"), value("lostMotion")];
+  const within = `within ±${say(settleBand ?? 0, measure("displacement"))} of its target`;
+  return [
+    settled === null
+      ? ""
+      : `It is ${within} ${settled === 0 ? "as soon as the move ends" : `${say(settled, measure("time"))} after the move ends`}.`,
+    lost === null ? "" : `It loses ${say(lost, measure("displacement"))} at the reversal.`,
+  ];
 }
 
 function resting({ scenario, value, measure }: ResultReading): string {
