@@ -46,6 +46,7 @@ export const cases = {
     initial: { velocity: 1e-3 },
     span,
   },
+  gentle: { body, incline: 8, contact: heavy, initial: { displacement: 0.004 }, span },
   rising: { body, incline: 30, contact: heavy, initial: { displacement: 0.004 }, span },
   falling: {
     body,

@@ -46,7 +46,7 @@ const foot = 6;
 const top = 70;
 const springAt = 54;
 const damperAt = 28;
-const steepFrom = 12;
+const steepFrom = 4;
 const tallest = 230;
 
 /** The body on its guide, with spring, damper, contact, base and forces; u grows with x, to the right and up the incline. */
@@ -142,13 +142,21 @@ function link({ scenario }: SketchState, { place, right, base, incline, isSteep 
     return parts;
   }
   // on a steep guide words stand on the free side of the spring, one above the other
-  const [x, y] = place(middle, springAt + (scenario.contact.normal.faces > 1 ? 36 : 16));
+  const [x, y] = place(middle, springAt + (scenario.contact.normal.faces > 1 ? 36 : isNearlyLevel(incline) ? 21 : 16));
   const words = [spring, damper].filter((each) => each !== "");
-  return [...parts, ...words.map((text, i) => label([x, y + (i - words.length + 1) * 17], text, outwards(incline)))];
+  return [
+    ...parts,
+    ...words.map((text, i) =>
+      label([x, y + (i - words.length + 1) * 17], text, isNearlyLevel(incline) ? "middle" : outwards(incline)),
+    ),
+  ];
 }
 
 /** Labels on the free side of a rising guide run away from it. */
 const outwards = (incline: number): Label["anchor"] => (incline > 0 ? "end" : "start");
+
+/** On such a guide labels stand much as on a level one. */
+const isNearlyLevel = (incline: number): boolean => Math.abs(incline) < 15;
 
 const fallsGently = (incline: number): boolean => incline < 0 && incline > -45;
 
@@ -159,13 +167,13 @@ function baseMotion({ scenario }: SketchState, { place, base, incline, isSteep }
   const isOneWay =
     scenario.base.length === 1 && (term.kind === "ramp" || term.kind === "move" || term.kind === "staircase");
   const isBack = isOneWay && travelOf(term) < 0;
-  const height = top + 26;
+  const isFalling = isSteep && fallsGently(incline);
+  const height = top + (isFalling ? 50 : 26);
   const line = isBack
     ? [arrow(place(base + 9, height), place(base - 43, height))]
     : [arrow(place(base - 43, height), place(base + 9, height))];
   const both = isOneWay ? [] : [arrow(place(base + 9, height), place(base - 43, height))];
-  const isFalling = isSteep && fallsGently(incline);
-  const at = isFalling ? place(base - 50, height + 20) : place(base + 9, height + 15);
+  const at = isFalling ? place(base - 50, height) : place(base + 9, height + 15);
   return [...line, ...both, label(at, words, isSteep && !isFalling ? outwards(incline) : "end")];
 }
 
@@ -192,14 +200,16 @@ function feet({ scenario }: SketchState, { place, left, right }: Measures): Shap
   return [pad(first, 0), pad(second, 0), ...upper];
 }
 
-function pressing({ scenario }: SketchState, { place, left, right, incline, isSteep }: Measures): Shape[] {
+function pressing({ scenario }: SketchState, { place, left, right, incline }: Measures): Shape[] {
   const words = pressWords(scenario);
   if (words === "" || !rubs(scenario)) return [];
   const middle = (left + right) / 2;
   const from = top + (scenario.contact.normal.faces > 1 ? 16 : 2);
   const [x, y] = place(middle, from + 38);
   const over = 36 * Math.sin((incline * Math.PI) / 180);
-  const text = isSteep ? label([x + over, y - 12], words, outwards(incline)) : label([x + 9, y + 8], words, "start");
+  const text = !isNearlyLevel(incline)
+    ? label([x + over, y - 12], words, outwards(incline))
+    : label([x + 9, y + 8], words, "start");
   return [arrow(place(middle, from + 38), place(middle, from)), text];
 }
 
@@ -221,7 +231,7 @@ function inclineMark({ place, length, incline, left, right }: Measures): Shape[]
   if (incline === 0) return [];
   const isRising = incline > 0;
   const [x, y] = place(isRising ? 0 : length, -12);
-  const reach = (isRising ? 1 : -1) * (Math.abs(incline) > 60 ? 30 : 64);
+  const reach = isRising ? 30 : -30;
   const [cx, cy] = place((left + right) / 2, 22);
   return [
     {
