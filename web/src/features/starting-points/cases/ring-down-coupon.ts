@@ -18,8 +18,8 @@ export const ringDownCoupon = startingPoint({
       "body.inertia": practice("end of a steel strip with an accelerometer"),
       "body.stiffness": practice("strip of 2 N/mm at its end"),
       "solid.lossFactor": {
-        kind: "catalogue",
-        source: "lecture 9 of NPTEL course 112104040: order 0.01 for cast iron; sources differ tenfold",
+        kind: "assumed",
+        source: "common practice: order 0.01 for cast iron; sources differ tenfold",
         low: 0.002,
         high: 0.02,
       },
