@@ -5,7 +5,7 @@ import { seedDemo } from "../../api/src/demo/seed-demo.ts";
 import { axeFindings } from "../support/axe.ts";
 import { Journey, phone } from "../support/journey.ts";
 import { password } from "../support/people.ts";
-import { answerOf, editorOf, expectText, signIn, valueOf } from "../support/steps.ts";
+import { answerOf, editorOf, expectText, openScenario, signIn, valueOf } from "../support/steps.ts";
 
 let journey: Journey;
 beforeAll(async () => {
@@ -68,10 +68,20 @@ describe.each(looks)("axe finds nothing, %s,", (_, options) => {
     expect(await axeFindings(page)).toEqual([]);
   });
 
+  it("on the table of cases", async () => {
+    const page = await journey.visit(options);
+    await signIn(page, demoPeople.ines.email);
+    await page.getByRole("link", { name: "Hall 3 refit" }).click();
+    await page.getByRole("heading", { level: 1, name: /^Six scenarios/ }).waitFor();
+    await page.goto(`${page.url()}/cases`);
+    await page.getByRole("heading", { level: 1, name: "A row per case, a column per number." }).waitFor();
+    expect(await axeFindings(page)).toEqual([]);
+  });
+
   it("on a scenario, with an editor open, and with every field open", async () => {
     const page = await journey.visit(options);
     await signIn(page, demoPeople.ines.email);
-    await openScenario(page, "Z carriage, creep feed");
+    await seeScenario(page, "Z carriage, creep feed");
     expect(await axeFindings(page)).toEqual([]);
     await valueOf(page, "Damping").click();
     await editorOf(page, "Damping").getByRole("slider").waitFor();
@@ -90,7 +100,7 @@ it("axe finds nothing on other answers", async () => {
   const page = await journey.visit();
   await signIn(page, demoPeople.ines.email);
   for (const title of ["Turret, two-pad brake", "Tail clamp, shaken by the mill"]) {
-    await openScenario(page, title);
+    await seeScenario(page, title);
     expect(await axeFindings(page)).toEqual([]);
     await page.getByRole("link", { name: "Restband" }).click();
   }
@@ -106,9 +116,9 @@ async function inDialog(page: Page, title: string, contents: string): Promise<vo
 }
 
 /** From the projects to the drawn evidence of a scenario. */
-async function openScenario(page: Page, title: string): Promise<void> {
+async function seeScenario(page: Page, title: string): Promise<void> {
   await page.getByRole("link", { name: "Hall 3 refit" }).click();
-  await page.getByRole("link", { name: title }).click();
+  await openScenario(page, title);
   await expectText(answerOf(page)).toMatch(/^The (carriage|rotor|body) /);
   await page.locator(".js-plotly-plot .cartesianlayer").waitFor();
 }

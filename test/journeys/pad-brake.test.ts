@@ -1,7 +1,17 @@
 import { afterAll, afterEach, beforeAll, expect, it } from "vitest";
 import { Journey } from "../support/journey.ts";
 import { createProject, emailOf, signUp } from "../support/people.ts";
-import { answerOf, change, choose, eventRows, expectText, signIn, valueOf } from "../support/steps.ts";
+import {
+  answerOf,
+  beginScenario,
+  change,
+  choose,
+  expectEvents,
+  expectText,
+  near,
+  signIn,
+  valueOf,
+} from "../support/steps.ts";
 
 let journey: Journey;
 beforeAll(async () => {
@@ -20,8 +30,7 @@ it("brakes a rotor: at rest after ω/α, ω²/2α further on", async () => {
   const page = await journey.visit();
   await signIn(page, emailOf("Ada"));
   await page.getByRole("link", { name: "Brakes" }).click();
-  await page.getByRole("button", { name: "New scenario" }).first().click();
-  await page.getByRole("button", { name: "Begin with: Plain numbers" }).click();
+  await beginScenario(page);
   await choose(page, "Motion", "rotor");
   await choose(page, "Purpose", "braking");
   await page.getByRole("button", { name: "all fields of Drive" }).click();
@@ -46,9 +55,11 @@ it("brakes a rotor: at rest after ω/α, ω²/2α further on", async () => {
   await expectText(page.getByRole("main")).toContain(
     `That is ${angle.toFixed(1)} rad, ${(angle / (2 * Math.PI)).toFixed(0)} turns from where it began.`,
   );
-  const stop = (await eventRows(page)).find(({ event }) => event === "stops");
-  expect(stop?.figures[0]).toBeCloseTo(time, 6);
-  expect(stop?.figures[1]).toBeCloseTo(angle, 4);
+  await expectEvents(page, 3).toMatchObject([
+    { event: "starts" },
+    { event: "breaks away", time: 0 },
+    { event: "stops", time: near(time, 6), position: near(angle, 4) },
+  ]);
   await expectText(page.getByRole("main")).toContain("must never be the only thing that holds");
   await expectText(valueOf(page, "Starting velocity")).toBe("720");
 });

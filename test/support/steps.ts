@@ -43,6 +43,19 @@ export async function signIn(page: Page, email: string): Promise<void> {
   await page.getByRole("heading", { level: 1, name: /project/ }).waitFor();
 }
 
+/** From a project to a new scenario that starts from plain numbers. */
+export async function beginScenario(page: Page): Promise<void> {
+  await page.getByRole("main").getByRole("button", { name: "New scenario" }).click();
+  const choices = page.getByRole("list", { name: "Starting points" }).getByRole("listitem");
+  await choices.filter({ hasText: "Plain numbers" }).getByRole("button").click();
+  await answerOf(page).waitFor();
+}
+
+/** From a project to one of its scenarios, by its row. */
+export async function openScenario(page: Page, title: string): Promise<void> {
+  await page.getByRole("heading", { name: title }).getByRole("link").click();
+}
+
 /** Opens a value of the sentence and types another. */
 export async function change(page: Page, label: string, text: string): Promise<void> {
   await valueOf(page, label).click();
@@ -62,21 +75,29 @@ export async function choose(page: Page, label: string, word: string): Promise<v
   await page.getByRole("combobox", { name: label, exact: true }).selectOption({ label: word });
 }
 
-/** One row of the event table: what happened, and its figures in the table's units. */
+/** One row of the event table: what happened, when (s) and where (in the table's unit). */
 export interface EventRow {
   readonly event: string;
-  readonly figures: readonly number[];
+  readonly time: number;
+  readonly position: number;
 }
 
-export async function eventRows(page: Page): Promise<EventRow[]> {
+/** Expects the first rows of the event table. */
+export const expectEvents = (page: Page, count: number) =>
+  expect.poll(async () => (await eventRows(page)).slice(0, count), { timeout: 15_000 });
+
+/** A figure as the table prints it, to so many decimals. */
+export const near = (figure: number, decimals: number): unknown => expect.closeTo(figure, decimals);
+
+async function eventRows(page: Page): Promise<EventRow[]> {
   const rows = await page.locator("[aria-label=Events] tbody tr").evaluateAll((elements) =>
     elements.map((row) => ({
       event: row.querySelector("th button")?.textContent ?? "",
       cells: [...row.querySelectorAll("td")].map((cell) => cell.textContent ?? ""),
     })),
   );
-  return rows.map(({ event, cells }) => ({ event, figures: cells.map(figureOf) }));
+  return rows.map(({ event, cells }) => ({ event, time: figureOf(cells[0]), position: figureOf(cells[1]) }));
 }
 
 /** A figure as it is printed: with narrow gaps and a true minus. */
-export const figureOf = (text: string): number => Number(text.replace(/\s/g, "").replace("\u2212", "-"));
+const figureOf = (text: string): number => Number(text.replace(/\s/g, "").replace("\u2212", "-"));
