@@ -1,4 +1,5 @@
-import { describe, expect, it } from "vitest";
+import { beforeAll, describe, expect, it, vi } from "vitest";
+import { otherUnits } from "../../../web/src/format/other-units.ts";
 import { parseTyped } from "../../../web/src/format/parse-typed.ts";
 import { unitByLabel, unitsOf } from "../../../web/src/format/units.ts";
 import type { Measure } from "../../../web/src/format/unit.ts";
@@ -10,6 +11,8 @@ const valueOf = (text: string, measure: Measure = speed, unit = "mm/s") => {
   const reading = read(text, measure, unit);
   return reading.kind === "value" ? reading.value : reading.message;
 };
+
+beforeAll(() => vi.waitFor(() => expect(otherUnits()).not.toBeNull()));
 
 describe("what a person types becomes SI", () => {
   it.each([

@@ -1,6 +1,9 @@
-import Qty from "js-quantities";
+import { loadOtherUnits, otherUnits } from "./other-units.ts";
 import type { Measure, Unit } from "./unit.ts";
 import { unitsOf } from "./units.ts";
+
+// Whoever reads units may soon meet one that is not ours.
+void loadOtherUnits();
 
 /** A typed unit in one spelling: "m/s^2", "N·s/m" and "um" as "m/s²", "N·s/m" and "μm" are written on the screen. */
 function spelled(text: string): string {
@@ -16,7 +19,8 @@ function spelled(text: string): string {
 
 /**
  * The unit a person typed behind a number: one of the dimension's own, or any other that measures the same
- * ("ft", "kN/m"). Null where it is no unit, or measures something else.
+ * ("ft", "kN/m"). Null where it is no unit, or measures something else; also where the library of other units is not there
+ * yet.
  */
 export function parseUnit(typed: string, measure: Measure): Unit | null {
   const wanted = spelled(typed);
@@ -32,9 +36,10 @@ const namesOf = (unit: Unit): string[] => [unit.label, ...(unit.aliases ?? [])];
 /** Any other unit, by the library's tables; the factor is theirs. */
 function foreignUnit(wanted: string, measure: Measure): Unit | null {
   const reference = unitsOf(measure).find((unit) => unit.factor === 1);
-  if (!reference || reference.label === "") return null;
+  const convert = otherUnits();
+  if (!convert || !reference || reference.label === "") return null;
   try {
-    const factor = Qty(1, librarySpelling(wanted)).to(librarySpelling(reference.label)).scalar;
+    const factor = convert(librarySpelling(wanted), librarySpelling(reference.label));
     return Number.isFinite(factor) && factor > 0 ? { label: wanted, factor } : null;
   } catch {
     return null; // the library throws for unknown and for incompatible units alike

@@ -1,6 +1,6 @@
 import type { Project, StoredScenario } from "@restband/api/contract";
 import { useSuspenseQueries } from "@tanstack/react-query";
-import { lazy, Suspense, useCallback, useMemo, useState } from "react";
+import { Suspense, useCallback, useMemo, useState } from "react";
 import { useParams } from "react-router-dom";
 import { projectQuery } from "../api/projects.ts";
 import { scenarioQuery } from "../api/scenarios.ts";
@@ -12,9 +12,7 @@ import { useRun, type Computed } from "../compute/use-run.ts";
 import { WorkHeader } from "../features/account/work-header.tsx";
 import { Answer } from "../features/answer/answer.tsx";
 import { Cautions } from "../features/cautions/cautions.tsx";
-import { Checks } from "../features/checks/checks.tsx";
 import { runViewOf, type RunView } from "../features/evidence/run-view.ts";
-import { ReckoningLinks } from "../features/reckoning/reckoning-links.tsx";
 import { takeValues } from "../features/statement/changes.ts";
 import { savedWords } from "../features/statement/saving/saved-words.ts";
 import { useDraft } from "../features/statement/saving/use-draft.ts";
@@ -25,14 +23,18 @@ import { UndoButtons } from "../features/statement/undo-buttons.tsx";
 import { mayEdit } from "../features/project-home/roles.ts";
 import { paths } from "../paths.ts";
 import { sharedValue } from "../shared-value.ts";
-import { CursorSketch, useCursor, type Cursor } from "./cursor-sketch.tsx";
+import { lazyPart } from "../components/lazy-part.ts";
+import { useCursor, type Cursor } from "./cursor.ts";
 
 // None of these is needed for the first answer: they come after it.
-const Evidence = lazy(async () => ({ default: (await import("../features/evidence/evidence.tsx")).Evidence }));
-const EventTable = lazy(async () => ({ default: (await import("../features/evidence/event-table.tsx")).EventTable }));
-const ConflictDialog = lazy(async () => ({
-  default: (await import("../features/statement/saving/conflict-dialog.tsx")).ConflictDialog,
-}));
+const CursorSketch = lazyPart(async () => (await import("./cursor-sketch.tsx")).CursorSketch);
+const Evidence = lazyPart(async () => (await import("../features/evidence/evidence.tsx")).Evidence);
+const Checks = lazyPart(async () => (await import("../features/checks/checks.tsx")).Checks);
+const EventTable = lazyPart(async () => (await import("../features/evidence/event-table.tsx")).EventTable);
+const ReckoningLinks = lazyPart(async () => (await import("../features/reckoning/reckoning-links.tsx")).ReckoningLinks);
+const ConflictDialog = lazyPart(
+  async () => (await import("../features/statement/saving/conflict-dialog.tsx")).ConflictDialog,
+);
 
 /** One scenario as a worked page: answer, statement, evidence, checks, cautions. */
 export function ScenarioPage() {
@@ -63,12 +65,14 @@ function OpenScenario({ project, stored }: { project: Project; stored: StoredSce
   const title = inForce.title || "Untitled";
   const aside = useCallback(
     (path: string) => (
-      <ReckoningLinks
-        path={path}
-        scenario={inForce}
-        keptUnder={stored.id}
-        onTake={(taken) => dispatch(takeValues(taken))}
-      />
+      <Suspense>
+        <ReckoningLinks
+          path={path}
+          scenario={inForce}
+          keptUnder={stored.id}
+          onTake={(taken) => dispatch(takeValues(taken))}
+        />
+      </Suspense>
     ),
     [inForce, stored.id, dispatch],
   );
@@ -88,7 +92,13 @@ function OpenScenario({ project, stored }: { project: Project; stored: StoredSce
             before={before}
             ranges={ranges}
             say={say}
-            sketch={view && <CursorSketch view={view} cursor={cursor} />}
+            sketch={
+              view && (
+                <Suspense fallback={<div className="min-h-[280px]" />}>
+                  <CursorSketch view={view} cursor={cursor} />
+                </Suspense>
+              )
+            }
           />
         </Section>
         <Section name="Statement" help="Tab moves from value to value, Enter opens one, Esc puts it back.">
@@ -157,7 +167,9 @@ function RunSections({ computed, view, cursor, isStale }: RunSectionsProps) {
         </Suspense>
       </Section>
       <Section id="checks" name="Checks" help="The run checks itself each time it is computed.">
-        <Checks scenario={view.scenario} result={view.result} />
+        <Suspense fallback={<div className="min-h-[420px]" />}>
+          <Checks scenario={view.scenario} result={view.result} />
+        </Suspense>
         <h3 className="mt-8 mb-2 text-15 font-semibold">Events</h3>
         <Suspense fallback={<div className="min-h-[380px]" />}>
           <EventTable view={view} t={t} onMove={cursor.set} />

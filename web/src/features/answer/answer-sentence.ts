@@ -32,7 +32,7 @@ type Parts = Omit<AnswerSentence, "outcome">;
 const theBody = ({ scenario }: ResultReading): string => `The ${nounOf(scenario)} `;
 
 const sentences: Record<Outcome, (reading: ResultReading) => Parts> = {
-  "never-moved": (reading) => ({ before: theBody(reading), verdict: "never moves", after: `${useOfHold(reading)}.` }),
+  "never-moved": (reading) => ({ before: theBody(reading), verdict: "never moves", after: `${holdInUse(reading)}.` }),
   "came-to-rest": (reading) => {
     const place = offTarget(reading);
     const after = place === null ? afterTime(reading) + offCentre(reading) : place + afterTime(reading);
@@ -58,7 +58,7 @@ const sentences: Record<Outcome, (reading: ResultReading) => Parts> = {
   "smooth-sliding": smooth,
 };
 
-function useOfHold({ value }: ResultReading): string {
+function holdInUse({ value }: ResultReading): string {
   const use = value("holdUse");
   if (use === null) return "";
   return `; it uses ${use > 0 ? sayUse(use) : "none"} of its static friction`;

@@ -1,4 +1,5 @@
 import type { Fault, Refusal } from "@restband/solver";
+import { useOtherUnits } from "../../format/other-units.ts";
 import type { Dispatch, Draft } from "./draft/draft.ts";
 import { DraftContext } from "./draft/draft-context.ts";
 import { groupOf, groups } from "./groups.ts";
@@ -16,6 +17,8 @@ interface StatementProps {
 
 /** What is asked, in five sentences whose values are edited in place. */
 export function Statement({ draft, dispatch, refusal, aside }: StatementProps) {
+  // Values typed in a unit beyond our own table are shown in it once that can be read.
+  useOtherUnits();
   const context = useMemo(() => ({ draft, dispatch, aside }), [draft, dispatch, aside]);
   const remarks: readonly Fault[] = refusal?.faults.length ? refusal.faults : refusal ? [refusal] : [];
   return (

@@ -1,0 +1,11 @@
+import { firstCursor, type RunView } from "../features/evidence/run-view.ts";
+import { useSharedValue, type SharedValue } from "../shared-value.ts";
+
+/** Where somebody has put the time cursor, s; null until then. Kept outside the page's state: only what draws it follows. */
+export type Cursor = SharedValue<number | null>;
+
+/** The time cursor of a run: where it was put, or where it stands by itself, and never beyond the end. */
+export function useCursor(cursor: Cursor, view: RunView | null): number {
+  const chosen = useSharedValue(cursor);
+  return view === null ? 0 : Math.min(chosen ?? firstCursor(view), view.end);
+}
