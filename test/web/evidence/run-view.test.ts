@@ -173,8 +173,10 @@ describe("the cursor", () => {
 
 describe("words and tables", () => {
   it("tell the figure to those who cannot see it", () => {
-    expect(figureWords(feed).replaceAll("\u00a0", " ")).toMatch(
-      /^Over 0\.5 s: displacement of the carriage from 0 mm to 0\.9\d+ mm, with the rest band of ±74\.1 μm about its equilibrium; velocity from .* to 5\.\d+ mm\/s; friction force from −297 N to /,
+    const whole = { from: 0, to: feed.end };
+    const frame = frameOf(1160, whole, scalesOf(feed, whole));
+    expect(figureWords(feed, frame).replaceAll("\u00a0", " ")).toMatch(
+      /^Over 0\.5 s: displacement of the carriage from 0 mm to 0\.9\d+ mm, with the rest band of ±74\.1 μm about its equilibrium; velocity from .* to 5\.\d+ mm\/s; friction force from −297 N to .*\. The carriage sticks and slips\.$/,
     );
     expect(stripWords(feed.intervals)).toMatch(/^Motion: stuck \w+ times, for \d\d % of the time shown\.$/);
     expect(stripWords([{ from: 0, to: 1, phase: 0 }])).toBe("Motion: it is stuck throughout.");

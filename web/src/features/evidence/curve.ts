@@ -2,7 +2,7 @@ import type { Samples } from "@restband/solver";
 import { ahead } from "../../compute/instant.ts";
 import { fromSi, type Unit } from "../../format/unit.ts";
 
-/** A curve as two lines, sliding and stuck, each broken (NaN) where the other goes on. Times in s, values in `unit`. */
+/** A curve as two lines, sliding and stuck, each broken (NaN) where the other goes on. Values in `unit`; along in s, or in the unit of what it is drawn over. */
 export interface Curve {
   readonly slip: Line;
   readonly stick: Line;
@@ -20,10 +20,19 @@ const jumps: Record<Channel, boolean> = { x: false, v: false, a: true, f: true }
 
 /**
  * The samples at `indices` as a curve. `isDense`: too many events to tell stretches apart; everything is then one line.
+ * `across`: what it is drawn over instead of time, a value to each sample.
  */
-export function curveOf(samples: Samples, channel: Channel, indices: Int32Array, unit: Unit, isDense: boolean): Curve {
+export function curveOf(
+  samples: Samples,
+  channel: Channel,
+  indices: Int32Array,
+  unit: Unit,
+  isDense: boolean,
+  across?: { values: Float64Array; unit: Unit },
+): Curve {
   const pens = { slip: new Pen(unit), stick: new Pen(unit) };
-  const { t, phase } = samples;
+  const { phase } = samples;
+  const along = (i: number): number => (across ? fromSi(across.values[i], across.unit) : samples.t[i]);
   const values = samples[channel];
   const penAt = (i: number): Pen => (isDense || phase[i] !== 0 ? pens.slip : pens.stick);
   let pen: Pen | null = null;
@@ -31,8 +40,8 @@ export function curveOf(samples: Samples, channel: Channel, indices: Int32Array,
     const i = indices[k];
     const next = penAt(i);
     const isEvent = k > 0 && i > 0 && phase[i - 1] !== phase[i] && !isDense;
-    if (isEvent && pen) meet(pen, next, pens.slip, t[i], leftOf(samples, channel, i), values[i]);
-    else next.add(t[i], values[i]);
+    if (isEvent && pen) meet(pen, next, pens.slip, along(i), leftOf(samples, channel, i), values[i]);
+    else next.add(along(i), values[i]);
     pen = next;
   }
   return { slip: pens.slip.line(), stick: pens.stick.line() };
@@ -45,13 +54,13 @@ function leftOf(samples: Samples, channel: Channel, i: number): number {
 }
 
 /** One stretch ends and the next begins; the jump between them, if any, is drawn as sliding. */
-function meet(before: Pen, after: Pen, sliding: Pen, t: number, left: number, right: number): void {
-  before.add(t, left);
-  if (before === sliding) before.add(t, right);
+function meet(before: Pen, after: Pen, sliding: Pen, along: number, left: number, right: number): void {
+  before.add(along, left);
+  if (before === sliding) before.add(along, right);
   if (before === after) return;
   before.lift();
-  if (after === sliding) after.add(t, left);
-  after.add(t, right);
+  if (after === sliding) after.add(along, left);
+  after.add(along, right);
 }
 
 /** Collects the points of a line. */
@@ -64,8 +73,8 @@ class Pen {
     this.unit = unit;
   }
 
-  add(t: number, value: number): void {
-    this.x.push(t);
+  add(along: number, value: number): void {
+    this.x.push(along);
     this.y.push(fromSi(value, this.unit));
   }
 

@@ -10,7 +10,7 @@ import { driveSpeed } from "./scales.ts";
 import { thinned } from "./thin.ts";
 
 const MOST_POINTS = 4000;
-const channels = { displacement: "x", velocity: "v", friction: "f" } as const;
+const channels = { displacement: "x", velocity: "v", acceleration: "a", friction: "f" } as const;
 
 /** Displacement with its rest band, velocity and friction force over one time axis, as plotly wants it. */
 export function evidenceFigure(view: RunView, frame: Frame, theme: PlotTheme): { data: Data[]; layout: FigureLayout } {
@@ -18,16 +18,24 @@ export function evidenceFigure(view: RunView, frame: Frame, theme: PlotTheme): {
     ...(panel.key === "displacement" ? bandTraces(view, frame, panel, theme) : []),
     ...(panel.key === "velocity" ? speedTraces(view, frame, panel, theme) : []),
     ...(panel.key === "friction" ? holdTraces(view, frame, panel, theme) : []),
-    ...curveTraces(view, frame, panel, theme),
+    ...(panel.key === "drive"
+      ? driveTraces(view, frame, panel, theme)
+      : curveTraces(view, frame, panel, panel.key, theme)),
   ]);
   return { data, layout: layoutOf(frame, theme) };
 }
 
 /** Sliding thin, stuck thick: told apart by width as well as by colour. */
-function curveTraces(view: RunView, frame: Frame, panel: PanelFrame, theme: PlotTheme): Data[] {
+function curveTraces(
+  view: RunView,
+  frame: Frame,
+  panel: PanelFrame,
+  key: keyof typeof channels,
+  theme: PlotTheme,
+): Data[] {
   const samples = densified(view.samples, frame);
   const events = samples === view.samples ? view.eventIndices : phaseChanges(samples);
-  const channel = channels[panel.key];
+  const channel = channels[key];
   const seen = events.filter((i) => samples.t[i] >= frame.from && samples.t[i] <= frame.to);
   const isDense = seen.length > MOST_POINTS / 4;
   // Told apart, each event costs points of its own; one dense line has them all for itself.
@@ -35,6 +43,16 @@ function curveTraces(view: RunView, frame: Frame, panel: PanelFrame, theme: Plot
   const indices = thinned(samples.t, samples[channel], frame, count, keep);
   const { slip, stick } = curveOf(samples, channel, indices, panel.unit, isDense);
   return [line(panel, slip, { color: theme.slip, width: 2 }), line(panel, stick, { color: theme.stick, width: 3 })];
+}
+
+/** The force that drives the body, one line whatever the body does. */
+function driveTraces({ drive, samples }: RunView, frame: Frame, panel: PanelFrame, theme: PlotTheme): Data[] {
+  const points = drive?.between(densified(samples, frame), frame) ?? [];
+  const times = Float64Array.from(points, ({ t }) => t);
+  const forces = Float64Array.from(points, ({ force }) => fromSi(force, panel.unit));
+  const kept = thinned(times, forces, frame, MOST_POINTS);
+  const drawn = { x: Float64Array.from(kept, (i) => times[i]), y: Float64Array.from(kept, (i) => forces[i]) };
+  return [line(panel, drawn, { color: theme.quiet, width: 2 })];
 }
 
 /** The band in which friction can hold the body, about its equilibrium; left out where that swings too fast to be drawn. */

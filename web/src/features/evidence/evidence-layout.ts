@@ -4,7 +4,13 @@ import { fromSi } from "../../format/unit.ts";
 import { plotWidth, type Frame, type PanelFrame, type PanelKey } from "./frame.ts";
 
 /** plotly's names of the panels' axes. */
-export const axes: Record<PanelKey, "y" | "y2" | "y3"> = { displacement: "y", velocity: "y2", friction: "y3" };
+export const axes: Record<PanelKey, "y" | "y2" | "y3" | "y4" | "y5"> = {
+  displacement: "y",
+  velocity: "y2",
+  friction: "y3",
+  acceleration: "y4",
+  drive: "y5",
+};
 
 export type FigureLayout = Partial<Layout> & { width: number; height: number };
 
@@ -62,7 +68,8 @@ function valueAxis(panel: PanelFrame, theme: PlotTheme, share: (y: number) => nu
   };
 }
 
-const plainAxis = (theme: PlotTheme): Partial<LayoutAxis> => ({
+/** What all our axes share. */
+export const plainAxis = (theme: PlotTheme): Partial<LayoutAxis> => ({
   showgrid: true,
   gridcolor: theme.line,
   gridwidth: 1,

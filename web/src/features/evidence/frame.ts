@@ -1,6 +1,9 @@
 import type { Unit } from "../../format/unit.ts";
 
-export type PanelKey = "displacement" | "velocity" | "friction";
+export type PanelKey = "displacement" | "velocity" | "acceleration" | "friction" | "drive";
+
+/** Panels a person adds to the three that are always there. */
+export type ExtraPanel = Extract<PanelKey, "acceleration" | "drive">;
 
 /** The range of a panel in SI, and the unit it is drawn in. */
 export interface PanelScale {
@@ -28,7 +31,13 @@ export interface Frame {
   readonly panels: readonly PanelFrame[];
 }
 
-const heights: Record<PanelKey, number> = { displacement: 196, velocity: 116, friction: 132 };
+const heights: Record<PanelKey, number> = {
+  displacement: 196,
+  velocity: 116,
+  acceleration: 116,
+  friction: 132,
+  drive: 116,
+};
 /** Above each panel: its unit stands there. */
 const HEAD = 34;
 const FOOT = 44;

@@ -20,9 +20,13 @@ export function readingsAt(view: RunView, frame: Frame, t: number): Record<Panel
     displacement: displacementReadings(view, here, unitOf("displacement")),
     velocity: [
       reading(view, "velocity", here.v, "velocity", "slip", { unit: unitOf("velocity") }),
-      reading(view, "acceleration", here.a, "acceleration", "ink"),
+      ...(unitOf("acceleration") ? [] : [reading(view, "acceleration", here.a, "acceleration", "ink")]),
     ],
+    acceleration: [reading(view, "acceleration", here.a, "acceleration", "slip", { unit: unitOf("acceleration") })],
     friction: frictionReadings(view, here, unitOf("friction")),
+    drive: view.drive
+      ? [reading(view, view.drive.name, view.drive.at(here), "force", "ink", { unit: unitOf("drive") })]
+      : [],
   };
 }
 

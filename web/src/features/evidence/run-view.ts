@@ -1,6 +1,7 @@
 import type { Result, Samples, Scenario } from "@restband/solver";
 import { inputsOf, type Inputs } from "../../compute/inputs.ts";
 import { intervalsOf, shownEnd, type Interval } from "../../compute/intervals.ts";
+import { driveForceOf, type DriveForce } from "./drive-force.ts";
 
 /** A run made ready to be looked at: everything that does not hang on what part of it is seen. */
 export interface RunView {
@@ -9,6 +10,8 @@ export interface RunView {
   readonly samples: Samples;
   readonly intervals: readonly Interval[];
   readonly inputs: Inputs;
+  /** The force that drives the body; null where nothing does, or where it cannot be told. */
+  readonly drive: DriveForce | null;
   /** The samples at which something happens, sorted. */
   readonly eventIndices: readonly number[];
   /** Times of the events, sorted, each once. */
@@ -23,12 +26,14 @@ export function runViewOf(scenario: Scenario, result: Result): RunView | null {
   if (!samples || samples.t.length === 0) return null;
   const end = shownEnd(scenario, result);
   const held = standingOn(samples, end);
+  const inputs = inputsOf(scenario);
   return {
     scenario,
     result,
     samples: held,
     intervals: intervalsOf(held, end),
-    inputs: inputsOf(scenario),
+    inputs,
+    drive: driveForceOf(scenario, inputs),
     eventIndices: phaseChanges(held),
     eventTimes: [...new Set(result.events.map(({ t }) => t))],
     end,
@@ -74,6 +79,9 @@ export function firstCursor({ eventTimes, end }: RunView): number {
   const middle = Math.floor((eventTimes.length - 1) / 2);
   return ((eventTimes[middle] ?? 0) + (eventTimes[middle + 1] ?? end)) / 2;
 }
+
+/** Where the body stands as its spring feels it: x, or from the drive where that moves; m (rad). */
+export const fromDrive = ({ inputs }: RunView, { t, x }: { t: number; x: number }): number => x - inputs.base(t);
 
 /** The last three cycles from break-away to break-away, where there are as many; null elsewhere. */
 export function lastCycles({ result, end }: RunView): { from: number; to: number } | null {

@@ -1,8 +1,8 @@
 import type { Samples } from "@restband/solver";
-import { indexAt } from "../../compute/instant.ts";
+import { ahead, indexAt } from "../../compute/instant.ts";
 import type { Measure } from "../../format/unit.ts";
 import { unitFor } from "../../format/units.ts";
-import { padded, type PanelKey, type PanelScale } from "./frame.ts";
+import { padded, type ExtraPanel, type PanelKey, type PanelScale } from "./frame.ts";
 import type { RunView } from "./run-view.ts";
 
 interface Range {
@@ -10,15 +10,31 @@ interface Range {
   to: number;
 }
 
-/** The panels' ranges and units for a part of a run. */
-export function scalesOf(view: RunView, range: Range): PanelScale[] {
+/** The panels' ranges and units for a part of a run, from top to bottom; `extras` are those asked for beside the usual three. */
+export function scalesOf(view: RunView, range: Range, extras: readonly ExtraPanel[] = []): PanelScale[] {
   const { samples, scenario } = view;
   const measure = (dimension: Measure["dimension"]): Measure => ({ dimension, motion: scenario.motion });
   return [
     scale("displacement", [...extremesOf(samples, "x", range), ...bandEdges(view, range)], measure("displacement")),
     scale("velocity", [0, ...extremesOf(samples, "v", range), ...driveSpeed(view)], measure("velocity")),
+    ...(extras.includes("acceleration")
+      ? [scale("acceleration", [0, ...extremesOf(samples, "a", range)], measure("acceleration"))]
+      : []),
     scale("friction", [0, ...frictionExtremes(view, range)], measure("force")),
+    ...(extras.includes("drive") && view.drive
+      ? [scale("drive", [0, ...driveExtremes(view, range)], measure("force"))]
+      : []),
   ];
+}
+
+/** Of the applied force all corners count, of what comes through the spring the samples. */
+export function driveExtremes({ drive, samples }: RunView, range: Range): [number, number] {
+  let [low, high] = [0, 0];
+  for (const { force } of drive?.between(samples, range) ?? []) {
+    low = Math.min(low, force);
+    high = Math.max(high, force);
+  }
+  return [low, high];
 }
 
 function scale(key: PanelKey, values: number[], measure: Measure): PanelScale {
@@ -27,13 +43,19 @@ function scale(key: PanelKey, values: number[], measure: Measure): PanelScale {
   return { key, ...padded(low, high, unit.factor), unit };
 }
 
-function extremesOf(samples: Samples, channel: "x" | "v" | "f", { from, to }: Range): [number, number] {
-  const values = samples[channel];
+/** Lowest and highest of a channel in a part of a run; of a and f, which jump at events, to both sides of the jump. */
+export function extremesOf(samples: Samples, channel: "x" | "v" | "a" | "f", { from, to }: Range): [number, number] {
+  const { t, phase, [channel]: values } = samples;
+  const canJump = channel === "a" || channel === "f";
   let low = Infinity;
   let high = -Infinity;
-  for (let i = indexAt(samples.t, from); i <= indexAt(samples.t, to); i++) {
-    low = Math.min(low, values[i]);
-    high = Math.max(high, values[i]);
+  const first = indexAt(t, from);
+  const last = indexAt(t, to);
+  for (let i = first; i <= last; i++) {
+    const isEvent = canJump && i > first && phase[i - 1] !== phase[i];
+    const before = isEvent ? ahead(t, values, phase, i - 1, t[i]) : values[i];
+    low = Math.min(low, values[i], before);
+    high = Math.max(high, values[i], before);
   }
   return [low, high];
 }
@@ -57,7 +79,7 @@ export function driveSpeed({ scenario }: RunView): number[] {
 }
 
 /** What friction can hold belongs to the picture where the friction comes near it. */
-function frictionExtremes({ samples, inputs }: RunView, range: Range): number[] {
+export function frictionExtremes({ samples, inputs }: RunView, range: Range): number[] {
   const [low, high] = extremesOf(samples, "f", range);
   const hold = inputs.hold(range.from);
   const isNear = hold <= 3 * Math.max(Math.abs(low), Math.abs(high));

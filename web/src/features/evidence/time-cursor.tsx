@@ -67,7 +67,13 @@ function CursorLine({ view, frame, t }: Omit<TimeCursorProps, "onMove">) {
   if (t < frame.from || t > frame.to) return null;
   const x = xOf(frame, t);
   const here = instantAt(view.samples, t);
-  const values = { displacement: here.x, velocity: here.v, friction: here.f };
+  const values = {
+    displacement: here.x,
+    velocity: here.v,
+    acceleration: here.a,
+    friction: here.f,
+    drive: view.drive?.at(here) ?? 0,
+  };
   const last = frame.panels[frame.panels.length - 1];
   return (
     <svg

@@ -1,3 +1,5 @@
+import { Option } from "./option.tsx";
+
 /** A part of a run, s. */
 export interface Range {
   readonly from: number;
@@ -39,25 +41,4 @@ export function ViewChoice({ range, whole, last, t, onChoose }: ViewChoiceProps)
 function partAbout(t: number, width: number, whole: number): Range {
   const from = Math.min(Math.max(0, t - width / 2), whole - width);
   return { from, to: from + width };
-}
-
-interface OptionProps {
-  label: string;
-  isChosen?: boolean;
-  isDisabled?: boolean;
-  onChoose: () => void;
-}
-
-function Option({ label, isChosen, isDisabled, onChoose }: OptionProps) {
-  return (
-    <button
-      type="button"
-      aria-pressed={isChosen}
-      disabled={isDisabled}
-      className={isChosen ? "hit font-bold" : "link hit disabled:text-quiet disabled:no-underline"}
-      onClick={onChoose}
-    >
-      {label}
-    </button>
-  );
 }

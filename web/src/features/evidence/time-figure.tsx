@@ -1,0 +1,95 @@
+import { useMemo, type ReactNode } from "react";
+import { MotionStrip } from "../../components/motion-strip.tsx";
+import { Plot } from "../../components/plot.tsx";
+import type { PlotTheme } from "../../components/plot-theme.ts";
+import type { Motion } from "../../format/unit.ts";
+import { evidenceFigure } from "./evidence-figure.ts";
+import { xOf, type Frame, type PanelKey } from "./frame.ts";
+import { Gutter } from "./gutter.tsx";
+import { figureWords, stripWords } from "./plot-words.ts";
+import type { RunView } from "./run-view.ts";
+
+interface TimeFigureProps {
+  view: RunView;
+  frame: Frame;
+  t: number;
+  theme: PlotTheme;
+  /** The cursor, over all panels. */
+  children: ReactNode;
+}
+
+/** The motion strip and the panels over one time axis, with what is read at the cursor. */
+export function TimeFigure({ view, frame, t, theme, children }: TimeFigureProps) {
+  const { data, layout } = useMemo(() => evidenceFigure(view, frame, theme), [view, frame, theme]);
+  return (
+    <>
+      <StripRow view={view} frame={frame} t={t} />
+      <div className="relative">
+        <Plot data={data} layout={layout} label={figureWords(view, frame)} />
+        <Heads frame={frame} motion={view.scenario.motion} />
+        {children}
+        {frame.right > 100 && <Gutter view={view} frame={frame} t={t} />}
+      </div>
+    </>
+  );
+}
+
+/** The strip over the same axis as the plots, with the head of the cursor. */
+function StripRow({ view, frame, t }: { view: RunView; frame: Frame; t: number }) {
+  const isSeen = t >= frame.from && t <= frame.to;
+  return (
+    <div className="relative pt-5" style={{ paddingLeft: frame.left, paddingRight: frame.right }}>
+      {frame.left > 60 && (
+        <span className="absolute top-5 left-0 text-right text-13 text-quiet" style={{ width: frame.left - 12 }}>
+          motion
+        </span>
+      )}
+      <MotionStrip
+        intervals={view.intervals}
+        from={frame.from}
+        to={frame.to}
+        label={stripWords(view.intervals)}
+        isNever={view.result.outcome === "never-moved"}
+      />
+      {isSeen && (
+        <svg className="pointer-events-none absolute inset-0 h-full w-full" aria-hidden="true">
+          <path d={`M${xOf(frame, t)} 18l-5.5-9h11z`} className="fill-ink" />
+          <path d={`M${xOf(frame, t)} 12V60`} className="stroke-ink" strokeWidth={1.25} />
+        </svg>
+      )}
+    </div>
+  );
+}
+
+const names: Record<Motion, Record<PanelKey, string>> = {
+  linear: {
+    displacement: "displacement",
+    velocity: "velocity",
+    acceleration: "acceleration",
+    friction: "friction on the body",
+    drive: "drive force",
+  },
+  angular: {
+    displacement: "angle",
+    velocity: "angular velocity",
+    acceleration: "angular acceleration",
+    friction: "friction torque on the rotor",
+    drive: "drive torque",
+  },
+};
+
+/** The unit at the head of each axis, with what is drawn. */
+function Heads({ frame, motion }: { frame: Frame; motion: Motion }) {
+  return (
+    <>
+      {frame.panels.map(({ key, top, unit }) => (
+        <p key={key} className="absolute text-13 text-quiet" style={{ top: top - 24, left: frame.left > 60 ? 16 : 8 }}>
+          <span className="text-ink">{names[motion][key]}</span>, {unit.label}
+        </p>
+      ))}
+      <p className="absolute text-13 text-quiet" style={{ bottom: 2, right: frame.right }}>
+        time, s
+      </p>
+    </>
+  );
+}
