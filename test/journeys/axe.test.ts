@@ -85,7 +85,6 @@ describe.each(looks)("axe finds nothing, %s,", (_, options) => {
     expect(await axeFindings(page)).toEqual([]);
     await valueOf(page, "Damping").click();
     await editorOf(page, "Damping").getByRole("slider").waitFor();
-    expect(await axeFindings(page)).toEqual([]);
     await editorOf(page, "Damping").getByRole("textbox", { name: "Damping", exact: true }).fill("many");
     await page.getByText("Until then the answer keeps 350").waitFor();
     expect(await axeFindings(page)).toEqual([]);
