@@ -1,19 +1,18 @@
 import { useSuspenseQuery } from "@tanstack/react-query";
-import { lazy, useState } from "react";
+import { useState } from "react";
 import { useNavigate } from "react-router-dom";
 import { projectsQuery, useCreateProject } from "../api/projects.ts";
 import { Button } from "../components/button.tsx";
 import { Dialog } from "../components/dialog.tsx";
 import { EmptyState } from "../components/empty-state.tsx";
+import { lazyPart } from "../components/lazy-part.ts";
 import { useShortcut } from "../components/shortcuts.tsx";
 import { WorkHeader } from "../features/account/work-header.tsx";
 import { ProjectList, projectsHeadline } from "../features/project-home/project-list.tsx";
 import { paths } from "../paths.ts";
 
 // Forms are loaded when one is opened: they are no part of the first paint.
-const ProjectForm = lazy(async () => ({
-  default: (await import("../features/project-home/project-form.tsx")).ProjectForm,
-}));
+const ProjectForm = lazyPart(async () => (await import("../features/project-home/project-form.tsx")).ProjectForm);
 
 /** All projects of the person signed in. */
 export function ProjectsPage() {

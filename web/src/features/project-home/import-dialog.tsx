@@ -1,14 +1,14 @@
 import type { Scenario } from "@restband/solver";
-import { lazy } from "react";
 import { useNavigate } from "react-router-dom";
 import { useCreateCases, useCreateScenario } from "../../api/scenarios.ts";
 import { Dialog } from "../../components/dialog.tsx";
+import { lazyPart } from "../../components/lazy-part.ts";
 import { announce } from "../../components/status.tsx";
 import { capitalised, sayMany } from "../../format/words.ts";
 import { paths } from "../../paths.ts";
 
 // Loaded when it is opened, with the rules that scenarios are checked by.
-const ImportForm = lazy(async () => ({ default: (await import("./import-form.tsx")).ImportForm }));
+const ImportForm = lazyPart(async () => (await import("./import-form.tsx")).ImportForm);
 
 interface ImportDialogProps {
   projectId: string;

@@ -1,11 +1,12 @@
-import { lazy, useState } from "react";
+import { useState } from "react";
 import { useLately } from "../../api/activity.ts";
 import { Dialog } from "../../components/dialog.tsx";
+import { lazyPart } from "../../components/lazy-part.ts";
 import { tellTrail } from "./lately-words.ts";
 import { TrailList } from "./trail-list.tsx";
 
 // Loaded when it is opened: it is no part of the first paint.
-const WholeTrail = lazy(async () => ({ default: (await import("./whole-trail.tsx")).WholeTrail }));
+const WholeTrail = lazyPart(async () => (await import("./whole-trail.tsx")).WholeTrail);
 
 const SHOWN = 8;
 

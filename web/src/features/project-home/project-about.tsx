@@ -1,14 +1,15 @@
 import type { Project } from "@restband/api/contract";
-import { lazy, useState } from "react";
+import { useState } from "react";
 import { useArchiveProject, useChangeProject } from "../../api/projects.ts";
 import { Button } from "../../components/button.tsx";
 import { Confirm } from "../../components/confirm.tsx";
 import { Dialog } from "../../components/dialog.tsx";
+import { lazyPart } from "../../components/lazy-part.ts";
 import { announce } from "../../components/status.tsx";
 import { sayWhen } from "../../format/when.ts";
 
 // Loaded when it is opened: it is no part of the first paint.
-const ProjectForm = lazy(async () => ({ default: (await import("./project-form.tsx")).ProjectForm }));
+const ProjectForm = lazyPart(async () => (await import("./project-form.tsx")).ProjectForm);
 
 /** What the project is about, and whether it is archived; an owner can change both, and its name. */
 export function ProjectAbout({ project }: { project: Project }) {

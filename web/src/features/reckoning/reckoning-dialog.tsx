@@ -1,11 +1,12 @@
-import { lazy, type ComponentType } from "react";
+import { type ComponentType } from "react";
 import { Dialog } from "../../components/dialog.tsx";
+import { lazyPart } from "../../components/lazy-part.ts";
 import type { ReckoningBodyProps } from "./reckoning-body.ts";
 import type { ReckoningKey } from "./reckonings.ts";
 
-const ChainBody = lazy(async () => ({ default: (await import("./chain/chain-body.tsx")).ChainBody }));
-const SheetBody = lazy(async () => ({ default: (await import("./sheets/sheet-body.tsx")).SheetBody }));
-const TableBody = lazy(async () => ({ default: (await import("./tables/table-body.tsx")).TableBody }));
+const ChainBody = lazyPart(async () => (await import("./chain/chain-body.tsx")).ChainBody);
+const SheetBody = lazyPart(async () => (await import("./sheets/sheet-body.tsx")).SheetBody);
+const TableBody = lazyPart(async () => (await import("./tables/table-body.tsx")).TableBody);
 
 /** What each reckoning looks like inside; loaded when it is opened. */
 const bodies: Readonly<Record<ReckoningKey, ComponentType<ReckoningBodyProps>>> = {
