@@ -38,13 +38,17 @@ function isWriting(target: EventTarget | null): boolean {
   return target instanceof HTMLElement && (writingTags.has(target.tagName) || target.isContentEditable);
 }
 
+/** A space pressed on a button or link is the button's own. */
+const isPressing = ({ key, target }: KeyboardEvent): boolean =>
+  key === " " && target instanceof Element && target.closest("button, a, summary") !== null;
+
 function keysOf(event: KeyboardEvent): string {
   const held = event.ctrlKey || event.metaKey ? "Ctrl+" : "";
   return held + (event.shiftKey && event.key.length > 1 ? "Shift+" : "") + event.key;
 }
 
 function press(event: KeyboardEvent): void {
-  if (event.defaultPrevented || event.altKey) return;
+  if (event.defaultPrevented || event.altKey || isPressing(event)) return;
   const keys = keysOf(event);
   const isSingle = !keys.startsWith("Ctrl+");
   if (isSingle && (!areSingleKeysOn.get() || isWriting(event.target) || document.querySelector("dialog[open]"))) return;

@@ -1,8 +1,6 @@
-import { useMemo, useState } from "react";
-import { Button } from "../../components/button.tsx";
+import { useMemo } from "react";
 import { classNames } from "../../components/class-names.ts";
 import { Figure } from "../../components/figure.tsx";
-import { Icon } from "../../components/icon.tsx";
 import { usePlotTheme } from "../../components/plot-theme.ts";
 import { useShortcut } from "../../components/shortcuts.tsx";
 import { useIsPhone } from "../../components/use-media.ts";
@@ -14,13 +12,16 @@ import { frameOf } from "./frame.ts";
 import { ReadingsRow } from "./gutter.tsx";
 import { LoopSheets } from "./loop-sheets.tsx";
 import { PanelChoice } from "./panel-choice.tsx";
+import { PlayButtons } from "./play-buttons.tsx";
 import { phaseWords } from "./readings.ts";
 import { lastCycles, neighbourEvent, type RunView } from "./run-view.ts";
 import { scalesOf } from "./scales.ts";
 import { TimeCursor } from "./time-cursor.tsx";
 import { TimeFigure } from "./time-figure.tsx";
 import { usePanels } from "./use-panels.ts";
-import { ViewChoice, type Range } from "./view-choice.tsx";
+import { useSeenPart } from "./use-part.ts";
+import { usePlay } from "./use-play.ts";
+import { ViewChoice } from "./view-choice.tsx";
 
 interface EvidenceProps {
   view: RunView;
@@ -38,51 +39,39 @@ export function Evidence({ view: newest, t, onMove, isStale }: EvidenceProps) {
   const view = useThrottled(newest, DRAWN_EVERY_MS);
   const isPhone = useIsPhone();
   const [ref, width] = useWidth<HTMLDivElement>(1160);
-  const [part, setPart] = useState<Range | null>(null);
-  const range = useMemo(() => within(part, view.end), [part, view.end]);
+  const part = useSeenPart(view.end, t);
+  const { range } = part;
   const [panels, togglePanel] = usePanels();
   const frame = useMemo(() => frameOf(width, range, scalesOf(view, range, panels)), [view, width, range, panels]);
   const theme = usePlotTheme();
-  const step = (direction: 1 | -1): void => onMove(neighbourEvent(view, t, direction) ?? t);
+  const moveTo = (next: number): void => {
+    onMove(next);
+    part.follow(next);
+  };
+  const step = (direction: 1 | -1): void => moveTo(neighbourEvent(view, t, direction) ?? t);
+  const play = usePlay({ range, t, onMove, next: (after) => neighbourEvent(view, after, 1) });
+  useShortcut(" ", "Play and pause", play.toggle);
   useShortcut("ArrowLeft", "Cursor to the event before", () => step(-1));
   useShortcut("ArrowRight", "Cursor to the next event", () => step(1));
   return (
     <div className={classNames(isStale && "stale")}>
       <div className="mb-3 flex flex-wrap items-center gap-x-5 gap-y-2">
-        {!isPhone && <EventButtons onStep={step} />}
+        <PlayButtons play={play} onStep={step} hasSteps={!isPhone} />
         <CursorWords view={view} t={t} />
-        <ViewChoice range={range} whole={view.end} last={lastCycles(view)} t={t} onChoose={setPart} />
+        <ViewChoice part={part} whole={view.end} last={lastCycles(view)} />
       </div>
       <PanelChoice hasDrive={view.drive !== null} chosen={panels} onToggle={togglePanel} />
       {isPhone && <ReadingsRow view={view} frame={frame} t={t} />}
       <div className="border-line bg-raised max-desk:-mx-(--page-pad) max-desk:border-y desk:rounded desk:border">
         <div ref={ref} className="relative">
           <TimeFigure view={view} frame={frame} t={t} theme={theme}>
-            <TimeCursor view={view} frame={frame} t={t} onMove={onMove} />
+            <TimeCursor view={view} frame={frame} t={t} onMove={moveTo} part={part} />
           </TimeFigure>
         </div>
       </div>
       <LoopSheets view={view} range={range} t={t} theme={theme} />
-      {isPhone && <DockedStrip view={view} t={t} onMove={onMove} onStep={step} />}
+      {isPhone && <DockedStrip view={view} t={t} onMove={moveTo} onStep={step} />}
     </div>
-  );
-}
-
-function within(part: Range | null, end: number): Range {
-  if (!part || part.from >= end) return { from: 0, to: end };
-  return { from: part.from, to: Math.min(part.to, end) };
-}
-
-export function EventButtons({ onStep }: { onStep: (direction: 1 | -1) => void }) {
-  return (
-    <span className="flex gap-2">
-      <Button className="w-8 px-0!" aria-label="Event before" onClick={() => onStep(-1)}>
-        <Icon name="previous" size={13} />
-      </Button>
-      <Button className="w-8 px-0!" aria-label="Next event" onClick={() => onStep(1)}>
-        <Icon name="next" size={13} />
-      </Button>
-    </span>
   );
 }
 

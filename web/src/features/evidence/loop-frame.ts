@@ -7,7 +7,7 @@ import { densified } from "./densified.ts";
 import { padded } from "./frame.ts";
 import { fromDrive, lastCycles, phaseChanges, type RunView } from "./run-view.ts";
 import { driveSpeed, extremesOf, frictionExtremes } from "./scales.ts";
-import type { Range } from "./view-choice.tsx";
+import type { Range } from "./part-of-run.ts";
 
 /** One axis of a loop: range in SI, unit, and what is measured along it. */
 export interface LoopAxis {

@@ -8,7 +8,7 @@ import { loopFrames, loopPart, type LoopFrame, type LoopPart } from "./loop-fram
 import { acrossOf, downOf, loopLabels, type LoopLabel, type Size } from "./loop-labels.ts";
 import { loopWords } from "./plot-words.ts";
 import { fromDrive, type RunView } from "./run-view.ts";
-import type { Range } from "./view-choice.tsx";
+import type { Range } from "./part-of-run.ts";
 
 interface LoopSheetsProps {
   view: RunView;

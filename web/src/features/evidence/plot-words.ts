@@ -8,7 +8,7 @@ import type { Frame, PanelKey } from "./frame.ts";
 import type { LoopAxis, LoopFrame } from "./loop-frame.ts";
 import type { RunView } from "./run-view.ts";
 import { driveExtremes, extremesOf } from "./scales.ts";
-import type { Range } from "./view-choice.tsx";
+import type { Range } from "./part-of-run.ts";
 
 /** The figure in words, for those who cannot see it: what is drawn, between what values, over what part of the run. */
 export function figureWords(view: RunView, frame: Pick<Frame, "from" | "to" | "panels">): string {

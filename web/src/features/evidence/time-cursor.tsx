@@ -1,25 +1,34 @@
-import { useRef, type KeyboardEvent, type PointerEvent } from "react";
+import { type KeyboardEvent, type PointerEvent } from "react";
 import { instantAt } from "../../compute/instant.ts";
 import { say } from "../../format/format-quantity.ts";
 import { timeAt, xOf, yOf, type Frame } from "./frame.ts";
 import { phaseWords } from "./readings.ts";
 import { neighbourEvent, type RunView } from "./run-view.ts";
+import { useGestures } from "./use-gestures.ts";
+import type { SeenPart } from "./use-part.ts";
 
 interface TimeCursorProps {
   view: RunView;
   frame: Frame;
   t: number;
   onMove: (t: number) => void;
+  part: SeenPart;
 }
 
-/** The one time cursor over all panels: pressed or dragged with the pointer, moved from event to event by the arrow keys. */
-export function TimeCursor({ view, frame, t, onMove }: TimeCursorProps) {
-  const area = useRef<HTMLDivElement>(null);
+/** The one time cursor over all panels: pressed or dragged with the pointer, moved from event to event by the arrow keys; Page up and down move what is seen. */
+export function TimeCursor({ view, frame, t, onMove, part }: TimeCursorProps) {
+  const area = useGestures(frame, part);
   const moveTo = ({ clientX }: PointerEvent): void => {
     const box = area.current?.getBoundingClientRect();
     if (box) onMove(timeAt(frame, clientX - box.left));
   };
   const press = (event: KeyboardEvent): void => {
+    const pages = { PageUp: -0.5, PageDown: 0.5 }[event.key];
+    if (pages !== undefined) {
+      event.preventDefault();
+      part.pan(pages);
+      return;
+    }
     const next = targetOf(event, view, frame, t);
     if (next === null) return;
     event.preventDefault();
@@ -42,10 +51,11 @@ export function TimeCursor({ view, frame, t, onMove }: TimeCursorProps) {
       style={{ height: frame.height }}
       onKeyDown={press}
       onPointerDown={(event) => {
+        if (!event.isPrimary) return;
         event.currentTarget.setPointerCapture(event.pointerId);
         moveTo(event);
       }}
-      onPointerMove={(event) => event.buttons > 0 && moveTo(event)}
+      onPointerMove={(event) => event.isPrimary && event.buttons > 0 && moveTo(event)}
     >
       <CursorLine view={view} frame={frame} t={t} />
     </div>
@@ -63,7 +73,7 @@ function targetOf(event: KeyboardEvent, view: RunView, { from, to }: Frame, t: n
 }
 
 /** The line through all panels and a ring on each curve; nothing where the cursor is outside what is seen. */
-function CursorLine({ view, frame, t }: Omit<TimeCursorProps, "onMove">) {
+function CursorLine({ view, frame, t }: Omit<TimeCursorProps, "onMove" | "part">) {
   if (t < frame.from || t > frame.to) return null;
   const x = xOf(frame, t);
   const here = instantAt(view.samples, t);
