@@ -15,7 +15,7 @@ import {
   type TermKind,
 } from "@restband/solver";
 import type { DraftAction } from "./draft/draft.ts";
-import { movePath, readPath, writePath } from "./path.ts";
+import { movePath, readPath, without, writePath } from "./path.ts";
 
 export type Place = "force" | "base";
 
@@ -34,6 +34,12 @@ export const takeValues = (taken: readonly { path: string; value: number; origin
     }, scenario),
   rename: (path) => (taken.some((each) => each.path === path) ? null : path),
 });
+
+/** Says where the number at a path comes from, or no more; what is typed of origins in one go is one step of undo. */
+export function setOrigin({ origins }: Scenario, path: string, origin: Origin | null): DraftAction {
+  const value = origin ? { ...origins, [path]: origin } : without(origins, path);
+  return { type: "set", path: "origins", value };
+}
 
 /** From straight to turning and back: what the other kind cannot have is taken out, the numbers stay. */
 export const setMotion = (motion: Scenario["motion"]): DraftAction =>

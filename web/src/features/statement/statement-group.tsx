@@ -8,7 +8,7 @@ import { ValueEditor } from "./entry/value-editor.tsx";
 import { faultsIn, type Group } from "./groups.ts";
 import { Keeps } from "./keeps.tsx";
 import { fieldAt } from "./scenario-fields.ts";
-import { originsIn } from "./origin-words.ts";
+import { originsIn } from "./origin/origin-words.ts";
 import { remarkWords } from "./remark-words.ts";
 import { SentenceLine } from "./sentence-line.tsx";
 

@@ -4,7 +4,8 @@ import type { Dispatch, Draft } from "./draft/draft.ts";
 import { DraftContext } from "./draft/draft-context.ts";
 import { groupOf, groups } from "./groups.ts";
 import { StatementGroup } from "./statement-group.tsx";
-import { useMemo, type ReactNode } from "react";
+import { WithoutOrigin } from "./origin/without-origin.tsx";
+import { useMemo, useRef, type ReactNode } from "react";
 
 interface StatementProps {
   draft: Draft;
@@ -19,13 +20,21 @@ interface StatementProps {
 export function Statement({ draft, dispatch, refusal, aside }: StatementProps) {
   // Values typed in a unit beyond our own table are shown in it once that can be read.
   useOtherUnits();
+  const place = useRef<HTMLDivElement>(null);
   const context = useMemo(() => ({ draft, dispatch, aside }), [draft, dispatch, aside]);
   const remarks: readonly Fault[] = refusal?.faults.length ? refusal.faults : refusal ? [refusal] : [];
   return (
     <DraftContext.Provider value={context}>
-      {groups.map((group) => (
-        <StatementGroup key={group.key} group={group} remarks={remarks.filter(({ path }) => groupOf(path) === group)} />
-      ))}
+      <div ref={place}>
+        {groups.map((group) => (
+          <StatementGroup
+            key={group.key}
+            group={group}
+            remarks={remarks.filter(({ path }) => groupOf(path) === group)}
+          />
+        ))}
+      </div>
+      <WithoutOrigin statement={place} />
     </DraftContext.Provider>
   );
 }

@@ -4,6 +4,7 @@ import { FieldError } from "../../../components/field.tsx";
 import { readInput } from "../../../format/format-quantity.ts";
 import { useDraftContext } from "../draft/draft-context.ts";
 import { measureOf, type PathField } from "../scenario-fields.ts";
+import { OriginEntry } from "../origin/origin-entry.tsx";
 import { DragRuler } from "./drag-ruler.tsx";
 import { EquivalentEntry } from "./equivalent-entry.tsx";
 import { equivalentsOf } from "./equivalents.ts";
@@ -69,6 +70,7 @@ export function ValueEditor({ path, field, nib, onClose }: ValueEditorProps) {
       )}
       {field.help && !entry.fault && <p className="mt-1.5 text-13 text-quiet">{field.help}</p>}
       {aside?.(path)}
+      <OriginEntry path={path} field={field} entry={entry} />
       {isRulable && before.value !== undefined && (
         <DragRuler path={path} before={before.value} entry={entry} label={field.label} />
       )}

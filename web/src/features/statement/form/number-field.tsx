@@ -2,6 +2,7 @@ import { Field } from "../../../components/field.tsx";
 import { useDraftContext } from "../draft/draft-context.ts";
 import { EntryFault, NumberControl } from "../entry/number-control.tsx";
 import { useNumberEntry } from "../entry/use-number-entry.ts";
+import { OriginEntry } from "../origin/origin-entry.tsx";
 import { useKept } from "../keeps.tsx";
 import { fieldAt } from "../scenario-fields.ts";
 
@@ -28,11 +29,12 @@ function FullField({ path, field, empty }: FullFieldProps) {
   const keeps = useKept(path);
   const name = field.symbol ? `${field.label}, ${field.symbol}` : field.label;
   return (
-    <div>
+    <div data-path={path}>
       <Field label={name} help={field.help} error={entry.fault && <EntryFault entry={entry} keeps={keeps} />}>
         {(control) => <NumberControl entry={entry} label={field.label} {...control} />}
       </Field>
       {aside?.(path)}
+      <OriginEntry path={path} field={field} entry={entry} />
     </div>
   );
 }
