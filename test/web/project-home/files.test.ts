@@ -4,7 +4,7 @@ import { slim } from "../../../web/src/features/project-home/glances/slim.ts";
 import { copyTitle } from "../../../web/src/features/project-home/copy-title.ts";
 import { readScenarios } from "../../../web/src/features/project-home/read-scenarios.ts";
 import { resultsCsv } from "../../../web/src/features/project-home/results-csv.ts";
-import { fileNameOf } from "../../../web/src/features/project-home/save-file.ts";
+import { fileNameOf } from "../../../web/src/components/save-file.ts";
 import { intervalsOf } from "../../../web/src/compute/intervals.ts";
 import { creepFeed, solved } from "../support/scenarios.ts";
 

@@ -15,6 +15,7 @@ import { PanelChoice } from "./panel-choice.tsx";
 import { PlayButtons } from "./play-buttons.tsx";
 import { phaseWords } from "./readings.ts";
 import { lastCycles, neighbourEvent, type RunView } from "./run-view.ts";
+import { SaveRun } from "./save-run.tsx";
 import { scalesOf } from "./scales.ts";
 import { TimeCursor } from "./time-cursor.tsx";
 import { TimeFigure } from "./time-figure.tsx";
@@ -70,6 +71,7 @@ export function Evidence({ view: newest, t, onMove, isStale }: EvidenceProps) {
         </div>
       </div>
       <LoopSheets view={view} range={range} t={t} theme={theme} />
+      <SaveRun view={view} />
       {isPhone && <DockedStrip view={view} t={t} onMove={moveTo} onStep={step} />}
     </div>
   );

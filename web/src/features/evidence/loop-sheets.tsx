@@ -1,13 +1,15 @@
 import { useMemo } from "react";
+import type { PlotSheet } from "../../components/plot-image.ts";
 import { Plot } from "../../components/plot.tsx";
 import type { PlotTheme } from "../../components/plot-theme.ts";
 import { useWidth } from "../../components/use-width.ts";
 import { instantAt } from "../../compute/instant.ts";
 import { loopFigure } from "./loop-figure.ts";
-import { loopFrames, loopPart, type LoopFrame, type LoopPart } from "./loop-frame.ts";
+import { loopFrames, loopPart, type LoopAxis, type LoopFrame, type LoopPart } from "./loop-frame.ts";
 import { acrossOf, downOf, loopLabels, type LoopLabel, type Size } from "./loop-labels.ts";
 import { loopWords } from "./plot-words.ts";
 import { fromDrive, type RunView } from "./run-view.ts";
+import { SavePlot } from "./save-plot.tsx";
 import type { Range } from "./part-of-run.ts";
 
 interface LoopSheetsProps {
@@ -33,6 +35,26 @@ export function LoopSheets({ view, range, t, theme }: LoopSheetsProps) {
 
 const HEIGHT = 340;
 
+/** What a file of a loop says beside its lines. */
+function loopSheet(
+  { scenario }: RunView,
+  part: LoopPart,
+  { title, across, upright }: LoopFrame,
+  labels: readonly LoopLabel[],
+  size: Size,
+  theme: PlotTheme,
+): Omit<PlotSheet, "data" | "layout"> {
+  const named = ({ name, unit }: LoopAxis): string => `${name}, ${unit.label}`;
+  return {
+    title: `${scenario.title || "Untitled"}: ${title.toLowerCase()}, ${part.words}`,
+    words: [
+      { text: named(upright), x: 16, y: 30, anchor: "start", colour: theme.ink },
+      { text: named(across), x: size.width - 24, y: size.height - 4, anchor: "end", colour: theme.ink },
+      ...labels.map(({ tone, ...label }) => ({ ...label, colour: theme[tone] })),
+    ],
+  };
+}
+
 interface LoopSheetProps extends Omit<LoopSheetsProps, "range"> {
   part: LoopPart;
   frame: LoopFrame;
@@ -45,8 +67,15 @@ function LoopSheet({ view, part, frame, t, theme }: LoopSheetProps) {
   const labels = useMemo(() => loopLabels(view, part, frame, size), [view, part, frame, size]);
   return (
     <figure className="border-line bg-raised max-desk:-mx-(--page-pad) max-desk:border-y desk:rounded desk:border">
-      <figcaption className="px-4 pt-4 text-15 font-bold">
-        {frame.title}, {part.words}
+      <figcaption className="flex flex-wrap justify-between gap-x-4 px-4 pt-4 text-15 font-bold">
+        <span>
+          {frame.title}, {part.words}
+        </span>
+        <SavePlot
+          name={frame.title.toLowerCase()}
+          theme={theme}
+          sheet={() => ({ ...loopSheet(view, part, frame, labels, size, theme), data, layout })}
+        />
       </figcaption>
       <div ref={ref} className="relative">
         <Plot data={data} layout={layout} label={loopWords(view, frame)} />

@@ -1,6 +1,7 @@
 import { useMemo, type ReactNode } from "react";
 import { MotionStrip } from "../../components/motion-strip.tsx";
 import { Plot } from "../../components/plot.tsx";
+import type { PlotSheet } from "../../components/plot-image.ts";
 import type { PlotTheme } from "../../components/plot-theme.ts";
 import type { Motion } from "../../format/unit.ts";
 import { evidenceFigure } from "./evidence-figure.ts";
@@ -8,6 +9,7 @@ import { xOf, type Frame, type PanelKey } from "./frame.ts";
 import { Gutter } from "./gutter.tsx";
 import { figureWords, stripWords } from "./plot-words.ts";
 import type { RunView } from "./run-view.ts";
+import { SavePlot } from "./save-plot.tsx";
 
 interface TimeFigureProps {
   view: RunView;
@@ -30,8 +32,33 @@ export function TimeFigure({ view, frame, t, theme, children }: TimeFigureProps)
         {children}
         {frame.right > 100 && <Gutter view={view} frame={frame} t={t} />}
       </div>
+      <p className="absolute bottom-0 left-4">
+        <SavePlot
+          name="plots over time"
+          theme={theme}
+          sheet={() => ({ data, layout, ...timeSheet(view, frame, theme) })}
+        />
+      </p>
     </>
   );
+}
+
+/** What a file of the panels says beside their lines. */
+function timeSheet({ scenario }: RunView, frame: Frame, theme: PlotTheme): Omit<PlotSheet, "data" | "layout"> {
+  const end = { x: frame.width - frame.right, y: frame.height - 2 };
+  return {
+    title: scenario.title || "Untitled",
+    words: [
+      ...frame.panels.map(({ key, top, unit }) => ({
+        text: `${names[scenario.motion][key]}, ${unit.label}`,
+        x: 16,
+        y: top - 8,
+        anchor: "start" as const,
+        colour: theme.ink,
+      })),
+      { text: "time, s", ...end, anchor: "end", colour: theme.quiet },
+    ],
+  };
 }
 
 /** The strip over the same axis as the plots, with the head of the cursor. */

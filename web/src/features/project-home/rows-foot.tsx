@@ -3,7 +3,7 @@ import { useEffect, useRef, useState } from "react";
 import { ProgressLine } from "../../components/progress-line.tsx";
 import { announce } from "../../components/status.tsx";
 import type { Glances } from "./glances/use-glances.ts";
-import { fileNameOf, saveFile } from "./save-file.ts";
+import { fileNameOf, saveFile } from "../../components/save-file.ts";
 
 interface RowsFootProps {
   projectName: string;

@@ -5,7 +5,7 @@ import { scenarioQuery, useScenarioActs } from "../../api/scenarios.ts";
 import { announce } from "../../components/status.tsx";
 import { paths } from "../../paths.ts";
 import { copyTitle } from "./copy-title.ts";
-import { fileNameOf, saveFile } from "./save-file.ts";
+import { fileNameOf, saveFile } from "../../components/save-file.ts";
 import type { RowActs } from "./row-menu.tsx";
 
 /** Does a thing and says so, with the way back; what is refused is said in the server's words. */

@@ -9,7 +9,7 @@ import { announce } from "../../../components/status.tsx";
 import { TextArea } from "../../../components/text-field.tsx";
 import { listed, sayMany } from "../../../format/words.ts";
 import type { Glance } from "../glances/glance-book.ts";
-import { fileNameOf, saveFile } from "../save-file.ts";
+import { fileNameOf, saveFile } from "../../../components/save-file.ts";
 import type { Case, Decimal } from "./build-cases.ts";
 import type { CaseField, WriteNumber } from "./case-field.ts";
 import { CasesTable } from "./cases-table.tsx";

@@ -8,9 +8,10 @@ export function fileNameOf(title: string, extension: string): string {
   return `${plain || "scenario"}.${extension}`;
 }
 
-/** Hands a text to the browser as a file to keep. */
-export function saveFile(name: string, type: string, text: string): void {
-  const address = URL.createObjectURL(new Blob([text], { type: `${type};charset=utf-8` }));
+/** Hands a text, or bytes, to the browser as a file to keep. */
+export function saveFile(name: string, type: string, content: string | Uint8Array<ArrayBuffer>): void {
+  const kind = typeof content === "string" ? `${type};charset=utf-8` : type;
+  const address = URL.createObjectURL(new Blob([content], { type: kind }));
   const link = Object.assign(document.createElement("a"), { href: address, download: name });
   link.click();
   setTimeout(() => URL.revokeObjectURL(address), 10_000);
