@@ -107,6 +107,20 @@ describe("the page of a scenario", () => {
     expect(save.body).toMatchObject({ content: { body: { viscous: 8000 } } });
   });
 
+  it("shows all of it in the units a person thinks in, and saves nothing for that", async () => {
+    const requests = fakeServer(seen());
+    const { user } = openPage(at);
+    await answer();
+    await user.selectOptions(screen.getByRole("combobox", { name: /^Units/ }), "inch–pound");
+    // 120 kg / 0.45359237, 4 N/μm / (0.45359237 · 9.80665 / 0.0254)
+    expect(screen.getByRole("button", { name: "Mass: 264.555 lb" })).toBeInTheDocument();
+    expect(screen.getByRole("button", { name: "Stiffness: 22\u202f840.6 lbf/in" })).toBeInTheDocument();
+    expect(await screen.findByText(/at up to 0\.21\sin\/s/)).toBeInTheDocument();
+    await changeDamping(user, "10");
+    await waitFor(() => expect(saves(requests)).toHaveLength(1));
+    expect(saves(requests)[0].body).toMatchObject({ content: { body: { inertia: 120, stiffness: 4e6 } } });
+  });
+
   it("takes a change back by Ctrl-Z, also while the field has the focus", async () => {
     fakeServer(seen());
     const { user } = openPage(at);

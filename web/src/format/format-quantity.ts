@@ -15,10 +15,15 @@ export function readQuantity(value: number, measure: Measure, options: { unit?: 
   return reading(value, measure, unit, formatNumber(fromSi(value, unit), options.digits ?? 3));
 }
 
-/** A value somebody entered (SI in), with every digit it was given. */
+/**
+ * A value somebody entered (SI in), with every digit it was given; to six where it is shown in a unit it was not entered in
+ * and would have no end.
+ */
 export function readInput(value: number, measure: Measure, chosen?: Unit): Reading {
   const unit = chosen ?? unitFor(value, measure);
-  return reading(value, measure, unit, formatExactly(fromSi(value, unit)));
+  const inUnit = fromSi(value, unit);
+  const isEndless = !chosen && Number(inUnit.toPrecision(9)) !== Number(inUnit.toPrecision(12));
+  return reading(value, measure, unit, isEndless ? formatNumber(inUnit, 6) : formatExactly(inUnit));
 }
 
 /** A computed value in running text: "77.2 μm", "38 %", "12°". */

@@ -14,6 +14,8 @@ export interface Unit {
   readonly factor: number;
   /** Shown unasked from this many of it on; absent: only where a person chooses it. */
   readonly from?: number;
+  /** The same for a person who thinks in inches and pounds. */
+  readonly inchFrom?: number;
   /** Other ways to type it, beside the label itself. */
   readonly aliases?: readonly string[];
 }

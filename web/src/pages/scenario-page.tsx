@@ -19,7 +19,9 @@ import { useDraft } from "../features/statement/saving/use-draft.ts";
 import { isSameScenario } from "../features/statement/saving/differences.ts";
 import { sayField } from "../features/statement/say-field.ts";
 import { Statement } from "../features/statement/statement.tsx";
+import { UnitSystemChoice } from "../features/statement/unit-system-choice.tsx";
 import { UndoButtons } from "../features/statement/undo-buttons.tsx";
+import { useUnitSystem } from "../format/unit-system.ts";
 import { mayEdit } from "../features/project-home/roles.ts";
 import { paths } from "../paths.ts";
 import { sharedValue } from "../shared-value.ts";
@@ -47,6 +49,8 @@ export function ScenarioPage() {
 
 function OpenScenario({ project, stored }: { project: Project; stored: StoredScenario }) {
   const { id: accountId } = useAccount();
+  // What is worked out once for a run is worked out anew for other units.
+  const units = useUnitSystem();
   const canEdit = mayEdit(project.role);
   const { draft, dispatch, saving, base, decide } = useDraft({ stored, accountId, canEdit });
   const { inForce, faults } = draft;
@@ -88,6 +92,7 @@ function OpenScenario({ project, stored }: { project: Project; stored: StoredSce
       <WorkedPage className="max-desk:pb-40">
         <Section name="Answer" help="Computed here, anew with every change.">
           <Answer
+            key={units}
             run={run}
             before={before}
             ranges={ranges}
@@ -108,8 +113,9 @@ function OpenScenario({ project, stored }: { project: Project; stored: StoredSce
             aside={aside}
             refusal={run.computed && "refusal" in run.computed ? run.computed.refusal : null}
           />
+          <UnitSystemChoice />
         </Section>
-        <RunSections computed={run.computed} view={view} cursor={cursor} isStale={run.isStale} />
+        <RunSections key={`run ${units}`} computed={run.computed} view={view} cursor={cursor} isStale={run.isStale} />
       </WorkedPage>
       {saving.kind === "conflict" && (
         <Suspense>
