@@ -62,10 +62,10 @@ describe("solve FILE", { timeout: 60_000 }, () => {
   });
 
   it("refuses a method that cannot compute it, and what is no JSON", async () => {
-    expect(await solve([fileOf(JSON.stringify(ringDown)), "--method", "adaptive"])).toMatchObject({
-      status: 1,
-      out: "",
-    });
+    const stiffening = { ...ringDown, body: { ...ringDown.body, cubic: 1e6 } };
+    const refused = await solve([fileOf(JSON.stringify(stiffening)), "--method", "exact"]);
+    expect(refused).toMatchObject({ status: 1, out: "" });
+    expect(refused.err).toContain("body.cubic");
     const noJson = await solve([fileOf("{")]);
     expect(noJson).toMatchObject({ status: 1, out: "" });
     expect(noJson.err).toMatch(/^This is no JSON/);
