@@ -119,5 +119,5 @@ async function seeScenario(page: Page, title: string): Promise<void> {
   await page.getByRole("link", { name: "Hall 3 refit" }).click();
   await openScenario(page, title);
   await expectText(answerOf(page)).toMatch(/^The (carriage|rotor|body) /);
-  await page.locator(".js-plotly-plot .cartesianlayer").waitFor();
+  await page.locator(".js-plotly-plot .cartesianlayer").first().waitFor();
 }

@@ -27,7 +27,7 @@ it("goes from signing in to a changed value, kept, without a mouse", async () =>
   await page.getByRole("link", { name: "Hall 3" }).waitFor();
   await tabTo(page, "Hall 3");
   await page.keyboard.press("Enter");
-  await page.getByRole("link", { name: "Slide, released" }).waitFor();
+  await page.getByRole("heading", { name: "Slide, released" }).waitFor();
   await tabTo(page, "Slide, released");
   await page.keyboard.press("Enter");
   await expectText(answerOf(page)).toBe(restOf(0.02));

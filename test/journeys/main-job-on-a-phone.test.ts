@@ -37,6 +37,7 @@ it("reads, steps through and changes a scenario with a finger", async () => {
   await openScenario(page, "Z carriage, creep feed");
   const slow = feedCycle({ ...carriage, feed: 0.002 });
   await seeFrequency(page, slow);
+  await page.locator(".js-plotly-plot").last().waitFor();
   await expectNoSidewaysScroll(page);
   await stepThroughEvents(page, slow);
   await change(page, "Rate", "1");
