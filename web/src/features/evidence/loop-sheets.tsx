@@ -25,7 +25,7 @@ export function LoopSheets({ view, range, t, theme }: LoopSheetsProps) {
   const part = useMemo(() => loopPart(view, range), [view, range]);
   const frames = useMemo(() => loopFrames(view, part), [view, part]);
   return (
-    <div className="mt-4 grid gap-4 desk:grid-cols-2 desk:gap-6">
+    <div className="mt-4 grid grid-cols-1 gap-4 desk:grid-cols-2 desk:gap-6">
       {frames.map((frame) => (
         <LoopSheet key={frame.key} view={view} part={part} frame={frame} t={t} theme={theme} />
       ))}
