@@ -62,7 +62,7 @@ describe("solve FILE", { timeout: 60_000 }, () => {
   });
 
   it("refuses a method that cannot compute it, and what is no JSON", async () => {
-    const stiffening = { ...ringDown, body: { ...ringDown.body, cubic: 1e6 } };
+    const stiffening = { ...ringDown, body: { inertia: 1, stiffness: 100, cubic: 1e6 } };
     const refused = await solve([fileOf(JSON.stringify(stiffening)), "--method", "exact"]);
     expect(refused).toMatchObject({ status: 1, out: "" });
     expect(refused.err).toContain("body.cubic");
