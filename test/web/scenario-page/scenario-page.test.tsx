@@ -4,6 +4,7 @@ import { act, cleanup, fireEvent, screen, waitFor, within } from "@testing-libra
 import { afterEach, beforeEach, describe, expect, it, vi } from "vitest";
 import { noteConnection } from "../../../web/src/api/connection.ts";
 import type { SolverJob } from "../../../web/src/compute/solver-job.ts";
+import { readScenario } from "../../../web/src/features/statement/exchange/read-scenario.ts";
 import {
   fakeServer,
   ines,
@@ -119,6 +120,37 @@ describe("the page of a scenario", () => {
     await changeDamping(user, "10");
     await waitFor(() => expect(saves(requests)).toHaveLength(1));
     expect(saves(requests)[0].body).toMatchObject({ content: { body: { inertia: 120, stiffness: 4e6 } } });
+  });
+
+  it("takes in a scenario as JSON, names every fault of one that is not right, and gives the old one back", async () => {
+    fakeServer(seen());
+    const { user } = openPage(at);
+    await user.click(await screen.findByRole("button", { name: "bring one in" }));
+    const dialog = within(screen.getByRole("dialog", { name: "Bring in a scenario" }));
+    const text = dialog.getByRole("textbox", { name: "Scenario as JSON" });
+    const take = async (pasted: string): Promise<void> => {
+      fireEvent.change(text, { target: { value: pasted } });
+      await user.click(dialog.getByRole("button", { name: "Take it" }));
+    };
+    await take("{");
+    expect(text).toHaveAccessibleDescription(/^This is no JSON:/);
+    const wrong = { ...creepFeed, body: { ...creepFeed.body, inertia: -1 }, colour: "red" };
+    await take(JSON.stringify(wrong));
+    expect(dialog.getByRole("alert")).toHaveTextContent(/^Not taken: two faults\./);
+    expect(dialog.getByText("body.inertia")).toBeInTheDocument();
+    expect(dialog.getByText("colour")).toBeInTheDocument();
+    expect(text).toHaveValue(JSON.stringify(wrong));
+    await take(JSON.stringify(variant({ title: "Taken", body: { ...creepFeed.body, viscous: 777 } })));
+    expect(screen.getByRole("button", { name: "Damping: 777 N·s/m" })).toBeInTheDocument();
+    await user.click(screen.getAllByRole("button", { name: "Undo" })[0]);
+    expect(screen.getByRole("button", { name: "Damping: 350 N·s/m" })).toBeInTheDocument();
+  });
+
+  it("copies the scenario in force as JSON that can be brought in again", async () => {
+    fakeServer(seen());
+    const { user } = openPage(at);
+    await user.click(await screen.findByRole("button", { name: "copy" }));
+    expect(readScenario(await navigator.clipboard.readText()).scenario).toEqual(creepFeed);
   });
 
   it("takes a change back by Ctrl-Z, also while the field has the focus", async () => {

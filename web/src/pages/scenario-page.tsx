@@ -30,6 +30,9 @@ import { useCursor, type Cursor } from "./cursor.ts";
 
 // None of these is needed for the first answer: they come after it.
 const CursorSketch = lazyPart(async () => (await import("./cursor-sketch.tsx")).CursorSketch);
+const ScenarioExchange = lazyPart(
+  async () => (await import("../features/statement/exchange/scenario-exchange.tsx")).ScenarioExchange,
+);
 const Evidence = lazyPart(async () => (await import("../features/evidence/evidence.tsx")).Evidence);
 const Checks = lazyPart(async () => (await import("../features/checks/checks.tsx")).Checks);
 const EventTable = lazyPart(async () => (await import("../features/evidence/event-table.tsx")).EventTable);
@@ -114,6 +117,9 @@ function OpenScenario({ project, stored }: { project: Project; stored: StoredSce
             refusal={run.computed && "refusal" in run.computed ? run.computed.refusal : null}
           />
           <UnitSystemChoice />
+          <Suspense>
+            <ScenarioExchange scenario={inForce} dispatch={dispatch} />
+          </Suspense>
         </Section>
         <RunSections key={`run ${units}`} computed={run.computed} view={view} cursor={cursor} isStale={run.isStale} />
       </WorkedPage>
