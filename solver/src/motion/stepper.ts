@@ -124,10 +124,12 @@ export class Stepper {
     }
   }
 
+  /** Both sides over the same stretch, so that a mirrored run costs the same work. */
   private watchShares(): void {
+    const end = this.ending.tau;
     for (const side of [1, -1] as const) {
       this.shareWatch.begin(side);
-      this.look(this.shareWatch, this.inputScale(), "share");
+      this.look(this.shareWatch, this.inputScale(), "share", 0, end);
     }
   }
 

@@ -69,7 +69,8 @@ export class BristleMotion implements Motion {
     const { problem, inputs, store, body, at } = this;
     const { origin, phase, firstStep, lastStep } = this.segments[i];
     if (inputs.origin !== origin) inputs.locate(origin);
-    store.evaluate(store.find(t, firstStep, lastStep), t, at);
+    // a segment that lasts no time has no step of its own
+    store.evaluate(store.find(t, Math.min(firstStep, lastStep), lastStep), t, at);
     const tau = t - origin;
     body.rates(tau, at, this.rates);
     const v = inputs.evaluate(tau);

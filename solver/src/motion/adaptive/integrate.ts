@@ -62,8 +62,10 @@ export function integrate(of: Integration): number {
       (_, xOld, x, __, dense) => {
         if (dense === undefined || x === xOld) return true;
         const stepEnd = x >= end ? to : from + x * unit;
+        const stepStart = from + xOld * unit;
         reached = stepEnd;
-        return of.onStep(from + xOld * unit, stepEnd, (i, t) => dense(i, (t - from) / unit) * sizes[i]);
+        if (!(stepEnd > stepStart)) return true; // shorter than the clock can tell
+        return of.onStep(stepStart, stepEnd, (i, t) => dense(i, (t - from) / unit) * sizes[i]);
       },
     );
   } catch (error) {
