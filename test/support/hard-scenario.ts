@@ -2,24 +2,24 @@ import fc from "fast-check";
 import { checkScenario, type Scenario } from "@restband/solver";
 
 /** Numbers over many decades, so that no scale is favoured. */
-const decades = (low: number, high: number): fc.Arbitrary<number> =>
+export const decades = (low: number, high: number): fc.Arbitrary<number> =>
   fc.double({ min: low, max: high, noNaN: true }).map((exponent) => 10 ** exponent);
 
-const orZero = (value: fc.Arbitrary<number>): fc.Arbitrary<number> => fc.oneof(fc.constant(0), value);
-const signed = (value: fc.Arbitrary<number>): fc.Arbitrary<number> =>
+export const orZero = (value: fc.Arbitrary<number>): fc.Arbitrary<number> => fc.oneof(fc.constant(0), value);
+export const signed = (value: fc.Arbitrary<number>): fc.Arbitrary<number> =>
   fc.tuple(value, fc.boolean()).map(([v, isNegative]) => (isNegative ? -v : v));
 
 /** Forces in units of the static friction, times in natural periods: what makes sticks, grazes and ties likely. */
-interface Scale {
+export interface Scale {
   inertia: number;
   omega: number;
   grip: number;
   stretch: number;
 }
 
-const unit = fc.oneof(fc.constantFrom(0, 1), fc.double({ min: 1e-6, max: 3, noNaN: true }));
+export const unit = fc.oneof(fc.constantFrom(0, 1), fc.double({ min: 1e-6, max: 3, noNaN: true }));
 
-function forceTerm(s: Scale): fc.Arbitrary<object> {
+export function forceTerm(s: Scale): fc.Arbitrary<object> {
   const period = (2 * Math.PI) / s.omega;
   const force = signed(unit).map((u) => u * s.grip);
   const time = unit.map((u) => u * period);
@@ -46,7 +46,7 @@ function forceTerm(s: Scale): fc.Arbitrary<object> {
   );
 }
 
-function baseTerm(s: Scale): fc.Arbitrary<object> {
+export function baseTerm(s: Scale): fc.Arbitrary<object> {
   const period = (2 * Math.PI) / s.omega;
   const travel = signed(unit).map((u) => u * s.stretch);
   const start = unit.map((u) => u * period);
@@ -66,7 +66,7 @@ function baseTerm(s: Scale): fc.Arbitrary<object> {
   );
 }
 
-function solidOf(s: Scale): fc.Arbitrary<object> {
+export function solidOf(s: Scale): fc.Arbitrary<object> {
   return fc.oneof(
     { weight: 3, arbitrary: fc.constant({ model: "none" }) },
     {
@@ -132,12 +132,17 @@ function sketch(s: Scale): fc.Arbitrary<object> {
  * Valid scenarios of the exact method at their hardest: m from 1e-6 to 1e6, four decades of frequency, forces about the
  * static friction, every term, counterface and solid model, damping at and next to critical, no spring.
  */
-export const hardScenario: fc.Arbitrary<Scenario> = fc
-  .record({ inertia: decades(-6, 6), omega: decades(-1, 3), grip: decades(-4, 4) })
-  .map(({ inertia, omega, grip }) => ({ inertia, omega, grip, stretch: grip / (inertia * omega ** 2) }))
-  .chain(sketch)
-  .map((input) => {
-    const { scenario, faults } = checkScenario(input);
-    if (scenario === null) throw new Error(`a drawn scenario is refused: ${JSON.stringify(faults)}`);
-    return scenario;
-  });
+export const hardScenario: fc.Arbitrary<Scenario> = scaled(sketch);
+
+/** Checked scenarios of what is sketched at a drawn scale. */
+export function scaled(draw: (scale: Scale) => fc.Arbitrary<object>): fc.Arbitrary<Scenario> {
+  return fc
+    .record({ inertia: decades(-6, 6), omega: decades(-1, 3), grip: decades(-4, 4) })
+    .map(({ inertia, omega, grip }) => ({ inertia, omega, grip, stretch: grip / (inertia * omega ** 2) }))
+    .chain(draw)
+    .map((input) => {
+      const { scenario, faults } = checkScenario(input);
+      if (scenario === null) throw new Error(`a drawn scenario is refused: ${JSON.stringify(faults)}`);
+      return scenario;
+    });
+}
