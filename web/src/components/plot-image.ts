@@ -21,6 +21,9 @@ export interface PlotSheet {
 
 type SizedLayout = Partial<Layout> & { width: number; height: number };
 
+/** A picture is drawn without the page's own faces: words must be measured in the one they are drawn in. */
+const FACE = "Arial, Helvetica, sans-serif";
+
 /** Above the plot, for the title. */
 const HEAD = 40;
 
@@ -44,7 +47,7 @@ export function sheetLayout({ title, layout, words }: PlotSheet, theme: PlotThem
     xanchor: ({ start: "left", middle: "center", end: "right" } as const)[word.anchor],
     yanchor: "bottom",
     showarrow: false,
-    font: { family: theme.text, size, color: word.colour },
+    font: { family: FACE, size, color: word.colour },
   });
   const head: PlotWord = { text: title, x: 16, y: -HEAD + 30, anchor: "start", colour: theme.ink };
   return {

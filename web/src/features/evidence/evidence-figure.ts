@@ -5,6 +5,7 @@ import { curveOf, type Line } from "./curve.ts";
 import { densified } from "./densified.ts";
 import { axes, layoutOf, type FigureLayout } from "./evidence-layout.ts";
 import type { Frame, PanelFrame } from "./frame.ts";
+import type { Overlay } from "./overlay.ts";
 import { phaseChanges, type RunView } from "./run-view.ts";
 import { driveSpeed } from "./scales.ts";
 import { thinned } from "./thin.ts";
@@ -13,11 +14,17 @@ const MOST_POINTS = 4000;
 const channels = { displacement: "x", velocity: "v", acceleration: "a", friction: "f" } as const;
 
 /** Displacement with its rest band, velocity and friction force over one time axis, as plotly wants it. */
-export function evidenceFigure(view: RunView, frame: Frame, theme: PlotTheme): { data: Data[]; layout: FigureLayout } {
+export function evidenceFigure(
+  view: RunView,
+  frame: Frame,
+  theme: PlotTheme,
+  overlays: readonly Overlay[] = [],
+): { data: Data[]; layout: FigureLayout } {
   const data = frame.panels.flatMap((panel) => [
     ...(panel.key === "displacement" ? bandTraces(view, frame, panel, theme) : []),
     ...(panel.key === "velocity" ? speedTraces(view, frame, panel, theme) : []),
     ...(panel.key === "friction" ? holdTraces(view, frame, panel, theme) : []),
+    ...overlays.flatMap((overlay) => overlayTraces(overlay, frame, panel, theme)),
     ...(panel.key === "drive"
       ? driveTraces(view, frame, panel, theme)
       : curveTraces(view, frame, panel, panel.key, theme)),
@@ -43,6 +50,16 @@ function curveTraces(
   const indices = thinned(samples.t, samples[channel], frame, count, keep);
   const { slip, stick } = curveOf(samples, channel, indices, panel.unit, isDense);
   return [line(panel, slip, { color: theme.slip, width: 2 }), line(panel, stick, { color: theme.stick, width: 3 })];
+}
+
+/** Displacement and velocity of another motion, dashed and quiet: what it is compared with stays in front. */
+function overlayTraces({ samples }: Overlay, frame: Frame, panel: PanelFrame, theme: PlotTheme): Data[] {
+  if (panel.key !== "displacement" && panel.key !== "velocity") return [];
+  const channel = channels[panel.key];
+  const seen = densified(samples, frame);
+  const indices = thinned(seen.t, seen[channel], frame, MOST_POINTS);
+  const { slip } = curveOf(seen, channel, indices, panel.unit, true);
+  return [line(panel, slip, { color: theme.quiet, width: 1.5, dash: "dash" })];
 }
 
 /** The force that drives the body, one line whatever the body does. */

@@ -11,6 +11,7 @@ import { DockedStrip } from "./docked-strip.tsx";
 import { frameOf } from "./frame.ts";
 import { ReadingsRow } from "./gutter.tsx";
 import { LoopSheets } from "./loop-sheets.tsx";
+import { OverlayChoice } from "./overlay-choice.tsx";
 import { PanelChoice } from "./panel-choice.tsx";
 import { PlayButtons } from "./play-buttons.tsx";
 import { phaseWords } from "./readings.ts";
@@ -22,6 +23,7 @@ import { TimeFigure } from "./time-figure.tsx";
 import { usePanels } from "./use-panels.ts";
 import { useSeenPart } from "./use-part.ts";
 import { usePlay } from "./use-play.ts";
+import { useScenarioOverlay } from "./use-scenario-overlay.ts";
 import { ViewChoice } from "./view-choice.tsx";
 
 interface EvidenceProps {
@@ -43,7 +45,12 @@ export function Evidence({ view: newest, t, onMove, isStale }: EvidenceProps) {
   const part = useSeenPart(view.end, t);
   const { range } = part;
   const [panels, togglePanel] = usePanels();
-  const frame = useMemo(() => frameOf(width, range, scalesOf(view, range, panels)), [view, width, range, panels]);
+  const overlay = useScenarioOverlay(view.scenario.motion);
+  const { overlays } = overlay;
+  const frame = useMemo(
+    () => frameOf(width, range, scalesOf(view, range, panels, overlays)),
+    [view, width, range, panels, overlays],
+  );
   const theme = usePlotTheme();
   const moveTo = (next: number): void => {
     onMove(next);
@@ -61,11 +68,14 @@ export function Evidence({ view: newest, t, onMove, isStale }: EvidenceProps) {
         <CursorWords view={view} t={t} />
         <ViewChoice part={part} whole={view.end} last={lastCycles(view)} />
       </div>
-      <PanelChoice hasDrive={view.drive !== null} chosen={panels} onToggle={togglePanel} />
+      <div className="flex flex-wrap items-center gap-x-6">
+        <PanelChoice hasDrive={view.drive !== null} chosen={panels} onToggle={togglePanel} />
+        <OverlayChoice overlay={overlay} />
+      </div>
       {isPhone && <ReadingsRow view={view} frame={frame} t={t} />}
       <div className="border-line bg-raised max-desk:-mx-(--page-pad) max-desk:border-y desk:rounded desk:border">
         <div ref={ref} className="relative">
-          <TimeFigure view={view} frame={frame} t={t} theme={theme}>
+          <TimeFigure view={view} frame={frame} t={t} theme={theme} overlays={overlays}>
             <TimeCursor view={view} frame={frame} t={t} onMove={moveTo} part={part} />
           </TimeFigure>
         </div>

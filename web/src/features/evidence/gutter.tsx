@@ -1,6 +1,7 @@
 import { classNames } from "../../components/class-names.ts";
 import { Figure } from "../../components/figure.tsx";
 import type { Frame } from "./frame.ts";
+import type { Overlay } from "./overlay.ts";
 import { readingsAt, type CursorReading } from "./readings.ts";
 import type { RunView } from "./run-view.ts";
 
@@ -12,9 +13,16 @@ const tones: Record<CursorReading["tone"], string> = {
   stick: "text-stick",
 };
 
+interface GutterProps {
+  view: RunView;
+  frame: Frame;
+  t: number;
+  overlays: readonly Overlay[];
+}
+
 /** The values at the cursor beside their panels, in the colours of their curves. */
-export function Gutter({ view, frame, t }: { view: RunView; frame: Frame; t: number }) {
-  const readings = readingsAt(view, frame, t);
+export function Gutter({ view, frame, t, overlays }: GutterProps) {
+  const readings = readingsAt(view, frame, t, overlays);
   return frame.panels.map(({ key, top }) => (
     <dl key={key} className="absolute" style={{ top: top - 6, left: frame.width - frame.right + 20, right: 8 }}>
       {readings[key].map((reading) => (
@@ -25,7 +33,7 @@ export function Gutter({ view, frame, t }: { view: RunView; frame: Frame; t: num
 }
 
 /** On the phone: the first value of each panel, above the plots. */
-export function ReadingsRow({ view, frame, t }: { view: RunView; frame: Frame; t: number }) {
+export function ReadingsRow({ view, frame, t }: Omit<GutterProps, "overlays">) {
   const readings = readingsAt(view, frame, t);
   return (
     <dl className="mb-3 grid grid-cols-3 gap-3">
@@ -39,7 +47,7 @@ export function ReadingsRow({ view, frame, t }: { view: RunView; frame: Frame; t
 function ReadingItem({ reading, className }: { reading: CursorReading; className?: string }) {
   return (
     <div className={classNames("leading-[1.25]", className)}>
-      <dt className={classNames("text-13 font-semibold", tones[reading.tone])}>{reading.name}</dt>
+      <dt className={classNames("truncate text-13 font-semibold", tones[reading.tone])}>{reading.name}</dt>
       <dd className={classNames("text-18 font-semibold", tones[reading.tone])}>
         <Figure {...reading} />
       </dd>

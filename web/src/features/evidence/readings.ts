@@ -4,6 +4,7 @@ import { readQuantity, say, type Reading } from "../../format/format-quantity.ts
 import { nounOf } from "../../format/noun.ts";
 import type { Unit } from "../../format/unit.ts";
 import type { Frame, PanelKey } from "./frame.ts";
+import { overlayAt, type Overlay } from "./overlay.ts";
 import type { RunView } from "./run-view.ts";
 
 /** A figure at the cursor, in the colour of its curve. */
@@ -13,14 +14,31 @@ export interface CursorReading extends Reading {
 }
 
 /** What stands in the gutter beside each panel: the values at the cursor, exact where an event is. */
-export function readingsAt(view: RunView, frame: Frame, t: number): Record<PanelKey, CursorReading[]> {
+export function readingsAt(
+  view: RunView,
+  frame: Frame,
+  t: number,
+  overlays: readonly Overlay[] = [],
+): Record<PanelKey, CursorReading[]> {
   const here = instantAt(view.samples, t);
   const unitOf = (key: PanelKey): Unit | undefined => frame.panels.find((panel) => panel.key === key)?.unit;
+  const others = (channel: "x" | "v", key: "displacement" | "velocity"): CursorReading[] =>
+    overlays.flatMap((overlay) => {
+      const there = overlayAt(overlay, t);
+      return there ? [reading(view, overlay.label, there[channel], key, "quiet", { unit: unitOf(key) })] : [];
+    });
   return {
-    displacement: displacementReadings(view, here, unitOf("displacement")),
+    displacement: [
+      // The band is drawn: beside the panel it makes room for what is compared.
+      ...displacementReadings(view, here, unitOf("displacement")).filter(
+        ({ tone }) => tone !== "band" || overlays.length === 0,
+      ),
+      ...others("x", "displacement"),
+    ],
     velocity: [
       reading(view, "velocity", here.v, "velocity", "slip", { unit: unitOf("velocity") }),
       ...(unitOf("acceleration") ? [] : [reading(view, "acceleration", here.a, "acceleration", "ink")]),
+      ...others("v", "velocity"),
     ],
     acceleration: [reading(view, "acceleration", here.a, "acceleration", "slip", { unit: unitOf("acceleration") })],
     friction: frictionReadings(view, here, unitOf("friction")),

@@ -14,7 +14,7 @@ export function SavePlot({ name, sheet, theme }: SavePlotProps) {
   const save = (format: "png" | "svg"): void =>
     void savePlot(sheet(), format, theme).catch(() => announce("The plot could not be drawn as a file."));
   return (
-    <span className="text-13 text-quiet">
+    <span className="text-13 font-normal text-quiet">
       save as{" "}
       <button type="button" className="link hit" aria-label={`Save ${name} as PNG`} onClick={() => save("png")}>
         PNG

@@ -3,6 +3,7 @@ import { ahead, indexAt } from "../../compute/instant.ts";
 import type { Measure } from "../../format/unit.ts";
 import { unitFor } from "../../format/units.ts";
 import { padded, type ExtraPanel, type PanelKey, type PanelScale } from "./frame.ts";
+import type { Overlay } from "./overlay.ts";
 import type { RunView } from "./run-view.ts";
 
 interface Range {
@@ -11,12 +12,27 @@ interface Range {
 }
 
 /** The panels' ranges and units for a part of a run, from top to bottom; `extras` are those asked for beside the usual three. */
-export function scalesOf(view: RunView, range: Range, extras: readonly ExtraPanel[] = []): PanelScale[] {
+export function scalesOf(
+  view: RunView,
+  range: Range,
+  extras: readonly ExtraPanel[] = [],
+  overlays: readonly Overlay[] = [],
+): PanelScale[] {
   const { samples, scenario } = view;
   const measure = (dimension: Measure["dimension"]): Measure => ({ dimension, motion: scenario.motion });
+  const others = (channel: "x" | "v"): number[] =>
+    overlays.flatMap((overlay) => extremesOf(overlay.samples, channel, range));
   return [
-    scale("displacement", [...extremesOf(samples, "x", range), ...bandEdges(view, range)], measure("displacement")),
-    scale("velocity", [0, ...extremesOf(samples, "v", range), ...driveSpeed(view)], measure("velocity")),
+    scale(
+      "displacement",
+      [...extremesOf(samples, "x", range), ...others("x"), ...bandEdges(view, range)],
+      measure("displacement"),
+    ),
+    scale(
+      "velocity",
+      [0, ...extremesOf(samples, "v", range), ...others("v"), ...driveSpeed(view)],
+      measure("velocity"),
+    ),
     ...(extras.includes("acceleration")
       ? [scale("acceleration", [0, ...extremesOf(samples, "a", range)], measure("acceleration"))]
       : []),

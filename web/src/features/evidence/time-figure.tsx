@@ -5,8 +5,9 @@ import type { PlotSheet } from "../../components/plot-image.ts";
 import type { PlotTheme } from "../../components/plot-theme.ts";
 import type { Motion } from "../../format/unit.ts";
 import { evidenceFigure } from "./evidence-figure.ts";
-import { xOf, type Frame, type PanelKey } from "./frame.ts";
+import { xOf, yOf, type Frame, type PanelKey } from "./frame.ts";
 import { Gutter } from "./gutter.tsx";
+import { overlayAt, type Overlay } from "./overlay.ts";
 import { figureWords, stripWords } from "./plot-words.ts";
 import type { RunView } from "./run-view.ts";
 import { SavePlot } from "./save-plot.tsx";
@@ -16,21 +17,24 @@ interface TimeFigureProps {
   frame: Frame;
   t: number;
   theme: PlotTheme;
+  /** Other motions, drawn behind this one. */
+  overlays: readonly Overlay[];
   /** The cursor, over all panels. */
   children: ReactNode;
 }
 
 /** The motion strip and the panels over one time axis, with what is read at the cursor. */
-export function TimeFigure({ view, frame, t, theme, children }: TimeFigureProps) {
-  const { data, layout } = useMemo(() => evidenceFigure(view, frame, theme), [view, frame, theme]);
+export function TimeFigure({ view, frame, t, theme, overlays, children }: TimeFigureProps) {
+  const { data, layout } = useMemo(() => evidenceFigure(view, frame, theme, overlays), [view, frame, theme, overlays]);
   return (
     <>
       <StripRow view={view} frame={frame} t={t} />
       <div className="relative">
         <Plot data={data} layout={layout} label={figureWords(view, frame)} />
         <Heads frame={frame} motion={view.scenario.motion} />
+        <OverlayLabels frame={frame} overlays={overlays} />
         {children}
-        {frame.right > 100 && <Gutter view={view} frame={frame} t={t} />}
+        {frame.right > 100 && <Gutter view={view} frame={frame} t={t} overlays={overlays} />}
       </div>
       <p className="absolute bottom-0 left-4">
         <SavePlot
@@ -41,6 +45,26 @@ export function TimeFigure({ view, frame, t, theme, children }: TimeFigureProps)
       </p>
     </>
   );
+}
+
+/** The name of each other motion at its line, at four fifths of what is seen, or at its end. */
+function OverlayLabels({ frame, overlays }: { frame: Frame; overlays: readonly Overlay[] }) {
+  const panel = frame.panels.find(({ key }) => key === "displacement");
+  const wanted = frame.from + 0.8 * (frame.to - frame.from);
+  return overlays.map((overlay) => {
+    const t = Math.min(wanted, overlay.samples.t[overlay.samples.t.length - 1]);
+    const there = overlayAt(overlay, t);
+    if (!panel || !there || t < frame.from) return null;
+    return (
+      <p
+        key={overlay.key}
+        className="pointer-events-none absolute max-w-56 -translate-x-1/2 truncate bg-raised px-1 text-13 text-quiet"
+        style={{ left: xOf(frame, t), top: yOf(panel, there.x) + 12 }}
+      >
+        {overlay.label}
+      </p>
+    );
+  });
 }
 
 /** What a file of the panels says beside their lines. */
