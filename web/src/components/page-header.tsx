@@ -45,7 +45,10 @@ export function PageHeader({ home, trail = [], title, state, actions, person }: 
         </Link>
         {title !== undefined && <Whereabouts trail={trail} title={title} isPhone={isPhone} />}
         {state && (
-          <span role="status" className="min-w-0 truncate text-13 text-quiet">
+          <span
+            role="status"
+            className="min-w-0 text-13 text-quiet max-desk:line-clamp-3 max-desk:max-w-[45%] max-desk:shrink-0 max-desk:leading-[1.2] desk:truncate"
+          >
             {state}
           </span>
         )}
