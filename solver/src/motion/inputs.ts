@@ -48,6 +48,8 @@ export class Inputs {
   readonly forceSize: Float64Array;
   readonly baseSize: Float64Array;
   readonly normal: number;
+  /** True where nothing ever moves the base. */
+  readonly isBaseStill: boolean;
   /** False while the ripple of N has let the contact go: N then reads 0. */
   isInContact = true;
   rippleOmega = 0;
@@ -68,6 +70,8 @@ export class Inputs {
   };
 
   private readonly problem: Problem;
+  /** The τ that `values` are of. */
+  private at = NaN;
   /** Parts of the force that are neither polynomial nor harmonic, and those acting at the origin. */
   private readonly smooth: readonly SmoothPart[];
   private acting: readonly SmoothPart[] = [];
@@ -76,6 +80,7 @@ export class Inputs {
   constructor(problem: Problem) {
     this.problem = problem;
     this.normal = problem.normal;
+    this.isBaseStill = problem.base.length === 0;
     this.smooth = problem.force.flatMap((term) => (term.smooth === undefined ? [] : [term.smooth]));
     const room = harmonicsPerTerm * (problem.force.length + problem.base.length);
     this.omega = new Float64Array(room);
@@ -91,6 +96,7 @@ export class Inputs {
   locate(t: number): void {
     const { problem } = this;
     this.origin = t;
+    this.at = NaN;
     this.force.fill(0);
     this.base.fill(0);
     this.acceleration.fill(0);
@@ -118,6 +124,8 @@ export class Inputs {
   /** Fills `values` at τ = t − origin. */
   evaluate(tau: number): InputValues {
     const { values: v, force: p, base: y, acceleration: a } = this;
+    if (tau === this.at) return v;
+    this.at = tau;
     v.force = p[0] + tau * (p[1] + tau * (p[2] + tau * p[3]));
     v.forceRate = p[1] + tau * (2 * p[2] + tau * 3 * p[3]);
     v.forceSecond = 2 * p[2] + tau * 6 * p[3];

@@ -4,7 +4,7 @@ import type { Problem } from "../../scenario/problem.ts";
 import type { Inputs } from "../inputs.ts";
 import { slidingFriction } from "../sliding-friction.ts";
 import type { BodyValues, Cause, Ending, Slip, SlipWatches } from "../slip.ts";
-import { newStance, type Stance } from "../stance.ts";
+import { copyStance, newStance, type Stance } from "../stance.ts";
 import { integrate } from "./integrate.ts";
 import { StepStore } from "./step-store.ts";
 
@@ -44,7 +44,7 @@ export class IntegratedSlip implements Slip {
   ) {}
 
   begin(_: Inputs, body: BodyValues, stance: Stance): void {
-    Object.assign(this.stance, stance);
+    copyStance(stance, this.stance);
     this.body = { ...body };
     const i = this.lastStartedAt(stance.t);
     this.first = 0;

@@ -2,7 +2,7 @@ import { firstZero, type Watched, type Work } from "../../numerics/first-zero.ts
 import type { Problem } from "../../scenario/problem.ts";
 import type { Inputs } from "../inputs.ts";
 import type { BodyValues, Cause, Ending, Slip, SlipWatches } from "../slip.ts";
-import { newStance, type Stance } from "../stance.ts";
+import { copyStance, newStance, type Stance } from "../stance.ts";
 import { Oscillation } from "./oscillation.ts";
 import { SlipWatch, StretchRateWatch, StretchWatch } from "./slip-watch.ts";
 
@@ -44,27 +44,28 @@ export class ExactSlip implements Slip {
   }
 
   begin(inputs: Inputs, body: BodyValues, stance: Stance): void {
-    Object.assign(this.stance, stance);
+    copyStance(stance, this.stance);
     this.oscillation.begin(inputs, body, inputs.isInContact ? stance.contact * this.slide : 0, stance);
   }
 
   follow(ending: Ending, watches: SlipWatches, blur: number, work: Work): void {
     const { stance } = this;
-    const look = (watched: Watched, cause: Cause): void => {
-      const tau = firstZero(watched, 0, ending.tau, this.scale, work, blur);
-      if (!(tau <= ending.tau)) return;
-      ending.tau = tau;
-      ending.cause = cause;
-    };
     this.slipWatch.sign = stance.contact;
-    look(this.slipWatch, "contact");
+    this.look(this.slipWatch, "contact", ending, blur, work);
     if (watches.side) {
       this.stretchWatch.sign = stance.side;
-      look(this.stretchWatch, "side");
+      this.look(this.stretchWatch, "side", ending, blur, work);
     }
     if (!watches.element) return;
     this.stretchRateWatch.sign = stance.spring;
-    look(this.stretchRateWatch, "element");
+    this.look(this.stretchRateWatch, "element", ending, blur, work);
+  }
+
+  private look(watched: Watched, cause: Cause, ending: Ending, blur: number, work: Work): void {
+    const tau = firstZero(watched, 0, ending.tau, this.scale, work, blur);
+    if (!(tau <= ending.tau)) return;
+    ending.tau = tau;
+    ending.cause = cause;
   }
 
   evaluate(tau: number): void {
@@ -72,18 +73,18 @@ export class ExactSlip implements Slip {
   }
 
   panel(tau: number): number {
-    const { fast, slow, fastDies } = this.oscillation.freeRates;
+    const { fast, slow, fastDies } = this.oscillation;
     const rate = Math.max(this.inputs.fastest(), tau < fastDies ? fast : slow);
     return rate > 0 ? 1 / rate : Infinity;
   }
 
   isSteady(tau: number): boolean {
-    const { slow, fastDies } = this.oscillation.freeRates;
+    const { slow, fastDies } = this.oscillation;
     return tau >= fastDies && slow === 0;
   }
 
   private get scale(): number {
-    const rate = Math.max(this.oscillation.freeRates.fast, this.inputs.fastest());
+    const rate = Math.max(this.oscillation.fast, this.inputs.fastest());
     return rate > 0 ? 2 / rate : Infinity;
   }
 }

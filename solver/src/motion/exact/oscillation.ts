@@ -31,6 +31,14 @@ export class Oscillation {
   /** What rounding may have done to `velocity` (or `slip`): ulps of the sum of its terms' magnitudes, m/s. */
   noise = 0;
 
+  /** The fastest and slowest rate of the free motion, 1/s, and the time after which its fast part has died away. */
+  fast = 0;
+  slow = 0;
+  fastDies = Infinity;
+
+  /** The τ at which `evaluate` and `evaluateSlip` were last asked: asking again costs nothing. */
+  private at = NaN;
+  private slipAt = NaN;
   /** K/m = ω₀². */
   squared = 0;
   private sigma = 0;
@@ -96,10 +104,13 @@ export class Oscillation {
     push[3] = 6 * (force[3] / inertia - base[3]);
     this.takeHarmonics(inputs, inertia, slide);
     const isOnBase = this.carrier === "base";
-    this.series.begin(inputs, body, slide, stance, isOnBase);
-    if (!Number.isNaN(stance.acceleration)) push[0] += this.knownAcceleration(stance) - this.startAcceleration();
     const fastest = Math.max(2 * this.sigma, Math.sqrt(this.squared), inputs.fastest());
     this.seriesReach = fastest > 0 ? 1 / fastest : Infinity;
+    this.series.begin(inputs, body, slide, stance, isOnBase, this.seriesReach);
+    this.takeRates();
+    this.at = NaN;
+    this.slipAt = NaN;
+    if (!Number.isNaN(stance.acceleration)) push[0] += this.knownAcceleration(stance) - this.startAcceleration();
   }
 
   /** d̈ at the start, from v̇_r known exactly. */
@@ -114,18 +125,17 @@ export class Oscillation {
     return sum - 2 * this.sigma * this.startVelocity;
   }
 
-  /** The fastest rate of the free motion, 1/s, and the time after which its fast part has died away (Infinity: never). */
-  get freeRates(): { fast: number; slow: number; fastDies: number } {
+  private takeRates(): void {
     const q = this.chain.discriminant;
-    if (q <= 0) {
-      const natural = Math.sqrt(this.squared);
-      return { fast: natural, slow: 0, fastDies: this.sigma > 0 ? 40 / this.sigma : Infinity };
-    }
-    const fast = this.sigma + Math.sqrt(q);
-    return { fast, slow: this.squared / fast, fastDies: 40 / fast };
+    this.fast = q <= 0 ? Math.sqrt(this.squared) : this.sigma + Math.sqrt(q);
+    this.slow = q <= 0 ? 0 : this.squared / this.fast;
+    this.fastDies = q > 0 ? 40 / this.fast : this.sigma > 0 ? 40 / this.sigma : Infinity;
   }
 
   evaluate(tau: number): void {
+    if (tau === this.at && tau !== this.slipAt) return; // after evaluateSlip the noise is that of v_r
+    this.at = tau;
+    this.slipAt = NaN;
     if (tau > this.seriesReach) return this.evaluateClosed(tau);
     const { series } = this;
     series.evaluate(tau);
@@ -139,7 +149,9 @@ export class Oscillation {
 
   /** As `evaluate`, and v_r with its derivatives. */
   evaluateSlip(tau: number): void {
+    if (tau === this.slipAt) return;
     this.evaluate(tau);
+    this.slipAt = tau;
     if (this.carrier === "base") {
       this.slip = this.velocity;
       this.slipRate = this.acceleration;
@@ -150,6 +162,11 @@ export class Oscillation {
       this.slipRate = this.series.slipRate;
       this.slipSecond = this.series.slipSecond;
       this.noise = this.series.noise;
+    } else if (this.inputs.isBaseStill) {
+      this.slip = this.velocity - this.beltVelocity;
+      this.slipRate = this.acceleration;
+      this.slipSecond = this.jerk;
+      this.noise += 4 * unitRoundoff * Math.abs(this.beltVelocity);
     } else {
       const v = this.inputs.evaluate(tau);
       this.slip = this.velocity + v.baseVelocity - this.beltVelocity;
