@@ -47,7 +47,7 @@ export function PageHeader({ home, trail = [], title, state, actions, person }: 
         {state && (
           <span
             role="status"
-            className="min-w-0 text-13 text-quiet max-desk:line-clamp-3 max-desk:max-w-[45%] max-desk:shrink-0 max-desk:leading-[1.2] desk:truncate"
+            className="min-w-0 text-13 text-quiet max-desk:line-clamp-3 max-desk:max-w-[34%] max-desk:shrink-0 max-desk:leading-[1.2] desk:truncate"
           >
             {state}
           </span>

@@ -31,7 +31,7 @@ export function ScenarioExchange({ scenario, dispatch }: ScenarioExchangeProps) 
     announce(`“${taken.title || "Untitled"}” is taken.`, () => dispatch({ type: "undo" }));
   };
   return (
-    <div className="mt-3 flex flex-wrap gap-x-4 gap-y-1 text-13 text-quiet">
+    <div className="mt-3 flex flex-wrap items-center gap-x-4 gap-y-1 text-13 text-quiet">
       This scenario as JSON:
       <button type="button" className="link hit" onClick={copy}>
         copy
