@@ -63,6 +63,22 @@ describe("the loops", () => {
     }
   });
 
+  it("leave a word out rather than write it over another", () => {
+    const braked = viewOf(
+      solved({
+        body: { inertia: 1, stiffness: 0 },
+        contact: coulombForces(1, 1.1),
+        initial: { velocity: 1 },
+        span: { seconds: 5 },
+      }),
+    );
+    const whole = loopPart(braked, { from: 0, to: braked.end });
+    const labels = loopLabels(braked, whole, loopFrames(braked, whole)[1], { width: 300, height: 340 });
+    expect(labels.map(({ text }) => text.replace("\u00a0", " "))).toEqual(["holds up to 1.1 N", "stuck"]);
+    for (const { text, x, anchor } of labels)
+      if (anchor === "start") expect(x + 7 * text.length).toBeLessThanOrEqual(296);
+  });
+
   it("put a value where the plot has it", () => {
     expect(acrossOf(part.across, part.across.low, size)).toBe(64);
     expect(acrossOf(part.across, part.across.high, size)).toBe(size.width - 24);

@@ -7,11 +7,13 @@ import { overlayAt, type Overlay } from "../../../web/src/features/evidence/over
 import { readingsAt } from "../../../web/src/features/evidence/readings.ts";
 import { runViewOf, type RunView } from "../../../web/src/features/evidence/run-view.ts";
 import { scalesOf } from "../../../web/src/features/evidence/scales.ts";
-import { creepFeed, solved, variant } from "../support/scenarios.ts";
+import { creepFeed, solved } from "../support/scenarios.ts";
 
 const viewOf = (run: ReturnType<typeof solved>): RunView => runViewOf(run.scenario, run.result) as RunView;
 const feed = viewOf(solved(creepFeed));
-const faster = viewOf(solved(variant({ base: [{ kind: "ramp", rate: 0.01 }] })));
+const faster = viewOf(
+  solved({ ...creepFeed, base: creepFeed.base.map((term) => (term.kind === "ramp" ? { ...term, rate: 0.01 } : term)) }),
+);
 const overlay: Overlay = { key: "faster", label: "Faster feed", samples: faster.samples };
 const range = { from: 0, to: feed.end };
 const frame = frameOf(1160, range, scalesOf(feed, range, [], [overlay]));

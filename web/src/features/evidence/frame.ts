@@ -40,7 +40,7 @@ const heights: Record<PanelKey, number> = {
 };
 /** Above each panel: its unit stands there. */
 const HEAD = 34;
-const FOOT = 44;
+const FOOT = 58;
 
 /** Lays the panels out. A narrow figure has no gutter: readings then stand above it. */
 export function frameOf(width: number, range: { from: number; to: number }, scales: readonly PanelScale[]): Frame {

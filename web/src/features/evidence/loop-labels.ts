@@ -44,7 +44,33 @@ export function loopLabels(view: RunView, part: LoopPart, frame: LoopFrame, size
       : holdLevels(view, part, frame).map((force) =>
           level(`holds up to ${say(Math.abs(force), frame.upright.measure, { digits: 4 })}`, force, "stick"),
         );
-  return [...levels, ...stretchLabels(part, frame, size)];
+  return apart([...levels, ...stretchLabels(part, frame, size)], size);
+}
+
+/** About the width of a letter and the height of a line, px. */
+const LETTER = 7;
+const LINE = 16;
+
+/** Each label within the sheet; of two that would lie over each other the first stays. */
+function apart(labels: readonly LoopLabel[], { width }: Size): LoopLabel[] {
+  const kept: LoopLabel[] = [];
+  for (const label of labels) {
+    const beyond = Math.max(0, endsOf(label)[1] - (width - 4));
+    const inside = { ...label, x: label.x - beyond };
+    if (!kept.some((other) => isOver(other, inside))) kept.push(inside);
+  }
+  return kept;
+}
+
+function isOver(one: LoopLabel, other: LoopLabel): boolean {
+  const [[from, to], [start, end]] = [endsOf(one), endsOf(other)];
+  return Math.abs(one.y - other.y) < LINE && from < end && start < to;
+}
+
+function endsOf({ text, x, anchor }: LoopLabel): [number, number] {
+  const wide = LETTER * text.length;
+  const left = x - { start: 0, middle: wide / 2, end: wide }[anchor];
+  return [left, left + wide];
 }
 
 /** Where the words stand along the longest slip and stick, and px from the line there. */

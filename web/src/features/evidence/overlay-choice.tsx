@@ -5,7 +5,12 @@ import type { ScenarioOverlay } from "./use-scenario-overlay.ts";
 /** Which other scenario is drawn over this one. */
 export function OverlayChoice({ overlay }: { overlay: ScenarioOverlay }) {
   const { isOpen, open, others, chosen, choose, trouble } = overlay;
-  if (!isOpen) return <Option label="overlay a scenario" onChoose={open} />;
+  if (!isOpen)
+    return (
+      <span className="text-13">
+        <Option label="overlay a scenario" onChoose={open} />
+      </span>
+    );
   return (
     <span className="flex flex-wrap items-center gap-x-2 text-13">
       <span className="text-quiet">overlay</span>
