@@ -54,7 +54,8 @@ function OpenScenario({ project, stored }: { project: Project; stored: StoredSce
   const { id: accountId } = useAccount();
   // What is worked out once for a run is worked out anew for other units.
   const units = useUnitSystem();
-  const canEdit = mayEdit(project.role);
+  const isArchived = project.archivedAt !== null;
+  const canEdit = mayEdit(project.role) && !isArchived;
   const { draft, dispatch, saving, base, decide } = useDraft({ stored, accountId, canEdit });
   const { inForce, faults } = draft;
   const samples = samplesFor(inForce);
@@ -89,7 +90,7 @@ function OpenScenario({ project, stored }: { project: Project; stored: StoredSce
       <WorkHeader
         trail={[{ label: project.name, to: paths.project(project.id) }]}
         title={title}
-        state={savedWords({ saving, canEdit, role: project.role, isTrying, faults: faults.length })}
+        state={savedWords({ saving, canEdit, role: project.role, isArchived, isTrying, faults: faults.length })}
         actions={<UndoButtons draft={draft} dispatch={dispatch} />}
       />
       <WorkedPage className="max-desk:pb-40">
