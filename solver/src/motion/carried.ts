@@ -39,6 +39,8 @@ export class Carried {
   private start = 0;
   private beltVelocity = 0;
   private startBase = 0;
+  /** The τ last asked: asking again costs nothing. */
+  private at = NaN;
 
   begin(
     inputs: Inputs,
@@ -60,10 +62,13 @@ export class Carried {
     this.constant = friction.constant;
     this.start = position;
     this.startBase = inputs.evaluate(0).base;
+    this.at = NaN;
   }
 
   evaluate(tau: number): void {
-    const v = this.inputs.evaluate(tau);
+    const v = this.inputs.evaluate(tau); // first: what reads the inputs after this finds them at τ
+    if (tau === this.at) return;
+    this.at = tau;
     const isOnBase = this.carrier === "base";
     this.carrierVelocity = isOnBase ? v.baseVelocity : this.beltVelocity;
     this.carrierAcceleration = isOnBase ? v.baseAcceleration : 0;

@@ -226,6 +226,7 @@ export class Inputs {
     v.force += force;
     v.forceRate -= w * (this.forceRe[i] * s + this.forceIm[i] * c);
     v.forceSecond -= w2 * force;
+    if (this.baseSize[i] === 0) return;
     const base = this.baseRe[i] * c - this.baseIm[i] * s;
     const quadrature = this.baseRe[i] * s + this.baseIm[i] * c;
     v.base += base;

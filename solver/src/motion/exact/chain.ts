@@ -25,26 +25,31 @@ export class Chain {
   private readonly phi1 = new Float64Array(5);
   private readonly phi2 = new Float64Array(5);
 
+  /** ω₀, and ω_d (0 unless underdamped), 1/s. */
+  private natural = 0;
+  damped = 0;
   /** q = σ² − ω₀²; its sign tells over- from underdamped. */
   discriminant = 0;
 
   set(sigma: number, squared: number): void {
     this.sigma = sigma;
     this.squared = squared;
-    const natural = Math.sqrt(squared);
-    this.discriminant = (sigma - natural) * (sigma + natural);
+    this.natural = Math.sqrt(squared);
+    this.discriminant = (sigma - this.natural) * (sigma + this.natural);
+    this.damped = Math.sqrt(Math.max(0, -this.discriminant));
   }
 
   /** Largest |λ|, 1/s. */
   get fastest(): number {
-    return this.discriminant > 0 ? this.sigma + Math.sqrt(this.discriminant) : Math.sqrt(this.squared);
+    return this.discriminant > 0 ? this.sigma + Math.sqrt(this.discriminant) : this.natural;
   }
 
-  evaluate(tau: number): void {
-    const { sigma, squared, discriminant } = this;
-    if (Math.max(2 * sigma, Math.sqrt(squared)) * tau <= 1) return this.bySeries(tau);
+  /** @param depth how many of the integrals are asked for, at least 1; the others may be left as they were */
+  evaluate(tau: number, depth = 4): void {
+    const { sigma, natural, discriminant } = this;
+    if (Math.max(2 * sigma, natural) * tau <= 1) return this.bySeries(tau);
     if (Math.abs(discriminant) * tau * tau <= 0.01) return this.nearCritical(tau);
-    if (discriminant < 0) return this.underdamped(tau);
+    if (discriminant < 0) return this.underdamped(tau, depth);
     this.overdamped(tau);
   }
 
@@ -86,22 +91,23 @@ export class Chain {
     const sinh = 1 + (z / 6) * (1 + (z / 20) * (1 + (z / 42) * (1 + z / 72)));
     this.impulse = decay * tau * sinh;
     this.rate = decay * (cosh - this.sigma * tau * sinh);
-    this.integrate(tau);
+    this.integrate(tau, 4);
   }
 
-  private underdamped(tau: number): void {
-    const damped = Math.sqrt(-this.discriminant);
-    const decay = Math.exp(-this.sigma * tau);
+  private underdamped(tau: number, depth: number): void {
+    const { damped, sigma } = this;
+    const decay = sigma > 0 ? Math.exp(-sigma * tau) : 1;
     const sine = Math.sin(damped * tau) / damped;
     this.impulse = decay * sine;
-    this.rate = decay * (Math.cos(damped * tau) - this.sigma * sine);
-    this.integrate(tau);
+    this.rate = decay * (Math.cos(damped * tau) - sigma * sine);
+    this.integrate(tau, depth);
   }
 
   /** The integrals from the equation: its own (j + 1)-fold integral solved for the last term. */
-  private integrate(tau: number): void {
+  private integrate(tau: number, depth: number): void {
     const { sigma, squared, integrals } = this;
     integrals[0] = (1 - this.rate - 2 * sigma * this.impulse) / squared;
+    if (depth === 1) return;
     integrals[1] = (tau - this.impulse - 2 * sigma * integrals[0]) / squared;
     integrals[2] = ((tau * tau) / 2 - integrals[0] - 2 * sigma * integrals[1]) / squared;
     integrals[3] = ((tau * tau * tau) / 6 - integrals[1] - 2 * sigma * integrals[2]) / squared;

@@ -49,6 +49,8 @@ export class Oscillation {
   private readonly chain = new Chain();
   /** A_j, so that the polynomial part is Σ A_j τ^j/j!, m/s². */
   private readonly push = new Float64Array(4);
+  /** True where only A₀ acts, so that of the chain's integrals one is enough. */
+  private isPushSteady = true;
   private count = 0;
   private readonly omega: Float64Array;
   private readonly re: Float64Array;
@@ -102,6 +104,7 @@ export class Oscillation {
     push[1] = force[1] / inertia - base[1];
     push[2] = 2 * (force[2] / inertia - base[2]);
     push[3] = 6 * (force[3] / inertia - base[3]);
+    this.isPushSteady = push[1] === 0 && push[2] === 0 && push[3] === 0;
     this.takeHarmonics(inputs, inertia, slide);
     const isOnBase = this.carrier === "base";
     const fastest = Math.max(2 * this.sigma, Math.sqrt(this.squared), inputs.fastest());
@@ -213,7 +216,7 @@ export class Oscillation {
     this.secondForcing += amplitude * omega * omega;
     this.thirdForcing += amplitude * omega * omega * omega;
     const { sigma, squared } = this;
-    const damped = Math.sqrt(Math.max(0, -this.chain.discriminant));
+    const { damped } = this.chain;
     this.isResonant[i] = damped > 0 && sigma * sigma + (omega - damped) ** 2 < 0.0025 * squared ? 1 : 0;
     if (this.isResonant[i]) {
       this.particularRe[i] = this.particularIm[i] = 0;
@@ -235,18 +238,22 @@ export class Oscillation {
 
   private evaluateClosed(tau: number): void {
     const { chain, push, sigma, squared } = this;
-    chain.evaluate(tau);
+    chain.evaluate(tau, this.isPushSteady ? 1 : 4);
     const { rate, impulse, integrals } = chain;
+    const steady = integrals[0];
     const free = this.startVelocity - this.sumRate;
     const fromRest = rate + 2 * sigma * impulse;
     const push0 = push[0] + this.sumRe * squared;
     let position = free * impulse - this.sumRe * fromRest;
-    position += push[0] * integrals[0] + push[1] * integrals[1] + push[2] * integrals[2] + push[3] * integrals[3];
     let velocity = free * rate + push0 * impulse;
-    velocity += push[1] * integrals[0] + push[2] * integrals[1] + push[3] * integrals[2];
     // by derivative, not from the equation: a free motion that has died away must not leave the forces' rounding behind
     let acceleration = push0 * rate - free * (2 * sigma * rate + squared * impulse);
-    acceleration += push[1] * impulse + push[2] * integrals[0] + push[3] * integrals[1];
+    if (this.isPushSteady) position += push[0] * steady;
+    else {
+      position += push[0] * steady + push[1] * integrals[1] + push[2] * integrals[2] + push[3] * integrals[3];
+      velocity += push[1] * steady + push[2] * integrals[1] + push[3] * integrals[2];
+      acceleration += push[1] * impulse + push[2] * steady + push[3] * integrals[1];
+    }
     let forcingRate = push[1] + tau * (push[2] + (tau * push[3]) / 2);
     let forcingSecond = push[2] + tau * push[3];
     for (let i = 0; i < this.count; i++) {
@@ -277,7 +284,7 @@ export class Oscillation {
       unitRoundoff *
       (Math.abs(free * rate) +
         Math.abs(push[0] * impulse) +
-        Math.abs(push[1] * integrals[0]) +
+        Math.abs(push[1] * steady) +
         this.magnitude +
         Math.abs(this.sumRe * squared * impulse) +
         Math.abs(velocity));
@@ -286,7 +293,7 @@ export class Oscillation {
   /** The response from rest to a harmonic next to resonance: Im-free form of exp[λ, λ̄, iΩ]τ, see the class comment. */
   private respondResonant(i: number, tau: number, c: number, s: number): void {
     const w = this.omega[i];
-    const damped = Math.sqrt(-this.chain.discriminant);
+    const { damped } = this.chain;
     const decay = Math.exp(-this.sigma * tau);
     const lc = decay * Math.cos(damped * tau);
     const ls = decay * Math.sin(damped * tau);
