@@ -8,6 +8,7 @@ export { fieldPaths } from "./scenario/field-paths.ts";
 export * from "./scenario/fields.ts";
 export type { Problem } from "./scenario/problem.ts";
 export { quantityNames, type QuantityName } from "./scenario/quantity-names.ts";
+export { movedInputs } from "./scenario/moved-inputs.ts";
 export { needsAdaptive } from "./scenario/needs-adaptive.ts";
 export { unsupported } from "./scenario/unsupported.ts";
 
