@@ -3,7 +3,6 @@ import { cpus, loadavg, tmpdir } from "node:os";
 import { join } from "node:path";
 import { fileURLToPath } from "node:url";
 import { allocationOf, median, timeOf } from "./measure.ts";
-import { firstScripts } from "./page.ts";
 import { floorAcceleration } from "./problems.ts";
 import { subjects, waysOf, type Tally } from "./subjects.ts";
 import { inC, inSciPy, type Yardstick } from "./yardsticks.ts";
@@ -86,11 +85,10 @@ function report(rows: readonly Row[], yardsticks: readonly Yardstick[]): void {
     ...yardsticks.flatMap((one) => ("absent" in one ? [`${one.name}: ${one.absent}`] : [])),
     "CVODE: no yardstick written yet",
   ];
-  const page = firstScripts(join(root, "web/dist"));
   const machine = { model, cores: cpus().length, node: process.version, load: loadavg()[0], rounds };
   const file = join(root, ".local/bench.json");
   mkdirSync(join(root, ".local"), { recursive: true });
-  writeFileSync(file, JSON.stringify({ machine, rows, absent, page }, null, 2));
+  writeFileSync(file, JSON.stringify({ machine, rows, absent }, null, 2));
   console.log(
     `${model}, ${machine.cores} cores, Node ${machine.node}, load ${machine.load.toFixed(1)}, median of ${rounds}`,
   );
@@ -99,9 +97,6 @@ function report(rows: readonly Row[], yardsticks: readonly Yardstick[]): void {
     for (const row of rows.filter(({ problem }) => problem === name)) console.log(lineOf(row));
   }
   console.log(`\n${absent.join("\n")}`);
-  console.log(
-    page ? `scripts before first paint: ${page.gzipKB.toFixed(1)} kB gzip, ${page.files} files` : "page: not built",
-  );
   console.log("all of it in .local/bench.json");
 }
 
