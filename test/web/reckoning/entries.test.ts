@@ -48,7 +48,7 @@ describe("entries", () => {
     ["0", "Enter more than 0\u00a0mm."],
     ["-4", "Enter more than 0\u00a0mm."],
     ["thick", "“thick” is not a number."],
-    ["20 N", "“N” is not a unit that fits here. Among those that fit: mm, μm, nm, m, in."],
+    ["20 N", "“N” is not a unit that fits here. Among those that fit: mm, μm, nm, m, in, μin, mil."],
   ])("of %j say what is asked", (text, message) => {
     const { values, faults } = readEntries(screw, { ...filled, diameter: { text, unit: "mm" } });
     expect(values).toBeNull();
