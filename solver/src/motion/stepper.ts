@@ -128,7 +128,7 @@ export class Stepper {
   private watchShares(): void {
     const end = this.ending.tau;
     for (const side of [1, -1] as const) {
-      this.shareWatch.begin(side);
+      this.shareWatch.begin(side, this.blur);
       this.look(this.shareWatch, this.inputScale(), "share", 0, end);
     }
   }

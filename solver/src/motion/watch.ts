@@ -68,12 +68,15 @@ export class ShareWatch extends Watch {
     return this.carried.thirdBound(reach);
   }
 
-  /** Looks for the next crossing on one side, whichever way it goes; at a crossing the rate tells which. */
-  begin(side: 1 | -1): void {
+  /**
+   * Looks for the next crossing on one side, whichever way it goes; at a crossing, told to within the clock's `blur` s, the
+   * rate tells which.
+   */
+  begin(side: 1 | -1, blur: number): void {
     this.side = side;
     this.sign = 1;
     this.evaluate(0);
-    const isAtCrossing = Math.abs(this.value) <= 1e-12 * this.carried.room;
+    const isAtCrossing = Math.abs(this.value) <= 1e-12 * this.carried.room + blur * Math.abs(this.first);
     this.sign = (isAtCrossing ? this.first : this.value) < 0 ? -1 : 1;
   }
 }
