@@ -16,8 +16,13 @@ import {
 
 export * from "./accounts/accounts-schema.ts";
 export * from "./activity/activity-schema.ts";
+export * from "./chain/chain-schema.ts";
+export * from "./comments/comments-schema.ts";
 export * from "./members/members-schema.ts";
+export * from "./notices/notices-schema.ts";
 export * from "./projects/projects-schema.ts";
+export * from "./reviews/reviews-schema.ts";
+export * from "./revisions/revisions-schema.ts";
 export * from "./scenarios/scenarios-schema.ts";
 
 /** One route of the server: what goes in, what comes out. Paths are express paths under `/api`; every object is strict. */
