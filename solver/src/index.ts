@@ -3,6 +3,7 @@ export { z } from "./scenario/zod.ts";
 export * from "./scenario/scenario.ts";
 export { canonicalForm, canonicalText, digestOf, recordDigest } from "./scenario/canonical.ts";
 export { checkScenario, type Checked } from "./scenario/check-scenario.ts";
+export { checkTerm, type CheckedTerm } from "./scenario/check-term.ts";
 export { compileProblem, gravity, normalForce } from "./scenario/compile-problem.ts";
 export { fieldPaths } from "./scenario/field-paths.ts";
 export * from "./scenario/fields.ts";
@@ -27,6 +28,9 @@ export { simulate } from "./simulate.ts";
 export { solverVersion } from "./version.ts";
 export { quantities, quantityOf } from "./quantities/index.ts";
 export type { Quantity } from "./quantities/quantity.ts";
+export { isFed, lowestHz } from "./quantities/drive.ts";
+export { steadyWindow } from "./quantities/steady-window.ts";
+export { amplitudeSpectrum, spectralPeaks, type SpectralPeak, type Spectrum } from "./numerics/spectrum.ts";
 export {
   compareWithTextbook,
   type TextbookComparison,

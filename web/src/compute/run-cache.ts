@@ -31,4 +31,8 @@ export function remember(key: string, reply: SolverReply): void {
   }
 }
 
-const sizeOf = (reply: SolverReply): number => (reply.kind === "result" ? (reply.result.samples?.t.length ?? 0) : 0);
+function sizeOf(reply: SolverReply): number {
+  if (reply.kind !== "result") return 0;
+  const { samples, at } = reply.result;
+  return (samples?.t.length ?? 0) + (at?.t.length ?? 0);
+}

@@ -1,7 +1,17 @@
 import type { Refusal, Result, Scenario, SimulateOptions } from "@restband/solver";
 
+/** Instants evenly over a part of a run, from its beginning on and none at its end; s. */
+export interface EvenTimes {
+  readonly from: number;
+  readonly to: number;
+  readonly count: number;
+}
+
 /** What may be asked of a worker: the options that can be told as a message. */
-export type RunOptions = Pick<SimulateOptions, "samples" | "quantities" | "events" | "energy" | "method">;
+export interface RunOptions extends Pick<SimulateOptions, "samples" | "quantities" | "events" | "energy" | "method"> {
+  /** The result then has `at`, at these instants. */
+  readonly evenly?: EvenTimes;
+}
 
 export interface SolverJob {
   readonly scenario: Scenario;
