@@ -7,6 +7,7 @@ export { checkTerm, type CheckedTerm } from "./scenario/check-term.ts";
 export { compileProblem, gravity, normalForce } from "./scenario/compile-problem.ts";
 export { fieldPaths } from "./scenario/field-paths.ts";
 export * from "./scenario/fields.ts";
+export { numericField, numericFields, readField, withField, type NumericField } from "./scenario/numeric-fields.ts";
 export type { Problem } from "./scenario/problem.ts";
 export { quantityNames, type QuantityName } from "./scenario/quantity-names.ts";
 export { movedInputs } from "./scenario/moved-inputs.ts";
@@ -45,3 +46,31 @@ export { agreementOf, compareResults, type Agreement, type Comparison, type Devi
 export { exploreRanges, type RangeReport, type RangeVerdict } from "./explore/range-verdict.ts";
 export type { BoundaryValue, PointReply, RangeStep } from "./explore/range-verdict-boundary.ts";
 export { planRanges, type KnownRange } from "./explore/range-verdict-plan.ts";
+export * from "./explore/asking.ts";
+export { defaultLinks, withValues, type Link, type Links } from "./explore/links.ts";
+export { checkSweepPlan, type CheckedSweep } from "./explore/sweep/check-sweep-plan.ts";
+export { sweepPlanSchema, type Continuation, type SweepAxis, type SweepPlan } from "./explore/sweep/sweep-plan.ts";
+export {
+  cellOutcomes,
+  cellRefusals,
+  keptAt,
+  readRow,
+  rowHead,
+  rowLength,
+  type CellFigures,
+  type CellRefusal,
+  type CellRow,
+} from "./explore/sweep/cell-row.ts";
+export type * from "./explore/threshold/threshold.ts";
+export type { Cure, Cures } from "./explore/threshold/cure.ts";
+export type { HoldingEnd, HoldingRange } from "./explore/threshold/holding-range.ts";
+export { checkTolerancePlan, type CheckedTolerance } from "./explore/tolerance/check-tolerance-plan.ts";
+export {
+  tolerancePlanSchema,
+  type Distribution,
+  type JointInput,
+  type RankCorrelation,
+  type ScatteredInput,
+  type TolerancePlan,
+} from "./explore/tolerance/tolerance-plan.ts";
+export type * from "./explore/tolerance/tolerance-summary.ts";

@@ -18,7 +18,8 @@ export function withNumber(scenario: Scenario, path: string, value: number): Sce
   return replaced(scenario, stepsOf(path), value) as Scenario;
 }
 
-const stepsOf = (path: string) => path.split(/[.[\]]+/).filter((step) => step !== "");
+/** The steps of a path, as text: `force[0].rate` is force, 0, rate. */
+export const stepsOf = (path: string) => path.split(/[.[\]]+/).filter((step) => step !== "");
 
 function replaced(part: unknown, [step, ...rest]: readonly string[], value: number): unknown {
   if (step === undefined) return value;

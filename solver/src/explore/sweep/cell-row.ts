@@ -1,0 +1,82 @@
+import type { LimitVerdict, Outcome } from "../../result.ts";
+import type { SweepPlan } from "./sweep-plan.ts";
+
+/**
+ * A cell as numbers, the row of a tile: `[outcome, limits, absent, quantity…]`. Never NaN.
+ *
+ * - `outcome`: the place in `cellOutcomes`, or a negative code of `cellRefusals`: then all that follows is 0.
+ * - `limits`: a digit to base 4 for each limit of the scenario, the first lowest: 1 kept, 2 broken, 3 cannot be judged.
+ * - `absent`: bit i is set where the i-th quantity of the plan has no value in this cell; its number is then 0.
+ */
+export type CellRow = Float64Array;
+
+/** Numbers in front of the quantities. */
+export const rowHead = 3;
+
+export const rowLength = ({ quantities }: SweepPlan): number => rowHead + quantities.length;
+
+/** Outcomes by their code; the order is part of saved sweeps. */
+export const cellOutcomes = [
+  "never-moved",
+  "came-to-rest",
+  "too-short",
+  "growing",
+  "stick-slip",
+  "settles",
+  "not-settled",
+  "smooth-sliding",
+] as const satisfies readonly Outcome[];
+
+/** Why a cell has no outcome, by its code: values that cannot stand together, no method for them, or a run that was cut off. */
+export const cellRefusals = {
+  refused: -1,
+  "not-computed": -2,
+  "max-events": -3,
+  "max-work": -4,
+  failed: -5,
+} as const;
+export type CellRefusal = keyof typeof cellRefusals;
+
+/** Verdicts of limits fit a number's 53 bits. */
+export const mostLimits = 25;
+
+/** What a row says, read back. */
+export interface CellFigures {
+  readonly outcome: Outcome | null;
+  /** Null where there is an outcome. */
+  readonly refusal: CellRefusal | null;
+  /** In the order of the scenario's limits: true kept, false broken, null cannot be judged. */
+  readonly kept: readonly (boolean | null)[];
+  /** In the order of the plan; null where there is no value. */
+  readonly quantities: readonly (number | null)[];
+}
+
+/** Reads the row at an offset of a tile. @param limits how many limits the scenario has */
+export function readRow(row: Float64Array, offset: number, plan: SweepPlan, limits: number): CellFigures {
+  const code = row[offset];
+  const isRefused = code < 0;
+  return {
+    outcome: isRefused ? null : cellOutcomes[code],
+    refusal: isRefused ? refusalOf(code) : null,
+    kept: Array.from({ length: limits }, (_, i) => keptAt(row[offset + 1], i)),
+    quantities: plan.quantities.map((_, i) =>
+      isRefused || isAbsent(row[offset + 2], i) ? null : row[offset + rowHead + i],
+    ),
+  };
+}
+
+const refusalOf = (code: number): CellRefusal =>
+  (Object.keys(cellRefusals) as CellRefusal[]).find((name) => cellRefusals[name] === code) ?? "failed";
+
+/** The verdict of the i-th limit in the number that holds all; null where it cannot be judged. */
+export function keptAt(limits: number, i: number): boolean | null {
+  const digit = Math.floor(limits / 4 ** i) % 4;
+  return digit === 1 ? true : digit === 2 ? false : null;
+}
+
+const isAbsent = (bits: number, i: number): boolean => Math.floor(bits / 2 ** i) % 2 === 1;
+
+/** The number that holds the verdicts of all limits. */
+export function limitsCode(verdicts: readonly LimitVerdict[]): number {
+  return verdicts.reduce((code, { kept }, i) => code + (kept === null ? 3 : kept ? 1 : 2) * 4 ** i, 0);
+}

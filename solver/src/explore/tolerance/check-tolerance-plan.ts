@@ -1,0 +1,131 @@
+import { choleskyOf } from "../../numerics/cholesky.ts";
+import { pathText } from "../../scenario/path.ts";
+import type { Fault, Scenario } from "../../scenario/scenario.ts";
+import { quoted } from "../../scenario/sentences.ts";
+import type { z } from "../../scenario/zod.ts";
+import { linkFaults } from "../links.ts";
+import { numericField } from "../../scenario/numeric-fields.ts";
+import {
+  type Distribution,
+  type JointInput,
+  type RankCorrelation,
+  type TolerancePlan,
+  tolerancePlanSchema,
+} from "./tolerance-plan.ts";
+
+/** A plan, or every fault of it. */
+export type CheckedTolerance = { readonly plan: TolerancePlan; readonly faults: [] } | { plan: null; faults: Fault[] };
+
+/**
+ * Checks anything for being a tolerance study of a checked scenario. `correlations`, `joint`, `links`, `quantities` may be
+ * left out (none; links the default ones), and `sampling` (Latin hypercube). Faults come all at once, each at its path
+ * with a sentence. Never throws.
+ */
+export function checkTolerancePlan(input: unknown, scenario: Scenario): CheckedTolerance {
+  const plain = typeof input === "object" && input !== null && !Array.isArray(input);
+  const defaults = { correlations: [], joint: [], links: {}, sampling: "latin-hypercube", quantities: [], inputs: [] };
+  const completed = plain ? { ...defaults, ...input } : input;
+  const parsed = tolerancePlanSchema.safeParse(completed);
+  const faults = toleranceFaults(completed, parsed.success ? [] : parsed.error.issues, scenario);
+  return parsed.success && faults.length === 0 ? { plan: parsed.data, faults: [] } : { plan: null, faults };
+}
+
+type Issues = readonly z.core.$ZodIssue[];
+
+/** Every fault of a plan, in words: `issues` are what is wrong with its shape. */
+function toleranceFaults(input: unknown, issues: Issues, scenario: Scenario): Fault[] {
+  if (issues.length > 0)
+    return issues.map(({ path, message }) => ({ path: pathText(path), message: message.replace(/[^.]$/, "$&.") }));
+  const plan = input as TolerancePlan;
+  const varied = variedPaths(plan);
+  return [
+    ...pathFaults(plan, scenario),
+    ...plan.inputs.flatMap(({ distribution }, i) =>
+      below(`inputs[${i}].distribution`, distributionFaults(distribution)),
+    ),
+    ...plan.joint.flatMap((joint, i) => below(`joint[${i}]`, jointFaults(joint))),
+    ...correlationFaults(plan),
+    ...linkFaults(plan.links, scenario, varied),
+  ];
+}
+
+const below = (path: string, faults: readonly Fault[]) =>
+  faults.map((one) => ({ ...one, path: `${path}.${one.path}` }));
+
+/** The paths of all that scatters, in the order of a draw's values. */
+export const variedPaths = ({ inputs, joint }: Pick<TolerancePlan, "inputs" | "joint">): string[] => [
+  ...inputs.map(({ path }) => path),
+  ...joint.flatMap(({ paths }) => paths),
+];
+
+function pathFaults({ inputs, joint }: TolerancePlan, scenario: Scenario): Fault[] {
+  const places = [
+    ...inputs.map(({ path }, i) => ({ path, at: `inputs[${i}].path` })),
+    ...joint.flatMap(({ paths }, i) => paths.map((path, j) => ({ path, at: `joint[${i}].paths[${j}]` }))),
+  ];
+  if (places.length === 0)
+    return [{ path: "inputs", message: "Nothing scatters. Give at least one value a distribution." }];
+  return places.flatMap(({ path, at }, i) => {
+    const field = numericField(scenario, path);
+    if (field === undefined) return [{ path: at, message: `This scenario has no number called ${quoted(path)}.` }];
+    if (field.integer) return [{ path: at, message: `${field.label} is a whole number and cannot scatter.` }];
+    const isTwice = places.findIndex((other) => other.path === path) < i;
+    return isTwice ? [{ path: at, message: `${field.label} scatters already.` }] : [];
+  });
+}
+
+function distributionFaults(distribution: Distribution): Fault[] {
+  const faults: Fault[] = [];
+  const add = (path: string, message: string) => faults.push({ path, message });
+  if ("deviation" in distribution && !(distribution.deviation > 0))
+    add("deviation", `The standard deviation must be more than 0; it is ${distribution.deviation}.`);
+  if ("low" in distribution && !(distribution.low < distribution.high))
+    add("high", `The high end must be above the low end, ${distribution.low}; it is ${distribution.high}.`);
+  if (distribution.kind === "triangular" && faults.length === 0) {
+    const { low, likeliest, high } = distribution;
+    if (likeliest < low || likeliest > high)
+      add("likeliest", `The likeliest value lies between ${low} and ${high}; it is ${likeliest}.`);
+  }
+  if (distribution.kind === "truncated" && faults.length === 0 && !reaches(distribution))
+    add("low", "Between these ends lies next to nothing of the distribution: they are more than 8 deviations away.");
+  return faults;
+}
+
+/** The ends leave enough of the distribution to draw from. */
+const reaches = ({ mean, deviation, low, high }: Extract<Distribution, { kind: "truncated" }>) =>
+  low < mean + 8 * deviation && high > mean - 8 * deviation;
+
+function jointFaults({ paths, means, covariance }: JointInput): Fault[] {
+  const n = paths.length;
+  if (n === 0) return [{ path: "paths", message: "A joint distribution needs at least one value." }];
+  if (means.length !== n) return [{ path: "means", message: `There are ${n} values and ${means.length} means.` }];
+  if (covariance.length !== n || covariance.some((row) => row.length !== n))
+    return [{ path: "covariance", message: `The covariance of ${n} values has ${n} rows of ${n} numbers.` }];
+  if (covariance.some((row, i) => row.some((value, j) => value !== covariance[j][i])))
+    return [{ path: "covariance", message: "A covariance is symmetric: row i, column j equals row j, column i." }];
+  if (choleskyOf(covariance) === null)
+    return [{ path: "covariance", message: "No values scatter like this: a covariance must be positive definite." }];
+  return [];
+}
+
+function correlationFaults({ inputs, correlations }: TolerancePlan): Fault[] {
+  const single = correlations.flatMap(({ first, second, value }, i) => {
+    const path = `correlations[${i}]`;
+    const isPair = [first, second].every((at) => at >= 0 && at < inputs.length) && first !== second;
+    if (!isPair)
+      return [{ path, message: "A correlation joins two of the inputs, by their place in the list from 0." }];
+    if (!(Math.abs(value) < 1))
+      return [{ path: `${path}.value`, message: `A rank correlation lies between -1 and 1; it is ${value}.` }];
+    return [];
+  });
+  if (single.length > 0 || correlations.length === 0) return single;
+  if (choleskyOf(correlationMatrix(inputs.length, correlations)) !== null) return [];
+  return [{ path: "correlations", message: "These correlations cannot all hold at once." }];
+}
+
+/** The symmetric matrix of rank correlations, 1 on its diagonal. */
+export function correlationMatrix(size: number, correlations: readonly RankCorrelation[]): number[][] {
+  const matrix = Array.from({ length: size }, (_, i) => Array.from({ length: size }, (__, j) => Number(i === j)));
+  for (const { first, second, value } of correlations) matrix[first][second] = matrix[second][first] = value;
+  return matrix;
+}
