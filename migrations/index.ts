@@ -8,6 +8,7 @@ import * as createScenarios from "./20261201100600-create-scenarios.ts";
 import * as createActivity from "./20261201100700-create-activity.ts";
 import * as addScenarioTitles from "./20261201100800-add-scenario-titles.ts";
 import * as addArchivedAt from "./20261201100900-add-archived-at.ts";
+import * as createExplorations from "./20261201102000-create-explorations.ts";
 
 /** Every change of the database, in order. The names are recorded in it: never renamed, never edited once merged. */
 export const migrations = [
@@ -21,4 +22,5 @@ export const migrations = [
   { name: "20261201100700-create-activity", ...createActivity },
   { name: "20261201100800-add-scenario-titles", ...addScenarioTitles },
   { name: "20261201100900-add-archived-at", ...addArchivedAt },
+  { name: "20261201102000-create-explorations", ...createExplorations },
 ];

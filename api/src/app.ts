@@ -7,6 +7,8 @@ import { activityRoutes } from "./activity/activity-routes.ts";
 import { createActivityService } from "./activity/activity-service.ts";
 import type { Config } from "./config.ts";
 import type { Database } from "./database/database.ts";
+import { explorationsRoutes } from "./explorations/explorations-routes.ts";
+import { createExplorationsService } from "./explorations/explorations-service.ts";
 import { membersRoutes } from "./members/members-routes.ts";
 import { createMembersService } from "./members/members-service.ts";
 import { errorHandler, noSuchRoute } from "./middleware/error-handler.ts";
@@ -43,12 +45,14 @@ function createApi(config: Config, database: Database) {
   const accounts = createAccountsService(database);
   const sessions = createSessionsService(accounts, throttle);
   const members = createMembersService(database, accounts);
+  const scenarios = createScenariosService(database, members);
   const handlers = {
     ...accountsRoutes(accounts, sessions),
     ...sessionsRoutes(sessions),
     ...projectsRoutes(createProjectsService(database, members)),
     ...membersRoutes(members),
-    ...scenariosRoutes(createScenariosService(database, members)),
+    ...scenariosRoutes(scenarios),
+    ...explorationsRoutes(createExplorationsService(database, scenarios)),
     ...activityRoutes(createActivityService(database)),
   };
   return createRouter(handlers, members.findCaller, throttle);

@@ -1,6 +1,17 @@
 import { z } from "@restband/solver";
 import { claimSchema, sessionSchema, signInSchema, signUpSchema } from "./accounts/accounts-schema.ts";
 import { activitySchema } from "./activity/activity-schema.ts";
+import {
+  claimExplorationSchema,
+  conclusionSchema,
+  explorationDraftSchema,
+  explorationSchema,
+  explorationSummarySchema,
+  runnerSchema,
+  tileDraftSchema,
+  tileNumbersSchema,
+  tileSchema,
+} from "./explorations/explorations-schema.ts";
 import { memberAddSchema, memberChangeSchema, memberSchema } from "./members/members-schema.ts";
 import { projectDraftSchema, projectSchema } from "./projects/projects-schema.ts";
 import {
@@ -18,6 +29,7 @@ export * from "./accounts/accounts-schema.ts";
 export * from "./activity/activity-schema.ts";
 export * from "./chain/chain-schema.ts";
 export * from "./comments/comments-schema.ts";
+export * from "./explorations/explorations-schema.ts";
 export * from "./members/members-schema.ts";
 export * from "./notices/notices-schema.ts";
 export * from "./projects/projects-schema.ts";
@@ -43,6 +55,7 @@ const id = z.uuid();
 const projectParams = z.strictObject({ projectId: id });
 const memberParams = z.strictObject({ projectId: id, accountId: id });
 const scenarioParams = z.strictObject({ projectId: id, scenarioId: id });
+const explorationParams = z.strictObject({ projectId: id, explorationId: id });
 
 /**
  * Every route, by name. The server registers from it, the page's client infers its types from it, the role test walks it.
@@ -203,6 +216,72 @@ export const routes = {
     method: "POST",
     path: "/projects/:projectId/scenarios/:scenarioId/restore",
     params: scenarioParams,
+    status: 204,
+  },
+
+  listExplorations: {
+    method: "GET",
+    path: "/projects/:projectId/scenarios/:scenarioId/explorations",
+    params: scenarioParams,
+    status: 200,
+    response: z.array(explorationSummarySchema),
+  },
+  createExploration: {
+    method: "POST",
+    path: "/projects/:projectId/scenarios/:scenarioId/explorations",
+    params: scenarioParams,
+    body: explorationDraftSchema,
+    status: 201,
+    response: explorationSchema,
+  },
+  readExploration: {
+    method: "GET",
+    path: "/projects/:projectId/explorations/:explorationId",
+    params: explorationParams,
+    status: 200,
+    response: explorationSchema,
+  },
+  claimExploration: {
+    method: "POST",
+    path: "/projects/:projectId/explorations/:explorationId/claim",
+    params: explorationParams,
+    body: claimExplorationSchema,
+    status: 200,
+    response: explorationSchema,
+  },
+  releaseExploration: {
+    method: "POST",
+    path: "/projects/:projectId/explorations/:explorationId/release",
+    params: explorationParams,
+    body: runnerSchema,
+    status: 204,
+  },
+  readTiles: {
+    method: "GET",
+    path: "/projects/:projectId/explorations/:explorationId/tiles",
+    params: explorationParams,
+    query: tileNumbersSchema,
+    status: 200,
+    response: z.array(tileSchema),
+  },
+  saveTile: {
+    method: "PUT",
+    path: "/projects/:projectId/explorations/:explorationId/tiles/:number",
+    params: explorationParams.extend({ number: z.string().regex(/^\d{1,6}$/) }),
+    body: tileDraftSchema,
+    status: 204,
+  },
+  concludeExploration: {
+    method: "PUT",
+    path: "/projects/:projectId/explorations/:explorationId/conclusion",
+    params: explorationParams,
+    body: conclusionSchema,
+    status: 204,
+  },
+  deleteExploration: {
+    method: "DELETE",
+    path: "/projects/:projectId/explorations/:explorationId",
+    params: explorationParams,
     status: 204,
   },
 } as const satisfies Record<string, Route>;

@@ -3,6 +3,7 @@ import { insertOneTimeLink } from "../../api/src/accounts/one-time-links-store.t
 import { type Role, type RouteName, roles, routes, type Session } from "../../api/src/contract.ts";
 import { permissions, permit } from "../../api/src/middleware/permit.ts";
 import type { Browser, Request } from "../support/browser.ts";
+import { cellsOf, createExploration, runner, smallSweep, tileContent } from "../support/explorations.ts";
 import {
   addMember,
   createProject,
@@ -47,6 +48,15 @@ const mayCall: Record<RouteName, readonly Person[]> = {
   moveScenario: ["owner", "editor"],
   archiveScenario: ["owner", "editor"],
   restoreScenario: ["owner", "editor"],
+  listExplorations: ["owner", "editor", "reviewer", "reader"],
+  createExploration: ["owner", "editor"],
+  readExploration: ["owner", "editor", "reviewer", "reader"],
+  claimExploration: ["owner", "editor"],
+  releaseExploration: ["owner", "editor"],
+  readTiles: ["owner", "editor", "reviewer", "reader"],
+  saveTile: ["owner", "editor"],
+  concludeExploration: ["owner", "editor"],
+  deleteExploration: ["owner", "editor"],
 };
 
 let server: TestServer;
@@ -66,6 +76,9 @@ async function layProject() {
   );
   const projectId = await createProject(owner);
   const { id: scenarioId } = await createScenario(owner, projectId);
+  const { id: explorationId } = await createExploration(owner, projectId, scenarioId, { cells: 2 });
+  const tile = { runner, content: tileContent(cellsOf(0)) };
+  await owner.get("saveTile", { params: { projectId, explorationId, number: "0" }, body: tile });
   for (const role of ["editor", "reviewer", "reader"] as const) await addMember(owner, projectId, emailOf(role), role);
   await addMember(owner, projectId, emailOf("second"), "owner");
   await addMember(owner, projectId, emailOf("spare"), "reader");
@@ -76,7 +89,7 @@ async function layProject() {
   const { account } = await spare.get<Session>("readSession");
   return {
     browsers,
-    params: { projectId, scenarioId, accountId: account!.id },
+    params: { projectId, scenarioId, explorationId, number: "0", accountId: account!.id },
     newcomer: emailOf("stranger"),
     toProjectId,
   };
@@ -117,6 +130,18 @@ function requestFor(
       return { body: { title: "Copy" } };
     case "moveScenario":
       return { body: { toProjectId } };
+    case "createExploration":
+      return { body: smallSweep };
+    case "claimExploration":
+      return { body: { runner, solverVersion: smallSweep.solverVersion } };
+    case "releaseExploration":
+      return { body: { runner } };
+    case "readTiles":
+      return { query: "?numbers=0" };
+    case "saveTile":
+      return { body: { runner, content: tileContent(cellsOf(0)) } };
+    case "concludeExploration":
+      return { body: { headline: "Slides smoothly from 8.35 mm/s.", answer: {} } };
     case "changeMember":
       return { body: { role: "reviewer" } };
     case "createScenario":
@@ -146,6 +171,8 @@ describe.each(routeNames)("%s", (name) => {
     for (const person of order) {
       // What one of them moves away is no longer there for the next.
       if (name === "moveScenario") params.scenarioId = (await createScenario(browsers.owner, params.projectId)).id;
+      if (name === "deleteExploration")
+        params.explorationId = (await createExploration(browsers.owner, params.projectId, params.scenarioId)).id;
       const request = { params, ...requestFor(name, laid), version: name === "saveScenario" ? version : undefined };
       seen[person] = (await browsers[person].call(name, request)).status;
       if (name === "saveScenario" && seen[person] === 200) version += 1;
@@ -165,7 +192,7 @@ describe.each(routeNames.filter((name) => routes[name].path.includes(":projectId
     const none = await owner.call(name, { params: { ...params, projectId: crypto.randomUUID() }, ...request });
     expect([theirs.status, theirs.body]).toEqual([404, none.body]);
     // Under one's own project, with the ids of the other.
-    if (/:(scenarioId|accountId)/.test(routes[name].path)) {
+    if (/:(scenarioId|accountId|explorationId)/.test(routes[name].path)) {
       expect((await owner.call(name, { params: { ...params, projectId }, ...request })).status).toBe(404);
     }
   });

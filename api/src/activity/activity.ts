@@ -15,7 +15,9 @@ export type Act =
   | "scenario.moved-in"
   | "scenario.archived"
   | "scenario.restored"
-  | "cases.created";
+  | "cases.created"
+  | "exploration.created"
+  | "exploration.deleted";
 
 export interface Activity {
   /** Null for what concerns no project. */

@@ -46,6 +46,16 @@ export const permissions = {
   moveScenario: authors,
   archiveScenario: authors,
   restoreScenario: authors,
+
+  listExplorations: everyMember,
+  createExploration: authors,
+  readExploration: everyMember,
+  claimExploration: authors,
+  releaseExploration: authors,
+  readTiles: everyMember,
+  saveTile: authors,
+  concludeExploration: authors,
+  deleteExploration: authors,
 } as const satisfies Record<RouteName, Permission>;
 
 /**

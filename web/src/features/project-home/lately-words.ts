@@ -85,6 +85,8 @@ const sentences: Readonly<Record<string, (entry: ActivityEntry, whom: string) =>
   "scenario.moved-in": () => ({ verb: "moved ", hasScenario: true, after: " here from another project" }),
   "scenario.archived": () => ({ verb: "archived ", hasScenario: true }),
   "scenario.restored": () => ({ verb: "restored ", hasScenario: true }),
+  "exploration.created": ({ detail }) => ({ verb: `began a ${String(detail.kind)} of `, hasScenario: true }),
+  "exploration.deleted": ({ detail }) => ({ verb: `deleted a ${String(detail.kind)} of `, hasScenario: true }),
   "cases.created": ({ detail }) => ({
     verb: `made ${sayMany(Number(detail.count), "scenario")} of a table of cases.`,
   }),
