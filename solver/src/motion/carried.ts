@@ -92,6 +92,14 @@ export class Carried {
     this.roomSecond = this.grip * v.normalSecond;
   }
 
+  /** What rounding may have made of need at the last `evaluate`. */
+  needRounding(): number {
+    const { inputs, stiffness, viscous, inertia, position, velocity } = this;
+    const own = Math.abs(stiffness * position) + Math.abs(viscous * velocity);
+    const force = Math.abs(inputs.force[0]) + Math.abs(inputs.values.force) + inputs.forceBound(0);
+    return 2 ** -50 * (own + force + Math.abs(inertia * inputs.values.baseAcceleration));
+  }
+
   private addCubic(baseAcceleration: number): void {
     const { cubic, position: d, velocity } = this;
     const curvature = this.carrier === "base" ? 0 : -baseAcceleration;

@@ -10,6 +10,8 @@ export type Cause = "corner" | "contact" | "element" | "side" | "share" | "law";
 export interface Ending {
   tau: number;
   cause: Cause;
+  /** True where v_r only touches 0 there. */
+  isTouch: boolean;
 }
 
 /** What a slip must be watched for besides v_r = 0. */

@@ -21,9 +21,11 @@ export class Stepper {
   private readonly shareWatch: ShareWatch;
   private readonly carriedWatch: CarriedStretchWatch;
   private readonly baseSlipWatch: BaseSlipWatch;
-  private readonly ending: Ending = { tau: Infinity, cause: "corner" };
+  private readonly ending: Ending = { tau: Infinity, cause: "corner", isTouch: false };
   /** What rounding may have done to the clock at the end of the step, s. */
   private blur = 0;
+  /** The side of the needed force that could no longer be held at the end of a stick. */
+  private lostSide: Phase = 0;
 
   constructor(
     private readonly problem: Problem,
@@ -76,6 +78,7 @@ export class Stepper {
     this.ending.tau = end - s.t;
     this.blur = 2 ** -49 * end;
     this.ending.cause = "corner";
+    this.ending.isTouch = false;
     if (form.kind === "slip") this.watchSlip();
     else if (form.kind === "stick") this.watchStick(s);
     else this.watchLock(s);
@@ -86,7 +89,7 @@ export class Stepper {
     this.carry(s, tau);
     if (this.ending.cause === "contact") {
       if (form.kind === "stick") return this.breakAway(s);
-      return form.kind === "lock" ? this.meetBoth(s, s.contact) : this.meet(s, s.contact);
+      return form.kind === "lock" ? this.meetBoth(s, s.contact) : this.meet(s, s.contact, this.ending.isTouch);
     }
     if (this.ending.cause === "element") return this.meetElement(s);
     if (this.ending.cause === "side") s.side = -s.side as Phase;
@@ -149,6 +152,7 @@ export class Stepper {
     if (!(tau <= this.ending.tau)) return;
     this.ending.tau = tau;
     this.ending.cause = cause;
+    this.ending.isTouch = watched.isTouch;
   }
 
   /** Moves the stance by τ along its segment and locates the inputs there. */
@@ -181,22 +185,26 @@ export class Stepper {
     else s.place = s.position + (this.problem.isRelative ? 0 : base);
   }
 
-  /** The stick was found to end where need passes room (1 + tolerance); its time is where need equals room, a hair earlier. */
+  /**
+   * The stick was found to end where need passes room (1 + tolerance); its time is where need equals room, a hair earlier.
+   * Where nothing holds, it left when need began to be, at the start of the segment: inputs are smooth from there on.
+   */
   private atLimit(tau: number): number {
     const { carried } = this.form;
     carried.evaluate(tau);
-    const sign = Math.sign(carried.need);
-    const over = sign * carried.need - carried.room;
-    const rate = sign * carried.needRate - carried.roomRate;
+    this.lostSide = Math.sign(carried.need) as Phase;
+    if (carried.room === 0 && carried.roomRate === 0) return 0;
+    const over = this.lostSide * carried.need - carried.room;
+    const rate = this.lostSide * carried.needRate - carried.roomRate;
     const isEnd = Math.abs(over) <= 1e-9 * carried.room && rate > 0;
     return isEnd ? Math.max(0, tau - over / rate) : tau;
   }
 
   /** The end of a stick: the force is exactly what could just be held, so the acceleration is known exactly. */
   private breakAway(s: Stance): Happening {
-    const { carried, inputs } = this.form;
+    const { inputs } = this.form;
     this.placeOnCounterface(s);
-    const side = -Math.sign(carried.need) as Phase;
+    const side = -this.lostSide as Phase;
     const relative = (side * ((this.form.grip - this.form.slide) * inputs.values.normal)) / this.problem.inertia;
     s.acceleration = relative;
     s.contact = side;
@@ -214,8 +222,9 @@ export class Stepper {
   /**
    * Judges a body whose v_r is 0 at s.t (inputs located there): held, it sticks; else it slips to the side of the force
    * that cannot be held. `before` is the phase it came in (0: the start of the run, or a stick that a corner has ended).
+   * Where v_r only touches 0 the acceleration is 0 too, and with nothing to hold it the body slips on as it came.
    */
-  private meet(s: Stance, before: Phase): Happening {
+  private meet(s: Stance, before: Phase, isTouch = false): Happening {
     const { form, problem } = this;
     this.placeOnCounterface(s);
     s.contact = 0;
@@ -224,8 +233,15 @@ export class Stepper {
     form.take(s);
     form.carried.evaluate(0);
     const { need, room } = form.carried;
+    if (isTouch && room === 0) {
+      s.contact = before;
+      orient(this.form, s);
+      s.acceleration = 0;
+      return null;
+    }
     const canHold = room > 0 || before === 0 || problem.model !== "none";
-    if (canHold && Math.abs(need) <= room * (1 + heldTolerance)) return before === 0 ? null : "stop";
+    const limit = room > 0 ? room * (1 + heldTolerance) : form.carried.needRounding();
+    if (canHold && Math.abs(need) <= limit) return before === 0 ? null : "stop";
     s.contact = need > 0 ? -1 : need < 0 ? 1 : before;
     orient(this.form, s);
     if (before === 0) return "break-away";

@@ -12,6 +12,7 @@ export abstract class Watch implements Watched {
   first = 0;
   second = 0;
   noise = 0;
+  isTouch = false;
   abstract evaluate(tau: number): void;
   abstract thirdBound(reach: number): number;
 
@@ -34,6 +35,7 @@ export class HoldWatch extends Watch {
     this.value = carried.room * (1 + heldTolerance) - sign * carried.need;
     this.first = carried.roomRate - sign * carried.needRate;
     this.second = carried.roomSecond - sign * carried.needSecond;
+    this.noise = carried.room === 0 ? carried.needRounding() : 0;
   }
 
   thirdBound(reach: number): number {

@@ -26,24 +26,26 @@ const looks = 16;
 
 /**
  * The first falling zero in (a, b] of a smooth g that is positive just after a: a sign change between 16 looks, or a dip
- * between them that a parabola through three of them reaches (two zeros within one look are found so). Infinity where
- * there is none. What bends more often than the looks would be missed: callers keep [a, b] within a radian or two.
+ * next to them that a parabola reaches (two zeros within one look are found so). Infinity where there is none. What bends
+ * more often than the looks would be missed: callers keep [a, b] within a radian or two.
  *
  * @param floor a look counts as fallen where g ≤ floor: 0, or less where g still rises out of its own error
  */
 export function firstFall(g: (x: number) => number, a: number, b: number, floor = 0): number {
   let before = a;
-  let gBefore = g(a);
+  let gBefore = Infinity;
   let last = a;
-  let gLast = gBefore;
+  let gLast = g(a);
   for (let n = 1; n <= looks; n++) {
     const x = n === looks ? b : a + ((b - a) * n) / looks;
     const gx = g(x);
     if (gx <= floor) return gLast > 0 ? bracketedRoot(g, last, x, gLast, gx) : x;
-    const isDip = n > 1 && gLast <= gBefore && gLast <= gx && floor === 0;
-    if (isDip) {
-      const bottom = lowest(g, before, last, x, gBefore, gLast, gx);
-      if (bottom.value <= 0) return bracketedRoot(g, before, bottom.x, gBefore, bottom.value);
+    if (floor === 0) {
+      let bottom: Dip | null = null;
+      if (n === 1 && gx >= gLast) bottom = dipAtEdge(g, a, x, gLast, gx);
+      else if (gLast <= gBefore && gLast <= gx) bottom = lowest(g, before, last, x, gBefore, gLast, gx);
+      else if (n === looks && gx < gLast) bottom = dipAtEdge(g, x, last, gx, gLast);
+      if (bottom !== null && bottom.value <= 0) return bracketedRoot(g, before, bottom.x, g(before), bottom.value);
     }
     before = last;
     gBefore = gLast;
@@ -51,6 +53,29 @@ export function firstFall(g: (x: number) => number, a: number, b: number, floor 
     gLast = gx;
   }
   return Infinity;
+}
+
+/** Where g dips, and how far. */
+export interface Dip {
+  readonly x: number;
+  readonly value: number;
+}
+
+/** The bottom between an edge and its neighbour, where g falls away from the edge before it rises; null where it does not. */
+export function dipAtEdge(
+  g: (x: number) => number,
+  edge: number,
+  inner: number,
+  gEdge: number,
+  gInner: number,
+): Dip | null {
+  for (const share of [1 / 8, 1 / 64, 1 / 512]) {
+    const m = edge + share * (inner - edge);
+    const gm = g(m);
+    if (gm >= gEdge) continue;
+    return edge < inner ? lowest(g, edge, m, inner, gEdge, gm, gInner) : lowest(g, inner, m, edge, gInner, gm, gEdge);
+  }
+  return null;
 }
 
 /** The bottom of a dip by three parabolas. */
@@ -62,7 +87,7 @@ export function lowest(
   ga: number,
   gm: number,
   gb: number,
-): { x: number; value: number } {
+): Dip {
   let [x0, x1, x2, g0, g1, g2] = [a, m, b, ga, gm, gb];
   for (let i = 0; i < 5 && g1 > 0; i++) {
     const r = (x1 - x0) * (g1 - g2);

@@ -7,6 +7,8 @@ export interface Watched {
   first: number;
   second: number;
   noise: number;
+  /** Set by `firstZero`: the zero it found is one that w only touches from above. */
+  isTouch: boolean;
   evaluate(tau: number): void;
   /** An upper bound of |w‴| on [τ, τ + reach], τ being where `evaluate` was last called. */
   thirdBound(reach: number): number;
@@ -31,6 +33,9 @@ const ulp = 2 ** -52;
  * r is proven the first when the two ruled-out stretches meet. "Proven" is up to rounding of w, w', w'' and M: no
  * outward-rounded interval arithmetic is done.
  *
+ * A dip no deeper than its rounding is a touch, and is told at its bottom τ = r − w'/w'': there w' is 0 as exactly as it can
+ * be told, whereas r itself is blurred by the square root of the rounding. What truly dips less than that is not told apart.
+ *
  * Source: the remainder form of Taylor's theorem; for the scheme of certified marching compare R. E. Moore, Interval
  * Analysis (1966), ch. 7 (from memory).
  *
@@ -38,6 +43,7 @@ const ulp = 2 ** -52;
  * @param blur rounding of the clock at `end`, s: a zero that falls on `end` to within it is found there, not lost
  */
 export function firstZero(w: Watched, from: number, end: number, scale: number, work: Work, blur = 0): number {
+  w.isTouch = false;
   if (!(end > from)) return Infinity;
   let tau = from;
   let reach = Math.min(scale, end - from);
@@ -50,10 +56,10 @@ export function firstZero(w: Watched, from: number, end: number, scale: number, 
     if (++work.spent > work.allowed) return NaN;
     const span = Math.min(reach, end - tau);
     const { value, first, second, noise } = w;
-    if (tau > from && isZero(value, first, noise, hasRisen)) return tau;
+    if (tau > from && isZero(value, first, noise, hasRisen)) return hasRisen ? bottomOf(w, tau, end) : tau;
     hasRisen ||= value > noise;
     const safe = safeStep(Math.max(0, value), first, second, w.thirdBound(span), span);
-    if (tau + safe >= clearFrom) return guess;
+    if (tau + safe >= clearFrom) return bottomOf(w, guess, end);
     if (tau + safe >= end) return touchesAt(w, end, blur) ? end : Infinity;
     // below its own rounding a start from zero tells nothing: leave it by doubling steps
     const step = Math.max(safe, 2 * ulp * tau, hasRisen ? 0 : Math.max(2 * last, 1e3 * ulp * span));
@@ -63,7 +69,7 @@ export function firstZero(w: Watched, from: number, end: number, scale: number, 
       const bound = w.thirdBound(ahead);
       guess = newton(w, tau + step, tau + ahead, tau + modelZero(value, first, second));
       if (guess !== Infinity) clearFrom = guess - safeStep(0, -w.first, w.second, bound, guess - tau);
-      if (tau + safe >= clearFrom) return guess;
+      if (tau + safe >= clearFrom) return bottomOf(w, guess, end);
     }
     reach = safe < span ? 4 * step : 2 * reach;
     last = step;
@@ -75,6 +81,17 @@ export function firstZero(w: Watched, from: number, end: number, scale: number, 
 /** Down to zero again, or clearly through it where w has not risen above its rounding yet. */
 function isZero(value: number, first: number, noise: number, hasRisen: boolean): boolean {
   return hasRisen ? value <= noise && first <= 0 : value < -noise;
+}
+
+/** The zero r itself, or the bottom next to it where w dips there by no more than its rounding; marks it as a touch then. */
+function bottomOf(w: Watched, r: number, end: number): number {
+  w.evaluate(r);
+  const { value, first, second, noise } = w;
+  if (!(second > 0 && value - (first * first) / (2 * second) >= -2 * noise)) return r;
+  const bottom = Math.min(end, r - first / second);
+  w.evaluate(bottom);
+  w.isTouch = Math.abs(w.value) <= 2 * w.noise;
+  return w.isTouch ? bottom : r;
 }
 
 function touchesAt(w: Watched, end: number, blur: number): boolean {

@@ -1,4 +1,4 @@
-import { bracketedRoot, lowest } from "../../numerics/bracketed-root.ts";
+import { bracketedRoot, dipAtEdge, lowest, type Dip } from "../../numerics/bracketed-root.ts";
 
 const looks = 24;
 
@@ -23,6 +23,8 @@ export function crossings(g: (t: number) => number, threshold: number, a: number
       between(zero, now);
     } else between(last, now);
     if (n > 1) found.push(...dip(over, place(n - 2), last, now));
+    if (n === 1) found.push(...edgeDip(over, last, now));
+    if (n === looks) found.push(...edgeDip(over, now, last));
   }
   return found.sort((x, y) => x - y);
 }
@@ -31,7 +33,21 @@ export function crossings(g: (t: number) => number, threshold: number, a: number
 function dip(over: (t: number) => number, a: number, m: number, b: number): number[] {
   const [ga, gm, gb] = [over(a), over(m), over(b)];
   if (!(gm > 0 && gm <= ga && gm <= gb)) return [];
-  const bottom = lowest(over, a, m, b, ga, gm, gb);
+  return sidesOf(over, a, b, lowest(over, a, m, b, ga, gm, gb));
+}
+
+/** The same between an edge and the look next to it. */
+function edgeDip(over: (t: number) => number, edge: number, inner: number): number[] {
+  const [gEdge, gInner] = [over(edge), over(inner)];
+  if (!(gEdge > 0 && gInner >= gEdge)) return [];
+  const bottom = dipAtEdge(over, edge, inner, gEdge, gInner);
+  return bottom === null ? [] : sidesOf(over, Math.min(edge, inner), Math.max(edge, inner), bottom);
+}
+
+function sidesOf(over: (t: number) => number, a: number, b: number, bottom: Dip): number[] {
   if (bottom.value >= 0) return [];
-  return [bracketedRoot(over, a, bottom.x, ga, bottom.value), bracketedRoot(over, bottom.x, b, bottom.value, gb)];
+  return [
+    bracketedRoot(over, a, bottom.x, over(a), bottom.value),
+    bracketedRoot(over, bottom.x, b, bottom.value, over(b)),
+  ];
 }

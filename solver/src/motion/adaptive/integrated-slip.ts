@@ -36,6 +36,8 @@ export class IntegratedSlip implements Slip {
   /** What v_r must rise above before its fall counts, m/s; and whether it has. */
   private noise = 0;
   private hasRisen = true;
+  /** The largest |v_r| so far, m/s. */
+  private fastest = 0;
   private readonly at = new Float64Array(2);
 
   constructor(
@@ -65,6 +67,7 @@ export class IntegratedSlip implements Slip {
     const sizes = this.sizes(rate);
     this.noise = noiseShare * sizes[1];
     this.hasRisen = Math.abs(stance.slip) > this.noise;
+    this.fastest = sizes[1];
     const reached = integrate({
       from: stance.t,
       to: limit,
@@ -91,11 +94,8 @@ export class IntegratedSlip implements Slip {
 
   /** True where v_r reaches 0 at τ to within `blur` s. */
   private stopsAt(tau: number, blur: number): boolean {
-    const { stance, problem } = this;
-    this.evaluate(tau);
-    const carrier = problem.counterface === "base" ? 0 : this.inputs.values.baseAcceleration;
-    const rate = stance.contact * (this.acceleration + carrier);
-    return this.hasRisen && rate < 0 && stance.contact * this.slip <= -rate * blur;
+    const rate = this.slipRate(tau);
+    return this.hasRisen && rate < 0 && this.stance.contact * this.slip <= -rate * blur;
   }
 
   evaluate(tau: number): void {
@@ -162,8 +162,10 @@ export class IntegratedSlip implements Slip {
       "contact",
       this.hasRisen ? 0 : -this.noise,
     );
+    if (this.hasRisen && ending.cause === "contact") this.markTouch(ending, to - stance.t);
     this.evaluate(to - stance.t);
     this.hasRisen ||= stance.contact * this.slip > this.noise;
+    this.fastest = Math.max(this.fastest, Math.abs(this.slip));
     if (watches.side)
       look(
         channel(() => this.position, stance.side),
@@ -183,6 +185,26 @@ export class IntegratedSlip implements Slip {
       );
     }
     return ending.cause !== "corner";
+  }
+
+  /**
+   * A v_r that dips below 0 by no more than the integrator's error only touches it: told at the bottom, −v̇_r/v̈_r further on.
+   * One that the error keeps above 0 is not seen: what a tolerance hides it must not invent either.
+   */
+  private markTouch(ending: Ending, end: number): void {
+    const apart = 1e-4 / this.rate();
+    const rate = this.slipRate(ending.tau);
+    const second = (rate - this.slipRate(ending.tau - apart)) / apart;
+    if (!(second > 0 && (rate * rate) / (2 * second) <= noiseShare * this.fastest)) return;
+    ending.isTouch = true;
+    ending.tau = Math.min(end, ending.tau - rate / second);
+  }
+
+  /** d|v_r|/dt at τ, m/s². */
+  private slipRate(tau: number): number {
+    this.evaluate(tau);
+    const carrier = this.problem.counterface === "base" ? 0 : this.inputs.values.baseAcceleration;
+    return this.stance.contact * (this.acceleration + carrier);
   }
 
   /** A corner of the law is passed either way; a slip that starts on one has left it by the end of the step. */

@@ -66,6 +66,7 @@ export class ExactSlip implements Slip {
     if (!(tau <= ending.tau)) return;
     ending.tau = tau;
     ending.cause = cause;
+    ending.isTouch = watched.isTouch;
   }
 
   evaluate(tau: number): void {

@@ -284,7 +284,8 @@ export class Oscillation {
       unitRoundoff *
       (Math.abs(free * rate) +
         Math.abs(push[0] * impulse) +
-        Math.abs(push[1] * steady) +
+        // the integrals' own cancellation: they come from the equation, divided by ω₀²
+        Math.min(tau * tau, 1 / squared) * (Math.abs(push[1]) + tau * (Math.abs(push[2]) + tau * Math.abs(push[3]))) +
         this.magnitude +
         Math.abs(this.sumRe * squared * impulse) +
         Math.abs(velocity));
