@@ -20,7 +20,7 @@ export async function up(knex: Knex): Promise<void> {
       plan MEDIUMTEXT CHARACTER SET utf8mb4 COLLATE utf8mb4_bin NOT NULL,
       answer MEDIUMTEXT CHARACTER SET utf8mb4 COLLATE utf8mb4_bin NULL,
       cells INT UNSIGNED NOT NULL,
-      tile_cells INT UNSIGNED NOT NULL,
+      tile_cells TEXT CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
       cell_values INT UNSIGNED NOT NULL,
       runner CHAR(36) CHARACTER SET ascii COLLATE ascii_bin NULL,
       runner_account CHAR(36) CHARACTER SET ascii COLLATE ascii_bin NULL,

@@ -167,9 +167,9 @@ describe("two people at one sweep", () => {
 });
 
 it("a full store is told with what to do, and has room again when something is deleted", async () => {
-  const { id } = await begin({ cells: 240_000, tileCells: 900, cellValues: 100 });
+  const { id } = await begin({ tileCells: Array(300).fill(800), cellValues: 100 });
   const params = { projectId, scenarioId };
-  const body = { ...smallSweep, cells: 100_000, tileCells: 900, cellValues: 100 };
+  const body = { ...smallSweep, tileCells: Array(112).fill(900), cellValues: 100 };
   const failure = await ada.fail("createExploration", { params, body });
   expect(failure).toMatchObject({ status: 507, code: "full-store" });
   expect(failure.message).toMatch(/hold 192 of 200 MB\. Delete one to make room, or ask for fewer cells\.$/);
@@ -178,7 +178,7 @@ it("a full store is told with what to do, and has room again when something is d
 });
 
 it("a tile larger than a request is not planned", async () => {
-  const body = { ...smallSweep, tileCells: 4096, cellValues: 100 };
+  const body = { ...smallSweep, tileCells: [4096], cellValues: 100 };
   const failure = await ada.fail("createExploration", { params: { projectId, scenarioId }, body });
   expect(failure.fields).toEqual([{ path: "tileCells", message: "A tile has no more than 720000 bytes." }]);
 });

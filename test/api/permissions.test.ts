@@ -76,7 +76,7 @@ async function layProject() {
   );
   const projectId = await createProject(owner);
   const { id: scenarioId } = await createScenario(owner, projectId);
-  const { id: explorationId } = await createExploration(owner, projectId, scenarioId, { cells: 2 });
+  const { id: explorationId } = await createExploration(owner, projectId, scenarioId, { tileCells: [2] });
   const tile = { runner, content: tileContent(cellsOf(0)) };
   await owner.get("saveTile", { params: { projectId, explorationId, number: "0" }, body: tile });
   for (const role of ["editor", "reviewer", "reader"] as const) await addMember(owner, projectId, emailOf(role), role);

@@ -11,8 +11,7 @@ export const smallSweep = {
   scenarioVersion: 1,
   solverVersion: "0.1.0",
   plan: { axes: [] },
-  cells: 5,
-  tileCells: 2,
+  tileCells: [2, 2, 1],
   cellValues: 2,
 };
 

@@ -3,7 +3,8 @@ import { notFound } from "../errors.ts";
 import type { ExplorationSummary, StoredExploration } from "./explorations-schema.ts";
 import type { ExplorationRow, SummaryRow } from "./explorations-store.ts";
 
-export const tilesOf = ({ cells, tile_cells: tileCells }: SummaryRow): number => Math.ceil(cells / tileCells);
+/** How many cells each tile has. */
+export const tilesOf = ({ tile_cells: tileCells }: SummaryRow): number[] => JSON.parse(tileCells) as number[];
 /** True while the page that computes it is heard of. */
 export const isHeld = ({ runner_until: until }: SummaryRow): boolean => until !== null && until.getTime() > Date.now();
 
@@ -17,7 +18,7 @@ export function summaryOf(row: SummaryRow, digest: string): ExplorationSummary {
     headline: row.headline,
     state: row.headline !== null ? "done" : isHeld(row) ? "running" : "stopped",
     tilesSaved: Number(row.saved),
-    tiles: tilesOf(row),
+    tiles: tilesOf(row).length,
     scenarioVersion: row.scenario_version,
     isStale: row.input_digest.toString("hex") !== digest,
     createdAt: row.created_at.toISOString(),
@@ -32,8 +33,7 @@ export function explorationOf(row: ExplorationRow, saved: number[], digest: stri
     content: JSON.parse(row.content) as Scenario,
     solverVersion: row.solver_version,
     plan: JSON.parse(row.plan) as Record<string, unknown>,
-    cells: row.cells,
-    tileCells: row.tile_cells,
+    tileCells: tilesOf(row),
     cellValues: row.cell_values,
     answer: row.answer === null ? null : (JSON.parse(row.answer) as Record<string, unknown>),
     saved,

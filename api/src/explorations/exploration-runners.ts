@@ -76,8 +76,9 @@ export function createRunners(database: Database) {
     async conclude(place: Place, conclusion: z.output<typeof conclusionSchema>): Promise<void> {
       await database.transaction(async (transaction) => {
         const row = (await lockExploration(transaction, place.projectId, place.explorationId)) ?? missing();
-        const left = tilesOf(row) - Number(row.saved);
-        if (left > 0) throw new Refusal(409, "not-done", `${left} of ${tilesOf(row)} tiles are not there yet.`);
+        const all = tilesOf(row).length;
+        const left = all - Number(row.saved);
+        if (left > 0) throw new Refusal(409, "not-done", `${left} of ${all} tiles are not there yet.`);
         await concludeExploration(transaction, place.explorationId, conclusion);
         await holdExploration(transaction, place.explorationId, null);
       });
@@ -88,8 +89,9 @@ export function createRunners(database: Database) {
 const heldUntil = (): Date => new Date(Date.now() + HELD_MS);
 
 function demandTile(row: SummaryRow, number: number, bytes: Buffer): void {
-  if (number >= tilesOf(row)) throw badRequest([{ path: "number", message: `There are ${tilesOf(row)} tiles.` }]);
-  const cells = Math.min(row.tile_cells, row.cells - number * row.tile_cells);
+  const tiles = tilesOf(row);
+  if (number >= tiles.length) throw badRequest([{ path: "number", message: `There are ${tiles.length} tiles.` }]);
+  const cells = tiles[number];
   const expected = cells * row.cell_values * 8;
   if (bytes.length === expected) return;
   const message = `Tile ${number} has ${expected} bytes: ${cells} cells of ${row.cell_values} numbers. These are ${bytes.length}.`;

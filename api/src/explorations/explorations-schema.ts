@@ -17,10 +17,9 @@ const json = z
   .record(z.string(), z.unknown())
   .refine((value) => JSON.stringify(value).length <= mostText, `No more than ${mostText} characters of JSON.`);
 
-/** What the result consists of: `cells` rows of `cellValues` numbers, kept in tiles of `tileCells` rows. None for a search. */
+/** What the result consists of: tiles of so many cells each, a row of `cellValues` numbers for a cell. None for a search. */
 const gridShape = {
-  cells: z.int().min(0).max(mostCells),
-  tileCells: z.int().min(1).max(mostTileCells),
+  tileCells: z.array(z.int().min(1).max(mostTileCells)).max(2500),
   cellValues: z.int().min(1).max(100),
 };
 
@@ -40,10 +39,16 @@ export const explorationDraftSchema = z
     /** Where it is answered already. */
     conclusion: conclusionSchema.optional(),
   })
-  .refine(({ tileCells, cellValues }) => tileCells * cellValues * 8 <= mostTileBytes, {
+  .refine(({ tileCells }) => countOf(tileCells) <= mostCells, {
+    path: ["tileCells"],
+    message: `No more than ${mostCells} cells.`,
+  })
+  .refine(({ tileCells, cellValues }) => Math.max(0, ...tileCells) * cellValues * 8 <= mostTileBytes, {
     path: ["tileCells"],
     message: `A tile has no more than ${mostTileBytes} bytes.`,
   });
+
+const countOf = (tileCells: readonly number[]): number => tileCells.reduce((sum, cells) => sum + cells, 0);
 
 /** Whoever computes: a page, by an id it has made for itself. One at a time holds an exploration. */
 export const runnerSchema = z.strictObject({ runner: z.uuid() });

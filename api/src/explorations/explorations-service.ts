@@ -94,9 +94,10 @@ function trailed(
 async function demandRoom(
   transaction: Database,
   projectId: string,
-  { cells, cellValues }: { cells: number; cellValues: number },
+  { tileCells, cellValues }: { tileCells: readonly number[]; cellValues: number },
 ): Promise<void> {
   const held = await lockBytes(transaction, projectId);
+  const cells = tileCells.reduce((sum, each) => sum + each, 0);
   if (held + cells * cellValues * 8 <= MOST_BYTES) return;
   const [used, most] = [held, MOST_BYTES].map((bytes) => Math.round(bytes / 1e6));
   const message = `The sweeps and studies of this project hold ${used} of ${most} MB. Delete one to make room, or ask for fewer cells.`;

@@ -20,7 +20,8 @@ export interface ExplorationRow {
   readonly plan: string;
   readonly answer: string | null;
   readonly cells: number;
-  readonly tile_cells: number;
+  /** JSON: the cells of each tile. */
+  readonly tile_cells: string;
   readonly cell_values: number;
   readonly runner: string | null;
   readonly runner_account: string | null;
@@ -137,8 +138,8 @@ export async function insertExploration(database: Database, insertion: Insertion
     solver_version: draft.solverVersion,
     plan: JSON.stringify(draft.plan),
     answer: draft.conclusion ? JSON.stringify(draft.conclusion.answer) : null,
-    cells: draft.cells,
-    tile_cells: draft.tileCells,
+    cells: draft.tileCells.reduce((sum, cells) => sum + cells, 0),
+    tile_cells: JSON.stringify(draft.tileCells),
     cell_values: draft.cellValues,
     created_at: new Date(),
     created_by: insertion.accountId,
