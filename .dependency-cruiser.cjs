@@ -14,7 +14,7 @@ module.exports = {
       name: "page-to-server-by-contract",
       severity: "error",
       from: { path: "^web/" },
-      to: { path: "^api/", pathNot: "^api/src/contract\\.ts$" },
+      to: { path: "^api/", pathNot: "^api/src/(contract|addresses)\\.ts$" },
     },
     {
       name: "solver-through-its-door",
@@ -24,10 +24,10 @@ module.exports = {
     },
     {
       name: "contract-shared-with-page",
-      comment: "What the page bundles of the server: schemas only.",
+      comment: "What the page bundles of the server: schemas and addresses only.",
       severity: "error",
       from: { path: "^api/src/(contract|.*-schema)\\.ts$" },
-      to: { path: "^api/src/", pathNot: "-schema\\.ts$" },
+      to: { path: "^api/src/", pathNot: "(-schema|/addresses)\\.ts$" },
     },
     {
       name: "store-is-its-resource's-own",

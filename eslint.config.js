@@ -106,8 +106,8 @@ const apiRules = [
 ];
 
 const contractOnly = {
-  regex: "^@restband/api(?!/contract$)|^(?:\\.\\./)+api/src",
-  message: "Of the server the page knows the contract only.",
+  regex: "^@restband/api(?!/(?:addresses|contract)$)|^(?:\\.\\./)+api/src",
+  message: "Of the server the page knows the contract and its addresses only.",
 };
 const webAnywhere = [zod, throughTheDoor, contractOnly];
 

@@ -1,4 +1,5 @@
 import { z } from "@restband/solver";
+import { addresses, type Address, type RouteName } from "./addresses.ts";
 import { claimSchema, sessionSchema, signInSchema, signUpSchema } from "./accounts/accounts-schema.ts";
 import { activitySchema } from "./activity/activity-schema.ts";
 import {
@@ -25,6 +26,7 @@ import {
   scenarioSummarySchema,
 } from "./scenarios/scenarios-schema.ts";
 
+export type { RouteName } from "./addresses.ts";
 export * from "./accounts/accounts-schema.ts";
 export * from "./activity/activity-schema.ts";
 export * from "./chain/chain-schema.ts";
@@ -37,10 +39,8 @@ export * from "./reviews/reviews-schema.ts";
 export * from "./revisions/revisions-schema.ts";
 export * from "./scenarios/scenarios-schema.ts";
 
-/** One route of the server: what goes in, what comes out. Paths are express paths under `/api`; every object is strict. */
-export interface Route {
-  readonly method: "GET" | "POST" | "PUT" | "PATCH" | "DELETE";
-  readonly path: string;
+/** One route of the server: what goes in, what comes out. Every object is strict. */
+export interface Route extends Address {
   readonly params?: z.ZodObject;
   readonly body?: z.ZodType;
   readonly query?: z.ZodObject;
@@ -62,47 +62,25 @@ const explorationParams = z.strictObject({ projectId: id, explorationId: id });
  * A route is allowed to whom `middleware/permit.ts` says.
  */
 export const routes = {
-  signUp: { method: "POST", path: "/accounts", body: signUpSchema, status: 202 },
-  claimAccount: { method: "POST", path: "/accounts/claim", body: claimSchema, status: 200, response: sessionSchema },
-  readSession: { method: "GET", path: "/session", status: 200, response: sessionSchema },
-  signIn: { method: "POST", path: "/session", body: signInSchema, status: 200, response: sessionSchema },
-  signOut: { method: "DELETE", path: "/session", status: 204 },
-
-  listProjects: { method: "GET", path: "/projects", status: 200, response: z.array(projectSchema) },
-  createProject: { method: "POST", path: "/projects", body: projectDraftSchema, status: 201, response: projectSchema },
-  readProject: {
-    method: "GET",
-    path: "/projects/:projectId",
-    params: projectParams,
-    status: 200,
-    response: projectSchema,
-  },
+  signUp: { ...addresses.signUp, body: signUpSchema, status: 202 },
+  claimAccount: { ...addresses.claimAccount, body: claimSchema, status: 200, response: sessionSchema },
+  readSession: { ...addresses.readSession, status: 200, response: sessionSchema },
+  signIn: { ...addresses.signIn, body: signInSchema, status: 200, response: sessionSchema },
+  signOut: { ...addresses.signOut, status: 204 },
+  listProjects: { ...addresses.listProjects, status: 200, response: z.array(projectSchema) },
+  createProject: { ...addresses.createProject, body: projectDraftSchema, status: 201, response: projectSchema },
+  readProject: { ...addresses.readProject, params: projectParams, status: 200, response: projectSchema },
   changeProject: {
-    method: "PATCH",
-    path: "/projects/:projectId",
+    ...addresses.changeProject,
     params: projectParams,
     body: projectDraftSchema,
     status: 200,
     response: projectSchema,
   },
-
-  archiveProject: {
-    method: "POST",
-    path: "/projects/:projectId/archive",
-    params: projectParams,
-    status: 200,
-    response: projectSchema,
-  },
-  restoreProject: {
-    method: "POST",
-    path: "/projects/:projectId/restore",
-    params: projectParams,
-    status: 200,
-    response: projectSchema,
-  },
+  archiveProject: { ...addresses.archiveProject, params: projectParams, status: 200, response: projectSchema },
+  restoreProject: { ...addresses.restoreProject, params: projectParams, status: 200, response: projectSchema },
   listActivity: {
-    method: "GET",
-    path: "/projects/:projectId/activity",
+    ...addresses.listActivity,
     params: projectParams,
     query: z.strictObject({
       before: z
@@ -113,62 +91,38 @@ export const routes = {
     status: 200,
     response: z.array(activitySchema),
   },
-
-  listMembers: {
-    method: "GET",
-    path: "/projects/:projectId/members",
-    params: projectParams,
-    status: 200,
-    response: z.array(memberSchema),
-  },
+  listMembers: { ...addresses.listMembers, params: projectParams, status: 200, response: z.array(memberSchema) },
   addMember: {
-    method: "POST",
-    path: "/projects/:projectId/members",
+    ...addresses.addMember,
     params: projectParams,
     body: memberAddSchema,
     status: 201,
     response: memberSchema,
   },
   changeMember: {
-    method: "PATCH",
-    path: "/projects/:projectId/members/:accountId",
+    ...addresses.changeMember,
     params: memberParams,
     body: memberChangeSchema,
     status: 200,
     response: memberSchema,
   },
-  removeMember: {
-    method: "DELETE",
-    path: "/projects/:projectId/members/:accountId",
-    params: memberParams,
-    status: 204,
-  },
-
+  removeMember: { ...addresses.removeMember, params: memberParams, status: 204 },
   listScenarios: {
-    method: "GET",
-    path: "/projects/:projectId/scenarios",
+    ...addresses.listScenarios,
     params: projectParams,
     status: 200,
     response: z.array(scenarioSummarySchema),
   },
   createScenario: {
-    method: "POST",
-    path: "/projects/:projectId/scenarios",
+    ...addresses.createScenario,
     params: projectParams,
     body: scenarioDraftSchema,
     status: 201,
     response: scenarioSchema,
   },
-  readScenario: {
-    method: "GET",
-    path: "/projects/:projectId/scenarios/:scenarioId",
-    params: scenarioParams,
-    status: 200,
-    response: scenarioSchema,
-  },
+  readScenario: { ...addresses.readScenario, params: scenarioParams, status: 200, response: scenarioSchema },
   saveScenario: {
-    method: "PUT",
-    path: "/projects/:projectId/scenarios/:scenarioId",
+    ...addresses.saveScenario,
     params: scenarioParams,
     body: scenarioDraftSchema,
     ifMatch: true,
@@ -176,117 +130,77 @@ export const routes = {
     response: scenarioSchema,
   },
   readContents: {
-    method: "GET",
-    path: "/projects/:projectId/contents",
+    ...addresses.readContents,
     params: projectParams,
     query: scenarioIdsSchema,
     status: 200,
     response: z.array(contentSchema),
   },
   createCases: {
-    method: "POST",
-    path: "/projects/:projectId/cases",
+    ...addresses.createCases,
     params: projectParams,
     body: casesDraftSchema,
     status: 201,
     response: z.array(scenarioSummarySchema),
   },
   duplicateScenario: {
-    method: "POST",
-    path: "/projects/:projectId/scenarios/:scenarioId/duplicate",
+    ...addresses.duplicateScenario,
     params: scenarioParams,
     body: duplicateSchema,
     status: 201,
     response: scenarioSchema,
   },
-  moveScenario: {
-    method: "POST",
-    path: "/projects/:projectId/scenarios/:scenarioId/move",
-    params: scenarioParams,
-    body: moveSchema,
-    status: 204,
-  },
-  archiveScenario: {
-    method: "POST",
-    path: "/projects/:projectId/scenarios/:scenarioId/archive",
-    params: scenarioParams,
-    status: 204,
-  },
-  restoreScenario: {
-    method: "POST",
-    path: "/projects/:projectId/scenarios/:scenarioId/restore",
-    params: scenarioParams,
-    status: 204,
-  },
-
+  moveScenario: { ...addresses.moveScenario, params: scenarioParams, body: moveSchema, status: 204 },
+  archiveScenario: { ...addresses.archiveScenario, params: scenarioParams, status: 204 },
+  restoreScenario: { ...addresses.restoreScenario, params: scenarioParams, status: 204 },
   listExplorations: {
-    method: "GET",
-    path: "/projects/:projectId/scenarios/:scenarioId/explorations",
+    ...addresses.listExplorations,
     params: scenarioParams,
     status: 200,
     response: z.array(explorationSummarySchema),
   },
   createExploration: {
-    method: "POST",
-    path: "/projects/:projectId/scenarios/:scenarioId/explorations",
+    ...addresses.createExploration,
     params: scenarioParams,
     body: explorationDraftSchema,
     status: 201,
     response: explorationSchema,
   },
   readExploration: {
-    method: "GET",
-    path: "/projects/:projectId/explorations/:explorationId",
+    ...addresses.readExploration,
     params: explorationParams,
     status: 200,
     response: explorationSchema,
   },
   claimExploration: {
-    method: "POST",
-    path: "/projects/:projectId/explorations/:explorationId/claim",
+    ...addresses.claimExploration,
     params: explorationParams,
     body: claimExplorationSchema,
     status: 200,
     response: explorationSchema,
   },
-  releaseExploration: {
-    method: "POST",
-    path: "/projects/:projectId/explorations/:explorationId/release",
-    params: explorationParams,
-    body: runnerSchema,
-    status: 204,
-  },
+  releaseExploration: { ...addresses.releaseExploration, params: explorationParams, body: runnerSchema, status: 204 },
   readTiles: {
-    method: "GET",
-    path: "/projects/:projectId/explorations/:explorationId/tiles",
+    ...addresses.readTiles,
     params: explorationParams,
     query: tileNumbersSchema,
     status: 200,
     response: z.array(tileSchema),
   },
   saveTile: {
-    method: "PUT",
-    path: "/projects/:projectId/explorations/:explorationId/tiles/:number",
+    ...addresses.saveTile,
     params: explorationParams.extend({ number: z.string().regex(/^\d{1,6}$/) }),
     body: tileDraftSchema,
     status: 204,
   },
   concludeExploration: {
-    method: "PUT",
-    path: "/projects/:projectId/explorations/:explorationId/conclusion",
+    ...addresses.concludeExploration,
     params: explorationParams,
     body: conclusionSchema,
     status: 204,
   },
-  deleteExploration: {
-    method: "DELETE",
-    path: "/projects/:projectId/explorations/:explorationId",
-    params: explorationParams,
-    status: 204,
-  },
-} as const satisfies Record<string, Route>;
-
-export type RouteName = keyof typeof routes;
+  deleteExploration: { ...addresses.deleteExploration, params: explorationParams, status: 204 },
+} as const satisfies Record<RouteName, Route>;
 
 /** Every failure: a code for programs, a sentence for people, and the fields it concerns. */
 export const failureSchema = z.strictObject({

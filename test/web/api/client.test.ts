@@ -100,6 +100,16 @@ describe("the client", () => {
     expect(failure.message).toMatch(/^The server has failed/u);
   });
 
+  it("takes nothing that is no answer of ours for one", async () => {
+    vi.stubGlobal("fetch", () => Promise.resolve(new Response("<h1>Sign in to the network</h1>", { status: 200 })));
+    expect(await failureOf(call("listProjects", {}))).toMatchObject({ code: "unexplained", status: 200 });
+  });
+
+  it("takes a refusal without its fields for an unexplained one", async () => {
+    fakeServer({ "GET /projects": { status: 400, body: { error: { code: "bad-request", message: "No." } } } });
+    expect(await failureOf(call("listProjects", {}))).toMatchObject({ code: "unexplained", status: 400 });
+  });
+
   it("knows a session that has ended from a wrong password", async () => {
     fakeServer({ "GET /projects": refuse(401, "not-signed-in", "Sign in to go on.") });
     expect((await failureOf(call("listProjects", {}))).isSignedOut).toBe(true);

@@ -1,5 +1,7 @@
-import { failureSchema, routes, sessionSchema, type Route, type RouteName } from "@restband/api/contract";
+import { addresses, type Address, type RouteName } from "@restband/api/addresses";
+import type { routes } from "@restband/api/contract";
 import type { z } from "@restband/solver";
+import { failureOf, tokenIn } from "./answer.ts";
 import { ApiFailure, unreachable } from "./api-failure.ts";
 import { noteConnection } from "./connection.ts";
 
@@ -30,25 +32,24 @@ let csrfToken: string | null = null;
 
 /**
  * Calls a route of the server by its name and returns its answer.
- * @throws {ApiFailure} whatever goes wrong: refused, not found, signed out, no server.
+ * @throws {ApiFailure} whatever goes wrong: refused, not found, signed out, no server, an answer that cannot be read.
  */
 export async function call<Name extends RouteName>(name: Name, input: Input<Name>): Promise<Answer<Name>> {
-  const route: Route = routes[name];
   const given: AnyInput = input;
   try {
-    return (await send(route, given)) as Answer<Name>;
+    return (await send(addresses[name], given)) as Answer<Name>;
   } catch (error) {
     // Another tab signed in anew: the token is stale, nothing was done yet, once more with the new one.
     if (!(error instanceof ApiFailure && error.code === "csrf-token")) throw error;
     csrfToken = null;
-    return (await send(route, given)) as Answer<Name>;
+    return (await send(addresses[name], given)) as Answer<Name>;
   }
 }
 
-async function send(route: Route, input: AnyInput): Promise<unknown> {
+async function send(route: Address, input: AnyInput): Promise<unknown> {
   const isUnsafe = route.method !== "GET";
-  if (isUnsafe && csrfToken === null) await send(routes.readSession, { signal: input.signal });
-  const response = await reach(address(route, input), {
+  if (isUnsafe && csrfToken === null) await send(addresses.readSession, { signal: input.signal });
+  const response = await reach(urlOf(route, input), {
     method: route.method,
     headers: headers(input, isUnsafe),
     body: input.body === undefined ? undefined : JSON.stringify(input.body),
@@ -56,15 +57,15 @@ async function send(route: Route, input: AnyInput): Promise<unknown> {
     credentials: "same-origin",
   });
   const answer = await read(response);
-  if (!response.ok) throw failure(response.status, answer);
-  const session = route.response === sessionSchema ? sessionSchema.safeParse(answer) : null;
-  if (session?.success) csrfToken = session.data.csrfToken;
+  const failure = failureOf(response.status, answer);
+  if (failure) throw failure;
+  csrfToken = tokenIn(answer) ?? csrfToken;
   return answer;
 }
 
-function address(route: Route, { params = {}, query }: AnyInput): string {
-  const path = route.path.replace(/:(\w+)/gu, (_, key: string) => encodeURIComponent(params[key]));
-  return `/api${path}${query ? `?${new URLSearchParams(query)}` : ""}`;
+function urlOf({ path }: Address, { params = {}, query }: AnyInput): string {
+  const filled = path.replace(/:(\w+)/gu, (_, key: string) => encodeURIComponent(params[key]));
+  return `/api${filled}${query ? `?${new URLSearchParams(query)}` : ""}`;
 }
 
 function headers({ body, version }: AnyInput, isUnsafe: boolean): Record<string, string> {
@@ -96,14 +97,6 @@ async function read(response: Response): Promise<unknown> {
   } catch {
     return undefined;
   }
-}
-
-function failure(status: number, answer: unknown): ApiFailure {
-  const told = failureSchema.safeParse(answer);
-  if (told.success) return new ApiFailure(status, told.data.error);
-  const message =
-    status >= 500 ? "The server has failed at this. Nothing was saved; try again." : "The server refuses this.";
-  return new ApiFailure(status, { code: "unexplained", message });
 }
 
 /** Forgets the session's token: for tests, and when a session has ended. */
