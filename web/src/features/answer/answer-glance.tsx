@@ -3,7 +3,7 @@ import type { Computed } from "../../compute/use-run.ts";
 import { say } from "../../format/format-quantity.ts";
 import { answerSentence, shortAnswer } from "./answer-sentence.ts";
 import { useStrip } from "./answer.tsx";
-import { Verdict } from "./verdict.tsx";
+import { Verdict } from "../../components/verdict.tsx";
 
 /** The motion of a run in a row of a list, with how long it is. */
 export function StripGlance({ computed }: { computed: Computed }) {

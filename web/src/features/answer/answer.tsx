@@ -12,7 +12,7 @@ import { leadLine } from "./lead-line.ts";
 import { LimitRulers } from "./limit-rulers.tsx";
 import { RangeCoverage } from "./range-coverage.tsx";
 import { rangesLine, type SayValue } from "./range-words.ts";
-import { Verdict } from "./verdict.tsx";
+import { Verdict } from "../../components/verdict.tsx";
 
 interface AnswerProps {
   run: Run;
