@@ -1,6 +1,7 @@
-import { useMemo } from "react";
+import { Suspense, useMemo } from "react";
 import { classNames } from "../../components/class-names.ts";
 import { Figure } from "../../components/figure.tsx";
+import { lazyPart } from "../../components/lazy-part.ts";
 import { usePlotTheme } from "../../components/plot-theme.ts";
 import { useShortcut } from "../../components/shortcuts.tsx";
 import { useIsPhone } from "../../components/use-media.ts";
@@ -25,6 +26,8 @@ import { useSeenPart } from "./use-part.ts";
 import { usePlay } from "./use-play.ts";
 import { useScenarioOverlay } from "./use-scenario-overlay.ts";
 import { ViewChoice } from "./view-choice.tsx";
+
+const SpectrumSheet = lazyPart(async () => (await import("./spectrum/spectrum-sheet.tsx")).SpectrumSheet);
 
 interface EvidenceProps {
   view: RunView;
@@ -81,6 +84,11 @@ export function Evidence({ view: newest, t, onMove, isStale }: EvidenceProps) {
         </div>
       </div>
       <LoopSheets view={view} range={range} t={t} theme={theme} />
+      {panels.includes("spectrum") && (
+        <Suspense fallback={<div className="min-h-[420px]" />}>
+          <SpectrumSheet view={view} range={range} theme={theme} />
+        </Suspense>
+      )}
       <SaveRun view={view} />
       {isPhone && <DockedStrip view={view} t={t} onMove={moveTo} onStep={step} />}
     </div>

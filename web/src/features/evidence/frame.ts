@@ -2,9 +2,6 @@ import type { Unit } from "../../format/unit.ts";
 
 export type PanelKey = "displacement" | "velocity" | "acceleration" | "friction" | "drive";
 
-/** Panels a person adds to the three that are always there. */
-export type ExtraPanel = Extract<PanelKey, "acceleration" | "drive">;
-
 /** The range of a panel in SI, and the unit it is drawn in. */
 export interface PanelScale {
   readonly key: PanelKey;

@@ -10,7 +10,7 @@ export interface LoopLabel {
   readonly x: number;
   readonly y: number;
   readonly anchor: "start" | "middle" | "end";
-  readonly tone: "slip" | "stick" | "quiet";
+  readonly tone: "slip" | "stick" | "quiet" | "ink";
 }
 
 /** Of a sheet, px. */
@@ -52,7 +52,7 @@ const LETTER = 7;
 const LINE = 16;
 
 /** Each label within the sheet; of two that would lie over each other the first stays. */
-function apart(labels: readonly LoopLabel[], { width }: Size): LoopLabel[] {
+export function apart(labels: readonly LoopLabel[], { width }: Size): LoopLabel[] {
   const kept: LoopLabel[] = [];
   for (const label of labels) {
     const beyond = Math.max(0, endsOf(label)[1] - (width - 4));

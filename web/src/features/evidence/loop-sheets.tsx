@@ -10,6 +10,7 @@ import { acrossOf, downOf, loopLabels, type LoopLabel, type Size } from "./loop-
 import { loopWords } from "./plot-words.ts";
 import { fromDrive, type RunView } from "./run-view.ts";
 import { SavePlot } from "./save-plot.tsx";
+import { SheetLabels } from "./sheet-labels.tsx";
 import type { Range } from "./part-of-run.ts";
 
 interface LoopSheetsProps {
@@ -86,32 +87,11 @@ function LoopSheet({ view, part, frame, t, theme }: LoopSheetProps) {
           <span className="text-ink">{frame.across.name}</span>, {frame.across.unit.label}
         </p>
         <svg className="pointer-events-none absolute inset-0 h-full w-full" aria-hidden="true">
-          {labels.map((label) => (
-            <Label key={label.text + label.y} label={label} />
-          ))}
+          <SheetLabels labels={labels} />
           <CursorRing view={view} frame={frame} size={size} t={t} />
         </svg>
       </div>
     </figure>
-  );
-}
-
-const tones: Record<LoopLabel["tone"], string> = { slip: "fill-slip", stick: "fill-stick", quiet: "fill-quiet" };
-
-/** A word on a ground of its own, so that lines do not run through it. */
-function Label({ label: { text, x, y, anchor, tone } }: { label: LoopLabel }) {
-  return (
-    <text
-      x={x}
-      y={y}
-      textAnchor={anchor}
-      className={`${tones[tone]} stroke-raised text-13`}
-      strokeWidth={4}
-      strokeLinejoin="round"
-      paintOrder="stroke"
-    >
-      {text}
-    </text>
   );
 }
 

@@ -1,25 +1,23 @@
-import type { ExtraPanel } from "./frame.ts";
 import { Option } from "./option.tsx";
+import type { Extra } from "./use-panels.ts";
 
 interface PanelChoiceProps {
   hasDrive: boolean;
-  chosen: readonly ExtraPanel[];
-  onToggle: (panel: ExtraPanel) => void;
+  chosen: readonly Extra[];
+  onToggle: (panel: Extra) => void;
 }
 
-/** Which panels stand beside the usual three. */
+/** Which figures stand beside the usual ones. */
 export function PanelChoice({ hasDrive, chosen, onToggle }: PanelChoiceProps) {
+  const option = (panel: Extra, label: string) => (
+    <Option label={label} isChosen={chosen.includes(panel)} onChoose={() => onToggle(panel)} />
+  );
   return (
-    <div className="flex items-center gap-x-3 text-13" role="group" aria-label="More panels">
+    <div className="flex flex-wrap items-center gap-x-3 text-13" role="group" aria-label="More plots">
       <span className="text-quiet">also</span>
-      <Option
-        label="acceleration"
-        isChosen={chosen.includes("acceleration")}
-        onChoose={() => onToggle("acceleration")}
-      />
-      {hasDrive && (
-        <Option label="drive force" isChosen={chosen.includes("drive")} onChoose={() => onToggle("drive")} />
-      )}
+      {option("acceleration", "acceleration")}
+      {hasDrive && option("drive", "drive force")}
+      {option("spectrum", "spectrum")}
     </div>
   );
 }

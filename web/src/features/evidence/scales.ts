@@ -2,9 +2,10 @@ import type { Samples } from "@restband/solver";
 import { ahead, indexAt } from "../../compute/instant.ts";
 import type { Measure } from "../../format/unit.ts";
 import { unitFor } from "../../format/units.ts";
-import { padded, type ExtraPanel, type PanelKey, type PanelScale } from "./frame.ts";
+import { padded, type PanelKey, type PanelScale } from "./frame.ts";
 import type { Overlay } from "./overlay.ts";
 import type { RunView } from "./run-view.ts";
+import type { Extra } from "./use-panels.ts";
 
 interface Range {
   from: number;
@@ -15,7 +16,7 @@ interface Range {
 export function scalesOf(
   view: RunView,
   range: Range,
-  extras: readonly ExtraPanel[] = [],
+  extras: readonly Extra[] = [],
   overlays: readonly Overlay[] = [],
 ): PanelScale[] {
   const { samples, scenario } = view;

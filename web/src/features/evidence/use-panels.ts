@@ -1,12 +1,15 @@
 import { useState } from "react";
-import type { ExtraPanel } from "./frame.ts";
 
 const storageKey = "restband-panels";
+const extras = ["acceleration", "drive", "spectrum"] as const;
 
-/** The panels added to the figure; remembered by this browser. */
-export function usePanels(): [readonly ExtraPanel[], (panel: ExtraPanel) => void] {
+/** What a person adds to the figures that are always there: panels over time, and the spectrum. */
+export type Extra = (typeof extras)[number];
+
+/** The figures added; remembered by this browser. */
+export function usePanels(): [readonly Extra[], (panel: Extra) => void] {
   const [panels, setPanels] = useState(read);
-  const toggle = (panel: ExtraPanel): void => {
+  const toggle = (panel: Extra): void => {
     const next = panels.includes(panel) ? panels.filter((each) => each !== panel) : [...panels, panel];
     setPanels(next);
     try {
@@ -18,10 +21,10 @@ export function usePanels(): [readonly ExtraPanel[], (panel: ExtraPanel) => void
   return [panels, toggle];
 }
 
-function read(): readonly ExtraPanel[] {
+function read(): readonly Extra[] {
   try {
     const kept = (localStorage.getItem(storageKey) ?? "").split(" ");
-    return (["acceleration", "drive"] as const).filter((panel) => kept.includes(panel));
+    return extras.filter((panel) => kept.includes(panel));
   } catch {
     return [];
   }
