@@ -9,6 +9,7 @@ import * as createActivity from "./20261201100700-create-activity.ts";
 import * as addScenarioTitles from "./20261201100800-add-scenario-titles.ts";
 import * as addArchivedAt from "./20261201100900-add-archived-at.ts";
 import * as createExplorations from "./20261201102000-create-explorations.ts";
+import * as addSwitchedOff from "./20261201103000-add-switched-off.ts";
 
 /** Every change of the database, in order. The names are recorded in it: never renamed, never edited once merged. */
 export const migrations = [
@@ -23,4 +24,5 @@ export const migrations = [
   { name: "20261201100800-add-scenario-titles", ...addScenarioTitles },
   { name: "20261201100900-add-archived-at", ...addArchivedAt },
   { name: "20261201102000-create-explorations", ...createExplorations },
+  { name: "20261201103000-add-switched-off", ...addSwitchedOff },
 ];

@@ -47,6 +47,48 @@ describe("a scenario", () => {
     expect(saved).toMatchObject({ version: 2, digest: made.digest, content: made.content });
   });
 
+  it("keeps terms that are switched off beside its content, through saves that say nothing of them", async () => {
+    const off = {
+      place: "force",
+      index: 0,
+      term: { kind: "harmonic", amplitude: 4, hz: 12 },
+      origins: { hz: { kind: "measured", entered: "720 rpm" } },
+      units: { hz: "rpm" },
+    };
+    const written = [{ ...off, term: { ...off.term, phase: 0 } }];
+    const params = { projectId };
+    const body = { content: titled("Shaken"), switchedOff: [off] };
+    const made = await ada.get<StoredScenario>("createScenario", { params, body });
+    expect(made.switchedOff).toEqual(written);
+    expect(made.digest).toBe(digestOf(made.content));
+    const { body: saved } = await save(ada, made.id, 1, made.content).call();
+    expect(saved).toMatchObject({ version: 2, switchedOff: written });
+    const at = { projectId, scenarioId: made.id };
+    const copy = await ada.get<StoredScenario>("duplicateScenario", { params: at, body: { title: "Copy" } });
+    expect(copy.switchedOff).toEqual(written);
+    const without = { content: made.content, switchedOff: [] };
+    const { body: cleared } = await ada.call<StoredScenario>("saveScenario", { params: at, body: without, version: 2 });
+    expect(cleared).toMatchObject({ version: 3, switchedOff: [], digest: made.digest });
+  });
+
+  it("is refused with a term switched off that is none, and with members the solver does not know", async () => {
+    const off = { place: "force", index: 0, origins: {}, units: {} };
+    const refusal = (term: unknown) =>
+      ada.fail("createScenario", {
+        params: { projectId },
+        body: { content: smallScenario, switchedOff: [{ ...off, term }] },
+      });
+    expect(await refusal({ kind: "harmonic", amplitude: 4, hz: -12 })).toMatchObject({
+      status: 422,
+      fields: [{ path: "switchedOff[0].term.hz" }],
+    });
+    expect(await refusal({ kind: "nonsense" })).toMatchObject({
+      status: 422,
+      fields: [{ path: "switchedOff[0].term.kind" }],
+    });
+    expect(await refusal("harmonic")).toMatchObject({ status: 400 });
+  });
+
   it("says who saved it last, and touches its project", async () => {
     const bo = await signUp(server, "Bo");
     await addMember(ada, projectId, bo.email, "editor");

@@ -14,7 +14,7 @@ import type * as friction from "../../solver/src/friction/index.ts";
 import { setLaw } from "../../web/src/features/statement/changes.ts";
 import { draftReducer, openDraft } from "../../web/src/features/statement/draft/draft-reducer.ts";
 import { groups } from "../../web/src/features/statement/groups.ts";
-import { plainText } from "../../web/src/features/statement/saving/plain-text.ts";
+import { plainText } from "../../web/src/features/statement/sentence/plain-text.ts";
 
 /*
  * "One file and one line": the list of laws is replaced by a copy with one more, `fading`, which nothing else knows of. What

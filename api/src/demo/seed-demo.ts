@@ -48,5 +48,5 @@ async function seedProject(
   for (const [person, role] of Object.entries(members) as [DemoPerson, Role][]) {
     await services.members.add(id, { email: demoPeople[person].email, role }, ids[owner]);
   }
-  for (const { by, content } of scenarios) await services.scenarios.create(id, content, ids[by]);
+  for (const { by, content } of scenarios) await services.scenarios.create(id, { content }, ids[by]);
 }

@@ -16,9 +16,9 @@ type Names =
 export function scenariosRoutes(scenarios: ScenariosService): HandlersOf<Names> {
   return {
     listScenarios: ({ params }) => scenarios.list(params.projectId),
-    createScenario: ({ params, body, account }) => scenarios.create(params.projectId, body.content, account.id),
+    createScenario: ({ params, body, account }) => scenarios.create(params.projectId, body, account.id),
     readScenario: ({ params }) => scenarios.read(params.projectId, params.scenarioId),
-    saveScenario: ({ params, body, version, account }) => scenarios.save(params, version, body.content, account.id),
+    saveScenario: ({ params, body, version, account }) => scenarios.save(params, version, body, account.id),
     readContents: ({ params, query }) => scenarios.readContents(params.projectId, query.ids),
     createCases: ({ params, body, account }) => scenarios.createCases(params.projectId, body.contents, account.id),
     duplicateScenario: ({ params, body, account }) => scenarios.duplicate(params, body.title, account.id),

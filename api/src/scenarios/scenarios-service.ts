@@ -3,13 +3,14 @@ import type { Act } from "../activity/activity.ts";
 import type { Database } from "../database/database.ts";
 import { archived, notAllowed, notFound, Refusal } from "../errors.ts";
 import type { MembersService } from "../members/members-service.ts";
-import { canonicalCases, canonicalOf, changedMembers, retitled, type CanonicalScenario } from "./canonical-scenario.ts";
-import type { ScenarioSummary, StoredScenario } from "./scenarios-schema.ts";
+import { canonicalCases, canonicalOf, changedMembers, retitled } from "./canonical-scenario.ts";
+import type { ScenarioSummary, StoredScenario, SwitchedOff } from "./scenarios-schema.ts";
 import {
   findContents,
   findScenario,
   insertScenario,
   insertScenarios,
+  type KeptScenario,
   listScenarios,
   lockScenario,
   type LockedScenario,
@@ -17,8 +18,15 @@ import {
   moveScenario,
   updateScenario,
 } from "./scenarios-store.ts";
+import { checkedSwitchedOff } from "./switched-off.ts";
 
 export type ScenariosService = ReturnType<typeof createScenariosService>;
+
+/** What a person sends to be kept; nothing of it is checked. */
+interface Draft {
+  readonly content: unknown;
+  readonly switchedOff?: readonly SwitchedOff[];
+}
 
 /** A scenario by the ids in a path. */
 interface Place {
@@ -28,7 +36,7 @@ interface Place {
 
 export function createScenariosService(database: Database, members: MembersService) {
   /** Writes a new scenario and the act that made it. */
-  const add = (projectId: string, content: CanonicalScenario, accountId: string, act: Act) =>
+  const add = (projectId: string, content: KeptScenario, accountId: string, act: Act) =>
     database.transaction(async (transaction) => {
       const subjectId = await insertScenario(transaction, projectId, content, accountId);
       const detail = { version: 1, digest: content.digest, title: content.title };
@@ -51,8 +59,8 @@ export function createScenariosService(database: Database, members: MembersServi
     read: (projectId: string, id: string) => read(database, projectId, id),
     /** The contents of those of the scenarios that are in the project. */
     readContents: (projectId: string, ids: readonly string[]) => findContents(database, projectId, ids),
-    create: async (projectId: string, input: unknown, accountId: string): Promise<StoredScenario> =>
-      add(projectId, canonicalOf(input), accountId, "scenario.created"),
+    create: async (projectId: string, draft: Draft, accountId: string): Promise<StoredScenario> =>
+      add(projectId, keptOf(draft), accountId, "scenario.created"),
 
     /** Makes a scenario of each input, or none of any. */
     async createCases(projectId: string, inputs: readonly unknown[], accountId: string): Promise<ScenarioSummary[]> {
@@ -66,8 +74,9 @@ export function createScenariosService(database: Database, members: MembersServi
     },
 
     async duplicate({ projectId, scenarioId }: Place, title: string, accountId: string): Promise<StoredScenario> {
-      const { content } = await read(database, projectId, scenarioId);
-      return add(projectId, retitled(JSON.stringify(content), title), accountId, "scenario.duplicated");
+      const { content, switchedOff } = await read(database, projectId, scenarioId);
+      const copy = { ...retitled(JSON.stringify(content), title), switchedOff };
+      return add(projectId, copy, accountId, "scenario.duplicated");
     },
 
     /**
@@ -77,10 +86,10 @@ export function createScenariosService(database: Database, members: MembersServi
     async save(
       { projectId, scenarioId: subjectId }: Place,
       seen: number,
-      input: unknown,
+      draft: Draft,
       accountId: string,
     ): Promise<StoredScenario> {
-      const content = canonicalOf(input);
+      const content = keptOf(draft);
       return database.transaction(async (transaction) => {
         const stored = await lock(transaction, projectId, subjectId);
         if (stored.version !== seen) throw staleVersion(await read(transaction, projectId, subjectId));
@@ -88,7 +97,8 @@ export function createScenariosService(database: Database, members: MembersServi
         const version = seen + 1;
         await updateScenario(transaction, subjectId, version, content, accountId);
         const { digest, title, text } = content;
-        const detail = { version, digest, title, changed: changedMembers(stored.content, text).join(" ") };
+        const changed = changedMembers(stored.content, text);
+        const detail = { version, digest, title, changed: changed.join(" ") };
         await recordAct(transaction, { projectId, accountId, act: "scenario.saved", subjectId, detail });
         return read(transaction, projectId, subjectId);
       });
@@ -120,6 +130,11 @@ async function move(
     await recordAct(transaction, { ...told, projectId, act: "scenario.moved-out" });
     await recordAct(transaction, { ...told, projectId: toProjectId, act: "scenario.moved-in" });
   });
+}
+
+/** @throws Refusal 422 with every faulty field */
+function keptOf({ content, switchedOff }: Draft): KeptScenario {
+  return { ...canonicalOf(content), switchedOff: switchedOff && checkedSwitchedOff(switchedOff) };
 }
 
 async function read(database: Database, projectId: string, id: string): Promise<StoredScenario> {

@@ -2,9 +2,14 @@ import { randomUUID } from "node:crypto";
 import type { Scenario } from "@restband/solver";
 import type { Database } from "../database/database.ts";
 import type { CanonicalScenario } from "./canonical-scenario.ts";
-import type { ScenarioSummary, StoredScenario } from "./scenarios-schema.ts";
+import type { ScenarioSummary, StoredScenario, SwitchedOff } from "./scenarios-schema.ts";
 
 const TABLE = "scenarios";
+
+/** What is written of a scenario; `switchedOff` left out: what there is stays. */
+export interface KeptScenario extends CanonicalScenario {
+  readonly switchedOff?: readonly SwitchedOff[];
+}
 
 interface SummaryRow {
   id: string;
@@ -21,6 +26,7 @@ interface SummaryRow {
 interface ScenarioRow extends SummaryRow {
   project_id: string;
   content: string;
+  switched_off: string;
   created_at: Date;
 }
 
@@ -96,7 +102,7 @@ export async function lockScenario(
 export async function insertScenario(
   database: Database,
   projectId: string,
-  content: CanonicalScenario,
+  content: KeptScenario,
   accountId: string,
 ): Promise<string> {
   const [id] = await insertScenarios(database, projectId, [content], accountId);
@@ -107,7 +113,7 @@ export async function insertScenario(
 export async function insertScenarios(
   database: Database,
   projectId: string,
-  contents: readonly CanonicalScenario[],
+  contents: readonly KeptScenario[],
   accountId: string,
 ): Promise<string[]> {
   const now = new Date();
@@ -126,7 +132,7 @@ export async function updateScenario(
   database: Database,
   id: string,
   version: number,
-  content: CanonicalScenario,
+  content: KeptScenario,
   accountId: string,
 ): Promise<void> {
   await database(TABLE)
@@ -142,9 +148,10 @@ export async function moveScenario(database: Database, id: string, toProjectId: 
   await database(TABLE).where({ id }).update({ project_id: toProjectId });
 }
 
-function changesOf({ text, digest, title, purpose }: CanonicalScenario, accountId: string, at: Date) {
+function changesOf({ text, digest, title, purpose, switchedOff }: KeptScenario, accountId: string, at: Date) {
   return {
     content: text,
+    ...(switchedOff && { switched_off: JSON.stringify(switchedOff) }),
     digest: Buffer.from(digest, "hex"),
     title,
     purpose,
@@ -180,9 +187,11 @@ function scenarioOf(row: ScenarioRow): StoredScenario {
     version: row.version,
     content: parsed(row.content),
     digest: row.digest.toString("hex"),
+    switchedOff: JSON.parse(row.switched_off) as SwitchedOff[],
     createdAt: row.created_at.toISOString(),
     updatedAt: row.updated_at.toISOString(),
     updatedBy: { accountId: row.updated_by, name: row.updated_by_name },
+    archivedAt: row.archived_at?.toISOString() ?? null,
   };
 }
 

@@ -28,6 +28,8 @@ const stored = (title: string): StoredScenario => ({
   version: 1,
   content: { ...newScenario([]), title },
   digest: "0".repeat(64),
+  switchedOff: [],
+  archivedAt: null,
   createdAt: project.createdAt,
   updatedAt: project.updatedAt,
   updatedBy: { accountId: ines.id, name: ines.name },

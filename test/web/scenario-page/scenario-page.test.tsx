@@ -49,6 +49,8 @@ const stored = (content: Scenario = creepFeed, version = 3): StoredScenario => (
   version,
   content,
   digest: "0".repeat(64),
+  switchedOff: [],
+  archivedAt: null,
   createdAt: project.createdAt,
   updatedAt: "2026-12-01T14:02:00.000Z",
   updatedBy: { accountId: members[1].accountId, name: "Tomas Wik" },

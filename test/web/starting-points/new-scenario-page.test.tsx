@@ -18,6 +18,8 @@ const stored: StoredScenario = {
   version: 1,
   content: newScenario([]),
   digest: "0".repeat(64),
+  switchedOff: [],
+  archivedAt: null,
   createdAt: project.createdAt,
   updatedAt: project.updatedAt,
   updatedBy: { accountId: ines.id, name: ines.name },

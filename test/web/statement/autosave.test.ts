@@ -1,16 +1,19 @@
 import type { StoredScenario } from "@restband/api/contract";
-import type { Scenario } from "@restband/solver";
 import { afterEach, beforeEach, describe, expect, it, vi } from "vitest";
 import { Autosave, type SaveReply, type Saving } from "../../../web/src/features/statement/saving/autosave.ts";
+import type { Work } from "../../../web/src/features/statement/saving/differences.ts";
 import { creepFeed, variant } from "../support/scenarios.ts";
 
-const damped = (viscous: number): Scenario => variant({ body: { ...creepFeed.body, viscous } });
-const stored = (content: Scenario, version: number): StoredScenario => ({
+const asWas: Work = { content: creepFeed, switchedOff: [] };
+const damped = (viscous: number): Work => ({ ...asWas, content: variant({ body: { ...creepFeed.body, viscous } }) });
+const stored = (work: Work, version: number): StoredScenario => ({
   id: "00000000-0000-4000-8000-000000000100",
   projectId: "00000000-0000-4000-8000-000000000010",
   version,
-  content,
+  content: work.content,
   digest: "",
+  switchedOff: [...work.switchedOff],
+  archivedAt: null,
   createdAt: "2026-11-01T08:00:00.000Z",
   updatedAt: "2026-11-01T08:00:00.000Z",
   updatedBy: { accountId: "00000000-0000-4000-8000-000000000002", name: "Tomas Wik" },
@@ -22,13 +25,13 @@ describe("autosave", () => {
   let kept: number[];
   let autosave: Autosave;
 
-  const save = (scenario: Scenario, version: number): Promise<SaveReply> =>
+  const save = ({ content }: Work, version: number): Promise<SaveReply> =>
     new Promise((resolve) => {
       const reply = async (answer: SaveReply): Promise<void> => {
         resolve(answer);
         await vi.advanceTimersByTimeAsync(0);
       };
-      sent.push({ viscous: scenario.body.viscous, version, reply });
+      sent.push({ viscous: content.body.viscous, version, reply });
     });
   const last = (): Saving | undefined => told.at(-1);
   const pass = (ms: number): Promise<unknown> => vi.advanceTimersByTimeAsync(ms);
@@ -39,7 +42,7 @@ describe("autosave", () => {
     told = [];
     kept = [];
     autosave = new Autosave({
-      base: { version: 3, content: creepFeed },
+      base: { version: 3, ...asWas },
       save,
       tell: (saving) => told.push(saving),
       onKept: ({ version }) => kept.push(version),
@@ -76,9 +79,16 @@ describe("autosave", () => {
     expect(last()).toEqual({ kind: "saving" });
   });
 
+  it("sends a term that was switched off though the scenario is the same", async () => {
+    const term = { kind: "constant", value: 5 } as const;
+    autosave.want({ ...asWas, switchedOff: [{ place: "force", index: 0, term, origins: {}, units: {} }] });
+    await pass(800);
+    expect(sent).toMatchObject([{ viscous: 350, version: 3 }]);
+  });
+
   it("sends nothing when the change was taken back", async () => {
     autosave.want(damped(400));
-    autosave.want(creepFeed);
+    autosave.want(asWas);
     await pass(10_000);
     expect(sent).toEqual([]);
     expect(last()).toEqual({ kind: "saved", at: null });
@@ -127,7 +137,7 @@ describe("autosave", () => {
     await pass(800);
     const current = stored(damped(777), 4);
     await sent[0].reply({ kind: "conflict", current });
-    autosave.decide(current, current.content);
+    autosave.decide(current, current);
     await pass(10_000);
     expect(sent).toHaveLength(1);
     expect(kept).toEqual([4]);

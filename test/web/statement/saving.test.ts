@@ -1,18 +1,21 @@
+import type { Scenario } from "@restband/solver";
 import { afterEach, describe, expect, it } from "vitest";
 import { draftReducer, openDraft, resumeDraft } from "../../../web/src/features/statement/draft/draft-reducer.ts";
-import { differencesOf, merged } from "../../../web/src/features/statement/saving/differences.ts";
+import { differencesOf, merged, type Work } from "../../../web/src/features/statement/saving/differences.ts";
 import { dropLocal, keepLocally, readLocal } from "../../../web/src/features/statement/saving/local-draft.ts";
 import { savedWords } from "../../../web/src/features/statement/saving/saved-words.ts";
 import { creepFeed, variant } from "../support/scenarios.ts";
 
 describe("the draft kept in the browser", () => {
   afterEach(() => localStorage.clear());
-  const base = { version: 3, content: creepFeed };
+  const term = { kind: "constant", value: 5 } as const;
+  const off = { place: "force", index: 0, term, origins: { value: { kind: "assumed" } }, units: {} } as const;
+  const base = { version: 3, content: creepFeed, switchedOff: [] };
   const edited = [
     { type: "set", path: "body.viscous", value: 400, unit: "N·s/m" } as const,
     { type: "set", path: "body.inertia", value: -3 } as const,
     { type: "leave-unread", path: "span.seconds", text: "long", message: "“long” is not a number." } as const,
-  ].reduce(draftReducer, openDraft(creepFeed));
+  ].reduce(draftReducer, openDraft(creepFeed, [off]));
 
   it("comes back with what is valid, what was refused and what could not be read", () => {
     keepLocally("ines", "s1", edited, base);
@@ -25,6 +28,7 @@ describe("the draft kept in the browser", () => {
         wanted: { body: { inertia: -3 } },
         unread: { "span.seconds": { text: "long" } },
         units: { "body.viscous": "N·s/m" },
+        off: [off],
       },
     });
     expect(draft?.faults.map(({ path }) => path).sort()).toEqual(["body.inertia", "span.seconds"]);
@@ -52,6 +56,7 @@ describe("the draft kept in the browser", () => {
 });
 
 describe("two versions", () => {
+  const work = (content: Scenario): Work => ({ content, switchedOff: [] });
   const mine = variant({ body: { ...creepFeed.body, viscous: 400, inertia: 130 } });
   const theirs = variant({
     title: "Z carriage, oiled",
@@ -60,7 +65,7 @@ describe("two versions", () => {
   });
 
   it("are told apart field by field, in words, with the likelier side chosen", () => {
-    expect(differencesOf(creepFeed, mine, theirs)).toEqual([
+    expect(differencesOf(work(creepFeed), work(mine), work(theirs))).toEqual([
       { path: "title", label: "Title", mine: "Z carriage, creep feed", theirs: "Z carriage, oiled", likely: "theirs" },
       { path: "body.inertia", label: "Mass", mine: "130\u00a0kg", theirs: "120\u00a0kg", likely: "mine" },
       { path: "body.viscous", label: "Damping", mine: "400\u00a0N·s/m", theirs: "500\u00a0N·s/m", likely: "mine" },
@@ -75,18 +80,18 @@ describe("two versions", () => {
   });
 
   it("are put together as chosen", () => {
-    const together = merged(mine, theirs, {
+    const together = merged(work(mine), work(theirs), {
       title: "theirs",
       "body.viscous": "theirs",
       "body.inertia": "mine",
       limits: "mine",
     });
-    expect(together).toMatchObject({
+    expect(together.content).toMatchObject({
       title: "Z carriage, oiled",
       body: { viscous: 500, inertia: 130 },
       limits: creepFeed.limits,
     });
-    expect(differencesOf(creepFeed, merged(mine, theirs, {}), mine)).toEqual([]);
+    expect(differencesOf(work(creepFeed), merged(work(mine), work(theirs), {}), work(mine))).toEqual([]);
   });
 
   it("of a law are taken whole", () => {
@@ -96,8 +101,26 @@ describe("two versions", () => {
         law: { model: "stribeck", static: 0.2, kinetic: 0.1, velocity: 0.01, exponent: 2, fluid: 0 },
       },
     });
-    expect(differencesOf(creepFeed, creepFeed, stribeck).map(({ path }) => path)).toEqual(["contact.law"]);
-    expect(merged(creepFeed, stribeck, { "contact.law": "theirs" })).toEqual(stribeck);
+    const [straight, other] = [work(creepFeed), work(stribeck)];
+    expect(differencesOf(straight, straight, other).map(({ path }) => path)).toEqual(["contact.law"]);
+    expect(merged(straight, other, { "contact.law": "theirs" })).toEqual(other);
+  });
+
+  it("of what is switched off are told and taken whole", () => {
+    const term = { kind: "constant", value: 5 } as const;
+    const off = { place: "force", index: 0, term, origins: {}, units: {} } as const;
+    const [own, other] = [work(creepFeed), { content: creepFeed, switchedOff: [off] }];
+    expect(differencesOf(own, own, other)).toEqual([
+      {
+        path: "switchedOff",
+        label: "Switched off",
+        mine: "nothing",
+        theirs: "A constant force of 5\u00a0N acts",
+        likely: "theirs",
+      },
+    ]);
+    expect(merged(own, other, { switchedOff: "theirs" })).toEqual(other);
+    expect(merged(own, other, { switchedOff: "mine" })).toEqual(own);
   });
 });
 

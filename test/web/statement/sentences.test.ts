@@ -4,7 +4,7 @@ import { addTerm, setLaw, setSolid } from "../../../web/src/features/statement/c
 import type { DraftAction } from "../../../web/src/features/statement/draft/draft.ts";
 import { draftReducer, openDraft } from "../../../web/src/features/statement/draft/draft-reducer.ts";
 import { groups, groupOf, type GroupKey } from "../../../web/src/features/statement/groups.ts";
-import { plainText } from "../../../web/src/features/statement/saving/plain-text.ts";
+import { plainText } from "../../../web/src/features/statement/sentence/plain-text.ts";
 import { creepFeed, variant } from "../support/scenarios.ts";
 
 const group = (key: GroupKey) => groups.find((each) => each.key === key) ?? groups[0];

@@ -29,6 +29,40 @@ const group = (name: string) => within(screen.getByRole("group", { name }));
 
 beforeEach(allowLayout);
 
+describe("a term in its sentence", () => {
+  const pushed = variant({ force: [{ kind: "harmonic", amplitude: 40, hz: 12, phase: 0 }] });
+
+  it("is switched off by its mark, told struck through, and brought back by one press", async () => {
+    const user = open(pushed);
+    await user.selectOptions(screen.getByRole("combobox", { name: "Change force 1 of 1" }), "switch it off");
+    expect(draft.inForce.force).toEqual([]);
+    const words = "A force swings by ±40 N at 12 Hz with phase 0°";
+    expect(screen.getByText(words, { selector: "s" })).toBeInTheDocument();
+    await user.click(screen.getByRole("button", { name: /^switch on/ }));
+    expect(draft.inForce).toEqual(pushed);
+    expect(screen.getByRole("button", { name: "Amplitude: 40 N" })).toHaveFocus();
+    expect(screen.queryByRole("group", { name: "Change Amplitude" })).not.toBeInTheDocument();
+  });
+
+  it("gets company by the same mark, with the editor of the new one open", async () => {
+    const user = open(pushed);
+    await user.selectOptions(screen.getByRole("combobox", { name: "Change force 1 of 1" }), "Step");
+    expect(draft.inForce.force.map(({ kind }) => kind)).toEqual(["harmonic", "step"]);
+    expect(screen.getByRole("group", { name: /^Change / })).toBeInTheDocument();
+  });
+
+  it("is switched off, ordered and brought back in the full form too", async () => {
+    const user = open(pushed);
+    await user.click(screen.getByRole("button", { name: "all fields of Drive" }));
+    const force = within(await screen.findByRole("group", { name: "Harmonic, 1 of 1" }));
+    await user.click(force.getByRole("button", { name: "Switch off" }));
+    expect(draft.inForce.force).toEqual([]);
+    const off = within(screen.getByRole("group", { name: "Harmonic, 1 of 1, off" }));
+    await user.click(off.getByRole("button", { name: "Switch on" }));
+    expect(draft.inForce).toEqual(pushed);
+  });
+});
+
 describe("a value in its sentence", () => {
   it("opens an editor, takes what is typed at once, and is done by Enter", async () => {
     const user = open();

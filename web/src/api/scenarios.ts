@@ -1,4 +1,4 @@
-import type { StoredScenario } from "@restband/api/contract";
+import type { StoredScenario, SwitchedOff } from "@restband/api/contract";
 import type { Scenario } from "@restband/solver";
 import { queryOptions, useMutation, useQueryClient, type QueryClient } from "@tanstack/react-query";
 import { call } from "./client.ts";
@@ -42,6 +42,11 @@ export function useCreateScenario(projectId: string) {
   });
 }
 
+interface Off {
+  /** Terms kept beside the content. */
+  readonly switchedOff: readonly SwitchedOff[];
+}
+
 /**
  * Saves a scenario over the version it was made from; a later version in its place is a 409 whose `current` is that
  * version. Saves of one scenario go one at a time, in the order asked.
@@ -50,8 +55,12 @@ export function useSaveScenario(projectId: string, scenarioId: string) {
   const client = useQueryClient();
   return useMutation({
     scope: { id: `scenario ${scenarioId}` },
-    mutationFn: ({ scenario, version }: { scenario: Scenario; version: number }) =>
-      call("saveScenario", { params: { projectId, scenarioId }, body: { content: { ...scenario } }, version }),
+    mutationFn: ({ content, switchedOff, version }: Pick<StoredScenario, "content" | "version"> & Off) =>
+      call("saveScenario", {
+        params: { projectId, scenarioId },
+        body: { content: { ...content }, switchedOff: [...switchedOff] },
+        version,
+      }),
     onSuccess: (stored) => keep(client, stored),
   });
 }

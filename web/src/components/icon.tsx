@@ -14,6 +14,7 @@ const shapes = {
   next: <path d="M12 3v10M3.5 3.5v9L10 8z" style={{ fill: "currentColor" }} />,
   play: <path d="M4 2.8v10.4L13 8z" style={{ fill: "currentColor" }} />,
   pause: <path d="M5 3v10M11 3v10" />,
+  dots: <path d="M3 8h.01M8 8h.01M13 8h.01" style={{ strokeWidth: 2.6 }} />,
   more: <path d="M3 4.5h10M3 8h10M3 11.5h10" />,
 };
 

@@ -16,7 +16,7 @@ import { runViewOf, type RunView } from "../features/evidence/run-view.ts";
 import { takeValues } from "../features/statement/changes.ts";
 import { savedWords } from "../features/statement/saving/saved-words.ts";
 import { useDraft } from "../features/statement/saving/use-draft.ts";
-import { isSameScenario } from "../features/statement/saving/differences.ts";
+import { isSameWork } from "../features/statement/saving/differences.ts";
 import { sayField } from "../features/statement/say-field.ts";
 import { Statement } from "../features/statement/statement.tsx";
 import { UnitSystemChoice } from "../features/statement/unit-system-choice.tsx";
@@ -56,7 +56,7 @@ function OpenScenario({ project, stored }: { project: Project; stored: StoredSce
   const units = useUnitSystem();
   const isArchived = project.archivedAt !== null;
   const canEdit = mayEdit(project.role) && !isArchived;
-  const { draft, dispatch, saving, base, decide } = useDraft({ stored, accountId, canEdit });
+  const { draft, dispatch, saving, base, work, decide } = useDraft({ stored, accountId, canEdit });
   const { inForce, faults } = draft;
   const samples = samplesFor(inForce);
   const run = useRun(
@@ -69,7 +69,7 @@ function OpenScenario({ project, stored }: { project: Project; stored: StoredSce
   const view = useRunView(run.computed);
   const [cursor] = useState(() => sharedValue<number | null>(null));
   const before = useBeforeEdit(run.computed, draft.merging !== null);
-  const isTrying = !canEdit && !isSameScenario(inForce, stored.content);
+  const isTrying = !canEdit && !isSameWork(work, stored);
   const title = inForce.title || "Untitled";
   const aside = useCallback(
     (path: string) => (
@@ -127,10 +127,10 @@ function OpenScenario({ project, stored }: { project: Project; stored: StoredSce
       {saving.kind === "conflict" && (
         <Suspense>
           <ConflictDialog
-            base={base.content}
-            mine={inForce}
+            base={base}
+            mine={work}
             current={saving.current}
-            onDecide={(scenario) => decide(saving.current, scenario)}
+            onDecide={(decided) => decide(saving.current, decided)}
           />
         </Suspense>
       )}

@@ -19,8 +19,10 @@ import { movePath, readPath, without, writePath } from "./path.ts";
 
 export type Place = "force" | "base";
 
+type Change = Extract<DraftAction, { type: "change" }>;
+
 /** A change of what the scenario consists of; origins of values that are gone go too. */
-function change(apply: (scenario: Scenario) => Scenario, rename?: (path: string) => string | null): DraftAction {
+function change(apply: (scenario: Scenario) => Scenario, rename?: (path: string) => string | null): Change {
   return { type: "change", apply: (scenario) => withOwnOrigins(apply(renameOrigins(scenario, rename))), rename };
 }
 
@@ -95,14 +97,25 @@ export const setTermKind = (place: Place, index: number, kind: TermKind): DraftA
     [place]: scenario[place].map((term, i) => (i === index ? freshTerm(place, kind, term) : term)),
   }));
 
-export const removeItem = (list: Place | "limits", index: number): DraftAction =>
+/** A term of its own making, with where its members come from by their paths. */
+export const insertTerm = (place: Place, at: number, term: Term, origins: Readonly<Record<string, Origin>>): Change =>
+  change(
+    (scenario) => ({
+      ...scenario,
+      [place]: [...scenario[place].slice(0, at), term, ...scenario[place].slice(at)],
+      origins: { ...scenario.origins, ...origins },
+    }),
+    (path) => movePath(path, place, (i) => (i >= at ? i + 1 : i)),
+  );
+
+export const removeItem = (list: Place | "limits", index: number): Change =>
   change(
     (scenario) => ({ ...scenario, [list]: scenario[list].filter((_, i) => i !== index) }),
     (path) => movePath(path, list, (i) => (i === index ? null : i > index ? i - 1 : i)),
   );
 
 /** Swaps an item with the one before it. */
-export const raiseItem = (list: Place | "limits", index: number): DraftAction =>
+export const raiseItem = (list: Place | "limits", index: number): Change =>
   change(
     (scenario) => ({ ...scenario, [list]: swapped<Term | Limit>(scenario[list], index) }),
     (path) => movePath(path, list, (i) => (i === index ? i - 1 : i === index - 1 ? i + 1 : i)),
@@ -127,7 +140,8 @@ interface Kind {
   readonly rows?: Rows;
 }
 
-function freshTerm(place: Place, kind: TermKind, old: object = {}): Term {
+/** A term with what its kind starts from; members of `old` with the same name stay. */
+export function freshTerm(place: Place, kind: TermKind, old: object = {}): Term {
   return fresh({ kind }, termOf(kind), old, place) as Term;
 }
 

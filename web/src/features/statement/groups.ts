@@ -1,3 +1,4 @@
+import type { SwitchedOff } from "@restband/api/contract";
 import type { Fault, Scenario } from "@restband/solver";
 import { isUnder } from "./path.ts";
 import { bodySentence } from "./sentence/body-sentence.ts";
@@ -14,7 +15,8 @@ export interface Group {
   readonly key: GroupKey;
   readonly name: string;
   readonly roots: readonly string[];
-  readonly sentence: (scenario: Scenario) => Piece[];
+  /** `off`: terms told too that are switched off. */
+  readonly sentence: (scenario: Scenario, off?: readonly SwitchedOff[]) => Piece[];
 }
 
 /** The five groups in the order of the page; together they hold every member of the format. */

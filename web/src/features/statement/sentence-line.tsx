@@ -1,4 +1,5 @@
 import { classNames } from "../../components/class-names.ts";
+import { Icon } from "../../components/icon.tsx";
 import { readInput } from "../../format/format-quantity.ts";
 import { useDraftContext } from "./draft/draft-context.ts";
 import { unitTyped } from "./entry/use-number-entry.ts";
@@ -36,6 +37,8 @@ function PieceView({ piece, openPath, onOpen, onAllFields }: PieceProps & { piec
       return piece.text;
     case "word":
       return <Word piece={piece} />;
+    case "off":
+      return <Off piece={piece} />;
     case "rows":
       return (
         <button type="button" className={valueClass} onClick={onAllFields}>
@@ -89,28 +92,68 @@ function Value({ piece: { path, field, word }, isOpen, onOpen }: ValueProps) {
   );
 }
 
+/** What is out of force: struck through, said to be off, and brought back by one press. */
+function Off({ piece }: { piece: Extract<Piece, { kind: "off" }> }) {
+  const { dispatch } = useDraftContext();
+  return (
+    <>
+      <s className="text-quiet">{piece.text}</s>{" "}
+      <span className="text-15 whitespace-nowrap text-quiet">
+        (off,{" "}
+        <button type="button" className="link" onClick={() => dispatch(piece.switchOn)}>
+          switch on
+          <span className="sr-only">: {piece.text}</span>
+        </button>
+        )
+      </span>
+    </>
+  );
+}
+
 /** A native select laid over its own word: the word wraps and is underlined like any other, the choice is the browser's. */
 function Word({ piece }: { piece: WordPiece }) {
   const { dispatch } = useDraftContext();
   const shown = piece.text ?? piece.options.find(({ value }) => value === piece.value)?.label ?? piece.value;
   const word = (
-    <span className="relative inline-block rounded-[2px] focus-within:outline-2 focus-within:outline-offset-2 focus-within:outline-slip">
-      <span aria-hidden="true" className={valueClass}>
-        {shown}
+    <span
+      className={classNames(
+        "relative inline-block rounded-[2px] focus-within:outline-2 focus-within:outline-offset-2 focus-within:outline-slip",
+        piece.isMenu && "mx-0.5 px-1 align-middle text-quiet hover:text-slip",
+      )}
+    >
+      <span aria-hidden="true" className={piece.isMenu ? "flex h-6 items-center" : valueClass}>
+        {piece.isMenu ? <Icon name="dots" /> : shown}
       </span>
       <select
         aria-label={piece.label}
+        title={piece.isMenu ? piece.label : undefined}
         className="absolute inset-0 w-full cursor-pointer appearance-none opacity-0"
         value={piece.value}
         onChange={(event) => dispatch(piece.choose(event.currentTarget.value))}
       >
-        {piece.options.map(({ value, label }) => (
-          <option key={value} value={value}>
-            {label}
-          </option>
-        ))}
+        <Options options={piece.options} />
       </select>
     </span>
   );
   return piece.isBracketed ? <span className="whitespace-nowrap">({word})</span> : word;
+}
+
+function Options({ options }: { options: WordPiece["options"] }) {
+  const groups = [...new Set(options.map(({ group }) => group))];
+  return groups.map((group) => {
+    const own = options
+      .filter((option) => option.group === group)
+      .map((option) => (
+        <option key={option.value} value={option.value}>
+          {option.label}
+        </option>
+      ));
+    return group === undefined ? (
+      own
+    ) : (
+      <optgroup key={group} label={group}>
+        {own}
+      </optgroup>
+    );
+  });
 }

@@ -1,7 +1,8 @@
 import type { Fault } from "@restband/solver";
-import { lazy, Suspense, useEffect, useId, useRef, useState } from "react";
+import { Suspense, useEffect, useId, useRef, useState } from "react";
 import { Button } from "../../components/button.tsx";
 import { FieldError } from "../../components/field.tsx";
+import { lazyPart } from "../../components/lazy-part.ts";
 import { sayMany } from "../../format/words.ts";
 import { useDraftContext } from "./draft/draft-context.ts";
 import { ValueEditor } from "./entry/value-editor.tsx";
@@ -10,10 +11,11 @@ import { Keeps } from "./keeps.tsx";
 import { fieldAt } from "./scenario-fields.ts";
 import { originsIn } from "./origin/origin-words.ts";
 import { remarkWords } from "./remark-words.ts";
+import type { Piece } from "./sentence/piece.ts";
 import { SentenceLine } from "./sentence-line.tsx";
 
 // Sentences come first; a form is loaded when it is first opened.
-const GroupForm = lazy(async () => ({ default: (await import("./form/group-form.tsx")).GroupForm }));
+const GroupForm = lazyPart(async () => (await import("./form/group-form.tsx")).GroupForm);
 
 interface StatementGroupProps {
   group: Group;
@@ -106,8 +108,8 @@ function SentenceWithEditor({ group, faults, onAllFields }: SentenceProps) {
   const { draft } = useDraftContext();
   const [open, setOpen] = useState<{ path: string; nib: number } | null>(null);
   const place = useRef<HTMLDivElement>(null);
-  const wanted = draft.sheet.wanted;
-  const pieces = group.sentence(wanted);
+  const { wanted, off } = draft.sheet;
+  const pieces = group.sentence(wanted, off);
   const field = open && fieldAt(wanted, open.path);
 
   const nibOf = (path: string): number => {
@@ -117,15 +119,13 @@ function SentenceWithEditor({ group, faults, onAllFields }: SentenceProps) {
     return box.left + box.width / 2 - place.current.getBoundingClientRect().left;
   };
   const openAt = (path: string): void => setOpen(open?.path === path ? null : { path, nib: nibOf(path) });
+  const focusOn = (path: string): void =>
+    place.current?.querySelector<HTMLElement>(`[data-path="${CSS.escape(path)}"]`)?.focus();
   const close = (): void => {
-    const button = open && place.current?.querySelector<HTMLElement>(`[data-path="${CSS.escape(open.path)}"]`);
     setOpen(null);
-    button?.focus();
+    if (open) focusOn(open.path);
   };
-  useOpenNewValue(
-    pieces.flatMap((piece) => (piece.kind === "value" ? piece.path : [])),
-    openAt,
-  );
+  useNewValue(pieces, openAt, focusOn);
   return (
     <div ref={place}>
       <SentenceLine pieces={pieces} openPath={open?.path ?? null} onOpen={openAt} onAllFields={onAllFields} />
@@ -138,14 +138,22 @@ function SentenceWithEditor({ group, faults, onAllFields }: SentenceProps) {
   );
 }
 
-/** A limit or term that has just been added is waiting for its numbers: its first value opens by itself. */
-function useOpenNewValue(paths: readonly string[], openAt: (path: string) => void): void {
-  const known = useRef(paths);
+/**
+ * A limit or term that has just been added is waiting for its numbers: its first value opens by itself. One that was
+ * switched on again has them: its first value has the focus, in place of the button that is gone.
+ */
+function useNewValue(pieces: readonly Piece[], open: (path: string) => void, focus: (path: string) => void): void {
+  const paths = pieces.flatMap((piece) => (piece.kind === "value" ? piece.path : []));
+  const offs = pieces.filter(({ kind }) => kind === "off").length;
+  const known = useRef({ paths, offs });
   useEffect(() => {
-    const added = paths.filter((path) => !known.current.includes(path));
-    const isOnlyMore = known.current.every((path) => paths.includes(path));
-    known.current = paths;
-    if (isOnlyMore && added.length > 0 && added.some((path) => path.includes("["))) openAt(added[0]);
+    const before = known.current;
+    known.current = { paths, offs };
+    const added = paths.filter((path) => !before.paths.includes(path));
+    const isOnlyMore = before.paths.every((path) => paths.includes(path));
+    if (!isOnlyMore || !added.some((path) => path.includes("["))) return;
+    if (offs < before.offs) focus(added[0]);
+    else open(added[0]);
   });
 }
 

@@ -1,13 +1,15 @@
+import type { SwitchedOff } from "@restband/api/contract";
 import type { Scenario } from "@restband/solver";
 import { without, writePath } from "../path.ts";
 import { checkSheet } from "./check-sheet.ts";
 import type { Draft, DraftAction, Sheet } from "./draft.ts";
+import { restructured } from "./sheet.ts";
 
 const STEPS_KEPT = 200;
 
-/** A draft of a scenario that is valid. */
-export function openDraft(scenario: Scenario, units: Sheet["units"] = unitsEntered(scenario)): Draft {
-  const sheet: Sheet = { wanted: scenario, unread: {}, units };
+/** A draft of a scenario that is valid; `off`: terms that are kept beside it. */
+export function openDraft(scenario: Scenario, off: readonly SwitchedOff[] = []): Draft {
+  const sheet: Sheet = { wanted: scenario, unread: {}, units: unitsEntered(scenario), off };
   return { sheet, inForce: scenario, faults: [], past: [], future: [], merging: null, anchor: scenario };
 }
 
@@ -31,9 +33,15 @@ export function draftReducer(draft: Draft, action: DraftAction): Draft {
     case "leave-unread":
       return step(draft, edited(draft.sheet, action), action.path);
     case "change":
-      return step(draft, changed(draft.sheet, action.apply, action.rename), null);
+      return step(draft, restructured(draft.sheet, action.apply, action.rename), null);
+    case "rewrite":
+      return step(draft, action.apply(draft.sheet, draft.inForce), null);
     case "replace":
-      return step(draft, { wanted: action.scenario, unread: {}, units: draft.sheet.units }, null);
+      return step(
+        draft,
+        { wanted: action.scenario, unread: {}, units: draft.sheet.units, off: action.off ?? [] },
+        null,
+      );
   }
 }
 
@@ -52,7 +60,7 @@ function settled(draft: Draft): Draft {
 }
 
 const isSameSheet = (a: Sheet, b: Sheet): boolean =>
-  JSON.stringify([a.wanted, a.unread]) === JSON.stringify([b.wanted, b.unread]);
+  JSON.stringify([a.wanted, a.unread, a.off]) === JSON.stringify([b.wanted, b.unread, b.off]);
 
 function goBack(draft: Draft): Draft {
   const sheet = draft.past[draft.past.length - 1];
@@ -92,28 +100,6 @@ function withEntered(scenario: Scenario, path: string, entered: string | undefin
 
 function withUnit(sheet: Sheet, path: string, unit: string): Sheet {
   return sheet.units[path] === unit ? sheet : { ...sheet, units: { ...sheet.units, [path]: unit } };
-}
-
-/** A change of structure: what is kept by path goes with its value, or away with it. */
-function changed(
-  sheet: Sheet,
-  apply: (s: Scenario) => Scenario,
-  rename = (path: string): string | null => path,
-): Sheet {
-  return {
-    wanted: apply(sheet.wanted),
-    unread: renamed(sheet.unread, rename),
-    units: renamed(sheet.units, rename),
-  };
-}
-
-function renamed<T>(record: Readonly<Record<string, T>>, rename: (path: string) => string | null): Record<string, T> {
-  return Object.fromEntries(
-    Object.entries(record).flatMap(([path, value]) => {
-      const name = rename(path);
-      return name === null ? [] : [[name, value]];
-    }),
-  );
 }
 
 /** The units values were entered in, where their origins tell: "0.25 in" is shown in inches again. */

@@ -1,3 +1,4 @@
+import type { SwitchedOff } from "@restband/api/contract";
 import type { Fault, Scenario } from "@restband/solver";
 
 /** What a person has typed and chosen, before it is known to be right. */
@@ -8,6 +9,8 @@ export interface Sheet {
   readonly unread: Readonly<Record<string, Unread>>;
   /** Unit each value was last typed in, by path. */
   readonly units: Readonly<Record<string, string>>;
+  /** Terms kept beside the scenario, out of force. */
+  readonly off: readonly SwitchedOff[];
 }
 
 export interface Unread {
@@ -38,9 +41,11 @@ export type DraftAction =
   | { type: "leave-unread"; path: string; text: string; message: string; value?: unknown }
   | { type: "show-in"; path: string; unit: string }
   | { type: "change"; apply: (scenario: Scenario) => Scenario; rename?: (path: string) => string | null }
+  | { type: "rewrite"; apply: (sheet: Sheet, inForce: Scenario) => Sheet }
   | { type: "settle" }
   | { type: "undo" }
   | { type: "redo" }
-  | { type: "replace"; scenario: Scenario };
+  /** Another scenario in its place; `off`: with terms that are switched off. */
+  | { type: "replace"; scenario: Scenario; off?: readonly SwitchedOff[] };
 
 export type Dispatch = (action: DraftAction) => void;

@@ -1,5 +1,5 @@
 import type { StoredScenario } from "@restband/api/contract";
-import { digestOf, type Scenario } from "@restband/solver";
+import { isSameWork, type Work } from "./differences.ts";
 
 /** How it stands with keeping what was typed. */
 export type Saving =
@@ -23,14 +23,13 @@ export type SaveReply =
   | { kind: "refused"; message: string };
 
 /** The version a draft was made from, and what it held. */
-export interface Base {
+export interface Base extends Work {
   readonly version: number;
-  readonly content: Scenario;
 }
 
 interface AutosaveSettings {
   readonly base: Base;
-  readonly save: (scenario: Scenario, version: number) => Promise<SaveReply>;
+  readonly save: (work: Work, version: number) => Promise<SaveReply>;
   readonly tell: (saving: Saving) => void;
   /** All that is wanted is on the server now. */
   readonly onKept: (base: Base) => void;
@@ -45,7 +44,7 @@ export class Autosave {
   /** What the server is known to have. */
   base: Base;
   private readonly settings: AutosaveSettings;
-  private wanted: Scenario;
+  private wanted: Work;
   private timer: ReturnType<typeof setTimeout> | undefined;
   private isSending = false;
   private isClosed = false;
@@ -57,12 +56,12 @@ export class Autosave {
   constructor(settings: AutosaveSettings) {
     this.settings = settings;
     this.base = settings.base;
-    this.wanted = settings.base.content;
+    this.wanted = settings.base;
   }
 
   /** The newest state to be kept; anything older that was not sent yet is forgotten. */
-  want(scenario: Scenario): void {
-    this.wanted = scenario;
+  want(work: Work): void {
+    this.wanted = work;
     if (this.isSending || this.isHalted) return;
     if (this.isKept()) return this.settle();
     if (!this.lostSince) this.settings.tell({ kind: "saving" });
@@ -80,18 +79,18 @@ export class Autosave {
     this.isClosed = true;
   }
 
-  /** A conflict is decided: `current` is the base from now on, and `scenario` what is wanted. */
-  decide({ version, content }: StoredScenario, scenario: Scenario): void {
-    this.base = { version, content };
+  /** A conflict is decided: `current` is the base from now on, and `work` what is wanted. */
+  decide(current: StoredScenario, work: Work): void {
+    this.base = current;
     this.isHalted = false;
-    this.wanted = scenario;
+    this.wanted = work;
     this.next();
   }
 
   /** A newer version of the server's is taken over as it is. */
-  adopt({ version, content }: StoredScenario): void {
-    this.base = { version, content };
-    this.wanted = content;
+  adopt(stored: StoredScenario): void {
+    this.base = stored;
+    this.wanted = stored;
     this.settle();
   }
 
@@ -101,7 +100,7 @@ export class Autosave {
   }
 
   private isKept(): boolean {
-    return digestOf(this.wanted) === digestOf(this.base.content);
+    return isSameWork(this.wanted, this.base);
   }
 
   private schedule(delay: number): void {
@@ -121,20 +120,19 @@ export class Autosave {
     this.take(reply, sent);
   }
 
-  private take(reply: SaveReply, sent: Scenario): void {
+  private take(reply: SaveReply, sent: Work): void {
     if (reply.kind === "unreachable") return this.lost();
     this.lostSince = null;
     if (reply.kind === "saved") return this.kept(reply.stored);
     // The answer to an earlier try was lost on the way: it was saved after all.
-    if (reply.kind === "conflict" && digestOf(reply.current.content) === digestOf(sent))
-      return this.kept(reply.current);
+    if (reply.kind === "conflict" && isSameWork(reply.current, sent)) return this.kept(reply.current);
     this.isHalted = reply.kind === "conflict";
     this.settings.tell(reply);
     if (reply.kind === "refused" && this.wanted !== sent) this.schedule(0);
   }
 
-  private kept({ version, content }: StoredScenario): void {
-    this.base = { version, content };
+  private kept(stored: StoredScenario): void {
+    this.base = stored;
     this.keptAt = new Date();
     this.next();
   }

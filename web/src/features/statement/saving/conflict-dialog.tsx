@@ -1,28 +1,27 @@
 import type { StoredScenario } from "@restband/api/contract";
-import type { Scenario } from "@restband/solver";
 import { useState } from "react";
 import { Button } from "../../../components/button.tsx";
 import { Dialog, DialogActions } from "../../../components/dialog.tsx";
 import { sayClock } from "../../../format/words.ts";
-import { differencesOf, merged, type Difference, type Side } from "./differences.ts";
+import { differencesOf, merged, type Difference, type Side, type Work } from "./differences.ts";
 
 interface ConflictDialogProps {
   /** The version one's own draft began from. */
-  base: Scenario;
-  mine: Scenario;
+  base: Work;
+  mine: Work;
   /** What somebody else has saved meanwhile. */
   current: StoredScenario;
-  onDecide: (scenario: Scenario) => void;
+  onDecide: (work: Work) => void;
 }
 
 /** Two people changed the same scenario: both versions field by field, and a choice for each. Nothing is overwritten silently. */
 export function ConflictDialog({ base, mine, current, onDecide }: ConflictDialogProps) {
-  const differences = differencesOf(base, mine, current.content);
+  const differences = differencesOf(base, mine, current);
   const [choices, setChoices] = useState<Readonly<Record<string, Side>>>({});
   const choiceOf = ({ path, likely }: Difference): Side => choices[path] ?? likely;
   const all = (side: Side): void => setChoices(Object.fromEntries(differences.map(({ path }) => [path, side])));
   const decide = (): void =>
-    onDecide(merged(mine, current.content, Object.fromEntries(differences.map((each) => [each.path, choiceOf(each)]))));
+    onDecide(merged(mine, current, Object.fromEntries(differences.map((each) => [each.path, choiceOf(each)]))));
   const who = current.updatedBy.name;
   return (
     <Dialog isOpen isWide canClose={false} title="Two versions of this scenario" onClose={() => undefined}>

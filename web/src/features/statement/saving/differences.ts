@@ -1,9 +1,11 @@
+import type { SwitchedOff } from "@restband/api/contract";
 import { digestOf, jsonText, type Scenario } from "@restband/solver";
 import { readPath, writePath } from "../path.ts";
 import { fieldAt, measureOf } from "../scenario-fields.ts";
 import { joined, readInput } from "../../../format/format-quantity.ts";
 import { groups } from "../groups.ts";
-import { plainText } from "./plain-text.ts";
+import { sayTerm } from "../sentence/drive-sentence.ts";
+import { plainText } from "../sentence/plain-text.ts";
 
 export type Side = "mine" | "theirs";
 
@@ -50,8 +52,32 @@ const numbers = [
   "settleBand",
 ];
 
+/** What is kept of a draft: the scenario in force, and the terms switched off beside it. */
+export interface Work {
+  readonly content: Scenario;
+  readonly switchedOff: readonly SwitchedOff[];
+}
+
 /** Everything in which two versions of a scenario differ. */
-export function differencesOf(base: Scenario, mine: Scenario, theirs: Scenario): Difference[] {
+export function differencesOf(base: Work, mine: Work, theirs: Work): Difference[] {
+  return [...contentDifferences(base.content, mine.content, theirs.content), ...offDifference(base, mine, theirs)];
+}
+
+/** The path of what is switched off: no path of the format. */
+const OFF = "switchedOff";
+
+function offDifference(base: Work, mine: Work, theirs: Work): Difference[] {
+  if (isSame(mine.switchedOff, theirs.switchedOff)) return [];
+  const likely = isSame(mine.switchedOff, base.switchedOff) ? "theirs" : "mine";
+  return [{ path: OFF, label: "Switched off", mine: sayOff(mine), theirs: sayOff(theirs), likely }];
+}
+
+function sayOff({ content, switchedOff }: Work): string {
+  const terms = switchedOff.map(({ place, term, units }) => sayTerm(content, place, term, units));
+  return terms.length === 0 ? "nothing" : terms.join(". ");
+}
+
+function contentDifferences(base: Scenario, mine: Scenario, theirs: Scenario): Difference[] {
   const paths = [
     ...singles,
     ...numbers.map((path) => ({ path, label: fieldAt(mine, path)?.label ?? path })),
@@ -69,11 +95,14 @@ export function differencesOf(base: Scenario, mine: Scenario, theirs: Scenario):
 }
 
 /** One's own version with the chosen parts of the other. */
-export function merged(mine: Scenario, theirs: Scenario, choices: Readonly<Record<string, Side>>): Scenario {
-  return Object.entries(choices).reduce(
-    (scenario, [path, side]) => (side === "theirs" ? writePath(scenario, path, readPath(theirs, path)) : scenario),
-    mine,
+export function merged(mine: Work, theirs: Work, choices: Readonly<Record<string, Side>>): Work {
+  const { [OFF]: off, ...parts } = choices;
+  const content = Object.entries(parts).reduce(
+    (scenario, [path, side]) =>
+      side === "theirs" ? writePath(scenario, path, readPath(theirs.content, path)) : scenario,
+    mine.content,
   );
+  return { content, switchedOff: (off === "theirs" ? theirs : mine).switchedOff };
 }
 
 /** Whatever the order of their members. */
@@ -100,3 +129,7 @@ function sayWhole(scenario: Scenario, path: string): string {
 
 /** Whether two scenarios are the same in all that is stored. */
 export const isSameScenario = (a: Scenario, b: Scenario): boolean => digestOf(a) === digestOf(b);
+
+/** Whether two versions are the same in all that is stored. */
+export const isSameWork = (a: Work, b: Work): boolean =>
+  isSameScenario(a.content, b.content) && isSame(a.switchedOff, b.switchedOff);

@@ -1,4 +1,5 @@
-import { checkScenario, z, type Scenario } from "@restband/solver";
+import { switchedOffSchema } from "@restband/api/contract";
+import { checkScenario, checkTerm, z, type Scenario } from "@restband/solver";
 import type { Draft, Sheet } from "../draft/draft.ts";
 import { readPath, writePath } from "../path.ts";
 import type { Base } from "./autosave.ts";
@@ -18,12 +19,15 @@ const storedSchema = z.object({
   refused: z.record(z.string(), z.number()),
   unread: z.record(z.string(), z.object({ text: z.string(), message: z.string() })),
   units: z.record(z.string(), z.string()),
+  /** Terms that are switched off, now and in the version below. */
+  off: z.array(switchedOffSchema),
+  baseOff: z.array(switchedOffSchema),
 });
 
 const keyOf = (accountId: string, scenarioId: string): string => `restband-draft ${accountId} ${scenarioId}`;
 
 /** Keeps a draft. Where the browser refuses to store, nothing is kept, and the page works on. */
-export function keepLocally(accountId: string, scenarioId: string, draft: Draft, { version, content }: Base): void {
+export function keepLocally(accountId: string, scenarioId: string, draft: Draft, base: Base): void {
   const { inForce, sheet, faults } = draft;
   const refused = Object.fromEntries(
     faults.flatMap(({ path }) => {
@@ -32,12 +36,14 @@ export function keepLocally(accountId: string, scenarioId: string, draft: Draft,
     }),
   );
   const stored: z.input<typeof storedSchema> = {
-    version,
-    base: content,
+    version: base.version,
+    base: base.content,
     inForce,
     refused,
     unread: { ...sheet.unread },
     units: { ...sheet.units },
+    off: [...sheet.off],
+    baseOff: [...base.switchedOff],
   };
   try {
     localStorage.setItem(keyOf(accountId, scenarioId), JSON.stringify(stored));
@@ -65,21 +71,15 @@ export function readLocal(accountId: string, scenarioId: string): LocalDraft | n
   }
 }
 
-function restored({
-  version,
-  base,
-  inForce,
-  refused,
-  unread,
-  units,
-}: z.output<typeof storedSchema>): LocalDraft | null {
-  const content = checkScenario(base).scenario;
-  const valid = checkScenario(inForce).scenario;
-  if (!content || !valid) return null;
-  const wanted = Object.entries(refused).reduce(
+function restored(stored: z.output<typeof storedSchema>): LocalDraft | null {
+  const { version, unread, units, off, baseOff } = stored;
+  const content = checkScenario(stored.base).scenario;
+  const valid = checkScenario(stored.inForce).scenario;
+  if (!content || !valid || off.some(({ place, term }) => !checkTerm(place, term).term)) return null;
+  const wanted = Object.entries(stored.refused).reduce(
     (scenario, [path, value]) =>
       typeof readPath(scenario, path) === "number" ? writePath(scenario, path, value) : scenario,
     valid,
   );
-  return { base: { version, content }, inForce: valid, sheet: { wanted, unread, units } };
+  return { base: { version, content, switchedOff: baseOff }, inForce: valid, sheet: { wanted, unread, units, off } };
 }

@@ -1,13 +1,12 @@
 import type { StoredScenario } from "@restband/api/contract";
-import type { Scenario } from "@restband/solver";
-import { useEffect, useReducer, useRef, useState } from "react";
+import { useEffect, useMemo, useReducer, useRef, useState } from "react";
 import { ApiFailure } from "../../../api/api-failure.ts";
 import { useSaveScenario } from "../../../api/scenarios.ts";
 import { useHasSessionEnded } from "../../../api/session-end.ts";
 import { draftReducer, openDraft, resumeDraft } from "../draft/draft-reducer.ts";
-import type { Dispatch, Draft } from "../draft/draft.ts";
+import type { Dispatch, Draft, DraftAction } from "../draft/draft.ts";
 import { Autosave, type Base, type SaveReply, type Saving } from "./autosave.ts";
-import { isSameScenario } from "./differences.ts";
+import { isSameWork, type Work } from "./differences.ts";
 import { dropLocal, keepLocally, readLocal, type LocalDraft } from "./local-draft.ts";
 
 interface UseDraftSettings {
@@ -24,8 +23,10 @@ export interface OpenDraft {
   readonly saving: Saving;
   /** The version the draft is a change of. */
   readonly base: Base;
-  /** Decides a conflict: the scenario to go on with, over the version now stored. */
-  readonly decide: (current: StoredScenario, scenario: Scenario) => void;
+  /** What is kept of the draft. */
+  readonly work: Work;
+  /** Decides a conflict: what to go on with, over the version now stored. */
+  readonly decide: (current: StoredScenario, work: Work) => void;
 }
 
 /**
@@ -34,48 +35,58 @@ export interface OpenDraft {
  */
 export function useDraft({ stored, accountId, canEdit }: UseDraftSettings): OpenDraft {
   const [left] = useState(() => (canEdit ? leftBehind(accountId, stored) : null));
-  const [draft, dispatch] = useReducer(draftReducer, stored.content, (content) =>
-    left ? resumeDraft(left.inForce, left.sheet) : openDraft(content),
+  const [draft, dispatch] = useReducer(draftReducer, stored, ({ content, switchedOff }) =>
+    left ? resumeDraft(left.inForce, left.sheet) : openDraft(content, switchedOff),
   );
   const [saving, setSaving] = useState<Saving>({ kind: "saved", at: null });
-  const [base, setBase] = useState<Base>(() => left?.base ?? { version: stored.version, content: stored.content });
+  const [base, setBase] = useState<Base>(() => left?.base ?? stored);
   const autosave = useAutosave(stored, base, setSaving, setBase);
   const hasEnded = useHasSessionEnded();
   const hasFaults = draft.faults.length > 0;
+  const work = useMemo(
+    () => ({ content: draft.inForce, switchedOff: draft.sheet.off }),
+    [draft.inForce, draft.sheet.off],
+  );
 
   useEffect(() => {
     if (!canEdit) return;
-    if (hasFaults || !isSameScenario(draft.inForce, autosave.base.content))
-      keepLocally(accountId, stored.id, draft, autosave.base);
+    if (hasFaults || !isSameWork(work, autosave.base)) keepLocally(accountId, stored.id, draft, autosave.base);
     else dropLocal(accountId, stored.id);
-  }, [canEdit, accountId, stored.id, draft, base, hasFaults, autosave]);
+  }, [canEdit, accountId, stored.id, draft, work, base, hasFaults, autosave]);
 
   useEffect(() => {
-    if (canEdit && !hasEnded) autosave.want(draft.inForce);
-  }, [canEdit, hasEnded, draft.inForce, autosave]);
+    if (canEdit && !hasEnded) autosave.want(work);
+  }, [canEdit, hasEnded, work, autosave]);
 
   // A newer version of the server's, read again in the background: shown at once where nothing of one's own is waiting.
   const seen = useRef(stored.version);
   useEffect(() => {
     if (stored.version <= seen.current || stored.version <= autosave.base.version) return;
     seen.current = stored.version;
-    if (hasFaults || !autosave.isIdle || !isSameScenario(draft.inForce, autosave.base.content)) return;
+    if (hasFaults || !autosave.isIdle || !isSameWork(work, autosave.base)) return;
     autosave.adopt(stored);
-    dispatch({ type: "replace", scenario: stored.content });
-  }, [stored, draft.inForce, hasFaults, autosave]);
+    dispatch(replaceBy(stored));
+  }, [stored, work, hasFaults, autosave]);
 
-  const decide = (current: StoredScenario, scenario: Scenario): void => {
-    autosave.decide(current, scenario);
-    dispatch({ type: "replace", scenario });
+  const decide = (current: StoredScenario, decided: Work): void => {
+    autosave.decide(current, decided);
+    dispatch(replaceBy(decided));
   };
-  return { draft, dispatch, saving, base, decide };
+  return { draft, dispatch, saving, base, work, decide };
 }
+
+const replaceBy = ({ content, switchedOff }: Work): DraftAction => ({
+  type: "replace",
+  scenario: content,
+  off: switchedOff,
+});
 
 /** What this browser kept, unless the server has it by now. */
 function leftBehind(accountId: string, stored: StoredScenario): LocalDraft | null {
   const left = readLocal(accountId, stored.id);
   if (!left) return null;
-  const isAllThere = isSameScenario(left.inForce, stored.content) && left.sheet.wanted === left.inForce;
+  const kept = { content: left.inForce, switchedOff: left.sheet.off };
+  const isAllThere = isSameWork(kept, stored) && left.sheet.wanted === left.inForce;
   if (!isAllThere || Object.keys(left.sheet.unread).length > 0) return left;
   dropLocal(accountId, stored.id);
   return null;
@@ -88,10 +99,10 @@ function useAutosave(
   onKept: (base: Base) => void,
 ): Autosave {
   const mutation = useSaveScenario(projectId, id);
-  const save = useRef<(scenario: Scenario, version: number) => Promise<SaveReply>>(null);
+  const save = useRef<(work: Work, version: number) => Promise<SaveReply>>(null);
   useEffect(() => {
-    save.current = (scenario, version) =>
-      mutation.mutateAsync({ scenario, version }).then((stored) => ({ kind: "saved", stored }), replyOf);
+    save.current = (work, version) =>
+      mutation.mutateAsync({ ...work, version }).then((stored) => ({ kind: "saved", stored }), replyOf);
   });
   const [autosave] = useState(
     () =>
@@ -99,7 +110,7 @@ function useAutosave(
         base,
         tell,
         onKept,
-        save: (scenario, version) => save.current?.(scenario, version) ?? Promise.resolve({ kind: "unreachable" }),
+        save: (work, version) => save.current?.(work, version) ?? Promise.resolve({ kind: "unreachable" }),
       }),
   );
   useEffect(() => {
