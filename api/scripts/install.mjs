@@ -58,17 +58,30 @@ function isExecutable(file) {
 }
 
 /** Makes sure that the programs are there: installs Debian's packages as root, else names the command that would. */
-export async function installPrograms(programs, packages) {
-  const isMissing = () => programs.some((name) => !findProgram(name));
-  if (!isMissing()) return;
+export function installPrograms(programs, packages) {
+  return installWhile(() => Promise.resolve(programs.some((name) => !findProgram(name))), programs, packages);
+}
+
+/** Makes sure that Debian's Python has scipy: the files that recheck a run are tried with it. */
+export function installScipy() {
+  const isMissing = () =>
+    run("/usr/bin/python3", ["-c", "import scipy.integrate"], { quiet: true }).then(
+      () => false,
+      () => true,
+    );
+  return installWhile(isMissing, ["scipy"], ["python3-scipy"]);
+}
+
+async function installWhile(isMissing, wanted, packages) {
+  if (!(await isMissing())) return;
   const install = ["install", "-y", "--no-install-recommends", ...packages];
   const byHand = `sudo apt-get update && sudo apt-get ${install.filter((word) => word !== "-y").join(" ")}`;
   if (process.getuid?.() !== 0 || !findProgram("apt-get")) {
-    throw new Trouble(`${programs.join(" and ")} are needed. Install them with: ${byHand}`);
+    throw new Trouble(`${wanted.join(" and ")} are needed. Install them with: ${byHand}`);
   }
   say(`Installing ${packages.join(" and ")}.`);
   const env = { DEBIAN_FRONTEND: "noninteractive" };
   await run("apt-get", ["update"], { quiet: true, env });
   await run("apt-get", install, { quiet: true, env });
-  if (isMissing()) throw new Trouble(`${packages.join(" and ")} did not bring ${programs.join(" and ")}.`);
+  if (await isMissing()) throw new Trouble(`${packages.join(" and ")} did not bring ${wanted.join(" and ")}.`);
 }

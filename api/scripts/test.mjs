@@ -2,7 +2,7 @@ import { existsSync, readdirSync, readFileSync, rmSync } from "node:fs";
 import { join } from "node:path";
 import { build } from "./build.mjs";
 import { openDatabaseServer } from "./database-server.mjs";
-import { demandNode, installPackages, installPrograms } from "./install.mjs";
+import { demandNode, installPackages, installPrograms, installScipy } from "./install.mjs";
 import { isProcess, run, stopProcess } from "./processes.mjs";
 import { local, main, makePrivateFolder, readIfThere, say } from "./project.mjs";
 import { untilStopped } from "./shutdown.mjs";
@@ -19,6 +19,7 @@ await main(() => {
 async function test(atEnd) {
   await installPackages();
   await installPrograms(["chromium"], ["chromium"]);
+  await installScipy();
   await removeLeftovers();
   makePrivateFolder(folder);
   atEnd(() => rmSync(folder, { recursive: true, force: true }));

@@ -3,6 +3,7 @@ import { answerText, parse, refusal, written } from "./cli/answer.ts";
 import { type Command, readArguments, usage, UsageError } from "./cli/arguments.ts";
 import { answerCell, cellsFormat, checkCells } from "./cli/cells.ts";
 import { linesOf, writeLine } from "./cli/lines.ts";
+import { scriptText } from "./cli/script-text.ts";
 import { jsonText } from "./json-text.ts";
 import type { Refusal, SimulateOptions } from "./options.ts";
 import { ownMember } from "./scenario/own-member.ts";
@@ -12,13 +13,21 @@ const badUsage = 2;
 
 /** Answers one file: the result on standard output, or every fault on standard error, a line each. */
 async function solveFile(file: string, options: SimulateOptions): Promise<number> {
-  const { text, refused } = written(answerText(await readScenarioFile(file), options));
+  return tellFile(written(answerText(await readScenarioFile(file), options)));
+}
+
+async function tellFile({ text, refused }: { text: string; refused: Refusal | null }): Promise<number> {
   if (refused === null) {
     await writeLine(process.stdout, text);
     return 0;
   }
   for (const { path, message } of refused.error.faults) process.stderr.write(`${told(path, message)}\n`);
   return refusedStatus;
+}
+
+/** Writes a Python file that recomputes what this solver says of a scenario; where there is none, why. */
+async function scriptFile(file: string, { method }: SimulateOptions): Promise<number> {
+  return tellFile(scriptText(await readScenarioFile(file), { method, samples: 0 }));
 }
 
 async function readScenarioFile(file: string): Promise<string> {
@@ -74,7 +83,9 @@ async function main(): Promise<number> {
     process.stdout.write(usage);
     return 0;
   }
-  return command.file === null ? solveLines(command.options) : solveFile(command.file, command.options);
+  const { file, options, asPython } = command;
+  if (file === null) return solveLines(options);
+  return asPython ? scriptFile(file, options) : solveFile(file, options);
 }
 
 // A reader that has seen enough closes the pipe: that ends the work and is no failure.

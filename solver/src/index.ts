@@ -74,3 +74,5 @@ export {
   type TolerancePlan,
 } from "./explore/tolerance/tolerance-plan.ts";
 export type * from "./explore/tolerance/tolerance-summary.ts";
+export { pythonScript, type Claim } from "./script/python-script.ts";
+export { pythonGap } from "./script/not-covered.ts";

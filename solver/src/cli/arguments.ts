@@ -4,6 +4,7 @@ import { quantityNames } from "../scenario/quantity-names.ts";
 
 export const usage = `npm run --silent solve -- FILE [options]      one scenario, one result as JSON
 npm run --silent solve -- --lines [options]   a scenario a line on standard input, a result a line on standard output
+npm run --silent solve -- python FILE         a Python file that recomputes the result by itself (numpy, scipy)
 
   --samples N          points of the uniform grid of samples (2001; with --lines 0)
   --no-samples         leave samples out
@@ -21,6 +22,8 @@ Exit status: 0; 1 where a scenario was refused; 2 where the command cannot be re
 /** What the command line asks for; `file` null reads lines. */
 export interface Command {
   file: string | null;
+  /** True where a Python file is wanted in place of the result. */
+  asPython: boolean;
   options: SimulateOptions;
 }
 
@@ -31,7 +34,9 @@ export class UsageError extends Error {}
 export function readArguments(given: readonly string[]): Command | null {
   const { values, positionals } = parsed(given);
   if (values.help) return null;
-  if (values.lines ? positionals.length > 0 : positionals.length !== 1)
+  const asPython = !values.lines && positionals.length === 2 && positionals[0] === "python";
+  const files = asPython ? positionals.slice(1) : positionals;
+  if (values.lines ? files.length > 0 : files.length !== 1)
     throw new UsageError("Give one file, or --lines and no file.");
   const options: SimulateOptions = {
     samples: samplesOf(values.samples, values["no-samples"] || (values.lines && values.samples === undefined)),
@@ -40,7 +45,7 @@ export function readArguments(given: readonly string[]): Command | null {
     ...(values["no-events"] ? { events: false } : {}),
     ...(values.quantities === undefined ? {} : { quantities: quantitiesOf(values.quantities) }),
   };
-  return { file: positionals[0] ?? null, options };
+  return { file: files[0] ?? null, asPython, options };
 }
 
 function parsed(given: readonly string[]) {

@@ -71,6 +71,17 @@ describe("solve FILE", { timeout: 60_000 }, () => {
     expect(noJson.err).toMatch(/^This is no JSON/);
   });
 
+  it("writes a Python file that recomputes the result, or says why there is none", async () => {
+    const { status, out } = await solve(["python", fileOf(JSON.stringify(ringDown))]);
+    expect(status).toBe(0);
+    expect(out).toMatch(/^#!\/usr\/bin\/env python3\n/u);
+    expect(out).toContain('"restDisplacement": 0.003');
+    const cutOff = { ...ringDown, span: { seconds: 10, maxEvents: 1 } };
+    const refused = await solve(["python", fileOf(JSON.stringify(cutOff))]);
+    expect([refused.status, refused.out]).toEqual([1, ""]);
+    expect(refused.err).toContain("cut off");
+  });
+
   it("explains bad usage", async () => {
     for (const args of [[], ["--lines", "x.json"], ["--colour"], [join(folder, "none.json")]]) {
       const { status, out, err } = await solve(args);

@@ -1,0 +1,34 @@
+import type { Result } from "../result.ts";
+import type { Scenario } from "../scenario/scenario.ts";
+import { isLawWritten } from "./law-part.ts";
+import { isWritten } from "./term-parts.ts";
+
+/** A longer record would make a file that nobody reads and that runs for hours. */
+const mostPoints = 20_000;
+
+/**
+ * Why there is no Python file for a scenario, as a sentence for people; null where there is one. `ended` is how the run came
+ * to its end: one that was cut off has no motion to compare.
+ */
+export function pythonGap(scenario: Scenario, ended: Result["ended"]): string | null {
+  const { contact, force, base } = scenario;
+  if (ended !== "rest" && ended !== "time")
+    return "The run was cut off before its end, so there is no whole motion to check.";
+  if (!isLawWritten(contact.law.model))
+    return "A friction law with a deflection of its own is not written out as a Python file.";
+  const terms = [...force, ...base];
+  if (!terms.every(({ kind }) => isWritten(kind))) return "One of the inputs is not written out as a Python file.";
+  if (terms.some((term) => "digest" in term))
+    return "A stored record is not written out as a Python file; one whose points stand in the scenario is.";
+  if (terms.some((term) => "times" in term && term.times.length > mostPoints))
+    return `A record of more than ${mostPoints} points is not written out as a Python file.`;
+  if (hasMovingElement(scenario))
+    return "Displacement-proportional solid damping on a base that moves against the counterface is not written out as a Python file.";
+  return null;
+}
+
+/** Solid damping has its own reversals where the spring's stretch and the slip are not the same motion. */
+function hasMovingElement({ solid, contact, base }: Scenario): boolean {
+  if (solid.model !== "displacement-proportional" || contact.counterface === "base") return false;
+  return contact.counterface !== "ground" || base.some(({ kind }) => kind !== "constant");
+}

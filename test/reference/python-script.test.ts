@@ -1,0 +1,96 @@
+import { describe, expect, it } from "vitest";
+import { digestOf, pythonScript, simulate, type Result, type Scenario } from "@restband/solver";
+import { runPython } from "../support/python.ts";
+import { buildScenario } from "../support/scenario-builder.ts";
+
+/** Five runs that between them meet every rule of stick and slip; the file integrates what the solver knows in closed form. */
+const scenarios: Record<string, Scenario> = {
+  "a decay to rest on an incline": buildScenario({
+    body: { inertia: 3, stiffness: 1200, viscous: 2 },
+    contact: { law: { model: "coulomb", static: 0.3, kinetic: 0.22 }, normal: { weight: true } },
+    incline: 12,
+    initial: { displacement: 0.09, velocity: 0.4 },
+    span: { seconds: 6 },
+  }),
+  "two harmonics and a pulse, with stops": buildScenario({
+    body: { inertia: 1, stiffness: 400, viscous: 0.8 },
+    contact: { law: { model: "coulomb", static: 1.3, kinetic: 1 }, normal: { preload: 6 } },
+    force: [
+      { kind: "harmonic", amplitude: 10, hz: 1.1, phase: 30 },
+      { kind: "harmonic", amplitude: 3, hz: 3.3, phase: -60 },
+      { kind: "pulse", shape: "triangle", peak: 8, start: 0.7, duration: 0.4 },
+    ],
+    span: { seconds: 9, untilRest: false },
+  }),
+  "a feed that sticks and slips": buildScenario({
+    body: { inertia: 120, stiffness: 4e6, viscous: 350 },
+    contact: { law: { model: "coulomb", static: 0.15, kinetic: 0.12 }, normal: { preload: 800, weight: true } },
+    base: [{ kind: "ramp", rate: 0.002 }],
+    span: { seconds: 0.8, untilRest: false },
+    settleBand: 1e-5,
+  }),
+  "a body on a belt with falling friction": buildScenario({
+    body: { inertia: 2, stiffness: 800, cubic: 3e4, viscous: 0.5 },
+    contact: {
+      law: { model: "stribeck", static: 0.4, kinetic: 0.2, velocity: 0.1, exponent: 1, fluid: 0.3 },
+      normal: { preload: 30 },
+      counterface: { velocity: 0.05 },
+    },
+    span: { seconds: 6, untilRest: false },
+  }),
+  "a rotor with measured friction on a base that moves and shakes": buildScenario({
+    motion: "angular",
+    body: { inertia: 0.05, stiffness: 60 },
+    solid: { model: "equivalent-viscous", lossFactor: 0.04, at: "natural" },
+    contact: {
+      law: {
+        model: "table",
+        points: [
+          [0, 0.35],
+          [0.02, 0.24],
+          [0.2, 0.2],
+          [1, 0.26],
+        ],
+      },
+      normal: { preload: 40, faces: 2, ripple: { amplitude: 90, hz: 1.7, phase: 20 } },
+      radius: 0.08,
+    },
+    base: [
+      { kind: "move", distance: 0.3, speed: 0.5, acceleration: 4, start: 0.2 },
+      { kind: "harmonic", amplitude: 0.05, hz: 2.3 },
+    ],
+    span: { seconds: 3, untilRest: false },
+    settleBand: 0.01,
+  }),
+};
+
+describe("a scenario as a Python file", () => {
+  it.each(Object.entries(scenarios))("recomputes every quantity and event of %s within 1e-6", (_name, scenario) => {
+    const result = run(scenario);
+    expect(result.events.length).toBeGreaterThan(4);
+    const { status, output } = runPython(scriptOf(scenario, result));
+    expect(output).toMatch(/^agrees: /mu);
+    expect(status).toBe(0);
+    expect(output).not.toContain("Warning");
+  });
+
+  it("says so and ends with status 1 where a number is wrong", () => {
+    const scenario = scenarios["a decay to rest on an incline"];
+    const result = run(scenario);
+    const quantities = { ...result.quantities, peakVelocity: (result.quantities.peakVelocity ?? 0) * (1 + 1e-5) };
+    const { status, output } = runPython(scriptOf(scenario, { ...result, quantities }));
+    expect(output).toMatch(/^peakVelocity .*more than allowed$/mu);
+    expect(status).toBe(1);
+  });
+});
+
+function run(scenario: Scenario): Result {
+  const result = simulate(scenario, { samples: 0 });
+  if ("error" in result) throw new Error(result.error.message);
+  return result;
+}
+
+function scriptOf(scenario: Scenario, result: Result): string {
+  const claim = { ...result, eventCount: result.events.length, digest: digestOf(scenario), name: "this run" };
+  return pythonScript(scenario, claim);
+}
