@@ -26,6 +26,7 @@ export type { Refusal, SimulateOptions } from "./options.ts";
 export * from "./result.ts";
 export { jsonText } from "./json-text.ts";
 export { simulate } from "./simulate.ts";
+export { traceOf, type Trace } from "./trace.ts";
 export { solverVersion } from "./version.ts";
 export { quantities, quantityOf } from "./quantities/index.ts";
 export type { Quantity } from "./quantities/quantity.ts";
@@ -74,5 +75,9 @@ export {
   type TolerancePlan,
 } from "./explore/tolerance/tolerance-plan.ts";
 export type * from "./explore/tolerance/tolerance-summary.ts";
+export { axisValues, cellCount, cellPlace, cellValues } from "./explore/sweep/axis-values.ts";
+export { cellOf, cellReason } from "./explore/sweep/cell-of.ts";
+export { runTile, type TileSettings } from "./explore/sweep/run-tile.ts";
+export { mostTileCells, tileCells, tileCount, tileOrder } from "./explore/sweep/tiles.ts";
 export { pythonScript, type Claim } from "./script/python-script.ts";
 export { pythonGap } from "./script/not-covered.ts";

@@ -7,6 +7,7 @@ import type { Refusal, SimulateOptions } from "./options.ts";
 import type { MotionEvent, Result } from "./result.ts";
 import { sampleMotion, valuesAt } from "./samples.ts";
 import { compileProblem } from "./scenario/compile-problem.ts";
+import type { Problem } from "./scenario/problem.ts";
 import type { Scenario } from "./scenario/scenario.ts";
 import { needsAdaptive } from "./scenario/needs-adaptive.ts";
 import { unsupported } from "./scenario/unsupported.ts";
@@ -22,12 +23,20 @@ const defaultSamples = 2001;
  * that cannot go on is no refusal: `ended` says why, and the motion so far is returned.
  */
 export function simulate(scenario: Scenario, options: SimulateOptions = {}): Result | Refusal {
-  const { method = "auto", records, progress } = options;
+  const { method = "auto", records } = options;
   const reason = needsAdaptive(scenario);
   const fault = unsupported(scenario, records) ?? (method === "exact" ? reason : null);
   if (fault !== null) return { error: { ...fault, faults: [fault] } };
   const isExact = method === "exact" || (method === "auto" && reason === null);
-  const problem = compileProblem(scenario, records);
+  return simulateProblem(compileProblem(scenario, records), isExact, options);
+}
+
+/**
+ * Runs a problem compiled from a checked scenario: what `simulate` does once all is checked, for those who run very many.
+ * @param isExact by the exact method, which must apply (see `needsAdaptive`), else by the adaptive one
+ */
+export function simulateProblem(problem: Problem, isExact: boolean, options: SimulateOptions): Result {
+  const { progress } = options;
   return describe(isExact ? runExact(problem, progress) : runAdaptive(problem, progress), options);
 }
 

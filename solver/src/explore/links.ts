@@ -6,19 +6,19 @@ import { quoted } from "../scenario/sentences.ts";
 import { z } from "../scenario/zod.ts";
 
 /**
- * How a number follows others that are varied: `factor` × the number at `of`, or, for `body.viscous` alone, so that
- * ζ = c/(2√(km)) stays as entered.
+ * How a number follows others that are varied: `factor` × the number at `of`; `body.viscous` so that ζ = c/(2√(km)) stays as
+ * entered; `span.seconds` so that the run lasts as many periods of its lowest input frequency.
  */
-export type Link = { readonly of: string; readonly factor: number } | { readonly keep: "dampingRatio" };
+export type Link = { readonly of: string; readonly factor: number } | { readonly keep: "dampingRatio" | "periods" };
 
 /** Numbers that follow, by path. A number followed must not itself follow. */
 export type Links = Readonly<Record<string, Link>>;
 
-const damping = "body.viscous";
+const keeps = { dampingRatio: "body.viscous", periods: "span.seconds" } as const;
 
 const linkSchema = z.union([
   z.strictObject({ of: z.string(), factor: z.number() }),
-  z.strictObject({ keep: z.literal("dampingRatio") }),
+  z.strictObject({ keep: z.enum(["dampingRatio", "periods"]) }),
 ]);
 export const linksSchema: z.ZodType<Links> = z.record(z.string(), linkSchema);
 
@@ -58,27 +58,52 @@ interface Around {
 function linkFault(path: string, link: unknown, { scenario, paths, varied, links }: Around): string | null {
   if (!paths.has(path)) return `This scenario has no number called ${quoted(path)}.`;
   if (varied.includes(path)) return "This number is varied itself, so it cannot follow another.";
-  if (ownMember(link, "keep") === "dampingRatio") return keepFault(path, scenario);
+  const keep = ownMember(link, "keep");
+  if (keep === "dampingRatio" || keep === "periods") return keepFault(path, keep, scenario);
   const of = ownMember(link, "of");
   if (!paths.has(of as string) || !Number.isFinite(ownMember(link, "factor")))
-    return 'A link is {"of": a number of the scenario, "factor": a number}, or {"keep": "dampingRatio"}.';
+    return 'A link is {"of": a number of the scenario, "factor": a number}, {"keep": "dampingRatio"} or {"keep": "periods"}.';
   return of === path || Object.hasOwn(links, of as string) ? "A number cannot follow one that itself follows." : null;
 }
 
-function keepFault(path: string, { body }: Scenario): string | null {
-  if (path !== damping) return "Only the viscous damping can keep the damping ratio.";
-  return body.stiffness > 0 ? null : "Without a spring there is no damping ratio to keep.";
+function keepFault(path: string, keep: keyof typeof keeps, scenario: Scenario): string | null {
+  if (keep === "dampingRatio") {
+    if (path !== keeps[keep]) return "Only the viscous damping can keep the damping ratio.";
+    return scenario.body.stiffness > 0 ? null : "Without a spring there is no damping ratio to keep.";
+  }
+  if (path !== keeps[keep]) return "Only the length of the run can keep the number of periods.";
+  return hzPaths(scenario).length > 0
+    ? null
+    : "Nothing drives the body at a frequency, so there are no periods to keep.";
+}
+
+/** The frequencies of steady harmonic inputs. */
+function hzPaths({ force, base }: Scenario): string[] {
+  return Object.entries({ force, base }).flatMap(([place, terms]) =>
+    terms.flatMap(({ kind }, i) => (kind === "harmonic" || kind === "unbalance" ? [`${place}[${i}].hz`] : [])),
+  );
 }
 
 /** The values that follow, by path, once `read` tells those varied. @param base the scenario as entered */
 export function linkedValues(base: Scenario, links: Links, read: (path: string) => number): [string, number][] {
-  const { inertia, stiffness, viscous } = base.body;
-  return Object.entries(links).map(([path, link]) => {
-    if ("of" in link) return [path, link.factor * read(link.of)];
-    const grown = (read("body.stiffness") / stiffness) * (read("body.inertia") / inertia);
-    return [path, viscous * Math.sqrt(grown)];
-  });
+  return Object.entries(links).map(([path, link]) => [
+    path,
+    "of" in link ? link.factor * read(link.of) : keepers[link.keep](base, read),
+  ]);
 }
+
+type Keeper = (base: Scenario, read: (path: string) => number) => number;
+
+const keepers: Readonly<Record<keyof typeof keeps, Keeper>> = {
+  dampingRatio: ({ body }, read) => {
+    const grown = (read("body.stiffness") / body.stiffness) * (read("body.inertia") / body.inertia);
+    return body.viscous * Math.sqrt(grown);
+  },
+  periods: (base, read) => {
+    const lowest = (at: (path: string) => number) => Math.min(...hzPaths(base).map(at));
+    return (base.span.seconds * lowest((path) => numberAt(base, path))) / lowest(read);
+  },
+};
 
 /** The scenario with other numbers at some paths, and those that follow them. */
 export function withValues(base: Scenario, values: readonly (readonly [string, number])[], links: Links): Scenario {

@@ -11,8 +11,13 @@ import { quoted } from "./sentences.ts";
  * comparison with NaN finds nothing.
  */
 export function ruleFaults(scenario: Scenario): Fault[] {
-  const rules = [lawFaults, solidFaults, motionFaults, termFaults, shakenFaults, limitFaults, originFaults];
-  return rules.flatMap((rule) => rule(scenario));
+  const rules = [shakenFaults, limitFaults, originFaults];
+  return [...numberFaults(scenario), ...rules.flatMap((rule) => rule(scenario))];
+}
+
+/** Those of them that another number in a checked scenario can bring about. */
+export function numberFaults(scenario: Scenario): Fault[] {
+  return [lawFaults, solidFaults, motionFaults, termFaults].flatMap((rule) => rule(scenario));
 }
 
 /** Faults of a kind are told relative to it. */

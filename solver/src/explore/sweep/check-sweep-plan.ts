@@ -116,6 +116,10 @@ function sizeFaults({ axes, continuation }: SweepPlan): Fault[] {
   const cells = branches * counts.reduce((product, count) => product * count, 1);
   if (cells > mostCells)
     return [{ path: "axes", message: `A sweep has at most ${mostCells} cells; these are ${cells}.` }];
+  if (continuation !== "none" && axes.some(({ path }) => path.startsWith("initial.")))
+    return [
+      { path: "continuation", message: "Cells that follow one another have no start of their own to be varied." },
+    ];
   if (continuation !== "none" && counts[0] > mostContinued)
     return [
       {
