@@ -131,7 +131,8 @@ describe("continuation", () => {
     const outcomes = figuresOf(belt, plan).map(({ outcome }) => outcome);
     const [sticks, slides] = ["stick-slip", "smooth-sliding"];
     expect(outcomes.slice(0, 9)).toEqual([...Array.from({ length: 8 }, () => sticks), slides]);
-    expect(outcomes.slice(9)).toEqual([sticks, sticks, ...Array.from({ length: 7 }, () => slides)]);
+    // on the way down 1.1 is below the limit of stability and a swing grows from next to nothing
+    expect(outcomes.slice(9)).toEqual([sticks, "growing", ...Array.from({ length: 7 }, () => slides)]);
     const opened = [5, 14].map((index) => cellOf(belt, plan, index).scenario as Scenario);
     expect(opened.map((scenario) => scenario.contact.counterface)).toEqual([{ velocity: 1.5 }, { velocity: 1.5 }]);
     const alone = opened.map((scenario) => answerRun({ scenario, quantities: [] }));
