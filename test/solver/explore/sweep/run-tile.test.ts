@@ -119,10 +119,10 @@ describe("continuation", () => {
       normal: { preload: 1 },
       counterface: { velocity: 1 },
     },
-    span: { seconds: 600, untilRest: false },
+    span: { seconds: 400, untilRest: false },
   });
 
-  it("finds both branches of a belt that slides or sticks, and opens a cell as it was run", () => {
+  it("finds both branches of a belt that slides or sticks, and opens a cell as it was run", { timeout: 30_000 }, () => {
     const values = [1, 1.1, 1.2, 1.3, 1.4, 1.5, 1.6, 1.7, 1.9];
     const plan = planned(belt, {
       axes: [{ path: "contact.counterface.velocity", spacing: "listed", values }],
