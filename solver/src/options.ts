@@ -13,6 +13,8 @@ export interface SimulateOptions {
   /** False leaves the energy ledger out. Default true. */
   energy?: boolean;
   method?: "auto" | "exact" | "adaptive";
+  /** Relative tolerance of the adaptive method, between 1e-12 and 1e-3; the exact method has none. */
+  tolerance?: number;
   /** Points of stored records. */
   records?: Records;
   /** Called with the fraction of the span done, 0…1; returning false cancels the run. */

@@ -36,8 +36,8 @@ export function simulate(scenario: Scenario, options: SimulateOptions = {}): Res
  * @param isExact by the exact method, which must apply (see `needsAdaptive`), else by the adaptive one
  */
 export function simulateProblem(problem: Problem, isExact: boolean, options: SimulateOptions): Result {
-  const { progress } = options;
-  return describe(isExact ? runExact(problem, progress) : runAdaptive(problem, progress), options);
+  const { progress, tolerance } = options;
+  return describe(isExact ? runExact(problem, progress) : runAdaptive(problem, progress, tolerance), options);
 }
 
 /** What a run says, whatever the method that made it. */

@@ -7,10 +7,9 @@ import type { Progress } from "../run.ts";
 import { BristleBody } from "./bristle-body.ts";
 import { BristleMotion, type BristleSegment } from "./bristle-motion.ts";
 import { crossings } from "./crossings.ts";
-import { integrate } from "./integrate.ts";
+import { integrate, usualTolerance } from "./integrate.ts";
 import { StepStore } from "./step-store.ts";
 
-const tolerance = 1e-10;
 /** A body whose faces pass slower than this share of vs is told as stuck. */
 const creepShare = 1e-3;
 
@@ -21,8 +20,8 @@ const creepShare = 1e-3;
  *
  * Source: Canudas de Wit, Olsson, Åström & Lischinsky, IEEE Trans. Automatic Control 40 (1995) 419.
  */
-export function runBristle(problem: Problem, progress?: Progress): Motion {
-  return new BristleRun(problem, progress).motion();
+export function runBristle(problem: Problem, progress?: Progress, tolerance = usualTolerance): Motion {
+  return new BristleRun(problem, progress, tolerance).motion();
 }
 
 class BristleRun {
@@ -40,6 +39,7 @@ class BristleRun {
   constructor(
     private readonly problem: Problem,
     private readonly progress: Progress | undefined,
+    private readonly tolerance: number,
   ) {
     this.inputs = new Inputs(problem);
     this.body = new BristleBody(problem, this.inputs);
@@ -87,7 +87,7 @@ class BristleRun {
       sizes: body.sizes(start, rate),
       unit: 1 / rate,
       longest: 1 / body.slowRate(),
-      tolerance,
+      tolerance: this.tolerance,
       work: this.work,
       onStep: (a, b, dense) => {
         store.push(a, b, dense);

@@ -1,6 +1,9 @@
 import type { Work } from "../../numerics/first-zero.ts";
 import { Solver } from "./vendor-odex.js";
 
+/** Of the adaptive method, where nobody asks for another. */
+export const usualTolerance = 1e-10;
+
 /** A smooth initial-value problem y′ = f(t, y) over [from, to]. */
 export interface Integration {
   readonly from: number;

@@ -5,12 +5,11 @@ import type { Inputs } from "../inputs.ts";
 import { slidingFriction } from "../sliding-friction.ts";
 import type { BodyValues, Cause, Ending, Slip, SlipWatches } from "../slip.ts";
 import { copyStance, newStance, type Stance } from "../stance.ts";
-import { integrate } from "./integrate.ts";
+import { integrate, usualTolerance } from "./integrate.ts";
 import { StepStore } from "./step-store.ts";
 
-const tolerance = 1e-10;
-/** A v_r below this share of its typical size is the integrator's own error: a slip must first rise out of it. */
-const noiseShare = 100 * tolerance;
+/** A v_r below so many tolerances of its typical size is the integrator's own error: a slip must first rise out of it. */
+const noiseTolerances = 100;
 /** No step turns by more than this, rad: events are looked for within steps. */
 const longestTurn = 1;
 
@@ -39,11 +38,15 @@ export class IntegratedSlip implements Slip {
   /** The largest |v_r| so far, m/s. */
   private fastest = 0;
   private readonly at = new Float64Array(2);
+  private readonly noiseShare: number;
 
   constructor(
     private readonly problem: Problem,
     private readonly inputs: Inputs,
-  ) {}
+    private readonly tolerance = usualTolerance,
+  ) {
+    this.noiseShare = noiseTolerances * tolerance;
+  }
 
   begin(_: Inputs, body: BodyValues, stance: Stance): void {
     copyStance(stance, this.stance);
@@ -65,7 +68,7 @@ export class IntegratedSlip implements Slip {
     this.last = this.first - 1;
     const rate = this.rate();
     const sizes = this.sizes(rate);
-    this.noise = noiseShare * sizes[1];
+    this.noise = this.noiseShare * sizes[1];
     this.hasRisen = Math.abs(stance.slip) > this.noise;
     this.fastest = sizes[1];
     const reached = integrate({
@@ -79,7 +82,7 @@ export class IntegratedSlip implements Slip {
       sizes,
       unit: 1 / rate,
       longest: longestTurn / rate,
-      tolerance,
+      tolerance: this.tolerance,
       work,
       onStep: (from, to, dense) => {
         store.push(from, to, dense);
@@ -195,7 +198,7 @@ export class IntegratedSlip implements Slip {
     const apart = 1e-4 / this.rate();
     const rate = this.slipRate(ending.tau);
     const second = (rate - this.slipRate(ending.tau - apart)) / apart;
-    if (!(second > 0 && (rate * rate) / (2 * second) <= noiseShare * this.fastest)) return;
+    if (!(second > 0 && (rate * rate) / (2 * second) <= this.noiseShare * this.fastest)) return;
     ending.isTouch = true;
     ending.tau = Math.min(end, ending.tau - rate / second);
   }
