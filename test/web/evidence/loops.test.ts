@@ -49,11 +49,13 @@ describe("the loops", () => {
 
   it("name their lines, each word within the sheet", () => {
     const names = [phasePlane, forceLoop].map((frame) => loopLabels(feed, part, frame, size));
-    expect(names[0].map(({ text }) => text)).toEqual(["feed", "slipping", "stuck"]);
+    expect(names[0].map(({ text }) => text)).toEqual(["feed", "slipping", "stuck", "breaks away", "stops"]);
     expect(names[1].map(({ text }) => text.replace("\u00a0", " "))).toEqual([
       "holds up to 296.5 N",
       "slipping",
       "stuck",
+      "breaks away",
+      "stops",
     ]);
     for (const { x, y } of names.flat()) {
       expect(x).toBeGreaterThan(0);
@@ -61,6 +63,21 @@ describe("the loops", () => {
       expect(y).toBeGreaterThan(0);
       expect(y).toBeLessThan(size.height);
     }
+  });
+
+  it("name no event that is at another place each time", () => {
+    const released = viewOf(
+      solved({
+        body: { inertia: 1, stiffness: 100, viscous: 10 },
+        contact: coulombForces(1),
+        force: [2, 5, 9].map((peak, i) => ({ kind: "pulse", shape: "rectangle", peak, start: i, duration: 0.5 })),
+        span: { seconds: 4, untilRest: false },
+      }),
+    );
+    const whole = loopPart(released, { from: 0, to: released.end });
+    const labels = loopLabels(released, whole, loopFrames(released, whole)[0], size);
+    expect(released.result.events.filter(({ kind }) => kind === "break-away")).toHaveLength(6);
+    expect(labels.map(({ text }) => text)).toEqual(["slipping", "stuck"]);
   });
 
   it("leave a word out rather than write it over another", () => {

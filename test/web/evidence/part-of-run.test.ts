@@ -1,5 +1,12 @@
 import { describe, expect, it } from "vitest";
-import { following, isClosest, isWhole, panned, zoomed } from "../../../web/src/features/evidence/part-of-run.ts";
+import {
+  between,
+  following,
+  isClosest,
+  isWhole,
+  panned,
+  zoomed,
+} from "../../../web/src/features/evidence/part-of-run.ts";
 
 const part = { from: 2, to: 6 };
 
@@ -22,6 +29,15 @@ describe("the part of the run that is seen", () => {
     expect(panned(part, 10, 3)).toEqual({ from: 5, to: 9 });
     expect(panned(part, 10, 30)).toEqual({ from: 6, to: 10 });
     expect(panned(part, 10, -30)).toEqual({ from: 0, to: 4 });
+  });
+
+  it("lies between two instants in either order, within the run", () => {
+    expect(between(2, 6, 10)).toEqual(part);
+    expect(between(6, 2, 10)).toEqual(part);
+    expect(between(-3, 14, 10)).toEqual({ from: 0, to: 10 });
+    const closest = between(4, 4, 10);
+    expect(closest.from).toBeCloseTo(4 - 5e-5, 12);
+    expect(closest.to).toBeCloseTo(4 + 5e-5, 12);
   });
 
   it("follows the cursor only where that leaves it", () => {

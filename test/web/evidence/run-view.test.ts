@@ -167,7 +167,23 @@ describe("the cursor", () => {
   it("knows the last cycles where there are any", () => {
     const starts = feed.result.events.filter(({ kind }) => kind === "break-away").map(({ t }) => t);
     expect(lastCycles(feed)).toEqual({ from: starts.at(-4), to: starts.at(-1) });
+    expect(lastCycles(feed, 1)).toEqual({ from: starts.at(-2), to: starts.at(-1) });
+    expect(lastCycles(feed, starts.length - 1)).toBeNull();
     expect(lastCycles(viewOf(block))).toBeNull();
+  });
+
+  it("counts the cycles of a body that is driven by its drive's periods", () => {
+    const driven = viewOf(
+      solved({
+        body: { inertia: 1, stiffness: 100 },
+        contact: coulombForces(0.1),
+        force: [{ kind: "harmonic", amplitude: 5, hz: 2 }],
+        span: { seconds: 4, untilRest: false },
+      }),
+    );
+    expect(lastCycles(driven)).toEqual({ from: 2.5, to: 4 });
+    expect(lastCycles(driven, 7)).toEqual({ from: 0.5, to: 4 });
+    expect(lastCycles(driven, 8)).toBeNull();
   });
 });
 

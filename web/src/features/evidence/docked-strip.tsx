@@ -6,20 +6,24 @@ import { Icon } from "../../components/icon.tsx";
 import { MotionStrip } from "../../components/motion-strip.tsx";
 import { readQuantity } from "../../format/format-quantity.ts";
 import { stripWords } from "./plot-words.ts";
+import { isWhole, type Range } from "./part-of-run.ts";
 import { phaseWords } from "./readings.ts";
 import type { RunView } from "./run-view.ts";
 import "./docked-strip.css";
 
 interface DockedStripProps {
   view: RunView;
+  /** What the plots show of the run. */
+  range: Range;
   t: number;
   onMove: (t: number) => void;
   onStep: (direction: 1 | -1) => void;
 }
 
 /** On the phone the strip stands at the bottom of the screen and is the cursor: one button to each event, a finger in between. */
-export function DockedStrip({ view, t, onMove, onStep }: DockedStripProps) {
+export function DockedStrip({ view, range, t, onMove, onStep }: DockedStripProps) {
   const { phase } = phaseWords(view, t);
+  const share = (time: number): string => `${(time / view.end) * 100}%`;
   const move = ({ clientX, currentTarget }: PointerEvent<HTMLElement>): void => {
     const box = currentTarget.getBoundingClientRect();
     onMove(Math.min(1, Math.max(0, (clientX - box.left) / box.width)) * view.end);
@@ -49,9 +53,15 @@ export function DockedStrip({ view, t, onMove, onStep }: DockedStripProps) {
             label={stripWords(view.intervals)}
             isNever={view.result.outcome === "never-moved"}
           />
+          {!isWhole(range, view.end) && (
+            <span
+              className="pointer-events-none absolute inset-y-1.5 border-x-2 border-y border-quiet"
+              style={{ left: share(range.from), width: share(range.to - range.from) }}
+            />
+          )}
           <span
             className="pointer-events-none absolute inset-y-1 w-[2px] -translate-x-1/2 bg-ink"
-            style={{ left: `${(t / view.end) * 100}%` }}
+            style={{ left: share(t) }}
           />
         </div>
         <Button className="size-11 shrink-0 px-0!" aria-label="Next event" onClick={() => onStep(1)}>

@@ -16,7 +16,7 @@ import { OverlayChoice } from "./overlay-choice.tsx";
 import { PanelChoice } from "./panel-choice.tsx";
 import { PlayButtons } from "./play-buttons.tsx";
 import { phaseWords } from "./readings.ts";
-import { lastCycles, neighbourEvent, type RunView } from "./run-view.ts";
+import { neighbourEvent, type RunView } from "./run-view.ts";
 import { SaveRun } from "./save-run.tsx";
 import { scalesOf } from "./scales.ts";
 import { TimeCursor } from "./time-cursor.tsx";
@@ -69,16 +69,24 @@ export function Evidence({ view: newest, t, onMove, isStale }: EvidenceProps) {
       <div className="mb-3 flex flex-wrap items-center gap-x-5 gap-y-2">
         <PlayButtons play={play} onStep={step} hasSteps={!isPhone} />
         <CursorWords view={view} t={t} />
-        <ViewChoice part={part} whole={view.end} last={lastCycles(view)} />
+        <ViewChoice view={view} part={part} />
       </div>
       <div className="flex flex-wrap items-center gap-x-6">
         <PanelChoice hasDrive={view.drive !== null} chosen={panels} onToggle={togglePanel} />
         <OverlayChoice overlay={overlay} />
       </div>
-      {isPhone && <ReadingsRow view={view} frame={frame} t={t} />}
+      {isPhone && <ReadingsRow view={view} frame={frame} t={t} overlays={overlays} />}
       <div className="border-line bg-raised max-desk:-mx-(--page-pad) max-desk:border-y desk:rounded desk:border">
         <div ref={ref} className="relative">
-          <TimeFigure view={view} frame={frame} t={t} theme={theme} overlays={overlays}>
+          <TimeFigure
+            view={view}
+            frame={frame}
+            t={t}
+            theme={theme}
+            overlays={overlays}
+            onMove={moveTo}
+            onSpan={part.span}
+          >
             <TimeCursor view={view} frame={frame} t={t} onMove={moveTo} part={part} />
           </TimeFigure>
         </div>
@@ -90,7 +98,7 @@ export function Evidence({ view: newest, t, onMove, isStale }: EvidenceProps) {
         </Suspense>
       )}
       <SaveRun view={view} />
-      {isPhone && <DockedStrip view={view} t={t} onMove={moveTo} onStep={step} />}
+      {isPhone && <DockedStrip view={view} range={range} t={t} onMove={moveTo} onStep={step} />}
     </div>
   );
 }

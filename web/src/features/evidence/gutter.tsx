@@ -2,7 +2,7 @@ import { classNames } from "../../components/class-names.ts";
 import { Figure } from "../../components/figure.tsx";
 import type { Frame } from "./frame.ts";
 import type { Overlay } from "./overlay.ts";
-import { readingsAt, type CursorReading } from "./readings.ts";
+import { overlayReading, readingsAt, type CursorReading } from "./readings.ts";
 import type { RunView } from "./run-view.ts";
 
 const tones: Record<CursorReading["tone"], string> = {
@@ -32,13 +32,22 @@ export function Gutter({ view, frame, t, overlays }: GutterProps) {
   ));
 }
 
-/** On the phone: the first value of each panel, above the plots. */
-export function ReadingsRow({ view, frame, t }: Omit<GutterProps, "overlays">) {
-  const readings = readingsAt(view, frame, t);
+/** On the phone: the first value of each panel, above the plots, and below them those of what is compared. */
+export function ReadingsRow({ view, frame, t, overlays }: GutterProps) {
+  const { displacement, velocity, friction } = readingsAt(view, frame, t);
+  const others = overlays.flatMap((overlay) =>
+    (["x", "v"] as const).flatMap((channel) => {
+      const reading = overlayReading(view, frame, t, overlay, channel);
+      return reading ? [{ key: `${overlay.key} ${channel}`, channel, reading }] : [];
+    }),
+  );
   return (
     <dl className="mb-3 grid grid-cols-3 gap-3">
-      {[readings.displacement[0], readings.velocity[0], readings.friction[0]].map((reading) => (
+      {[displacement[0], velocity[0], friction[0]].map((reading) => (
         <ReadingItem key={reading.name} reading={reading} />
+      ))}
+      {others.map(({ key, channel, reading }) => (
+        <ReadingItem key={key} reading={reading} className={channel === "x" ? "col-start-1" : "col-start-2"} />
       ))}
     </dl>
   );

@@ -44,7 +44,39 @@ export function loopLabels(view: RunView, part: LoopPart, frame: LoopFrame, size
       : holdLevels(view, part, frame).map((force) =>
           level(`holds up to ${say(Math.abs(force), frame.upright.measure, { digits: 4 })}`, force, "stick"),
         );
-  return apart([...levels, ...stretchLabels(part, frame, size)], size);
+  return apart([...levels, ...stretchLabels(part, frame, size), ...endLabels(part, frame, size)], size);
+}
+
+/** Events of one kind closer than this share of an axis stand at one place. */
+const SAME = 0.03;
+
+/** Where a cycle breaks away and where it stops; nothing where every one does so at another place. */
+function endLabels(part: LoopPart, frame: LoopFrame, size: Size): LoopLabel[] {
+  const { samples, places, events } = part;
+  const { across, upright } = frame;
+  const values = frame.key === "velocity" ? samples.v : samples.f;
+  const at = (text: string, indices: readonly number[]): LoopLabel[] => {
+    if (indices.length === 0) return [];
+    const met = indices.map((i) => places[i]);
+    if (Math.max(...met) - Math.min(...met) > SAME * (across.high - across.low)) return [];
+    const last = indices[indices.length - 1];
+    const x = acrossOf(across, places[last], size);
+    const y = downOf(upright, values[last], size);
+    const isLow = y > size.height - loopMargin.bottom - LINE;
+    // Away from the middle, where the lines of the loop are.
+    const anchor = x < size.width / 2 ? "end" : "start";
+    return [{ text, x: x + (anchor === "end" ? -8 : 8), y: isLow ? y - 6 : y + 16, anchor, tone: "quiet" }];
+  };
+  return [
+    ...at(
+      "breaks away",
+      events.filter((i) => i > 0 && samples.phase[i - 1] === 0),
+    ),
+    ...at(
+      "stops",
+      events.filter((i) => samples.phase[i] === 0),
+    ),
+  ];
 }
 
 /** About the width of a letter and the height of a line, px. */
@@ -55,8 +87,8 @@ const LINE = 16;
 export function apart(labels: readonly LoopLabel[], { width }: Size): LoopLabel[] {
   const kept: LoopLabel[] = [];
   for (const label of labels) {
-    const beyond = Math.max(0, endsOf(label)[1] - (width - 4));
-    const inside = { ...label, x: label.x - beyond };
+    const [left, right] = endsOf(label);
+    const inside = { ...label, x: label.x - Math.max(0, right - (width - 4)) + Math.max(0, 4 - left) };
     if (!kept.some((other) => isOver(other, inside))) kept.push(inside);
   }
   return kept;

@@ -14,6 +14,16 @@ export function zoomed({ from, to }: Range, whole: number, about: number, factor
   return placed(about - share * width, width, whole);
 }
 
+/** The part between two instants in either order, as far as the run reaches; widened where it is closer than can be seen. */
+export function between(one: number, other: number, whole: number): Range {
+  const [from, to] = [Math.max(0, Math.min(one, other)), Math.min(whole, Math.max(one, other))];
+  const width = Math.max(to - from, CLOSEST * whole);
+  return placed(width > to - from ? (from + to - width) / 2 : from, width, whole);
+}
+
+/** The least width of a part, s. */
+export const closest = (whole: number): number => CLOSEST * whole;
+
 /** The part moved along by `by` seconds, as far as the run reaches. */
 export const panned = ({ from, to }: Range, whole: number, by: number): Range => placed(from + by, to - from, whole);
 

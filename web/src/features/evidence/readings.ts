@@ -21,24 +21,21 @@ export function readingsAt(
   overlays: readonly Overlay[] = [],
 ): Record<PanelKey, CursorReading[]> {
   const here = instantAt(view.samples, t);
-  const unitOf = (key: PanelKey): Unit | undefined => frame.panels.find((panel) => panel.key === key)?.unit;
-  const others = (channel: "x" | "v", key: "displacement" | "velocity"): CursorReading[] =>
-    overlays.flatMap((overlay) => {
-      const there = overlayAt(overlay, t);
-      return there ? [reading(view, overlay.label, there[channel], key, "quiet", { unit: unitOf(key) })] : [];
-    });
+  const unitOf = (key: PanelKey): Unit | undefined => unitIn(frame, key);
+  const others = (channel: "x" | "v"): CursorReading[] =>
+    overlays.flatMap((overlay) => overlayReading(view, frame, t, overlay, channel) ?? []);
   return {
     displacement: [
       // The band is drawn: beside the panel it makes room for what is compared.
       ...displacementReadings(view, here, unitOf("displacement")).filter(
         ({ tone }) => tone !== "band" || overlays.length === 0,
       ),
-      ...others("x", "displacement"),
+      ...others("x"),
     ],
     velocity: [
       reading(view, "velocity", here.v, "velocity", "slip", { unit: unitOf("velocity") }),
       ...(unitOf("acceleration") ? [] : [reading(view, "acceleration", here.a, "acceleration", "ink")]),
-      ...others("v", "velocity"),
+      ...others("v"),
     ],
     acceleration: [reading(view, "acceleration", here.a, "acceleration", "slip", { unit: unitOf("acceleration") })],
     friction: frictionReadings(view, here, unitOf("friction")),
@@ -46,6 +43,21 @@ export function readingsAt(
       ? [reading(view, view.drive.name, view.drive.at(here), "force", "ink", { unit: unitOf("drive") })]
       : [],
   };
+}
+
+const unitIn = (frame: Frame, key: PanelKey): Unit | undefined => frame.panels.find((panel) => panel.key === key)?.unit;
+
+/** Displacement or velocity of another motion at the cursor; null beyond its end. */
+export function overlayReading(
+  view: RunView,
+  frame: Frame,
+  t: number,
+  overlay: Overlay,
+  channel: "x" | "v",
+): CursorReading | null {
+  const there = overlayAt(overlay, t);
+  const key = channel === "x" ? "displacement" : "velocity";
+  return there && reading(view, overlay.label, there[channel], key, "quiet", { unit: unitIn(frame, key) });
 }
 
 function displacementReadings(view: RunView, { t, x }: Instant, unit: Unit | undefined): CursorReading[] {

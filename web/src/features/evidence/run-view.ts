@@ -1,4 +1,4 @@
-import type { Result, Samples, Scenario } from "@restband/solver";
+import { compileProblem, lowestHz, type Result, type Samples, type Scenario } from "@restband/solver";
 import { inputsOf, type Inputs } from "../../compute/inputs.ts";
 import { intervalsOf, shownEnd, type Interval } from "../../compute/intervals.ts";
 import { driveForceOf, type DriveForce } from "./drive-force.ts";
@@ -12,6 +12,8 @@ export interface RunView {
   readonly inputs: Inputs;
   /** The force that drives the body; null where nothing does, or where it cannot be told. */
   readonly drive: DriveForce | null;
+  /** The lowest frequency that drives the body, Hz; null without one. */
+  readonly driveHz: number | null;
   /** The samples at which something happens, sorted. */
   readonly eventIndices: readonly number[];
   /** Times of the events, sorted, each once. */
@@ -34,6 +36,7 @@ export function runViewOf(scenario: Scenario, result: Result): RunView | null {
     intervals: intervalsOf(held, end),
     inputs,
     drive: driveForceOf(scenario, inputs),
+    driveHz: lowestHz(compileProblem(scenario)),
     eventIndices: phaseChanges(held),
     eventTimes: [...new Set(result.events.map(({ t }) => t))],
     end,
@@ -83,9 +86,19 @@ export function firstCursor({ eventTimes, end }: RunView): number {
 /** Where the body stands as its spring feels it: x, or from the drive where that moves; m (rad). */
 export const fromDrive = ({ inputs }: RunView, { t, x }: { t: number; x: number }): number => x - inputs.base(t);
 
-/** The last three cycles from break-away to break-away, where there are as many; null elsewhere. */
-export function lastCycles({ result, end }: RunView): { from: number; to: number } | null {
+/** The cycles that are shown where nobody chose how many. */
+export const usualCycles = 3;
+
+/**
+ * The last cycles of a run: of a drive that swings its periods, to the end; else from break-away to break-away. Null where
+ * there are not so many, and one more.
+ */
+export function lastCycles(
+  { result, end, driveHz }: RunView,
+  count = usualCycles,
+): { from: number; to: number } | null {
+  if (driveHz !== null) return (count + 1) / driveHz > end ? null : { from: end - count / driveHz, to: end };
   const starts = result.events.filter(({ kind }) => kind === "break-away").map(({ t }) => t);
-  if (starts.length < 5) return null;
-  return { from: starts[starts.length - 4], to: Math.min(end, starts[starts.length - 1]) };
+  const last = starts.length - 1;
+  return last < count + 1 ? null : { from: starts[last - count], to: Math.min(end, starts[last]) };
 }

@@ -11,6 +11,7 @@ import { overlayAt, type Overlay } from "./overlay.ts";
 import { figureWords, stripWords } from "./plot-words.ts";
 import type { RunView } from "./run-view.ts";
 import { SavePlot } from "./save-plot.tsx";
+import { StripDrag } from "./strip-drag.tsx";
 
 interface TimeFigureProps {
   view: RunView;
@@ -19,16 +20,20 @@ interface TimeFigureProps {
   theme: PlotTheme;
   /** Other motions, drawn behind this one. */
   overlays: readonly Overlay[];
+  onMove: (t: number) => void;
+  onSpan: (one: number, other: number) => void;
   /** The cursor, over all panels. */
   children: ReactNode;
 }
 
 /** The motion strip and the panels over one time axis, with what is read at the cursor. */
-export function TimeFigure({ view, frame, t, theme, overlays, children }: TimeFigureProps) {
+export function TimeFigure({ view, frame, t, theme, overlays, onMove, onSpan, children }: TimeFigureProps) {
   const { data, layout } = useMemo(() => evidenceFigure(view, frame, theme, overlays), [view, frame, theme, overlays]);
   return (
     <>
-      <StripRow view={view} frame={frame} t={t} />
+      <StripRow view={view} frame={frame} t={t}>
+        <StripDrag frame={frame} onMove={onMove} onSpan={onSpan} />
+      </StripRow>
       <div className="relative">
         <Plot data={data} layout={layout} label={figureWords(view, frame)} />
         <Heads frame={frame} motion={view.scenario.motion} />
@@ -86,7 +91,7 @@ function timeSheet({ scenario }: RunView, frame: Frame, theme: PlotTheme): Omit<
 }
 
 /** The strip over the same axis as the plots, with the head of the cursor. */
-function StripRow({ view, frame, t }: { view: RunView; frame: Frame; t: number }) {
+function StripRow({ view, frame, t, children }: Pick<TimeFigureProps, "view" | "frame" | "t" | "children">) {
   const isSeen = t >= frame.from && t <= frame.to;
   return (
     <div className="relative pt-5" style={{ paddingLeft: frame.left, paddingRight: frame.right }}>
@@ -108,6 +113,7 @@ function StripRow({ view, frame, t }: { view: RunView; frame: Frame; t: number }
           <path d={`M${xOf(frame, t)} 12V60`} className="stroke-ink" strokeWidth={1.25} />
         </svg>
       )}
+      {children}
     </div>
   );
 }

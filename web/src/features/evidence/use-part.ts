@@ -1,6 +1,6 @@
 import { useMemo, useState } from "react";
 import { useShortcut } from "../../components/shortcuts.tsx";
-import { following, isWhole, panned, zoomed, type Range } from "./part-of-run.ts";
+import { between, following, isWhole, panned, zoomed, type Range } from "./part-of-run.ts";
 
 /** The part of the run that all time panels show, and what changes it. */
 export interface SeenPart {
@@ -11,11 +11,13 @@ export interface SeenPart {
   readonly zoom: (factor: number, about?: number) => void;
   /** Along by a share of what is seen. */
   readonly pan: (share: number) => void;
+  /** What lies between two instants, in either order. */
+  readonly span: (one: number, other: number) => void;
   /** Moves what is seen so that the instant is in it. */
   readonly follow: (t: number) => void;
 }
 
-/** The part seen, with the keys + − 0 and Page up and down. `t`: the cursor's time. */
+/** The part seen, with the keys + − [ ] 0 and Page up and down. `t`: the cursor's time. */
 export function useSeenPart(whole: number, t: number): SeenPart {
   const [chosen, setChosen] = useState<Range | null>(null);
   const range = useMemo(() => within(chosen, whole), [chosen, whole]);
@@ -25,10 +27,13 @@ export function useSeenPart(whole: number, t: number): SeenPart {
     choose: setChosen,
     zoom: (factor, about) => set(zoomed(range, whole, about ?? t, factor)),
     pan: (share) => set(panned(range, whole, share * (range.to - range.from))),
+    span: (one, other) => set(between(one, other, whole)),
     follow: (instant) => set(following(range, whole, instant)),
   };
   useShortcut("+", "Closer about the cursor", () => part.zoom(0.5));
   useShortcut("-", "Wider", () => part.zoom(2));
+  useShortcut("[", "See from the cursor on", () => part.span(t, t < range.to ? range.to : whole));
+  useShortcut("]", "See up to the cursor", () => part.span(t > range.from ? range.from : 0, t));
   useShortcut("0", "The whole run", () => part.choose(null));
   return part;
 }

@@ -1,4 +1,4 @@
-import { compileProblem, lowestHz, steadyWindow, type Scenario } from "@restband/solver";
+import { compileProblem, steadyWindow } from "@restband/solver";
 import { fastestHz } from "../../../compute/samples-for.ts";
 import type { EvenTimes } from "../../../compute/solver-job.ts";
 import type { Range } from "../part-of-run.ts";
@@ -36,32 +36,33 @@ export function spectrumWindow(view: RunView, part: WindowPart, seen: Range): Sp
   const longest = fastest > 0 ? MOST / (PER_PERIOD * fastest) : Infinity;
   const range = { from: Math.max(from, to - longest), to };
   if (!(range.to > range.from)) return null;
-  const cut = acrossBreakAways(view, range) ?? drivenPeriods(scenario, range);
+  const cut = acrossBreakAways(view, range) ?? drivenPeriods(view, range);
   return { ...cut, count: instantsOver(cut.to - cut.from, fastest) };
 }
 
 type Cut = Omit<SpectrumWindow, "count">;
 
 /** Of a steady drive, or of the ripple of N: as many whole periods as there is room for, to the end of the range. */
-function drivenPeriods(scenario: Scenario, { from, to }: Range): Cut {
-  const rate = rateOf(scenario);
+function drivenPeriods(view: RunView, { from, to }: Range): Cut {
+  const rate = rateOf(view);
   // A range of exactly so many periods is one, however its length was rounded.
   const periods = rate ? Math.floor((to - from) * rate.hz * (1 + 1e-12)) : 0;
   if (!rate || periods === 0) return { from, to, rate, periods: null };
   return { from: Math.max(0, to - periods / rate.hz), to, rate, periods };
 }
 
-function rateOf(scenario: Scenario): Rate | null {
-  const drive = lowestHz(compileProblem(scenario));
-  if (drive !== null) return { hz: drive, name: "drive" };
+function rateOf({ scenario, driveHz }: RunView): Rate | null {
+  if (driveHz !== null) return { hz: driveHz, name: "drive" };
   const { ripple } = scenario.contact.normal;
   return ripple ? { hz: ripple.hz, name: "ripple" } : null;
 }
 
 /** Without a rate from outside: from the first break-away to the last, where there are three at least. */
-function acrossBreakAways({ scenario, result }: RunView, { from, to }: Range): Cut | null {
-  if (rateOf(scenario)) return null;
-  const starts = result.events.filter(({ kind, t }) => kind === "break-away" && t >= from && t <= to).map(({ t }) => t);
+function acrossBreakAways(view: RunView, { from, to }: Range): Cut | null {
+  if (rateOf(view)) return null;
+  const starts = view.result.events
+    .filter(({ kind, t }) => kind === "break-away" && t >= from && t <= to)
+    .map(({ t }) => t);
   if (starts.length < 3) return null;
   const [first, last, periods] = [starts[0], starts[starts.length - 1], starts.length - 1];
   return { from: first, to: last, rate: { hz: periods / (last - first), name: "stick–slip" }, periods };
