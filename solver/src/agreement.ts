@@ -85,7 +85,10 @@ function namesOf(first: Result, second: Result): string[] {
   return [...new Set([...Object.keys(first.quantities), ...Object.keys(second.quantities)])];
 }
 
-/** What deviations are a share of: the run's peak in each unit, the largest number of that dimension in either result. */
+/**
+ * What deviations are a share of: the run's peak in each unit, the largest number of that dimension in either result, its
+ * samples included where it has them.
+ */
 type Scales = ReadonlyMap<Dimension, number>;
 
 const columns = { t: "time", x: "displacement", v: "velocity", f: "force" } as const satisfies Partial<
@@ -98,9 +101,10 @@ function scalesOf(...results: readonly Result[]): Scales {
   const peaks = new Map<Dimension, number>();
   const take = (dimension: Dimension, value: number | null) =>
     peaks.set(dimension, Math.max(peaks.get(dimension) ?? 0, Math.abs(value ?? 0)));
-  for (const { quantities, events } of results) {
+  for (const { quantities, events, samples } of results) {
     for (const [name, value] of Object.entries(quantities)) take(quantityOf(name).dimension, value);
     for (const event of events) for (const column of columnNames) take(columns[column], event[column]);
+    if (samples) for (const column of columnNames) samples[column].forEach((value) => take(columns[column], value));
   }
   return peaks;
 }

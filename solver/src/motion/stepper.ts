@@ -113,16 +113,19 @@ export class Stepper {
     this.look(this.carriedWatch, scale, "side");
   }
 
-  /** The first instant at which need leaves ±room, told window by window so that neither side is followed past the other. */
+  /**
+   * The first instant at which need leaves ±room, told window by window so that neither side is followed far past the other;
+   * both over the same window, so that a mirrored run is the same to the last bit.
+   */
   private watchHold(cause: Cause): void {
     const scale = this.inputScale();
     const end = this.ending.tau;
     for (let from = this.form.carried.holdsUntil(); from < end && this.ending.tau === end; from += 4 * scale) {
       const to = Math.min(end, from + 4 * scale);
-      this.holdWatch.sign = 1;
-      this.look(this.holdWatch, scale, cause, from, to);
-      this.holdWatch.sign = -1;
-      this.look(this.holdWatch, scale, cause, from, Math.min(to, this.ending.tau));
+      for (const side of [1, -1] as const) {
+        this.holdWatch.sign = side;
+        this.look(this.holdWatch, scale, cause, from, to, to === end ? this.blur : 0);
+      }
       if (this.outOfWork) return;
     }
   }
@@ -147,8 +150,15 @@ export class Stepper {
     this.look(this.baseSlipWatch, this.inputScale(), "contact");
   }
 
-  private look(watched: Watched, scale: number, cause: Cause, from = 0, to = this.ending.tau): void {
-    const tau = firstZero(watched, from, to, scale, this.work, to === this.ending.tau ? this.blur : 0);
+  private look(
+    watched: Watched,
+    scale: number,
+    cause: Cause,
+    from = 0,
+    to = this.ending.tau,
+    blur = to === this.ending.tau ? this.blur : 0,
+  ): void {
+    const tau = firstZero(watched, from, to, scale, this.work, blur);
     if (!(tau <= this.ending.tau)) return;
     this.ending.tau = tau;
     this.ending.cause = cause;

@@ -11,7 +11,7 @@ const peaks = ["slipVelocityPeak", "peakVelocity", "peakDisplacement", "driveFor
 
 /** A linear run to its end, and the state at one instant. */
 function run(scenario: Scenario, at: number[] = []): Result {
-  const result = simulate(scenario, { samples: 0, quantities: peaks, energy: false, at });
+  const result = simulate(scenario, { samples: 200, quantities: peaks, energy: false, at });
   if ("error" in result) throw new Error(result.error.message);
   return { ...result, outcome: null };
 }

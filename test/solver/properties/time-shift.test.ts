@@ -38,6 +38,10 @@ function atRest(drawn: Scenario): Scenario {
   };
 }
 
+/** Whether the body goes as far as its spring is stretched, near enough: else its x is a small difference of large numbers. */
+const goesFar = ({ quantities }: Result, { body }: Scenario): boolean =>
+  quantities.peakDisplacement! * body.stiffness >= 1e-3 * quantities.driveForcePeak!;
+
 /** An exponent below 1 makes friction fall infinitely fast at rest: from there more than one motion solves the equation. */
 const leavesInManyWays = ({ contact: { law } }: Scenario): boolean => law.model === "stribeck" && law.exponent < 1;
 
@@ -65,7 +69,7 @@ test(
           scenario,
           { ...delayed(scenario, later), span: { ...scenario.span, seconds: seconds + later } },
         ].map(run);
-        fc.pre(now.ended === "time");
+        fc.pre(now.ended === "time" && goesFar(now, scenario));
         const back = {
           ...then,
           events: then.events.map((event) => ({ ...event, t: event.t - later })),

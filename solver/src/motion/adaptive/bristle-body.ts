@@ -1,11 +1,16 @@
 import type { Problem } from "../../scenario/problem.ts";
 import type { Inputs } from "../inputs.ts";
 
+/** g never counts as less than this share of its largest: as N fades the bristles would yield infinitely fast. */
+const leastShare = 1e-9;
+
 /** The equation of a body on bristles; unknowns y = [d, ḋ, z], τ from the inputs' origin. */
 export class BristleBody {
   private readonly stiffness: number;
   private readonly damping: number;
   private readonly viscous: number;
+  /** The largest N of the run, N. */
+  private readonly pressing: number;
 
   constructor(
     private readonly problem: Problem,
@@ -14,6 +19,7 @@ export class BristleBody {
     this.stiffness = problem.law.bristle?.stiffness ?? 0;
     this.damping = problem.law.bristle?.damping ?? 0;
     this.viscous = problem.viscous + problem.solid.viscous;
+    this.pressing = problem.normal + Math.abs(problem.ripple?.amplitude ?? 0);
   }
 
   /** v_r of the body, m/s or rad/s. */
@@ -45,7 +51,8 @@ export class BristleBody {
   private bendingRate(slip: number, bending: number, normal: number): number {
     if (!(normal > 0)) return 0;
     const v = this.problem.radius * slip;
-    return v - (this.stiffness * Math.abs(v) * bending) / (normal * this.problem.law.coefficient(Math.abs(v)));
+    const most = Math.max(normal, leastShare * this.pressing) * this.problem.law.coefficient(Math.abs(v));
+    return v - (this.stiffness * Math.abs(v) * bending) / most;
   }
 
   /** The fastest rate, the bristles' own included, 1/s. */
@@ -66,7 +73,7 @@ export class BristleBody {
   sizes(y: ArrayLike<number>, rate: number): number[] {
     const { problem } = this;
     const v = this.inputs.evaluate(0);
-    const bending = (problem.law.atRest * v.normal) / this.stiffness;
+    const bending = (problem.law.atRest * this.pressing) / this.stiffness;
     const speed = Math.max(Math.abs(y[1]), Math.abs(problem.beltVelocity), Math.abs(v.baseVelocity));
     const size = Math.max(Math.abs(y[0]), bending * problem.radius, speed / rate) || 1;
     return [size, size * rate, bending || size];

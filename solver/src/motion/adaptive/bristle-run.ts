@@ -10,6 +10,8 @@ import { crossings } from "./crossings.ts";
 import { integrate, usualTolerance } from "./integrate.ts";
 import { StepStore } from "./step-store.ts";
 
+/** Finer than for slips: errors of z feed on through its stiff spring, with no event to end them. */
+const bristleTolerance = usualTolerance / 10;
 /** A body whose faces pass slower than this share of vs is told as stuck. */
 const creepShare = 1e-3;
 
@@ -20,7 +22,7 @@ const creepShare = 1e-3;
  *
  * Source: Canudas de Wit, Olsson, Åström & Lischinsky, IEEE Trans. Automatic Control 40 (1995) 419.
  */
-export function runBristle(problem: Problem, progress?: Progress, tolerance = usualTolerance): Motion {
+export function runBristle(problem: Problem, progress?: Progress, tolerance = bristleTolerance): Motion {
   return new BristleRun(problem, progress, tolerance).motion();
 }
 

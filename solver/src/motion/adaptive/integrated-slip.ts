@@ -15,8 +15,9 @@ const longestTurn = 1;
 
 /**
  * A slip by integration: friction that varies with speed, a spring that stiffens, a sweep. The sign of v_r is kept while a
- * step goes on, so that the right-hand side is smooth past the event; the step's dense output is then searched for the
- * first zero, and the run goes on from there. Steps are kept, so that the slip can be read again.
+ * step goes on, so that the right-hand side can be asked past the event; the step's dense output is then searched for the
+ * first zero. That step is taken again to end there, since a law may bend where v_r turns, which a step across it would
+ * smear; and the run goes on from there. Steps are kept, so that the slip can be read again.
  */
 export class IntegratedSlip implements Slip {
   position = 0;
@@ -39,6 +40,8 @@ export class IntegratedSlip implements Slip {
   private fastest = 0;
   private readonly at = new Float64Array(2);
   private readonly noiseShare: number;
+  /** What passed 0 at the end of the slip in hand. */
+  private watched: ((t: number) => number) | null = null;
 
   constructor(
     private readonly problem: Problem,
@@ -67,32 +70,66 @@ export class IntegratedSlip implements Slip {
     this.first = store.count;
     this.last = this.first - 1;
     const rate = this.rate();
-    const sizes = this.sizes(rate);
-    this.noise = this.noiseShare * sizes[1];
+    this.fastest = this.sizes(rate)[1];
+    this.noise = this.noiseShare * this.fastest;
     this.hasRisen = Math.abs(stance.slip) > this.noise;
-    this.fastest = sizes[1];
-    const reached = integrate({
-      from: stance.t,
-      to: limit,
-      start: [stance.position, stance.velocity],
+    this.watched = null;
+    const reached = this.integrate(stance.t, limit, [stance.position, stance.velocity], work, (from, to) => {
+      this.endsWithin(from, to, ending, watches);
+      return ending.cause === "corner";
+    });
+    if (ending.cause !== "corner") return this.retake(ending, work);
+    if (reached < limit) work.spent = Infinity;
+    else if (this.stopsAt(ending.tau, 1e-9 / rate)) ending.cause = "contact";
+  }
+
+  /** Steps on from a state at `from`; each is stored, then told to `onStep`, which says whether to go on. */
+  private integrate(
+    from: number,
+    to: number,
+    start: number[],
+    work: Work,
+    onStep: (from: number, to: number) => boolean,
+  ): number {
+    const { stance, store } = this;
+    const rate = this.rate();
+    return integrate({
+      from,
+      to,
+      start,
       rates: (t, [position, velocity], out) => {
         out[0] = velocity;
         out[1] = this.accelerationAt(t - stance.t, position, velocity);
       },
-      sizes,
+      sizes: this.sizes(rate),
       unit: 1 / rate,
       longest: longestTurn / rate,
       tolerance: this.tolerance,
       work,
-      onStep: (from, to, dense) => {
-        store.push(from, to, dense);
+      onStep: (a, b, dense) => {
+        store.push(a, b, dense);
         this.last = store.count - 1;
-        return !this.endsWithin(from, to, ending, watches);
+        return onStep(a, b);
       },
     });
-    if (ending.cause !== "corner") return;
-    if (reached < limit) work.spent = Infinity;
-    else if (this.stopsAt(ending.tau, 1e-9 / rate)) ending.cause = "contact";
+  }
+
+  /** Takes the last step again, to end at what was found within it, and tells its time by the new one. */
+  private retake(ending: Ending, work: Work): void {
+    const { stance, store } = this;
+    const from = store.from(this.last);
+    const to = stance.t + ending.tau;
+    const fallsAt = this.watched;
+    if (fallsAt === null || ending.isTouch || !(to > from)) return;
+    store.evaluate(this.last, from, this.at);
+    store.count = --this.last + 1;
+    const reached = this.integrate(from, to, [...this.at], work, () => true);
+    if (reached < to) work.spent = Infinity;
+    const apart = 1e-3 * (to - from);
+    const value = fallsAt(to);
+    const slope = (value - fallsAt(to - apart)) / apart;
+    const later = -value / slope;
+    if (Math.abs(later) <= apart) ending.tau += later;
   }
 
   /** True where v_r reaches 0 at τ to within `blur` s. */
@@ -148,7 +185,7 @@ export class IntegratedSlip implements Slip {
   }
 
   /** Looks for the first thing that ends the slip within a step. */
-  private endsWithin(from: number, to: number, ending: Ending, watches: SlipWatches): boolean {
+  private endsWithin(from: number, to: number, ending: Ending, watches: SlipWatches): void {
     const { stance, problem } = this;
     const channel = (pick: () => number, sign: number) => (t: number) => {
       this.evaluate(t - stance.t);
@@ -159,6 +196,7 @@ export class IntegratedSlip implements Slip {
       if (t === Infinity) return;
       ending.tau = t - stance.t;
       ending.cause = cause;
+      this.watched = g;
     };
     look(
       channel(() => this.slip, stance.contact),
@@ -187,7 +225,6 @@ export class IntegratedSlip implements Slip {
         ending,
       );
     }
-    return ending.cause !== "corner";
   }
 
   /**
@@ -222,6 +259,7 @@ export class IntegratedSlip implements Slip {
       if (gLast * gt < 0) {
         ending.tau = bracketedRoot(g, last, t, gLast, gt) - this.stance.t;
         ending.cause = "law";
+        this.watched = g;
         return;
       }
       last = t;
@@ -244,7 +282,9 @@ export class IntegratedSlip implements Slip {
     const force = Math.abs(v.force) + problem.law.atRest * problem.radius * v.normal;
     const speed = Math.max(Math.abs(stance.velocity), Math.abs(problem.beltVelocity), Math.abs(v.baseVelocity));
     const inputs = force / body.inertia / rate ** 2 + this.inputs.baseBound(0);
-    const size = Math.max(Math.abs(stance.position), speed / rate, inputs) || 1;
+    // without a spring the place does not matter
+    const stretch = body.stiffness > 0 || body.cubic !== 0 ? Math.abs(stance.position) : 0;
+    const size = Math.max(stretch, speed / rate, inputs) || 1;
     return [size, size * rate];
   }
 }
