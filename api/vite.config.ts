@@ -11,7 +11,10 @@ export default defineConfig({
         server: "src/server.ts",
         prepare: "src/prepare.ts",
         "create-administrator": "src/create-administrator.ts",
+        "recompute-worker": "src/revisions/recompute-worker.ts",
       },
+      // All beside each other: what starts a thread finds the thread's file there.
+      output: { chunkFileNames: "[name]-[hash].js" },
     },
   },
   ssr: { noExternal: ["@restband/solver"] },

@@ -10,6 +10,7 @@ import { main, root, say } from "./project.mjs";
 import { leavePlace, takePlace, tellRunning } from "./running.mjs";
 import { sessionSecret } from "./session-secret.mjs";
 import { untilStopped } from "./shutdown.mjs";
+import { signingKey } from "./signing-key.mjs";
 
 const USUAL_PORT = 5173;
 const SCRIPT = "dev.mjs";
@@ -45,6 +46,7 @@ function prepare({ urls, grantTo }) {
     RESTBAND_MIGRATIONS_URL: urls.migrations,
     RESTBAND_GRANT_TO: grantTo,
     RESTBAND_DEMO_PASSWORD: demoPassword(),
+    RESTBAND_SIGNING_KEY: signingKey(),
   };
   return run(process.execPath, ["--import", "tsx", "api/src/prepare.ts"], { quiet: true, env });
 }
@@ -58,6 +60,7 @@ function serve({ urls }, port) {
       RESTBAND_PORT: String(port),
       RESTBAND_DATABASE_URL: urls.server,
       RESTBAND_SESSION_SECRET: sessionSecret(),
+      RESTBAND_SIGNING_KEY: signingKey(),
       RESTBAND_LOG_LEVEL: "warn",
     },
   });

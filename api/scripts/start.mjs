@@ -11,6 +11,7 @@ import { local, main, root, say, Trouble } from "./project.mjs";
 import { leavePlace, takePlace, tellRunning } from "./running.mjs";
 import { sessionSecret } from "./session-secret.mjs";
 import { untilStopped } from "./shutdown.mjs";
+import { signingKey } from "./signing-key.mjs";
 
 const USUAL_PORT = 4780;
 const SCRIPT = "start.mjs";
@@ -72,6 +73,7 @@ async function prepare({ urls, grantTo }, isReset) {
     RESTBAND_MIGRATIONS_URL: urls.migrations,
     RESTBAND_GRANT_TO: grantTo,
     RESTBAND_DEMO_PASSWORD: demoPassword(),
+    RESTBAND_SIGNING_KEY: signingKey(),
   };
   const args = [join(root, "api/dist/prepare.js"), ...(isReset ? ["--reset-demo"] : [])];
   const output = await run(process.execPath, args, { quiet: true, env });
@@ -89,6 +91,7 @@ async function serve({ database, host, port }, atEnd) {
       RESTBAND_PORT: String(port),
       RESTBAND_DATABASE_URL: database.urls.server,
       RESTBAND_SESSION_SECRET: sessionSecret(),
+      RESTBAND_SIGNING_KEY: signingKey(),
       RESTBAND_WEB_ROOT: join(root, "web/dist"),
     },
   });

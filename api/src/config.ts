@@ -1,4 +1,5 @@
 import { z } from "@restband/solver";
+import { openSigningKey, type SigningKey } from "./chain/signing-key.ts";
 
 const environmentSchema = z.object({
   /** Where the server listens. 0 takes any free port. */
@@ -8,6 +9,10 @@ const environmentSchema = z.object({
   RESTBAND_DATABASE_URL: z.string(),
   /** Signs the session cookie; at least 128 bits. Shared by all server processes on one database. */
   RESTBAND_SESSION_SECRET: z.string().min(32),
+  /** Signs revisions, decisions and the ends of trails: an Ed25519 key, PKCS #8 in base64. Shared likewise. */
+  RESTBAND_SIGNING_KEY: z.string(),
+  /** Fingerprints of keys that signed before this one, with commas between them. */
+  RESTBAND_FORMER_FINGERPRINTS: z.string().default(""),
   /** The built pages. */
   RESTBAND_WEB_ROOT: z.string().optional(),
   /** What express calls `trust proxy`: how many proxies stand in front, or their addresses. Empty: none. */
@@ -26,17 +31,21 @@ export interface Config {
   readonly host: string;
   readonly databaseUrl: string;
   readonly sessionSecret: string;
+  readonly signingKey: SigningKey;
   readonly webRoot: string | null;
   readonly trustProxy: string | number | false;
   readonly logLevel: string;
   /** By what is throttled: wrong passwords of one account, attempts from one address of origin. */
   readonly throttle: { readonly account: Allowance; readonly origin: Allowance };
   readonly session: { readonly idleSeconds: number; readonly absoluteSeconds: number };
+  /** The server's own runs: so many at a time, each ended after so many seconds. */
+  readonly recomputing: { readonly workers: number; readonly seconds: number };
 }
 
-export const defaultLimits: Pick<Config, "throttle" | "session"> = {
+export const defaultLimits: Pick<Config, "throttle" | "session" | "recomputing"> = {
   throttle: { account: { attempts: 10, seconds: 900 }, origin: { attempts: 60, seconds: 900 } },
   session: { idleSeconds: 12 * 3600, absoluteSeconds: 7 * 24 * 3600 },
+  recomputing: { workers: 2, seconds: 20 },
 };
 
 /**
@@ -52,12 +61,15 @@ export function readConfig(environment: NodeJS.ProcessEnv): Config {
     host: data.RESTBAND_HOST,
     databaseUrl: data.RESTBAND_DATABASE_URL,
     sessionSecret: data.RESTBAND_SESSION_SECRET,
+    signingKey: openSigningKey(data.RESTBAND_SIGNING_KEY, listed(data.RESTBAND_FORMER_FINGERPRINTS)),
     webRoot: data.RESTBAND_WEB_ROOT ?? null,
     trustProxy: trustProxyOf(data.RESTBAND_TRUST_PROXY),
     logLevel: data.RESTBAND_LOG_LEVEL,
     ...defaultLimits,
   };
 }
+
+const listed = (text: string): string[] => text.split(",").map((each) => each.trim());
 
 function trustProxyOf(text: string): Config["trustProxy"] {
   if (text === "") return false;

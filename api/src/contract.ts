@@ -1,7 +1,9 @@
 import { z } from "@restband/solver";
 import { addresses, type Address, type RouteName } from "./addresses.ts";
 import { claimSchema, sessionSchema, signInSchema, signUpSchema } from "./accounts/accounts-schema.ts";
-import { activitySchema } from "./activity/activity-schema.ts";
+import { activityQuerySchema, activitySchema } from "./activity/activity-schema.ts";
+import { chainContract } from "./chain/chain-schema.ts";
+import { commentsContract } from "./comments/comments-schema.ts";
 import {
   claimExplorationSchema,
   conclusionSchema,
@@ -14,7 +16,10 @@ import {
   tileSchema,
 } from "./explorations/explorations-schema.ts";
 import { memberAddSchema, memberChangeSchema, memberSchema } from "./members/members-schema.ts";
+import { noticesContract } from "./notices/notices-schema.ts";
 import { projectDraftSchema, projectSchema } from "./projects/projects-schema.ts";
+import { reviewsContract } from "./reviews/reviews-schema.ts";
+import { revisionsContract } from "./revisions/revisions-schema.ts";
 import {
   casesDraftSchema,
   contentSchema,
@@ -82,12 +87,7 @@ export const routes = {
   listActivity: {
     ...addresses.listActivity,
     params: projectParams,
-    query: z.strictObject({
-      before: z
-        .string()
-        .regex(/^[0-9]{1,15}$/)
-        .optional(),
-    }),
+    query: activityQuerySchema,
     status: 200,
     response: z.array(activitySchema),
   },
@@ -200,6 +200,12 @@ export const routes = {
     status: 204,
   },
   deleteExploration: { ...addresses.deleteExploration, params: explorationParams, status: 204 },
+
+  ...chainContract,
+  ...revisionsContract,
+  ...reviewsContract,
+  ...commentsContract,
+  ...noticesContract,
 } as const satisfies Record<RouteName, Route>;
 
 /** Every failure: a code for programs, a sentence for people, and the fields it concerns. */

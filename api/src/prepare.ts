@@ -1,4 +1,6 @@
 import { parseArgs } from "node:util";
+import { signHeads } from "./chain/chain.ts";
+import { openSigningKey } from "./chain/signing-key.ts";
 import { openDatabase } from "./database/database.ts";
 import { grantToServer } from "./database/grants.ts";
 import { migrateUp } from "./database/migrate.ts";
@@ -12,12 +14,21 @@ import { seedDemo } from "./demo/seed-demo.ts";
  * to the demo.
  */
 const { values: options } = parseArgs({ options: { "reset-demo": { type: "boolean", default: false } } });
-const { RESTBAND_MIGRATIONS_URL: url, RESTBAND_GRANT_TO: grantTo, RESTBAND_DEMO_PASSWORD: password } = process.env;
-if (!url || !password) throw new Error("RESTBAND_MIGRATIONS_URL and RESTBAND_DEMO_PASSWORD have to be set.");
+const {
+  RESTBAND_MIGRATIONS_URL: url,
+  RESTBAND_GRANT_TO: grantTo,
+  RESTBAND_DEMO_PASSWORD: password,
+  RESTBAND_SIGNING_KEY: key,
+} = process.env;
+if (!url || !password || !key) {
+  throw new Error("RESTBAND_MIGRATIONS_URL, RESTBAND_DEMO_PASSWORD and RESTBAND_SIGNING_KEY have to be set.");
+}
 
-const database = openDatabase(url);
+const database = openDatabase(url, openSigningKey(key));
 try {
   const migrated = await migrateUp(database);
+  // Whoever could clear a signature could have it made anew by a restart: only what a migration has laid just now is signed.
+  if (migrated.includes("20261201101000-chain-activity")) await signHeads(database);
   if (grantTo) await grantToServer(database, grantTo);
   if (options["reset-demo"]) await removeDemo(database);
   if (options["reset-demo"] || (await isEmpty())) await seedDemo(database, password);

@@ -6,8 +6,15 @@ import type { Throttle } from "./middleware/throttle.ts";
 import { validate } from "./middleware/validate.ts";
 import type { Call, Handler, Handlers } from "./route-handler.ts";
 
-/** Routes that anybody may try passwords or tokens at. */
-const throttled = new Set<RouteName>(["signUp", "signIn", "claimAccount"]);
+/** Routes at which passwords or tokens may be tried. */
+const throttled = new Set<RouteName>([
+  "signUp",
+  "signIn",
+  "claimAccount",
+  "decideRevision",
+  "selfCheckRevision",
+  "withdrawRevision",
+]);
 
 const methods = { GET: "get", POST: "post", PUT: "put", PATCH: "patch", DELETE: "delete" } as const;
 

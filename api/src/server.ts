@@ -10,7 +10,7 @@ const GRACE_MILLISECONDS = 5000;
 
 const config = readConfig(process.env);
 const log = createLog(config.logLevel);
-const database = openDatabase(config.databaseUrl);
+const database = openDatabase(config.databaseUrl, config.signingKey);
 
 if (!(await isReady(database))) throw new Error("The database lacks migrations: npm start carries them out.");
 const server = await listen(createServer(createApp(config, database, log)));

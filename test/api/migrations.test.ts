@@ -1,5 +1,6 @@
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { migrations } from "../../migrations/index.ts";
+import { chainedTables } from "../../api/src/chain/chained-tables.ts";
 import { openDatabase } from "../../api/src/database/database.ts";
 import { migrateDown, migrateUp } from "../../api/src/database/migrate.ts";
 import { createTestDatabase, type TestDatabase } from "../support/test-database.ts";
@@ -54,16 +55,19 @@ describe("the server's database account", () => {
   beforeAll(async () => (own = await createTestDatabase()));
   afterAll(() => own.drop());
 
-  it("can add to the trail and read it, and neither change nor remove it", async () => {
+  it("can add to the trail and what was frozen, said and decided, and neither change nor remove it", async () => {
     const server = openDatabase(own.url);
     const row = { account_id: crypto.randomUUID(), act: "account.signed-up", detail: "{}", created_at: new Date() };
-    await server("activity").insert(row);
+    const link = { sequence: 1, previous_hash: Buffer.alloc(32), hash: Buffer.alloc(32) };
+    await server("activity").insert({ ...row, ...link });
     expect(await server("activity").select("act")).toHaveLength(1);
     const denied = { errno: 1142 };
-    await expect(server("activity").update({ act: "x" })).rejects.toMatchObject(denied);
-    await expect(server("activity").delete()).rejects.toMatchObject(denied);
-    await expect(server.raw("TRUNCATE activity")).rejects.toMatchObject(denied);
-    await expect(server.raw("REPLACE INTO activity SELECT * FROM activity")).rejects.toMatchObject(denied);
+    for (const table of chainedTables) {
+      await expect(server(table).update({ sequence: 2 })).rejects.toMatchObject(denied);
+      await expect(server(table).delete()).rejects.toMatchObject(denied);
+      await expect(server.raw("TRUNCATE ??", [table])).rejects.toMatchObject(denied);
+      await expect(server.raw("REPLACE INTO ?? SELECT * FROM ??", [table, table])).rejects.toMatchObject(denied);
+    }
     await server.destroy();
   });
 

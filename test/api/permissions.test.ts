@@ -13,6 +13,14 @@ import {
   signUp,
   smallScenario,
 } from "../support/people.ts";
+import {
+  createComment,
+  createRevision,
+  decisionOn,
+  freezeBody,
+  smallComment,
+  smallReplay,
+} from "../support/revisions.ts";
 import { startTestServer, type TestServer } from "../support/test-server.ts";
 
 type Person = "anonymous" | "stranger" | Role | "administrator";
@@ -48,6 +56,26 @@ const mayCall: Record<RouteName, readonly Person[]> = {
   moveScenario: ["owner", "editor"],
   archiveScenario: ["owner", "editor"],
   restoreScenario: ["owner", "editor"],
+  readIntegrity: ["owner", "editor", "reviewer", "reader"],
+  listRevisions: ["owner", "editor", "reviewer", "reader"],
+  freezeScenario: ["owner", "editor"],
+  readRevision: ["owner", "editor", "reviewer", "reader"],
+  listReplays: ["owner", "editor", "reviewer", "reader"],
+  keepReplay: ["owner", "editor", "reviewer", "reader"],
+  readReview: ["owner", "editor", "reviewer", "reader"],
+  askForReview: ["owner", "editor"],
+  decideRevision: ["owner", "reviewer"],
+  selfCheckRevision: ["owner", "editor"],
+  withdrawRevision: ["owner"],
+  readChecklist: ["owner", "editor", "reviewer", "reader"],
+  setChecklist: ["owner"],
+  listComments: ["owner", "editor", "reviewer", "reader"],
+  addComment: ["owner", "editor", "reviewer"],
+  replyToComment: ["owner", "editor", "reviewer"],
+  settleComment: ["owner", "editor", "reviewer"],
+  reopenComment: ["owner", "editor", "reviewer"],
+  listNotices: ["stranger", "owner", "editor", "reviewer", "reader", "administrator"],
+  closeNotice: ["stranger", "owner", "editor", "reviewer", "reader", "administrator"],
   listExplorations: ["owner", "editor", "reviewer", "reader"],
   createExploration: ["owner", "editor"],
   readExploration: ["owner", "editor", "reviewer", "reader"],
@@ -69,13 +97,17 @@ beforeAll(async () => {
 });
 afterAll(() => server.stop());
 
-/** A project with one of each role, a second owner, one more reader, and a scenario; everybody freshly signed in. */
-async function layProject() {
+/**
+ * A project with one of each role, a second owner, one more reader, and a scenario; everybody freshly signed in. What is
+ * asked of a revision finds one that the editor froze, with a comment.
+ */
+async function layProject(name: RouteName) {
   const [owner, editor, reviewer, reader, spare, stranger, administrator] = await Promise.all(
     ["owner", "editor", "reviewer", "reader", "spare", "stranger", "administrator"].map(arrive),
   );
   const projectId = await createProject(owner);
-  const { id: scenarioId } = await createScenario(owner, projectId);
+  const scenario = await createScenario(owner, projectId);
+  const { id: scenarioId } = scenario;
   const { id: explorationId } = await createExploration(owner, projectId, scenarioId, { tileCells: [2] });
   const tile = { runner, content: tileContent(cellsOf(0)) };
   await owner.get("saveTile", { params: { projectId, explorationId, number: "0" }, body: tile });
@@ -86,10 +118,18 @@ async function layProject() {
   await addMember(owner, toProjectId, emailOf("editor"), "editor");
   const anonymous = await server.browser().open();
   const browsers: Record<Person, Browser> = { anonymous, stranger, owner, editor, reviewer, reader, administrator };
-  const { account } = await spare.get<Session>("readSession");
+  const accounts = await Promise.all([spare, reviewer].map((browser) => browser.get<Session>("readSession")));
+  const [accountId, reviewerId] = accounts.map(({ account }) => account!.id);
+  const revision = routes[name].path.includes(":revisionId") ? await createRevision(editor, projectId) : null;
+  const revisionId = revision?.id ?? crypto.randomUUID();
+  const commentId = revision ? (await createComment(editor, revision)).id : crypto.randomUUID();
+  const own = { projectId, scenarioId, explorationId, revisionId, commentId, accountId };
   return {
     browsers,
-    params: { projectId, scenarioId, explorationId, number: "0", accountId: account!.id },
+    params: { ...own, number: "0", noticeId: crypto.randomUUID() },
+    scenario,
+    revision,
+    reviewerId,
     newcomer: emailOf("stranger"),
     toProjectId,
   };
@@ -105,10 +145,26 @@ async function makeAdministrator(): Promise<void> {
   await browser.get("claimAccount", { body: { token, name: "Administrator", password } });
 }
 
+/** Lays anew what can be asked for once only. */
+async function renew(name: RouteName, laid: Laid): Promise<void> {
+  const { params, browsers } = laid;
+  // What one of them moves away is no longer there for the next.
+  if (name === "moveScenario" || name === "freezeScenario") {
+    laid.scenario = await createScenario(browsers.owner, params.projectId);
+    params.scenarioId = laid.scenario.id;
+  }
+  if (name === "deleteExploration")
+    params.explorationId = (await createExploration(browsers.owner, params.projectId, params.scenarioId)).id;
+  if (["askForReview", "decideRevision", "selfCheckRevision", "withdrawRevision"].includes(name)) {
+    laid.revision = await createRevision(browsers.editor, params.projectId);
+    params.revisionId = laid.revision.id;
+  }
+}
+
 /** A request that is right in all but, perhaps, who sends it. */
 function requestFor(
   name: RouteName,
-  { newcomer, params, toProjectId }: Pick<Laid, "newcomer" | "params" | "toProjectId">,
+  { newcomer, params, toProjectId, scenario, revision, reviewerId }: Omit<Laid, "browsers">,
 ): Request {
   switch (name) {
     case "signUp":
@@ -144,6 +200,24 @@ function requestFor(
       return { body: { headline: "Slides smoothly from 8.35 mm/s.", answer: {} } };
     case "changeMember":
       return { body: { role: "reviewer" } };
+    case "freezeScenario":
+      return { body: freezeBody(scenario), version: scenario.version };
+    case "keepReplay":
+      return { body: smallReplay };
+    case "askForReview":
+      return { body: { reviewers: [reviewerId], message: "" } };
+    case "decideRevision":
+      return { body: { decision: "return", ...decisionOn(revision!) } };
+    case "selfCheckRevision":
+      return { body: decisionOn(revision!) };
+    case "withdrawRevision":
+      return { body: { reasons: "Frozen by mistake.", password, digest: revision!.digest } };
+    case "setChecklist":
+      return { body: { points: ["Every value has its origin."] } };
+    case "addComment":
+      return { body: smallComment };
+    case "replyToComment":
+      return { body: { words: "Because the friction holds it.", mentions: [] } };
     case "createScenario":
       return { body: { content: smallScenario } };
     case "saveScenario":
@@ -155,25 +229,25 @@ function requestFor(
 
 /** Signed out: 401. No member: 404, as if there were nothing. A member whose role does not reach: 403. */
 function statusFor(name: RouteName, person: Person): number {
-  if (mayCall[name].includes(person)) return name === "claimAccount" ? 410 : routes[name].status;
+  // A link that nobody gave out; work that the project's reviewer can look at.
+  const refused: Partial<Record<RouteName, number>> = { claimAccount: 410, selfCheckRevision: 403 };
+  if (mayCall[name].includes(person)) return refused[name] ?? routes[name].status;
   if (person === "anonymous") return 401;
   return person === "stranger" || person === "administrator" ? 404 : 403;
 }
 
 describe.each(routeNames)("%s", (name) => {
   it("does for each person what the table of roles says", async () => {
-    const laid = await layProject();
+    const laid = await layProject(name);
     const { browsers, params } = laid;
     // Who may do it comes last: it changes what the others ask for.
     const order = [...people].sort((a, b) => Number(mayCall[name].includes(a)) - Number(mayCall[name].includes(b)));
     const seen: Record<string, number> = {};
     let version = 1;
     for (const person of order) {
-      // What one of them moves away is no longer there for the next.
-      if (name === "moveScenario") params.scenarioId = (await createScenario(browsers.owner, params.projectId)).id;
-      if (name === "deleteExploration")
-        params.explorationId = (await createExploration(browsers.owner, params.projectId, params.scenarioId)).id;
-      const request = { params, ...requestFor(name, laid), version: name === "saveScenario" ? version : undefined };
+      if (mayCall[name].includes(person)) await renew(name, laid);
+      const asked = requestFor(name, laid);
+      const request = { params, ...asked, version: name === "saveScenario" ? version : asked.version };
       seen[person] = (await browsers[person].call(name, request)).status;
       if (name === "saveScenario" && seen[person] === 200) version += 1;
     }
@@ -183,16 +257,16 @@ describe.each(routeNames)("%s", (name) => {
 
 describe.each(routeNames.filter((name) => routes[name].path.includes(":projectId")))("%s", (name) => {
   it("gives nothing of one project to the owner of another, not even that it exists", async () => {
-    const laid = await layProject();
+    const laid = await layProject(name);
     const { params } = laid;
     const owner = await arrive("foreign");
     const projectId = await createProject(owner);
-    const request = { ...requestFor(name, laid), version: name === "saveScenario" ? 1 : undefined };
+    const request = requestFor(name, laid);
     const theirs = await owner.call(name, { params, ...request });
     const none = await owner.call(name, { params: { ...params, projectId: crypto.randomUUID() }, ...request });
     expect([theirs.status, theirs.body]).toEqual([404, none.body]);
     // Under one's own project, with the ids of the other.
-    if (/:(scenarioId|accountId|explorationId)/.test(routes[name].path)) {
+    if (/:(scenarioId|accountId|explorationId|revisionId)/.test(routes[name].path)) {
       expect((await owner.call(name, { params: { ...params, projectId }, ...request })).status).toBe(404);
     }
   });
@@ -203,14 +277,11 @@ describe("an archived project", () => {
   const stays = new Set<RouteName>(["archiveProject", "restoreProject", "removeMember"]);
 
   it.each(routeNames.filter((name) => routes[name].path.includes(":projectId")))("%s", async (name) => {
-    const laid = await layProject();
+    const laid = await layProject(name);
     const { owner } = laid.browsers;
     await owner.get("archiveProject", { params: laid.params });
     const request = { params: laid.params, ...requestFor(name, laid) };
-    const answer = await owner.call<{ error: { code: string } }>(name, {
-      ...request,
-      version: name === "saveScenario" ? 1 : undefined,
-    });
+    const answer = await owner.call<{ error: { code: string } }>(name, request);
     const isOpen = routes[name].method === "GET" || stays.has(name);
     expect(answer.status).toBe(isOpen ? routes[name].status : 409);
     if (!isOpen) expect(answer.body.error.code).toBe("archived");
@@ -224,7 +295,7 @@ describe("the role table", () => {
   });
 
   it("says what is missing where a role does not reach", async () => {
-    const { browsers, params } = await layProject();
+    const { browsers, params } = await layProject("saveScenario");
     const { message } = await browsers.reader.fail("saveScenario", {
       params,
       body: { content: smallScenario },

@@ -1,12 +1,16 @@
+import { checkScenario } from "@restband/solver";
 import fc from "fast-check";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { failureSchema, type Route, type RouteName, routes } from "../../api/src/contract.ts";
 import type { Browser } from "../support/browser.ts";
 import { createProject, createScenario, emailOf, password, signUp, smallScenario } from "../support/people.ts";
+import { freezeBody, smallComment, smallReplay } from "../support/revisions.ts";
 import { startTestServer, type TestServer } from "../support/test-server.ts";
 
 const names = Object.keys(routes) as RouteName[];
 const withBody = names.filter((name) => "body" in routes[name]);
+
+const signed = { reasons: "Looked through.", password, digest: "0".repeat(64) };
 
 const goodBodies: Record<string, Record<string, unknown>> = {
   signUp: { name: "Bo", email: emailOf("Bo"), password },
@@ -21,6 +25,15 @@ const goodBodies: Record<string, Record<string, unknown>> = {
   createCases: { contents: [smallScenario] },
   duplicateScenario: { title: "Copy" },
   moveScenario: { toProjectId: crypto.randomUUID() },
+  freezeScenario: freezeBody({ content: checkScenario(smallScenario).scenario!, digest: "0".repeat(64) }),
+  keepReplay: smallReplay,
+  askForReview: { reviewers: [crypto.randomUUID()], message: "" },
+  decideRevision: { decision: "accept", ...signed, replayId: null, checklist: [] },
+  selfCheckRevision: { ...signed, replayId: null, checklist: [] },
+  withdrawRevision: signed,
+  setChecklist: { points: ["Every value has its origin."] },
+  addComment: smallComment,
+  replyToComment: { words: "Because the friction holds it.", mentions: [] },
 };
 
 /** What a query has to hold. */
@@ -28,14 +41,16 @@ const goodQueries: Partial<Record<RouteName, string>> = { readContents: `?ids=${
 
 let server: TestServer;
 let owner: Browser & { accountId: string };
-let params: { projectId: string; scenarioId: string; accountId: string };
+let params: Record<"projectId" | "scenarioId" | "accountId" | "revisionId" | "commentId" | "noticeId", string>;
 
 beforeAll(async () => {
   const generous = { account: { attempts: 1e6, seconds: 60 }, origin: { attempts: 1e6, seconds: 60 } };
   server = await startTestServer({ throttle: generous });
   owner = await signUp(server, "Ada");
   const projectId = await createProject(owner);
-  params = { projectId, scenarioId: (await createScenario(owner, projectId)).id, accountId: owner.accountId };
+  const [revisionId, commentId, noticeId] = Array.from({ length: 3 }, () => crypto.randomUUID());
+  const scenarioId = (await createScenario(owner, projectId)).id;
+  params = { projectId, scenarioId, accountId: owner.accountId, revisionId, commentId, noticeId };
 });
 afterAll(() => server.stop());
 

@@ -1,8 +1,13 @@
 import { randomBytes } from "node:crypto";
 import { inject } from "vitest";
 import { type Database, openDatabase } from "../../api/src/database/database.ts";
+import { openSigningKey } from "../../api/src/chain/signing-key.ts";
 import { grantToServer } from "../../api/src/database/grants.ts";
 import { migrateUp } from "../../api/src/database/migrate.ts";
+import { signHeads } from "../../api/src/chain/chain.ts";
+
+/** What signs in tests; anybody may know it. */
+export const testKey = openSigningKey("MC4CAQAwBQYDK2VwBCIEIHJlc3RiYW5kIHRlc3RzIHNpZ24gd2l0aCB0aGlzIDMy");
 
 export interface TestDatabase {
   /** The account of the server, with its rights alone. */
@@ -21,9 +26,10 @@ export async function createTestDatabase({ isMigrated = true } = {}): Promise<Te
   await root.raw(`CREATE DATABASE ${name} CHARACTER SET utf8mb4 COLLATE utf8mb4_unicode_ci`);
   await root.raw(`CREATE USER ${account} IDENTIFIED BY 'only for tests'`);
   const migrationsUrl = urlOf({ database: name });
-  const database = openDatabase(migrationsUrl);
+  const database = openDatabase(migrationsUrl, testKey);
   if (isMigrated) {
     await migrateUp(database);
+    await signHeads(database);
     await grantToServer(database, account);
   }
   const drop = async () => {

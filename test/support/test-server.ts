@@ -5,7 +5,7 @@ import { type Config, defaultLimits } from "../../api/src/config.ts";
 import { type Database, openDatabase } from "../../api/src/database/database.ts";
 import { createLog } from "../../api/src/middleware/request-log.ts";
 import { Browser } from "./browser.ts";
-import { createTestDatabase } from "./test-database.ts";
+import { createTestDatabase, testKey } from "./test-database.ts";
 
 export interface TestServer {
   readonly address: string;
@@ -27,6 +27,7 @@ export async function startTestServer(settings: Partial<Config> = {}): Promise<T
     host: "127.0.0.1",
     databaseUrl: own?.url ?? "",
     sessionSecret: "a secret that signs the cookies of tests",
+    signingKey: testKey,
     webRoot: null,
     trustProxy: false,
     logLevel: "info",
@@ -34,7 +35,7 @@ export async function startTestServer(settings: Partial<Config> = {}): Promise<T
     ...settings,
   };
   const log: string[] = [];
-  const database = openDatabase(config.databaseUrl);
+  const database = openDatabase(config.databaseUrl, config.signingKey);
   const server = createServer(createApp(config, database, createLog("info", { write: (line) => void log.push(line) })));
   await new Promise<void>((resolve) => server.listen(config.port, config.host, resolve));
   const address = `http://127.0.0.1:${(server.address() as AddressInfo).port}`;

@@ -3,6 +3,6 @@ import type { ActivityService } from "./activity-service.ts";
 
 export function activityRoutes(activity: ActivityService): HandlersOf<"listActivity"> {
   return {
-    listActivity: ({ params, query }) => activity.list(params.projectId, query.before ? Number(query.before) : null),
+    listActivity: ({ params, query }) => activity.list(params.projectId, query),
   };
 }

@@ -1,6 +1,8 @@
+import type { Knex } from "knex";
+import { append } from "../chain/chain.ts";
 import type { Database } from "../database/database.ts";
 import type { Activity } from "./activity.ts";
-import type { ActivityEntry } from "./activity-schema.ts";
+import type { ActivityEntry, ActivityQuery } from "./activity-schema.ts";
 
 const TABLE = "activity";
 const PAGE = 50;
@@ -18,9 +20,9 @@ interface ActivityRow {
   created_at: Date;
 }
 
-/** Adds one row to the trail. Rows are never changed nor removed: the server's database account cannot. */
+/** Adds one row to the trail. */
 export async function insertActivity(database: Database, activity: Activity): Promise<void> {
-  await database(TABLE).insert({
+  await append(database, TABLE, {
     project_id: activity.projectId,
     account_id: activity.accountId,
     act: activity.act,
@@ -37,7 +39,7 @@ export async function insertActivity(database: Database, activity: Activity): Pr
 export async function listActivity(
   database: Database,
   projectId: string,
-  before: number | null,
+  query: ActivityQuery,
 ): Promise<ActivityEntry[]> {
   const rows = await database(TABLE)
     .join("accounts", "accounts.id", "activity.account_id")
@@ -48,7 +50,7 @@ export async function listActivity(
       join.on("subjects.id", "activity.subject_id").andOnVal("activity.act", "like", "member.%"),
     )
     .where({ "activity.project_id": projectId })
-    .modify((query) => before !== null && void query.where("activity.id", "<", before))
+    .modify((rows) => narrow(rows, query))
     .orderBy("activity.id", "desc")
     .limit(PAGE)
     .select<ActivityRow[]>(
@@ -58,6 +60,15 @@ export async function listActivity(
       "subjects.name as member_name",
     );
   return rows.map(entryOf);
+}
+
+function narrow(rows: Knex.QueryBuilder, { before, about, by, scenarioId, from, to }: ActivityQuery): void {
+  if (before !== undefined) void rows.where("activity.id", "<", Number(before));
+  if (about !== undefined) void rows.where("activity.act", "like", `${about}.%`);
+  if (by !== undefined) void rows.where({ "activity.account_id": by });
+  if (scenarioId !== undefined) void rows.where({ "activity.subject_id": scenarioId });
+  if (from !== undefined) void rows.where("activity.created_at", ">=", new Date(from));
+  if (to !== undefined) void rows.where("activity.created_at", "<", new Date(to));
 }
 
 function entryOf(row: ActivityRow): ActivityEntry {
@@ -72,4 +83,30 @@ function entryOf(row: ActivityRow): ActivityEntry {
     subject: row.subject_id === null ? null : { id: row.subject_id, name, isThere: now !== null },
     detail,
   };
+}
+
+/**
+ * Who saved the versions of a scenario that lie in (after, upTo], first savers first. Its first version is the work of who
+ * made it.
+ */
+export async function findSavers(
+  database: Database,
+  scenarioId: string,
+  { after, upTo }: { readonly after: number; readonly upTo: number },
+): Promise<{ accountId: string; name: string }[]> {
+  const version = database.raw("CAST(JSON_VALUE(activity.detail, '$.version') AS UNSIGNED)");
+  const savers = await database(TABLE)
+    .join("accounts", "accounts.id", "activity.account_id")
+    .where({ subject_id: scenarioId, act: "scenario.saved" })
+    .where(version, ">", after)
+    .where(version, "<=", upTo)
+    .groupBy("accounts.id")
+    .orderByRaw("MIN(activity.id)")
+    .select<{ accountId: string; name: string }[]>("accounts.id as accountId", "accounts.name");
+  if (after > 0) return savers;
+  const [maker] = await database("scenarios")
+    .join("accounts", "accounts.id", "scenarios.created_by")
+    .where({ "scenarios.id": scenarioId })
+    .select<{ accountId: string; name: string }[]>("accounts.id as accountId", "accounts.name");
+  return [maker, ...savers.filter(({ accountId }) => accountId !== maker.accountId)];
 }

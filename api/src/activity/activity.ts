@@ -16,6 +16,18 @@ export type Act =
   | "scenario.archived"
   | "scenario.restored"
   | "cases.created"
+  | "revision.frozen"
+  | "revision.replayed"
+  | "revision.accepted"
+  | "revision.returned"
+  | "revision.self-checked"
+  | "revision.withdrawn"
+  | "review.asked"
+  | "comment.added"
+  | "comment.answered"
+  | "comment.settled"
+  | "comment.reopened"
+  | "checklist.set"
   | "exploration.created"
   | "exploration.deleted";
 
@@ -25,7 +37,7 @@ export interface Activity {
   /** Who did it. */
   readonly accountId: string;
   readonly act: Act;
-  /** The member or scenario it was done to. */
+  /** The member or scenario it was done to; of a revision, its scenario: `detail` has its own id and number. */
   readonly subjectId?: string;
   /** What is worth telling of it; never a secret. */
   readonly detail?: Readonly<Record<string, string | number>>;

@@ -1,10 +1,11 @@
 import { z } from "@restband/solver";
+import { addresses } from "../addresses.ts";
 
 /** A row that is not as it was written, or does not follow the one before it. */
 export const chainFaultSchema = z.strictObject({
   /** Null for the acts that concern no project. */
   projectId: z.uuid().nullable(),
-  /** "revisions" and the like; "chains" for what should stand at the end. */
+  /** "revisions" and the like; "chains" for a row that is gone, and for the end of the chain. */
   table: z.string(),
   /** The row's own id; null where it is gone. */
   id: z.string().nullable(),
@@ -23,17 +24,14 @@ export const integritySchema = z.strictObject({
   faults: z.array(chainFaultSchema),
   /** SHA-256 of the public key this server signs with, lower-case hex. */
   fingerprint: z.string(),
-  /** Fingerprints of other keys that have signed here. */
-  otherFingerprints: z.array(z.string()),
   /** False: the server's database account could change these rows, so that the database guards nothing. */
   isGuarded: z.boolean(),
 });
 export type Integrity = z.infer<typeof integritySchema>;
 
-export const chainRoutes = {
+export const chainContract = {
   readIntegrity: {
-    method: "GET",
-    path: "/projects/:projectId/integrity",
+    ...addresses.readIntegrity,
     params: z.strictObject({ projectId: z.uuid() }),
     status: 200,
     response: integritySchema,

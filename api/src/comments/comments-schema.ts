@@ -1,4 +1,5 @@
 import { z } from "@restband/solver";
+import { addresses } from "../addresses.ts";
 import { personSchema, revisionParams } from "../revisions/revisions-schema.ts";
 
 /** What a comment is about: the whole revision, one of its fields, an instant or a span of its time axis (s). */
@@ -40,41 +41,36 @@ export type Comment = z.infer<typeof commentSchema>;
 
 const commentParams = revisionParams.extend({ commentId: z.uuid() });
 
-export const commentRoutes = {
+export const commentsContract = {
   /** Oldest first. */
   listComments: {
-    method: "GET",
-    path: "/projects/:projectId/revisions/:revisionId/comments",
+    ...addresses.listComments,
     params: revisionParams,
     status: 200,
     response: z.array(commentSchema),
   },
   addComment: {
-    method: "POST",
-    path: "/projects/:projectId/revisions/:revisionId/comments",
+    ...addresses.addComment,
     params: revisionParams,
     body: commentDraftSchema,
     status: 201,
     response: commentSchema,
   },
   replyToComment: {
-    method: "POST",
-    path: "/projects/:projectId/revisions/:revisionId/comments/:commentId/replies",
+    ...addresses.replyToComment,
     params: commentParams,
     body: replyDraftSchema,
     status: 201,
     response: commentSchema,
   },
   settleComment: {
-    method: "POST",
-    path: "/projects/:projectId/revisions/:revisionId/comments/:commentId/settle",
+    ...addresses.settleComment,
     params: commentParams,
     status: 200,
     response: commentSchema,
   },
   reopenComment: {
-    method: "POST",
-    path: "/projects/:projectId/revisions/:revisionId/comments/:commentId/reopen",
+    ...addresses.reopenComment,
     params: commentParams,
     status: 200,
     response: commentSchema,

@@ -1,3 +1,4 @@
+import { chainedTables } from "../chain/chained-tables.ts";
 import type { Database } from "../database/database.ts";
 import { normaliseEmail } from "../accounts/email.ts";
 import { demoPeople } from "./demo-people.ts";
@@ -14,7 +15,7 @@ export async function removeDemo(database: Database): Promise<void> {
       .where({ role: "owner" })
       .distinct("project_id");
     const ids = (await projects).map((row: { project_id: string }) => row.project_id);
-    for (const table of ["activity", "scenarios", "members"])
+    for (const table of [...chainedTables, "chains", "notices", "checklists", "scenarios", "members"])
       await transaction(table).whereIn("project_id", ids).delete();
     await transaction("projects").whereIn("id", ids).delete();
     await removePeople(transaction, people);
@@ -32,7 +33,13 @@ async function removePeople(transaction: Database, people: string[]): Promise<vo
   const kept = new Set<string>();
   for (const [table, column] of [
     ["members", "account_id"],
+    ["scenarios", "created_by"],
     ["scenarios", "updated_by"],
+    ["revisions", "frozen_by"],
+    ["replays", "replayed_by"],
+    ["review_requests", "reviewer_id"],
+    ["decisions", "decided_by"],
+    ["comments", "said_by"],
   ] as const) {
     const rows = await transaction(table).whereIn(column, people).distinct<{ id: string }[]>(`${column} as id`);
     for (const { id } of rows) kept.add(id);

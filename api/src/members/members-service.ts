@@ -77,6 +77,11 @@ export function createMembersService(database: Database, accounts: AccountsServi
   };
 }
 
+/** Who is in a project, as it is in a transaction. */
+export function membersIn(transaction: Database, projectId: string): Promise<Member[]> {
+  return listMembers(transaction, projectId);
+}
+
 /** Locks the members until the transaction ends and makes sure that an owner is left once one of them has its next role. */
 async function lockMember(
   transaction: Database,

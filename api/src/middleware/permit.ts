@@ -14,6 +14,8 @@ type Permission =
 const everyMember = { roles } as const;
 const authors = { roles: ["owner", "editor"] } as const;
 const owners = { roles: ["owner"] } as const;
+const deciders = { roles: ["owner", "reviewer"] } as const;
+const commenters = { roles: ["owner", "editor", "reviewer"] } as const;
 
 /** The one role table. A site administrator has no place in it: being one opens no project. */
 export const permissions = {
@@ -56,6 +58,27 @@ export const permissions = {
   saveTile: authors,
   concludeExploration: authors,
   deleteExploration: authors,
+
+  readIntegrity: everyMember,
+  listRevisions: everyMember,
+  freezeScenario: authors,
+  readRevision: everyMember,
+  listReplays: everyMember,
+  keepReplay: everyMember,
+  readReview: everyMember,
+  askForReview: authors,
+  decideRevision: deciders,
+  selfCheckRevision: authors,
+  withdrawRevision: owners,
+  readChecklist: everyMember,
+  setChecklist: owners,
+  listComments: everyMember,
+  addComment: commenters,
+  replyToComment: commenters,
+  settleComment: commenters,
+  reopenComment: commenters,
+  listNotices: "signed-in",
+  closeNotice: "signed-in",
 } as const satisfies Record<RouteName, Permission>;
 
 /**

@@ -1,4 +1,5 @@
 import { z } from "@restband/solver";
+import { addresses } from "../addresses.ts";
 import { personSchema } from "../revisions/revisions-schema.ts";
 
 /**
@@ -15,13 +16,12 @@ export const noticeSchema = z.strictObject({
 });
 export type Notice = z.infer<typeof noticeSchema>;
 
-export const noticeRoutes = {
+export const noticesContract = {
   /** What waits for the asking person in all their projects, newest first. */
-  listNotices: { method: "GET", path: "/notices", status: 200, response: z.array(noticeSchema) },
+  listNotices: { ...addresses.listNotices, status: 200, response: z.array(noticeSchema) },
   /** Puts away a notice of one's own; that of anybody else, or none, is left as it is and nothing is said of it. */
   closeNotice: {
-    method: "DELETE",
-    path: "/notices/:noticeId",
+    ...addresses.closeNotice,
     params: z.strictObject({ noticeId: z.uuid() }),
     status: 204,
   },

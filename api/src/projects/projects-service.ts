@@ -1,4 +1,5 @@
 import { recordAct } from "../activity/activity-service.ts";
+import { openChain } from "../chain/chain.ts";
 import type { Database } from "../database/database.ts";
 import { notFound } from "../errors.ts";
 import type { MembersService } from "../members/members-service.ts";
@@ -36,6 +37,7 @@ export function createProjectsService(database: Database, members: MembersServic
     async create(draft: ProjectDraft, accountId: string): Promise<Project> {
       const projectId = await database.transaction(async (transaction) => {
         const id = await insertProject(transaction, draft);
+        await openChain(transaction, id);
         await members.makeOwner(transaction, id, accountId);
         await recordAct(transaction, { projectId: id, accountId, act: "project.created", detail: draft });
         return id;

@@ -1,4 +1,5 @@
 import { z } from "@restband/solver";
+import { addresses } from "../addresses.ts";
 import { passwordSchema } from "../accounts/accounts-schema.ts";
 import { personSchema, revisionParams } from "../revisions/revisions-schema.ts";
 
@@ -68,17 +69,15 @@ export const reviewSchema = z.strictObject({
 });
 export type Review = z.infer<typeof reviewSchema>;
 
-export const reviewRoutes = {
+export const reviewsContract = {
   readReview: {
-    method: "GET",
-    path: "/projects/:projectId/revisions/:revisionId/review",
+    ...addresses.readReview,
     params: revisionParams,
     status: 200,
     response: reviewSchema,
   },
   askForReview: {
-    method: "POST",
-    path: "/projects/:projectId/revisions/:revisionId/requests",
+    ...addresses.askForReview,
     params: revisionParams,
     body: askSchema,
     status: 201,
@@ -86,8 +85,7 @@ export const reviewRoutes = {
   },
   /** 403 for one's own work; 409 `decided` where somebody was faster: the message says who and when. */
   decideRevision: {
-    method: "POST",
-    path: "/projects/:projectId/revisions/:revisionId/decision",
+    ...addresses.decideRevision,
     params: revisionParams,
     body: decideSchema,
     status: 201,
@@ -95,31 +93,27 @@ export const reviewRoutes = {
   },
   /** By one of its authors, where no other member could decide. */
   selfCheckRevision: {
-    method: "POST",
-    path: "/projects/:projectId/revisions/:revisionId/self-check",
+    ...addresses.selfCheckRevision,
     params: revisionParams,
     body: selfCheckSchema,
     status: 201,
     response: reviewSchema,
   },
   withdrawRevision: {
-    method: "POST",
-    path: "/projects/:projectId/revisions/:revisionId/withdrawal",
+    ...addresses.withdrawRevision,
     params: revisionParams,
     body: withdrawSchema,
     status: 201,
     response: reviewSchema,
   },
   readChecklist: {
-    method: "GET",
-    path: "/projects/:projectId/checklist",
+    ...addresses.readChecklist,
     params: projectParams,
     status: 200,
     response: checklistSchema,
   },
   setChecklist: {
-    method: "PUT",
-    path: "/projects/:projectId/checklist",
+    ...addresses.setChecklist,
     params: projectParams,
     body: checklistSchema,
     status: 200,

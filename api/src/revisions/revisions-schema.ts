@@ -1,4 +1,5 @@
 import { z, type Result, type Scenario } from "@restband/solver";
+import { addresses } from "../addresses.ts";
 
 /** Somebody as a list names them. */
 export const personSchema = z.strictObject({ accountId: z.uuid(), name: z.string() });
@@ -91,7 +92,7 @@ export function resultOf({ eventCount: _count, ...kept }: KeptResult): Result {
   return { ...kept, samples: null };
 }
 
-/** A run drawn small: thinned so that extremes and changes of phase stay; phase −1, 0, +1 for slip back, stick, slip forward. */
+/** A run drawn small, as the solver's `traceOf` has it. */
 export const traceSchema = z.strictObject({
   t: z.array(z.number()),
   x: z.array(z.number()),
@@ -101,12 +102,19 @@ export const traceSchema = z.strictObject({
 });
 export type Trace = z.infer<typeof traceSchema>;
 
-/** The scenario's canonical text is the server's copy of the version named by `If-Match`; `digest` and `result` are the page's. */
+const mostTraceText = 65_536;
+
+/**
+ * The scenario's canonical text is the server's copy of the version named by `If-Match`; the rest is the page's. `trace` is
+ * kept only where the server's own run takes too long.
+ */
 export const freezeSchema = z.strictObject({
   digest: z.string().regex(/^[0-9a-f]{64}$/),
   units: displayUnitsSchema,
   result: keptResultSchema,
+  trace: traceSchema.refine((trace) => JSON.stringify(trace).length <= mostTraceText, "At most 64 kB."),
 });
+export type Freeze = z.infer<typeof freezeSchema>;
 
 /**
  * `open`: frozen, nobody asked. `in-review`: somebody asked. `superseded`: was accepted, and a later one is accepted now.
@@ -208,11 +216,10 @@ export type Replay = z.infer<typeof replaySchema>;
 const projectParams = z.strictObject({ projectId: z.uuid() });
 export const revisionParams = z.strictObject({ projectId: z.uuid(), revisionId: z.uuid() });
 
-export const revisionRoutes = {
+export const revisionsContract = {
   /** Newest first; of one scenario, or of the whole project. */
   listRevisions: {
-    method: "GET",
-    path: "/projects/:projectId/revisions",
+    ...addresses.listRevisions,
     params: projectParams,
     query: z.strictObject({ scenarioId: z.uuid().optional() }),
     status: 200,
@@ -220,8 +227,7 @@ export const revisionRoutes = {
   },
   /** 422 `result-disagrees` where the server's own run says something else; its fields name what. */
   freezeScenario: {
-    method: "POST",
-    path: "/projects/:projectId/scenarios/:scenarioId/revisions",
+    ...addresses.freezeScenario,
     params: z.strictObject({ projectId: z.uuid(), scenarioId: z.uuid() }),
     body: freezeSchema,
     ifMatch: true,
@@ -229,23 +235,20 @@ export const revisionRoutes = {
     response: revisionSchema,
   },
   readRevision: {
-    method: "GET",
-    path: "/projects/:projectId/revisions/:revisionId",
+    ...addresses.readRevision,
     params: revisionParams,
     status: 200,
     response: revisionSchema,
   },
   /** Newest first. */
   listReplays: {
-    method: "GET",
-    path: "/projects/:projectId/revisions/:revisionId/replays",
+    ...addresses.listReplays,
     params: revisionParams,
     status: 200,
     response: z.array(replaySchema),
   },
   keepReplay: {
-    method: "POST",
-    path: "/projects/:projectId/revisions/:revisionId/replays",
+    ...addresses.keepReplay,
     params: revisionParams,
     body: replayDraftSchema,
     status: 201,

@@ -8,6 +8,7 @@ import type { ScenarioSummary, StoredScenario, SwitchedOff } from "./scenarios-s
 import {
   findContents,
   findScenario,
+  hasRevisions,
   insertScenario,
   insertScenarios,
   type KeptScenario,
@@ -113,7 +114,8 @@ export function createScenariosService(database: Database, members: MembersServi
 
 /**
  * Takes a scenario into another project in which the person may make scenarios. Both trails tell it.
- * @throws Refusal 404 for a project they are no member of, 403 for a role that does not reach, 409 for an archived one
+ * @throws Refusal 404 for a project they are no member of, 403 for a role that does not reach, 409 for an archived one and
+ * for a scenario that has revisions
  */
 async function move(
   database: Database,
@@ -125,6 +127,7 @@ async function move(
   await database.transaction(async (transaction) => {
     const { title } = await lock(transaction, projectId, subjectId);
     if (projectId === toProjectId) return;
+    if (await hasRevisions(transaction, subjectId)) throw keptByRevisions();
     await moveScenario(transaction, subjectId, toProjectId);
     const told = { accountId, subjectId, detail: { title } };
     await recordAct(transaction, { ...told, projectId, act: "scenario.moved-out" });
@@ -135,6 +138,27 @@ async function move(
 /** @throws Refusal 422 with every faulty field */
 function keptOf({ content, switchedOff }: Draft): KeptScenario {
   return { ...canonicalOf(content), switchedOff: switchedOff && checkedSwitchedOff(switchedOff) };
+}
+
+/**
+ * The version of a scenario that a person has seen.
+ * @throws Refusal 409 with what is stored where that is another
+ */
+export async function readVersion(
+  database: Database,
+  { projectId, scenarioId }: Place,
+  seen: number,
+): Promise<StoredScenario> {
+  const stored = await read(database, projectId, scenarioId);
+  if (stored.version !== seen) throw staleVersion(stored);
+  return stored;
+}
+
+/** As `readVersion`, and nobody can save another version until the transaction ends. */
+export async function holdVersion(transaction: Database, place: Place, seen: number): Promise<void> {
+  const stored = await lock(transaction, place.projectId, place.scenarioId);
+  if (stored.version !== seen) throw staleVersion(await read(transaction, place.projectId, place.scenarioId));
+  if (stored.isArchived) throw archived("scenario");
 }
 
 async function read(database: Database, projectId: string, id: string): Promise<StoredScenario> {
@@ -156,6 +180,11 @@ async function demandAuthor(members: MembersService, accountId: string, projectI
     throw notAllowed(`Your role in the other project is ${caller.role}; this takes owner or editor.`);
   }
   if (caller.isArchived) throw archived("project");
+}
+
+function keptByRevisions(): Refusal {
+  const message = "Its revisions are part of this project's trail, so it stays here. Duplicate it and move the copy.";
+  return new Refusal(409, "has-revisions", message);
 }
 
 function staleVersion(current: StoredScenario): Refusal {

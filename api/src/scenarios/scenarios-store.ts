@@ -122,6 +122,7 @@ export async function insertScenarios(
     project_id: projectId,
     version: 1,
     created_at: now,
+    created_by: accountId,
     ...changesOf(content, accountId, now),
   }));
   await database(TABLE).insert(rows);
@@ -142,6 +143,11 @@ export async function updateScenario(
 
 export async function markScenarioArchived(database: Database, id: string, at: Date | null): Promise<void> {
   await database(TABLE).where({ id }).update({ archived_at: at });
+}
+
+/** True for a scenario of which something was frozen: that stays where its trail is. */
+export async function hasRevisions(database: Database, id: string): Promise<boolean> {
+  return (await database("revisions").where({ scenario_id: id }).first("id")) !== undefined;
 }
 
 export async function moveScenario(database: Database, id: string, toProjectId: string): Promise<void> {

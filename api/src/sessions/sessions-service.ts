@@ -1,10 +1,10 @@
 import type { z } from "@restband/solver";
 import type { Request } from "express";
-import type { signInSchema } from "../accounts/accounts-schema.ts";
+import type { Account, signInSchema } from "../accounts/accounts-schema.ts";
 import type { AccountsService } from "../accounts/accounts-service.ts";
 import { normaliseEmail } from "../accounts/email.ts";
 import type { Session } from "../contract.ts";
-import { Refusal } from "../errors.ts";
+import { Refusal, refusedContent } from "../errors.ts";
 import { csrfTokenOf } from "../middleware/csrf.ts";
 import { openSession, saveSession } from "../middleware/session.ts";
 import type { Throttle } from "../middleware/throttle.ts";
@@ -32,6 +32,19 @@ export function createSessionsService(accounts: AccountsService, throttle: Throt
       const accountId = await accounts.identify(claim);
       if (!accountId) throw new Refusal(401, "wrong-password", "Address and password do not belong together.");
       await openSession(request, accountId);
+      await throttle.forgive(email, request);
+    },
+
+    /**
+     * Demands the password of who is signed in once more, for what is signed with their name.
+     * @throws Refusal 422 for a wrong one, or 429 with the wait
+     */
+    async confirm(request: Request, account: Account, password: string): Promise<void> {
+      const email = normaliseEmail(account.email);
+      await throttle.countAccount(email);
+      if ((await accounts.identify({ email: account.email, password })) !== account.id) {
+        throw refusedContent("wrong-password", [{ path: "password", message: "This is not your password." }]);
+      }
       await throttle.forgive(email, request);
     },
   };

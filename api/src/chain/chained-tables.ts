@@ -1,0 +1,12 @@
+/**
+ * The tables that are only ever added to. All rows of a project, in whichever of them, are links of one chain: each
+ * carries its place and the hash of the row before it. The server's database account may read and add, nothing else.
+ */
+export const chainedTables = ["activity", "revisions", "replays", "review_requests", "decisions", "comments"] as const;
+export type ChainedTable = (typeof chainedTables)[number];
+
+/** Rows that carry a signature of their own, to be proved by themselves wherever they are taken. */
+export const signedTables: ReadonlySet<ChainedTable> = new Set(["revisions", "decisions"]);
+
+/** Stands for "no project" where a project's id is the key. */
+export const nowhere = "00000000-0000-0000-0000-000000000000";

@@ -1,0 +1,144 @@
+import { type Database, signingKeyOf } from "../database/database.ts";
+import type { ChainFault } from "./chain-schema.ts";
+import { type ChainedTable, chainedTables, nowhere, signedTables } from "./chained-tables.ts";
+import { hashOf, type Row, signedHeadText, signedRowText } from "./link.ts";
+import { fingerprintOf, isSignedBy, type SigningKey } from "./signing-key.ts";
+
+/** Rows of one table read at a time. */
+const STRIDE = 200;
+
+export interface Link {
+  sequence: number;
+  previous_hash: Buffer;
+  hash: Buffer;
+  signature?: Buffer | null;
+  signed_by?: Buffer | null;
+}
+
+interface Head extends Omit<Link, "previous_hash"> {
+  project_id: string;
+}
+
+interface Found {
+  readonly table: ChainedTable;
+  readonly row: Row & Link;
+}
+
+/** What going through a chain has found. */
+export interface Walk {
+  readonly rows: number;
+  readonly faults: readonly ChainFault[];
+}
+
+/**
+ * Goes through the whole chain of a project, oldest row first: each row at its place, as it was when its hash was made, after
+ * the row it names, signed where its table asks for it; and the end where its signed head says. Reads one state of the
+ * database, so that what is added meanwhile is no fault.
+ */
+export async function walkChain(database: Database, projectId: string | null): Promise<Walk> {
+  return database.transaction(async (transaction) => {
+    const head = await transaction("chains")
+      .where({ project_id: projectId ?? nowhere })
+      .first<Head>();
+    const walker = new Walker(projectId, signingKeyOf(database));
+    if (!head) return walker.lacksHead();
+    for (let from = 1; from <= head.sequence; from += STRIDE) {
+      const found = await linksOf(transaction, projectId, from, from + STRIDE);
+      for (const link of found) walker.pass(link);
+    }
+    for (const link of await linksOf(transaction, projectId, head.sequence + 1, Infinity)) walker.pass(link);
+    return walker.end(head);
+  });
+}
+
+/** The rows of all chained tables whose places lie in [from, to), in the order of their places. */
+async function linksOf(database: Database, projectId: string | null, from: number, to: number): Promise<Found[]> {
+  const found: Found[] = [];
+  for (const table of chainedTables) {
+    const rows = await database(table)
+      .where({ project_id: projectId })
+      .where("sequence", ">=", from)
+      .modify((query) => to < Infinity && void query.where("sequence", "<", to))
+      .select<(Row & Link)[]>("*");
+    found.push(...rows.map((row) => ({ table, row })));
+  }
+  return found.sort((a, b) => a.row.sequence - b.row.sequence);
+}
+
+/** Follows one chain and notes what does not fit. */
+class Walker {
+  readonly #projectId: string | null;
+  readonly #key: SigningKey;
+  readonly #faults: ChainFault[] = [];
+  #rows = 0;
+  #sequence = 0;
+  /** Of the row passed last; null where that one is gone. */
+  #hash: Buffer | null = Buffer.alloc(32);
+
+  constructor(projectId: string | null, key: SigningKey) {
+    this.#projectId = projectId;
+    this.#key = key;
+  }
+
+  pass({ table, row }: Found): void {
+    const id = typeof row.id === "string" || typeof row.id === "number" ? String(row.id) : null;
+    const note = (message: string) => this.#note({ table, id, sequence: row.sequence, message });
+    this.#noteGap(row.sequence);
+    if (this.#hash && !row.previous_hash.equals(this.#hash)) note("It does not follow the row before it.");
+    for (const fault of rowFaults(table, row, this.#key)) note(fault);
+    this.#rows += 1;
+    this.#sequence = row.sequence;
+    this.#hash = row.hash;
+  }
+
+  /** Rows that are gone, and rows that stand twice at one place. */
+  #noteGap(sequence: number): void {
+    const expected = this.#sequence + 1;
+    if (sequence === expected) return;
+    const message =
+      sequence < expected ? "Two rows stand at this place." : `${sequence - expected} missing before ${sequence}.`;
+    this.#note({ table: "chains", id: null, sequence: Math.min(sequence, expected), message });
+    // A row after a gap cannot follow what is gone: the gap tells it.
+    this.#hash = null;
+  }
+
+  end(head: Head): Walk {
+    const note = (message: string) => this.#note({ table: "chains", id: null, sequence: head.sequence, message });
+    if (head.sequence !== this.#sequence) note(`${head.sequence} rows were added, ${this.#sequence} are there.`);
+    else if (this.#hash && !head.hash.equals(this.#hash)) note("The last row is not the one that was added last.");
+    const text = signedHeadText(this.#projectId ?? nowhere, head.sequence, head.hash);
+    for (const fault of signatureFaults(head, text, this.#key)) note(fault);
+    return this.#walk();
+  }
+
+  lacksHead(): Walk {
+    this.#note({ table: "chains", id: null, sequence: 0, message: "There is no end of the chain." });
+    return this.#walk();
+  }
+
+  #walk(): Walk {
+    return { rows: this.#rows, faults: this.#faults };
+  }
+
+  #note(fault: Omit<ChainFault, "projectId">): void {
+    this.#faults.push({ projectId: this.#projectId, ...fault });
+  }
+}
+
+/** What does not fit in a row by itself, as sentences: empty for a row as it was added. */
+export function rowFaults(table: ChainedTable, row: Link, key: SigningKey): string[] {
+  const hash = hashOf(table, row, { sequence: row.sequence, previous: row.previous_hash });
+  return [
+    ...(hash.equals(row.hash) ? [] : ["It was changed after it was written."]),
+    ...(signedTables.has(table) ? signatureFaults(row, signedRowText(table, row.hash), key) : []),
+  ];
+}
+
+function signatureFaults(
+  { signature, signed_by: by }: Pick<Link, "signature" | "signed_by">,
+  text: string,
+  key: SigningKey,
+): string[] {
+  if (!signature || !by || !isSignedBy(by, text, signature)) return ["Its signature does not fit."];
+  return key.trusts(by) ? [] : [`It is signed with a key this server does not know, ${fingerprintOf(by)}.`];
+}
