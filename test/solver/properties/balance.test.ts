@@ -68,7 +68,7 @@ function finiteFault(motion: Motion, { quantities, energy }: Judgement): string 
 
 /**
  * To §7's share of the largest entry, and of all that has come and gone what the method leaves of each swing: rounding of the
- * clock, or the tolerance of a step. A velocity is told as ḋ + ẏ, to the rounding of the larger.
+ * clock, or the tolerance of a step. What is tiny beside its base or its grip is known to a share of those only.
  */
 function ledgerFault(motion: Motion, energy: Energy): string | null {
   const channels = integrandsOf(motion.problem);
@@ -77,22 +77,25 @@ function ledgerFault(motion: Motion, energy: Energy): string | null {
   const moved = powers.reduce((sum, power) => sum + told.gross(power), heldAtStart(motion));
   if (motion.ended === "max-work") return null; // a softening spring has let the body run away
   const [share, swing] = motion.method === "exact" ? [1e-9, 1e-11] : [1e-6, 1e-8];
-  const allowed = share * largestOf(energy) + swing * moved + velocityRounding(motion);
+  const allowed = share * largestOf(energy) + swing * moved + resolution(motion);
   return Math.abs(energy.residual) <= allowed ? null : `residual ${energy.residual}, allowed ${allowed}`;
 }
 
-/** What rounding of v may make of m v²/2, J. */
-function velocityRounding(motion: Motion): number {
+/** What v = ḋ + ẏ and f, each to rounding or tolerance of the larger part, leave open of the energies, J. */
+function resolution(motion: Motion): number {
   const state = emptyState();
-  let [own, base] = [0, 0];
+  let [own, base, grip] = [0, 0, 0];
   for (let i = 0; i < motion.count; i++) {
     for (const share of [0, 0.5, 1]) {
       motion.read(i, motion.from(i) + share * (motion.to(i) - motion.from(i)), state);
       own = Math.max(own, Math.abs(state.v));
       base = Math.max(base, Math.abs(state.baseVelocity));
+      grip = Math.max(grip, motion.problem.law.atRest * motion.problem.radius * state.normal);
     }
   }
-  return 2 ** -50 * motion.problem.inertia * own * base;
+  const { inertia } = motion.problem;
+  if (motion.method === "exact") return 2 ** -50 * inertia * own * base;
+  return 1e-9 * own * (inertia * base + grip * motion.end);
 }
 
 /** m v²/2 + k d²/2, J. */

@@ -75,7 +75,9 @@ export class BristleBody {
     const v = this.inputs.evaluate(0);
     const bending = (problem.law.atRest * this.pressing) / this.stiffness;
     const speed = Math.max(Math.abs(y[1]), Math.abs(problem.beltVelocity), Math.abs(v.baseVelocity));
-    const size = Math.max(Math.abs(y[0]), bending * problem.radius, speed / rate) || 1;
+    // without a spring the place does not matter
+    const stretch = problem.stiffness > 0 || problem.cubic !== 0 ? Math.abs(y[0]) : 0;
+    const size = Math.max(stretch, bending * problem.radius, speed / rate) || 1;
     return [size, size * rate, bending || size];
   }
 }
