@@ -72,7 +72,15 @@ const solverRules = [
   ...["explore", "identify", "script"].flatMap((name) =>
     solverFolder(
       name,
-      ["simulate\\.ts$", "numerics/", "scenario/", "quantities/index\\.ts$", ...contracts],
+      [
+        "simulate\\.ts$",
+        "version\\.ts$",
+        "numerics/",
+        "scenario/",
+        "textbook/",
+        "quantities/index\\.ts$",
+        ...contracts,
+      ],
       "explore, identify and script use simulate, never the inside of motion.",
     ),
   ),

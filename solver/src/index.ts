@@ -81,3 +81,4 @@ export { runTile, type TileSettings } from "./explore/sweep/run-tile.ts";
 export { mostTileCells, tileCells, tileCount, tileOrder } from "./explore/sweep/tiles.ts";
 export { pythonScript, type Claim } from "./script/python-script.ts";
 export { pythonGap } from "./script/not-covered.ts";
+export { thresholdSearch } from "./explore/threshold/threshold-search.ts";

@@ -36,8 +36,8 @@ export interface ThresholdEnd {
   /** Null where the run cannot be judged: then `reply` says why. */
   readonly isMet: boolean | null;
   readonly reply: RunReply;
-  /** What was run, as it was run: start and span included. */
-  readonly scenario: Scenario;
+  /** What was run, as it was run: start and span included. Null where the values cannot stand together. */
+  readonly scenario: Scenario | null;
 }
 
 /** Two neighbouring values on either side of a change, at most 1e-4 apart, relative. */
