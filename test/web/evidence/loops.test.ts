@@ -91,7 +91,7 @@ describe("the loops", () => {
     );
     const whole = loopPart(braked, { from: 0, to: braked.end });
     const labels = loopLabels(braked, whole, loopFrames(braked, whole)[1], { width: 300, height: 340 });
-    expect(labels.map(({ text }) => text.replace("\u00a0", " "))).toEqual(["holds up to 1.1 N", "stuck"]);
+    expect(labels.map(({ text }) => text.replace("\u00a0", " "))).toEqual(["holds up to 1.1 N", "stuck", "stops"]);
     for (const { text, x, anchor } of labels)
       if (anchor === "start") expect(x + 7 * text.length).toBeLessThanOrEqual(296);
   });

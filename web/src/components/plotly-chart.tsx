@@ -17,16 +17,12 @@ export function PlotlyChart({ data, layout, onDrawn }: PlotlyChartProps) {
   return <Chart data={data} layout={layout} config={config} onInitialized={onDrawn} onUpdate={onDrawn} />;
 }
 
-/** A plot as a drawing, or as a picture of twice as many points; the bytes of the file. */
-export async function imageOf(
+/** A plot as a drawing: the text of an SVG file. */
+export async function drawingOf(
   data: Data[],
   layout: Partial<Layout> & { width: number; height: number },
-  format: "svg" | "png",
-): Promise<Uint8Array<ArrayBuffer>> {
+): Promise<string> {
   const { width, height } = layout;
-  const scale = format === "png" ? 2 : 1;
-  const address = await Plotly.toImage({ data, layout, config }, { format, width, height, scale });
-  const content = address.slice(address.indexOf(",") + 1);
-  if (format === "svg") return new TextEncoder().encode(decodeURIComponent(content));
-  return Uint8Array.from(atob(content), (sign) => sign.charCodeAt(0));
+  const address = await Plotly.toImage({ data, layout, config }, { format: "svg", width, height });
+  return decodeURIComponent(address.slice(address.indexOf(",") + 1));
 }

@@ -1,4 +1,5 @@
 import type { Project, StoredScenario } from "@restband/api/contract";
+import type { Scenario } from "@restband/solver";
 import { useSuspenseQueries } from "@tanstack/react-query";
 import { Suspense, useCallback, useMemo, useState } from "react";
 import { useParams } from "react-router-dom";
@@ -8,7 +9,7 @@ import { useAccount } from "../api/session.ts";
 import { Section, WorkedPage } from "../components/section.tsx";
 import { samplesFor } from "../compute/samples-for.ts";
 import { useRanges } from "../compute/use-ranges.ts";
-import { useRun, type Computed } from "../compute/use-run.ts";
+import { useRun, type Computed, type Run } from "../compute/use-run.ts";
 import { WorkHeader } from "../features/account/work-header.tsx";
 import { Answer } from "../features/answer/answer.tsx";
 import { Cautions } from "../features/cautions/cautions.tsx";
@@ -16,7 +17,7 @@ import { runViewOf, type RunView } from "../features/evidence/run-view.ts";
 import { takeValues } from "../features/statement/changes.ts";
 import { savedWords } from "../features/statement/saving/saved-words.ts";
 import { useDraft } from "../features/statement/saving/use-draft.ts";
-import { isSameWork } from "../features/statement/saving/differences.ts";
+import { isSameScenario, isSameWork } from "../features/statement/saving/differences.ts";
 import { sayField } from "../features/statement/say-field.ts";
 import { Statement } from "../features/statement/statement.tsx";
 import { UnitSystemChoice } from "../features/statement/unit-system-choice.tsx";
@@ -34,6 +35,7 @@ const ScenarioExchange = lazyPart(
   async () => (await import("../features/statement/exchange/scenario-exchange.tsx")).ScenarioExchange,
 );
 const Evidence = lazyPart(async () => (await import("../features/evidence/evidence.tsx")).Evidence);
+const RevisionsPart = lazyPart(async () => (await import("./revisions-part.tsx")).RevisionsPart);
 const Checks = lazyPart(async () => (await import("../features/checks/checks.tsx")).Checks);
 const EventTable = lazyPart(async () => (await import("../features/evidence/event-table.tsx")).EventTable);
 const ReckoningLinks = lazyPart(async () => (await import("../features/reckoning/reckoning-links.tsx")).ReckoningLinks);
@@ -122,6 +124,18 @@ function OpenScenario({ project, stored }: { project: Project; stored: StoredSce
             <ScenarioExchange scenario={inForce} dispatch={dispatch} />
           </Suspense>
         </Section>
+        <Section id="revisions" name="Revisions" help="Frozen for a review or for the record.">
+          <Suspense fallback={<div className="min-h-16" />}>
+            <RevisionsPart
+              projectId={project.id}
+              scenarioId={stored.id}
+              ownId={accountId}
+              digest={stored.digest}
+              canEdit={canEdit}
+              subject={freezableOf(stored, run, inForce, { isSaved: saving.kind === "saved", faults: faults.length })}
+            />
+          </Suspense>
+        </Section>
         <RunSections key={`run ${units}`} computed={run.computed} view={view} cursor={cursor} isStale={run.isStale} />
       </WorkedPage>
       {saving.kind === "conflict" && (
@@ -143,6 +157,23 @@ function useBeforeEdit(computed: Computed | null, isEditing: boolean): Computed 
   const [settled, setSettled] = useState(computed);
   if (!isEditing && settled !== computed) setSettled(computed);
   return isEditing && settled !== computed ? settled : null;
+}
+
+interface Standing {
+  isSaved: boolean;
+  faults: number;
+}
+
+/** What can be frozen: the stored version with its answer; a sentence where there is no such thing just now. */
+function freezableOf(stored: StoredScenario, run: Run, inForce: Scenario, { isSaved, faults }: Standing) {
+  const { computed, isStale } = run;
+  if (faults > 0) return "Put every field right first: what is frozen is what is shown.";
+  if (!isSaved || !isSameScenario(inForce, stored.content))
+    return "The last change is not saved yet. Try again in a moment.";
+  if (!computed || isStale) return "The answer is not there yet. Try again in a moment.";
+  if ("refusal" in computed) return "This version computes no answer to it, so there is nothing to freeze.";
+  const { projectId, id: scenarioId, version, digest } = stored;
+  return { projectId, scenarioId, version, digest, scenario: computed.scenario, result: computed.result };
 }
 
 /** The run made ready to be looked at; null without one that has samples. */
@@ -171,7 +202,7 @@ function RunSections({ computed, view, cursor, isStale }: RunSectionsProps) {
         name="Evidence"
         help={
           <>
-            One cursor for everything. <span className="whitespace-nowrap">← →</span> next event.
+            One cursor for everything. <span className="whitespace-nowrap">← →</span> next event, space plays.
           </>
         }
       >

@@ -55,23 +55,22 @@ function endLabels(part: LoopPart, frame: LoopFrame, size: Size): LoopLabel[] {
   const { samples, places, events } = part;
   const { across, upright } = frame;
   const values = frame.key === "velocity" ? samples.v : samples.f;
+  // Friction jumps at an event: a stick ends with the force before it, and begins with the one after it.
   const at = (text: string, indices: readonly number[]): LoopLabel[] => {
     if (indices.length === 0) return [];
     const met = indices.map((i) => places[i]);
     if (Math.max(...met) - Math.min(...met) > SAME * (across.high - across.low)) return [];
     const last = indices[indices.length - 1];
     const x = acrossOf(across, places[last], size);
-    const y = downOf(upright, values[last], size);
-    const isLow = y > size.height - loopMargin.bottom - LINE;
-    // Away from the middle, where the lines of the loop are.
-    const anchor = x < size.width / 2 ? "end" : "start";
-    return [{ text, x: x + (anchor === "end" ? -8 : 8), y: isLow ? y - 6 : y + 16, anchor, tone: "quiet" }];
+    const isLeft = x < size.width / 2;
+    // The phase plane has room within the loop, the force loop outside it.
+    const anchor = isLeft === (frame.key === "velocity") ? "start" : "end";
+    const y = downOf(upright, values[last], size) - 8;
+    return [{ text, x: x + (anchor === "end" ? -8 : 8), y, anchor, tone: "quiet" }];
   };
+  const ends = events.filter((i) => i > 0 && samples.phase[i - 1] === 0);
   return [
-    ...at(
-      "breaks away",
-      events.filter((i) => i > 0 && samples.phase[i - 1] === 0),
-    ),
+    ...at("breaks away", frame.key === "velocity" ? ends : ends.map((i) => i - 1)),
     ...at(
       "stops",
       events.filter((i) => samples.phase[i] === 0),

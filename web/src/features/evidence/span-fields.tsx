@@ -58,7 +58,11 @@ export function SpanFields({ part, whole }: SpanFieldsProps) {
       <button type="submit" className="sr-only">
         See this span
       </button>
-      {fault && <FieldError id={id}>{fault}</FieldError>}
+      {fault && (
+        <span className="basis-full">
+          <FieldError id={id}>{fault}</FieldError>
+        </span>
+      )}
     </form>
   );
 }

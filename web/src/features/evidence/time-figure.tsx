@@ -1,10 +1,13 @@
+import type { Scenario } from "@restband/solver";
 import { useMemo, type ReactNode } from "react";
 import { MotionStrip } from "../../components/motion-strip.tsx";
 import { Plot } from "../../components/plot.tsx";
 import type { PlotSheet } from "../../components/plot-image.ts";
 import type { PlotTheme } from "../../components/plot-theme.ts";
+import { nounOf } from "../../format/noun.ts";
 import type { Motion } from "../../format/unit.ts";
 import { evidenceFigure } from "./evidence-figure.ts";
+import type { FigureLayout } from "./evidence-layout.ts";
 import { xOf, yOf, type Frame, type PanelKey } from "./frame.ts";
 import { Gutter } from "./gutter.tsx";
 import { overlayAt, type Overlay } from "./overlay.ts";
@@ -36,7 +39,7 @@ export function TimeFigure({ view, frame, t, theme, overlays, onMove, onSpan, ch
       </StripRow>
       <div className="relative">
         <Plot data={data} layout={layout} label={figureWords(view, frame)} />
-        <Heads frame={frame} motion={view.scenario.motion} />
+        <Heads frame={frame} scenario={view.scenario} />
         <OverlayLabels frame={frame} overlays={overlays} />
         {children}
         {frame.right > 100 && <Gutter view={view} frame={frame} t={t} overlays={overlays} />}
@@ -45,46 +48,65 @@ export function TimeFigure({ view, frame, t, theme, overlays, onMove, onSpan, ch
         <SavePlot
           name="plots over time"
           theme={theme}
-          sheet={() => ({ data, layout, ...timeSheet(view, frame, theme) })}
+          sheet={() => ({ data, ...timeSheet(view, frame, layout, overlays, theme) })}
         />
       </p>
     </>
   );
 }
 
-/** The name of each other motion at its line, at four fifths of what is seen, or at its end. */
-function OverlayLabels({ frame, overlays }: { frame: Frame; overlays: readonly Overlay[] }) {
+/** The name of each other motion at its line, at four fifths of what is seen, or at its end; px. */
+function overlayNames(
+  frame: Frame,
+  overlays: readonly Overlay[],
+): { key: string; text: string; x: number; y: number }[] {
   const panel = frame.panels.find(({ key }) => key === "displacement");
   const wanted = frame.from + 0.8 * (frame.to - frame.from);
-  return overlays.map((overlay) => {
+  return overlays.flatMap((overlay) => {
     const t = Math.min(wanted, overlay.samples.t[overlay.samples.t.length - 1]);
     const there = overlayAt(overlay, t);
-    if (!panel || !there || t < frame.from) return null;
-    return (
-      <p
-        key={overlay.key}
-        className="pointer-events-none absolute max-w-56 -translate-x-1/2 truncate bg-raised px-1 text-13 text-quiet"
-        style={{ left: xOf(frame, t), top: yOf(panel, there.x) + 12 }}
-      >
-        {overlay.label}
-      </p>
-    );
+    if (!panel || !there || t < frame.from) return [];
+    return { key: overlay.key, text: overlay.label, x: xOf(frame, t), y: yOf(panel, there.x) + 12 };
   });
 }
 
-/** What a file of the panels says beside their lines. */
-function timeSheet({ scenario }: RunView, frame: Frame, theme: PlotTheme): Omit<PlotSheet, "data" | "layout"> {
+function OverlayLabels({ frame, overlays }: { frame: Frame; overlays: readonly Overlay[] }) {
+  return overlayNames(frame, overlays).map(({ key, text, x, y }) => (
+    <p
+      key={key}
+      className="pointer-events-none absolute max-w-56 -translate-x-1/2 truncate bg-raised px-1 text-13 text-quiet"
+      style={{ left: x, top: y }}
+    >
+      {text}
+    </p>
+  ));
+}
+
+/** Room to the right of the panels in a file, px: the readings at the cursor are not in it. */
+const FILE_RIGHT = 28;
+
+/** The panels as a file: what it says beside their lines, and no room for readings. */
+function timeSheet(
+  { scenario }: RunView,
+  frame: Frame,
+  layout: FigureLayout,
+  overlays: readonly Overlay[],
+  theme: PlotTheme,
+): Omit<PlotSheet, "data"> {
   const end = { x: frame.width - frame.right, y: frame.height - 2 };
+  const others = overlayNames(frame, overlays);
   return {
-    title: scenario.title || "Untitled",
+    title: `${scenario.title || "Untitled"}: motion over time`,
+    layout: { ...layout, width: end.x + FILE_RIGHT, margin: { ...layout.margin, r: FILE_RIGHT } },
     words: [
       ...frame.panels.map(({ key, top, unit }) => ({
-        text: `${names[scenario.motion][key]}, ${unit.label}`,
+        text: `${panelName(scenario, key)}, ${unit.label}`,
         x: 16,
         y: top - 8,
         anchor: "start" as const,
         colour: theme.ink,
       })),
+      ...others.map(({ text, x, y }) => ({ text, x, y: y + 15, anchor: "middle" as const, colour: theme.quiet })),
       { text: "time, s", ...end, anchor: "end", colour: theme.quiet },
     ],
   };
@@ -123,25 +145,31 @@ const names: Record<Motion, Record<PanelKey, string>> = {
     displacement: "displacement",
     velocity: "velocity",
     acceleration: "acceleration",
-    friction: "friction on the body",
+    friction: "friction",
     drive: "drive force",
   },
   angular: {
     displacement: "angle",
     velocity: "angular velocity",
     acceleration: "angular acceleration",
-    friction: "friction torque on the rotor",
+    friction: "friction torque",
     drive: "drive torque",
   },
 };
 
+/** What a panel shows, of what body. */
+function panelName(scenario: Scenario, key: PanelKey): string {
+  const name = names[scenario.motion][key];
+  return key === "friction" ? `${name} on the ${nounOf(scenario)}` : name;
+}
+
 /** The unit at the head of each axis, with what is drawn. */
-function Heads({ frame, motion }: { frame: Frame; motion: Motion }) {
+function Heads({ frame, scenario }: { frame: Frame; scenario: Scenario }) {
   return (
     <>
       {frame.panels.map(({ key, top, unit }) => (
         <p key={key} className="absolute text-13 text-quiet" style={{ top: top - 24, left: frame.left > 60 ? 16 : 8 }}>
-          <span className="text-ink">{names[motion][key]}</span>, {unit.label}
+          <span className="text-ink">{panelName(scenario, key)}</span>, {unit.label}
         </p>
       ))}
       <p className="absolute text-13 text-quiet" style={{ bottom: 2, right: frame.right }}>
