@@ -82,3 +82,5 @@ export { mostTileCells, tileCells, tileCount, tileOrder } from "./explore/sweep/
 export { pythonScript, type Claim } from "./script/python-script.ts";
 export { pythonGap } from "./script/not-covered.ts";
 export { thresholdSearch } from "./explore/threshold/threshold-search.ts";
+export { curesOf } from "./explore/threshold/cures.ts";
+export { holdingPaths, holdingRanges } from "./explore/threshold/holding-ranges.ts";

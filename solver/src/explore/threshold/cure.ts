@@ -23,6 +23,8 @@ export interface Cure {
 export interface Cures {
   /** Place of the limit in the scenario. */
   readonly limit: number;
+  /** False where the limit is kept as entered: there is nothing to cure. */
+  readonly isBroken: boolean;
   /** The smallest change first. */
   readonly cures: readonly Cure[];
   /** Fields with which alone it cannot be cured within the values searched. */

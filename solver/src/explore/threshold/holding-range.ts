@@ -7,7 +7,10 @@ export interface HoldingEnd {
   readonly value: number;
   /** Where something changes: `below` and `above` lie on either side of it. Null where nothing does within what was searched. */
   readonly flip: Flip | null;
-  /** What changes first: the outcome, or the limit at that place of the scenario; null where nothing does. */
+  /**
+   * What changes first: the outcome, or the limit at that place of the scenario. Null where nothing does, and with a flip
+   * where the values beyond it cannot stand together or be judged: the reply of its far end then says why.
+   */
   readonly change: { readonly kind: "outcome" } | { readonly kind: "limit"; readonly limit: number } | null;
 }
 
