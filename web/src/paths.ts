@@ -8,6 +8,8 @@ export const patterns = {
   cases: "/projects/:projectId/cases",
   newScenario: "/projects/:projectId/scenarios/new",
   scenario: "/projects/:projectId/scenarios/:scenarioId",
+  explore: "/projects/:projectId/scenarios/:scenarioId/explore",
+  exploration: "/projects/:projectId/scenarios/:scenarioId/explore/:explorationId",
   licences: "/licences",
 } as const;
 
@@ -27,6 +29,9 @@ export const paths = {
   cases: (projectId: string, baseId?: string) => `/projects/${projectId}/cases${baseId ? `?base=${baseId}` : ""}`,
   newScenario: (projectId: string) => `/projects/${projectId}/scenarios/new`,
   scenario: (projectId: string, scenarioId: string) => `/projects/${projectId}/scenarios/${scenarioId}`,
+  explore: (projectId: string, scenarioId: string) => `/projects/${projectId}/scenarios/${scenarioId}/explore`,
+  exploration: (projectId: string, scenarioId: string, explorationId: string) =>
+    `/projects/${projectId}/scenarios/${scenarioId}/explore/${explorationId}`,
   licences: patterns.licences,
 };
 

@@ -46,6 +46,8 @@ const workPages = [
   page(patterns.cases, () => import("./pages/project-cases-page.tsx"), "ProjectCasesPage"),
   page(patterns.newScenario, () => import("./pages/new-scenario-page.tsx"), "NewScenarioPage"),
   page(patterns.scenario, () => import("./pages/scenario-page.tsx"), "ScenarioPage"),
+  page(patterns.explore, () => import("./pages/explore-page.tsx"), "ExplorePage"),
+  page(patterns.exploration, () => import("./pages/exploration-page.tsx"), "ExplorationPage"),
 ];
 
 const entryPages = [

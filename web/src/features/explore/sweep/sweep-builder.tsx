@@ -1,0 +1,168 @@
+import { quantities, type Continuation, type QuantityName, type Scenario, type SweepPlan } from "@restband/solver";
+import { useMemo, useState } from "react";
+import { Button } from "../../../components/button.tsx";
+import { Checkbox } from "../../../components/choices.tsx";
+import { ErrorNote } from "../../../components/error-note.tsx";
+import { FieldError } from "../../../components/field.tsx";
+import { SelectField } from "../../../components/select.tsx";
+import { formatNumber } from "../../../format/format-number.ts";
+import { exploreFields } from "../explore-field.ts";
+import { tileSizes } from "../../../compute/run-tiles.ts";
+import { AxisForm } from "./axis-form.tsx";
+import {
+  axisDraftOf,
+  canKeepDampingRatio,
+  canKeepFrictionRatio,
+  planOf,
+  sweepDraftOf,
+  type AxisDraft,
+  type SweepDraft,
+} from "./sweep-draft.ts";
+import { sweepTitle } from "./sweep-title.ts";
+
+interface SweepBuilderProps {
+  scenario: Scenario;
+  onRun: (plan: SweepPlan, title: string) => Promise<void>;
+}
+
+const continuations: { value: Continuation; label: string }[] = [
+  { value: "none", label: "as the scenario starts" },
+  { value: "up", label: "where its neighbour ended, upwards" },
+  { value: "down", label: "where its neighbour ended, downwards" },
+  { value: "both", label: "up, then down: both branches" },
+];
+
+/** Asks for a sweep of one or two fields; every fault stands at its field, and nothing typed is lost. */
+export function SweepBuilder({ scenario, onRun }: SweepBuilderProps) {
+  const [draft, setDraft] = useState<SweepDraft>(() => sweepDraftOf(scenario));
+  const [isTried, setTried] = useState(false);
+  const [run, setRun] = useState<{ isBusy: boolean; failure: string | null }>({ isBusy: false, failure: null });
+  const fields = useMemo(() => exploreFields(scenario), [scenario]);
+  const { plan, faults } = planOf(draft, scenario);
+  const set = (change: Partial<SweepDraft>): void => setDraft((old) => ({ ...old, ...change }));
+  const faultAt = (path: string): string | undefined => faults.find((fault) => fault.path.startsWith(path))?.message;
+  const placed = ["axes[0].", "axes[1]."];
+  const general = faults.filter(({ path }) => !placed.some((place) => path.startsWith(place)));
+
+  const begin = async (): Promise<void> => {
+    setTried(true);
+    if (!plan || run.isBusy) return;
+    setRun({ isBusy: true, failure: null });
+    try {
+      await onRun(plan, sweepTitle(plan, scenario));
+      setRun({ isBusy: false, failure: null });
+    } catch (error) {
+      setRun({ isBusy: false, failure: error instanceof Error ? error.message : String(error) });
+    }
+  };
+  const axisProps = (i: number, axis: AxisDraft, put: (axis: AxisDraft) => void) => ({
+    axis,
+    fields,
+    faultAt: (member: string) => faultAt(`axes[${i}].${member}`),
+    onChange: put,
+    onField: (path: string) => {
+      const field = fields.find((each) => each.path === path);
+      if (field) put(axisDraftOf(field, scenario, axis.spacing, Number(axis.count) || 12));
+    },
+  });
+  return (
+    <form
+      className="flex flex-col gap-6"
+      onSubmit={(event) => {
+        event.preventDefault();
+        void begin();
+      }}
+    >
+      <AxisForm name="Across" {...axisProps(0, draft.first, (first) => set({ first }))} />
+      {draft.second ? (
+        <div>
+          <AxisForm name="Up" {...axisProps(1, draft.second, (second) => set({ second }))} />
+          <Button className="mt-3" onClick={() => set({ second: null })}>
+            Vary one field only
+          </Button>
+        </div>
+      ) : (
+        <Button
+          className="self-start"
+          onClick={() => {
+            const other = fields.find(({ path }) => path !== draft.first.path);
+            if (other) set({ second: axisDraftOf(other, scenario, "linear", 12) });
+          }}
+        >
+          Vary a second field
+        </Button>
+      )}
+      <div className="flex flex-wrap items-start gap-x-8 gap-y-4">
+        <SelectField
+          label="Each cell starts"
+          choices={continuations}
+          value={draft.continuation}
+          error={faultAt("continuation")}
+          onChange={(event) => set({ continuation: event.target.value as Continuation })}
+        />
+        <div className="flex flex-col gap-2 pt-1">
+          {canKeepFrictionRatio(draft, scenario) && (
+            <Checkbox
+              label="Keep the ratio of static to kinetic friction"
+              checked={draft.keepsFrictionRatio}
+              onChange={(event) => set({ keepsFrictionRatio: event.target.checked })}
+            />
+          )}
+          {canKeepDampingRatio(draft, scenario) && (
+            <Checkbox
+              label="Keep the damping ratio"
+              checked={draft.keepsDampingRatio}
+              onChange={(event) => set({ keepsDampingRatio: event.target.checked })}
+            />
+          )}
+        </div>
+      </div>
+      <QuantityChoice chosen={draft.quantities} onChange={(chosen) => set({ quantities: chosen })} />
+      {isTried && general.map(({ message }) => <FieldError key={message}>{message}</FieldError>)}
+      {run.failure && <ErrorNote>{run.failure}</ErrorNote>}
+      <div className="flex flex-wrap items-center gap-4">
+        <Button type="submit" kind="primary" isBusy={run.isBusy}>
+          Run the sweep
+        </Button>
+        <span className="text-13 text-quiet">{plan ? `${cellsOf(plan)} cells` : toPutRight(faults.length)}</span>
+      </div>
+    </form>
+  );
+}
+
+const cellsOf = (plan: SweepPlan): string =>
+  formatNumber(
+    tileSizes(plan).reduce((sum, each) => sum + each, 0),
+    9,
+  );
+const toPutRight = (count: number): string => `${count} field${count === 1 ? "" : "s"} to put right`;
+
+const MOST_QUANTITIES = 16;
+
+interface QuantityChoiceProps {
+  chosen: readonly QuantityName[];
+  onChange: (chosen: QuantityName[]) => void;
+}
+
+/** What is kept of each cell besides its outcome and limits. */
+function QuantityChoice({ chosen, onChange }: QuantityChoiceProps) {
+  const isFull = chosen.length >= MOST_QUANTITIES;
+  return (
+    <details>
+      <summary className="link w-fit text-15">Kept of each cell: {chosen.length} quantities</summary>
+      <div className="mt-3 grid gap-x-6 gap-y-1.5 desk:grid-cols-3">
+        {quantities.map(({ name, label }) => (
+          <Checkbox
+            key={name}
+            label={label}
+            checked={chosen.includes(name)}
+            disabled={name === "stickFraction" || (isFull && !chosen.includes(name))}
+            onChange={(event) =>
+              onChange(event.target.checked ? [...chosen, name] : chosen.filter((each) => each !== name))
+            }
+          />
+        ))}
+      </div>
+    </details>
+  );
+}

@@ -1,0 +1,120 @@
+import {
+  checkSweepPlan,
+  defaultLinks,
+  type CheckedSweep,
+  type Continuation,
+  type Links,
+  type QuantityName,
+  type Scenario,
+} from "@restband/solver";
+import { quantityNamed } from "../../../format/quantities.ts";
+import type { ExploreField } from "../explore-field.ts";
+import { exploreFields, likeliestField, rangeAround } from "../explore-field.ts";
+import { readTyped, typedOf, type Typed } from "../typed-number.tsx";
+
+export type Spacing = "linear" | "log" | "listed";
+
+/** One field of a sweep as it is typed. */
+export interface AxisDraft {
+  readonly path: string;
+  readonly spacing: Spacing;
+  readonly from: Typed;
+  readonly to: Typed;
+  readonly count: string;
+  /** Values with blanks or semicolons between them, in the unit of `from`. */
+  readonly list: string;
+}
+
+export interface SweepDraft {
+  readonly first: AxisDraft;
+  readonly second: AxisDraft | null;
+  /** The damping follows stiffness and mass so that ζ stays. */
+  readonly keepsDampingRatio: boolean;
+  /** Where one friction coefficient is varied the other keeps its ratio. */
+  readonly keepsFrictionRatio: boolean;
+  readonly continuation: Continuation;
+  readonly quantities: readonly QuantityName[];
+}
+
+/** Kept of each cell whatever else is asked: the share of time stuck draws the cell. */
+const always: readonly QuantityName[] = ["stickFraction"];
+const alsoLikely: readonly QuantityName[] = ["peakVelocity", "amplitude", "slipVelocityPeak"];
+
+/** A sweep to start from: the friction across, what drives the body up. */
+export function sweepDraftOf(scenario: Scenario): SweepDraft {
+  const fields = exploreFields(scenario);
+  const up = likeliestField(fields);
+  const friction = fields.find(({ path }) => path === "contact.law.kinetic" || path === "contact.law.static");
+  const across = friction && friction.path !== up?.path ? friction : (up ?? fields[0]);
+  const limits = scenario.limits.flatMap(({ quantity }) => (quantityNamed(quantity) ? [quantity as QuantityName] : []));
+  return {
+    first: axisDraftOf(across, scenario, across.path.startsWith("contact.law.") ? "linear" : "log", 16),
+    second: up && up.path !== across.path ? axisDraftOf(up, scenario, "log", 14) : null,
+    keepsDampingRatio: false,
+    keepsFrictionRatio: true,
+    continuation: "none",
+    quantities: [...new Set([...always, ...limits, ...alsoLikely])],
+  };
+}
+
+export function axisDraftOf(field: ExploreField, scenario: Scenario, spacing: Spacing, count: number): AxisDraft {
+  const isFriction = field.path.startsWith("contact.law.") && field.dimension === "none" && field.value <= 1;
+  const around = isFriction ? { low: 0.02, high: 0.4 } : rangeAround(field, scenario);
+  const low = spacing === "linear" || around.low > 0 || around.high < 0 ? around.low : around.high / 1000;
+  return {
+    path: field.path,
+    spacing: around.low < 0 && around.high > 0 ? "linear" : spacing,
+    from: typedOf(low, field.measure),
+    to: typedOf(around.high, field.measure),
+    count: String(count),
+    list: "",
+  };
+}
+
+/** What is typed as a plan, or every fault at its path. Numbers that cannot be read are told by their own field. */
+export function planOf(draft: SweepDraft, scenario: Scenario): CheckedSweep {
+  const drafts = [draft.first, ...(draft.second ? [draft.second] : [])];
+  const axes = drafts.map((axis) => axisOf(axis, scenario));
+  const varied = drafts.map(({ path }) => path);
+  return checkSweepPlan(
+    {
+      format: "restband-sweep/1",
+      axes,
+      links: linksOf(draft, scenario, varied),
+      quantities: [...new Set([...always, ...draft.quantities])],
+      continuation: draft.continuation,
+    },
+    scenario,
+  );
+}
+
+function linksOf(draft: SweepDraft, scenario: Scenario, varied: readonly string[]): Links {
+  const ratio = draft.keepsFrictionRatio ? defaultLinks(scenario, varied) : {};
+  return draft.keepsDampingRatio && canKeepDampingRatio(draft, scenario)
+    ? { ...ratio, "body.viscous": { keep: "dampingRatio" } }
+    : ratio;
+}
+
+/** Where stiffness or mass is varied and the damping is not. */
+export function canKeepDampingRatio({ first, second }: SweepDraft, { body }: Scenario): boolean {
+  const varied = [first.path, second?.path];
+  const isMoved = varied.includes("body.stiffness") || varied.includes("body.inertia");
+  return isMoved && !varied.includes("body.viscous") && body.stiffness > 0 && body.viscous > 0;
+}
+
+export const canKeepFrictionRatio = ({ first, second }: SweepDraft, scenario: Scenario): boolean =>
+  Object.keys(defaultLinks(scenario, second ? [first.path, second.path] : [first.path])).length > 0;
+
+function axisOf(axis: AxisDraft, scenario: Scenario): object {
+  const measure = exploreFields(scenario).find(({ path }) => path === axis.path)?.measure;
+  const number = (typed: Typed): number => {
+    const read = measure ? readTyped(typed, measure) : { message: "" };
+    return "value" in read ? read.value : NaN;
+  };
+  if (axis.spacing === "listed") {
+    const texts = axis.list.split(/[\s;]+/).filter((text) => text !== "");
+    return { path: axis.path, spacing: "listed", values: texts.map((text) => number({ text, unit: axis.from.unit })) };
+  }
+  const count = /^\d+$/.test(axis.count.trim()) ? Number(axis.count) : NaN;
+  return { path: axis.path, spacing: axis.spacing, from: number(axis.from), to: number(axis.to), count };
+}

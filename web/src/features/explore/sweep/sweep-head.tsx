@@ -1,0 +1,35 @@
+import type { StoredExploration } from "@restband/api/contract";
+import type { LimitLine } from "./limit-lines.ts";
+import { proportionWords } from "./proportion-words.ts";
+import type { SweepCells } from "./sweep-cells.ts";
+import { sweepHeadline } from "./sweep-headline.ts";
+import { SweepSentence } from "./sweep-sentence.tsx";
+
+interface SweepHeadProps {
+  stored: StoredExploration;
+  cells: SweepCells;
+  lines: readonly LimitLine[];
+  edition: number;
+}
+
+/** What the sweep says, large; what was asked, beside it. */
+export function SweepHead({ stored, cells, lines }: SweepHeadProps) {
+  const scenario = stored.content;
+  const rule = proportionWords(lines, cells.plan, scenario);
+  return (
+    <div className="grid gap-x-12 gap-y-5 pb-8 wide:grid-cols-[minmax(0,1fr)_388px]">
+      <div>
+        <h1 className="text-24 leading-[1.25] font-semibold desk:text-34">{rule ?? sweepHeadline(cells, scenario)}</h1>
+        {rule && <p className="mt-3 text-18 text-quiet">{sweepHeadline(cells, scenario)}</p>}
+      </div>
+      <div>
+        <SweepSentence plan={cells.plan} scenario={scenario} />
+        {stored.isStale && (
+          <p className="mt-3 border-l-4 border-band-line pl-3 text-15">
+            The scenario has other numbers by now. This map is of its version {stored.scenarioVersion}.
+          </p>
+        )}
+      </div>
+    </div>
+  );
+}

@@ -1,0 +1,204 @@
+import { useId, type KeyboardEvent, type MouseEvent } from "react";
+import { useWidth } from "../../../components/use-width.ts";
+import { outcomeWords } from "../../../format/outcomes.ts";
+import type { AxisScale } from "./axis-scale.ts";
+import { CanvasCells, type Shown } from "./canvas-cells.tsx";
+import type { LimitLine } from "./limit-lines.ts";
+import { cellAt, cornerOf, mapFrame, pointOf, type MapFrame } from "./map-frame.ts";
+import { regionLabels } from "./region-labels.ts";
+import { StripCells } from "./strip-cells.tsx";
+import type { SweepCells } from "./sweep-cells.ts";
+import { Contours } from "./contours.tsx";
+
+interface SweepMapProps {
+  cells: SweepCells;
+  across: AxisScale;
+  up: AxisScale | null;
+  /** Number of the first cell of the branch shown. */
+  first: number;
+  shown: Shown;
+  lines: readonly LimitLine[];
+  /** The selected cell, counted within the branch. */
+  selected: number | null;
+  onSelect: (cell: number) => void;
+  onOpen?: () => void;
+  edition: number;
+}
+
+const MOST_STRIPS = 1600;
+
+/** The map of a sweep: cells, searched lines, names of the regions, axes; the arrow keys move the selection. */
+export function SweepMap(props: SweepMapProps) {
+  const { cells, across, up, first, shown, selected, onSelect, onOpen, edition } = props;
+  const [ref, width] = useWidth<HTMLDivElement>(834);
+  const frame = mapFrame(width, across, up);
+  const asStrips = shown.kind === "outcome" && frame.columns * frame.rows <= MOST_STRIPS;
+  const labelId = useId();
+  const press = (event: KeyboardEvent): void => {
+    const moved = movedBy(event.key, selected ?? 0, frame);
+    if (moved !== null) {
+      event.preventDefault();
+      onSelect(moved);
+    } else if (event.key === "Enter") onOpen?.();
+  };
+  const click = (event: MouseEvent<HTMLDivElement>): void => {
+    const box = event.currentTarget.getBoundingClientRect();
+    const hit = cellAt(frame, event.clientX - box.left, event.clientY - box.top);
+    if (hit) onSelect(hit.row * frame.columns + hit.column);
+  };
+  return (
+    <div ref={ref}>
+      <div
+        role="application"
+        aria-roledescription="map of cells"
+        aria-labelledby={labelId}
+        tabIndex={0}
+        className="relative cursor-crosshair"
+        style={{ height: frame.height }}
+        onKeyDown={press}
+        onClick={click}
+      >
+        <span id={labelId} className="sr-only">
+          {`Map of ${across.name}${up ? ` and ${up.name}` : ""}. ${selectionWords(props)}`}
+        </span>
+        {!asStrips && <CanvasCells {...{ cells, frame, first, shown, edition }} />}
+        <svg
+          width={frame.width}
+          height={frame.height}
+          className="absolute inset-0 forced-color-adjust-none"
+          aria-hidden="true"
+        >
+          {asStrips && <StripCells {...{ cells, frame, first, edition }} />}
+          {shown.kind === "quantity" && up && <Contours {...{ cells, frame, first, shown, edition }} />}
+          {up && <Lines frame={frame} across={across} up={up} lines={props.lines} />}
+          {shown.kind === "outcome" && up && <Regions frame={frame} cells={cells} first={first} edition={edition} />}
+          <Axes frame={frame} across={across} up={up} />
+          {selected !== null && <Selection frame={frame} cell={selected} />}
+        </svg>
+      </div>
+    </div>
+  );
+}
+
+const steps: Record<string, [number, number]> = {
+  ArrowLeft: [-1, 0],
+  ArrowRight: [1, 0],
+  ArrowUp: [0, 1],
+  ArrowDown: [0, -1],
+};
+
+function movedBy(key: string, cell: number, { columns, rows }: MapFrame): number | null {
+  const step = Object.hasOwn(steps, key) ? steps[key] : null;
+  if (!step) return null;
+  const column = Math.min(columns - 1, Math.max(0, (cell % columns) + step[0]));
+  const row = Math.min(rows - 1, Math.max(0, Math.floor(cell / columns) + step[1]));
+  return row * columns + column;
+}
+
+function selectionWords({ selected, cells, first, across, up }: SweepMapProps): string {
+  if (selected === null) return "No cell is selected.";
+  const figures = cells.read(first + selected);
+  const column = selected % across.count;
+  const row = Math.floor(selected / across.count);
+  const at = `${across.name} ${across.text(across.values[column])} ${across.unit.label}`;
+  const and = up ? `, ${up.name} ${up.text(up.values[row])} ${up.unit.label}` : "";
+  const what = !figures ? "still to come" : figures.outcome ? outcomeWords[figures.outcome] : "no answer";
+  return `Selected: ${at}${and}: ${what}.`;
+}
+
+function Selection({ frame, cell }: { frame: MapFrame; cell: number }) {
+  const { x, y } = cornerOf(frame, cell % frame.columns, Math.floor(cell / frame.columns));
+  const [width, height] = [Math.max(8, frame.cellWidth + 2), Math.max(8, frame.cellHeight + 2)];
+  return (
+    <>
+      <rect x={x - 2} y={y - 2} width={width} height={height} className="fill-none stroke-paper" strokeWidth={4} />
+      <rect x={x - 2} y={y - 2} width={width} height={height} className="fill-none stroke-ink" strokeWidth={2.25} />
+    </>
+  );
+}
+
+interface LinesProps {
+  frame: MapFrame;
+  across: AxisScale;
+  up: AxisScale;
+  lines: readonly LimitLine[];
+}
+
+/** Thick: where sliding ends. Dashed: every other change. */
+function Lines({ frame, across, up, lines }: LinesProps) {
+  return lines.map(({ between, points }, i) => {
+    const places = points.flatMap((point) => {
+      const [a, u] = [across.placeOf(point.across), up.placeOf(point.up)];
+      return a === null || u === null ? [] : [pointOf(frame, a, u)];
+    });
+    if (places.length === 0) return null;
+    const d = places.map(({ x, y }, k) => `${k === 0 ? "M" : "L"}${x.toFixed(1)} ${y.toFixed(1)}`).join("");
+    const isLimit = between.includes("smooth-sliding");
+    if (places.length === 1)
+      return <circle key={i} cx={places[0].x} cy={places[0].y} r={3} className="fill-ink stroke-paper" />;
+    return (
+      <g key={i}>
+        <path d={d} className="fill-none stroke-paper" strokeWidth={isLimit ? 6.5 : 4} strokeLinejoin="round" />
+        <path
+          d={d}
+          className="fill-none stroke-ink"
+          strokeWidth={isLimit ? 2.5 : 1.5}
+          strokeDasharray={isLimit ? undefined : "5 4"}
+          strokeLinejoin="round"
+        />
+      </g>
+    );
+  });
+}
+
+/** The name of each region, on plain ground, where it is widest. */
+function Regions({ frame, cells, first }: { frame: MapFrame; cells: SweepCells; first: number; edition: number }) {
+  return regionLabels(cells, first, frame).map(({ words, x, y, width }) => (
+    <g key={words}>
+      <rect x={x - width / 2} y={y - 12} width={width} height={23} rx={2} className="fill-paper" opacity={0.94} />
+      <text x={x} y={y + 5} textAnchor="middle" className="fill-ink text-[15px] font-bold">
+        {words}
+      </text>
+    </g>
+  ));
+}
+
+function Axes({ frame, across, up }: { frame: MapFrame; across: AxisScale; up: AxisScale | null }) {
+  const bottom = frame.top + frame.rows * frame.cellHeight;
+  const right = frame.left + frame.columns * frame.cellWidth;
+  const name = ({ name: text, unit }: AxisScale): string => (unit.label === "" ? text : `${text}, ${unit.label}`);
+  return (
+    <g className="text-[12.5px]">
+      {across.ticks.map(({ place, text }) => {
+        const { x } = pointOf(frame, place, 0);
+        return (
+          <g key={text}>
+            <path d={`M${x} ${bottom + 1}v5`} className="stroke-edge" />
+            <text x={x} y={bottom + 19} textAnchor="middle" className="figures fill-ink">
+              {text}
+            </text>
+          </g>
+        );
+      })}
+      <text x={right} y={bottom + 40} textAnchor="end" className="fill-quiet text-[13px]">
+        {name(across)}
+      </text>
+      {up?.ticks.map(({ place, text }) => {
+        const { y } = pointOf(frame, 0, place);
+        return (
+          <g key={text}>
+            <path d={`M${frame.left - 6} ${y}h5`} className="stroke-edge" />
+            <text x={frame.left - 10} y={y + 4} textAnchor="end" className="figures fill-ink">
+              {text}
+            </text>
+          </g>
+        );
+      })}
+      {up && (
+        <text x={0} y={14} className="fill-quiet text-[13px]">
+          {name(up)}
+        </text>
+      )}
+    </g>
+  );
+}

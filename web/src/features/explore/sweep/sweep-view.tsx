@@ -1,0 +1,190 @@
+import type { StoredExploration } from "@restband/api/contract";
+import { cellCount, type Scenario, type SweepPlan } from "@restband/solver";
+import { useEffect, useMemo, useRef, useState, type ReactNode } from "react";
+import { Button } from "../../../components/button.tsx";
+import { ErrorNote } from "../../../components/error-note.tsx";
+import { ProgressLine } from "../../../components/progress-line.tsx";
+import { fileNameOf, saveFile } from "../../../components/save-file.ts";
+import { useExploring } from "../../../compute/use-exploring.ts";
+import type { Computed } from "../../../compute/use-run.ts";
+import { useUnitSystem } from "../../../format/unit-system.ts";
+import { rateWords } from "../rate-words.ts";
+import { axisScale } from "./axis-scale.ts";
+import { searchLimitLines, type LimitLine } from "./limit-lines.ts";
+import { MapChoice, useShown } from "./map-choice.tsx";
+import { MapLegend } from "./map-legend.tsx";
+import { SelectedCell } from "./selected-cell.tsx";
+import { sweepCsv } from "./sweep-csv.ts";
+import { SweepHead } from "./sweep-head.tsx";
+import { SweepMap } from "./sweep-map.tsx";
+import type { SweepRun } from "./sweep-run.ts";
+import { SweepTable } from "./sweep-table.tsx";
+import { LineFamily } from "./line-family.tsx";
+import { useSweep } from "./use-sweep.ts";
+
+interface SweepViewProps {
+  projectId: string;
+  stored: StoredExploration;
+  canEdit: boolean;
+  /** True where it has just been asked for: it begins by itself. */
+  isFresh: boolean;
+  answer: (computed: Computed) => ReactNode;
+  compare?: (cell: Scenario) => ReactNode;
+  open?: (scenario: Scenario, title: string) => Promise<void>;
+}
+
+/** A sweep: what it says, its map as it fills, the selected cell, and everything as a table. */
+export function SweepView({ projectId, stored, canEdit, isFresh, answer, open, compare }: SweepViewProps) {
+  useUnitSystem();
+  const run = useSweep(projectId, stored, canEdit);
+  useBegin(run, isFresh && stored.headline === null);
+  const { cells } = run;
+  const { plan } = cells;
+  const scenario = stored.content;
+  const edition = run.editionNow();
+  const [across, up] = useMemo(() => {
+    const [first, second] = plan.axes;
+    return [axisScale(first, scenario, 9), second ? axisScale(second, scenario, 14) : null];
+  }, [plan, scenario]);
+  const isBoth = plan.continuation === "both";
+  const [isDown, setDown] = useState(false);
+  const first = isBoth && isDown ? cellCount(plan) / 2 : 0;
+  const [selected, setSelected] = useState(
+    () => Math.floor(across.count / 3) + across.count * Math.floor((up?.count ?? 1) / 2),
+  );
+  const [isTable, setTable] = useState(false);
+  const { choice, shown, choose } = useShown(cells, edition);
+  const lines = useLimitLines(run, scenario, plan);
+  const selectedCell = first + selected;
+  return (
+    <>
+      <SweepHead stored={stored} cells={cells} lines={lines.lines} edition={edition} />
+      <div className="grid gap-x-12 gap-y-8 border-t border-line pt-6 wide:grid-cols-[minmax(0,1fr)_388px]">
+        <div className="min-w-0">
+          <SweepProgress run={run} stored={stored} canEdit={canEdit} />
+          <div className="my-4 flex flex-wrap items-center gap-3">
+            <MapChoice
+              plan={plan}
+              choice={choice}
+              onChoose={choose}
+              isBoth={isBoth}
+              isDown={isDown}
+              onBranch={setDown}
+            />
+            <Button onClick={() => setTable(!isTable)} aria-pressed={isTable}>
+              {isTable ? "As a map" : "As a table"}
+            </Button>
+            <Button onClick={() => saveFile(fileNameOf(stored.title, "csv"), "text/csv", sweepCsv(cells, scenario))}>
+              Save as CSV
+            </Button>
+          </div>
+          {isTable ? (
+            <SweepTable
+              cells={cells}
+              scenario={scenario}
+              scales={up ? [across, up] : [across]}
+              selected={selectedCell}
+              onSelect={(cell) => {
+                setDown(isBoth && cell >= cellCount(plan) / 2);
+                setSelected(isBoth ? cell % (cellCount(plan) / 2) : cell);
+              }}
+            />
+          ) : (
+            <>
+              <SweepMap
+                {...{ cells, across, up, first, shown, selected, edition }}
+                lines={first === 0 && !isBoth ? lines.lines : []}
+                onSelect={setSelected}
+                onOpen={open && (() => document.getElementById("open-cell")?.click())}
+              />
+              <MapLegend shown={shown} cells={cells} quantity={choice} scenario={scenario} edition={edition} />
+              {shown.kind === "quantity" && (
+                <div className="mt-6">
+                  <LineFamily cells={cells} scenario={scenario} across={across} up={up} place={shown.place} />
+                </div>
+              )}
+            </>
+          )}
+        </div>
+        <div className="min-w-0">
+          <SelectedCell {...{ scenario, plan, cells, answer, open, compare }} cell={selectedCell} />
+          <p className="mt-2 text-13 text-quiet">Arrow keys move the selection in the map. Enter opens it.</p>
+        </div>
+      </div>
+    </>
+  );
+}
+
+/** Begins once, where it has just been asked for. */
+function useBegin(run: SweepRun, isWanted: boolean): void {
+  const begun = useRef(false);
+  useEffect(() => {
+    if (!isWanted || begun.current) return;
+    begun.current = true;
+    void run.start(true);
+  }, [run, isWanted]);
+}
+
+/** The searched boundaries, once all cells are there; of one field there are none. */
+function useLimitLines(run: SweepRun, scenario: Scenario, plan: SweepPlan): { lines: readonly LimitLine[] } {
+  const search = useExploring<LimitLine[]>();
+  const { begin } = search;
+  const isWanted = run.isComplete && plan.axes.length === 2 && plan.continuation === "none";
+  useEffect(() => {
+    if (isWanted) void begin(searchLimitLines(scenario, plan, run.cells));
+  }, [begin, isWanted, plan, run, scenario]);
+  return { lines: search.state.kind === "done" ? search.state.value : none };
+}
+const none: readonly LimitLine[] = [];
+
+interface SweepProgressProps {
+  run: SweepRun;
+  stored: StoredExploration;
+  canEdit: boolean;
+}
+
+function SweepProgress({ run, stored, canEdit }: SweepProgressProps) {
+  const { state, done, cells, trouble, failed } = run;
+  const isElsewhere = stored.state === "running" && state.kind !== "running" && !run.isComplete;
+  return (
+    <div className="flex flex-col gap-3" aria-live="polite">
+      {state.kind === "running" && (
+        <ProgressLine
+          label="Running the cells"
+          fraction={done / cells.count}
+          remark={progressWords(done, state.doneBefore, cells.count, state.elapsed)}
+          onCancel={() => run.stop()}
+        />
+      )}
+      {isElsewhere && (
+        <p className="text-13 text-quiet">
+          {stored.runner?.name ?? "Somebody"} computes this just now. {cells.done} of {cells.count} cells are here.
+        </p>
+      )}
+      {state.kind !== "running" && !run.isComplete && !isElsewhere && (
+        <div className="flex flex-wrap items-center gap-4">
+          <span className="text-13 text-quiet">
+            {cells.done} of {cells.count} cells are here.
+          </span>
+          <Button onClick={() => void run.start(canEdit)}>Resume</Button>
+          {!canEdit && <span className="text-13 text-quiet">Your role may not save: it runs for you alone.</span>}
+        </div>
+      )}
+      {state.kind === "failed" && <ErrorNote>{state.message}</ErrorNote>}
+      {trouble && run.unsavedCount > 0 && (
+        <ErrorNote>
+          {run.unsavedCount} finished parts are not saved yet: {trouble} It is tried again.
+        </ErrorNote>
+      )}
+      {[...failed].slice(0, 1).map(([tile, reason]) => (
+        <ErrorNote key={tile}>A part of the map could not be computed: {reason} Resume tries it again.</ErrorNote>
+      ))}
+    </div>
+  );
+}
+
+/** The rate counts what was done since it began, not what was there before. */
+function progressWords(done: number, before: number, count: number, elapsed: number): string {
+  const words = rateWords(done - before, count - before, elapsed);
+  return before === 0 ? words : `${words}, ${before} were there`;
+}

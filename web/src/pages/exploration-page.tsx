@@ -1,0 +1,53 @@
+import { useSuspenseQueries } from "@tanstack/react-query";
+import { useLocation, useParams } from "react-router-dom";
+import { explorationQuery } from "../api/explorations.ts";
+import { projectQuery } from "../api/projects.ts";
+import { WorkHeader } from "../features/account/work-header.tsx";
+import { SentenceGlance, StripGlance } from "../features/answer/answer-glance.tsx";
+import { SweepView } from "../features/explore/sweep/sweep-view.tsx";
+import { mayEdit } from "../features/project-home/roles.ts";
+import { paths } from "../paths.ts";
+import type { Computed } from "../compute/use-run.ts";
+import { useOpenScenario } from "./use-open-scenario.ts";
+
+/** One exploration that is kept: a sweep as it fills, for whoever looks. */
+export function ExplorationPage() {
+  const { projectId = "", scenarioId = "", explorationId = "" } = useParams();
+  const [{ data: project }, { data: stored }] = useSuspenseQueries({
+    queries: [projectQuery(projectId), explorationQuery(projectId, explorationId)],
+  });
+  const canEdit = mayEdit(project.role) && project.archivedAt === null;
+  const open = useOpenScenario(projectId);
+  const { state } = useLocation() as { state: { isFresh?: boolean } | null };
+  return (
+    <>
+      <title>{`${stored.title} · Restband`}</title>
+      <WorkHeader
+        trail={[
+          { label: project.name, to: paths.project(projectId) },
+          { label: stored.content.title || "Untitled", to: paths.scenario(projectId, scenarioId) },
+          { label: "Explore", to: paths.explore(projectId, scenarioId) },
+        ]}
+        title={stored.title}
+      />
+      <main id="content" tabIndex={-1} className="page-width grow py-8 desk:py-9">
+        <SweepView
+          key={stored.id}
+          {...{ projectId, stored, canEdit }}
+          isFresh={state?.isFresh === true}
+          answer={cellAnswer}
+          {...(canEdit && { open })}
+        />
+      </main>
+    </>
+  );
+}
+
+const cellAnswer = (computed: Computed) => (
+  <>
+    <div className="mb-3 text-24 leading-[1.35] font-semibold">
+      <SentenceGlance computed={computed} />
+    </div>
+    <StripGlance computed={computed} />
+  </>
+);
