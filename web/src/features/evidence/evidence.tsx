@@ -12,6 +12,7 @@ import { DockedStrip } from "./docked-strip.tsx";
 import { frameOf } from "./frame.ts";
 import { ReadingsRow } from "./gutter.tsx";
 import { LoopSheets } from "./loop-sheets.tsx";
+import type { Overlay } from "./overlay.ts";
 import { OverlayChoice } from "./overlay-choice.tsx";
 import { PanelChoice } from "./panel-choice.tsx";
 import { PlayButtons } from "./play-buttons.tsx";
@@ -35,21 +36,27 @@ interface EvidenceProps {
   t: number;
   onMove: (t: number) => void;
   isStale: boolean;
+  /** Other motions drawn behind this one; a scenario to overlay is then not offered. */
+  beside?: readonly Overlay[];
 }
 
-/** While a value is dragged the plots take the newest run five times a second: drawing them takes longer than a frame. */
+/**
+ * While a value is dragged the plots take the newest run five times a second: drawing them takes longer than a frame. So do
+ * the plots below the time axis while what is seen of it moves.
+ */
 const DRAWN_EVERY_MS = 200;
 
 /** The motion strip and the plots of a run over one time axis, under one cursor. */
-export function Evidence({ view: newest, t, onMove, isStale }: EvidenceProps) {
+export function Evidence({ view: newest, t, onMove, isStale, beside }: EvidenceProps) {
   const view = useThrottled(newest, DRAWN_EVERY_MS);
   const isPhone = useIsPhone();
   const [ref, width] = useWidth<HTMLDivElement>(1160);
   const part = useSeenPart(view.end, t);
   const { range } = part;
+  const settling = useThrottled(range, DRAWN_EVERY_MS);
   const [panels, togglePanel] = usePanels();
   const overlay = useScenarioOverlay(view.scenario.motion);
-  const { overlays } = overlay;
+  const overlays = beside ?? overlay.overlays;
   const frame = useMemo(
     () => frameOf(width, range, scalesOf(view, range, panels, overlays)),
     [view, width, range, panels, overlays],
@@ -73,7 +80,7 @@ export function Evidence({ view: newest, t, onMove, isStale }: EvidenceProps) {
       </div>
       <div className="flex flex-wrap items-center gap-x-6">
         <PanelChoice hasDrive={view.drive !== null} chosen={panels} onToggle={togglePanel} />
-        <OverlayChoice overlay={overlay} />
+        {!beside && <OverlayChoice overlay={overlay} />}
       </div>
       {isPhone && <ReadingsRow view={view} frame={frame} t={t} overlays={overlays} />}
       <div className="border-line bg-raised max-desk:-mx-(--page-pad) max-desk:border-y desk:rounded desk:border">
@@ -91,10 +98,10 @@ export function Evidence({ view: newest, t, onMove, isStale }: EvidenceProps) {
           </TimeFigure>
         </div>
       </div>
-      <LoopSheets view={view} range={range} t={t} theme={theme} />
+      <LoopSheets view={view} range={settling} t={t} theme={theme} />
       {panels.includes("spectrum") && (
         <Suspense fallback={<div className="min-h-[420px]" />}>
-          <SpectrumSheet view={view} range={range} theme={theme} />
+          <SpectrumSheet view={view} range={settling} theme={theme} />
         </Suspense>
       )}
       <SaveRun view={view} />

@@ -32,13 +32,14 @@ interface TimeFigureProps {
 /** The motion strip and the panels over one time axis, with what is read at the cursor. */
 export function TimeFigure({ view, frame, t, theme, overlays, onMove, onSpan, children }: TimeFigureProps) {
   const { data, layout } = useMemo(() => evidenceFigure(view, frame, theme, overlays), [view, frame, theme, overlays]);
+  const words = useMemo(() => figureWords(view, frame), [view, frame]);
   return (
     <>
       <StripRow view={view} frame={frame} t={t}>
         <StripDrag frame={frame} onMove={onMove} onSpan={onSpan} />
       </StripRow>
       <div className="relative">
-        <Plot data={data} layout={layout} label={figureWords(view, frame)} />
+        <Plot data={data} layout={layout} label={words} />
         <Heads frame={frame} scenario={view.scenario} />
         <OverlayLabels frame={frame} overlays={overlays} />
         {children}
@@ -115,6 +116,7 @@ function timeSheet(
 /** The strip over the same axis as the plots, with the head of the cursor. */
 function StripRow({ view, frame, t, children }: Pick<TimeFigureProps, "view" | "frame" | "t" | "children">) {
   const isSeen = t >= frame.from && t <= frame.to;
+  const words = useMemo(() => stripWords(view.intervals), [view]);
   return (
     <div className="relative pt-5" style={{ paddingLeft: frame.left, paddingRight: frame.right }}>
       {frame.left > 60 && (
@@ -126,7 +128,7 @@ function StripRow({ view, frame, t, children }: Pick<TimeFigureProps, "view" | "
         intervals={view.intervals}
         from={frame.from}
         to={frame.to}
-        label={stripWords(view.intervals)}
+        label={words}
         isNever={view.result.outcome === "never-moved"}
       />
       {isSeen && (
