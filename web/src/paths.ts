@@ -10,6 +10,8 @@ export const patterns = {
   scenario: "/projects/:projectId/scenarios/:scenarioId",
   explore: "/projects/:projectId/scenarios/:scenarioId/explore",
   exploration: "/projects/:projectId/scenarios/:scenarioId/explore/:explorationId",
+  revision: "/projects/:projectId/revisions/:revisionId",
+  compare: "/projects/:projectId/compare",
   licences: "/licences",
 } as const;
 
@@ -32,7 +34,17 @@ export const paths = {
   explore: (projectId: string, scenarioId: string) => `/projects/${projectId}/scenarios/${scenarioId}/explore`,
   exploration: (projectId: string, scenarioId: string, explorationId: string) =>
     `/projects/${projectId}/scenarios/${scenarioId}/explore/${explorationId}`,
+  revision: (projectId: string, revisionId: string) => `/projects/${projectId}/revisions/${revisionId}`,
+  /** Two things side by side, each told as `compareReference` spells it; without a second one it is chosen there. */
+  compare: (projectId: string, first: string, second?: string) =>
+    `/projects/${projectId}/compare?${new URLSearchParams({ a: first, ...(second === undefined ? {} : { b: second }) })}`,
   licences: patterns.licences,
+};
+
+/** How the address of a comparison names what it compares. */
+export const compareReference = {
+  scenario: (id: string) => `scenario:${id}`,
+  revision: (id: string) => `revision:${id}`,
 };
 
 /** The address asked for before signing in, or the projects. Only an address of our own is followed. */

@@ -48,6 +48,8 @@ const workPages = [
   page(patterns.scenario, () => import("./pages/scenario-page.tsx"), "ScenarioPage"),
   page(patterns.explore, () => import("./pages/explore-page.tsx"), "ExplorePage"),
   page(patterns.exploration, () => import("./pages/exploration-page.tsx"), "ExplorationPage"),
+  page(patterns.revision, () => import("./pages/revision-page.tsx"), "RevisionPage"),
+  page(patterns.compare, () => import("./pages/compare-page.tsx"), "ComparePage"),
 ];
 
 const entryPages = [

@@ -58,9 +58,11 @@ def compare_events(events, peaks):
     for column, (name, unit) in enumerate(zip(("time", "place", "velocity", "friction"), EVENT_UNITS), 1):
         apart = [abs(said[column] - here[column]) for said, here in pairs]
         i = int(np.argmax(apart))
-        share = share_of(apart[i], unit, pairs[i][0][column], pairs[i][1][column], peaks)
+        said, here = pairs[i][0][column], pairs[i][1][column]
+        share = share_of(apart[i], unit, said, here, peaks)
         worst = max(worst, share)
-        print(f"{name + ' of events':<22}largest at event {i}, {pairs[i][0][0]}: {apart[i]:.2e} apart, share {share:.1e}{mark(share)}")
+        label, at = name + " of events", f"event {i}, {pairs[i][0][0]}"
+        print(f"{label:<22}{show(said):>26}{show(here):>26}  {unit:<6}{apart[i]:>12.2e}{share:>11.1e}  at {at}{mark(share)}")
     return worst
 
 

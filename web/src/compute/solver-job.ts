@@ -8,7 +8,10 @@ export interface EvenTimes {
 }
 
 /** What may be asked of a worker: the options that can be told as a message. */
-export interface RunOptions extends Pick<SimulateOptions, "samples" | "quantities" | "events" | "energy" | "method"> {
+export interface RunOptions extends Pick<
+  SimulateOptions,
+  "samples" | "quantities" | "events" | "energy" | "method" | "tolerance"
+> {
   /** The result then has `at`, at these instants. */
   readonly evenly?: EvenTimes;
 }

@@ -39,6 +39,18 @@ export function chooseUnitSystem(system: UnitSystem): void {
   inForce.set(system);
 }
 
+/**
+ * Puts units in force that are not the account's choice: those a page is told in. Nothing is remembered.
+ * @returns how to go back to the account's own
+ */
+export function lendUnitSystem(system: UnitSystem): () => void {
+  inForce.set(system);
+  return () => inForce.set(remembered(account));
+}
+
+/** The account's own choice, whatever is in force. */
+export const ownUnitSystem = (): UnitSystem => remembered(account);
+
 export const unitSystem = (): UnitSystem => inForce.get();
 
 /** The choice in force, and a new render when it changes. */

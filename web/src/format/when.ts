@@ -21,3 +21,6 @@ function daysBetween(earlier: Date, later: Date): number {
   const day = (date: Date) => Date.UTC(date.getFullYear(), date.getMonth(), date.getDate());
   return (day(later) - day(earlier)) / 86_400_000;
 }
+
+/** An instant in full, in the reader's own zone: "11 Nov 2026, 16:40". */
+export const sayMoment = (instant: Date): string => `${dayMonthYear.format(instant)}, ${sayClock(instant)}`;

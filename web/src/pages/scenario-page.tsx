@@ -132,7 +132,9 @@ function OpenScenario({ project, stored }: { project: Project; stored: StoredSce
               ownId={accountId}
               digest={stored.digest}
               canEdit={canEdit}
-              subject={freezableOf(stored, run, inForce, { isSaved: saving.kind === "saved", faults: faults.length })}
+              subject={() =>
+                freezableOf(stored, run, inForce, { isSaved: saving.kind === "saved", faults: faults.length })
+              }
             />
           </Suspense>
         </Section>

@@ -103,7 +103,7 @@ function withUnit(sheet: Sheet, path: string, unit: string): Sheet {
 }
 
 /** The units values were entered in, where their origins tell: "0.25 in" is shown in inches again. */
-function unitsEntered(scenario: Scenario): Record<string, string> {
+export function unitsEntered(scenario: Scenario): Record<string, string> {
   return Object.fromEntries(
     Object.entries(scenario.origins).flatMap(([path, { entered }]) => {
       const unit = entered?.replace(/^[\d\s.,'’+\-−eE·^⁻⁰-⁹¹²³]*/, "");
