@@ -13,7 +13,6 @@ import { frameOf } from "./frame.ts";
 import { ReadingsRow } from "./gutter.tsx";
 import { LoopSheets } from "./loop-sheets.tsx";
 import type { Overlay } from "./overlay.ts";
-import type { Overlay } from "./overlay.ts";
 import { OverlayChoice } from "./overlay-choice.tsx";
 import { PanelChoice } from "./panel-choice.tsx";
 import { PlayButtons } from "./play-buttons.tsx";
