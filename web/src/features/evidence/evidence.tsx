@@ -23,7 +23,7 @@ import { scalesOf } from "./scales.ts";
 import { TimeCursor } from "./time-cursor.tsx";
 import { TimeFigure } from "./time-figure.tsx";
 import { usePanels } from "./use-panels.ts";
-import { useSeenPart } from "./use-part.ts";
+import { useSeenPart, within } from "./use-part.ts";
 import { usePlay } from "./use-play.ts";
 import { useScenarioOverlay } from "./use-scenario-overlay.ts";
 import { ViewChoice } from "./view-choice.tsx";
@@ -53,7 +53,8 @@ export function Evidence({ view: newest, t, onMove, isStale, beside }: EvidenceP
   const [ref, width] = useWidth<HTMLDivElement>(1160);
   const part = useSeenPart(view.end, t);
   const { range } = part;
-  const settling = useThrottled(range, DRAWN_EVERY_MS);
+  const slow = useThrottled(range, DRAWN_EVERY_MS);
+  const settling = useMemo(() => within(slow, view.end), [slow, view.end]);
   const [panels, togglePanel] = usePanels();
   const overlay = useScenarioOverlay(view.scenario.motion);
   const overlays = beside ?? overlay.overlays;

@@ -39,7 +39,7 @@ export function useSeenPart(whole: number, t: number): SeenPart {
 }
 
 /** The chosen part as far as the run reaches; the whole run where nothing of it is left. */
-function within(part: Range | null, end: number): Range {
+export function within(part: Range | null, end: number): Range {
   if (!part || part.from >= end) return { from: 0, to: end };
   return { from: part.from, to: Math.min(part.to, end) };
 }
