@@ -19,6 +19,7 @@ import * as createNotices from "./20261201101700-create-notices.ts";
 import * as addScenarioCreator from "./20261201101800-add-scenario-creator.ts";
 import * as createExplorations from "./20261201102000-create-explorations.ts";
 import * as addSwitchedOff from "./20261201103000-add-switched-off.ts";
+import * as addAccountUnits from "./20261201103100-add-account-units.ts";
 
 /** Every change of the database, in order. The names are recorded in it: never renamed, never edited once merged. */
 export const migrations = [
@@ -43,4 +44,5 @@ export const migrations = [
   { name: "20261201101800-add-scenario-creator", ...addScenarioCreator },
   { name: "20261201102000-create-explorations", ...createExplorations },
   { name: "20261201103000-add-switched-off", ...addSwitchedOff },
+  { name: "20261201103100-add-account-units", ...addAccountUnits },
 ];

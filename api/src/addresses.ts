@@ -11,6 +11,7 @@ export interface Address {
 export const addresses = {
   signUp: { method: "POST", path: "/accounts" },
   claimAccount: { method: "POST", path: "/accounts/claim" },
+  changeAccount: { method: "PATCH", path: "/account" },
   readSession: { method: "GET", path: "/session" },
   signIn: { method: "POST", path: "/session" },
   signOut: { method: "DELETE", path: "/session" },

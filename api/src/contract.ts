@@ -1,6 +1,13 @@
 import { z } from "@restband/solver";
 import { addresses, type Address, type RouteName } from "./addresses.ts";
-import { claimSchema, sessionSchema, signInSchema, signUpSchema } from "./accounts/accounts-schema.ts";
+import {
+  accountChangeSchema,
+  accountSchema,
+  claimSchema,
+  sessionSchema,
+  signInSchema,
+  signUpSchema,
+} from "./accounts/accounts-schema.ts";
 import { activityQuerySchema, activitySchema } from "./activity/activity-schema.ts";
 import { chainContract } from "./chain/chain-schema.ts";
 import { commentsContract } from "./comments/comments-schema.ts";
@@ -69,6 +76,7 @@ const explorationParams = z.strictObject({ projectId: id, explorationId: id });
 export const routes = {
   signUp: { ...addresses.signUp, body: signUpSchema, status: 202 },
   claimAccount: { ...addresses.claimAccount, body: claimSchema, status: 200, response: sessionSchema },
+  changeAccount: { ...addresses.changeAccount, body: accountChangeSchema, status: 200, response: accountSchema },
   readSession: { ...addresses.readSession, status: 200, response: sessionSchema },
   signIn: { ...addresses.signIn, body: signInSchema, status: 200, response: sessionSchema },
   signOut: { ...addresses.signOut, status: 204 },

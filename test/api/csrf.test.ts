@@ -22,6 +22,7 @@ afterAll(() => server.stop());
 const requests: Record<string, { body?: object; version?: number }> = {
   signUp: { body: { name: "Bo", email: emailOf("Bo"), password } },
   claimAccount: { body: { token: "a token that nobody ever gave out", name: "Bo", password } },
+  changeAccount: { body: { units: "inch" } },
   signIn: { body: { email: emailOf("Ada"), password } },
   createProject: { body: { name: "Hall 4", description: "" } },
   changeProject: { body: { name: "Hall 5", description: "" } },

@@ -32,6 +32,7 @@ const routeNames = Object.keys(routes) as RouteName[];
 const mayCall: Record<RouteName, readonly Person[]> = {
   signUp: people,
   claimAccount: people,
+  changeAccount: ["stranger", "owner", "editor", "reviewer", "reader", "administrator"],
   readSession: people,
   signIn: people,
   signOut: people,
@@ -173,6 +174,8 @@ function requestFor(
       return { body: { token: "a token that nobody ever gave out", name: "New", password } };
     case "signIn":
       return { body: { email: newcomer, password } };
+    case "changeAccount":
+      return { body: { units: "inch" } };
     case "createProject":
     case "changeProject":
       return { body: { name: "Changed", description: "" } };

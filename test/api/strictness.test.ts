@@ -15,6 +15,7 @@ const signed = { reasons: "Looked through.", password, digest: "0".repeat(64) };
 const goodBodies: Record<string, Record<string, unknown>> = {
   signUp: { name: "Bo", email: emailOf("Bo"), password },
   claimAccount: { token: "a token that nobody ever gave out", name: "Bo", password },
+  changeAccount: { units: "inch" },
   signIn: { email: emailOf("Ada"), password },
   createProject: { name: "Hall 4", description: "" },
   changeProject: { name: "Hall 5", description: "" },

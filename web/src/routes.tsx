@@ -2,7 +2,7 @@ import type { QueryClient } from "@tanstack/react-query";
 import type { ComponentType } from "react";
 import { createBrowserRouter, redirect, type LoaderFunctionArgs, type RouteObject } from "react-router-dom";
 import { sessionQuery } from "./api/session.ts";
-import { openUnitSystem } from "./format/unit-system.ts";
+import { showUnitSystem } from "./format/unit-system.ts";
 import { PageFallback } from "./pages/page-fallback.tsx";
 import { RootLayout } from "./pages/root-layout.tsx";
 import { RouteFailure } from "./pages/route-failure.tsx";
@@ -61,7 +61,7 @@ const entryPages = [
 function demandSession(client: QueryClient) {
   return async ({ request }: LoaderFunctionArgs) => {
     const { account } = await client.ensureQueryData(sessionQuery);
-    if (account) openUnitSystem(account.id);
+    if (account) showUnitSystem(account.units);
     const { pathname, search, hash } = new URL(request.url);
     return account ? null : redirect(paths.signIn(pathname + search + hash));
   };

@@ -6,9 +6,10 @@ import type { AccountsService } from "./accounts-service.ts";
 export function accountsRoutes(
   accounts: AccountsService,
   sessions: SessionsService,
-): HandlersOf<"signUp" | "claimAccount"> {
+): HandlersOf<"signUp" | "claimAccount" | "changeAccount"> {
   return {
     signUp: ({ body }) => accounts.signUp(body),
+    changeAccount: ({ body, account }) => accounts.change(account, body),
 
     claimAccount: async ({ body, request }) => {
       await openSession(request, await accounts.claim(body));

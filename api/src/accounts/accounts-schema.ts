@@ -5,14 +5,19 @@ export const emailSchema = z.email().max(254);
 export const passwordSchema = z.string().min(1).max(256);
 export const personNameSchema = z.string().trim().min(1).max(80);
 
+/** What a person thinks in; which units these mean is a matter of the pages alone. */
+export const unitsSchema = z.enum(["millimetre", "metre", "inch"]);
+
 export const accountSchema = z.strictObject({
   id: z.uuid(),
   name: z.string(),
   email: z.string(),
   isAdministrator: z.boolean(),
+  units: unitsSchema,
 });
 export type Account = z.infer<typeof accountSchema>;
 
+export const accountChangeSchema = z.strictObject({ units: unitsSchema });
 export const signUpSchema = z.strictObject({ name: personNameSchema, email: emailSchema, password: passwordSchema });
 export const signInSchema = z.strictObject({ email: emailSchema, password: passwordSchema });
 /** A one-time link, from `npm run create-administrator`. */

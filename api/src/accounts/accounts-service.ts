@@ -4,13 +4,14 @@ import { recordAct } from "../activity/activity-service.ts";
 import type { Database } from "../database/database.ts";
 import { refusedContent, Refusal } from "../errors.ts";
 import { endSessionsOf } from "../middleware/database-sessions.ts";
-import type { claimSchema, signInSchema, signUpSchema } from "./accounts-schema.ts";
+import type { Account, accountChangeSchema, claimSchema, signInSchema, signUpSchema } from "./accounts-schema.ts";
 import {
   findAccount,
   findAccountByEmail,
   findPasswordHash,
   insertAccount,
   renewAccount,
+  updateUnits,
   type NewAccount,
 } from "./accounts-store.ts";
 import { findOneTimeLink, useOneTimeLink } from "./one-time-links-store.ts";
@@ -26,6 +27,12 @@ export function createAccountsService(database: Database) {
   return {
     find: (id: string) => findAccount(database, id),
     findByEmail: (email: string) => findAccountByEmail(database, email),
+
+    /** Remembers what a person thinks in, wherever they sign in next. */
+    async change(account: Account, { units }: z.infer<typeof accountChangeSchema>): Promise<Account> {
+      await updateUnits(database, account.id, units);
+      return { ...account, units };
+    },
 
     /** Makes an account, or does nothing where the address has one: the answer and its time are the same. */
     async signUp({ name, email, password }: z.infer<typeof signUpSchema>): Promise<void> {

@@ -5,7 +5,7 @@ import type { Account } from "./accounts-schema.ts";
 import { normaliseEmail } from "./email.ts";
 
 const TABLE = "accounts";
-const COLUMNS = ["id", "name", "email", "is_administrator"];
+const COLUMNS = ["id", "name", "email", "is_administrator", "units"];
 
 export interface NewAccount {
   readonly name: string;
@@ -19,6 +19,7 @@ interface AccountRow {
   name: string;
   email: string;
   is_administrator: number;
+  units: Account["units"];
 }
 
 interface HashRow {
@@ -79,10 +80,15 @@ export async function renewAccount(database: Database, account: NewAccount): Pro
   return row.id;
 }
 
+export async function updateUnits(database: Database, id: string, units: Account["units"]): Promise<void> {
+  await database(TABLE).where({ id }).update({ units, updated_at: new Date() });
+}
+
 function hasEmail(email: string) {
   return { email_normalised: normaliseEmail(email) };
 }
 
 function accountOf(row: AccountRow): Account {
-  return { id: row.id, name: row.name, email: row.email, isAdministrator: row.is_administrator === 1 };
+  const { id, name, email, units } = row;
+  return { id, name, email, units, isAdministrator: row.is_administrator === 1 };
 }

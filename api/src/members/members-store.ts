@@ -18,6 +18,7 @@ interface CallerRow {
   name: string;
   email: string;
   is_administrator: number;
+  units: Account["units"];
   role: Role | null;
   archived_at: Date | null;
 }
@@ -48,13 +49,14 @@ export async function findCaller(
       "accounts.name",
       "accounts.email",
       "accounts.is_administrator",
+      "accounts.units",
       "members.role",
       "projects.archived_at",
     );
   if (!row) return null;
-  const { id, name, email, is_administrator: isAdministrator, role, archived_at: archivedAt } = row;
+  const { id, name, email, units, is_administrator: isAdministrator, role, archived_at: archivedAt } = row;
   return {
-    account: { id, name, email, isAdministrator: isAdministrator === 1 },
+    account: { id, name, email, units, isAdministrator: isAdministrator === 1 },
     role,
     isArchived: archivedAt !== null,
   };

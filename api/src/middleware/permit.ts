@@ -21,6 +21,7 @@ const commenters = { roles: ["owner", "editor", "reviewer"] } as const;
 export const permissions = {
   signUp: "public",
   claimAccount: "public",
+  changeAccount: "signed-in",
   readSession: "public",
   signIn: "public",
   signOut: "public",

@@ -110,15 +110,17 @@ describe("the page of a scenario", () => {
     expect(save.body).toMatchObject({ content: { body: { viscous: 8000 } } });
   });
 
-  it("shows all of it in the units a person thinks in, and saves nothing for that", async () => {
-    const requests = fakeServer(seen());
+  it("shows all of it in the units a person thinks in, remembers those and saves nothing else", async () => {
+    const requests = fakeServer({ ...seen(), "PATCH /account": ok({ ...ines, units: "inch" }) });
     const { user } = openPage(at);
     await answer();
     await user.selectOptions(screen.getByRole("combobox", { name: /^Units/ }), "inch–pound");
     // 120 kg / 0.45359237, 4 N/μm / (0.45359237 · 9.80665 / 0.0254)
-    expect(screen.getByRole("button", { name: "Mass: 264.555 lb" })).toBeInTheDocument();
-    expect(screen.getByRole("button", { name: "Stiffness: 22\u202f840.6 lbf/in" })).toBeInTheDocument();
+    expect(screen.getByRole("button", { name: "Mass: 264.6 lb" })).toBeInTheDocument();
+    expect(screen.getByRole("button", { name: "Stiffness: 22\u202f841 lbf/in" })).toBeInTheDocument();
     expect(await screen.findByText(/at up to 0\.21\sin\/s/)).toBeInTheDocument();
+    expect(requests.find(({ method }) => method === "PATCH")).toMatchObject({ body: { units: "inch" } });
+    expect(saves(requests)).toEqual([]);
     await changeDamping(user, "10");
     await waitFor(() => expect(saves(requests)).toHaveLength(1));
     expect(saves(requests)[0].body).toMatchObject({ content: { body: { inertia: 120, stiffness: 4e6 } } });
@@ -265,6 +267,27 @@ describe("the page of a scenario", () => {
     expect(saves(requests)[1].headers["If-Match"]).toBe('"4"');
     expect(saves(requests)[1].body).toMatchObject({ content: { title: "Z carriage, oiled", body: { viscous: 400 } } });
     expect(screen.queryByRole("dialog")).not.toBeInTheDocument();
+  });
+
+  it("says that it is archived, lets all be tried, and takes changes again once it is restored", async () => {
+    let archivedAt: string | null = "2026-12-01T15:00:00.000Z";
+    const requests = fakeServer({
+      ...seen(),
+      [`GET ${at}`]: () => ok({ ...stored(), archivedAt }),
+      [`POST ${at}/restore`]: () => {
+        archivedAt = null;
+        return { status: 204 };
+      },
+    });
+    const { user } = openPage(at);
+    await answer();
+    expect(screen.getByText("the scenario is archived")).toBeInTheDocument();
+    await changeDamping(user, "8000");
+    await screen.findByText("not saved: the scenario is archived");
+    await user.click(screen.getByRole("button", { name: "Restore" }));
+    await screen.findByText("saved");
+    await changeDamping(user, "8000");
+    await waitFor(() => expect(saves(requests)).toHaveLength(1));
   });
 
   it("lets a reader try everything and sends nothing", async () => {

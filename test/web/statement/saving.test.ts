@@ -138,8 +138,8 @@ describe("the state of saving in words", () => {
 
   it.each([
     [{}, "saved"],
-    [{ canEdit: false, isArchived: true }, "the project is archived"],
-    [{ canEdit: false, isArchived: true, isTrying: true }, "not saved: the project is archived"],
+    [{ canEdit: false, archived: "project" as const }, "the project is archived"],
+    [{ canEdit: false, archived: "scenario" as const, isTrying: true }, "not saved: the scenario is archived"],
     [{ saving: { kind: "saved", at } as const }, "saved 14:02"],
     [{ saving: { kind: "saving" } as const }, "draft, saving…"],
     [{ saving: { kind: "unreachable", since: at } as const }, "not saved since 14:02, trying again"],

@@ -1,4 +1,4 @@
-import type { Project, Session } from "@restband/api/contract";
+import type { Account, Project, Session } from "@restband/api/contract";
 import { vi } from "vitest";
 
 /** One request as the server would see it. */
@@ -50,7 +50,13 @@ export function fakeServer(answers: Answers): Request[] {
 
 const id = (n: number) => `00000000-0000-4000-8000-${String(n).padStart(12, "0")}`;
 
-export const ines = { id: id(1), name: "Ines Duarte", email: "ines.duarte@okarin.example", isAdministrator: false };
+export const ines: Account = {
+  id: id(1),
+  name: "Ines Duarte",
+  email: "ines.duarte@okarin.example",
+  isAdministrator: false,
+  units: "millimetre",
+};
 
 /** A session of a person, or of nobody. */
 export const session = (account: Session["account"], csrfToken = "token"): Session => ({ account, csrfToken });

@@ -86,6 +86,10 @@ export function useScenarioActs() {
       refreshLists(client, projectId);
     }
   };
+  const marked = async (projectId: string, id: string, done: Promise<undefined>): Promise<void> => {
+    await then(projectId, done);
+    await client.invalidateQueries({ queryKey: scenarioQuery(projectId, id).queryKey });
+  };
   return {
     duplicate: (projectId: string, id: string, title: string) =>
       then(projectId, call("duplicateScenario", { ...at(projectId, id), body: { title } })),
@@ -94,7 +98,7 @@ export function useScenarioActs() {
       client.removeQueries({ queryKey: scenarioQuery(projectId, id).queryKey });
       refreshLists(client, toProjectId);
     },
-    archive: (projectId: string, id: string) => then(projectId, call("archiveScenario", at(projectId, id))),
-    restore: (projectId: string, id: string) => then(projectId, call("restoreScenario", at(projectId, id))),
+    archive: (projectId: string, id: string) => marked(projectId, id, call("archiveScenario", at(projectId, id))),
+    restore: (projectId: string, id: string) => marked(projectId, id, call("restoreScenario", at(projectId, id))),
   };
 }

@@ -59,6 +59,20 @@ export function useClaimAccount() {
   });
 }
 
+/** Remembers the units a person thinks in. They hold at once, and as long as the page where the server does not answer. */
+export function useChangeUnits() {
+  const client = useQueryClient();
+  const show = (units: Account["units"]) =>
+    client.setQueryData(sessionQuery.queryKey, (old) =>
+      old?.account ? { ...old, account: { ...old.account, units } } : old,
+    );
+  return useMutation({
+    scope: { id: "units" },
+    mutationFn: (units: Account["units"]) => call("changeAccount", { body: { units } }),
+    onMutate: show,
+  });
+}
+
 /** Ends the session; the caller then leaves the page. */
 export function useSignOut() {
   return useMutation({ mutationFn: () => call("signOut", {}), onSuccess: forgetToken });

@@ -16,14 +16,20 @@ export function readQuantity(value: number, measure: Measure, options: { unit?: 
 }
 
 /**
- * A value somebody entered (SI in), with every digit it was given; to six where it is shown in a unit it was not entered in
- * and would have no end.
+ * A value somebody entered (SI in), with every digit it was given; to four where it is shown in a unit it was not entered
+ * in and would have no end. `chosen`: the unit it was entered in.
  */
 export function readInput(value: number, measure: Measure, chosen?: Unit): Reading {
   const unit = chosen ?? unitFor(value, measure);
   const inUnit = fromSi(value, unit);
-  const isEndless = !chosen && Number(inUnit.toPrecision(9)) !== Number(inUnit.toPrecision(12));
-  return reading(value, measure, unit, isEndless ? formatNumber(inUnit, 6) : formatExactly(inUnit));
+  const isRounded = !chosen && isEndless(value, unit);
+  return reading(value, measure, unit, isRounded ? formatNumber(inUnit, 4) : formatExactly(inUnit));
+}
+
+/** True where a value (SI in) has no last digit in a unit: nobody entered it in that. */
+export function isEndless(value: number, unit: Unit): boolean {
+  const inUnit = fromSi(value, unit);
+  return Number(inUnit.toPrecision(9)) !== Number(inUnit.toPrecision(12));
 }
 
 /** A computed value in running text: "77.2 μm", "38 %", "12°". */

@@ -9,47 +9,27 @@ export const unitSystems = [
 
 export type UnitSystem = (typeof unitSystems)[number]["key"];
 
-const inForce = sharedValue<UnitSystem>("millimetre");
-let account = "";
+let own: UnitSystem = "millimetre";
+const inForce = sharedValue<UnitSystem>(own);
 
-const keyOf = (accountId: string): string => `restband-units ${accountId}`;
-
-/** Puts the choice of an account in force, as this browser remembers it. */
-export function openUnitSystem(accountId: string): void {
-  account = accountId;
-  inForce.set(remembered(accountId));
-}
-
-function remembered(accountId: string): UnitSystem {
-  try {
-    const kept = localStorage.getItem(keyOf(accountId));
-    return unitSystems.find(({ key }) => key === kept)?.key ?? "millimetre";
-  } catch {
-    return "millimetre";
-  }
-}
-
-/** Chooses for the account whose choice is in force, and remembers it. */
-export function chooseUnitSystem(system: UnitSystem): void {
-  try {
-    localStorage.setItem(keyOf(account), system);
-  } catch {
-    // Storage is refused: the choice lasts as long as the page.
-  }
+/** Puts the choice of the person signed in in force on every page. */
+export function showUnitSystem(system: UnitSystem): void {
+  if (system === own) return;
+  own = system;
   inForce.set(system);
 }
 
 /**
- * Puts units in force that are not the account's choice: those a page is told in. Nothing is remembered.
- * @returns how to go back to the account's own
+ * Puts units in force that are not the person's choice: those a page is told in. Nothing is remembered.
+ * @returns how to go back to the person's own
  */
 export function lendUnitSystem(system: UnitSystem): () => void {
   inForce.set(system);
-  return () => inForce.set(remembered(account));
+  return () => inForce.set(own);
 }
 
-/** The account's own choice, whatever is in force. */
-export const ownUnitSystem = (): UnitSystem => remembered(account);
+/** The person's own choice, whatever is in force. */
+export const ownUnitSystem = (): UnitSystem => own;
 
 export const unitSystem = (): UnitSystem => inForce.get();
 

@@ -10,6 +10,7 @@ import { Section, WorkedPage } from "../components/section.tsx";
 import { samplesFor } from "../compute/samples-for.ts";
 import { useRanges } from "../compute/use-ranges.ts";
 import { useRun, type Computed, type Run } from "../compute/use-run.ts";
+import { UnitsChoice } from "../features/account/units-choice.tsx";
 import { WorkHeader } from "../features/account/work-header.tsx";
 import { Answer } from "../features/answer/answer.tsx";
 import { Cautions } from "../features/cautions/cautions.tsx";
@@ -20,9 +21,9 @@ import { useDraft } from "../features/statement/saving/use-draft.ts";
 import { isSameScenario, isSameWork } from "../features/statement/saving/differences.ts";
 import { sayField } from "../features/statement/say-field.ts";
 import { Statement } from "../features/statement/statement.tsx";
-import { UnitSystemChoice } from "../features/statement/unit-system-choice.tsx";
 import { UndoButtons } from "../features/statement/undo-buttons.tsx";
 import { useUnitSystem } from "../format/unit-system.ts";
+import { ArchivedScenario } from "../features/project-home/archived-scenario.tsx";
 import { mayEdit } from "../features/project-home/roles.ts";
 import { paths } from "../paths.ts";
 import { sharedValue } from "../shared-value.ts";
@@ -49,15 +50,17 @@ export function ScenarioPage() {
   const [{ data: project }, { data: stored }] = useSuspenseQueries({
     queries: [projectQuery(projectId), scenarioQuery(projectId, scenarioId)],
   });
-  return <OpenScenario key={scenarioId} project={project} stored={stored} />;
+  // Opened anew once it is restored: only then is what was left in this browser taken up.
+  const isInUse = project.archivedAt === null && stored.archivedAt === null;
+  return <OpenScenario key={`${scenarioId} ${isInUse}`} project={project} stored={stored} />;
 }
 
 function OpenScenario({ project, stored }: { project: Project; stored: StoredScenario }) {
   const { id: accountId } = useAccount();
   // What is worked out once for a run is worked out anew for other units.
   const units = useUnitSystem();
-  const isArchived = project.archivedAt !== null;
-  const canEdit = mayEdit(project.role) && !isArchived;
+  const archived = project.archivedAt ? "project" : stored.archivedAt ? "scenario" : null;
+  const canEdit = mayEdit(project.role) && archived === null;
   const { draft, dispatch, saving, base, work, decide } = useDraft({ stored, accountId, canEdit });
   const { inForce, faults } = draft;
   const samples = samplesFor(inForce);
@@ -92,11 +95,18 @@ function OpenScenario({ project, stored }: { project: Project; stored: StoredSce
       <WorkHeader
         trail={[{ label: project.name, to: paths.project(project.id) }]}
         title={title}
-        state={savedWords({ saving, canEdit, role: project.role, isArchived, isTrying, faults: faults.length })}
+        state={savedWords({ saving, canEdit, role: project.role, archived, isTrying, faults: faults.length })}
         actions={<UndoButtons draft={draft} dispatch={dispatch} />}
       />
       <WorkedPage className="max-desk:pb-40">
         <Section name="Answer" help="Computed here, anew with every change.">
+          {stored.archivedAt !== null && (
+            <ArchivedScenario
+              stored={stored}
+              archivedAt={stored.archivedAt}
+              canRestore={mayEdit(project.role) && project.archivedAt === null}
+            />
+          )}
           <Answer
             key={units}
             run={run}
@@ -119,7 +129,9 @@ function OpenScenario({ project, stored }: { project: Project; stored: StoredSce
             aside={aside}
             refusal={run.computed && "refusal" in run.computed ? run.computed.refusal : null}
           />
-          <UnitSystemChoice />
+          <div className="mt-3">
+            <UnitsChoice>for you, on every page; a unit chosen for one value stays with it</UnitsChoice>
+          </div>
           <Suspense>
             <ScenarioExchange scenario={inForce} dispatch={dispatch} />
           </Suspense>

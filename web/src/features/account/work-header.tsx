@@ -6,6 +6,7 @@ import { menuItemClass } from "../../components/menu.tsx";
 import { PageHeader } from "../../components/page-header.tsx";
 import { chooseTheme, chosenTheme, useTheme } from "../../components/theme.ts";
 import { paths } from "../../paths.ts";
+import { UnitsChoice } from "./units-choice.tsx";
 
 /** The page header of everybody who is signed in, with their own menu at its end. */
 export function WorkHeader(props: Omit<ComponentProps<typeof PageHeader>, "home" | "person">) {
@@ -33,6 +34,9 @@ function PersonItems() {
         <span className="block font-bold">{name}</span>
         <span className="text-13 text-quiet">{email}</span>
       </p>
+      <div className="px-2.5 py-1">
+        <UnitsChoice />
+      </div>
       <Link to={paths.projects} className={menuItemClass}>
         All projects
       </Link>

@@ -87,7 +87,10 @@ function edited(sheet: Sheet, action: Edit): Sheet {
   const unread = without(sheet.unread, action.clears ?? action.path);
   const wanted = withEntered(writePath(sheet.wanted, action.path, action.value), action.path, action.entered);
   const next = { ...sheet, wanted, unread };
-  return action.unit === undefined ? next : withUnit(next, action.path, action.unit);
+  if (action.unit === undefined) return next;
+  return action.unit === null
+    ? { ...next, units: without(next.units, action.path) }
+    : withUnit(next, action.path, action.unit);
 }
 
 /** A value's origin tells how it was typed; a new value drops the old words. */

@@ -35,8 +35,8 @@ export interface Draft {
 
 /** One thing a person does to a draft. */
 export type DraftAction =
-  /** `clears`: where the text that stood for the value is kept, if not at its own path. */
-  | { type: "set"; path: string; value: unknown; unit?: string; entered?: string; clears?: string }
+  /** `unit` null: shown in no unit of its own again. `clears`: where the text that stood for the value is kept, if not at its own path. */
+  | { type: "set"; path: string; value: unknown; unit?: string | null; entered?: string; clears?: string }
   /** `value`: what stood there before anything was typed, and stands again. */
   | { type: "leave-unread"; path: string; text: string; message: string; value?: unknown }
   | { type: "show-in"; path: string; unit: string }

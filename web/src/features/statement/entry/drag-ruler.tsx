@@ -3,9 +3,9 @@ import { useState } from "react";
 import { useWidth } from "../../../components/use-width.ts";
 import { useScan, type ScanPoint } from "../../../compute/use-scan.ts";
 import { runKey } from "../../../compute/run-cache.ts";
-import { formatExactly, formatNumber } from "../../../format/format-number.ts";
+import { formatNumber } from "../../../format/format-number.ts";
 import { outcomeWords } from "../../../format/outcomes.ts";
-import { fromSi } from "../../../format/unit.ts";
+import { fromSi, toSi, type Unit } from "../../../format/unit.ts";
 import { useDraftContext } from "../draft/draft-context.ts";
 import { writePath } from "../path.ts";
 import { stretchesOf, ticksOf, type Stretch } from "./ruler-scale.ts";
@@ -31,6 +31,12 @@ export function DragRuler({ path, before, entry, label }: DragRulerProps) {
   const stretches = stretchesOf(useOutcomesAlong(path, before), REACH);
   const position = Math.log10((entry.value ?? before) / before);
   const x = (at: number): number => THUMB / 2 + ((at + REACH) / (2 * REACH)) * (width - THUMB);
+  const [typedIn] = useState(entry.typedIn);
+  // The value that was there stays within reach.
+  const drag = (value: number): void =>
+    Math.abs(value / before - 1) < 2e-3
+      ? entry.set(before, typedIn)
+      : entry.set(rounded(value, entry.unit), entry.unit);
   const inUnit = (si: number): number => fromSi(si, entry.unit);
   return (
     <div ref={ref} className="relative mt-4 w-full desk:min-w-[480px]">
@@ -58,9 +64,9 @@ export function DragRuler({ path, before, entry, label }: DragRulerProps) {
         step={0.002}
         value={Number.isFinite(position) ? Math.min(Math.max(position, -REACH), REACH) : 0}
         aria-label={`Drag ${label}`}
-        aria-valuetext={`${formatExactly(inUnit(entry.value ?? before))} ${entry.unit.label}`}
+        aria-valuetext={`${formatNumber(inUnit(entry.value ?? before), 4)} ${entry.unit.label}`}
         className="drag-ruler absolute inset-x-0 top-[18px] m-0 h-6 w-full"
-        onChange={(event) => entry.set(rounded(before * 10 ** Number(event.currentTarget.value), before), entry.unit)}
+        onChange={(event) => drag(before * 10 ** Number(event.currentTarget.value))}
         onKeyDown={(event) => {
           if (event.key !== "ArrowUp" && event.key !== "ArrowDown") return;
           event.preventDefault();
@@ -76,10 +82,8 @@ export function DragRuler({ path, before, entry, label }: DragRulerProps) {
 const WIDE = 420;
 const isDecade = (value: number): boolean => Number.isInteger(Math.round(1e6 * Math.log10(Math.abs(value))) / 1e6);
 
-/** Three significant digits: finer than a hand drags. The value that was there stays within reach. */
-function rounded(value: number, before: number): number {
-  return Math.abs(value / before - 1) < 2e-3 ? before : Number(value.toPrecision(3));
-}
+/** Three significant digits of its unit: finer than a hand drags. */
+const rounded = (value: number, unit: Unit): number => toSi(Number(fromSi(value, unit).toPrecision(3)), unit);
 
 /** What the scenario as it was opened would do with this one value anywhere on the scale. */
 function useOutcomesAlong(path: string, before: number): readonly ScanPoint[] {

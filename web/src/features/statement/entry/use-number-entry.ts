@@ -13,13 +13,16 @@ export interface NumberEntry {
   readonly text: string;
   readonly value: number | undefined;
   readonly unit: Unit;
+  /** The unit it was typed in or chosen for it; null: shown in the customary one. */
+  readonly typedIn: Unit | null;
   readonly units: readonly Unit[];
   /** What is to be put right, in words. */
   readonly fault: string | undefined;
   /** Where a text can be read in two ways: both, to choose from. */
   readonly choices: Extract<TypedReading, { kind: "ambiguous" }>["choices"];
   readonly type: (text: string) => void;
-  readonly set: (value: number, unit?: Unit) => void;
+  /** `unit` null: shown in the customary one again. */
+  readonly set: (value: number, unit?: Unit | null) => void;
   readonly showIn: (label: string) => void;
   /** One arrow key: up or down by 1 %, or 10 %. */
   readonly nudge: (direction: 1 | -1, isLarge: boolean) => void;
@@ -36,16 +39,18 @@ export function useNumberEntry(path: string, field: PathField, empty?: unknown):
   );
   const measure = measureOf(wanted, field);
   const value = numberAt(wanted, path);
-  const unit = unitTyped(units[path], measure) ?? unitFor(value ?? field.initial, measure);
+  const typedIn = unitTyped(units[path], measure);
+  const unit = typedIn ?? unitFor(value ?? field.initial, measure);
   // What is being typed stands as long as the draft holds what it meant: undo takes it back.
   const isTyping = typing !== null && (typing.value === value || typing.text === unread[path]?.text);
   const text =
-    (isTyping ? typing.text : unread[path]?.text) ?? (value === undefined ? "" : readInput(value, measure, unit).text);
+    (isTyping ? typing.text : unread[path]?.text) ??
+    (value === undefined ? "" : readInput(value, measure, typedIn ?? undefined).text);
   const reading = unread[path] && parseTyped(unread[path].text, measure, unit);
 
-  const set = (next: number, nextUnit = unit): void => {
-    const entered = joined(readInput(next, measure, nextUnit));
-    dispatch({ type: "set", path, value: next, unit: nextUnit.label, entered });
+  const set = (next: number, nextUnit: Unit | null = unit): void => {
+    const entered = nextUnit ? joined(readInput(next, measure, nextUnit)) : undefined;
+    dispatch({ type: "set", path, value: next, unit: nextUnit && nextUnit.label, entered });
   };
   const type = (typed: string): void => {
     const before = isTyping ? typing.before : value;
@@ -60,6 +65,7 @@ export function useNumberEntry(path: string, field: PathField, empty?: unknown):
     text,
     value,
     unit,
+    typedIn,
     units: unitsOf(measure).some(({ label }) => label === unit.label) ? unitsOf(measure) : [unit, ...unitsOf(measure)],
     fault: draft.faults.find((fault) => fault.path === path)?.message,
     choices: reading?.kind === "ambiguous" ? reading.choices : [],

@@ -25,7 +25,7 @@ export function ValueEditor({ path, field, nib, onClose }: ValueEditorProps) {
   const { draft, dispatch, aside } = useDraftContext();
   const entry = useNumberEntry(path, field);
   const keeps = useKept(path);
-  const [before] = useState({ value: entry.value, unit: entry.unit });
+  const [before] = useState({ value: entry.value, unit: entry.typedIn });
   const measure = measureOf(draft.sheet.wanted, field);
   const isRulable = before.value !== undefined && before.value !== 0 && !field.integer && field.dimension !== "angle";
 
@@ -84,7 +84,7 @@ export function ValueEditor({ path, field, nib, onClose }: ValueEditorProps) {
           Done
         </Button>
         {before.value !== undefined && (
-          <Button onClick={putBack}>Put back {readInput(before.value, measure, before.unit).text}</Button>
+          <Button onClick={putBack}>Put back {readInput(before.value, measure, before.unit ?? undefined).text}</Button>
         )}
         <p className="max-w-[300px] text-13 text-quiet">
           {isRulable

@@ -2,7 +2,7 @@ import { originKinds, type Origin } from "@restband/solver";
 import { useState } from "react";
 import { SelectField } from "../../../components/select.tsx";
 import { TextField } from "../../../components/text-field.tsx";
-import { joined, readInput } from "../../../format/format-quantity.ts";
+import { isEndless, joined, readInput } from "../../../format/format-quantity.ts";
 import { setOrigin } from "../changes.ts";
 import { useDraftContext } from "../draft/draft-context.ts";
 import type { NumberEntry } from "../entry/use-number-entry.ts";
@@ -38,11 +38,14 @@ const kindChoices = [{ value: "", label: "not said" }, ...originKinds.map((kind)
 
 function OriginForm({ path, field, entry, origin }: OriginEntryProps & { origin: Origin | undefined }) {
   const { draft, dispatch } = useDraftContext();
-  const entered = joined(readInput(entry.value ?? 0, measureOf(draft.sheet.wanted, field), entry.unit));
+  const measure = measureOf(draft.sheet.wanted, field);
+  const { value = 0, unit, typedIn } = entry;
+  const isAsEntered = typedIn !== null || !isEndless(value, unit);
+  const entered = isAsEntered ? { entered: joined(readInput(value, measure, unit)) } : {};
   const settle = (): void => dispatch({ type: "settle" });
   const choose = (kind: string): void => {
     const known = originKinds.find((each) => each === kind);
-    dispatch(setOrigin(draft.sheet.wanted, path, known ? { entered, ...origin, kind: known } : null));
+    dispatch(setOrigin(draft.sheet.wanted, path, known ? { ...entered, ...origin, kind: known } : null));
     settle();
   };
   return (

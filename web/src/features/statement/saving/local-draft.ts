@@ -1,5 +1,4 @@
-import { switchedOffSchema } from "@restband/api/contract";
-import { checkScenario, checkTerm, z, type Scenario } from "@restband/solver";
+import { checkScenario, checkTerm, z, type Origin, type Scenario, type Term } from "@restband/solver";
 import type { Draft, Sheet } from "../draft/draft.ts";
 import { readPath, writePath } from "../path.ts";
 import type { Base } from "./autosave.ts";
@@ -11,6 +10,17 @@ export interface LocalDraft {
   readonly sheet: Sheet;
 }
 
+const switchedOff = z.array(
+  z.object({
+    place: z.enum(["force", "base"]),
+    index: z.number().int(),
+    // Checked by `checkTerm`.
+    term: z.custom<Term>(),
+    origins: z.record(z.string(), z.custom<Origin>()),
+    units: z.record(z.string(), z.string()),
+  }),
+);
+
 const storedSchema = z.object({
   version: z.number().int(),
   base: z.unknown(),
@@ -20,8 +30,8 @@ const storedSchema = z.object({
   unread: z.record(z.string(), z.object({ text: z.string(), message: z.string() })),
   units: z.record(z.string(), z.string()),
   /** Terms that are switched off, now and in the version below. */
-  off: z.array(switchedOffSchema),
-  baseOff: z.array(switchedOffSchema),
+  off: switchedOff,
+  baseOff: switchedOff,
 });
 
 const keyOf = (accountId: string, scenarioId: string): string => `restband-draft ${accountId} ${scenarioId}`;

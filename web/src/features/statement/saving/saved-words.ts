@@ -6,16 +6,16 @@ interface SavedStateProps {
   canEdit: boolean;
   /** The role's name, for those who may only read. */
   role: string;
-  /** Whether the project is archived, so that nobody may change it until it is restored. */
-  isArchived?: boolean;
+  /** What is archived, so that nobody may change it until that is restored. */
+  archived?: "project" | "scenario" | null;
   /** Whether something was tried that is not the stored version. */
   isTrying: boolean;
   faults: number;
 }
 
 /** The state of saving in one short phrase, for the page's header. */
-export function savedWords({ saving, canEdit, role, isArchived, isTrying, faults }: SavedStateProps): string {
-  if (isArchived) return isTrying ? "not saved: the project is archived" : "the project is archived";
+export function savedWords({ saving, canEdit, role, archived, isTrying, faults }: SavedStateProps): string {
+  if (archived) return `${isTrying ? "not saved: " : ""}the ${archived} is archived`;
   if (!canEdit) return isTrying ? `not saved: you are a ${role}` : `you read this as a ${role}`;
   const open = faults > 0 ? `, ${faults === 1 ? "1 field" : `${faults} fields`} to put right` : "";
   return phrase(saving) + open;
