@@ -61,7 +61,8 @@ export {
   type CellFigures,
   type CellRefusal,
   type CellRow,
-} from "./explore/sweep/cell-row.ts";
+  type RowPlan,
+} from "./explore/cells/cell-row.ts";
 export type * from "./explore/threshold/threshold.ts";
 export type { Cure, Cures } from "./explore/threshold/cure.ts";
 export type { HoldingEnd, HoldingRange } from "./explore/threshold/holding-range.ts";
@@ -84,3 +85,7 @@ export { pythonGap } from "./script/not-covered.ts";
 export { thresholdSearch } from "./explore/threshold/threshold-search.ts";
 export { curesOf } from "./explore/threshold/cures.ts";
 export { holdingPaths, holdingRanges } from "./explore/threshold/holding-ranges.ts";
+export { drawScenario, drawsOf, type Draws } from "./explore/tolerance/draws.ts";
+export { runDraws, studyRows, type DrawSettings } from "./explore/tolerance/run-draws.ts";
+export { toleranceSummary } from "./explore/tolerance/summarise.ts";
+export { variedPaths } from "./explore/tolerance/tolerance-plan.ts";

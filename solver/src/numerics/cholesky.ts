@@ -21,3 +21,14 @@ export function choleskyOf(A: readonly (readonly number[])[]): number[][] | null
 /** L z of a lower triangle L. */
 export const lowerTimes = (L: readonly (readonly number[])[], z: readonly number[]): number[] =>
   L.map((row) => row.reduce((sum, value, k) => sum + value * z[k], 0));
+
+/** z with L z = b for a lower triangle L. */
+export function solveLower(L: readonly (readonly number[])[], b: readonly number[]): number[] {
+  const z: number[] = [];
+  for (const [i, row] of L.entries()) {
+    let rest = b[i];
+    for (let k = 0; k < i; k++) rest -= row[k] * z[k];
+    z.push(rest / row[i]);
+  }
+  return z;
+}

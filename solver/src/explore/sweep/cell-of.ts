@@ -3,8 +3,8 @@ import type { Records, Scenario } from "../../scenario/scenario.ts";
 import { unsupported } from "../../scenario/unsupported.ts";
 import { withValues } from "../links.ts";
 import { cellPlace, cellValues, sizesOf } from "./axis-values.ts";
-import { rowLength, type CellRefusal } from "./cell-row.ts";
-import { CellRunner } from "./run-tile.ts";
+import { rowLength, type CellRefusal } from "../cells/cell-row.ts";
+import { SweepRunner } from "./run-tile.ts";
 import type { SweepPlan } from "./sweep-plan.ts";
 
 /**
@@ -24,7 +24,7 @@ function startOf(
   index: number,
   records: Records | undefined,
 ): Scenario["initial"] {
-  const runner = new CellRunner(scenario, plan, records);
+  const runner = new SweepRunner(scenario, plan, records);
   const [first] = sizesOf(plan);
   const { places, isDown } = cellPlace(plan, index);
   const before = isDown ? first - 1 - places[0] : places[0];

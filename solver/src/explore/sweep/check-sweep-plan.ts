@@ -2,11 +2,11 @@ import type { Field } from "../../field.ts";
 import { isNumberOf } from "../../scenario/reading.ts";
 import type { Fault, Scenario } from "../../scenario/scenario.ts";
 import { numberSentence, quoted } from "../../scenario/sentences.ts";
-import { pathText } from "../../scenario/path.ts";
 import type { z } from "../../scenario/zod.ts";
 import { defaultLinks, linkFaults } from "../links.ts";
+import { shapeFaults } from "../shape-faults.ts";
 import { numericField } from "../../scenario/numeric-fields.ts";
-import { mostLimits } from "./cell-row.ts";
+import { mostLimits } from "../cells/cell-row.ts";
 import { mostCells, type SweepAxis, type SweepPlan, sweepPlanSchema } from "./sweep-plan.ts";
 
 const mostContinued = 4096;
@@ -37,8 +37,7 @@ type Issues = readonly z.core.$ZodIssue[];
 
 /** Every fault of a plan, in words: `issues` are what is wrong with its shape. */
 function sweepFaults(input: unknown, issues: Issues, scenario: Scenario): Fault[] {
-  if (issues.length > 0)
-    return issues.map(({ path, message }) => ({ path: pathText(path), message: inWords(message) }));
+  if (issues.length > 0) return shapeFaults(issues);
   const plan = input as SweepPlan;
   const varied = plan.axes.map(({ path }) => path);
   return [
@@ -59,9 +58,6 @@ function sweepFaults(input: unknown, issues: Issues, scenario: Scenario): Fault[
 
 const below = (path: string, faults: readonly Fault[]) =>
   faults.map((one) => ({ ...one, path: `${path}.${one.path}` }));
-
-/** What zod says of a shape, as a sentence. */
-const inWords = (message: string): string => (message.endsWith(".") ? message : `${message}.`);
 
 function sameTwice(paths: readonly string[]): Fault[] {
   if (paths.length < 2 || paths[0] !== paths[1]) return [];

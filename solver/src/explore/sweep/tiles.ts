@@ -1,5 +1,5 @@
 import { cellCount, sizesOf } from "./axis-values.ts";
-import { rowLength } from "./cell-row.ts";
+import { rowLength } from "../cells/cell-row.ts";
 import type { SweepPlan } from "./sweep-plan.ts";
 
 /*

@@ -1,16 +1,17 @@
 import { choleskyOf } from "../../numerics/cholesky.ts";
-import { pathText } from "../../scenario/path.ts";
 import type { Fault, Scenario } from "../../scenario/scenario.ts";
 import { quoted } from "../../scenario/sentences.ts";
 import type { z } from "../../scenario/zod.ts";
-import { linkFaults } from "../links.ts";
+import { defaultLinks, linkFaults } from "../links.ts";
+import { shapeFaults } from "../shape-faults.ts";
 import { numericField } from "../../scenario/numeric-fields.ts";
 import {
   type Distribution,
   type JointInput,
-  type RankCorrelation,
   type TolerancePlan,
+  correlationMatrix,
   tolerancePlanSchema,
+  variedPaths,
 } from "./tolerance-plan.ts";
 
 /** A plan, or every fault of it. */
@@ -22,20 +23,26 @@ export type CheckedTolerance = { readonly plan: TolerancePlan; readonly faults: 
  * with a sentence. Never throws.
  */
 export function checkTolerancePlan(input: unknown, scenario: Scenario): CheckedTolerance {
-  const plain = typeof input === "object" && input !== null && !Array.isArray(input);
-  const defaults = { correlations: [], joint: [], links: {}, sampling: "latin-hypercube", quantities: [], inputs: [] };
-  const completed = plain ? { ...defaults, ...input } : input;
+  const completed = completedPlan(input, scenario);
   const parsed = tolerancePlanSchema.safeParse(completed);
   const faults = toleranceFaults(completed, parsed.success ? [] : parsed.error.issues, scenario);
   return parsed.success && faults.length === 0 ? { plan: parsed.data, faults: [] } : { plan: null, faults };
+}
+
+function completedPlan(input: unknown, scenario: Scenario): unknown {
+  if (typeof input !== "object" || input === null || Array.isArray(input)) return input;
+  const lists = { inputs: [], correlations: [], joint: [], quantities: [] };
+  const whole = { ...lists, links: {}, sampling: "latin-hypercube", ...input };
+  // only a plan of the right shape tells what it varies
+  const { success, data } = tolerancePlanSchema.safeParse(whole);
+  return success && !("links" in input) ? { ...whole, links: defaultLinks(scenario, variedPaths(data)) } : whole;
 }
 
 type Issues = readonly z.core.$ZodIssue[];
 
 /** Every fault of a plan, in words: `issues` are what is wrong with its shape. */
 function toleranceFaults(input: unknown, issues: Issues, scenario: Scenario): Fault[] {
-  if (issues.length > 0)
-    return issues.map(({ path, message }) => ({ path: pathText(path), message: message.replace(/[^.]$/, "$&.") }));
+  if (issues.length > 0) return shapeFaults(issues);
   const plan = input as TolerancePlan;
   const varied = variedPaths(plan);
   return [
@@ -51,12 +58,6 @@ function toleranceFaults(input: unknown, issues: Issues, scenario: Scenario): Fa
 
 const below = (path: string, faults: readonly Fault[]) =>
   faults.map((one) => ({ ...one, path: `${path}.${one.path}` }));
-
-/** The paths of all that scatters, in the order of a draw's values. */
-export const variedPaths = ({ inputs, joint }: Pick<TolerancePlan, "inputs" | "joint">): string[] => [
-  ...inputs.map(({ path }) => path),
-  ...joint.flatMap(({ paths }) => paths),
-];
 
 function pathFaults({ inputs, joint }: TolerancePlan, scenario: Scenario): Fault[] {
   const places = [
@@ -121,11 +122,4 @@ function correlationFaults({ inputs, correlations }: TolerancePlan): Fault[] {
   if (single.length > 0 || correlations.length === 0) return single;
   if (choleskyOf(correlationMatrix(inputs.length, correlations)) !== null) return [];
   return [{ path: "correlations", message: "These correlations cannot all hold at once." }];
-}
-
-/** The symmetric matrix of rank correlations, 1 on its diagonal. */
-export function correlationMatrix(size: number, correlations: readonly RankCorrelation[]): number[][] {
-  const matrix = Array.from({ length: size }, (_, i) => Array.from({ length: size }, (__, j) => Number(i === j)));
-  for (const { first, second, value } of correlations) matrix[first][second] = matrix[second][first] = value;
-  return matrix;
 }

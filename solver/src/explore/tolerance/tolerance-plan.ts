@@ -90,3 +90,16 @@ export const tolerancePlanSchema: z.ZodType<TolerancePlan> = z.strictObject({
   sampling: z.enum(["latin-hypercube", "random"]),
   quantities: z.array(z.enum(quantityNames)),
 });
+
+/** The paths of all that scatters, in the order of a draw's values. */
+export const variedPaths = ({ inputs, joint }: Pick<TolerancePlan, "inputs" | "joint">): string[] => [
+  ...inputs.map(({ path }) => path),
+  ...joint.flatMap(({ paths }) => paths),
+];
+
+/** The symmetric matrix of rank correlations, 1 on its diagonal. */
+export function correlationMatrix(size: number, correlations: readonly RankCorrelation[]): number[][] {
+  const matrix = Array.from({ length: size }, (_, i) => Array.from({ length: size }, (__, j) => Number(i === j)));
+  for (const { first, second, value } of correlations) matrix[first][second] = matrix[second][first] = value;
+  return matrix;
+}

@@ -1,4 +1,5 @@
 import type { QuantityName } from "../../scenario/quantity-names.ts";
+import type { CellRefusal } from "../cells/cell-row.ts";
 import type { Outcome } from "../../result.ts";
 
 /** A number with the interval that covers it with 95 %. */
@@ -35,7 +36,7 @@ export interface QuantitySpread {
   /** By shares of the draws: 1, 2.5, 5, 10, 25, 50, 75, 90, 95, 97.5, 99 %. */
   readonly percentiles: readonly { readonly share: number; readonly value: number }[];
   readonly histogram: { readonly edges: readonly number[]; readonly counts: readonly number[] };
-  /** What matters, the input that matters most first. */
+  /** What matters, the input that matters most first (by variance share, else by the size of the rank correlation). */
   readonly influences: readonly Influence[];
   /** Mean after the first n draws, with its interval. */
   readonly convergence: readonly ConvergencePoint[];
@@ -57,7 +58,8 @@ export interface ConvergencePoint {
 
 export interface ToleranceSummary {
   readonly runs: number;
-  readonly refused: readonly { readonly reason: string; readonly count: number }[];
+  /** Draws without an outcome, by why; `first` is one of them, whose scenario tells more. */
+  readonly refused: readonly { readonly refusal: CellRefusal; readonly count: number; readonly first: number }[];
   /** One for each limit of the scenario: the probability that it is kept. */
   readonly limits: readonly { readonly kept: Share; readonly convergence: readonly ConvergencePoint[] }[];
   /** That all limits are kept together; null without limits. */

@@ -1,8 +1,13 @@
 import type { LimitVerdict, Outcome } from "../../result.ts";
-import type { SweepPlan } from "./sweep-plan.ts";
+import type { QuantityName } from "../../scenario/quantity-names.ts";
+
+/** What rows hold: the plan of a sweep or of a study. */
+export interface RowPlan {
+  readonly quantities: readonly QuantityName[];
+}
 
 /**
- * A cell as numbers, the row of a tile: `[outcome, limits, absent, quantity…]`. Never NaN.
+ * A cell of a sweep, or a draw of a study, as numbers: `[outcome, limits, absent, quantity…]`. Never NaN.
  *
  * - `outcome`: the place in `cellOutcomes`, or a negative code of `cellRefusals`: then all that follows is 0.
  * - `limits`: a digit to base 4 for each limit of the scenario, the first lowest: 1 kept, 2 broken, 3 cannot be judged.
@@ -13,7 +18,7 @@ export type CellRow = Float64Array;
 /** Numbers in front of the quantities. */
 export const rowHead = 3;
 
-export const rowLength = ({ quantities }: SweepPlan): number => rowHead + quantities.length;
+export const rowLength = ({ quantities }: RowPlan): number => rowHead + quantities.length;
 
 /** Outcomes by their code; the order is part of saved sweeps. */
 export const cellOutcomes = [
@@ -51,8 +56,8 @@ export interface CellFigures {
   readonly quantities: readonly (number | null)[];
 }
 
-/** Reads the row at an offset of a tile. @param limits how many limits the scenario has */
-export function readRow(row: Float64Array, offset: number, plan: SweepPlan, limits: number): CellFigures {
+/** Reads the row at an offset of many. @param limits how many limits the scenario has */
+export function readRow(row: Float64Array, offset: number, plan: RowPlan, limits: number): CellFigures {
   const code = row[offset];
   const isRefused = code < 0;
   return {
