@@ -1,4 +1,4 @@
-import { render, screen } from "@testing-library/react";
+import { fireEvent, render, screen } from "@testing-library/react";
 import userEvent from "@testing-library/user-event";
 import { afterEach, beforeEach, describe, expect, it, vi } from "vitest";
 import { useShortcut, useShortcutsDialog } from "../../../web/src/components/shortcuts.tsx";
@@ -30,6 +30,15 @@ function show() {
 }
 
 describe("shortcuts", () => {
+  it("are the same while Caps Lock turns letters round", () => {
+    const { onUndo, onNew } = show();
+    fireEvent.keyDown(document.body, { key: "Z", ctrlKey: true });
+    fireEvent.keyDown(document.body, { key: "N" });
+    expect([onUndo, onNew].map(({ mock }) => mock.calls.length)).toEqual([1, 1]);
+    fireEvent.keyDown(document.body, { key: "z", ctrlKey: true, shiftKey: true });
+    expect(onUndo).toHaveBeenCalledTimes(1);
+  });
+
   it("run while the component is there, and no longer", async () => {
     const { user, onNew, view } = show();
     await user.keyboard("n");

@@ -159,6 +159,15 @@ describe("the cursor", () => {
     expect(say(readings.friction)).toEqual(["friction −181.8 N", "heat in contact 0 W", "holds up to 296.5 N"]);
   });
 
+  it("reads a zero where sums leave a trillionth of the channel's peak", () => {
+    const range = { from: 0, to: feed.end };
+    const a = feed.samples.a.slice();
+    a[5] = 1e-12 * feed.peaks.a;
+    const noisy = { ...feed, samples: { ...feed.samples, a } };
+    const readings = readingsAt(noisy, frameOf(1160, range, scalesOf(feed, range)), feed.samples.t[5]);
+    expect(readings.velocity.find(({ name }) => name === "acceleration")).toMatchObject({ text: "0" });
+  });
+
   it("tells the phase and how long it has lasted", () => {
     expect(phaseWords(feed, 0.01)).toEqual({ phase: "stuck", since: " for 10\u00a0ms" });
     expect(phaseWords(feed, feed.eventTimes[1])).toEqual({ phase: "slipping forward", since: "" });

@@ -97,6 +97,19 @@ describe("the page of a scenario", () => {
     expect(screen.getByRole("note")).toHaveTextContent("An idealised body with one degree of freedom.");
   });
 
+  it("reads the answer out with what became of the limits, and anew after a change", async () => {
+    fakeServer(seen());
+    const { user } = openPage(at);
+    const told = () => screen.getAllByRole("status").map(({ textContent }) => textContent.replaceAll("\u00a0", " "));
+    await answer();
+    await waitFor(() =>
+      expect(told()).toContain("The carriage sticks and slips, 26 times a second. The limit is broken."),
+    );
+    await user.click(screen.getByRole("button", { name: /^Damping/ }));
+    await user.keyboard("8000{Enter}");
+    await waitFor(() => expect(told()).toContain("The carriage slides smoothly at 2 mm/s. The limit is kept."));
+  });
+
   it("answers anew with every change, and saves it over the version it was made from", async () => {
     const requests = fakeServer(seen());
     const { user } = openPage(at);

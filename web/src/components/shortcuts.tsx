@@ -44,7 +44,13 @@ const isPressing = ({ key, target }: KeyboardEvent): boolean =>
 
 function keysOf(event: KeyboardEvent): string {
   const held = event.ctrlKey || event.metaKey ? "Ctrl+" : "";
-  return held + (event.shiftKey && event.key.length > 1 ? "Shift+" : "") + event.key;
+  return held + (event.shiftKey && event.key.length > 1 ? "Shift+" : "") + letterOf(event);
+}
+
+/** A letter is large with Shift and small without, also while Caps Lock turns it round. */
+function letterOf({ key, shiftKey }: KeyboardEvent): string {
+  if (!/^\p{L}$/u.test(key)) return key;
+  return shiftKey ? key.toUpperCase() : key.toLowerCase();
 }
 
 function press(event: KeyboardEvent): void {

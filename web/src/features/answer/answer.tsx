@@ -1,4 +1,4 @@
-import { useMemo, type ReactNode } from "react";
+import { useEffect, useMemo, useState, type ReactNode } from "react";
 import { Button } from "../../components/button.tsx";
 import { classNames } from "../../components/class-names.ts";
 import { ErrorNote } from "../../components/error-note.tsx";
@@ -8,7 +8,7 @@ import { intervalsOf, shownEnd } from "../../compute/intervals.ts";
 import type { RangeRun } from "../../compute/use-ranges.ts";
 import type { Computed, Run } from "../../compute/use-run.ts";
 import { answerSentence } from "./answer-sentence.ts";
-import { leadLine } from "./lead-line.ts";
+import { leadLine, limitsLine } from "./lead-line.ts";
 import { LimitRulers } from "./limit-rulers.tsx";
 import { RangeCoverage } from "./range-coverage.tsx";
 import { rangesLine, type SayValue } from "./range-words.ts";
@@ -37,6 +37,7 @@ export function Answer({ run, before, ranges, say, sketch }: AnswerProps) {
           <p className="late text-24 text-quiet">Running the scenario</p>
         )}
       </div>
+      <ReadOut words={computed && !isStale ? answerWords(computed) : null} />
       {progress !== null && (
         <div className="late mt-4">
           <ProgressLine label="Running" fraction={progress} onCancel={run.cancel} />
@@ -60,10 +61,7 @@ function Computation({ computed, before, ranges, say, sketch }: Omit<AnswerProps
     <>
       <div className="grid gap-x-10 gap-y-6 wide:grid-cols-[minmax(0,1fr)_384px]">
         <div className="min-w-0">
-          <h1
-            className="max-w-[860px] text-24 leading-[1.35] font-semibold desk:text-34 desk:leading-[1.3]"
-            aria-live="polite"
-          >
+          <h1 className="max-w-[860px] text-24 leading-[1.35] font-semibold desk:text-34 desk:leading-[1.3]">
             {subject}
             <Verdict outcome={outcome}>{verdict}</Verdict>
             {after}
@@ -79,6 +77,31 @@ function Computation({ computed, before, ranges, say, sketch }: Omit<AnswerProps
       <RangeCoverage ranges={ranges} />
     </>
   );
+}
+
+/** ms without another change until an answer is read out. */
+const SETTLED = 700;
+
+/** Reads an answer out once it has stood for a moment: not each one on the way of a drag. Null while a run goes on. */
+function ReadOut({ words }: { words: string | null }) {
+  const [told, setTold] = useState("");
+  useEffect(() => {
+    if (words === null) return;
+    const timer = setTimeout(() => setTold(words), SETTLED);
+    return () => clearTimeout(timer);
+  }, [words]);
+  return (
+    <p role="status" className="sr-only">
+      {told}
+    </p>
+  );
+}
+
+/** The sentence and what became of the limits, as they are read out. */
+function answerWords({ scenario, ...outcome }: Computed): string {
+  if (!("result" in outcome)) return "There is no answer to this yet.";
+  const { before, verdict, after } = answerSentence(scenario, outcome.result);
+  return `${before}${verdict}${after} ${limitsLine(scenario, outcome.result.limits)}`.trim();
 }
 
 /** A valid scenario without an answer here: what is missing is said at the part of the statement it concerns. */

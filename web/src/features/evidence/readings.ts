@@ -20,7 +20,7 @@ export function readingsAt(
   t: number,
   overlays: readonly Overlay[] = [],
 ): Record<PanelKey, CursorReading[]> {
-  const here = instantAt(view.samples, t);
+  const here = withoutNoise(instantAt(view.samples, t), view);
   const unitOf = (key: PanelKey): Unit | undefined => unitIn(frame, key);
   const others = (channel: "x" | "v"): CursorReading[] =>
     overlays.flatMap((overlay) => overlayReading(view, frame, t, overlay, channel) ?? []);
@@ -43,6 +43,15 @@ export function readingsAt(
       ? [reading(view, view.drive.name, view.drive.at(here), "force", "ink", { unit: unitOf("drive") })]
       : [],
   };
+}
+
+/** Share of a channel's peak below which a figure is what sums leave of a zero. */
+const NOISE = 1e-10;
+
+function withoutNoise(here: Instant, { peaks }: RunView): Instant {
+  const clean = (channel: "x" | "v" | "a" | "f"): number =>
+    Math.abs(here[channel]) <= NOISE * peaks[channel] ? 0 : here[channel];
+  return { ...here, x: clean("x"), v: clean("v"), a: clean("a"), f: clean("f") };
 }
 
 const unitIn = (frame: Frame, key: PanelKey): Unit | undefined => frame.panels.find((panel) => panel.key === key)?.unit;

@@ -3,11 +3,15 @@ import { inputsOf, type Inputs } from "../../compute/inputs.ts";
 import { intervalsOf, shownEnd, type Interval } from "../../compute/intervals.ts";
 import { driveForceOf, type DriveForce } from "./drive-force.ts";
 
+type Channel = "x" | "v" | "a" | "f";
+
 /** A run made ready to be looked at: everything that does not hang on what part of it is seen. */
 export interface RunView {
   readonly scenario: Scenario;
   readonly result: Result;
   readonly samples: Samples;
+  /** The largest size of each channel over the run: what is a ten-billionth of it is noise. */
+  readonly peaks: Readonly<Record<Channel, number>>;
   readonly intervals: readonly Interval[];
   readonly inputs: Inputs;
   /** The force that drives the body; null where nothing does, or where it cannot be told. */
@@ -33,6 +37,7 @@ export function runViewOf(scenario: Scenario, result: Result): RunView | null {
     scenario,
     result,
     samples: held,
+    peaks: { x: peakOf(held.x), v: peakOf(held.v), a: peakOf(held.a), f: peakOf(held.f) },
     intervals: intervalsOf(held, end),
     inputs,
     drive: driveForceOf(scenario, inputs),
@@ -42,6 +47,8 @@ export function runViewOf(scenario: Scenario, result: Result): RunView | null {
     end,
   };
 }
+
+const peakOf = (values: Float64Array): number => values.reduce((peak, value) => Math.max(peak, Math.abs(value)), 0);
 
 /** A body that rests goes on standing to the end of what is shown. */
 function standingOn(samples: Samples, end: number): Samples {

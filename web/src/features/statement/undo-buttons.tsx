@@ -9,6 +9,7 @@ export function UndoButtons({ draft, dispatch }: { draft: Draft; dispatch: Dispa
   const redo = (): void => dispatch({ type: "redo" });
   useShortcut("Ctrl+z", "Undo", undo);
   useShortcut("Ctrl+Z", "Redo", redo);
+  useShortcut("Ctrl+y", "Redo", redo);
   return (
     <span className="flex">
       <Button kind="quiet" aria-label="Undo" title="Undo" disabled={draft.past.length === 0} onClick={undo}>
