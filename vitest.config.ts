@@ -11,11 +11,13 @@ const minutes = (n: number) => n * 60_000;
 export default defineConfig({
   test: {
     projects: [
-      project("unit", ["test/solver/**/*.test.ts", "test/laws/**/*.test.ts"]),
+      // generous: a shared machine may be ten times slower for a while, and no test asserts a time
+      project("unit", ["test/solver/**/*.test.ts", "test/laws/**/*.test.ts"], { testTimeout: minutes(1) }),
       project("reference", ["test/reference/**/*.test.ts"], { testTimeout: minutes(1) }),
       {
         ...project("web", ["test/web/**/*.test.{ts,tsx}"], {
           environment: "jsdom",
+          testTimeout: minutes(1),
           setupFiles: ["test/support/web.ts"],
         }),
         oxc: { jsx: { runtime: "automatic" as const } },

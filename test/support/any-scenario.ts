@@ -137,8 +137,10 @@ function sketch(s: Scale): fc.Arbitrary<object> {
     velocity: signed(orZero(unit)).map((u) => (u * s.stretch) / periodOf(s)),
     solid: solidOf(s),
     untilRest: fc.boolean(),
+    radius: fc.constantFrom(null, null, null, null, 0.25, 3),
   });
-  return cases.map((c) => ({
+  const linear = cases.map((c) => ({
+    radius: c.radius,
     format: "restband-scenario/1",
     motion: "linear",
     body: {
@@ -163,10 +165,35 @@ function sketch(s: Scale): fc.Arbitrary<object> {
     initial: { displacement: c.displacement, velocity: c.velocity },
     span: { seconds: 4 * periodOf(s), untilRest: c.untilRest, maxEvents: 500, maxWork: 200_000 },
   }));
+  return linear.map(({ radius, ...scenario }) => (radius === null ? scenario : turning(scenario, radius)));
+}
+
+/** The same numbers as a body that turns, rubbed at a radius: pressed the less the further out, so that the grip is the same. */
+function turning<Linear extends { force: object[]; contact: { law: object; normal: Record<string, unknown> } }>(
+  { contact, ...linear }: Linear,
+  radius: number,
+): object {
+  const { normal } = contact;
+  const ripple = normal.ripple as { amplitude: number } | null;
+  return {
+    ...linear,
+    motion: "angular",
+    incline: 0,
+    force: linear.force.filter((term) => (term as { kind: string }).kind !== "unbalance"),
+    contact: {
+      ...contact,
+      radius,
+      normal: {
+        ...normal,
+        preload: (normal.preload as number) / radius,
+        ripple: ripple && { ...ripple, amplitude: ripple.amplitude / radius },
+      },
+    },
+  };
 }
 
 /**
  * Valid scenarios that can be computed, of every law, excitation, counterface and solid model, short and small: cubic springs (softening ones run
- * away), ripples that let the contact go, inclines; m from 1e-6 to 1e6, four decades of frequency, forces about the friction.
+ * away), ripples that let the contact go, inclines, bodies that turn; m from 1e-6 to 1e6, four decades of frequency, forces about the friction.
  */
 export const anyScenario: fc.Arbitrary<Scenario> = scaled(sketch).filter((scenario) => unsupported(scenario) === null);

@@ -63,31 +63,36 @@ export interface Units {
   mass: number;
 }
 
-/** The size of a dimension of a linear body in new units per old one. */
-function unitOf(dimension: Dimension, { length, time, mass }: Units): number {
-  const force = (mass * length) / time ** 2;
+/** The unit of x: a length of a body that slides, none of one that turns. */
+export const unitOfPlace = ({ motion }: Pick<Scenario, "motion">, { length }: Units): number =>
+  motion === "angular" ? 1 : length;
+
+/** The size of a dimension in new units per old one, `place` being that of x. */
+function unitOf(dimension: Dimension, { length, time, mass }: Units, place: number): number {
+  const pressing = (mass * length) / time ** 2;
+  const force = (pressing * length) / place;
   const sizes: Record<Dimension, number> = {
     none: 1,
     angle: 1,
-    inertia: mass,
+    inertia: mass * (length / place) ** 2,
     mass,
-    stiffness: force / length,
-    bristleStiffness: force / length,
-    cubicStiffness: force / length ** 3,
-    damping: (force * time) / length,
-    fluidDamping: (force * time) / length,
-    displacement: length,
+    stiffness: force / place,
+    bristleStiffness: pressing / length,
+    cubicStiffness: force / place ** 3,
+    damping: (force * time) / place,
+    fluidDamping: (pressing * time) / length,
+    displacement: place,
     length,
-    velocity: length / time,
+    velocity: place / time,
     slidingVelocity: length / time,
-    acceleration: length / time ** 2,
+    acceleration: place / time ** 2,
     force,
-    pressing: force,
+    pressing,
     forceRate: force / time,
     frequency: 1 / time,
     time,
-    power: (force * length) / time,
-    energy: force * length,
+    power: (force * place) / time,
+    energy: force * place,
   };
   return sizes[dimension];
 }
@@ -95,7 +100,9 @@ function unitOf(dimension: Dimension, { length, time, mass }: Units): number {
 /** The same told in other units; a scenario without weight, whose g is a number of its own. */
 export function inUnits(scenario: Scenario, units: Units): Scenario {
   const { body, contact, initial, span } = scenario;
-  const as = (dimension: Dimension, value: number): number => value * unitOf(dimension, units);
+  const place = unitOfPlace(scenario, units);
+  const sizeOf: SizeOf = (dimension) => unitOf(dimension, units, place);
+  const as = (dimension: Dimension, value: number): number => value * sizeOf(dimension);
   const { ripple } = contact.normal;
   const law = frictionLaws.find(({ model }) => model === contact.law.model)!;
   const solid = solidDampings.find(({ model }) => model === scenario.solid.model)!;
@@ -108,10 +115,11 @@ export function inUnits(scenario: Scenario, units: Units): Scenario {
       cubic: as("cubicStiffness", body.cubic),
       viscous: as("damping", body.viscous),
     },
-    solid: kindInUnits(scenario.solid, solid, units),
+    solid: kindInUnits(scenario.solid, solid, sizeOf),
     contact: {
       ...contact,
-      law: kindInUnits(contact.law, law, units),
+      radius: scenario.motion === "angular" ? as("length", contact.radius) : 1,
+      law: kindInUnits(contact.law, law, sizeOf),
       normal: {
         ...contact.normal,
         preload: as("pressing", contact.normal.preload),
@@ -123,8 +131,8 @@ export function inUnits(scenario: Scenario, units: Units): Scenario {
       },
       counterface: typeof counterface === "object" ? { velocity: as("velocity", counterface.velocity) } : counterface,
     },
-    force: scenario.force.map((term) => termInUnits(term, units, "force")),
-    base: scenario.base.map((term) => termInUnits(term, units, "displacement")),
+    force: scenario.force.map((term) => termInUnits(term, sizeOf, "force")),
+    base: scenario.base.map((term) => termInUnits(term, sizeOf, "displacement")),
     initial: {
       displacement: as("displacement", initial.displacement),
       velocity: as("velocity", initial.velocity),
@@ -134,12 +142,14 @@ export function inUnits(scenario: Scenario, units: Units): Scenario {
   };
 }
 
-function termInUnits(term: Term, units: Units, place: "force" | "displacement"): Term {
+type SizeOf = (dimension: Dimension) => number;
+
+function termInUnits(term: Term, sizeOf: SizeOf, place: "force" | "displacement"): Term {
   const kind = excitationTerms.find((one) => one.kind === term.kind)!;
   // members of a term that is F or y alike are described as forces
   const placed: Partial<Record<Dimension, Dimension>> =
     place === "force" ? {} : { force: "displacement", forceRate: "velocity" };
-  return kindInUnits(term, kind, units, (dimension) => placed[dimension] ?? dimension);
+  return kindInUnits(term, kind, (dimension) => sizeOf(placed[dimension] ?? dimension));
 }
 
 interface Described {
@@ -148,13 +158,8 @@ interface Described {
   readonly choices?: readonly { readonly key: string; readonly options: readonly { readonly field?: Field }[] }[];
 }
 
-function kindInUnits<Kind>(
-  kind: Kind,
-  { fields, rows, choices = [] }: Described,
-  units: Units,
-  placed = (dimension: Dimension): Dimension => dimension,
-): Kind {
-  const sizeOf = ({ dimension }: Field): number => unitOf(placed(dimension), units);
+function kindInUnits<Kind>(kind: Kind, { fields, rows, choices = [] }: Described, size: SizeOf): Kind {
+  const sizeOf = ({ dimension }: Field): number => size(dimension);
   const told: Numbers = { ...(kind as Numbers) };
   for (const field of fields) {
     const value = told[field.key];

@@ -242,7 +242,7 @@ export class Inputs {
     const c = Math.cos(w * tau);
     const s = Math.sin(w * tau);
     const ripple = this.rippleRe * c - this.rippleIm * s;
-    v.normal += ripple;
+    v.normal = Math.max(0, v.normal + ripple); // 0 to rounding where the contact is about to go
     v.normalRate -= w * (this.rippleRe * s + this.rippleIm * c);
     v.normalSecond -= w * w * ripple;
     if (!this.isInContact) v.normal = v.normalRate = v.normalSecond = 0;

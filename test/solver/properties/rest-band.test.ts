@@ -29,11 +29,11 @@ function inBand(drawn: Scenario, place: number, push: number, swing: number): Sc
   };
 }
 
-/** μs N, N. */
+/** μs N r, N or N·m. */
 function holdingForce({ contact }: Scenario): number {
   const { law, normal } = contact;
   const atRest = law.model === "table" ? law.points[0][1] : "static" in law ? law.static : 0;
-  return atRest * normal.preload * normal.faces;
+  return atRest * normal.preload * normal.faces * contact.radius;
 }
 
 function run(scenario: Scenario): Result {

@@ -3,7 +3,7 @@ import { simulate, type Result, type Scenario } from "@restband/solver";
 import { expect, test } from "vitest";
 import { anyScenario } from "../../support/any-scenario.ts";
 import { propertyRuns, propertyTimeout } from "../../support/property-runs.ts";
-import { inUnits, type Units } from "../../support/transformed.ts";
+import { inUnits, unitOfPlace, type Units } from "../../support/transformed.ts";
 
 function run(scenario: Scenario): Result {
   const result = simulate(scenario, { samples: 0, quantities: ["peakAcceleration", "stickFraction"], energy: false });
@@ -11,17 +11,17 @@ function run(scenario: Scenario): Result {
   return result;
 }
 
-const account = ({ ended, outcome, events, quantities }: Result, { length, time, mass }: Units) => ({
+const account = ({ ended, outcome, events, quantities }: Result, place: number, { length, time, mass }: Units) => ({
   ended,
   outcome,
   events: events.map(({ t, kind, x, v, f }) => ({
     kind,
     t: t * time,
-    x: x * length,
-    v: (v * length) / time,
-    f: (f * mass * length) / time ** 2,
+    x: x * place,
+    v: (v * place) / time,
+    f: (f * mass * length ** 2) / time ** 2 / place,
   })),
-  peakAcceleration: (quantities.peakAcceleration! * length) / time ** 2,
+  peakAcceleration: (quantities.peakAcceleration! * place) / time ** 2,
   stickFraction: quantities.stickFraction,
 });
 
@@ -36,7 +36,8 @@ test(
     fc.assert(
       fc.property(anyScenario, units, (drawn, told) => {
         const scenario: Scenario = { ...drawn, incline: 0 };
-        expect(account(run(inUnits(scenario, told)), one)).toEqual(account(run(scenario), told));
+        const place = unitOfPlace(scenario, told);
+        expect(account(run(inUnits(scenario, told)), 1, one)).toEqual(account(run(scenario), place, told));
       }),
       propertyRuns,
     );

@@ -77,7 +77,7 @@ export class BristleBody {
     const speed = Math.max(Math.abs(y[1]), Math.abs(problem.beltVelocity), Math.abs(v.baseVelocity));
     // without a spring the place does not matter
     const stretch = problem.stiffness > 0 || problem.cubic !== 0 ? Math.abs(y[0]) : 0;
-    const size = Math.max(stretch, bending * problem.radius, speed / rate) || 1;
+    const size = Math.max(stretch, bending / problem.radius, speed / rate) || 1;
     return [size, size * rate, bending || size];
   }
 }

@@ -275,16 +275,21 @@ export class IntegratedSlip implements Slip {
     return own > 0 ? own : 4 / problem.seconds;
   }
 
-  /** Typical d and ḋ, m and m/s. */
+  /** Typical d and ḋ, m and m/s. Neither a place without a spring nor a counterface that runs by tells how far things go. */
   private sizes(rate: number): number[] {
     const { stance, body, problem } = this;
     const v = this.inputs.evaluate(0);
-    const force = Math.abs(v.force) + problem.law.atRest * problem.radius * v.normal;
-    const speed = Math.max(Math.abs(stance.velocity), Math.abs(problem.beltVelocity), Math.abs(v.baseVelocity));
-    const inputs = force / body.inertia / rate ** 2 + this.inputs.baseBound(0);
-    // without a spring the place does not matter
+    const push = (Math.abs(v.force) + problem.law.atRest * problem.radius * v.normal) / body.inertia;
     const stretch = body.stiffness > 0 || body.cubic !== 0 ? Math.abs(stance.position) : 0;
-    const size = Math.max(stretch, speed / rate, inputs) || 1;
-    return [size, size * rate];
+    const swing = Math.max(stretch, this.inputs.baseBound(0));
+    const speed = Math.max(Math.abs(stance.velocity), push / Math.max(rate, this.lawRate(v.normal)), swing * rate);
+    return speed > 0 ? [Math.max(swing, speed / rate), speed] : [1, rate];
+  }
+
+  /** The rate at which friction that rises with speed slows the body down, 1/s; 0 where it does not rise. */
+  private lawRate(normal: number): number {
+    const { law, radius, inertia } = this.problem;
+    const slope = law.slope(radius * Math.abs(this.stance.slip)) * normal;
+    return slope > 0 && Number.isFinite(slope) ? (radius ** 2 * slope) / inertia : 0;
   }
 }
