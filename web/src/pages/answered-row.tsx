@@ -1,20 +1,23 @@
-import type { ScenarioSummary } from "@restband/api/contract";
+import type { RevisionSummary, ScenarioSummary } from "@restband/api/contract";
 import { memo, type ReactNode } from "react";
 import { SentenceGlance, StripGlance } from "../features/answer/answer-glance.tsx";
 import type { Glance } from "../features/project-home/glances/glance-book.ts";
 import { LimitsLine } from "../features/project-home/limits-line.tsx";
+import { RevisionStanding } from "../features/revision/revision-standing.tsx";
 import { ScenarioRow } from "../features/project-home/scenario-row.tsx";
 
 interface AnsweredRowProps {
   projectId: string;
   summary: ScenarioSummary;
   ownId: string;
+  /** Of this scenario, newest first. */
+  revisions: readonly RevisionSummary[];
   glance: Glance | undefined;
   menu: ReactNode;
 }
 
 /** A row of the project home with its answer, as far as it is computed. */
-export function AnsweredRow({ projectId, summary, ownId, glance, menu }: AnsweredRowProps) {
+export function AnsweredRow({ projectId, summary, ownId, revisions, glance, menu }: AnsweredRowProps) {
   const computed = glance?.computed;
   return (
     <ScenarioRow
@@ -24,6 +27,7 @@ export function AnsweredRow({ projectId, summary, ownId, glance, menu }: Answere
       strip={glance && <Strip glance={glance} />}
       sentence={<Sentence glance={glance} />}
       limits={computed && "result" in computed && <LimitsLine limits={computed.result.limits} />}
+      state={revisions.length > 0 && <RevisionStanding revisions={revisions} digest={summary.digest} />}
       menu={menu}
     />
   );

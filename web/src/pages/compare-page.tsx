@@ -15,7 +15,7 @@ import { useRun, type Computed } from "../compute/use-run.ts";
 import { WorkHeader } from "../features/account/work-header.tsx";
 import { SentenceGlance, StripGlance } from "../features/answer/answer-glance.tsx";
 import { AnswersTable } from "../features/compare/answers-table.tsx";
-import { compareAnswers } from "../features/compare/compare-answers.ts";
+import { compareAnswers, comparisonWords, type AnswerComparison } from "../features/compare/compare-answers.ts";
 import { compareFields } from "../features/compare/compare-fields.ts";
 import {
   compareChoices,
@@ -59,6 +59,10 @@ export function ComparePage() {
   const swap = (): void => setSearch({ a: references[1] ?? "", b: references[0] ?? "" }, { replace: true });
   const [cursor] = useState(() => sharedValue<number | null>(null));
   const isReady = first.subject !== null && second.subject !== null;
+  const answers = useMemo(
+    () => (first.result && second.result ? compareAnswers(first.result, second.result) : null),
+    [first.result, second.result],
+  );
   return (
     <>
       <title>{`Compare · ${project.name} · Restband`}</title>
@@ -74,7 +78,7 @@ export function ComparePage() {
       />
       <WorkedPage key={units} className="max-desk:pb-40">
         <Section name="Compare" help="The link to this page works for every member of the project.">
-          <h1 className="sr-only">Compare</h1>
+          <h1 className="mb-6 text-24 font-semibold">{answers ? comparisonWords(answers) : "Two side by side"}</h1>
           <div className="grid gap-x-10 gap-y-8 desk:grid-cols-2">
             {([first, second] as const).map((side, i) => (
               <SideHead
@@ -91,7 +95,7 @@ export function ComparePage() {
             ))}
           </div>
         </Section>
-        {isReady && <Differences first={first} second={second} />}
+        {isReady && <Differences first={first} second={second} answers={answers} />}
         {isReady && <Motions first={first} second={second} cursor={cursor} />}
       </WorkedPage>
     </>
@@ -155,17 +159,13 @@ function namesOf(a: CompareSubject, b: CompareSubject): [string, string] {
 const longName = ({ name, title, revision }: CompareSubject): string =>
   revision ? `${title}, ${name.toLowerCase()}` : title;
 
-function Differences({ first, second }: { first: Side; second: Side }) {
+function Differences({ first, second, answers }: { first: Side; second: Side; answers: AnswerComparison | null }) {
   const [a, b] = [first.subject, second.subject];
   const fields = useMemo(() => {
     if (!a || !b) return null;
     const work = ({ scenario }: CompareSubject) => ({ content: scenario, switchedOff: [] });
     return compareFields(a.scenario, b.scenario, differencesOf(work(a), work(a), work(b)), fieldWords);
   }, [a, b]);
-  const answers = useMemo(
-    () => (first.result && second.result ? compareAnswers(first.result, second.result) : null),
-    [first.result, second.result],
-  );
   if (!a || !b || !fields) return null;
   const names = namesOf(a, b);
   return (

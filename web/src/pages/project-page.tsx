@@ -1,9 +1,10 @@
-import type { ScenarioSummary } from "@restband/api/contract";
-import { useSuspenseQueries } from "@tanstack/react-query";
-import { useState } from "react";
+import type { RevisionSummary, ScenarioSummary } from "@restband/api/contract";
+import { useQuery, useSuspenseQueries } from "@tanstack/react-query";
+import { useMemo, useState } from "react";
 import { useNavigate, useParams } from "react-router-dom";
 import { membersQuery } from "../api/members.ts";
 import { projectQuery } from "../api/projects.ts";
+import { revisionsQuery } from "../api/revisions.ts";
 import { scenariosQuery } from "../api/scenarios.ts";
 import { useAccount } from "../api/session.ts";
 import { Button, ButtonLink } from "../components/button.tsx";
@@ -19,8 +20,11 @@ import { PeopleColumn } from "../features/project-home/people-column.tsx";
 import { ProjectAbout } from "../features/project-home/project-about.tsx";
 import { ProjectScenarios } from "../features/project-home/project-scenarios.tsx";
 import { mayEdit } from "../features/project-home/roles.ts";
+import { byScenario } from "../features/revision/by-scenario.ts";
 import { paths } from "../paths.ts";
 import { AnsweredRow } from "./answered-row.tsx";
+
+const none: readonly RevisionSummary[] = [];
 
 /** One project: its scenarios with their answers, its people, and what they did lately. */
 export function ProjectPage() {
@@ -31,6 +35,8 @@ export function ProjectPage() {
   const { id: ownId } = useAccount();
   const navigate = useNavigate();
   const glances = useGlances(projectId);
+  const { data: revisions } = useQuery(revisionsQuery(projectId));
+  const frozen = useMemo(() => byScenario(revisions ?? []), [revisions]);
   const begin = () => void navigate(paths.newScenario(projectId));
   const [isImporting, setImporting] = useState(false);
   const canEdit = mayEdit(project.role) && project.archivedAt === null;
@@ -65,7 +71,13 @@ export function ProjectPage() {
             glances={glances}
             ownId={ownId}
             canEdit={canEdit}
-            row={(summary, glance, menu) => <AnsweredRow projectId={projectId} {...{ summary, ownId, glance, menu }} />}
+            row={(summary, glance, menu) => (
+              <AnsweredRow
+                projectId={projectId}
+                revisions={frozen.get(summary.id) ?? none}
+                {...{ summary, ownId, glance, menu }}
+              />
+            )}
             empty={
               <EmptyState action={newButton}>
                 {canEdit

@@ -52,7 +52,9 @@ export function RevisionPage() {
 
 /** Puts units in force as long as the page is open; false until they are, so that nothing is told in others. */
 function useLentUnits(units: UnitSystem): boolean {
-  useLayoutEffect(() => lendUnitSystem(units), [units]);
+  const own = ownUnitSystem();
+  // Anew where the person chooses other units meanwhile: that is no choice for this page.
+  useLayoutEffect(() => lendUnitSystem(units), [units, own]);
   return useUnitSystem() === units;
 }
 
@@ -91,11 +93,14 @@ function OpenRevision({ project, revision, children }: OpenRevisionProps) {
         ]}
         title={`Revision ${number}`}
         actions={
-          <ButtonLink
-            to={paths.compare(projectId, compareReference.revision(id), compareReference.scenario(scenarioId))}
-          >
-            Compare
-          </ButtonLink>
+          <>
+            <ButtonLink to={`${paths.scenario(projectId, scenarioId)}#revisions`}>All revisions</ButtonLink>
+            <ButtonLink
+              to={paths.compare(projectId, compareReference.revision(id), compareReference.scenario(scenarioId))}
+            >
+              Compare
+            </ButtonLink>
+          </>
         }
       />
       <WorkedPage className="max-desk:pb-40">

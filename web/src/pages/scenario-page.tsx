@@ -1,5 +1,4 @@
 import type { Project, StoredScenario } from "@restband/api/contract";
-import type { Scenario } from "@restband/solver";
 import { useSuspenseQueries } from "@tanstack/react-query";
 import { Suspense, useCallback, useMemo, useState } from "react";
 import { useParams } from "react-router-dom";
@@ -9,7 +8,7 @@ import { useAccount } from "../api/session.ts";
 import { Section, WorkedPage } from "../components/section.tsx";
 import { samplesFor } from "../compute/samples-for.ts";
 import { useRanges } from "../compute/use-ranges.ts";
-import { useRun, type Computed, type Run } from "../compute/use-run.ts";
+import { useRun, type Computed } from "../compute/use-run.ts";
 import { UnitsChoice } from "../features/account/units-choice.tsx";
 import { WorkHeader } from "../features/account/work-header.tsx";
 import { Answer } from "../features/answer/answer.tsx";
@@ -18,7 +17,7 @@ import { runViewOf, type RunView } from "../features/evidence/run-view.ts";
 import { takeValues } from "../features/statement/changes.ts";
 import { savedWords } from "../features/statement/saving/saved-words.ts";
 import { useDraft } from "../features/statement/saving/use-draft.ts";
-import { isSameScenario, isSameWork } from "../features/statement/saving/differences.ts";
+import { isSameWork } from "../features/statement/saving/differences.ts";
 import { sayField } from "../features/statement/say-field.ts";
 import { Statement } from "../features/statement/statement.tsx";
 import { UndoButtons } from "../features/statement/undo-buttons.tsx";
@@ -36,7 +35,7 @@ const ScenarioExchange = lazyPart(
   async () => (await import("../features/statement/exchange/scenario-exchange.tsx")).ScenarioExchange,
 );
 const Evidence = lazyPart(async () => (await import("../features/evidence/evidence.tsx")).Evidence);
-const RevisionsPart = lazyPart(async () => (await import("./revisions-part.tsx")).RevisionsPart);
+const RevisionsSection = lazyPart(async () => (await import("./revisions-section.tsx")).RevisionsSection);
 const Checks = lazyPart(async () => (await import("../features/checks/checks.tsx")).Checks);
 const EventTable = lazyPart(async () => (await import("../features/evidence/event-table.tsx")).EventTable);
 const ReckoningLinks = lazyPart(async () => (await import("../features/reckoning/reckoning-links.tsx")).ReckoningLinks);
@@ -136,20 +135,9 @@ function OpenScenario({ project, stored }: { project: Project; stored: StoredSce
             <ScenarioExchange scenario={inForce} dispatch={dispatch} />
           </Suspense>
         </Section>
-        <Section id="revisions" name="Revisions" help="Frozen for a review or for the record.">
-          <Suspense fallback={<div className="min-h-16" />}>
-            <RevisionsPart
-              projectId={project.id}
-              scenarioId={stored.id}
-              ownId={accountId}
-              digest={stored.digest}
-              canEdit={canEdit}
-              subject={() =>
-                freezableOf(stored, run, inForce, { isSaved: saving.kind === "saved", faults: faults.length })
-              }
-            />
-          </Suspense>
-        </Section>
+        <Suspense fallback={<div className="min-h-40" />}>
+          <RevisionsSection {...{ stored, ownId: accountId, canEdit, run, inForce, saving, faults: faults.length }} />
+        </Suspense>
         <RunSections key={`run ${units}`} computed={run.computed} view={view} cursor={cursor} isStale={run.isStale} />
       </WorkedPage>
       {saving.kind === "conflict" && (
@@ -171,23 +159,6 @@ function useBeforeEdit(computed: Computed | null, isEditing: boolean): Computed 
   const [settled, setSettled] = useState(computed);
   if (!isEditing && settled !== computed) setSettled(computed);
   return isEditing && settled !== computed ? settled : null;
-}
-
-interface Standing {
-  isSaved: boolean;
-  faults: number;
-}
-
-/** What can be frozen: the stored version with its answer; a sentence where there is no such thing just now. */
-function freezableOf(stored: StoredScenario, run: Run, inForce: Scenario, { isSaved, faults }: Standing) {
-  const { computed, isStale } = run;
-  if (faults > 0) return "Put every field right first: what is frozen is what is shown.";
-  if (!isSaved || !isSameScenario(inForce, stored.content))
-    return "The last change is not saved yet. Try again in a moment.";
-  if (!computed || isStale) return "The answer is not there yet. Try again in a moment.";
-  if ("refusal" in computed) return "This version computes no answer to it, so there is nothing to freeze.";
-  const { projectId, id: scenarioId, version, digest } = stored;
-  return { projectId, scenarioId, version, digest, scenario: computed.scenario, result: computed.result };
 }
 
 /** The run made ready to be looked at; null without one that has samples. */

@@ -12,6 +12,9 @@ interface AnswersTableProps {
   motion: Scenario["motion"];
 }
 
+/** Long names wrap, so that the verdicts stay in sight. */
+const narrow = "whitespace-normal! max-w-40";
+
 /** What came of the one and of the other: outcome, quantities that differ, and what has become of each limit. */
 export function AnswersTable({ comparison: { outcomes, rows, same }, names, motion }: AnswersTableProps) {
   const value = (which: 0 | 1) => (row: AnswerRow | null) => {
@@ -22,8 +25,8 @@ export function AnswersTable({ comparison: { outcomes, rows, same }, names, moti
   };
   const columns: Column<AnswerRow | null>[] = [
     { key: "label", head: "What came out", cell: (row) => row?.label ?? "Outcome" },
-    { key: "a", head: names[0], isFigure: true, cell: value(0) },
-    { key: "b", head: names[1], isFigure: true, cell: value(1), className: "font-semibold" },
+    { key: "a", head: names[0], isFigure: true, cell: value(0), className: narrow },
+    { key: "b", head: names[1], isFigure: true, cell: value(1), className: `${narrow} font-semibold` },
     { key: "limit", head: "limit", cell: (row) => row?.limit && <StateMark {...row.limit} /> },
   ];
   return (

@@ -1,5 +1,6 @@
 import { quantities, type LimitVerdict, type Result } from "@restband/solver";
 import { outcomeWords } from "../../format/outcomes.ts";
+import { capitalised, listed, sayMany } from "../../format/words.ts";
 
 /** What two runs came to in one quantity. */
 export interface AnswerRow {
@@ -36,6 +37,17 @@ export function compareAnswers(a: Result, b: Result): AnswerComparison {
     same: rows.length - told.length,
   };
 }
+
+/** The comparison in a sentence or two: what has become of the outcome, and of the limits. */
+export function comparisonWords({ outcomes: [a, b], rows }: AnswerComparison): string {
+  const outcome = a === b ? `Both: ${a}.` : `The first: ${a}. The second: ${b}.`;
+  const count = (word: string) => rows.filter(({ limit }) => limit?.word === word).length;
+  const limits = [limitCount(count("now kept"), "kept"), limitCount(count("now broken"), "broken")].filter(Boolean);
+  return [outcome, limits.length > 0 ? `${capitalised(listed(limits))}.` : ""].filter(Boolean).join(" ");
+}
+
+const limitCount = (count: number, word: string): string =>
+  count === 0 ? "" : `${sayMany(count, "limit")} ${count === 1 ? "is" : "are"} now ${word}`;
 
 const outcomeOf = ({ outcome }: Result): string => (outcome ? outcomeWords[outcome] : "cut off");
 

@@ -9,7 +9,9 @@ interface FieldsTableProps {
 
 /** What was asked of the one and of the other, where it is not the same; with the origin of each value. */
 export function FieldsTable({ comparison: { rows, same }, names }: FieldsTableProps) {
-  const side = (which: 0 | 1) => (row: FieldRow) => <Side value={row.values[which]} origin={row.origins[which]} />;
+  const side = (which: 0 | 1) => (row: FieldRow) => (
+    <Side value={row.values[which]} origin={row.origins[which] ?? (row.origins[1 - which] && "no origin")} />
+  );
   const columns: Column<FieldRow>[] = [
     { key: "label", head: "What was asked", cell: ({ label }) => label, className: "whitespace-normal! min-w-32" },
     { key: "a", head: names[0], cell: side(0), className: "whitespace-normal! min-w-36" },

@@ -6,6 +6,7 @@ import { Menu, menuItemClass } from "../../components/menu.tsx";
 export interface RowActs {
   readonly copy: (summary: ScenarioSummary) => void;
   readonly save: (summary: ScenarioSummary) => void;
+  readonly compare: (summary: ScenarioSummary) => void;
   readonly duplicate: (summary: ScenarioSummary) => void;
   readonly cases: (summary: ScenarioSummary) => void;
   readonly move: (summary: ScenarioSummary) => void;
@@ -26,6 +27,7 @@ const archivedOnes: readonly [keyof RowActs, string][] = [
 const reading: readonly [keyof RowActs, string][] = [
   ["copy", "Copy as JSON"],
   ["save", "Save as a file"],
+  ["compare", "Compare with another"],
 ];
 
 /** The acts a person may do to a scenario, behind one small button. */

@@ -15,12 +15,14 @@ interface ScenarioRowProps {
   sentence: ReactNode;
   /** How many limits are kept. */
   limits: ReactNode;
+  /** How its revisions stand; null without one. */
+  state: ReactNode;
   /** What can be done to it. */
   menu: ReactNode;
 }
 
 /** One scenario of a project: how it moves | title and answer | limits, state, who and when. */
-export function ScenarioRow({ projectId, summary, ownId, strip, sentence, limits, menu }: ScenarioRowProps) {
+export function ScenarioRow({ projectId, summary, ownId, strip, sentence, limits, state, menu }: ScenarioRowProps) {
   const { id, title, updatedAt, updatedBy, archivedAt } = summary;
   const who = updatedBy.accountId === ownId ? "you" : updatedBy.name;
   return (
@@ -37,6 +39,7 @@ export function ScenarioRow({ projectId, summary, ownId, strip, sentence, limits
       <div className="flex items-start gap-2 text-13 max-desk:order-3">
         <div className="min-w-0 grow">
           <div className="min-h-5">{limits}</div>
+          {state && <p className="mt-1">{state}</p>}
           <p className="mt-1 text-quiet">
             {archivedAt ? "archived" : "draft"} · {who},{" "}
             <time dateTime={updatedAt}>{sayWhen(new Date(updatedAt))}</time>

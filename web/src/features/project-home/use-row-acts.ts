@@ -3,7 +3,7 @@ import { useQueryClient } from "@tanstack/react-query";
 import { useNavigate } from "react-router-dom";
 import { scenarioQuery, useScenarioActs } from "../../api/scenarios.ts";
 import { announce } from "../../components/status.tsx";
-import { paths } from "../../paths.ts";
+import { compareReference, paths } from "../../paths.ts";
 import { copyTitle } from "./copy-title.ts";
 import { fileNameOf, saveFile } from "../../components/save-file.ts";
 import type { RowActs } from "./row-menu.tsx";
@@ -62,6 +62,7 @@ export function useRowActs(projectId: string, taken: () => readonly string[], on
     duplicate: (summary) => void duplicate(summary),
     copy: (summary) => void copy(summary),
     save: (summary) => void save(summary),
+    compare: ({ id }) => void navigate(paths.compare(projectId, compareReference.scenario(id))),
     cases: ({ id }) => void navigate(paths.cases(projectId, id)),
     move: onMove,
   };

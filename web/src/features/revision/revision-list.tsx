@@ -23,6 +23,11 @@ interface RevisionListProps {
 /** The revisions of a scenario, newest first; each a way to its page and to what has changed since. */
 export function RevisionList({ projectId, scenarioId, ownId, digest, action }: RevisionListProps) {
   const { data: revisions, error, refetch } = useQuery(revisionsQuery(projectId, scenarioId));
+  const compare = (
+    <Link className="link text-13" to={paths.compare(projectId, compareReference.scenario(scenarioId))}>
+      Compare with another
+    </Link>
+  );
   if (error)
     return <ErrorNote action={<Button onClick={() => void refetch()}>Try again</Button>}>{error.message}</ErrorNote>;
   if (!revisions) return <p className="late text-quiet">Reading the revisions</p>;
@@ -33,6 +38,7 @@ export function RevisionList({ projectId, scenarioId, ownId, digest, action }: R
           No revision yet. A revision keeps the scenario and its answer as they are, for a review or for the record.
         </p>
         {action}
+        {compare}
       </div>
     );
   return (
@@ -62,6 +68,7 @@ export function RevisionList({ projectId, scenarioId, ownId, digest, action }: R
             What has changed since revision {revisions[0].number}
           </Link>
         )}
+        {compare}
       </div>
     </>
   );

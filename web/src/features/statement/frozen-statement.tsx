@@ -64,6 +64,8 @@ function FrozenPiece({ piece, scenario, units }: FrozenPieceProps) {
     const entered = unitTyped(units[piece.path], measure) ?? undefined;
     return <Figure {...readInput(value, measure, entered)} className="font-semibold" />;
   }
+  // A word that only asks for a choice says nothing.
+  if (piece.kind === "word" && piece.value === "") return null;
   const text = plainText(scenario, [piece], units);
   return piece.kind === "word" ? <span className="font-semibold">{text}</span> : text;
 }
