@@ -1,6 +1,6 @@
 import { checkScenario, simulate } from "@restband/solver";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
-import type { Member, Project, ScenarioSummary } from "../../api/src/contract.ts";
+import type { Integrity, Member, Notice, Project, RevisionSummary, ScenarioSummary } from "../../api/src/contract.ts";
 import { demoPeople } from "../../api/src/demo/demo-people.ts";
 import { removeDemo } from "../../api/src/demo/remove-demo.ts";
 import { demoProjects, seedDemo } from "../../api/src/demo/seed-demo.ts";
@@ -68,6 +68,20 @@ describe("the demo", () => {
     const scenarios = await aoife.get<ScenarioSummary[]>("listScenarios", { params: { projectId } });
     expect(scenarios[0].title).toBe("Z carriage, creep feed");
     expect(scenarios[0].updatedBy.name).toBe("Ines Duarte");
+  });
+
+  it("has a scenario that was frozen, returned, changed, frozen again and accepted, on a whole chain", async () => {
+    const priya = await signIn("priya");
+    const [{ id: projectId }] = await priya.get<Project[]>("listProjects");
+    const revisions = await priya.get<RevisionSummary[]>("listRevisions", { params: { projectId } });
+    expect(revisions.map(({ number, state, outcome, limits }) => [number, state, outcome, limits])).toEqual([
+      [2, "accepted", "smooth-sliding", { kept: 4, of: 4 }],
+      [1, "returned", "stick-slip", { kept: 2, of: 4 }],
+    ]);
+    const integrity = await priya.get<Integrity>("readIntegrity", { params: { projectId } });
+    expect([integrity.isWhole, integrity.faults]).toEqual([true, []]);
+    const [told] = await (await signIn("ines")).get<Notice[]>("listNotices");
+    expect(told).toMatchObject({ kind: "accepted", by: { name: "Priya Raman" } });
   });
 
   it("uses addresses that belong to nobody, and says that it is invented", () => {

@@ -24,8 +24,8 @@ interface PageHeaderProps {
   state?: ReactNode;
   /** At most three; the last one is what the page is for. On the phone they stand in a menu. */
   actions?: ReactNode;
-  /** Who is signed in, and the links and buttons of their own menu. */
-  person?: { name: string; items: ReactNode };
+  /** Who is signed in, how many things wait for them, and the links and buttons of their own menu. */
+  person?: { name: string; waiting: number; items: ReactNode };
 }
 
 /** The bar at the head of every page, 60 px: mark, where one is, saving, actions, theme, keys, person. */
@@ -92,11 +92,34 @@ function Tools({ onShortcuts }: { onShortcuts: () => void }) {
   );
 }
 
-function PersonMenu({ name, items }: { name: string; items: ReactNode }) {
+function PersonMenu({ name, waiting, items }: { name: string; waiting: number; items: ReactNode }) {
+  const label = waiting > 0 ? `${name}, your account, ${waiting} waiting` : `${name}, your account`;
   return (
-    <Menu label={<Avatar name={name} />} name={`${name}, your account`} kind="quiet" buttonClassName="rounded-full">
+    <Menu
+      label={<WaitingAvatar name={name} waiting={waiting} />}
+      name={label}
+      kind="quiet"
+      buttonClassName="rounded-full"
+    >
       {items}
     </Menu>
+  );
+}
+
+/** Initials, with the number of things that wait in a corner. */
+function WaitingAvatar({ name, waiting }: { name: string; waiting: number }) {
+  return (
+    <span className="relative inline-flex">
+      <Avatar name={name} />
+      {waiting > 0 && (
+        <span
+          aria-hidden="true"
+          className="figures absolute -top-1.5 -right-2 min-w-[18px] rounded-full border border-paper bg-ink px-1 text-[11px]/[16px] font-bold text-paper"
+        >
+          {waiting > 99 ? "99+" : waiting}
+        </span>
+      )}
+    </span>
   );
 }
 

@@ -1,5 +1,5 @@
 import { useSuspenseQuery } from "@tanstack/react-query";
-import { useState } from "react";
+import { Suspense, useState } from "react";
 import { useNavigate } from "react-router-dom";
 import { projectsQuery, useCreateProject } from "../api/projects.ts";
 import { Button } from "../components/button.tsx";
@@ -11,6 +11,7 @@ import { WorkHeader } from "../features/account/work-header.tsx";
 import { ProjectList, projectsHeadline } from "../features/project-home/project-list.tsx";
 import { paths } from "../paths.ts";
 
+const WaitingList = lazyPart(async () => (await import("../features/review/waiting-list.tsx")).WaitingList);
 // Forms are loaded when one is opened: they are no part of the first paint.
 const ProjectForm = lazyPart(async () => (await import("../features/project-home/project-form.tsx")).ProjectForm);
 
@@ -36,6 +37,9 @@ export function ProjectsPage() {
       <WorkHeader title="All projects" actions={newProject} />
       <main id="content" tabIndex={-1} className="page-width grow py-8 desk:py-9">
         <div className="max-w-[972px]">
+          <Suspense>
+            <WaitingList />
+          </Suspense>
           <h1 className="mb-6 text-24 font-semibold desk:text-34">
             {projectsHeadline(projects.length, areArchivedShown)}
           </h1>

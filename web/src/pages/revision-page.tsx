@@ -27,6 +27,7 @@ import { lendUnitSystem, ownUnitSystem, useUnitSystem, type UnitSystem } from ".
 import { compareReference, paths } from "../paths.ts";
 import { sharedValue } from "../shared-value.ts";
 import { useCursor, type Cursor } from "./cursor.ts";
+import { RevisionComments, RevisionReview } from "./revision-review.tsx";
 
 const Evidence = lazyPart(async () => (await import("../features/evidence/evidence.tsx")).Evidence);
 const Checks = lazyPart(async () => (await import("../features/checks/checks.tsx")).Checks);
@@ -124,10 +125,12 @@ function OpenRevision({ project, revision, children }: OpenRevisionProps) {
         <Section id="replay" name="Replay" help="On your machine, in your browser.">
           <ReplayPanel revision={revision} ownId={ownId} />
         </Section>
+        <RevisionComments project={project} revision={revision} ownId={ownId} />
         <RunSections run={run} view={view} cursor={cursor} />
         <Section name="Cautions" help="Always shown where they apply.">
           <Cautions scenario={content} result={frozen} />
         </Section>
+        <RevisionReview project={project} revision={revision} ownId={ownId} replays={replays ?? []} />
       </WorkedPage>
     </>
   );

@@ -1,4 +1,4 @@
-import type { DemoProject } from "../demo-project.ts";
+import type { DemoProject, DemoReview } from "../demo-project.ts";
 
 const carriage = {
   format: "restband-scenario/1",
@@ -48,6 +48,46 @@ const oilDamper = {
       low: 3600,
       high: 4600,
     },
+  },
+};
+
+const oilDamperReview: DemoReview = {
+  reviewer: "priya",
+  checklist: [
+    "Every value says where it comes from.",
+    "The limits are those of the machine's own sheet.",
+    "Friction was run over its whole range.",
+  ],
+  first: { ...creepFeed, title: "Z carriage, oil damper" },
+  returned: {
+    request: "The creep feed as the carriage stands now, with the guide's own damping.",
+    comments: [
+      {
+        anchor: { kind: "span", from: 0.0613, to: 0.0757 },
+        words: "It stands still here after every jump, 40 % of the time in all. The limit asks for none.",
+        answer: "Agreed. The oil damper of sheet OD-4 fits beside the screw; I put it in.",
+      },
+      {
+        anchor: { kind: "field", path: "body.viscous" },
+        words: "Where do these 350 N·s/m come from? The sheet names no damper.",
+        answer: "A guess for the seals. The damper will be far above it.",
+      },
+    ],
+    reasons: "Sticks and slips at the feed that is asked for: two of four limits are broken.",
+  },
+  accepted: {
+    request: "Now with the damper OD-4. It slides from the first break-away on.",
+    comments: [
+      {
+        anchor: { kind: "instant", t: 0.0651 },
+        words: "Slowest here: 0.05 mm/s. That is all that keeps it from stopping again.",
+      },
+      {
+        anchor: { kind: "span", from: 0.25, to: 0.5 },
+        words: "The ripple is taken over this half only: the first half is run-in.",
+      },
+    ],
+    reasons: "The replay agrees and all four limits are kept. Accepted for the prototype.",
   },
 };
 
@@ -143,7 +183,7 @@ export const hall3Refit: DemoProject = {
     { by: "tomas", content: beltCarton },
     { by: "ines", content: padBrake },
     { by: "tomas", content: rapidReturn },
-    { by: "ines", content: oilDamper },
+    { by: "ines", content: oilDamper, review: oilDamperReview },
     { by: "ines", content: creepFeed },
   ],
 };
