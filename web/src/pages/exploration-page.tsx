@@ -1,3 +1,4 @@
+import type { StoredExploration } from "@restband/api/contract";
 import { useSuspenseQueries } from "@tanstack/react-query";
 import { useLocation, useParams } from "react-router-dom";
 import { explorationQuery } from "../api/explorations.ts";
@@ -5,6 +6,8 @@ import { projectQuery } from "../api/projects.ts";
 import { WorkHeader } from "../features/account/work-header.tsx";
 import { SentenceGlance, StripGlance } from "../features/answer/answer-glance.tsx";
 import { SweepView } from "../features/explore/sweep/sweep-view.tsx";
+import { ThresholdAnswer } from "../features/explore/threshold/threshold-answer.tsx";
+import { storedReading } from "../features/explore/threshold/threshold-reading.ts";
 import { mayEdit } from "../features/project-home/roles.ts";
 import { paths } from "../paths.ts";
 import type { Computed } from "../compute/use-run.ts";
@@ -31,14 +34,33 @@ export function ExplorationPage() {
         title={stored.title}
       />
       <main id="content" tabIndex={-1} className="page-width grow py-8 desk:py-9">
-        <SweepView
-          key={stored.id}
-          {...{ projectId, stored, canEdit }}
-          isFresh={state?.isFresh === true}
-          answer={cellAnswer}
-          {...(canEdit && { open })}
-        />
+        {stored.kind === "sweep" && (
+          <SweepView
+            key={stored.id}
+            {...{ projectId, stored, canEdit }}
+            isFresh={state?.isFresh === true}
+            answer={cellAnswer}
+            {...(canEdit && { open })}
+          />
+        )}
+        {stored.kind === "search" && <KeptSearch stored={stored} {...(canEdit && { open })} />}
       </main>
+    </>
+  );
+}
+
+function KeptSearch({ stored, open }: { stored: StoredExploration; open?: ReturnType<typeof useOpenScenario> }) {
+  const reading = storedReading(stored);
+  if (!reading) return <p className="text-18">This search holds no answer that this page can read.</p>;
+  return (
+    <>
+      <h1 className="mb-6 text-18 text-quiet">{stored.title}</h1>
+      <ThresholdAnswer reading={reading} scenario={stored.content} {...(open && { open })} />
+      {stored.isStale && (
+        <p className="mt-6 max-w-(--measure) border-l-4 border-band-line pl-3">
+          The scenario has other numbers by now. This answer is of its version {stored.scenarioVersion}.
+        </p>
+      )}
     </>
   );
 }

@@ -1,13 +1,21 @@
-import { solverVersion, type SweepPlan } from "@restband/solver";
-import { useSuspenseQueries } from "@tanstack/react-query";
+import type { ExplorationSummary } from "@restband/api/contract";
+import { solverVersion } from "@restband/solver";
+import { useQuery, useSuspenseQueries } from "@tanstack/react-query";
+import { useState } from "react";
 import { useNavigate, useParams } from "react-router-dom";
-import { useExplorationActs } from "../api/explorations.ts";
+import { explorationsQuery, useExplorationActs, type ExplorationDraft } from "../api/explorations.ts";
 import { projectQuery } from "../api/projects.ts";
 import { scenarioQuery } from "../api/scenarios.ts";
+import { Confirm } from "../components/confirm.tsx";
 import { Section, WorkedPage } from "../components/section.tsx";
+import { announce } from "../components/status.tsx";
 import { WorkHeader } from "../features/account/work-header.tsx";
-import { sweepDraftFor } from "../features/explore/kept/drafts.ts";
+import { KeptList } from "../features/explore/kept/kept-list.tsx";
+import { sweepToKeep } from "../features/explore/sweep/stored-sweep.ts";
 import { SweepBuilder } from "../features/explore/sweep/sweep-builder.tsx";
+import { CuresSection } from "../features/explore/threshold/cures-section.tsx";
+import { HoldingSection } from "../features/explore/threshold/holding-section.tsx";
+import { searchToKeep } from "../features/explore/threshold/threshold-reading.ts";
 import { ThresholdSection } from "../features/explore/threshold/threshold-section.tsx";
 import { mayEdit } from "../features/project-home/roles.ts";
 import { useUnitSystem } from "../format/unit-system.ts";
@@ -23,36 +31,95 @@ export function ExplorePage() {
   });
   const canEdit = mayEdit(project.role) && project.archivedAt === null;
   const open = useOpenScenario(projectId);
-  const acts = useExplorationActs(projectId);
-  const navigate = useNavigate();
+  const keep = useKeep(projectId, scenarioId);
   const scenario = stored.content;
   const frame = { scenario, ...(canEdit && { open }) };
-  const title = scenario.title || "Untitled";
-
-  const runSweep = async (plan: SweepPlan, asked: string): Promise<void> => {
-    const made = await acts.create(scenarioId, sweepDraftFor(plan, asked, stored.version, solverVersion));
-    await navigate(paths.exploration(projectId, scenarioId, made.id), { state: { isFresh: true } });
-  };
+  const name = scenario.title || "Untitled";
+  const about = { scenarioVersion: stored.version, solverVersion };
   return (
     <>
-      <title>{`Explore ${title} · Restband`}</title>
+      <title>{`Explore ${name} · Restband`}</title>
       <WorkHeader
         trail={[
           { label: project.name, to: paths.project(projectId) },
-          { label: title, to: paths.scenario(projectId, scenarioId) },
+          { label: name, to: paths.scenario(projectId, scenarioId) },
         ]}
         title="Explore"
       />
       <WorkedPage key={units}>
         <Section name="Threshold" help="From which value on something is so. Both sides are run.">
-          <ThresholdSection {...frame} />
+          <ThresholdSection
+            {...frame}
+            {...(canEdit && {
+              onFound: (reading, { title, headline }) =>
+                keep.aside(searchToKeep(reading, { headline }, { ...about, title })),
+            })}
+          />
+        </Section>
+        <Section name="Cures" help="The change needed in one value alone.">
+          <CuresSection {...frame} />
+        </Section>
+        <Section name="How far it holds" help="The room around each value.">
+          <HoldingSection scenario={scenario} />
         </Section>
         {canEdit && (
           <Section name="Sweep" help="One or two fields over a range, each cell a run.">
-            <SweepBuilder scenario={scenario} onRun={runSweep} />
+            <SweepBuilder
+              scenario={scenario}
+              onRun={(asked, title) => keep.andOpen(sweepToKeep(asked, { ...about, title }))}
+            />
           </Section>
         )}
+        <Section name="Asked before" help="Kept with the scenario, for everybody in the project.">
+          <Kept projectId={projectId} scenarioId={scenarioId} canEdit={canEdit} />
+        </Section>
       </WorkedPage>
+    </>
+  );
+}
+
+/** Keeps what was asked with the scenario: beside what one does, or to be opened and computed. */
+function useKeep(projectId: string, scenarioId: string) {
+  const { create } = useExplorationActs(projectId);
+  const navigate = useNavigate();
+  return {
+    aside(draft: ExplorationDraft): void {
+      create(scenarioId, draft).catch((error: Error) => announce(`The search is not kept. ${error.message}`));
+    },
+    async andOpen(draft: ExplorationDraft): Promise<void> {
+      const { id } = await create(scenarioId, draft);
+      await navigate(paths.exploration(projectId, scenarioId, id), { state: { isFresh: true } });
+    },
+  };
+}
+
+interface KeptProps {
+  projectId: string;
+  scenarioId: string;
+  canEdit: boolean;
+}
+
+function Kept({ projectId, scenarioId, canEdit }: KeptProps) {
+  const { data, error } = useQuery(explorationsQuery(projectId, scenarioId));
+  const { remove } = useExplorationActs(projectId);
+  const [toDelete, setToDelete] = useState<ExplorationSummary | null>(null);
+  if (!data) return <p className="late text-quiet">{error ? error.message : "Reading what was asked before"}</p>;
+  return (
+    <>
+      <KeptList
+        explorations={data}
+        addressOf={(id) => paths.exploration(projectId, scenarioId, id)}
+        {...(canEdit && { onDelete: setToDelete })}
+      />
+      <Confirm
+        isOpen={toDelete !== null}
+        title="Delete it?"
+        action="Delete"
+        onConfirm={() => (toDelete ? remove(scenarioId, toDelete.id) : Promise.resolve())}
+        onClose={() => setToDelete(null)}
+      >
+        {toDelete?.title}: its result goes for everybody. The scenario stays, and the same can be asked again.
+      </Confirm>
     </>
   );
 }

@@ -37,7 +37,8 @@ interface TypedNumberProps {
 /** A labelled number with its unit, read as it is typed. */
 export function TypedNumber({ label, typed, measure, onChange, error, help, className }: TypedNumberProps) {
   const read = readTyped(typed, measure);
-  const units = unitsOf(measure).filter((unit) => unit.label !== "");
+  // A plain number says so by having no unit beside it; a percentage has to be typed.
+  const units = unitsOf(measure).some(({ label: each }) => each === "") ? [] : unitsOf(measure);
   return (
     <Field label={label} error={"message" in read ? read.message : error} help={help} className={className}>
       {(control) => (
@@ -54,7 +55,7 @@ export function TypedNumber({ label, typed, measure, onChange, error, help, clas
           {units.length > 1 && (
             <PlainSelect
               aria-label={`Unit of ${label}`}
-              choices={unitsOf(measure).map((unit) => ({ value: unit.label, label: unit.label || "–" }))}
+              choices={units.map((unit) => ({ value: unit.label, label: unit.label }))}
               value={typed.unit}
               onChange={(event) => onChange({ ...typed, unit: event.target.value })}
             />

@@ -14,15 +14,19 @@ import {
   canKeepDampingRatio,
   canKeepFrictionRatio,
   planOf,
+  secondsOf,
   sweepDraftOf,
+  timeMeasure,
   type AxisDraft,
   type SweepDraft,
 } from "./sweep-draft.ts";
+import { TypedNumber } from "../typed-number.tsx";
+import type { AskedSweep } from "./stored-sweep.ts";
 import { sweepTitle } from "./sweep-title.ts";
 
 interface SweepBuilderProps {
   scenario: Scenario;
-  onRun: (plan: SweepPlan, title: string) => Promise<void>;
+  onRun: (asked: AskedSweep, title: string) => Promise<void>;
 }
 
 const continuations: { value: Continuation; label: string }[] = [
@@ -39,6 +43,7 @@ export function SweepBuilder({ scenario, onRun }: SweepBuilderProps) {
   const [run, setRun] = useState<{ isBusy: boolean; failure: string | null }>({ isBusy: false, failure: null });
   const fields = useMemo(() => exploreFields(scenario), [scenario]);
   const { plan, faults } = planOf(draft, scenario);
+  const seconds = secondsOf(draft, scenario);
   const set = (change: Partial<SweepDraft>): void => setDraft((old) => ({ ...old, ...change }));
   const faultAt = (path: string): string | undefined => faults.find((fault) => fault.path.startsWith(path))?.message;
   const placed = ["axes[0].", "axes[1]."];
@@ -46,10 +51,10 @@ export function SweepBuilder({ scenario, onRun }: SweepBuilderProps) {
 
   const begin = async (): Promise<void> => {
     setTried(true);
-    if (!plan || run.isBusy) return;
+    if (!plan || seconds === null || run.isBusy) return;
     setRun({ isBusy: true, failure: null });
     try {
-      await onRun(plan, sweepTitle(plan, scenario));
+      await onRun({ plan, seconds }, sweepTitle(plan, scenario));
       setRun({ isBusy: false, failure: null });
     } catch (error) {
       setRun({ isBusy: false, failure: error instanceof Error ? error.message : String(error) });
@@ -92,31 +97,7 @@ export function SweepBuilder({ scenario, onRun }: SweepBuilderProps) {
           Vary a second field
         </Button>
       )}
-      <div className="flex flex-wrap items-start gap-x-8 gap-y-4">
-        <SelectField
-          label="Each cell starts"
-          choices={continuations}
-          value={draft.continuation}
-          error={faultAt("continuation")}
-          onChange={(event) => set({ continuation: event.target.value as Continuation })}
-        />
-        <div className="flex flex-col gap-2 pt-1">
-          {canKeepFrictionRatio(draft, scenario) && (
-            <Checkbox
-              label="Keep the ratio of static to kinetic friction"
-              checked={draft.keepsFrictionRatio}
-              onChange={(event) => set({ keepsFrictionRatio: event.target.checked })}
-            />
-          )}
-          {canKeepDampingRatio(draft, scenario) && (
-            <Checkbox
-              label="Keep the damping ratio"
-              checked={draft.keepsDampingRatio}
-              onChange={(event) => set({ keepsDampingRatio: event.target.checked })}
-            />
-          )}
-        </div>
-      </div>
+      <HowRun draft={draft} scenario={scenario} set={set} fault={faultAt("continuation")} />
       <QuantityChoice chosen={draft.quantities} onChange={(chosen) => set({ quantities: chosen })} />
       {isTried && general.map(({ message }) => <FieldError key={message}>{message}</FieldError>)}
       {run.failure && <ErrorNote>{run.failure}</ErrorNote>}
@@ -127,6 +108,51 @@ export function SweepBuilder({ scenario, onRun }: SweepBuilderProps) {
         <span className="text-13 text-quiet">{plan ? `${cellsOf(plan)} cells` : toPutRight(faults.length)}</span>
       </div>
     </form>
+  );
+}
+
+interface HowRunProps {
+  draft: SweepDraft;
+  scenario: Scenario;
+  set: (change: Partial<SweepDraft>) => void;
+  fault: string | undefined;
+}
+
+/** Where each cell starts, how long it runs, and what follows what is varied. */
+function HowRun({ draft, scenario, set, fault }: HowRunProps) {
+  return (
+    <div className="flex flex-wrap items-start gap-x-8 gap-y-4">
+      <SelectField
+        label="Each cell starts"
+        choices={continuations}
+        value={draft.continuation}
+        error={fault}
+        onChange={(event) => set({ continuation: event.target.value as Continuation })}
+      />
+      <TypedNumber
+        label="Each run lasts"
+        typed={draft.seconds}
+        measure={timeMeasure(scenario)}
+        error={secondsOf(draft, scenario) === null ? "A run lasts longer than nothing." : undefined}
+        onChange={(typed) => set({ seconds: typed })}
+      />
+      <div className="flex flex-col gap-2 desk:pt-8">
+        {canKeepFrictionRatio(draft, scenario) && (
+          <Checkbox
+            label="Keep the ratio of static to kinetic friction"
+            checked={draft.keepsFrictionRatio}
+            onChange={(event) => set({ keepsFrictionRatio: event.target.checked })}
+          />
+        )}
+        {canKeepDampingRatio(draft, scenario) && (
+          <Checkbox
+            label="Keep the damping ratio"
+            checked={draft.keepsDampingRatio}
+            onChange={(event) => set({ keepsDampingRatio: event.target.checked })}
+          />
+        )}
+      </div>
+    </div>
   );
 }
 

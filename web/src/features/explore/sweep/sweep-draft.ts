@@ -11,6 +11,7 @@ import { quantityNamed } from "../../../format/quantities.ts";
 import type { ExploreField } from "../explore-field.ts";
 import { exploreFields, likeliestField, rangeAround } from "../explore-field.ts";
 import { readTyped, typedOf, type Typed } from "../typed-number.tsx";
+import type { Measure } from "../../../format/unit.ts";
 
 export type Spacing = "linear" | "log" | "listed";
 
@@ -34,6 +35,30 @@ export interface SweepDraft {
   readonly keepsFrictionRatio: boolean;
   readonly continuation: Continuation;
   readonly quantities: readonly QuantityName[];
+  /** How long each run lasts. */
+  readonly seconds: Typed;
+}
+
+export const timeMeasure = (scenario: Scenario): Measure => ({ dimension: "time", motion: scenario.motion });
+
+/** Share of a disturbance that is left when its decay is called settled. */
+const LEFT = 0.01;
+const PERIODS = 40;
+
+/**
+ * How long to run each cell unless told otherwise: as the scenario says; past a feed or on a belt until what the start has
+ * stirred up is gone, where damping tells how long that is.
+ */
+export function suggestedSeconds(scenario: Scenario): number {
+  const { body, span, base, contact } = scenario;
+  const isSliding = base.some(({ kind }) => kind === "ramp") || typeof contact.counterface === "object";
+  if (!isSliding || !(body.stiffness > 0)) return span.seconds;
+  const omega = Math.sqrt(body.stiffness / body.inertia);
+  const decay = body.viscous / (2 * body.inertia);
+  const least =
+    (2 * Math.PI * PERIODS) / omega + (decay > 0 ? Math.min(-Math.log(LEFT) / decay, (2000 * Math.PI) / omega) : 0);
+  const step = 10 ** Math.floor(Math.log10(least));
+  return Math.max(span.seconds, step * ([1, 2, 5, 10].find((digit) => digit * step >= least) ?? 10));
 }
 
 /** Kept of each cell whatever else is asked: the share of time stuck draws the cell. */
@@ -54,6 +79,7 @@ export function sweepDraftOf(scenario: Scenario): SweepDraft {
     keepsFrictionRatio: true,
     continuation: "none",
     quantities: [...new Set([...always, ...limits, ...alsoLikely])],
+    seconds: typedOf(suggestedSeconds(scenario), timeMeasure(scenario)),
   };
 }
 
@@ -69,6 +95,12 @@ export function axisDraftOf(field: ExploreField, scenario: Scenario, spacing: Sp
     count: String(count),
     list: "",
   };
+}
+
+/** How long each run lasts, s; null where it cannot be read or is not above 0. */
+export function secondsOf({ seconds }: SweepDraft, scenario: Scenario): number | null {
+  const read = readTyped(seconds, timeMeasure(scenario));
+  return "value" in read && read.value > 0 ? read.value : null;
 }
 
 /** What is typed as a plan, or every fault at its path. Numbers that cannot be read are told by their own field. */

@@ -1,24 +1,32 @@
-import { cellOutcomes, type Scenario } from "@restband/solver";
-import { nounOf } from "../../../format/noun.ts";
+import { cellOutcomes, type Outcome } from "@restband/solver";
 import { formatNumber } from "../../../format/format-number.ts";
-import { outcomeWords } from "../../../format/outcomes.ts";
-import { capitalised, listed } from "../../../format/words.ts";
+import { listed } from "../../../format/words.ts";
 import type { SweepCells } from "./sweep-cells.ts";
 
-/** How many cells came to what, the most first: "The carriage sticks and slips in 150 of 224 cells, slides smoothly in 74." */
-export function sweepHeadline(cells: SweepCells, scenario: Scenario): string {
+/** What several cells do. */
+const doings: Record<Outcome, string> = {
+  "never-moved": "never move",
+  "came-to-rest": "come to rest",
+  "too-short": "are too short to tell",
+  growing: "grow",
+  "stick-slip": "stick and slip",
+  settles: "settle",
+  "not-settled": "have not settled",
+  "smooth-sliding": "slide smoothly",
+};
+
+/** How many cells came to what, the most first: "Of 224 cells 150 stick and slip and 74 slide smoothly." */
+export function sweepHeadline(cells: SweepCells): string {
   const counts = countsOf(cells);
   if (counts.length === 0) return "No cell is there yet.";
-  const parts = counts.map(({ words, count }, i) =>
-    i === 0
-      ? `${words} in ${formatNumber(count, 9)} of ${formatNumber(cells.done, 9)} cells`
-      : `${words} in ${formatNumber(count, 9)}`,
-  );
-  return capitalised(`the ${nounOf(scenario)} ${listed(parts)}.`);
+  const parts = counts.map(({ doing, count }) => `${figure(count)} ${doing}`);
+  return `Of ${figure(cells.done)} cells ${listed(parts)}.`;
 }
 
+const figure = (count: number): string => formatNumber(count, 9);
+
 /** Cells by what they came to, the most first; those refused or cut off last. */
-export function countsOf(cells: SweepCells): { words: string; count: number }[] {
+function countsOf(cells: SweepCells): { doing: string; count: number }[] {
   const counts = new Map<number, number>();
   for (let cell = 0; cell < cells.count; cell++) {
     const code = cells.code(cell);
@@ -26,5 +34,5 @@ export function countsOf(cells: SweepCells): { words: string; count: number }[] 
   }
   return [...counts]
     .sort(([a, x], [b, y]) => Number(b >= 0) - Number(a >= 0) || y - x)
-    .map(([code, count]) => ({ words: code < 0 ? "has no answer" : outcomeWords[cellOutcomes[code]], count }));
+    .map(([code, count]) => ({ doing: code < 0 ? "have no answer" : doings[cellOutcomes[code]], count }));
 }

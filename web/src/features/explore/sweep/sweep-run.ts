@@ -1,11 +1,12 @@
 import type { StoredExploration } from "@restband/api/contract";
-import { cellCount, solverVersion, type SweepPlan } from "@restband/solver";
+import { cellCount, solverVersion, type Scenario } from "@restband/solver";
 import { ApiFailure } from "../../../api/api-failure.ts";
 import { call } from "../../../api/client.ts";
 import { readTiles, saveTile } from "../../../api/explorations.ts";
 import { CalledOff } from "../../../compute/errand.ts";
 import { explorePool } from "../../../compute/explore-pools.ts";
 import { runTiles } from "../../../compute/run-tiles.ts";
+import { storedSweep } from "./stored-sweep.ts";
 import { SweepCells } from "./sweep-cells.ts";
 import { runnerId } from "./runner-id.ts";
 
@@ -24,6 +25,8 @@ const TRY_AGAIN_MS = 3000;
  */
 export class SweepRun {
   readonly cells: SweepCells;
+  /** The scenario whose cells are run. */
+  readonly scenario: Scenario;
   state: SweepState = { kind: "waiting" };
   /** Why tiles wait to be saved; null while all are. */
   trouble: string | null = null;
@@ -42,7 +45,9 @@ export class SweepRun {
     private readonly projectId: string,
     private readonly stored: StoredExploration,
   ) {
-    this.cells = new SweepCells(stored.plan as unknown as SweepPlan, stored.content.limits.length);
+    const { plan, scenario } = storedSweep(stored);
+    this.scenario = scenario;
+    this.cells = new SweepCells(plan, scenario.limits.length);
   }
 
   readonly editionNow = (): number => this.edition;
@@ -93,7 +98,7 @@ export class SweepRun {
       if (isKept) await this.claim();
       await this.reading;
       await runTiles({
-        scenario: this.stored.content,
+        scenario: this.scenario,
         plan: this.cells.plan,
         pool: explorePool,
         signal: controller.signal,

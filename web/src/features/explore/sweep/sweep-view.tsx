@@ -40,7 +40,7 @@ export function SweepView({ projectId, stored, canEdit, isFresh, answer, open, c
   useBegin(run, isFresh && stored.headline === null);
   const { cells } = run;
   const { plan } = cells;
-  const scenario = stored.content;
+  const { scenario } = run;
   const edition = run.editionNow();
   const [across, up] = useMemo(() => {
     const [first, second] = plan.axes;
@@ -58,7 +58,7 @@ export function SweepView({ projectId, stored, canEdit, isFresh, answer, open, c
   const selectedCell = first + selected;
   return (
     <>
-      <SweepHead stored={stored} cells={cells} lines={lines.lines} edition={edition} />
+      <SweepHead stored={stored} scenario={scenario} cells={cells} lines={lines.lines} edition={edition} />
       <div className="grid gap-x-12 gap-y-8 border-t border-line pt-6 wide:grid-cols-[minmax(0,1fr)_388px]">
         <div className="min-w-0">
           <SweepProgress run={run} stored={stored} canEdit={canEdit} />

@@ -19,7 +19,7 @@ export function useSweep(projectId: string, stored: StoredExploration, canEdit: 
     if (!isToConclude || isConcluding.current) return;
     isConcluding.current = true;
     const at = { params: { projectId, explorationId: stored.id } };
-    const headline = sweepHeadline(run.cells, stored.content).slice(0, 400);
+    const headline = sweepHeadline(run.cells).slice(0, 400);
     const then = async (): Promise<void> => {
       await client.invalidateQueries({ queryKey: explorationQuery(projectId, stored.id).queryKey });
       await client.invalidateQueries({ queryKey: explorationsQuery(projectId, stored.scenarioId).queryKey });

@@ -10,6 +10,8 @@ export interface TargetChoice {
   readonly met: string;
   /** What it does where it is not. */
   readonly unmet: string;
+  /** The same as `met` in a word, where that would be long. */
+  readonly short?: string;
   readonly target: Target;
 }
 
@@ -22,14 +24,15 @@ const outcome = (key: string, ask: string, met: string, unmet: string, outcomes:
 });
 
 const outcomes: readonly TargetChoice[] = [
-  outcome("smooth", "does it slide smoothly", "slides smoothly", "does not slide smoothly", ["smooth-sliding"]),
   {
     key: "no-stick-slip",
-    ask: "does it not stick and slip",
-    met: "does not stick and slip",
+    ask: "does it slide without sticking",
+    met: "slides without sticking",
     unmet: "sticks and slips",
+    short: "slides",
     target: { kind: "outcome", outcomes: ["stick-slip"], isWanted: false },
   },
+  outcome("smooth", "does it slide smoothly", "slides smoothly", "does not slide smoothly", ["smooth-sliding"]),
   outcome("rests", "does it come to rest", "comes to rest", "does not come to rest", ["came-to-rest", "never-moved"]),
   outcome("holds", "does it never move", "never moves", "moves", ["never-moved"]),
   {

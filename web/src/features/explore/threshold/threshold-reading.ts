@@ -8,6 +8,8 @@ import type {
   Threshold,
   ThresholdEnd,
 } from "@restband/solver";
+import type { StoredExploration } from "@restband/api/contract";
+import type { ExplorationDraft } from "../../../api/explorations.ts";
 import type { TargetChoice } from "./targets.ts";
 
 /** A value that was run, as far as it is kept with an answer. */
@@ -29,7 +31,7 @@ export interface ThresholdReading {
   readonly path: string;
   readonly low: number;
   readonly high: number;
-  readonly target: Pick<TargetChoice, "key" | "ask" | "met" | "unmet">;
+  readonly target: Pick<TargetChoice, "key" | "ask" | "met" | "unmet" | "short">;
   readonly searches: readonly {
     readonly start: StartKind;
     readonly flips: readonly FlipReading[];
@@ -48,12 +50,12 @@ export function readThreshold(
   { low, high, choice }: { low: number; high: number; choice: TargetChoice },
 ): ThresholdReading {
   const { path, answer, safeSide, dependsOnStart, outOfReach, analytic } = threshold;
-  const { key, ask, met, unmet } = choice;
+  const { key, ask, met, unmet, short } = choice;
   return {
     path,
     low,
     high,
-    target: { key, ask, met, unmet },
+    target: { key, ask, met, unmet, short },
     searches: threshold.searches.map(searchReading),
     answer: answer && flipReading(answer),
     safeSide,
@@ -81,3 +83,21 @@ function outcomeOf(reply: RunReply): { outcome: Outcome | null; reason: string |
   if ("reason" in reply) return { outcome: null, reason: reply.reason };
   return { outcome: reply.outcome, reason: reply.outcome === null ? `The run ended by ${reply.ended}.` : null };
 }
+
+/** A finished search for the server to keep. */
+export const searchToKeep = (
+  reading: ThresholdReading,
+  words: { headline: string },
+  about: { title: string; scenarioVersion: number; solverVersion: string },
+): ExplorationDraft => ({
+  kind: "search",
+  ...about,
+  plan: { path: reading.path, low: reading.low, high: reading.high, target: reading.target.key },
+  tileCells: [],
+  cellValues: 1,
+  conclusion: { headline: words.headline.slice(0, 400), answer: { reading } },
+});
+
+/** What the server kept of one. */
+export const storedReading = ({ answer }: StoredExploration): ThresholdReading | null =>
+  (answer as { reading?: ThresholdReading } | null)?.reading ?? null;

@@ -5,17 +5,18 @@ import { ErrorNote } from "../../../components/error-note.tsx";
 import { ProgressLine } from "../../../components/progress-line.tsx";
 import { useExploring } from "../../../compute/use-exploring.ts";
 import type { ExploreFrame } from "../explore-frame.ts";
-import { exploreFields, likeliestField, rangeAround, type ExploreField } from "../explore-field.ts";
+import { exploreFields, likeliestField, rangeAround, theBody, type ExploreField } from "../explore-field.ts";
 import { rateWords } from "../rate-words.ts";
 import { SentenceSelect } from "../sentence-select.tsx";
 import { readTyped, TypedNumber, typedOf, type Typed } from "../typed-number.tsx";
 import { targetChoices, type TargetChoice } from "./targets.ts";
 import { ThresholdAnswer } from "./threshold-answer.tsx";
+import { sayThreshold } from "./threshold-words.ts";
 import { readThreshold, type ThresholdReading } from "./threshold-reading.ts";
 
 interface ThresholdSectionProps extends ExploreFrame {
   /** Keeps a finished search with the scenario. */
-  onFound?: (reading: ThresholdReading, field: ExploreField) => void;
+  onFound?: (reading: ThresholdReading, words: { title: string; headline: string }) => void;
 }
 
 /** Asks from which value of a field on something is so, and answers with both ends run. */
@@ -23,7 +24,7 @@ export function ThresholdSection({ scenario, open, onFound }: ThresholdSectionPr
   const fields = useMemo(() => exploreFields(scenario), [scenario]);
   const choices = useMemo(() => targetChoices(scenario), [scenario]);
   const [path, setPath] = useState(() => likeliestField(fields)?.path ?? "");
-  const [targetKey, setTarget] = useState("smooth");
+  const [targetKey, setTarget] = useState("no-stick-slip");
   const field = fields.find((each) => each.path === path) ?? fields[0];
   const choice = choices.find(({ key }) => key === targetKey) ?? choices[0];
   const range = useRange(field, scenario);
@@ -35,7 +36,9 @@ export function ThresholdSection({ scenario, open, onFound }: ThresholdSectionPr
     const asked = { low: range.low.value, high: range.high.value, choice };
     const exploring = readingOf(scenario, field, asked);
     const reading = await run.begin(exploring);
-    if (reading) onFound?.(reading, field);
+    if (!reading) return;
+    const { headline } = sayThreshold(reading, field, theBody(scenario));
+    onFound?.(reading, { title: `From which ${field.name} on ${choice.ask}?`, headline });
   };
   return (
     <>

@@ -1,6 +1,5 @@
 import type { StartKind } from "@restband/solver";
 import { unitFor } from "../../../format/units.ts";
-import { outcomeWords } from "../../../format/outcomes.ts";
 import { say } from "../../../format/format-quantity.ts";
 import { capitalised, listed, sayMany } from "../../../format/words.ts";
 import type { ExploreField } from "../explore-field.ts";
@@ -20,14 +19,14 @@ const startWords: Record<StartKind, string> = {
 };
 
 export function sayThreshold(reading: ThresholdReading, field: ExploreField, body: string): ThresholdWords {
-  const { answer, safeSide, outOfReach } = reading;
+  const { answer, safeSide, outOfReach, target } = reading;
   if (outOfReach) return { headline: outOfReachWords(reading, field, body), lead: [searched(reading, field)] };
   if (!answer || !safeSide) return { headline: noSafeSide(reading, field, body), lead: bracketLines(reading, field) };
   const value = safeValue(answer, safeSide, field);
   const reach = safeSide === "above" ? `from ${value} of ${field.name} on` : `up to ${value} of ${field.name}`;
   return {
     headline: `${capitalised(body)} ${reading.target.met} ${reach}.`,
-    lead: [bracketWords(answer, field), ...manyFlips(reading, field), ...startLines(reading, field)],
+    lead: [bracketWords(answer, field, target), ...manyFlips(reading, field), ...startLines(reading, field)],
   };
 }
 
@@ -36,16 +35,18 @@ export function safeValue(flip: FlipReading, side: "above" | "below", { measure 
   return side === "above" ? sayTowards(flip.above.value, measure, "up") : sayTowards(flip.below.value, measure, "down");
 }
 
-/** "8.3444 mm/s still sticks and slips, 8.3449 mm/s slides smoothly." Both ends were run as they stand. */
-export function bracketWords({ below, above }: FlipReading, { measure }: ExploreField): string {
+/** "8.3444 mm/s still sticks and slips, 8.3449 mm/s slides." Both ends were run as they stand. */
+export function bracketWords({ below, above }: FlipReading, { measure }: ExploreField, target: TargetWords): string {
   const unit = unitFor(above.value, measure);
   const low = sayTowards(below.value, measure, "down", { digits: 5, unit });
   const high = sayTowards(above.value, measure, "up", { digits: 5, unit });
-  return `${low} still ${endWords(below)}, ${high} ${endWords(above)}.`;
+  return `${low} still ${endWords(below, target)}, ${high} ${endWords(above, target)}.`;
 }
 
-export const endWords = ({ outcome, reason }: EndReading): string =>
-  outcome === null ? `has no answer (${reason ?? "cut off"})` : outcomeWords[outcome];
+type TargetWords = Pick<ThresholdReading["target"], "met" | "unmet" | "short">;
+
+const endWords = ({ isMet, reason }: EndReading, { met, unmet, short }: TargetWords): string =>
+  isMet === null ? `cannot be judged (${reason ?? "cut off"})` : isMet ? (short ?? met) : unmet;
 
 function outOfReachWords({ outOfReach, target }: ThresholdReading, field: ExploreField, body: string): string {
   return outOfReach === "met-everywhere"
@@ -59,8 +60,9 @@ const searched = ({ low, high }: ThresholdReading, { measure }: ExploreField): s
 const noSafeSide = ({ target }: ThresholdReading, field: ExploreField, body: string): string =>
   `${capitalised(body)} ${target.met} only between two values of ${field.name}, not at either end.`;
 
-function bracketLines({ searches }: ThresholdReading, field: ExploreField): string[] {
-  return searches.slice(0, 1).flatMap(({ flips }) => flips.map((flip) => bracketWords(flip, field)));
+function bracketLines({ searches, target }: ThresholdReading, field: ExploreField): string[] {
+  const most = searches.reduce((a, b) => (b.flips.length > a.flips.length ? b : a), searches[0]);
+  return (most?.flips ?? []).map((flip) => bracketWords(flip, field, target));
 }
 
 /** More than one change in the range is told: between them the answer is not the whole truth. */
