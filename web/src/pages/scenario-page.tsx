@@ -5,6 +5,7 @@ import { useParams } from "react-router-dom";
 import { projectQuery } from "../api/projects.ts";
 import { scenarioQuery } from "../api/scenarios.ts";
 import { useAccount } from "../api/session.ts";
+import { ButtonLink } from "../components/button.tsx";
 import { Section, WorkedPage } from "../components/section.tsx";
 import { samplesFor } from "../compute/samples-for.ts";
 import { useRanges } from "../compute/use-ranges.ts";
@@ -95,7 +96,12 @@ function OpenScenario({ project, stored }: { project: Project; stored: StoredSce
         trail={[{ label: project.name, to: paths.project(project.id) }]}
         title={title}
         state={savedWords({ saving, canEdit, role: project.role, archived, isTrying, faults: faults.length })}
-        actions={<UndoButtons draft={draft} dispatch={dispatch} />}
+        actions={
+          <>
+            <UndoButtons draft={draft} dispatch={dispatch} />
+            <ButtonLink to={paths.explore(project.id, stored.id)}>Explore</ButtonLink>
+          </>
+        }
       />
       <WorkedPage className="max-desk:pb-40">
         <Section name="Answer" help="Computed here, anew with every change.">
