@@ -5,7 +5,7 @@ import { fileURLToPath } from "node:url";
 import { allocationOf, median, timeOf } from "./measure.ts";
 import { floorAcceleration } from "./problems.ts";
 import { subjects, waysOf, type Tally } from "./subjects.ts";
-import { inC, inSciPy, type Yardstick } from "./yardsticks.ts";
+import { inC, inCvode, inSciPy, type Yardstick } from "./yardsticks.ts";
 
 /*
  * `npm run bench`: what a simulation costs, beside yardsticks on the same machine in the same run. Processor time, medians
@@ -37,7 +37,7 @@ const scratch = mkdtempSync(join(tmpdir(), "restband-bench-"));
 try {
   const recordFile = join(scratch, "record.txt");
   writeFileSync(recordFile, floorAcceleration().join("\n"));
-  const yardsticks = [inC(recordFile, scratch), inSciPy(recordFile)];
+  const yardsticks = [inC(recordFile, scratch), inCvode(recordFile, scratch), inSciPy(recordFile)];
   report(measure(yardsticks), yardsticks);
 } finally {
   rmSync(scratch, { recursive: true, force: true });
@@ -81,10 +81,7 @@ function rowsOf(series: readonly Series[]): Row[] {
 
 function report(rows: readonly Row[], yardsticks: readonly Yardstick[]): void {
   const [{ model }] = cpus();
-  const absent = [
-    ...yardsticks.flatMap((one) => ("absent" in one ? [`${one.name}: ${one.absent}`] : [])),
-    "CVODE: no yardstick written yet",
-  ];
+  const absent = yardsticks.flatMap((one) => ("absent" in one ? [`${one.name}: ${one.absent}`] : []));
   const machine = { model, cores: cpus().length, node: process.version, load: loadavg()[0], rounds };
   const file = join(root, ".local/bench.json");
   mkdirSync(join(root, ".local"), { recursive: true });

@@ -15,10 +15,21 @@ export interface Timed extends Tally {
 
 /** The closed form in C; `scratch` is a folder for the program. */
 export function inC(recordFile: string, scratch: string): Yardstick {
-  const name = "C closed form";
-  const program = join(scratch, "exact");
-  const made = spawnSync("cc", ["-O3", "-march=native", "-o", program, join(folder, "exact.c"), "-lm"]);
-  if (made.status !== 0) return { name, absent: made.error ? "no C compiler here" : String(made.stderr) };
+  return compiled("C closed form", "exact", [], recordFile, scratch);
+}
+
+/** CVODE started anew at every event; needs Debian's libsundials-dev. */
+export function inCvode(recordFile: string, scratch: string): Yardstick {
+  const libraries = ["-lsundials_cvode", "-lsundials_nvecserial", "-lsundials_generic"];
+  return compiled("CVODE Adams", "cvode", libraries, recordFile, scratch);
+}
+
+function compiled(name: string, file: string, libraries: string[], recordFile: string, scratch: string): Yardstick {
+  const program = join(scratch, file);
+  const source = join(folder, `${file}.c`);
+  const made = spawnSync("cc", ["-O3", "-march=native", "-o", program, source, ...libraries, "-lm"]);
+  if (made.error) return { name, absent: "no C compiler here" };
+  if (made.status !== 0) return { name, absent: String(made.stderr).split("\n", 1)[0] };
   return { name, round: () => read(execFileSync(program, [recordFile, "1"], { encoding: "utf8" })) };
 }
 
