@@ -1,6 +1,6 @@
 import type { Project, StoredScenario } from "@restband/api/contract";
 import { useSuspenseQueries } from "@tanstack/react-query";
-import { Suspense, useCallback, useMemo, useState } from "react";
+import { Suspense, useCallback, useMemo, useState, type ComponentProps } from "react";
 import { useParams } from "react-router-dom";
 import { projectQuery } from "../api/projects.ts";
 import { scenarioQuery } from "../api/scenarios.ts";
@@ -96,12 +96,7 @@ function OpenScenario({ project, stored }: { project: Project; stored: StoredSce
         trail={[{ label: project.name, to: paths.project(project.id) }]}
         title={title}
         state={savedWords({ saving, canEdit, role: project.role, archived, isTrying, faults: faults.length })}
-        actions={
-          <>
-            <UndoButtons draft={draft} dispatch={dispatch} />
-            <ButtonLink to={paths.explore(project.id, stored.id)}>Explore</ButtonLink>
-          </>
-        }
+        actions={<Actions draft={draft} dispatch={dispatch} explore={paths.explore(project.id, stored.id)} />}
       />
       <WorkedPage className="max-desk:pb-40">
         <Section name="Answer" help="Computed here, anew with every change.">
@@ -165,6 +160,16 @@ function useBeforeEdit(computed: Computed | null, isEditing: boolean): Computed 
   const [settled, setSettled] = useState(computed);
   if (!isEditing && settled !== computed) setSettled(computed);
   return isEditing && settled !== computed ? settled : null;
+}
+
+/** What can be done from the head of the page. */
+function Actions({ explore, ...undo }: ComponentProps<typeof UndoButtons> & { explore: string }) {
+  return (
+    <>
+      <UndoButtons {...undo} />
+      <ButtonLink to={explore}>Explore</ButtonLink>
+    </>
+  );
 }
 
 /** The run made ready to be looked at; null without one that has samples. */
