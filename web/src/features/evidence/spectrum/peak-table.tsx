@@ -11,7 +11,6 @@ const frequency = { dimension: "frequency", motion: "linear" } as const;
 /** The peaks of a spectrum in the order of their frequency. */
 export function PeakTable({ spectrum }: { spectrum: RunSpectrum }) {
   const { peaks, measure, window, highest } = spectrum;
-  if (peaks.length === 0) return <p>Nothing swings in this part of the run.</p>;
   const unit = unitFor(highest, measure);
   const order: Column<SpectralPeak> = {
     key: "order",

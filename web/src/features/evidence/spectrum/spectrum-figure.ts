@@ -27,20 +27,24 @@ const MOST_POINTS = 4000;
 /** A logarithmic picture reaches so far below the highest peak. */
 const DECADES = 4;
 
-/** Up to a little beyond the last peak that is a hundredth of the highest, and some way beyond the highest itself. */
+/** Of a spectrum with peaks: up to a little beyond the last that is a hundredth of the highest, and some way beyond that one. */
 export function spectrumFrame(
   { peaks, highest, amplitudes, step, measure }: RunSpectrum,
   isLog: boolean,
 ): SpectrumFrame {
-  const strongest = peaks.reduce((best, peak) => (peak.amplitude > best.amplitude ? peak : best), peaks[0]);
+  const strongest = peaks.reduce((best, peak) => (peak.amplitude > best.amplitude ? peak : best));
   const telling = peaks.filter(({ amplitude }) => amplitude >= 0.01 * highest).map(({ hz }) => hz);
-  const wanted = peaks.length > 0 ? Math.max(1.15 * Math.max(...telling), 2.5 * strongest.hz) : Infinity;
+  const wanted = Math.max(1.15 * Math.max(...telling), 2.5 * strongest.hz);
   const top = Math.min(wanted, step * (amplitudes.length - 1));
-  const reached = peaks.reduce((most, { amplitude }) => Math.max(most, amplitude), highest);
-  const across = unitFor(top, frequency);
-  const upright = unitFor(reached, measure);
-  const high = reached > 0 ? reached * (isLog ? 2.2 : 1.18) : upright.factor;
-  return { top, isLog, low: isLog ? (reached > 0 ? reached : 1) / 10 ** DECADES : 0, high, across, upright };
+  const reached = Math.max(strongest.amplitude, highest);
+  return {
+    top,
+    isLog,
+    low: isLog ? reached / 10 ** DECADES : 0,
+    high: reached * (isLog ? 2.2 : 1.18),
+    across: unitFor(top, frequency),
+    upright: unitFor(reached, measure),
+  };
 }
 
 /** Lines joined to one curve, with a stem up to each peak and a plus on it. */

@@ -53,9 +53,11 @@ export function SpectrumSheet({ view, range, theme }: SpectrumSheetProps) {
           <Option label="logarithmic" isChosen={isLog} onChoose={() => setLog(true)} />
         </span>
       </div>
-      {spectrum ? (
+      {spectrum && spectrum.peaks.length === 0 && <p className="p-4">{spectrumWords(spectrum, view.scenario, part)}</p>}
+      {spectrum && spectrum.peaks.length > 0 && (
         <Told view={view} spectrum={spectrum} part={part} isLog={isLog} theme={theme} />
-      ) : (
+      )}
+      {!spectrum && (
         <p className="min-h-[340px] p-4 text-quiet" role="status">
           {trouble ?? <span className="late">Computing the spectrum</span>}
         </p>

@@ -26,6 +26,9 @@ const PER_PERIOD = 16;
 const FEWEST = 2 ** 14;
 const MOST = 2 ** 18;
 
+/** Of fewer periods the lines that a Hann window makes of one order reach those of the next. */
+export const FEWEST_PERIODS = 3;
+
 /** The window, cut to whole periods at its end where there is a rate; null where the run lasts no time. */
 export function spectrumWindow(view: RunView, part: WindowPart, seen: Range): SpectrumWindow | null {
   const { scenario, result } = view;
@@ -57,13 +60,16 @@ function rateOf({ scenario, driveHz }: RunView): Rate | null {
   return ripple ? { hz: ripple.hz, name: "ripple" } : null;
 }
 
-/** Without a rate from outside: from the first break-away to the last, where there are three at least. */
+/**
+ * Without a rate from outside: from the first break-away of the range to the last. Where they are too few to tell orders
+ * apart, the last of the run, its first slip left out; where those are too few as well, none.
+ */
 function acrossBreakAways(view: RunView, { from, to }: Range): Cut | null {
   if (rateOf(view)) return null;
-  const starts = view.result.events
-    .filter(({ kind, t }) => kind === "break-away" && t >= from && t <= to)
-    .map(({ t }) => t);
-  if (starts.length < 3) return null;
+  const all = view.result.events.filter(({ kind }) => kind === "break-away").map(({ t }) => t);
+  const within = all.filter((t) => t >= from && t <= to);
+  const starts = within.length > FEWEST_PERIODS ? within : all.slice(1).slice(-FEWEST_PERIODS - 1);
+  if (starts.length <= FEWEST_PERIODS || starts[starts.length - 1] > to) return null;
   const [first, last, periods] = [starts[0], starts[starts.length - 1], starts.length - 1];
   return { from: first, to: last, rate: { hz: periods / (last - first), name: "stick–slip" }, periods };
 }

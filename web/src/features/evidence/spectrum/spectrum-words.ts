@@ -1,9 +1,9 @@
 import type { Outcome, Scenario } from "@restband/solver";
 import { formatNumber } from "../../../format/format-number.ts";
 import { say } from "../../../format/format-quantity.ts";
-import { capitalised } from "../../../format/words.ts";
+import { capitalised, sayCount } from "../../../format/words.ts";
 import { channelName, type RunSpectrum } from "./run-spectrum.ts";
-import type { SpectrumWindow, WindowPart } from "./spectrum-window.ts";
+import { FEWEST_PERIODS, type SpectrumWindow, type WindowPart } from "./spectrum-window.ts";
 
 const hz = { dimension: "frequency", motion: "linear" } as const;
 const seconds = { dimension: "time", motion: "linear" } as const;
@@ -56,6 +56,9 @@ export function methodSentences({ window, step }: RunSpectrum, outcome: Outcome 
     periods === null || !rate
       ? "The window is no whole number of periods, so each peak leaks into the lines beside it and may stand up to 15\u00a0% too low. The figures are read between the lines: of a harmonic that stands alone, five lines up or more, to 0.1\u00a0%."
       : `${capitalised(rate.name === "stick–slip" ? "the cycles" : `the periods of the ${rate.name}`)} are whole: multiples of ${rate.name === "stick–slip" ? "their rate" : "its frequency"} stand on lines and leak into the two beside them alone.`,
+    ...(periods !== null && periods < FEWEST_PERIODS
+      ? [`So few periods tell no order from the next: it takes ${sayCount(FEWEST_PERIODS)}.`]
+      : []),
     ...(outcome !== null && unsteady.has(outcome)
       ? ["This motion does not keep its size: a peak tells its mean size over the window, as the window weighs it."]
       : []),
