@@ -89,6 +89,18 @@ describe("a value in its sentence", () => {
     expect(draft.inForce.body.viscous).toBe(350);
   });
 
+  it("changes nothing of what was entered where it is opened and put back", async () => {
+    const entered = variant({ origins: { "body.viscous": { kind: "measured", entered: "350 N·s/m" } } });
+    const user = open(entered);
+    await user.click(screen.getByRole("button", { name: /^Damping/ }));
+    await user.keyboard("{Escape}");
+    expect(draft.inForce).toEqual(entered);
+    expect(draft.past).toEqual([]);
+    await user.click(screen.getByRole("button", { name: /^Damping/ }));
+    await user.keyboard("9 N·s/mm{Escape}");
+    expect(draft.inForce).toEqual(entered);
+  });
+
   it("moves by arrow keys, 1 % or 10 %", async () => {
     const user = open();
     await user.click(screen.getByRole("button", { name: /^Rate/ }));

@@ -85,8 +85,15 @@ function Tools({ onShortcuts }: { onShortcuts: () => void }) {
   return (
     <>
       <ThemeButton />
-      <Button kind="quiet" aria-label="Keyboard shortcuts" title="Keyboard shortcuts" onClick={onShortcuts}>
+      <Button
+        kind="quiet"
+        aria-label="Keyboard shortcuts"
+        title="Keyboard shortcuts"
+        className="max-desk:px-2.5!"
+        onClick={onShortcuts}
+      >
         <span className="font-bold">?</span>
+        <span className="desk:hidden">keyboard</span>
       </Button>
     </>
   );

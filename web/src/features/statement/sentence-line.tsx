@@ -19,19 +19,28 @@ interface SentenceLineProps {
 export function SentenceLine({ pieces, openPath, onOpen, onAllFields }: SentenceLineProps) {
   return (
     <p className="max-w-[820px] text-18 leading-[1.85] desk:leading-[1.7]">
-      {pieces.map((piece, i) => (
-        <PieceView key={keyOf(piece, i)} piece={piece} openPath={openPath} onOpen={onOpen} onAllFields={onAllFields} />
+      {withSigns(pieces).map(({ piece, sign }, i) => (
+        <PieceView key={keyOf(piece, i)} {...{ piece, sign, openPath, onOpen, onAllFields }} />
       ))}
     </p>
   );
 }
 
+/** A ± before a value stays with it, wherever the line ends. */
+function withSigns(pieces: readonly Piece[]): { piece: Piece; sign: string }[] {
+  const isSign = (piece: Piece | undefined): boolean => piece?.kind === "text" && piece.text.endsWith("±");
+  return pieces.map((piece, i) => ({
+    piece: piece.kind === "text" && isSign(piece) ? { ...piece, text: piece.text.slice(0, -1) } : piece,
+    sign: isSign(pieces[i - 1]) ? "±" : "",
+  }));
+}
+
 const keyOf = (piece: Piece, index: number): string =>
   piece.kind === "value" ? piece.path : `${index}${piece.kind === "word" ? piece.label : ""}`;
 
-type PieceProps = Omit<SentenceLineProps, "pieces">;
+type PieceProps = Omit<SentenceLineProps, "pieces"> & { piece: Piece; sign: string };
 
-function PieceView({ piece, openPath, onOpen, onAllFields }: PieceProps & { piece: Piece }) {
+function PieceView({ piece, sign, openPath, onOpen, onAllFields }: PieceProps) {
   switch (piece.kind) {
     case "text":
       return piece.text;
@@ -46,7 +55,7 @@ function PieceView({ piece, openPath, onOpen, onAllFields }: PieceProps & { piec
         </button>
       );
     case "value":
-      return <Value piece={piece} isOpen={openPath === piece.path} onOpen={() => onOpen(piece.path)} />;
+      return <Value piece={piece} sign={sign} isOpen={openPath === piece.path} onOpen={() => onOpen(piece.path)} />;
   }
 }
 
@@ -55,11 +64,12 @@ const valueClass =
 
 interface ValueProps {
   piece: Extract<Piece, { kind: "value" }>;
+  sign: string;
   isOpen: boolean;
   onOpen: () => void;
 }
 
-function Value({ piece: { path, field, word }, isOpen, onOpen }: ValueProps) {
+function Value({ piece: { path, field, word }, sign, isOpen, onOpen }: ValueProps) {
   const { draft } = useDraftContext();
   const { wanted, unread, units } = draft.sheet;
   const measure = measureOf(wanted, field);
@@ -71,6 +81,7 @@ function Value({ piece: { path, field, word }, isOpen, onOpen }: ValueProps) {
   const unit = unread[path] || word ? "" : (reading?.unit ?? "");
   return (
     <span className="whitespace-nowrap">
+      {sign}
       <button
         type="button"
         data-path={path}
@@ -80,7 +91,7 @@ function Value({ piece: { path, field, word }, isOpen, onOpen }: ValueProps) {
         className={classNames(
           valueClass,
           !word && "figures text-[17px]",
-          isOpen && "bg-slip px-1 text-on-slip no-underline",
+          isOpen && "bg-slip px-1 text-on-slip no-underline forced-color-adjust-none",
           isFaulty && !isOpen && "text-broken decoration-broken decoration-wavy",
         )}
         onClick={onOpen}

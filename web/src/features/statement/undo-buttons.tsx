@@ -1,5 +1,5 @@
 import { Button } from "../../components/button.tsx";
-import { Icon } from "../../components/icon.tsx";
+import { Icon, type IconName } from "../../components/icon.tsx";
 import { useShortcut } from "../../components/shortcuts.tsx";
 import type { Dispatch, Draft } from "./draft/draft.ts";
 
@@ -12,12 +12,18 @@ export function UndoButtons({ draft, dispatch }: { draft: Draft; dispatch: Dispa
   useShortcut("Ctrl+y", "Redo", redo);
   return (
     <span className="flex">
-      <Button kind="quiet" aria-label="Undo" title="Undo" disabled={draft.past.length === 0} onClick={undo}>
-        <Icon name="undo" />
-      </Button>
-      <Button kind="quiet" aria-label="Redo" title="Redo" disabled={draft.future.length === 0} onClick={redo}>
-        <Icon name="redo" />
-      </Button>
+      <Step name="Undo" icon="undo" isPossible={draft.past.length > 0} run={undo} />
+      <Step name="Redo" icon="redo" isPossible={draft.future.length > 0} run={redo} />
     </span>
+  );
+}
+
+/** On the phone, where it stands in a menu, with its name. */
+function Step({ name, icon, isPossible, run }: { name: string; icon: IconName; isPossible: boolean; run: () => void }) {
+  return (
+    <Button kind="quiet" title={name} disabled={!isPossible} className="max-desk:px-2.5!" onClick={run}>
+      <Icon name={icon} />
+      <span className="desk:sr-only">{name}</span>
+    </Button>
   );
 }

@@ -18,6 +18,8 @@ interface DragRulerProps {
   before: number;
   entry: NumberEntry;
   label: string;
+  /** Back to the value that was there, as it was. */
+  onPutBack: () => void;
 }
 
 /** Decades to each side of the value that was there. */
@@ -26,17 +28,14 @@ const REACH = 1.5;
 const THUMB = 18;
 
 /** A logarithmic scale to drag the value along; beneath it what the body would do at each value. */
-export function DragRuler({ path, before, entry, label }: DragRulerProps) {
+export function DragRuler({ path, before, entry, label, onPutBack }: DragRulerProps) {
   const [ref, width] = useWidth<HTMLDivElement>(440);
   const stretches = stretchesOf(useOutcomesAlong(path, before), REACH);
   const position = Math.log10((entry.value ?? before) / before);
   const x = (at: number): number => THUMB / 2 + ((at + REACH) / (2 * REACH)) * (width - THUMB);
-  const [typedIn] = useState(entry.typedIn);
   // The value that was there stays within reach.
   const drag = (value: number): void =>
-    Math.abs(value / before - 1) < 2e-3
-      ? entry.set(before, typedIn)
-      : entry.set(rounded(value, entry.unit), entry.unit);
+    Math.abs(value / before - 1) < 2e-3 ? onPutBack() : entry.set(rounded(value, entry.unit), entry.unit);
   const inUnit = (si: number): number => fromSi(si, entry.unit);
   return (
     <div ref={ref} className="relative mt-4 w-full desk:min-w-[480px]">
@@ -128,7 +127,8 @@ function Words({ stretches, before, entry }: { stretches: readonly Stretch[]; be
       {told.slice(0, 6).map(({ from, outcome }) => (
         <span key={from}>
           {outcome && outcomeWords[outcome]}
-          {from > -REACH && ` from about ${formatNumber(fromSi(before * 10 ** from, entry.unit), 3)}`}
+          {from > -REACH &&
+            ` from about ${formatNumber(Number(fromSi(before * 10 ** from, entry.unit).toPrecision(3)))}`}
         </span>
       ))}
     </p>

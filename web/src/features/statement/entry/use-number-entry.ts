@@ -21,8 +21,9 @@ export interface NumberEntry {
   /** Where a text can be read in two ways: both, to choose from. */
   readonly choices: Extract<TypedReading, { kind: "ambiguous" }>["choices"];
   readonly type: (text: string) => void;
-  /** `unit` null: shown in the customary one again. */
-  readonly set: (value: number, unit?: Unit | null) => void;
+  readonly set: (value: number, unit?: Unit) => void;
+  /** Puts a value in force as it was; `unit` null: shown in the customary one. */
+  readonly restore: (was: { value?: number; unit: Unit | null; entered?: string }) => void;
   readonly showIn: (label: string) => void;
   /** One arrow key: up or down by 1 %, or 10 %. */
   readonly nudge: (direction: 1 | -1, isLarge: boolean) => void;
@@ -48,9 +49,9 @@ export function useNumberEntry(path: string, field: PathField, empty?: unknown):
     (value === undefined ? "" : readInput(value, measure, typedIn ?? undefined).text);
   const reading = unread[path] && parseTyped(unread[path].text, measure, unit);
 
-  const set = (next: number, nextUnit: Unit | null = unit): void => {
-    const entered = nextUnit ? joined(readInput(next, measure, nextUnit)) : undefined;
-    dispatch({ type: "set", path, value: next, unit: nextUnit && nextUnit.label, entered });
+  const set = (next: number, nextUnit = unit): void => {
+    const entered = joined(readInput(next, measure, nextUnit));
+    dispatch({ type: "set", path, value: next, unit: nextUnit.label, entered });
   };
   const type = (typed: string): void => {
     const before = isTyping ? typing.before : value;
@@ -73,6 +74,10 @@ export function useNumberEntry(path: string, field: PathField, empty?: unknown):
     set: (next, nextUnit) => {
       setTyping(null);
       set(next, nextUnit);
+    },
+    restore: ({ value: was, unit: wasIn, entered }) => {
+      setTyping(null);
+      dispatch({ type: "set", path, value: was, unit: wasIn && wasIn.label, entered });
     },
     showIn: (label) => dispatch({ type: "show-in", path, unit: label }),
     nudge: (direction, isLarge) => {

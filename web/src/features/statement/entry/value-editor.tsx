@@ -25,12 +25,16 @@ export function ValueEditor({ path, field, nib, onClose }: ValueEditorProps) {
   const { draft, dispatch, aside } = useDraftContext();
   const entry = useNumberEntry(path, field);
   const keeps = useKept(path);
-  const [before] = useState({ value: entry.value, unit: entry.typedIn });
+  const [before] = useState(() => ({
+    value: entry.value,
+    unit: entry.typedIn,
+    entered: draft.sheet.wanted.origins[path]?.entered,
+  }));
   const measure = measureOf(draft.sheet.wanted, field);
   const isRulable = before.value !== undefined && before.value !== 0 && !field.integer && field.dimension !== "angle";
 
   const putBack = (): void => {
-    if (before.value !== undefined) entry.set(before.value, before.unit);
+    if (before.value !== undefined) entry.restore(before);
   };
   const done = (): void => {
     dispatch({ type: "settle" });
@@ -72,7 +76,7 @@ export function ValueEditor({ path, field, nib, onClose }: ValueEditorProps) {
       {aside?.(path)}
       <OriginEntry path={path} field={field} entry={entry} />
       {isRulable && before.value !== undefined && (
-        <DragRuler path={path} before={before.value} entry={entry} label={field.label} />
+        <DragRuler path={path} before={before.value} entry={entry} label={field.label} onPutBack={putBack} />
       )}
       <div
         className="mt-4 flex flex-wrap items-center gap-3 border-t border-line pt-3"

@@ -16,12 +16,11 @@ export function driveSentence(scenario: Scenario, off: readonly SwitchedOff[] = 
 function placeWords(scenario: Scenario, place: Place, off: readonly SwitchedOff[]): Piece[] {
   const rows = termRows(scenario, off, place);
   const still = scenario[place].length > 0 ? [] : [...stillWords(scenario, place), text(". ")];
-  const told = rows.flatMap((row, position) => [
-    ...(row.isOn
-      ? [...termWords(scenario, place, row.index), termMenu(scenario, place, rows, position)]
-      : [offPiece(scenario, row.off, position)]),
-    text(". "),
-  ]);
+  const told = rows.flatMap((row, position) =>
+    row.isOn
+      ? [...termWords(scenario, place, row.index), text(". "), termMenu(scenario, place, rows, position)]
+      : [offPiece(scenario, row.off, position), text(". ")],
+  );
   return [...still, ...told];
 }
 
@@ -41,7 +40,7 @@ export function sayTerm(scenario: Scenario, place: Place, term: Term, units: Swi
   return plainText(alone, termWords(alone, place, 0), byPath);
 }
 
-/** What can be done to a term, behind a mark at its end. */
+/** What can be done to a term, behind a mark after it. */
 function termMenu(scenario: Scenario, place: Place, rows: readonly TermRow[], position: number): WordPiece {
   const what = place === "base" ? "motion" : "force";
   const acts: Readonly<Record<string, DraftAction>> = {
