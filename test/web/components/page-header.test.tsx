@@ -5,7 +5,7 @@ import { afterEach, beforeEach, describe, expect, it, vi } from "vitest";
 import { PageHeader } from "../../../web/src/components/page-header.tsx";
 import { allowDialogs } from "../support/missing-in-jsdom.ts";
 
-const person = { name: "Ines Duarte", items: <button type="button">Sign out</button> };
+const person = { name: "Ines Duarte", waiting: 0, items: <button type="button">Sign out</button> };
 
 function show(width: "desk" | "phone") {
   vi.stubGlobal("matchMedia", (query: string) => ({

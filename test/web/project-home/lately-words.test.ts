@@ -14,7 +14,12 @@ const act = (name: string, change: Partial<ActivityEntry> = {}): ActivityEntry =
 });
 
 const told = (...entries: ActivityEntry[]): string[] =>
-  tellTrail(entries, "ines").map(({ before, scenario, after }) => before + (scenario?.title ?? "") + after);
+  tellTrail(entries, "ines").map(
+    ({ before, revision, scenario, after }) =>
+      before + (revision ? `revision ${revision.number} of ` : "") + (scenario?.title ?? "") + after,
+  );
+
+const ofRevision = { revisionId: "r", number: 2 };
 
 it.each([
   [act("scenario.created"), "Tomas Wik began Slide."],
@@ -28,6 +33,17 @@ it.each([
   [act("scenario.saved"), "Tomas Wik saved Slide."],
   [act("scenario.moved-out"), "Tomas Wik moved Slide to another project."],
   [act("cases.created", { subject: null, detail: { count: 40 } }), "Tomas Wik made 40 scenarios of a table of cases."],
+  [act("revision.frozen", { detail: ofRevision }), "Tomas Wik froze revision 2 of Slide."],
+  [
+    act("revision.replayed", { detail: { ...ofRevision, verdict: "agrees" } }),
+    "Tomas Wik replayed revision 2 of Slide: it agrees.",
+  ],
+  [
+    act("review.asked", { detail: { ...ofRevision, reviewer: "Priya Raman" } }),
+    "Tomas Wik asked Priya Raman to review revision 2 of Slide.",
+  ],
+  [act("comment.settled", { detail: ofRevision }), "Tomas Wik settled a comment on revision 2 of Slide."],
+  [act("checklist.set", { subject: null, detail: { count: 3 } }), "Tomas Wik set the checklist: three points."],
   [act("project.archived", { subject: null, by: { accountId: "ines", name: "Ines" } }), "You archived the project."],
   [
     act("member.changed", { subject: { id: "ines", name: "Ines", isThere: true }, detail: { role: "editor" } }),

@@ -1,16 +1,28 @@
 import type { ActivityEntry } from "@restband/api/contract";
 import { infiniteQueryOptions, useQuery, useQueryClient } from "@tanstack/react-query";
 import { useEffect, useRef } from "react";
-import { call } from "./client.ts";
+import { call, type Input } from "./client.ts";
 
-const listActivity = (projectId: string, before: number | null, signal: AbortSignal): Promise<ActivityEntry[]> =>
-  call("listActivity", { params: { projectId }, query: before === null ? {} : { before: String(before) }, signal });
+/** What of a trail is asked for; nothing: all of it. */
+export type TrailFilter = Omit<Input<"listActivity">["query"], "before">;
 
-/** The whole trail of a project, newest first, a page at a time. */
-export const trailQuery = (projectId: string) =>
+const listActivity = (
+  projectId: string,
+  before: number | null,
+  signal: AbortSignal,
+  filter: TrailFilter = {},
+): Promise<ActivityEntry[]> =>
+  call("listActivity", {
+    params: { projectId },
+    query: { ...filter, ...(before === null ? {} : { before: String(before) }) },
+    signal,
+  });
+
+/** The trail of a project, or what of it is asked for, newest first, a page at a time. */
+export const trailQuery = (projectId: string, filter: TrailFilter = {}) =>
   infiniteQueryOptions({
-    queryKey: ["projects", projectId, "trail"],
-    queryFn: ({ pageParam, signal }) => listActivity(projectId, pageParam, signal),
+    queryKey: ["projects", projectId, "trail", filter],
+    queryFn: ({ pageParam, signal }) => listActivity(projectId, pageParam, signal, filter),
     initialPageParam: null as number | null,
     getNextPageParam: (page) => page.at(-1)?.id ?? null,
   });

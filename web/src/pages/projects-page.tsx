@@ -35,11 +35,12 @@ export function ProjectsPage() {
     <>
       <title>All projects · Restband</title>
       <WorkHeader title="All projects" actions={newProject} />
-      <main id="content" tabIndex={-1} className="page-width grow py-8 desk:py-9">
-        <div className="max-w-[972px]">
-          <Suspense>
-            <WaitingList />
-          </Suspense>
+      <main
+        id="content"
+        tabIndex={-1}
+        className="page-width grid grow content-start gap-x-16 gap-y-10 py-8 desk:py-9 wide:grid-cols-[minmax(0,972px)_292px]"
+      >
+        <div className="min-w-0">
           <h1 className="mb-6 text-24 font-semibold desk:text-34">
             {projectsHeadline(projects.length, areArchivedShown)}
           </h1>
@@ -57,6 +58,9 @@ export function ProjectsPage() {
             </button>
           )}
         </div>
+        <Suspense>
+          <WaitingList />
+        </Suspense>
       </main>
       <Dialog isOpen={isNew} title="New project" onClose={() => setNew(false)}>
         <ProjectForm

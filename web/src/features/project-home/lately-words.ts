@@ -1,11 +1,12 @@
 import type { ActivityEntry } from "@restband/api/contract";
 import { listed, sayMany } from "../../format/words.ts";
 
-/** An act in a sentence: `before`, the scenario it was done to (a link where it is still here), `after`. */
+/** An act in a sentence: `before`, the revision and scenario it was done to (links where they are here), `after`. */
 export interface Told {
   readonly id: number;
   readonly at: string;
   readonly before: string;
+  readonly revision: { id: string; number: number } | null;
   readonly scenario: { id: string; title: string; isThere: boolean } | null;
   readonly after: string;
 }
@@ -87,10 +88,40 @@ const sentences: Readonly<Record<string, (entry: ActivityEntry, whom: string) =>
   "scenario.restored": () => ({ verb: "restored ", hasScenario: true }),
   "exploration.created": ({ detail }) => ({ verb: `began a ${String(detail.kind)} of `, hasScenario: true }),
   "exploration.deleted": ({ detail }) => ({ verb: `deleted a ${String(detail.kind)} of `, hasScenario: true }),
+  "revision.frozen": () => ({ verb: "froze ", hasScenario: true }),
+  "revision.replayed": ({ detail }) => ({
+    verb: "replayed ",
+    hasScenario: true,
+    after: `: ${verdictOf(detail.verdict)}`,
+  }),
+  "revision.accepted": () => ({ verb: "accepted ", hasScenario: true }),
+  "revision.returned": () => ({ verb: "returned ", hasScenario: true }),
+  "revision.self-checked": () => ({ verb: "checked their own ", hasScenario: true }),
+  "revision.withdrawn": () => ({ verb: "withdrew ", hasScenario: true }),
+  "review.asked": ({ detail }) => ({ verb: `asked ${String(detail.reviewer)} to review `, hasScenario: true }),
+  "comment.added": () => ({ verb: "commented on ", hasScenario: true }),
+  "comment.answered": () => ({ verb: "answered a comment on ", hasScenario: true }),
+  "comment.settled": () => ({ verb: "settled a comment on ", hasScenario: true }),
+  "comment.reopened": () => ({ verb: "opened again a comment on ", hasScenario: true }),
+  "checklist.set": ({ detail }) => ({ verb: `set the checklist: ${sayMany(Number(detail.count), "point")}.` }),
   "cases.created": ({ detail }) => ({
     verb: `made ${sayMany(Number(detail.count), "scenario")} of a table of cases.`,
   }),
 };
+
+const verdicts: Readonly<Record<string, string>> = {
+  agrees: "it agrees",
+  differs: "it differs",
+  sensitive: "it is sensitive",
+};
+
+const verdictOf = (verdict: string | number | undefined): string => verdicts[String(verdict)] ?? String(verdict);
+
+/** The revision an act was done to; null where it was the scenario itself. */
+function revisionOf({ detail }: ActivityEntry): Told["revision"] {
+  const { revisionId: id, number } = detail;
+  return typeof id === "string" && typeof number === "number" ? { id, number } : null;
+}
 
 function tell(entry: ActivityEntry, ownId: string): Told {
   const { id, at, by, subject } = entry;
@@ -98,7 +129,7 @@ function tell(entry: ActivityEntry, ownId: string): Told {
   // An act of a newer server is told by its plain name.
   const { verb, hasScenario, after = "" } = sentences[entry.act]?.(entry, whom) ?? { verb: `${entry.act}.` };
   const before = `${by.accountId === ownId ? "You" : by.name} ${verb}`;
-  if (!hasScenario || !subject) return { id, at, before, scenario: null, after: "" };
+  if (!hasScenario || !subject) return { id, at, before, revision: null, scenario: null, after: "" };
   const scenario = { id: subject.id, title: subject.name || "Untitled", isThere: subject.isThere };
-  return { id, at, before, scenario, after: `${after}.` };
+  return { id, at, before, revision: revisionOf(entry), scenario, after: `${after}.` };
 }

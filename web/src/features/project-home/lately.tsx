@@ -4,6 +4,7 @@ import { Dialog } from "../../components/dialog.tsx";
 import { lazyPart } from "../../components/lazy-part.ts";
 import { tellTrail } from "./lately-words.ts";
 import { TrailList } from "./trail-list.tsx";
+import { TrailSeal } from "./trail-seal.tsx";
 
 // Loaded when it is opened: it is no part of the first paint.
 const WholeTrail = lazyPart(async () => (await import("./whole-trail.tsx")).WholeTrail);
@@ -28,6 +29,7 @@ export function Lately({ projectId, ownId }: { projectId: string; ownId: string 
           The whole trail
         </button>
       )}
+      <TrailSeal projectId={projectId} />
       <Dialog isOpen={isOpen} isWide title="The whole trail" onClose={() => setOpen(false)}>
         <WholeTrail projectId={projectId} ownId={ownId} />
       </Dialog>

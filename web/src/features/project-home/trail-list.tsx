@@ -7,7 +7,7 @@ import type { Told } from "./lately-words.ts";
 export function TrailList({ projectId, told }: { projectId: string; told: readonly Told[] }) {
   return (
     <ol className="flex flex-col gap-2.5 py-4">
-      {told.map(({ id, at, before, scenario, after }) => (
+      {told.map(({ id, at, before, revision, scenario, after }) => (
         <li key={id} className="grid grid-cols-[74px_minmax(0,1fr)] gap-x-2">
           <time
             dateTime={at}
@@ -18,6 +18,14 @@ export function TrailList({ projectId, told }: { projectId: string; told: readon
           </time>
           <span className="wrap-anywhere">
             {before}
+            {revision && (
+              <>
+                <Link to={paths.revision(projectId, revision.id)} className="link">
+                  revision {revision.number}
+                </Link>
+                {" of "}
+              </>
+            )}
             {scenario &&
               (scenario.isThere ? (
                 <Link to={paths.scenario(projectId, scenario.id)} className="link">

@@ -92,8 +92,8 @@ function Curves({ revision, before, plot }: CurvesProps) {
   const y = (v: number) => BOTTOM - 6 - ((v - low) / span) * (HEIGHT - 12);
   const ticks = ticksOf(fromSi(low, unit), fromSi(low + span, unit));
   return (
-    <g className="figures text-[12.5px]">
-      <text x={plot.left - 10} y={TOP - 8} textAnchor="end" className="fill-quiet font-sans text-[13px]">
+    <g className="text-[12.5px]">
+      <text x={plot.left - 10} y={TOP - 8} textAnchor="end" className="fill-quiet text-[13px]">
         {unit.label}
       </text>
       {ticks.map((tick) => (
@@ -102,18 +102,18 @@ function Curves({ revision, before, plot }: CurvesProps) {
             d={`M${plot.left} ${y(tick * unit.factor)}H${plot.right}`}
             className={tick === 0 ? "stroke-edge" : "stroke-line"}
           />
-          <text x={plot.left - 10} y={y(tick * unit.factor) + 4} textAnchor="end" className="fill-quiet">
+          <text x={plot.left - 10} y={y(tick * unit.factor) + 4} textAnchor="end" className="figures fill-quiet">
             {formatNumber(tick)}
           </text>
         </g>
       ))}
       <path d={`M${plot.left} ${BOTTOM}H${plot.right}`} className="stroke-ink" />
-      {ticksOf(plot.from, plot.to).map((t) => (
-        <text key={t} x={xOfTime(plot, t)} y={BOTTOM + 18} textAnchor="middle" className="fill-quiet">
+      {ticksOf(plot.from, plot.to, plot.right - plot.left > 500 ? 8 : 4).map((t) => (
+        <text key={t} x={xOfTime(plot, t)} y={BOTTOM + 18} textAnchor="middle" className="figures fill-quiet">
           {formatNumber(t)}
         </text>
       ))}
-      <text x={plot.right + 10} y={BOTTOM + 18} className="fill-quiet font-sans text-[13px]">
+      <text x={plot.right + 10} y={BOTTOM + 18} className="fill-quiet text-[13px] max-desk:hidden">
         s
       </text>
       {before && <path d={pathOf(before.trace, plot, y)} className="fill-none stroke-quiet" strokeOpacity={0.55} />}
@@ -129,7 +129,7 @@ function Names({ revision, before, plot, y }: CurvesProps & { y: (v: number) => 
   const other = before ? y(before.trace.v.at(-1) ?? 0) : own;
   const apart = Math.abs(own - other) < 16 ? (other >= own ? own + 16 : own - 16) : other;
   return (
-    <g className="font-sans text-[13px] max-desk:hidden">
+    <g className="text-[13px] max-desk:hidden">
       <text x={plot.right + 10} y={own + 4} className="fill-slip">
         revision {revision.number}
       </text>

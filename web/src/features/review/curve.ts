@@ -25,9 +25,9 @@ export function pathOf({ t, v }: Trace, plot: PlotPlace, y: (value: number) => n
   return points.length === 0 ? "" : `M${points.join("L")}`;
 }
 
-/** Round figures within a range, some four of them. */
-export function ticksOf(low: number, high: number): number[] {
-  const raw = (high - low) / 4;
+/** Round figures within a range, at most so many and one. */
+export function ticksOf(low: number, high: number, count = 4): number[] {
+  const raw = (high - low) / count;
   const power = 10 ** Math.floor(Math.log10(raw));
   const step = [1, 2, 5, 10].map((each) => each * power).find((each) => each >= raw) ?? 10 * power;
   const first = Math.ceil(low / step);

@@ -40,8 +40,8 @@ export function ReviewPanel({ project, revision, ownId, replays }: ReviewPanelPr
   const close = () => setOpen(null);
   return (
     <>
-      {review.decisions.length > 0 && <DecisionList decisions={review.decisions} replays={replays} />}
       <Asked review={review} ownId={ownId} />
+      {review.decisions.length > 0 && <DecisionList decisions={review.decisions} replays={replays} />}
       {may.decide || may.selfCheck ? (
         <DecideForm revision={revision} review={review} replays={own} />
       ) : (

@@ -4,6 +4,7 @@ import { Link } from "react-router-dom";
 import { noticesQuery, useCloseNotice } from "../../api/notices.ts";
 import { sayWhen } from "../../format/when.ts";
 import { paths } from "../../paths.ts";
+import { grouped, type Waiting } from "./waiting.ts";
 
 const acts: Record<Notice["kind"], string> = {
   "review-asked": "asks you to review",
@@ -21,40 +22,46 @@ export function WaitingList() {
   const close = useCloseNotice();
   if (!notices || notices.length === 0) return null;
   return (
-    <section aria-labelledby="waiting" className="mb-10">
+    <section aria-labelledby="waiting">
       <h2 id="waiting" className="border-b border-edge pb-2.5 text-15 font-bold">
         Waits for you
       </h2>
       <ul>
-        {notices.map((notice) => (
-          <Waiting key={notice.id} notice={notice} onClose={() => close.mutate(notice.id)} />
+        {grouped(notices).map((waiting) => (
+          <WaitingRow
+            key={waiting.notice.id}
+            waiting={waiting}
+            onClose={() => waiting.ids.forEach((id) => close.mutate(id))}
+          />
         ))}
       </ul>
     </section>
   );
 }
 
-function Waiting({ notice, onClose }: { notice: Notice; onClose: () => void }) {
+function WaitingRow({ waiting: { notice, ids }, onClose }: { waiting: Waiting; onClose: () => void }) {
   const { kind, by, at, project, revision, commentId } = notice;
   const isTask = kind === "review-asked";
-  const target = `${paths.revision(project.id, revision.id)}${commentId ? `#comment-${commentId}` : ""}`;
+  const target = `${paths.revision(project.id, revision.id)}${commentId ? "#comments" : ""}`;
   return (
-    <li className="flex flex-wrap items-baseline gap-x-4 gap-y-1 border-b border-line py-2.5">
-      <p className="min-w-0 grow basis-72">
+    <li className="border-b border-line py-2.5">
+      <p className="wrap-anywhere">
         {by.name} {acts[kind]}{" "}
         <Link to={target} className="link font-semibold" onClick={() => !isTask && onClose()}>
           revision {revision.number} of {revision.title || "Untitled"}
         </Link>
-        <span className="block text-13 text-quiet">{project.name}</span>
+        {ids.length > 1 && `, ${ids.length} times`}
       </p>
-      <time dateTime={at} className="text-13 text-quiet">
-        {sayWhen(new Date(at))}
-      </time>
-      {!isTask && (
-        <button type="button" className="link hit text-13" onClick={onClose}>
-          Put away
-        </button>
-      )}
+      <p className="flex flex-wrap items-baseline gap-x-3 text-13 text-quiet">
+        <span className="grow">
+          {project.name} · <time dateTime={at}>{sayWhen(new Date(at))}</time>
+        </span>
+        {!isTask && (
+          <button type="button" className="link hit" onClick={onClose}>
+            Put away
+          </button>
+        )}
+      </p>
     </li>
   );
 }
