@@ -2,6 +2,7 @@ import { mkdirSync, mkdtempSync, rmSync, writeFileSync } from "node:fs";
 import { cpus, loadavg, tmpdir } from "node:os";
 import { join } from "node:path";
 import { fileURLToPath } from "node:url";
+import { accuracies, type Accuracy } from "./accuracy.ts";
 import { allocationOf, median, timeOf } from "./measure.ts";
 import { floorAcceleration } from "./problems.ts";
 import { subjects, waysOf, type Tally } from "./subjects.ts";
@@ -38,7 +39,7 @@ try {
   const recordFile = join(scratch, "record.txt");
   writeFileSync(recordFile, floorAcceleration().join("\n"));
   const yardsticks = [inC(recordFile, scratch), inCvode(recordFile, scratch), inSciPy(recordFile)];
-  report(measure(yardsticks), yardsticks);
+  report(measure(yardsticks), yardsticks, accuracies(recordFile));
 } finally {
   rmSync(scratch, { recursive: true, force: true });
 }
@@ -79,13 +80,13 @@ function rowsOf(series: readonly Series[]): Row[] {
   }));
 }
 
-function report(rows: readonly Row[], yardsticks: readonly Yardstick[]): void {
+function report(rows: readonly Row[], yardsticks: readonly Yardstick[], accuracy: Accuracy[] | string): void {
   const [{ model }] = cpus();
   const absent = yardsticks.flatMap((one) => ("absent" in one ? [`${one.name}: ${one.absent}`] : []));
   const machine = { model, cores: cpus().length, node: process.version, load: loadavg()[0], rounds };
   const file = join(root, ".local/bench.json");
   mkdirSync(join(root, ".local"), { recursive: true });
-  writeFileSync(file, JSON.stringify({ machine, rows, absent }, null, 2));
+  writeFileSync(file, JSON.stringify({ machine, rows, accuracy, absent }, null, 2));
   console.log(
     `${model}, ${machine.cores} cores, Node ${machine.node}, load ${machine.load.toFixed(1)}, median of ${rounds}`,
   );
@@ -93,6 +94,9 @@ function report(rows: readonly Row[], yardsticks: readonly Yardstick[]): void {
     console.log(`\n${name}  ${what}`);
     for (const row of rows.filter(({ problem }) => problem === name)) console.log(lineOf(row));
   }
+  console.log("\nEvents of the exact method beside forty digits, at most apart");
+  if (typeof accuracy === "string") console.log(`  ${accuracy}`);
+  else for (const { problem, events, t, x } of accuracy) console.log(`  ${problem}  ${events} events  ${t} s  ${x} m`);
   console.log(`\n${absent.join("\n")}`);
   console.log("all of it in .local/bench.json");
 }

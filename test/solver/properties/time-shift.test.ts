@@ -38,6 +38,10 @@ function atRest(drawn: Scenario): Scenario {
   };
 }
 
+/** Two moves that begin together against each other leave it to rounding when the base moves at all. */
+const movesCancel = ({ base }: Scenario): boolean =>
+  base.filter(({ kind }) => kind === "move" || kind === "staircase").length > 1;
+
 /** Whether the body goes as far as its spring is stretched, near enough: else its x is a small difference of large numbers. */
 const goesFar = ({ quantities }: Result, { body }: Scenario): boolean =>
   quantities.peakDisplacement! * body.stiffness >= 1e-3 * quantities.driveForcePeak!;
@@ -62,7 +66,7 @@ test(
         const scenario = atRest(drawn);
         // bristles are integrated all the time: their steps fall elsewhere
         fc.pre(scenario.contact.law.model !== "bristle");
-        fc.pre(unsupported(scenario) === null && !leavesInManyWays(scenario));
+        fc.pre(unsupported(scenario) === null && !leavesInManyWays(scenario) && !movesCancel(scenario));
         const { seconds } = scenario.span;
         const later = share * seconds;
         const [now, then] = [
