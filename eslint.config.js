@@ -75,6 +75,8 @@ const solverRules = [
       [
         "simulate\\.ts$",
         "version\\.ts$",
+        "limits\\.ts$",
+        "json-text\\.ts$",
         "numerics/",
         "scenario/",
         "textbook/",

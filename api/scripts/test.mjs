@@ -18,7 +18,7 @@ await main(() => {
 
 async function test(atEnd) {
   await installPackages();
-  await installPrograms(["chromium"], ["chromium"]);
+  await installPrograms(["chromium", "parallel"], ["chromium", "parallel"]);
   await installScipy();
   await removeLeftovers();
   makePrivateFolder(folder);

@@ -1,9 +1,12 @@
-import { readFile } from "node:fs/promises";
 import { answerText, parse, refusal, written } from "./cli/answer.ts";
 import { type Command, readArguments, usage, UsageError } from "./cli/arguments.ts";
-import { answerCell, cellsFormat, checkCells } from "./cli/cells.ts";
+import { answerCell, checkCells } from "./cli/cells.ts";
+import { explore } from "./cli/explore.ts";
+import { readExploreArguments } from "./cli/explore-arguments.ts";
+import { readText, told } from "./cli/files.ts";
 import { linesOf, writeLine } from "./cli/lines.ts";
 import { scriptText } from "./cli/script-text.ts";
+import { cellsFormat } from "./explore/sweep/exchange.ts";
 import { jsonText } from "./json-text.ts";
 import type { Refusal, SimulateOptions } from "./options.ts";
 import { ownMember } from "./scenario/own-member.ts";
@@ -13,7 +16,7 @@ const badUsage = 2;
 
 /** Answers one file: the result on standard output, or every fault on standard error, a line each. */
 async function solveFile(file: string, options: SimulateOptions): Promise<number> {
-  return tellFile(written(answerText(await readScenarioFile(file), options)));
+  return tellFile(written(answerText(await readText(file), options)));
 }
 
 async function tellFile({ text, refused }: { text: string; refused: Refusal | null }): Promise<number> {
@@ -27,15 +30,7 @@ async function tellFile({ text, refused }: { text: string; refused: Refusal | nu
 
 /** Writes a Python file that recomputes what this solver says of a scenario; where there is none, why. */
 async function scriptFile(file: string, { method }: SimulateOptions): Promise<number> {
-  return tellFile(scriptText(await readScenarioFile(file), { method, samples: 0 }));
-}
-
-async function readScenarioFile(file: string): Promise<string> {
-  try {
-    return await readFile(file, "utf8");
-  } catch (error) {
-    throw new UsageError(`The file cannot be read: ${(error as Error).message}.`);
-  }
+  return tellFile(scriptText(await readText(file), { method, samples: 0 }));
 }
 
 /** Answers each line in its place. A first line that is a header of cells makes the others cells. */
@@ -75,10 +70,11 @@ function tellRefused({ error: { path, message } }: Refusal, where: string): numb
   return refusedStatus;
 }
 
-const told = (path: string, message: string) => (path === "" ? message : `${path}: ${message}`);
-
 async function main(): Promise<number> {
-  const command: Command | null = readArguments(process.argv.slice(2));
+  const given = process.argv.slice(2);
+  const exploring = readExploreArguments(given);
+  if (exploring !== null) return explore(exploring);
+  const command: Command | null = readArguments(given);
   if (command === null) {
     process.stdout.write(usage);
     return 0;

@@ -89,3 +89,11 @@ export { drawScenario, drawsOf, type Draws } from "./explore/tolerance/draws.ts"
 export { runDraws, studyRows, type DrawSettings } from "./explore/tolerance/run-draws.ts";
 export { toleranceSummary } from "./explore/tolerance/summarise.ts";
 export { variedPaths } from "./explore/tolerance/tolerance-plan.ts";
+export { cellLines, sweepDigest } from "./explore/sweep/exchange.ts";
+export { readAnswers, type ReadAnswers } from "./explore/sweep/read-answers.ts";
+export {
+  checkThresholdQuestion,
+  thresholdPlanSchema,
+  type CheckedThreshold,
+  type ThresholdPlan,
+} from "./explore/threshold/check-threshold-question.ts";

@@ -13,6 +13,12 @@ npm run --silent solve -- python FILE         a Python file that recomputes the 
   --no-events          leave the list of events out
   --quantities a,b,…   these quantities only
 
+npm run --silent solve -- search QUESTION FILE           a threshold: {"path", "low", "high", "target"}
+npm run --silent solve -- sweep PLAN FILE                a restband-sweep/1 of a scenario, a cell a line
+npm run --silent solve -- sweep PLAN FILE --cells        its cells alone, to be solved elsewhere with --lines
+npm run --silent solve -- sweep PLAN FILE --check FILE   whether answers solved elsewhere are whole and right
+npm run --silent solve -- study PLAN FILE                a restband-tolerance/1 of a scenario: what it says
+
 A line that is refused gives {"error": {"path", "message", "faults"}} in its place. With --lines, a first line of format
 restband-cells/1 makes each further line a cell, [index, value, …], answered by [index, outcome, quantity, …].
 

@@ -1,3 +1,5 @@
+import { linkFaults, withValues, type Links } from "../explore/links.ts";
+import { cellsFormat } from "../explore/sweep/exchange.ts";
 import type { Refusal, SimulateOptions } from "../options.ts";
 import { checkScenario } from "../scenario/check-scenario.ts";
 import { fieldPaths } from "../scenario/field-paths.ts";
@@ -5,24 +7,15 @@ import { ownMember } from "../scenario/own-member.ts";
 import { quantityNames } from "../scenario/quantity-names.ts";
 import type { Fault, Scenario } from "../scenario/scenario.ts";
 import { quoted } from "../scenario/sentences.ts";
-import { numberAt, withNumber } from "../scenario/path.ts";
 import { answer, parse } from "./answer.ts";
-
-export const cellsFormat = "restband-cells/1";
 
 /** The first line of `restband-cells/1`: what its cells vary, and what is asked of each. */
 export interface Cells {
   readonly base: Scenario;
   /** Paths the values of a cell are set at, in order. */
   readonly fields: readonly string[];
-  /** Fields that follow another, by path: value = factor × the value at `of`. */
-  readonly links: Readonly<Record<string, Link>>;
+  readonly links: Links;
   readonly quantities: readonly string[];
-}
-
-interface Link {
-  readonly of: string;
-  readonly factor: number;
 }
 
 /** Checks a header: its base is a scenario, its paths are fields of it, its quantities have names. */
@@ -40,7 +33,7 @@ export function checkCells(header: unknown): { cells: Cells; faults: [] } | { ce
   const wrong = [
     ...unknownNames("fields", fields, paths, "This scenario has no number called"),
     ...unknownNames("quantities", quantities, new Set(quantityNames), "No quantity is called"),
-    ...linkFaults(links, paths),
+    ...linkFaults(links, scenario, Array.isArray(fields) ? (fields as string[]) : []),
   ];
   if (wrong.length > 0) return { cells: null, faults: wrong };
   return { cells: { base: scenario, fields, links, quantities } as Cells, faults: [] };
@@ -51,18 +44,6 @@ function unknownNames(path: string, names: unknown, known: ReadonlySet<string>, 
   return names.flatMap((name: unknown, i) =>
     known.has(name as string) ? [] : [{ path: `${path}[${i}]`, message: `${sentence} ${quoted(name)}.` }],
   );
-}
-
-function linkFaults(links: unknown, paths: ReadonlySet<string>): Fault[] {
-  if (typeof links !== "object" || links === null)
-    return [{ path: "links", message: `Links are an object by path; it is ${quoted(links)}.` }];
-  return Object.entries(links).flatMap(([path, link]) => {
-    const isLink = paths.has(ownMember(link, "of") as string) && Number.isFinite(ownMember(link, "factor"));
-    if (paths.has(path) && isLink) return [];
-    return [
-      { path: `links.${path}`, message: 'A link is a number of the scenario, {"of": another, "factor": a number}.' },
-    ];
-  });
 }
 
 /** One cell, `[index, value, …]`, answered by `[index, outcome, quantity, …]`; a reason follows where there is no outcome. */
@@ -85,10 +66,10 @@ export function answerCell(cells: Cells, line: string, options: SimulateOptions)
 }
 
 function cellScenario({ base, fields, links }: Cells, values: readonly number[]): Scenario {
-  const cell = fields.reduce((scenario, path, i) => withNumber(scenario, path, values[i]), base);
-  return Object.entries(links).reduce(
-    (scenario, [path, { of, factor }]) => withNumber(scenario, path, factor * numberAt(scenario, of)),
-    cell,
+  return withValues(
+    base,
+    fields.map((path, i) => [path, values[i]]),
+    links,
   );
 }
 

@@ -17,8 +17,11 @@ export function canonicalText(scenario: Scenario): string {
 
 /** SHA-256 of the canonical text, lower-case hex. */
 export function digestOf(scenario: Scenario): string {
-  return bytesToHex(sha256(utf8ToBytes(canonicalText(scenario))));
+  return digestOfText(canonicalText(scenario));
 }
+
+/** SHA-256 of a text's UTF-8, lower-case hex. */
+export const digestOfText = (text: string): string => bytesToHex(sha256(utf8ToBytes(text)));
 
 /** A checked scenario with its long records named by digest; their points then travel beside it. */
 export function canonicalForm(scenario: Scenario): Scenario {

@@ -1,4 +1,5 @@
 import type { LimitVerdict, Outcome } from "../../result.ts";
+import type { Limit } from "../../scenario/scenario.ts";
 import type { QuantityName } from "../../scenario/quantity-names.ts";
 
 /** What rows hold: the plan of a sweep or of a study. */
@@ -14,6 +15,11 @@ export interface RowPlan {
  * - `absent`: bit i is set where the i-th quantity of the plan has no value in this cell; its number is then 0.
  */
 export type CellRow = Float64Array;
+
+/** The same with the quantities that limits name in front: enough to tell every verdict. */
+export const withLimitQuantities = ({ quantities }: RowPlan, limits: readonly Limit[]): RowPlan => ({
+  quantities: [...new Set([...limits.map(({ quantity }) => quantity as QuantityName), ...quantities])],
+});
 
 /** Numbers in front of the quantities. */
 export const rowHead = 3;

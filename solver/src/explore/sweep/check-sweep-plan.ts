@@ -7,9 +7,8 @@ import { defaultLinks, linkFaults } from "../links.ts";
 import { shapeFaults } from "../shape-faults.ts";
 import { numericField } from "../../scenario/numeric-fields.ts";
 import { mostLimits } from "../cells/cell-row.ts";
+import { mostCellsOf } from "./tiles.ts";
 import { mostCells, type SweepAxis, type SweepPlan, sweepPlanSchema } from "./sweep-plan.ts";
-
-const mostContinued = 4096;
 
 /** A plan, or every fault of it. */
 export type CheckedSweep = { readonly plan: SweepPlan; readonly faults: [] } | { plan: null; faults: Fault[] };
@@ -106,7 +105,9 @@ function boundFaults(path: string, value: number, field: Field): Fault[] {
     : [{ path, message: numberSentence(field, value) }];
 }
 
-function sizeFaults({ axes, continuation }: SweepPlan): Fault[] {
+function sizeFaults(plan: SweepPlan): Fault[] {
+  const { axes, continuation } = plan;
+  const mostContinued = mostCellsOf(plan);
   const counts = axes.map((axis) => (axis.spacing === "listed" ? axis.values.length : axis.count));
   const branches = continuation === "both" ? 2 : 1;
   const cells = branches * counts.reduce((product, count) => product * count, 1);

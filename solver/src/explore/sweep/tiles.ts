@@ -9,9 +9,15 @@ import type { SweepPlan } from "./sweep-plan.ts";
  */
 
 export const mostTileCells = 4096;
+/** A tile as base64 stays below a megabyte. */
+const mostTileBytes = 720_000;
 const blocksAcross = 8;
 const smallestSide = 8;
 const blocksAlong = 64;
+
+/** How many cells a tile of this sweep has at most. */
+export const mostCellsOf = (plan: SweepPlan): number =>
+  Math.min(mostTileCells, Math.floor(mostTileBytes / (8 * rowLength(plan))));
 
 /** How many tiles a sweep has. */
 export const tileCount = (plan: SweepPlan): number =>
@@ -57,7 +63,7 @@ function grainOf(plan: SweepPlan): { sides: [number, number]; steps: [number, nu
     number,
     number,
   ];
-  while (sides[0] * sides[1] > mostTileCells) {
+  while (sides[0] * sides[1] > mostCellsOf(plan)) {
     const larger = sides[0] >= sides[1] ? 0 : 1;
     sides[larger] = Math.ceil(sides[larger] / 2);
   }
@@ -118,7 +124,7 @@ function coarseKinds(plan: SweepPlan, rows: Float64Array): (block: Block) => str
 function lineTiles(plan: SweepPlan): { linesEach: number; tiles: number } {
   const [first] = sizesOf(plan);
   const lines = cellCount(plan) / first;
-  const linesEach = Math.max(1, Math.min(Math.floor(mostTileCells / first), Math.ceil(lines / blocksAlong)));
+  const linesEach = Math.max(1, Math.min(Math.floor(mostCellsOf(plan) / first), Math.ceil(lines / blocksAlong)));
   return { linesEach, tiles: Math.ceil(lines / linesEach) };
 }
 

@@ -1,15 +1,12 @@
-import type { QuantityName } from "../../scenario/quantity-names.ts";
 import type { Records, Scenario } from "../../scenario/scenario.ts";
-import { rowLength, type RowPlan } from "../cells/cell-row.ts";
+import { rowLength, withLimitQuantities, type RowPlan } from "../cells/cell-row.ts";
 import { CellRuns } from "../cells/cell-runs.ts";
 import type { Draws } from "./draws.ts";
 import { variedPaths, type TolerancePlan } from "./tolerance-plan.ts";
 
 /** What the rows of a study hold: the quantities that limits name, then the others asked for. */
-export function studyRows(plan: TolerancePlan, scenario: Scenario): RowPlan {
-  const named = scenario.limits.map(({ quantity }) => quantity as QuantityName);
-  return { quantities: [...new Set([...named, ...plan.quantities])] };
-}
+export const studyRows = (plan: TolerancePlan, scenario: Scenario): RowPlan =>
+  withLimitQuantities(plan, scenario.limits);
 
 export interface DrawSettings {
   readonly records?: Records;

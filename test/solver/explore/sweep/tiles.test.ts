@@ -1,5 +1,6 @@
 import {
   mostTileCells,
+  quantityNames,
   rowLength,
   tileCells,
   tileCount,
@@ -43,8 +44,13 @@ describe("the tiles of a sweep", () => {
     expect(Math.min(...tiles.map((cells) => cells.length))).toBeGreaterThan(0);
   });
 
-  it("fit a megabyte with as many quantities as a plan may have", () => {
-    expect(mostTileCells * (rowLength(planOf([2])) + 29) * 8).toBeLessThanOrEqual(2 ** 20);
+  it("fit a megabyte as base64 with as many quantities as a plan may have", () => {
+    for (const sizes of [[500, 500], [250_000], [2000, 100]])
+      for (const continuation of sizes[0] > 2500 ? (["none"] as const) : (["none", "up"] as const)) {
+        const plan = { ...planOf(sizes, continuation), quantities: quantityNames.slice(0, 29) };
+        const cells = Math.max(...tilesOf(plan).map((tile) => tile.length));
+        expect(Math.ceil((cells * rowLength(plan) * 8) / 3) * 4).toBeLessThan(1e6);
+      }
   });
 
   it("follow a line down from its last value", () => {
