@@ -1,8 +1,7 @@
 import type { Scenario } from "@restband/solver";
-import { Figure } from "../../components/figure.tsx";
 import { readInput } from "../../format/format-quantity.ts";
 import { useOtherUnits } from "../../format/other-units.ts";
-import { unitsEntered } from "./draft/draft-reducer.ts";
+import { unitsEntered } from "./draft/open-draft.ts";
 import { unitTyped } from "./entry/use-number-entry.ts";
 import { groups, type Group } from "./groups.ts";
 import { originsIn } from "./origin/origin-words.ts";
@@ -29,7 +28,7 @@ function FrozenGroup({ group, scenario }: { group: Group; scenario: Scenario }) 
       <h3 className="pt-1 text-15 text-quiet">{group.name}</h3>
       <div className="min-w-0">
         <p className="max-w-[820px] text-18 leading-[1.85] desk:leading-[1.7]">
-          {group.sentence(scenario).map((piece, i) => (
+          {told(group.sentence(scenario)).map((piece, i) => (
             <FrozenPiece key={i} piece={piece} scenario={scenario} units={units} />
           ))}
         </p>
@@ -50,6 +49,12 @@ function FrozenGroup({ group, scenario }: { group: Group; scenario: Scenario }) 
   );
 }
 
+/** What a sentence says, without the offer of more at its end. */
+function told(pieces: readonly Piece[]): readonly Piece[] {
+  const end = pieces.findIndex((piece) => piece.kind === "word" && piece.isOffer);
+  return end < 0 ? pieces : pieces.slice(0, end);
+}
+
 interface FrozenPieceProps {
   piece: Piece;
   scenario: Scenario;
@@ -62,10 +67,14 @@ function FrozenPiece({ piece, scenario, units }: FrozenPieceProps) {
     if (value === undefined) return "–";
     const measure = measureOf(scenario, piece.field);
     const entered = unitTyped(units[piece.path], measure) ?? undefined;
-    return <Figure {...readInput(value, measure, entered)} className="font-semibold" />;
+    const { text, unit, full } = readInput(value, measure, entered);
+    return (
+      <span className="whitespace-nowrap" title={full}>
+        <span className="figures text-[17px] font-semibold">{text}</span>
+        {unit && (unit.startsWith("°") ? unit : ` ${unit}`)}
+      </span>
+    );
   }
-  // A word that only asks for a choice says nothing.
-  if (piece.kind === "word" && piece.value === "") return null;
   const text = plainText(scenario, [piece], units);
   return piece.kind === "word" ? <span className="font-semibold">{text}</span> : text;
 }

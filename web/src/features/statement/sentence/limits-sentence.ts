@@ -11,7 +11,7 @@ export function limitsSentence(scenario: Scenario): Piece[] {
     text(separator(i, scenario.limits.length)),
     ...limitWords(scenario, limit, i),
   ]);
-  return [text("It must keep "), ...limits, text(". "), adder("Add a limit"), text(".")];
+  return [text("It must keep "), ...limits, text(". "), { ...adder("Add a limit"), isOffer: true }, text(".")];
 }
 
 function separator(index: number, count: number): string {

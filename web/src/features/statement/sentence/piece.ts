@@ -24,6 +24,8 @@ export interface WordPiece {
   choose: (value: string) => DraftAction;
   /** Stands in brackets, kept together with them. */
   isBracketed?: boolean;
+  /** Tells nothing and only offers more: left out with what follows it where the sentence is read and not edited. */
+  isOffer?: boolean;
   /** No word of the sentence but a mark after one: what can be done to what it tells. */
   isMenu?: boolean;
 }
