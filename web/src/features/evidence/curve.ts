@@ -1,6 +1,6 @@
 import type { Samples } from "@restband/solver";
 import { ahead } from "../../compute/instant.ts";
-import { fromSi, type Unit } from "../../format/unit.ts";
+import { roughlyFromSi, type Unit } from "../../format/unit.ts";
 
 /** A curve as two lines, sliding and stuck, each broken (NaN) where the other goes on. Values in `unit`; along in s, or in the unit of what it is drawn over. */
 export interface Curve {
@@ -32,7 +32,7 @@ export function curveOf(
 ): Curve {
   const pens = { slip: new Pen(unit), stick: new Pen(unit) };
   const { phase } = samples;
-  const along = (i: number): number => (across ? fromSi(across.values[i], across.unit) : samples.t[i]);
+  const along = (i: number): number => (across ? roughlyFromSi(across.values[i], across.unit) : samples.t[i]);
   const values = samples[channel];
   const penAt = (i: number): Pen => (isDense || phase[i] !== 0 ? pens.slip : pens.stick);
   let pen: Pen | null = null;
@@ -75,7 +75,7 @@ class Pen {
 
   add(along: number, value: number): void {
     this.x.push(along);
-    this.y.push(fromSi(value, this.unit));
+    this.y.push(roughlyFromSi(value, this.unit));
   }
 
   lift(): void {

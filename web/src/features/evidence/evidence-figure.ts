@@ -1,6 +1,6 @@
 import type { Data } from "plotly.js-dist-min";
 import { faded, type PlotTheme } from "../../components/plot-theme.ts";
-import { fromSi, type Unit } from "../../format/unit.ts";
+import { roughlyFromSi, type Unit } from "../../format/unit.ts";
 import { curveOf, type Line } from "./curve.ts";
 import { densified } from "./densified.ts";
 import { axes, layoutOf, type FigureLayout } from "./evidence-layout.ts";
@@ -66,7 +66,7 @@ function overlayTraces({ samples }: Overlay, frame: Frame, panel: PanelFrame, th
 function driveTraces({ drive, samples }: RunView, frame: Frame, panel: PanelFrame, theme: PlotTheme): Data[] {
   const points = drive?.between(densified(samples, frame), frame) ?? [];
   const times = Float64Array.from(points, ({ t }) => t);
-  const forces = Float64Array.from(points, ({ force }) => fromSi(force, panel.unit));
+  const forces = Float64Array.from(points, ({ force }) => roughlyFromSi(force, panel.unit));
   const kept = thinned(times, forces, frame, MOST_POINTS);
   const drawn = { x: Float64Array.from(kept, (i) => times[i]), y: Float64Array.from(kept, (i) => forces[i]) };
   return [line(panel, drawn, { color: theme.quiet, width: 2 })];
@@ -125,7 +125,7 @@ function holdTraces(view: RunView, frame: Frame, panel: PanelFrame, theme: PlotT
 
 const at = (times: readonly number[], value: (t: number) => number, unit: Unit): Line => ({
   x: Float64Array.from(times),
-  y: Float64Array.from(times, (t) => fromSi(value(t), unit)),
+  y: Float64Array.from(times, (t) => roughlyFromSi(value(t), unit)),
 });
 
 interface Stroke {

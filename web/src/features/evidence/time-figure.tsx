@@ -8,12 +8,14 @@ import { nounOf } from "../../format/noun.ts";
 import type { Motion } from "../../format/unit.ts";
 import { evidenceFigure } from "./evidence-figure.ts";
 import type { FigureLayout } from "./evidence-layout.ts";
-import { xOf, yOf, type Frame, type PanelKey } from "./frame.ts";
+import { xOf, type Frame, type PanelKey } from "./frame.ts";
 import { Gutter } from "./gutter.tsx";
-import { overlayAt, type Overlay } from "./overlay.ts";
+import type { Overlay } from "./overlay.ts";
+import { panelLabels, type PanelLabel } from "./panel-labels.ts";
 import { figureWords, stripWords } from "./plot-words.ts";
 import type { RunView } from "./run-view.ts";
 import { SavePlot } from "./save-plot.tsx";
+import { SheetLabels } from "./sheet-labels.tsx";
 import { StripDrag } from "./strip-drag.tsx";
 
 interface TimeFigureProps {
@@ -33,6 +35,7 @@ interface TimeFigureProps {
 export function TimeFigure({ view, frame, t, theme, overlays, onMove, onSpan, children }: TimeFigureProps) {
   const { data, layout } = useMemo(() => evidenceFigure(view, frame, theme, overlays), [view, frame, theme, overlays]);
   const words = useMemo(() => figureWords(view, frame), [view, frame]);
+  const labels = useMemo(() => panelLabels(view, frame, overlays), [view, frame, overlays]);
   return (
     <>
       <StripRow view={view} frame={frame} t={t}>
@@ -41,7 +44,9 @@ export function TimeFigure({ view, frame, t, theme, overlays, onMove, onSpan, ch
       <div className="relative">
         <Plot data={data} layout={layout} label={words} />
         <Heads frame={frame} scenario={view.scenario} />
-        <OverlayLabels frame={frame} overlays={overlays} />
+        <svg className="pointer-events-none absolute inset-0 h-full w-full" aria-hidden="true">
+          <SheetLabels labels={labels} />
+        </svg>
         {children}
         {frame.right > 100 && <Gutter view={view} frame={frame} t={t} overlays={overlays} />}
       </div>
@@ -49,38 +54,11 @@ export function TimeFigure({ view, frame, t, theme, overlays, onMove, onSpan, ch
         <SavePlot
           name="plots over time"
           theme={theme}
-          sheet={() => ({ data, ...timeSheet(view, frame, layout, overlays, theme) })}
+          sheet={() => ({ data, ...timeSheet(view, frame, layout, labels, theme) })}
         />
       </p>
     </>
   );
-}
-
-/** The name of each other motion at its line, at four fifths of what is seen, or at its end; px. */
-function overlayNames(
-  frame: Frame,
-  overlays: readonly Overlay[],
-): { key: string; text: string; x: number; y: number }[] {
-  const panel = frame.panels.find(({ key }) => key === "displacement");
-  const wanted = frame.from + 0.8 * (frame.to - frame.from);
-  return overlays.flatMap((overlay) => {
-    const t = Math.min(wanted, overlay.samples.t[overlay.samples.t.length - 1]);
-    const there = overlayAt(overlay, t);
-    if (!panel || !there || t < frame.from) return [];
-    return { key: overlay.key, text: overlay.label, x: xOf(frame, t), y: yOf(panel, there.x) + 12 };
-  });
-}
-
-function OverlayLabels({ frame, overlays }: { frame: Frame; overlays: readonly Overlay[] }) {
-  return overlayNames(frame, overlays).map(({ key, text, x, y }) => (
-    <p
-      key={key}
-      className="pointer-events-none absolute max-w-56 -translate-x-1/2 truncate bg-raised px-1 text-13 text-quiet"
-      style={{ left: x, top: y }}
-    >
-      {text}
-    </p>
-  ));
 }
 
 /** Room to the right of the panels in a file, px: the readings at the cursor are not in it. */
@@ -91,11 +69,10 @@ function timeSheet(
   { scenario }: RunView,
   frame: Frame,
   layout: FigureLayout,
-  overlays: readonly Overlay[],
+  labels: readonly PanelLabel[],
   theme: PlotTheme,
 ): Omit<PlotSheet, "data"> {
   const end = { x: frame.width - frame.right, y: frame.height - 2 };
-  const others = overlayNames(frame, overlays);
   return {
     title: `${scenario.title || "Untitled"}: motion over time`,
     layout: { ...layout, width: end.x + FILE_RIGHT, margin: { ...layout.margin, r: FILE_RIGHT } },
@@ -107,7 +84,7 @@ function timeSheet(
         anchor: "start" as const,
         colour: theme.ink,
       })),
-      ...others.map(({ text, x, y }) => ({ text, x, y: y + 15, anchor: "middle" as const, colour: theme.quiet })),
+      ...labels.map(({ key: _, tone, ...label }) => ({ ...label, colour: theme[tone] })),
       { text: "time, s", ...end, anchor: "end", colour: theme.quiet },
     ],
   };

@@ -1,0 +1,54 @@
+import { describe, expect, it } from "vitest";
+import { frameOf, yOf } from "../../../web/src/features/evidence/frame.ts";
+import { panelLabels } from "../../../web/src/features/evidence/panel-labels.ts";
+import { runViewOf, type RunView } from "../../../web/src/features/evidence/run-view.ts";
+import { scalesOf } from "../../../web/src/features/evidence/scales.ts";
+import { coulombForces } from "../../support/scenario-builder.ts";
+import { creepFeed, solved, variant } from "../support/scenarios.ts";
+
+const viewOf = (run: ReturnType<typeof solved>): RunView => runViewOf(run.scenario, run.result) as RunView;
+const feed = viewOf(solved(creepFeed));
+const range = { from: 0, to: 0.5 };
+const plain = (text: string): string => text.replace("\u00a0", " ");
+
+describe("the words at the lines of the panels", () => {
+  it("name the rest band and the feed; beside the panels the gutter tells the rest", () => {
+    const frame = frameOf(1160, range, scalesOf(feed, range));
+    const labels = panelLabels(feed, frame, []);
+    expect(labels.map(({ text }) => plain(text))).toEqual(["rest band ±74.1 μm", "feed"]);
+    const [displacement, velocity] = frame.panels;
+    // 0.15 s along: the drive is at 0.3 mm, the band's edge 74 μm above it, the word above that.
+    const edge = yOf(displacement, 0.3e-3 + (0.15 * (120 * 9.80665 + 800)) / 4e6);
+    expect(labels[0].y).toBeLessThan(edge);
+    expect(labels[0].y).toBeGreaterThan(displacement.top);
+    expect(labels[1].y).toBeCloseTo(yOf(velocity, 0.002) - 6, 9);
+  });
+
+  it("name what friction can hold where there is no gutter", () => {
+    const frame = frameOf(390, range, scalesOf(feed, range));
+    expect(plain(panelLabels(feed, frame, [])[2].text)).toBe("holds up to 296.5 N");
+  });
+
+  it("name another motion at its line, shortened", () => {
+    const faster = viewOf(solved(variant({ base: [{ kind: "ramp", rate: 0.003, start: 0, stop: "none" }] })));
+    const overlays = [
+      { key: "faster", label: "A feed that is half as fast again as the one before", samples: faster.samples },
+    ];
+    const frame = frameOf(1160, range, scalesOf(feed, range, [], overlays));
+    const [, other] = panelLabels(feed, frame, overlays);
+    expect(other).toMatchObject({ text: "A feed that is half as fast a…", anchor: "end" });
+  });
+
+  it("say nothing of a band that is not there", () => {
+    const free = viewOf(
+      solved({
+        body: { inertia: 1, stiffness: 0 },
+        contact: coulombForces(1),
+        initial: { velocity: 1 },
+        span: { seconds: 5 },
+      }),
+    );
+    const part = { from: 0, to: free.end };
+    expect(panelLabels(free, frameOf(1160, part, scalesOf(free, part)), [])).toEqual([]);
+  });
+});
