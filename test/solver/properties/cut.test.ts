@@ -37,6 +37,10 @@ function isFree(result: Result, t: number, seconds: number): boolean {
   return result.events.every((event) => Math.abs(event.t - t) > 1e-6 * seconds);
 }
 
+/** With μs = μk a body that is fed slides on after each stick with a v_r that comes down to 0 once a period, and no further. */
+const grazesForEver = ({ contact: { law, counterface }, base }: Scenario): boolean =>
+  law.model === "coulomb" && law.static === law.kinetic && (typeof counterface === "object" || base.length > 0);
+
 test(
   "a run cut in two at any instant and taken up again goes on as if it had not been cut",
   () => {
@@ -45,7 +49,7 @@ test(
     fc.assert(
       fc.property(hardScenario, share, (drawn, part) => {
         // without friction a motion may graze v_r = 0 for ever, and when it turns there is rounding
-        fc.pre(drawn.contact.law.model !== "none");
+        fc.pre(drawn.contact.law.model !== "none" && !grazesForEver(drawn));
         const scenario = { ...drawn, span: { ...drawn.span, untilRest: false } };
         const t = part * scenario.span.seconds;
         const whole = run(scenario, [t]);

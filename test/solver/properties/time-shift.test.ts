@@ -42,9 +42,16 @@ function atRest(drawn: Scenario): Scenario {
 const movesCancel = ({ base }: Scenario): boolean =>
   base.filter(({ kind }) => kind === "move" || kind === "staircase").length > 1;
 
-/** Whether the body goes as far as its spring is stretched, near enough: else its x is a small difference of large numbers. */
-const goesFar = ({ quantities }: Result, { body }: Scenario): boolean =>
-  quantities.peakDisplacement! * body.stiffness >= 1e-3 * quantities.driveForcePeak!;
+/**
+ * Whether the body goes as far as its spring is stretched and as fast as its grip could make it, near enough: else its x and v
+ * are small differences of large numbers.
+ */
+function goesFar({ quantities }: Result, { body, contact, span }: Scenario): boolean {
+  const { preload, faces } = contact.normal;
+  const couldReach = (preload * faces * contact.radius * span.seconds) / (25 * body.inertia);
+  const isFar = quantities.peakDisplacement! * body.stiffness >= 1e-3 * quantities.driveForcePeak!;
+  return isFar && quantities.slipVelocityPeak! >= 1e-4 * couldReach;
+}
 
 /** An exponent below 1 makes friction fall infinitely fast at rest: from there more than one motion solves the equation. */
 const leavesInManyWays = ({ contact: { law } }: Scenario): boolean => law.model === "stribeck" && law.exponent < 1;

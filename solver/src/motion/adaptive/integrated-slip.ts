@@ -279,11 +279,14 @@ export class IntegratedSlip implements Slip {
   private sizes(rate: number): number[] {
     const { stance, body, problem } = this;
     const v = this.inputs.evaluate(0);
-    const push = (Math.abs(v.force) + problem.law.atRest * problem.radius * v.normal) / body.inertia;
+    const force = Math.abs(v.force) + problem.law.atRest * problem.radius * v.normal;
+    const push = force / body.inertia + Math.abs(v.baseAcceleration);
     const stretch = body.stiffness > 0 || body.cubic !== 0 ? Math.abs(stance.position) : 0;
     const swing = Math.max(stretch, this.inputs.baseBound(0));
     const speed = Math.max(Math.abs(stance.velocity), push / Math.max(rate, this.lawRate(v.normal)), swing * rate);
-    return speed > 0 ? [Math.max(swing, speed / rate), speed] : [1, rate];
+    if (speed > 0) return [Math.max(swing, speed / rate), speed];
+    const place = Math.abs(stance.position) || 1; // nothing moves it
+    return [place, place * rate];
   }
 
   /** The rate at which friction that rises with speed slows the body down, 1/s; 0 where it does not rise. */
