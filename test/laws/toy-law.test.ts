@@ -12,7 +12,8 @@ import {
 import { describe, expect, it, vi } from "vitest";
 import type * as friction from "../../solver/src/friction/index.ts";
 import { setLaw } from "../../web/src/features/statement/changes.ts";
-import { draftReducer, openDraft } from "../../web/src/features/statement/draft/draft-reducer.ts";
+import { draftReducer } from "../../web/src/features/statement/draft/draft-reducer.ts";
+import { openDraft } from "../../web/src/features/statement/draft/open-draft.ts";
 import { groups } from "../../web/src/features/statement/groups.ts";
 import { plainText } from "../../web/src/features/statement/sentence/plain-text.ts";
 

@@ -1,6 +1,7 @@
 import { describe, expect, it } from "vitest";
 import { takeValues } from "../../../web/src/features/statement/changes.ts";
-import { draftReducer, openDraft } from "../../../web/src/features/statement/draft/draft-reducer.ts";
+import { draftReducer } from "../../../web/src/features/statement/draft/draft-reducer.ts";
+import { openDraft } from "../../../web/src/features/statement/draft/open-draft.ts";
 import { creepFeed } from "../support/scenarios.ts";
 
 const origin = { kind: "catalogue", source: "a table", low: 0.1, high: 0.35 } as const;

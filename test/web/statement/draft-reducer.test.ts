@@ -1,5 +1,6 @@
 import { describe, expect, it } from "vitest";
-import { draftReducer, openDraft } from "../../../web/src/features/statement/draft/draft-reducer.ts";
+import { draftReducer } from "../../../web/src/features/statement/draft/draft-reducer.ts";
+import { openDraft } from "../../../web/src/features/statement/draft/open-draft.ts";
 import type { Draft, DraftAction } from "../../../web/src/features/statement/draft/draft.ts";
 import {
   addLimit,

@@ -1,8 +1,10 @@
 import type { Scenario } from "@restband/solver";
 import { afterEach, describe, expect, it } from "vitest";
-import { draftReducer, openDraft, resumeDraft } from "../../../web/src/features/statement/draft/draft-reducer.ts";
+import { draftReducer, resumeDraft } from "../../../web/src/features/statement/draft/draft-reducer.ts";
+import { openDraft } from "../../../web/src/features/statement/draft/open-draft.ts";
 import { differencesOf, merged, type Work } from "../../../web/src/features/statement/saving/differences.ts";
-import { dropLocal, keepLocally, readLocal } from "../../../web/src/features/statement/saving/local-draft.ts";
+import { dropLocal, keepLocally } from "../../../web/src/features/statement/saving/local-draft.ts";
+import { readLocal } from "../../../web/src/features/statement/saving/read-local.ts";
 import { savedWords } from "../../../web/src/features/statement/saving/saved-words.ts";
 import { creepFeed, variant } from "../support/scenarios.ts";
 

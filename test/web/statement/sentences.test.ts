@@ -2,7 +2,8 @@ import { excitationTerms, frictionLaws, solidDampings, type Scenario } from "@re
 import { describe, expect, it } from "vitest";
 import { addTerm, setLaw, setSolid } from "../../../web/src/features/statement/changes.ts";
 import type { DraftAction } from "../../../web/src/features/statement/draft/draft.ts";
-import { draftReducer, openDraft } from "../../../web/src/features/statement/draft/draft-reducer.ts";
+import { draftReducer } from "../../../web/src/features/statement/draft/draft-reducer.ts";
+import { openDraft } from "../../../web/src/features/statement/draft/open-draft.ts";
 import { groups, groupOf, type GroupKey } from "../../../web/src/features/statement/groups.ts";
 import { plainText } from "../../../web/src/features/statement/sentence/plain-text.ts";
 import { creepFeed, variant } from "../support/scenarios.ts";

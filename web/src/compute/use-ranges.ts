@@ -1,5 +1,6 @@
-import { exploreRanges, planRanges, type PointReply, type RangeReport, type Scenario } from "@restband/solver";
+import type { PointReply, RangeReport, RangeStep, Scenario } from "@restband/solver";
 import { useCallback, useEffect, useMemo, useState } from "react";
+import { laterPart } from "../later-part.ts";
 import { runKey } from "./run-cache.ts";
 import type { SolverJob } from "./solver-job.ts";
 import { rangePool } from "./solver-pool.ts";
@@ -22,6 +23,9 @@ export interface RangeRun {
   /** Goes through the ranges however long it takes. */
   readonly begin: () => void;
 }
+
+// Going through ranges needs the check of scenarios; it begins long after the first paint.
+const exploring = laterPart(() => import("./range-exploring.ts"));
 
 const REST_BEFORE_MS = 600;
 /** What takes longer is not begun unasked. */
@@ -55,6 +59,8 @@ export function useRanges(computed: Computed | null, isStale: boolean): RangeRun
     if (ready) return tell({ kind: "done", report: ready });
     const { scenario, result } = computed;
     const explore = async (): Promise<void> => {
+      const { exploreRanges, hasRanges } = await exploring.ask();
+      if (!hasRanges(scenario)) return tell(none);
       const end = await follow({ client, steps: exploreRanges(scenario, result.limits), isAsked, tell });
       if (end.kind === "done") keep(key, end.report);
       tell(end);
@@ -75,17 +81,18 @@ export function useRanges(computed: Computed | null, isStale: boolean): RangeRun
   return { state, cancel, begin };
 }
 
-/** What the ranges are gone through for: all that a run reads, and the ranges; null where there is nothing to go through. */
+/** What the ranges are gone through for: all that a run reads, and the ranges; null where no limit or no range asks for it. */
 function keyOf(scenario: Scenario): string | null {
-  if (scenario.limits.length === 0) return null;
-  const { ranges, leftOut } = planRanges(scenario);
-  if (ranges.length === 0 && leftOut.length === 0) return null;
-  return JSON.stringify([runKey({ scenario, options: {} }), ranges, leftOut]);
+  const known = Object.entries(scenario.origins).flatMap(([path, { low, high }]) =>
+    low === undefined && high === undefined ? [] : [[path, low, high]],
+  );
+  if (scenario.limits.length === 0 || known.length === 0) return null;
+  return JSON.stringify([runKey({ scenario, options: {} }), known]);
 }
 
 interface Following {
   readonly client: symbol;
-  readonly steps: ReturnType<typeof exploreRanges>;
+  readonly steps: Generator<RangeStep, RangeReport, PointReply>;
   readonly isAsked: boolean;
   readonly tell: (state: RangeState) => void;
 }

@@ -28,6 +28,7 @@ import { mayEdit } from "../features/project-home/roles.ts";
 import { paths } from "../paths.ts";
 import { sharedValue } from "../shared-value.ts";
 import { lazyPart } from "../components/lazy-part.ts";
+import { useThrottled } from "../components/use-throttled.ts";
 import { useCursor, type Cursor } from "./cursor.ts";
 
 // None of these is needed for the first answer: they come after it.
@@ -43,6 +44,12 @@ const ReckoningLinks = lazyPart(async () => (await import("../features/reckoning
 const ConflictDialog = lazyPart(
   async () => (await import("../features/statement/saving/conflict-dialog.tsx")).ConflictDialog,
 );
+
+/**
+ * The answer and its strip follow each run; what takes longer to draw than a frame (sketch, plots, tables) takes the newest
+ * one five times a second.
+ */
+const DRAWN_EVERY_MS = 200;
 
 /** One scenario as a worked page: answer, statement, evidence, checks, cautions. */
 export function ScenarioPage() {
@@ -71,7 +78,8 @@ function OpenScenario({ project, stored }: { project: Project; stored: StoredSce
   const ranges = useRanges(run.computed, run.isStale);
   const subject = run.computed?.scenario ?? inForce;
   const say = (path: string, value: number, towards: number) => sayField(subject, path, value, towards);
-  const view = useRunView(run.computed);
+  const drawn = useThrottled(run.computed, DRAWN_EVERY_MS);
+  const view = useRunView(drawn);
   const [cursor] = useState(() => sharedValue<number | null>(null));
   const before = useBeforeEdit(run.computed, draft.merging !== null);
   const isTrying = !canEdit && !isSameWork(work, stored);
@@ -139,7 +147,7 @@ function OpenScenario({ project, stored }: { project: Project; stored: StoredSce
         <Suspense fallback={<div className="min-h-40" />}>
           <RevisionsSection {...{ stored, ownId: accountId, canEdit, run, inForce, saving, faults: faults.length }} />
         </Suspense>
-        <RunSections key={`run ${units}`} computed={run.computed} view={view} cursor={cursor} isStale={run.isStale} />
+        <RunSections key={`run ${units}`} computed={drawn} view={view} cursor={cursor} isStale={run.isStale} />
       </WorkedPage>
       {saving.kind === "conflict" && (
         <Suspense>

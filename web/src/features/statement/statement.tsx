@@ -1,11 +1,12 @@
 import type { Fault, Refusal } from "@restband/solver";
+import { useUnitSystem } from "../../format/unit-system.ts";
 import { useOtherUnits } from "../../format/other-units.ts";
 import type { Dispatch, Draft } from "./draft/draft.ts";
 import { DraftContext } from "./draft/draft-context.ts";
 import { groupOf, groups } from "./groups.ts";
 import { StatementGroup } from "./statement-group.tsx";
 import { WithoutOrigin } from "./origin/without-origin.tsx";
-import { useMemo, useRef, type ReactNode } from "react";
+import { memo, useMemo, useRef, type ReactNode } from "react";
 
 interface StatementProps {
   draft: Draft;
@@ -16,10 +17,11 @@ interface StatementProps {
   aside?: (path: string) => ReactNode;
 }
 
-/** What is asked, in five sentences whose values are edited in place. */
-export function Statement({ draft, dispatch, refusal, aside }: StatementProps) {
+/** What is asked, in five sentences whose values are edited in place. A new result leaves it as it is. */
+export const Statement = memo(function Statement({ draft, dispatch, refusal, aside }: StatementProps) {
   // Values typed in a unit beyond our own table are shown in it once that can be read.
   useOtherUnits();
+  useUnitSystem();
   const place = useRef<HTMLDivElement>(null);
   const context = useMemo(() => ({ draft, dispatch, aside }), [draft, dispatch, aside]);
   const remarks: readonly Fault[] = refusal?.faults.length ? refusal.faults : refusal ? [refusal] : [];
@@ -37,4 +39,4 @@ export function Statement({ draft, dispatch, refusal, aside }: StatementProps) {
       <WithoutOrigin statement={place} />
     </DraftContext.Provider>
   );
-}
+});

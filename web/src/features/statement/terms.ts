@@ -1,5 +1,5 @@
 import type { SwitchedOff } from "@restband/api/contract";
-import { checkTerm, type Scenario, type Term } from "@restband/solver";
+import type { checkTerm, Scenario, Term } from "@restband/solver";
 import { freshTerm, insertTerm, raiseItem, removeItem, type Place } from "./changes.ts";
 import type { DraftAction, Sheet } from "./draft/draft.ts";
 import { restructured } from "./draft/sheet.ts";
@@ -22,9 +22,9 @@ export function termRows(scenario: Scenario, off: readonly SwitchedOff[], place:
 
 /** Takes a term out of force and keeps it with all that belongs to it, where it stands. `position` is that of its row. */
 export const switchOff = (place: Place, position: number): DraftAction =>
-  onRow(place, position, (sheet, row, inForce) => {
+  onRow(place, position, (sheet, row, inForce, check) => {
     if (!row.isOn) return sheet;
-    const taken = takenOff(sheet, inForce, { place, index: row.index, position });
+    const taken = takenOff(sheet, inForce, { place, index: row.index, position }, check);
     const rest = without(sheet, place, row.index);
     return { ...rest, off: [...aligned(sheet), taken] };
   });
@@ -67,14 +67,15 @@ export const raiseTerm = (place: Place, position: number): DraftAction =>
     return { ...sheet, off: moved(aligned(sheet), place, swap) };
   });
 
-type Rewriting = (sheet: Sheet, row: TermRow, inForce: Scenario) => Sheet;
+type Check = typeof checkTerm;
+type Rewriting = (sheet: Sheet, row: TermRow, inForce: Scenario, check: Check) => Sheet;
 
 function onRow(place: Place, position: number, rewrite: Rewriting): DraftAction {
   return {
     type: "rewrite",
-    apply: (sheet, inForce) => {
+    apply: (sheet, inForce, check) => {
       const row = rowsOf(sheet, place)[position];
-      return row ? rewrite(sheet, row, inForce) : sheet;
+      return row ? rewrite(sheet, row, inForce, check) : sheet;
     },
   };
 }
@@ -103,21 +104,26 @@ interface Spot {
   readonly position: number;
 }
 
-function takenOff({ wanted, units }: Sheet, inForce: Scenario, { place, index, position }: Spot): SwitchedOff {
+function takenOff(
+  { wanted, units }: Sheet,
+  inForce: Scenario,
+  { place, index, position }: Spot,
+  check: Check,
+): SwitchedOff {
   const root = `${place}[${index}]`;
   return {
     place,
     index: position,
-    term: soundTerm(place, wanted[place][index], inForce[place][index]),
+    term: soundTerm(place, wanted[place][index], inForce[place][index], check),
     origins: ownOf(wanted.origins, root),
     units: ownOf(units, root),
   };
 }
 
 /** Only what can be in force is kept: numbers that are refused give way to those in force. */
-function soundTerm(place: Place, wanted: Term, inForce: Term | undefined): Term {
-  const before = inForce?.kind === wanted.kind ? checkTerm(place, inForce).term : null;
-  return checkTerm(place, wanted).term ?? before ?? freshTerm(place, wanted.kind);
+function soundTerm(place: Place, wanted: Term, inForce: Term | undefined, check: Check): Term {
+  const before = inForce?.kind === wanted.kind ? check(place, inForce).term : null;
+  return check(place, wanted).term ?? before ?? freshTerm(place, wanted.kind);
 }
 
 function ownOf<T>(record: Readonly<Record<string, T>>, root: string): Record<string, T> {

@@ -1,17 +1,10 @@
-import type { SwitchedOff } from "@restband/api/contract";
-import type { Scenario } from "@restband/solver";
+import { checkTerm, type Scenario } from "@restband/solver";
 import { without, writePath } from "../path.ts";
 import { checkSheet } from "./check-sheet.ts";
 import type { Draft, DraftAction, Sheet } from "./draft.ts";
 import { restructured } from "./sheet.ts";
 
 const STEPS_KEPT = 200;
-
-/** A draft of a scenario that is valid; `off`: terms that are kept beside it. */
-export function openDraft(scenario: Scenario, off: readonly SwitchedOff[] = []): Draft {
-  const sheet: Sheet = { wanted: scenario, unread: {}, units: unitsEntered(scenario), off };
-  return { sheet, inForce: scenario, faults: [], past: [], future: [], merging: null, anchor: scenario };
-}
 
 /** A draft with some values as they were left, refused or unread. */
 export function resumeDraft(inForce: Scenario, sheet: Sheet): Draft {
@@ -35,7 +28,7 @@ export function draftReducer(draft: Draft, action: DraftAction): Draft {
     case "change":
       return step(draft, restructured(draft.sheet, action.apply, action.rename), null);
     case "rewrite":
-      return step(draft, action.apply(draft.sheet, draft.inForce), null);
+      return step(draft, action.apply(draft.sheet, draft.inForce, checkTerm), null);
     case "replace":
       return step(
         draft,
@@ -103,14 +96,4 @@ function withEntered(scenario: Scenario, path: string, entered: string | undefin
 
 function withUnit(sheet: Sheet, path: string, unit: string): Sheet {
   return sheet.units[path] === unit ? sheet : { ...sheet, units: { ...sheet.units, [path]: unit } };
-}
-
-/** The units values were entered in, where their origins tell: "0.25 in" is shown in inches again. */
-export function unitsEntered(scenario: Scenario): Record<string, string> {
-  return Object.fromEntries(
-    Object.entries(scenario.origins).flatMap(([path, { entered }]) => {
-      const unit = entered?.replace(/^[\d\s.,'’+\-−eE·^⁻⁰-⁹¹²³]*/, "");
-      return unit ? [[path, unit]] : [];
-    }),
-  );
 }

@@ -1,5 +1,5 @@
 import type { SwitchedOff } from "@restband/api/contract";
-import type { Fault, Scenario } from "@restband/solver";
+import type { checkTerm, Fault, Scenario } from "@restband/solver";
 
 /** What a person has typed and chosen, before it is known to be right. */
 export interface Sheet {
@@ -41,7 +41,8 @@ export type DraftAction =
   | { type: "leave-unread"; path: string; text: string; message: string; value?: unknown }
   | { type: "show-in"; path: string; unit: string }
   | { type: "change"; apply: (scenario: Scenario) => Scenario; rename?: (path: string) => string | null }
-  | { type: "rewrite"; apply: (sheet: Sheet, inForce: Scenario) => Sheet }
+  /** The check is handed in: whoever makes an action stands before it is loaded. */
+  | { type: "rewrite"; apply: (sheet: Sheet, inForce: Scenario, check: typeof checkTerm) => Sheet }
   | { type: "settle" }
   | { type: "undo" }
   | { type: "redo" }

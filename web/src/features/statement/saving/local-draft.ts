@@ -1,6 +1,7 @@
-import { checkScenario, checkTerm, z, type Origin, type Scenario, type Term } from "@restband/solver";
+import type { SwitchedOff } from "@restband/api/contract";
+import type { Scenario } from "@restband/solver";
 import type { Draft, Sheet } from "../draft/draft.ts";
-import { readPath, writePath } from "../path.ts";
+import { readPath } from "../path.ts";
 import type { Base } from "./autosave.ts";
 
 /** What is kept in the browser until the server has it: survives a crash, a lost connection, an expired session. */
@@ -10,29 +11,19 @@ export interface LocalDraft {
   readonly sheet: Sheet;
 }
 
-const switchedOff = z.array(
-  z.object({
-    place: z.enum(["force", "base"]),
-    index: z.number().int(),
-    // Checked by `checkTerm`.
-    term: z.custom<Term>(),
-    origins: z.record(z.string(), z.custom<Origin>()),
-    units: z.record(z.string(), z.string()),
-  }),
-);
-
-const storedSchema = z.object({
-  version: z.number().int(),
-  base: z.unknown(),
-  inForce: z.unknown(),
+/** The same as it is stored; `read-local.ts` checks it, since anything may lie there. */
+export interface StoredDraft {
+  version: number;
+  base: unknown;
+  inForce: unknown;
   /** Numbers that were refused, by path. */
-  refused: z.record(z.string(), z.number()),
-  unread: z.record(z.string(), z.object({ text: z.string(), message: z.string() })),
-  units: z.record(z.string(), z.string()),
+  refused: Record<string, number>;
+  unread: Record<string, { text: string; message: string }>;
+  units: Record<string, string>;
   /** Terms that are switched off, now and in the version below. */
-  off: switchedOff,
-  baseOff: switchedOff,
-});
+  off: SwitchedOff[];
+  baseOff: SwitchedOff[];
+}
 
 const keyOf = (accountId: string, scenarioId: string): string => `restband-draft ${accountId} ${scenarioId}`;
 
@@ -45,7 +36,7 @@ export function keepLocally(accountId: string, scenarioId: string, draft: Draft,
       return typeof value === "number" && !(path in sheet.unread) ? [[path, value]] : [];
     }),
   );
-  const stored: z.input<typeof storedSchema> = {
+  const stored: StoredDraft = {
     version: base.version,
     base: base.content,
     inForce,
@@ -70,26 +61,11 @@ export function dropLocal(accountId: string, scenarioId: string): void {
   }
 }
 
-/** The draft left behind, or null where there is none or it cannot be read. */
-export function readLocal(accountId: string, scenarioId: string): LocalDraft | null {
+/** What lies in the browser, or null where there is nothing or it may not be read. */
+export function localText(accountId: string, scenarioId: string): string | null {
   try {
-    const text = localStorage.getItem(keyOf(accountId, scenarioId));
-    const stored = text === null ? null : storedSchema.parse(JSON.parse(text));
-    return stored && restored(stored);
+    return localStorage.getItem(keyOf(accountId, scenarioId));
   } catch {
     return null;
   }
-}
-
-function restored(stored: z.output<typeof storedSchema>): LocalDraft | null {
-  const { version, unread, units, off, baseOff } = stored;
-  const content = checkScenario(stored.base).scenario;
-  const valid = checkScenario(stored.inForce).scenario;
-  if (!content || !valid || off.some(({ place, term }) => !checkTerm(place, term).term)) return null;
-  const wanted = Object.entries(stored.refused).reduce(
-    (scenario, [path, value]) =>
-      typeof readPath(scenario, path) === "number" ? writePath(scenario, path, value) : scenario,
-    valid,
-  );
-  return { base: { version, content, switchedOff: baseOff }, inForce: valid, sheet: { wanted, unread, units, off } };
 }

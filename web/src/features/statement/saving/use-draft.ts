@@ -1,13 +1,14 @@
 import type { StoredScenario } from "@restband/api/contract";
-import { useEffect, useMemo, useReducer, useRef, useState } from "react";
+import { use, useCallback, useEffect, useMemo, useReducer, useRef, useState } from "react";
 import { ApiFailure } from "../../../api/api-failure.ts";
 import { useSaveScenario } from "../../../api/scenarios.ts";
 import { useHasSessionEnded } from "../../../api/session-end.ts";
-import { draftReducer, openDraft, resumeDraft } from "../draft/draft-reducer.ts";
+import { laterPart } from "../../../later-part.ts";
 import type { Dispatch, Draft, DraftAction } from "../draft/draft.ts";
+import { openDraft } from "../draft/open-draft.ts";
 import { Autosave, type Base, type SaveReply, type Saving } from "./autosave.ts";
 import { isSameWork, type Work } from "./differences.ts";
-import { dropLocal, keepLocally, readLocal, type LocalDraft } from "./local-draft.ts";
+import { dropLocal, keepLocally, localText, type LocalDraft } from "./local-draft.ts";
 
 interface UseDraftSettings {
   stored: StoredScenario;
@@ -29,17 +30,19 @@ export interface OpenDraft {
   readonly decide: (current: StoredScenario, work: Work) => void;
 }
 
+// Sentences and answer come first: whatever changes a draft needs the solver's check, which comes after them.
+const editing = laterPart(() => import("../draft/editing.ts"));
+type Editing = Awaited<ReturnType<typeof editing.ask>>;
+
 /**
  * The open scenario: what is typed, undone and kept. It begins from what was left in this browser, else from the server's
  * copy, and takes a newer version of the server's over only while nothing of its own is waiting.
  */
 export function useDraft({ stored, accountId, canEdit }: UseDraftSettings): OpenDraft {
-  const [left] = useState(() => (canEdit ? leftBehind(accountId, stored) : null));
-  const [draft, dispatch] = useReducer(draftReducer, stored, ({ content, switchedOff }) =>
-    left ? resumeDraft(left.inForce, left.sheet) : openDraft(content, switchedOff),
-  );
+  const left = useLeftBehind(accountId, stored, canEdit);
+  const [draft, dispatch] = useChecked(() => left?.draft ?? openDraft(stored.content, stored.switchedOff));
   const [saving, setSaving] = useState<Saving>({ kind: "saved", at: null });
-  const [base, setBase] = useState<Base>(() => left?.base ?? stored);
+  const [base, setBase] = useState<Base>(left?.base ?? stored);
   const autosave = useAutosave(stored, base, setSaving, setBase);
   const hasEnded = useHasSessionEnded();
   const hasFaults = draft.faults.length > 0;
@@ -66,7 +69,7 @@ export function useDraft({ stored, accountId, canEdit }: UseDraftSettings): Open
     if (hasFaults || !autosave.isIdle || !isSameWork(work, autosave.base)) return;
     autosave.adopt(stored);
     dispatch(replaceBy(stored));
-  }, [stored, work, hasFaults, autosave]);
+  }, [stored, work, hasFaults, autosave, dispatch]);
 
   const decide = (current: StoredScenario, decided: Work): void => {
     autosave.decide(current, decided);
@@ -81,15 +84,47 @@ const replaceBy = ({ content, switchedOff }: Work): DraftAction => ({
   off: switchedOff,
 });
 
+/** A draft and the way to change it. What is done before the check is there waits for it, in its order. */
+function useChecked(open: () => Draft): [Draft, Dispatch] {
+  const [draft, apply] = useReducer(
+    (before: Draft, [{ draftReducer }, action]: [Editing, DraftAction]) => draftReducer(before, action),
+    null,
+    open,
+  );
+  useEffect(() => void editing.ask(), []);
+  const dispatch = useCallback((action: DraftAction): void => {
+    const there = editing.now();
+    if (there) apply([there, action]);
+    else void editing.ask().then((come) => apply([come, action]));
+  }, []);
+  return [draft, dispatch];
+}
+
+interface Left {
+  readonly base: Base;
+  readonly draft: Draft;
+}
+
+/** What this browser kept of the draft when the page was opened. Only where there is something the check is waited for. */
+function useLeftBehind(accountId: string, stored: StoredScenario, canEdit: boolean): Left | null {
+  const [isThere] = useState(() => canEdit && localText(accountId, stored.id) !== null);
+  const come = isThere ? (editing.now() ?? use(editing.ask())) : null;
+  const [left] = useState(() => come && leftBehind(accountId, stored, come));
+  return left;
+}
+
 /** What this browser kept, unless the server has it by now. */
-function leftBehind(accountId: string, stored: StoredScenario): LocalDraft | null {
+function leftBehind(accountId: string, stored: StoredScenario, { readLocal, resumeDraft }: Editing): Left | null {
   const left = readLocal(accountId, stored.id);
   if (!left) return null;
-  const kept = { content: left.inForce, switchedOff: left.sheet.off };
-  const isAllThere = isSameWork(kept, stored) && left.sheet.wanted === left.inForce;
-  if (!isAllThere || Object.keys(left.sheet.unread).length > 0) return left;
+  if (!isStored(left, stored)) return { base: left.base, draft: resumeDraft(left.inForce, left.sheet) };
   dropLocal(accountId, stored.id);
   return null;
+}
+
+function isStored({ inForce, sheet }: LocalDraft, stored: StoredScenario): boolean {
+  const isAllThere = isSameWork({ content: inForce, switchedOff: sheet.off }, stored) && sheet.wanted === inForce;
+  return isAllThere && Object.keys(sheet.unread).length === 0;
 }
 
 function useAutosave(
