@@ -110,4 +110,5 @@ def main():
         print(name, (time.process_time() - start) / share, events, x, flush=True)
 
 
-main()
+if __name__ == "__main__":
+    main()
