@@ -1,5 +1,5 @@
-import type { Page } from "playwright-core";
 import { afterAll, afterEach, beforeAll, expect, it } from "vitest";
+import { focused, tabTo } from "../support/hands.ts";
 import { Journey } from "../support/journey.ts";
 import { createProject, createScenario, emailOf, password, signUp } from "../support/people.ts";
 import { releasedBody, restOf } from "../support/released-body.ts";
@@ -19,19 +19,19 @@ it("goes from signing in to a changed value, kept, without a mouse", async () =>
   const page = await journey.visit();
   await page.goto("/");
   await page.getByLabel("E-mail").waitFor();
-  await tabTo(page, "E-mail");
+  await tabTo(page, (name) => name === "E-mail");
   await page.keyboard.type(emailOf("Ada"));
-  await tabTo(page, "Password");
+  await tabTo(page, (name) => name === "Password");
   await page.keyboard.type(password);
   await page.keyboard.press("Enter");
   await page.getByRole("link", { name: "Hall 3" }).waitFor();
-  await tabTo(page, "Hall 3");
+  await tabTo(page, (name) => name === "Hall 3");
   await page.keyboard.press("Enter");
   await page.getByRole("heading", { name: "Slide, released" }).waitFor();
-  await tabTo(page, "Slide, released");
+  await tabTo(page, (name) => name === "Slide, released");
   await page.keyboard.press("Enter");
   await expectText(answerOf(page)).toBe(restOf(0.02));
-  await tabTo(page, "Starting displacement: 20 mm");
+  await tabTo(page, (name) => name === "Starting displacement: 20 mm");
   await page.keyboard.press("Enter");
   await page.keyboard.type("2");
   await page.keyboard.press("Enter");
@@ -49,23 +49,3 @@ it("goes from signing in to a changed value, kept, without a mouse", async () =>
   await expectText(valueOf(page, "Starting displacement")).toBe("2");
   await expectText(savingOf(page)).toMatch(/^saved \d\d:\d\d$/);
 });
-
-/** Presses Tab until the focus is on what bears a name, and sees that it shows. */
-async function tabTo(page: Page, name: string): Promise<void> {
-  for (let presses = 0; presses < 40; presses++) {
-    await page.keyboard.press("Tab");
-    if ((await focused(page)) !== name) continue;
-    expect(await page.evaluate(() => document.activeElement?.matches(":focus-visible"))).toBe(true);
-    return;
-  }
-  throw new Error(`Forty presses of Tab do not come to "${name}", but to "${await focused(page)}".`);
-}
-
-/** The name of what has the focus: its own, its label's, or its text. */
-const focused = (page: Page): Promise<string> =>
-  page.evaluate(() => {
-    const element = document.activeElement;
-    if (!(element instanceof HTMLElement)) return "";
-    const label = element instanceof HTMLInputElement ? element.labels?.[0] : undefined;
-    return (element.getAttribute("aria-label") ?? label?.textContent ?? element.textContent ?? "").trim();
-  });

@@ -1,6 +1,7 @@
 import type { RevisionSummary, ScenarioSummary } from "@restband/api/contract";
 import { memo, type ReactNode } from "react";
 import { SentenceGlance, StripGlance } from "../features/answer/answer-glance.tsx";
+import { hasRanges } from "../features/answer/lead-line.ts";
 import type { Glance } from "../features/project-home/glances/glance-book.ts";
 import { LimitsLine } from "../features/project-home/limits-line.tsx";
 import { RevisionStanding } from "../features/revision/revision-standing.tsx";
@@ -26,7 +27,12 @@ export function AnsweredRow({ projectId, summary, ownId, revisions, glance, menu
       ownId={ownId}
       strip={glance && <Strip glance={glance} />}
       sentence={<Sentence glance={glance} />}
-      limits={computed && "result" in computed && <LimitsLine limits={computed.result.limits} />}
+      limits={
+        computed &&
+        "result" in computed && (
+          <LimitsLine limits={computed.result.limits} isAsEntered={hasRanges(computed.scenario)} />
+        )
+      }
       state={revisions.length > 0 && <RevisionStanding revisions={revisions} digest={summary.digest} />}
       menu={menu}
     />

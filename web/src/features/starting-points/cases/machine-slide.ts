@@ -24,7 +24,7 @@ export const machineSlide = startingPoint({
       "body.viscous": calculated("5 % of critical: 0.1 √(k m)"),
       "contact.law.static": tabled(table, [0.18, 0.24]),
       "contact.law.kinetic": tabled(table, [0.11, 0.15]),
-      "base[0].rate": practice("20 mm/min, a finishing cut"),
+      "base[0].rate": { ...practice("a finishing cut"), entered: "20 mm/min" },
       "limits[0].max": practice("no mark on the surface"),
       "limits[1].max": practice("a tenth of the tolerance of a good part"),
     },

@@ -24,7 +24,7 @@ export const padBrake = startingPoint({
       "contact.normal.preload": practice("spring packet of a small caliper"),
       "contact.normal.faces": practice("one pad on each side"),
       "contact.radius": practice("middle of the pads on a disc of 300 mm"),
-      "initial.velocity": practice("1500 turns a minute"),
+      "initial.velocity": { ...practice("a lathe at work"), entered: "1500 rpm" },
       "limits[0].max": practice("standstill before a door may open"),
     },
   },
