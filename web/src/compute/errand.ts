@@ -1,14 +1,34 @@
-import type { RunAsk, RunReply, Scenario, SweepPlan } from "@restband/solver";
+import type { RunAsk, RunReply, Scenario, SweepPlan, TolerancePlan, ToleranceSummary } from "@restband/solver";
 
-/** What a worker can be sent for: runs of an exploration, or one tile of a sweep. */
+/** One tile of a sweep, or some draws of a study: what comes back as rows. */
+export type TileErrand =
+  | { readonly kind: "tile"; readonly scenario: Scenario; readonly plan: SweepPlan; readonly tile: number }
+  | {
+      readonly kind: "draws";
+      readonly scenario: Scenario;
+      readonly plan: TolerancePlan;
+      readonly from: number;
+      /** One past the last. */
+      readonly to: number;
+    };
+
+/** What a worker can be sent for: runs of an exploration, rows, or what the rows of a study say. */
 export type Errand =
   | { readonly kind: "runs"; readonly runs: readonly RunAsk[] }
-  | { readonly kind: "tile"; readonly scenario: Scenario; readonly plan: SweepPlan; readonly tile: number };
+  | TileErrand
+  | {
+      readonly kind: "summary";
+      readonly scenario: Scenario;
+      readonly plan: TolerancePlan;
+      readonly rows: Float64Array;
+    };
 
-/** What it brings: a reply for each run; the rows of the tile. */
+/** What it brings: a reply for each run; rows; a summary. */
 export interface ErrandAnswers {
   readonly runs: readonly RunReply[];
   readonly tile: Float64Array;
+  readonly draws: Float64Array;
+  readonly summary: ToleranceSummary;
 }
 
 export type AnswerTo<E extends Errand> = ErrandAnswers[E["kind"]];

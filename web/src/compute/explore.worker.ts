@@ -1,5 +1,18 @@
 import * as Comlink from "comlink";
-import { answerRun, runTile, type RunAsk, type RunReply, type Scenario, type SweepPlan } from "@restband/solver";
+import {
+  answerRun,
+  drawsOf,
+  runDraws,
+  runTile,
+  toleranceSummary,
+  type Draws,
+  type RunAsk,
+  type RunReply,
+  type Scenario,
+  type SweepPlan,
+  type TolerancePlan,
+  type ToleranceSummary,
+} from "@restband/solver";
 import type { TellDone } from "./errand.ts";
 
 const TELL_EVERY_MS = 200;
@@ -8,22 +21,45 @@ const api = {
   /** The runs one after the other. */
   runs: (asks: readonly RunAsk[]): RunReply[] => asks.map((ask) => answerRun(ask)),
 
-  /** The rows of a tile, handed over and not copied. How far it is is told at most five times a second. */
-  tile(scenario: Scenario, plan: SweepPlan, tile: number, tell: TellDone): Float64Array {
-    let last = performance.now();
-    const onCell = (done: number): boolean => {
-      const now = performance.now();
-      if (now - last >= TELL_EVERY_MS) {
-        last = now;
-        tell(done);
-      }
-      return true; // a tile is called off by ending its worker: a busy worker hears no message
-    };
-    const rows = runTile(scenario, plan, tile, { onCell }) ?? new Float64Array();
-    return Comlink.transfer(rows, [rows.buffer]);
-  },
+  /** The rows of a tile, handed over and not copied. */
+  tile: (scenario: Scenario, plan: SweepPlan, tile: number, tell: TellDone): Float64Array =>
+    handedOver(runTile(scenario, plan, tile, { onCell: throttled(tell) })),
+
+  /** The rows of the draws from one place to another. */
+  draws: (scenario: Scenario, plan: TolerancePlan, range: readonly [number, number], tell: TellDone): Float64Array =>
+    handedOver(runDraws(scenario, plan, allDraws(plan), range, { onDraw: throttled(tell) })),
+
+  summary: (scenario: Scenario, plan: TolerancePlan, rows: Float64Array): ToleranceSummary =>
+    toleranceSummary(plan, scenario, rows),
 };
 
 export type ExploreApi = typeof api;
+
+let drawn: { key: string; draws: Draws } | null = null;
+
+/** The draws follow from the plan alone: made once for all errands of a study. */
+function allDraws(plan: TolerancePlan): Draws {
+  const key = JSON.stringify(plan);
+  if (drawn?.key !== key) drawn = { key, draws: drawsOf(plan) };
+  return drawn.draws;
+}
+
+/** Tells at most five times a second. True: rows are called off by ending the worker, since a busy one hears nothing. */
+function throttled(tell: TellDone): (done: number) => boolean {
+  let last = performance.now();
+  return (done) => {
+    const now = performance.now();
+    if (now - last >= TELL_EVERY_MS) {
+      last = now;
+      tell(done);
+    }
+    return true;
+  };
+}
+
+function handedOver(rows: Float64Array | null): Float64Array {
+  const all = rows ?? new Float64Array();
+  return Comlink.transfer(all, [all.buffer]);
+}
 
 Comlink.expose(api);

@@ -1,47 +1,43 @@
-import { tileCells, tileCount, tileOrder, type Scenario, type SweepPlan } from "@restband/solver";
-import { CalledOff } from "./errand.ts";
+import { tileCells, tileCount, type SweepPlan } from "@restband/solver";
+import { CalledOff, type TileErrand } from "./errand.ts";
 import type { ErrandPool } from "./errand-pool.ts";
 
-export interface TileRun {
-  readonly scenario: Scenario;
-  readonly plan: SweepPlan;
+export interface TilesToRun {
+  readonly errandOf: (tile: number) => TileErrand;
+  /** The tiles in the order they are best run; asked once the first tile is there. */
+  readonly order: () => readonly number[];
+  readonly hasTile: (tile: number) => boolean;
   readonly pool: ErrandPool;
   readonly signal: AbortSignal;
-  /** Rows of a tile that is there already, computed before or by somebody else. */
-  readonly rowsOf: (tile: number) => Float64Array | undefined;
   readonly onTile: (tile: number, rows: Float64Array) => void;
-  /** Cells done of a tile under way. */
-  readonly onCells: (tile: number, done: number) => void;
+  /** Rows done of a tile under way. */
+  readonly onRows: (tile: number, done: number) => void;
   /** A tile that two workers died of, or that the solver threw at: the others go on. */
   readonly onFailed: (tile: number, reason: string) => void;
 }
 
 /**
- * Runs the tiles of a sweep that are not there yet: first the coarse look over the whole map, then those with a boundary
- * in them. No more are under way than the pool has workers, so that others get their turn.
+ * Runs the tiles that are not there yet: the first, which may tell what comes next, then all others. No more are under way
+ * than the pool has workers, so that others get their turn.
  * @throws CalledOff once the signal is aborted
  */
-export async function runTiles(run: TileRun): Promise<void> {
-  const { plan, rowsOf } = run;
-  if (!rowsOf(0)) await runTile(run, 0);
-  const order = tileOrder(plan, rowsOf(0) ?? null).filter((tile) => tile !== 0);
+export async function runTiles(run: TilesToRun): Promise<void> {
+  if (!run.hasTile(0)) await runTile(run, 0);
+  const left = run.order().filter((tile) => tile !== 0);
   const next = async (): Promise<void> => {
-    for (let tile = order.shift(); tile !== undefined; tile = order.shift())
-      if (!rowsOf(tile)) await runTile(run, tile);
+    for (let tile = left.shift(); tile !== undefined; tile = left.shift())
+      if (!run.hasTile(tile)) await runTile(run, tile);
   };
   await Promise.all(Array.from({ length: run.pool.size }, next));
 }
 
-async function runTile(
-  { scenario, plan, pool, signal, onTile, onCells, onFailed }: TileRun,
-  tile: number,
-): Promise<void> {
+async function runTile(run: TilesToRun, tile: number): Promise<void> {
   try {
-    const rows = await pool.send({ kind: "tile", scenario, plan, tile }, signal, (done) => onCells(tile, done));
-    onTile(tile, rows);
+    const rows = await run.pool.send(run.errandOf(tile), run.signal, (done) => run.onRows(tile, done));
+    run.onTile(tile, rows);
   } catch (error) {
     if (error instanceof CalledOff) throw error;
-    onFailed(tile, error instanceof Error ? error.message : String(error));
+    run.onFailed(tile, error instanceof Error ? error.message : String(error));
   }
 }
 

@@ -8,9 +8,16 @@ export function startExploreWorker(): ErrandWorker {
   const remote = Comlink.wrap<ExploreApi>(worker);
   return {
     do(errand, tell) {
-      if (errand.kind === "runs") return remote.runs(errand.runs);
-      const { scenario, plan, tile } = errand;
-      return remote.tile(scenario, plan, tile, Comlink.proxy(tell));
+      switch (errand.kind) {
+        case "runs":
+          return remote.runs(errand.runs);
+        case "tile":
+          return remote.tile(errand.scenario, errand.plan, errand.tile, Comlink.proxy(tell));
+        case "draws":
+          return remote.draws(errand.scenario, errand.plan, [errand.from, errand.to], Comlink.proxy(tell));
+        case "summary":
+          return remote.summary(errand.scenario, errand.plan, errand.rows);
+      }
     },
     terminate() {
       remote[Comlink.releaseProxy]();

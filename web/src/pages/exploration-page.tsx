@@ -4,8 +4,9 @@ import { useLocation, useParams } from "react-router-dom";
 import { explorationQuery } from "../api/explorations.ts";
 import { projectQuery } from "../api/projects.ts";
 import { WorkHeader } from "../features/account/work-header.tsx";
-import { SentenceGlance, StripGlance } from "../features/answer/answer-glance.tsx";
+import { SentenceGlance } from "../features/answer/answer-glance.tsx";
 import { SweepView } from "../features/explore/sweep/sweep-view.tsx";
+import { StudyView } from "../features/explore/study/study-view.tsx";
 import { ThresholdAnswer } from "../features/explore/threshold/threshold-answer.tsx";
 import { storedReading } from "../features/explore/threshold/threshold-reading.ts";
 import { mayEdit } from "../features/project-home/roles.ts";
@@ -43,6 +44,9 @@ export function ExplorationPage() {
             {...(canEdit && { open })}
           />
         )}
+        {stored.kind === "study" && (
+          <StudyView key={stored.id} {...{ projectId, stored, canEdit }} isFresh={state?.isFresh === true} />
+        )}
         {stored.kind === "search" && <KeptSearch stored={stored} {...(canEdit && { open })} />}
       </main>
     </>
@@ -66,10 +70,7 @@ function KeptSearch({ stored, open }: { stored: StoredExploration; open?: Return
 }
 
 const cellAnswer = (computed: Computed) => (
-  <>
-    <div className="mb-3 text-24 leading-[1.35] font-semibold">
-      <SentenceGlance computed={computed} />
-    </div>
-    <StripGlance computed={computed} />
-  </>
+  <div className="mb-3 text-24 leading-[1.35] font-semibold">
+    <SentenceGlance computed={computed} />
+  </div>
 );

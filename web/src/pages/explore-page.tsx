@@ -13,6 +13,8 @@ import { WorkHeader } from "../features/account/work-header.tsx";
 import { KeptList } from "../features/explore/kept/kept-list.tsx";
 import { sweepToKeep } from "../features/explore/sweep/stored-sweep.ts";
 import { SweepBuilder } from "../features/explore/sweep/sweep-builder.tsx";
+import { studyToKeep } from "../features/explore/study/stored-study.ts";
+import { StudyBuilder } from "../features/explore/study/study-builder.tsx";
 import { CuresSection } from "../features/explore/threshold/cures-section.tsx";
 import { HoldingSection } from "../features/explore/threshold/holding-section.tsx";
 import { searchToKeep } from "../features/explore/threshold/threshold-reading.ts";
@@ -67,6 +69,14 @@ export function ExplorePage() {
             <SweepBuilder
               scenario={scenario}
               onRun={(asked, title) => keep.andOpen(sweepToKeep(asked, { ...about, title }))}
+            />
+          </Section>
+        )}
+        {canEdit && (
+          <Section name="Tolerance" help="What becomes of the limits where values scatter.">
+            <StudyBuilder
+              scenario={scenario}
+              onRun={(plan, title) => keep.andOpen(studyToKeep(plan, scenario, { ...about, title }))}
             />
           </Section>
         )}

@@ -1,4 +1,6 @@
 import { compileProblem, isFed, lowestHz, type Result, type Samples, type Scenario } from "@restband/solver";
+import { MotionStrip } from "../../../components/motion-strip.tsx";
+import { intervalsOf } from "../../../compute/intervals.ts";
 import { inputsOf } from "../../../compute/inputs.ts";
 import { say } from "../../../format/format-quantity.ts";
 import { SmallTrace } from "./small-trace.tsx";
@@ -25,8 +27,16 @@ export function CellTraces({ scenario, result }: CellTracesProps) {
   const places = picked.map((i) => samples.x[i] - (isBehind ? base(samples.t[i]) : 0));
   const times = picked.map((i) => samples.t[i]);
   const { motion } = scenario;
+  const intervals = intervalsOf(samples, end);
   return (
     <>
+      <MotionStrip
+        intervals={intervals}
+        from={times[0]}
+        to={end}
+        isNever={result.outcome === "never-moved"}
+        label="Motion over the same time"
+      />
       <SmallTrace
         label={isBehind ? "ahead of the drive (−: behind)" : "displacement"}
         times={times}

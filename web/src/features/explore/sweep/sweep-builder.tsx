@@ -1,6 +1,7 @@
-import { quantities, type Continuation, type QuantityName, type Scenario, type SweepPlan } from "@restband/solver";
+import type { Continuation, Scenario, SweepPlan } from "@restband/solver";
 import { useMemo, useState } from "react";
 import { Button } from "../../../components/button.tsx";
+import { QuantityChoice } from "../quantity-choice.tsx";
 import { Checkbox } from "../../../components/choices.tsx";
 import { ErrorNote } from "../../../components/error-note.tsx";
 import { FieldError } from "../../../components/field.tsx";
@@ -98,7 +99,12 @@ export function SweepBuilder({ scenario, onRun }: SweepBuilderProps) {
         </Button>
       )}
       <HowRun draft={draft} scenario={scenario} set={set} fault={faultAt("continuation")} />
-      <QuantityChoice chosen={draft.quantities} onChange={(chosen) => set({ quantities: chosen })} />
+      <QuantityChoice
+        label="Kept of each cell"
+        fixed="stickFraction"
+        chosen={draft.quantities}
+        onChange={(quantities) => set({ quantities })}
+      />
       {isTried && general.map(({ message }) => <FieldError key={message}>{message}</FieldError>)}
       {run.failure && <ErrorNote>{run.failure}</ErrorNote>}
       <div className="flex flex-wrap items-center gap-4">
@@ -162,33 +168,3 @@ const cellsOf = (plan: SweepPlan): string =>
     9,
   );
 const toPutRight = (count: number): string => `${count} field${count === 1 ? "" : "s"} to put right`;
-
-const MOST_QUANTITIES = 16;
-
-interface QuantityChoiceProps {
-  chosen: readonly QuantityName[];
-  onChange: (chosen: QuantityName[]) => void;
-}
-
-/** What is kept of each cell besides its outcome and limits. */
-function QuantityChoice({ chosen, onChange }: QuantityChoiceProps) {
-  const isFull = chosen.length >= MOST_QUANTITIES;
-  return (
-    <details>
-      <summary className="link w-fit text-15">Kept of each cell: {chosen.length} quantities</summary>
-      <div className="mt-3 grid gap-x-6 gap-y-1.5 desk:grid-cols-3">
-        {quantities.map(({ name, label }) => (
-          <Checkbox
-            key={name}
-            label={label}
-            checked={chosen.includes(name)}
-            disabled={name === "stickFraction" || (isFull && !chosen.includes(name))}
-            onChange={(event) =>
-              onChange(event.target.checked ? [...chosen, name] : chosen.filter((each) => each !== name))
-            }
-          />
-        ))}
-      </div>
-    </details>
-  );
-}

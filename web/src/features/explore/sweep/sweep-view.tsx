@@ -1,14 +1,17 @@
 import type { StoredExploration } from "@restband/api/contract";
 import { cellCount, type Scenario, type SweepPlan } from "@restband/solver";
-import { useEffect, useMemo, useRef, useState, type ReactNode } from "react";
+import { useEffect, useMemo, useState, type ReactNode } from "react";
 import { Button } from "../../../components/button.tsx";
-import { ErrorNote } from "../../../components/error-note.tsx";
-import { ProgressLine } from "../../../components/progress-line.tsx";
 import { fileNameOf, saveFile } from "../../../components/save-file.ts";
 import { useExploring } from "../../../compute/use-exploring.ts";
 import type { Computed } from "../../../compute/use-run.ts";
 import { useUnitSystem } from "../../../format/unit-system.ts";
-import { rateWords } from "../rate-words.ts";
+import { TileProgress } from "../kept/tile-progress.tsx";
+import { tileRunOf, type TileRun } from "../kept/tile-run.ts";
+import { useTileRun } from "../kept/use-tile-run.ts";
+import { storedSweep, sweepWork } from "./stored-sweep.ts";
+import type { SweepCells } from "./sweep-cells.ts";
+import { sweepHeadline } from "./sweep-headline.ts";
 import { axisScale } from "./axis-scale.ts";
 import { searchLimitLines, type LimitLine } from "./limit-lines.ts";
 import { MapChoice, useShown } from "./map-choice.tsx";
@@ -17,10 +20,8 @@ import { SelectedCell } from "./selected-cell.tsx";
 import { sweepCsv } from "./sweep-csv.ts";
 import { SweepHead } from "./sweep-head.tsx";
 import { SweepMap } from "./sweep-map.tsx";
-import type { SweepRun } from "./sweep-run.ts";
 import { SweepTable } from "./sweep-table.tsx";
 import { LineFamily } from "./line-family.tsx";
-import { useSweep } from "./use-sweep.ts";
 
 interface SweepViewProps {
   projectId: string;
@@ -36,11 +37,15 @@ interface SweepViewProps {
 /** A sweep: what it says, its map as it fills, the selected cell, and everything as a table. */
 export function SweepView({ projectId, stored, canEdit, isFresh, answer, open, compare }: SweepViewProps) {
   useUnitSystem();
-  const run = useSweep(projectId, stored, canEdit);
-  useBegin(run, isFresh && stored.headline === null);
-  const { cells } = run;
-  const { plan } = cells;
-  const { scenario } = run;
+  const { plan, scenario } = useMemo(() => storedSweep(stored), [stored]);
+  const run = tileRunOf(projectId, stored, () => sweepWork(plan, scenario));
+  const { isComplete } = run;
+  const conclusion = useMemo(
+    () => (isComplete ? { headline: sweepHeadline(run.store), answer: {} } : null),
+    [run, isComplete],
+  );
+  useTileRun(run, { projectId, stored, canEdit, isFresh, conclusion });
+  const cells = run.store;
   const edition = run.editionNow();
   const [across, up] = useMemo(() => {
     const [first, second] = plan.axes;
@@ -61,7 +66,7 @@ export function SweepView({ projectId, stored, canEdit, isFresh, answer, open, c
       <SweepHead stored={stored} scenario={scenario} cells={cells} lines={lines.lines} edition={edition} />
       <div className="grid gap-x-12 gap-y-8 border-t border-line pt-6 wide:grid-cols-[minmax(0,1fr)_388px]">
         <div className="min-w-0">
-          <SweepProgress run={run} stored={stored} canEdit={canEdit} />
+          <TileProgress run={run} stored={stored} canEdit={canEdit} noun="cells" />
           <div className="my-4 flex flex-wrap items-center gap-3">
             <MapChoice
               plan={plan}
@@ -115,76 +120,14 @@ export function SweepView({ projectId, stored, canEdit, isFresh, answer, open, c
   );
 }
 
-/** Begins once, where it has just been asked for. */
-function useBegin(run: SweepRun, isWanted: boolean): void {
-  const begun = useRef(false);
-  useEffect(() => {
-    if (!isWanted || begun.current) return;
-    begun.current = true;
-    void run.start(true);
-  }, [run, isWanted]);
-}
-
 /** The searched boundaries, once all cells are there; of one field there are none. */
-function useLimitLines(run: SweepRun, scenario: Scenario, plan: SweepPlan): { lines: readonly LimitLine[] } {
+function useLimitLines(run: TileRun<SweepCells>, scenario: Scenario, plan: SweepPlan): { lines: readonly LimitLine[] } {
   const search = useExploring<LimitLine[]>();
   const { begin } = search;
   const isWanted = run.isComplete && plan.axes.length === 2 && plan.continuation === "none";
   useEffect(() => {
-    if (isWanted) void begin(searchLimitLines(scenario, plan, run.cells));
+    if (isWanted) void begin(searchLimitLines(scenario, plan, run.store));
   }, [begin, isWanted, plan, run, scenario]);
   return { lines: search.state.kind === "done" ? search.state.value : none };
 }
 const none: readonly LimitLine[] = [];
-
-interface SweepProgressProps {
-  run: SweepRun;
-  stored: StoredExploration;
-  canEdit: boolean;
-}
-
-function SweepProgress({ run, stored, canEdit }: SweepProgressProps) {
-  const { state, done, cells, trouble, failed } = run;
-  const isElsewhere = stored.state === "running" && state.kind !== "running" && !run.isComplete;
-  return (
-    <div className="flex flex-col gap-3" aria-live="polite">
-      {state.kind === "running" && (
-        <ProgressLine
-          label="Running the cells"
-          fraction={done / cells.count}
-          remark={progressWords(done, state.doneBefore, cells.count, state.elapsed)}
-          onCancel={() => run.stop()}
-        />
-      )}
-      {isElsewhere && (
-        <p className="text-13 text-quiet">
-          {stored.runner?.name ?? "Somebody"} computes this just now. {cells.done} of {cells.count} cells are here.
-        </p>
-      )}
-      {state.kind !== "running" && !run.isComplete && !isElsewhere && (
-        <div className="flex flex-wrap items-center gap-4">
-          <span className="text-13 text-quiet">
-            {cells.done} of {cells.count} cells are here.
-          </span>
-          <Button onClick={() => void run.start(canEdit)}>Resume</Button>
-          {!canEdit && <span className="text-13 text-quiet">Your role may not save: it runs for you alone.</span>}
-        </div>
-      )}
-      {state.kind === "failed" && <ErrorNote>{state.message}</ErrorNote>}
-      {trouble && run.unsavedCount > 0 && (
-        <ErrorNote>
-          {run.unsavedCount} finished parts are not saved yet: {trouble} It is tried again.
-        </ErrorNote>
-      )}
-      {[...failed].slice(0, 1).map(([tile, reason]) => (
-        <ErrorNote key={tile}>A part of the map could not be computed: {reason} Resume tries it again.</ErrorNote>
-      ))}
-    </div>
-  );
-}
-
-/** The rate counts what was done since it began, not what was there before. */
-function progressWords(done: number, before: number, count: number, elapsed: number): string {
-  const words = rateWords(done - before, count - before, elapsed);
-  return before === 0 ? words : `${words}, ${before} were there`;
-}

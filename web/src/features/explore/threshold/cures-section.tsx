@@ -9,6 +9,7 @@ import { useRun } from "../../../compute/use-run.ts";
 import { formatNumber } from "../../../format/format-number.ts";
 import { joined, readInput } from "../../../format/format-quantity.ts";
 import { quantityNamed } from "../../../format/quantities.ts";
+import { capitalised, listed } from "../../../format/words.ts";
 import { unitFor } from "../../../format/units.ts";
 import { exploreField } from "../explore-field.ts";
 import type { ExploreFrame } from "../explore-frame.ts";
@@ -73,10 +74,16 @@ interface CuresTableProps extends ExploreFrame {
 
 function CuresTable({ cures: { limit, cures, withoutCure }, scenario, open }: CuresTableProps) {
   const name = quantityNamed(scenario.limits[limit].quantity)?.label ?? scenario.limits[limit].quantity;
+  if (cures.length === 0)
+    return (
+      <p className="mb-8 max-w-(--measure)">
+        <strong>{name}:</strong> {outOfReach(withoutCure, scenario)}
+      </p>
+    );
   return (
     <div className="mb-8">
       <DataTable
-        caption={cures.length > 0 ? `${name}: any one of these cures it` : name}
+        caption={`${name}: any one of these cures it`}
         isCaptionShown
         rows={cures}
         keyOf={({ path }) => path}
@@ -108,13 +115,16 @@ function CuresTable({ cures: { limit, cures, withoutCure }, scenario, open }: Cu
         ]}
       />
       {withoutCure.length > 0 && (
-        <p className="mt-2 max-w-(--measure) text-13 text-quiet">
-          Out of reach alone, within a tenth and ten times of what is entered:{" "}
-          {withoutCure.map(({ path, label }) => exploreField(scenario, path)?.name ?? label).join(", ")}.
-        </p>
+        <p className="mt-2 max-w-(--measure) text-13 text-quiet">{capitalised(outOfReach(withoutCure, scenario))}</p>
       )}
     </div>
   );
+}
+
+/** What does not cure a limit alone, as far as was looked. */
+function outOfReach(paths: Cures["withoutCure"], scenario: Scenario): string {
+  const names = paths.map(({ path, label }) => exploreField(scenario, path)?.name ?? label);
+  return `out of reach alone by ${listed(names)}, from a tenth to ten times of what is entered.`;
 }
 
 const measureOf = (scenario: Scenario, { dimension }: Cure) => ({ dimension, motion: scenario.motion });

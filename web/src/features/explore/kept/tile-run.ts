@@ -1,17 +1,31 @@
 import type { StoredExploration } from "@restband/api/contract";
-import { cellCount, solverVersion, type Scenario } from "@restband/solver";
+import { solverVersion } from "@restband/solver";
 import { ApiFailure } from "../../../api/api-failure.ts";
 import { call } from "../../../api/client.ts";
 import { readTiles, saveTile } from "../../../api/explorations.ts";
-import { CalledOff } from "../../../compute/errand.ts";
+import { CalledOff, type TileErrand } from "../../../compute/errand.ts";
 import { explorePool } from "../../../compute/explore-pools.ts";
 import { runTiles } from "../../../compute/run-tiles.ts";
-import { storedSweep } from "./stored-sweep.ts";
-import { SweepCells } from "./sweep-cells.ts";
 import { runnerId } from "./runner-id.ts";
 
-/** How a sweep stands on this page. */
-export type SweepState =
+/** The rows of a sweep or a study that are there so far. */
+export interface TileStore {
+  /** Rows there will be, and rows there are. */
+  readonly count: number;
+  readonly done: number;
+  readonly hasTile: (tile: number) => boolean;
+  setTile(tile: number, rows: Float64Array): void;
+}
+
+/** What is computed, and in which order its tiles are best run. */
+export interface TileWork<Store extends TileStore> {
+  readonly store: Store;
+  readonly errandOf: (tile: number) => TileErrand;
+  readonly order: () => readonly number[];
+}
+
+/** How a computation stands on this page. */
+export type TileState =
   | { readonly kind: "waiting" }
   | { readonly kind: "running"; readonly elapsed: number; readonly doneBefore: number }
   | { readonly kind: "failed"; readonly message: string };
@@ -20,19 +34,17 @@ const AT_A_TIME = 4;
 const TRY_AGAIN_MS = 3000;
 
 /**
- * One sweep while it is open or computed: it lives outside the page's parts, so that it goes on while somebody looks
+ * A sweep or a study while it is open or computed: it lives outside the page's parts, so that it goes on while somebody looks
  * elsewhere. Tiles are saved as they come; what cannot be saved waits and is tried again.
  */
-export class SweepRun {
-  readonly cells: SweepCells;
-  /** The scenario whose cells are run. */
-  readonly scenario: Scenario;
-  state: SweepState = { kind: "waiting" };
+export class TileRun<Store extends TileStore> {
+  readonly store: Store;
+  state: TileState = { kind: "waiting" };
   /** Why tiles wait to be saved; null while all are. */
   trouble: string | null = null;
   /** Tiles that could not be computed, with the reason. */
   readonly failed = new Map<number, string>();
-  /** Cells done of tiles under way. */
+  /** Rows done of tiles under way. */
   private readonly under = new Map<number, number>();
   private readonly unsaved = new Map<number, Float64Array>();
   private isSaving = false;
@@ -43,11 +55,10 @@ export class SweepRun {
 
   constructor(
     private readonly projectId: string,
-    private readonly stored: StoredExploration,
+    private readonly explorationId: string,
+    private readonly work: TileWork<Store>,
   ) {
-    const { plan, scenario } = storedSweep(stored);
-    this.scenario = scenario;
-    this.cells = new SweepCells(plan, scenario.limits.length);
+    this.store = work.store;
   }
 
   readonly editionNow = (): number => this.edition;
@@ -57,11 +68,11 @@ export class SweepRun {
   };
 
   get done(): number {
-    return this.cells.done + [...this.under.values()].reduce((sum, each) => sum + each, 0);
+    return this.store.done + [...this.under.values()].reduce((sum, each) => sum + each, 0);
   }
 
   get isComplete(): boolean {
-    return this.cells.done === cellCount(this.cells.plan);
+    return this.store.done === this.store.count;
   }
 
   get unsavedCount(): number {
@@ -75,10 +86,10 @@ export class SweepRun {
   }
 
   private async fetchNow(saved: readonly number[]): Promise<void> {
-    const missing = saved.filter((tile) => !this.cells.hasTile(tile));
+    const missing = saved.filter((tile) => !this.store.hasTile(tile));
     for (let i = 0; i < missing.length; i += AT_A_TIME) {
-      const tiles = await readTiles(this.projectId, this.stored.id, missing.slice(i, i + AT_A_TIME));
-      for (const { number, rows } of tiles) this.cells.setTile(number, rows);
+      const tiles = await readTiles(this.projectId, this.explorationId, missing.slice(i, i + AT_A_TIME));
+      for (const { number, rows } of tiles) this.store.setTile(number, rows);
       this.tell();
     }
   }
@@ -91,23 +102,23 @@ export class SweepRun {
     if (this.state.kind === "running") return;
     const controller = (this.controller = new AbortController());
     const since = performance.now();
-    const doneBefore = this.cells.done;
+    const doneBefore = this.store.done;
     const progress = (): void => this.set({ kind: "running", elapsed: performance.now() - since, doneBefore });
     progress();
     try {
       if (isKept) await this.claim();
       await this.reading;
       await runTiles({
-        scenario: this.scenario,
-        plan: this.cells.plan,
+        errandOf: this.work.errandOf,
+        order: this.work.order,
+        hasTile: this.store.hasTile,
         pool: explorePool,
         signal: controller.signal,
-        rowsOf: (tile) => this.cells.rowsOf(tile),
         onTile: (tile, rows) => {
           this.take(tile, rows, isKept);
           progress();
         },
-        onCells: (tile, done) => {
+        onRows: (tile, done) => {
           this.under.set(tile, done);
           progress();
         },
@@ -131,7 +142,7 @@ export class SweepRun {
   }
 
   private get at() {
-    return { params: { projectId: this.projectId, explorationId: this.stored.id } };
+    return { params: { projectId: this.projectId, explorationId: this.explorationId } };
   }
 
   private async claim(): Promise<void> {
@@ -142,7 +153,7 @@ export class SweepRun {
   private take(tile: number, rows: Float64Array, isKept: boolean): void {
     this.under.delete(tile);
     this.failed.delete(tile);
-    this.cells.setTile(tile, rows);
+    this.store.setTile(tile, rows);
     if (isKept) {
       this.unsaved.set(tile, rows);
       void this.save();
@@ -156,7 +167,7 @@ export class SweepRun {
     for (let next = first(this.unsaved); next; next = first(this.unsaved)) {
       const [tile, rows] = next;
       try {
-        await saveTile(this.projectId, this.stored.id, tile, runnerId(), rows);
+        await saveTile(this.projectId, this.explorationId, tile, runnerId(), rows);
         this.unsaved.delete(tile);
         this.trouble = null;
       } catch (error) {
@@ -169,7 +180,7 @@ export class SweepRun {
     this.isSaving = false;
   }
 
-  private set(state: SweepState): void {
+  private set(state: TileState): void {
     this.state = state;
     this.tell();
   }
@@ -184,15 +195,19 @@ const first = <K, V>(map: Map<K, V>): [K, V] | undefined => map.entries().next()
 
 const sentenceOf = (error: unknown): string => (error instanceof Error ? error.message : String(error));
 
-const runs = new Map<string, SweepRun>();
+const runs = new Map<string, TileRun<TileStore>>();
 const MOST_OPEN = 8;
 
-/** The run of a sweep, the same as long as the page is open. */
-export function sweepRunOf(projectId: string, stored: StoredExploration): SweepRun {
-  const known = runs.get(stored.id);
-  if (known) return known;
-  for (const [id, run] of runs) if (runs.size >= MOST_OPEN && run.state.kind !== "running") runs.delete(id);
-  const run = new SweepRun(projectId, stored);
-  runs.set(stored.id, run);
+/** The run of an exploration, the same as long as the page is open. `workOf` makes it where it is not there yet. */
+export function tileRunOf<Store extends TileStore>(
+  projectId: string,
+  { id }: StoredExploration,
+  workOf: () => TileWork<Store>,
+): TileRun<Store> {
+  const known = runs.get(id);
+  if (known) return known as TileRun<Store>;
+  for (const [other, run] of runs) if (runs.size >= MOST_OPEN && run.state.kind !== "running") runs.delete(other);
+  const run = new TileRun(projectId, id, workOf());
+  runs.set(id, run);
   return run;
 }

@@ -1,0 +1,47 @@
+import type { StoredExploration } from "@restband/api/contract";
+import { useQueryClient } from "@tanstack/react-query";
+import { useEffect, useRef, useSyncExternalStore } from "react";
+import { call } from "../../../api/client.ts";
+import { explorationQuery, explorationsQuery, type Conclusion } from "../../../api/explorations.ts";
+import type { TileRun, TileStore } from "./tile-run.ts";
+
+interface TileRunSettings {
+  readonly projectId: string;
+  readonly stored: StoredExploration;
+  readonly canEdit: boolean;
+  /** True where it has just been asked for: it begins by itself. */
+  readonly isFresh: boolean;
+  /** What it says once all its rows are there; null until that is known. */
+  readonly conclusion: Conclusion | null;
+}
+
+/** Fills a run with what is saved, tells each change, begins it where it is fresh and concludes it when it is complete. */
+export function useTileRun(run: TileRun<TileStore>, settings: TileRunSettings): void {
+  const { projectId, stored, canEdit, isFresh, conclusion } = settings;
+  useSyncExternalStore(run.subscribe, run.editionNow);
+  const client = useQueryClient();
+  useEffect(() => void run.fetch(stored.saved), [run, stored.saved]);
+
+  const hasBegun = useRef(false);
+  const isToBegin = isFresh && stored.headline === null;
+  useEffect(() => {
+    if (!isToBegin || hasBegun.current) return;
+    hasBegun.current = true;
+    void run.start(true);
+  }, [run, isToBegin]);
+
+  const isConcluding = useRef(false);
+  const isToConclude = canEdit && stored.headline === null && run.isComplete && run.unsavedCount === 0;
+  useEffect(() => {
+    if (!isToConclude || !conclusion || isConcluding.current) return;
+    isConcluding.current = true;
+    const at = { params: { projectId, explorationId: stored.id } };
+    const then = async (): Promise<void> => {
+      await client.invalidateQueries({ queryKey: explorationQuery(projectId, stored.id).queryKey });
+      await client.invalidateQueries({ queryKey: explorationsQuery(projectId, stored.scenarioId).queryKey });
+    };
+    void call("concludeExploration", { ...at, body: conclusion })
+      .then(then)
+      .catch(() => (isConcluding.current = false));
+  }, [client, conclusion, isToConclude, projectId, stored]);
+}
