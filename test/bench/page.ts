@@ -39,10 +39,9 @@ try {
 
 async function reportScripts(at: BenchSite, addresses: Record<string, string>): Promise<void> {
   for (const [name, address] of Object.entries(addresses)) {
-    const { kB, firstPaint, answer } = await scriptsBeforePaint(at, address);
-    console.log(
-      `${name}: ${kB.toFixed(1)} kB fetched before the first paint of its content, ${ms(answer)} after its address (anything painted: ${ms(firstPaint)})`,
-    );
+    const { kB, firstPaint, content } = await scriptsBeforePaint(at, address);
+    const when = `first paint after ${ms(firstPaint)}, its content after ${ms(content)}`;
+    console.log(`${name}: ${when}, with ${kB.toFixed(1)} kB of scripts come by then, load ${load()}`);
   }
 }
 

@@ -1,24 +1,12 @@
 import { join } from "node:path";
 import { type Browser, type BrowserContextOptions, chromium, type Page } from "playwright-core";
 import { onTestFailed } from "vitest";
+import { launchOptions } from "./chromium.ts";
 import { createTestDatabase, type TestDatabase } from "./test-database.ts";
 import { startTestServer, type TestServer } from "./test-server.ts";
 
 const root = join(import.meta.dirname, "../..");
 const webRoot = join(root, "web/dist");
-
-const launchOptions = {
-  executablePath: "/usr/bin/chromium",
-  args: [
-    "--no-sandbox",
-    "--disable-gpu",
-    "--disable-quic",
-    "--no-first-run",
-    "--disable-background-networking",
-    "--disable-component-update",
-    "--disable-sync",
-  ],
-};
 
 export const desk = { width: 1440, height: 900 };
 export const phone = { width: 390, height: 844 };
@@ -73,6 +61,11 @@ export class Journey {
     const taken = this.complaints.filter((complaint) => pattern.test(complaint));
     this.complaints.splice(0, Infinity, ...this.complaints.filter((complaint) => !pattern.test(complaint)));
     return taken;
+  }
+
+  /** Changes something in the database behind the server's back, with every right there is. */
+  async alter(change: (database: TestDatabase["database"]) => PromiseLike<unknown>): Promise<void> {
+    await change(this.#database.database);
   }
 
   /** The server is gone: every connection breaks. */
