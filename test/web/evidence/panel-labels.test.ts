@@ -24,6 +24,19 @@ describe("the words at the lines of the panels", () => {
     expect(labels[1].y).toBeCloseTo(yOf(velocity, 0.002) - 6, 9);
   });
 
+  it("stand where the body's own curve leaves room", () => {
+    const words = (run: RunView) => panelLabels(run, frameOf(1160, range, scalesOf(run, range)), []);
+    expect(words(feed)[1].x).toBe(80);
+    // Back at 20 mm/s it swings about that speed at first and runs at it in the end.
+    const back = variant({
+      body: { inertia: 120, stiffness: 4e6, cubic: 0, viscous: 4100 },
+      base: [{ kind: "ramp", rate: -0.02, start: 0, stop: "none" }],
+    });
+    const fast = viewOf(solved(back));
+    expect(words(fast)[1].x).toBeGreaterThan(300);
+    expect(words(fast)[0].anchor).toBe("start");
+  });
+
   it("name what friction can hold where there is no gutter", () => {
     const frame = frameOf(390, range, scalesOf(feed, range));
     expect(plain(panelLabels(feed, frame, [])[2].text)).toBe("holds up to 296.5 N");

@@ -49,8 +49,11 @@ function loopCurve({ samples, places, events, range }: LoopPart, { key, across, 
   const channel = key === "velocity" ? "v" : "f";
   const isDense = events.length > MOST_POINTS / 8;
   const keep = isDense ? [] : events.flatMap((i) => [i - 1, i]);
-  const about = thinned(samples.t, places, range, MOST_POINTS / 4, keep);
-  const indices = thinned(samples.t, samples[channel], range, MOST_POINTS / 4, [...about]);
+  // A loop is round: points that are spread evenly make it so, and none of its extremes is lost.
+  const stride = Math.ceil(samples.t.length / (MOST_POINTS / 2));
+  const even = Array.from({ length: Math.ceil(samples.t.length / stride) }, (_, k) => k * stride);
+  const about = thinned(samples.t, places, range, MOST_POINTS / 8, [...keep, ...even]);
+  const indices = thinned(samples.t, samples[channel], range, MOST_POINTS / 8, [...about]);
   return curveOf(samples, channel, indices, upright.unit, isDense, { values: places, unit: across.unit });
 }
 

@@ -1,8 +1,8 @@
 import { say } from "../../format/format-quantity.ts";
-import { plotWidth, xOf, yOf, type Frame, type PanelFrame, type PanelKey } from "./frame.ts";
+import { plotWidth, timeAt, xOf, yOf, type Frame, type PanelFrame, type PanelKey } from "./frame.ts";
 import { overlayAt, type Overlay } from "./overlay.ts";
 import type { RunView } from "./run-view.ts";
-import { driveSpeed } from "./scales.ts";
+import { driveSpeed, extremesOf } from "./scales.ts";
 
 /** A word at a line of the panels, px from the figure's top left to its baseline. */
 export interface PanelLabel {
@@ -40,7 +40,9 @@ function bandLabel({ inputs, scenario }: RunView, frame: Frame, panel: PanelFram
   const width = say(inputs.restBand, { dimension: "displacement", motion: scenario.motion });
   const y = edge - FALL > panel.top ? edge - RISE - 4 : edge + FALL;
   if (y < panel.top || y > panel.top + panel.height) return [];
-  return [{ key: "band", text: `rest band ±${width}`, x: xOf(frame, t), y, anchor: "end", tone: "band-line" }];
+  // A band that falls leaves room to its right.
+  const anchor = (inputs.equilibrium(frame.to) ?? 0) < centre ? "start" : "end";
+  return [{ key: "band", text: `rest band ±${width}`, x: xOf(frame, t), y, anchor, tone: "band-line" }];
 }
 
 /** At four fifths of what is seen, or at its end. */
@@ -60,15 +62,30 @@ const LONGEST = 30;
 const shortened = (title: string): string =>
   title.length > LONGEST ? `${title.slice(0, LONGEST - 1).trimEnd()}…` : title;
 
+/** About the width of a word like "feed", px. */
+const WORD = 34;
+
+/** Where the body's own curve leaves room above the line, from the left on; at the left where it nowhere does. */
 function speedLabel(view: RunView, frame: Frame, panel: PanelFrame): PanelLabel[] {
-  return driveSpeed(view).map((speed) => ({
-    key: "speed",
-    text: view.scenario.base.length > 0 ? "feed" : "belt",
-    x: frame.left + 4,
-    y: yOf(panel, speed) - RISE,
-    anchor: "start",
-    tone: "quiet",
-  }));
+  return driveSpeed(view).map((speed) => {
+    const y = yOf(panel, speed) - RISE;
+    const places = [0, 0.2, 0.4, 0.6, 0.8, 1].map((share) => frame.left + 4 + share * (plotWidth(frame) - WORD - 8));
+    const x = places.find((place) => isFree(view, frame, panel, { x: place, y })) ?? places[0];
+    return {
+      key: "speed",
+      text: view.scenario.base.length > 0 ? "feed" : "belt",
+      x,
+      y,
+      anchor: "start",
+      tone: "quiet",
+    };
+  });
+}
+
+/** True where the velocity keeps off a word that stands at x on y. */
+function isFree({ samples }: RunView, frame: Frame, panel: PanelFrame, { x, y }: { x: number; y: number }): boolean {
+  const [low, high] = extremesOf(samples, "v", { from: timeAt(frame, x), to: timeAt(frame, x + WORD) });
+  return yOf(panel, high) > y + RISE / 2 || yOf(panel, low) < y - FALL;
 }
 
 /** At the line that is in the picture; above it, or below it where it is at the panel's upper edge. */

@@ -1,6 +1,6 @@
 /**
  * The points of a curve worth drawing between two times: of each of `count`/4 equal stretches its first, lowest, highest
- * and last sample, and every one whose index is in `keep` (sorted). Extremes of the curve are never lost.
+ * and last sample, and every one whose index is in `keep`. Extremes of the curve are never lost.
  */
 export function thinned(
   times: Float64Array,
