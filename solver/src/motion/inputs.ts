@@ -76,6 +76,7 @@ export class Inputs {
   private readonly smooth: readonly SmoothPart[];
   private acting: readonly SmoothPart[] = [];
   private readonly rotated = { re: 0, im: 0 };
+  private readonly before = new Float64Array(4);
 
   constructor(problem: Problem) {
     this.problem = problem;
@@ -109,7 +110,7 @@ export class Inputs {
       this.addHarmonics(term, t, this.forceRe, this.forceIm, this.forceSize);
     }
     for (const term of problem.base) {
-      term.addPolynomial(t, term.isAcceleration ? this.acceleration : this.base);
+      this.addBase(term, t);
       end = Math.min(end, term.nextCorner(t));
       this.addHarmonics(term, t, this.baseRe, this.baseIm, this.baseSize);
     }
@@ -119,6 +120,15 @@ export class Inputs {
     }
     if (this.smooth.length > 0) this.acting = this.smooth.filter((part) => part.from <= t && t < part.to);
     this.end = Math.min(end, this.locateRipple(t));
+  }
+
+  /** Adds a term's y (or ÿ); where terms cancel each other nothing is left of them, not their rounding: a base at rest rests. */
+  private addBase(term: CompiledTerm, t: number): void {
+    const { base, before } = this;
+    if (term.isAcceleration) return term.addPolynomial(t, this.acceleration);
+    before.set(base);
+    term.addPolynomial(t, base);
+    for (let j = 1; j < 4; j++) if (Math.abs(base[j]) <= 2 ** -50 * Math.abs(before[j])) base[j] = 0;
   }
 
   /** Fills `values` at τ = t − origin. */

@@ -120,7 +120,9 @@ export class IntegratedSlip implements Slip {
     const from = store.from(this.last);
     const to = stance.t + ending.tau;
     const fallsAt = this.watched;
-    if (fallsAt === null || ending.isTouch || !(to > from)) return;
+    // right after its start a step needs no second one
+    const isLate = to - from > 1e-6 * (store.to(this.last) - from);
+    if (fallsAt === null || ending.isTouch || !isLate) return;
     store.evaluate(this.last, from, this.at);
     store.count = --this.last + 1;
     const reached = this.integrate(from, to, [...this.at], work, () => true);
