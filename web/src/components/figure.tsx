@@ -1,4 +1,5 @@
 import { classNames } from "./class-names.ts";
+import { PowerText } from "./power-text.tsx";
 
 interface FigureProps {
   text: string;
@@ -12,7 +13,9 @@ interface FigureProps {
 export function Figure({ text, unit, full, className }: FigureProps) {
   return (
     <span className={classNames("whitespace-nowrap", className)} title={full}>
-      <span className="figures">{text}</span>
+      <span className="figures">
+        <PowerText text={text} />
+      </span>
       {unit && (
         <span className={classNames("text-[0.8em] font-normal text-quiet", !unit.startsWith("°") && "ml-[0.25em]")}>
           {unit}

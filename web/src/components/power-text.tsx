@@ -1,15 +1,19 @@
-const POWER = /10([⁻⁰¹²³⁴⁵⁶⁷⁸⁹]+)/;
+const POWERS = /10([⁻⁰¹²³⁴⁵⁶⁷⁸⁹]+)/u;
 const SUPERSCRIPTS = "⁰¹²³⁴⁵⁶⁷⁸⁹";
 
-/** A number whose power of ten, if it has one, is set by the page: our faces have no small figures of their own. */
+/** A text whose powers of ten, if it has any, are set by the page: our faces have no small figures of their own. */
 export function PowerText({ text }: { text: string }) {
-  const power = POWER.exec(text);
-  if (!power) return text;
-  const digits = [...power[1]].map((sign) => (sign === "⁻" ? "−" : SUPERSCRIPTS.indexOf(sign))).join("");
-  return (
-    <>
-      {text.slice(0, power.index)}10<sup className="text-[0.72em]">{digits}</sup>
-      {text.slice(power.index + power[0].length)}
-    </>
+  // Split at a pattern with a group: every second part is what was found.
+  return text.split(POWERS).map((part, i) =>
+    i % 2 === 0 ? (
+      part
+    ) : (
+      <span key={i}>
+        10<sup className="text-[0.72em]">{plainDigits(part)}</sup>
+      </span>
+    ),
   );
 }
+
+const plainDigits = (power: string): string =>
+  [...power].map((sign) => (sign === "⁻" ? "−" : SUPERSCRIPTS.indexOf(sign))).join("");

@@ -1,7 +1,7 @@
 import type { Revision, StoredScenario } from "@restband/api/contract";
 import type { Scenario } from "@restband/solver";
-import { useState } from "react";
-import { useNavigate } from "react-router-dom";
+import { useEffect, useState } from "react";
+import { useLocation, useNavigate } from "react-router-dom";
 import { Button } from "../components/button.tsx";
 import { Dialog } from "../components/dialog.tsx";
 import { lazyPart } from "../components/lazy-part.ts";
@@ -36,6 +36,7 @@ export function RevisionsSection(props: RevisionsSectionProps) {
   const { projectId, id: scenarioId, digest } = stored;
   const [frozen, setFrozen] = useState<Freezable | null>(null);
   const navigate = useNavigate();
+  useArrival();
   const open = (): void => {
     const wanted = freezableOf(props);
     if (typeof wanted === "string") announce(wanted);
@@ -60,6 +61,14 @@ export function RevisionsSection(props: RevisionsSectionProps) {
       </Dialog>
     </Section>
   );
+}
+
+/** Who followed a link to the revisions is taken to them: they come later than the page. */
+function useArrival(): void {
+  const { hash } = useLocation();
+  useEffect(() => {
+    if (hash === "#revisions") document.getElementById("revisions")?.scrollIntoView();
+  }, [hash]);
 }
 
 /** What can be frozen: the stored version with its answer; a sentence where there is no such thing just now. */

@@ -2,6 +2,7 @@ import type { Replay, Revision } from "@restband/api/contract";
 import { useState } from "react";
 import { DataTable, type Column } from "../../components/data-table.tsx";
 import { Figure } from "../../components/figure.tsx";
+import { PowerText } from "../../components/power-text.tsx";
 import { StateMark } from "../../components/state-mark.tsx";
 import { formatNumber } from "../../format/format-number.ts";
 import { readQuantity } from "../../format/format-quantity.ts";
@@ -36,7 +37,7 @@ export function ReplayRow({ replay, revision, ownId }: ReplayRowProps) {
         </p>
         <p className="min-w-0 text-15">
           <span className="text-13 text-quiet">largest difference </span>
-          {largestWords(replay, content.motion)}
+          <PowerText text={largestWords(replay, content.motion)} />
         </p>
         <StateMark {...replayVerdicts[replay.verdict]} />
         <p className="text-13 text-quiet">
@@ -57,9 +58,11 @@ export function ReplayRow({ replay, revision, ownId }: ReplayRowProps) {
 function Convergence({ replay }: { replay: Replay }) {
   return (
     <p className="mt-1 text-13 text-quiet">
-      {replay.convergence
-        .map(({ tolerance, relative }) => `at tolerance ${formatNumber(tolerance, 1)}: ${shareOfPeak(relative)}`)
-        .join("; ")}
+      <PowerText
+        text={replay.convergence
+          .map(({ tolerance, relative }) => `at tolerance ${formatNumber(tolerance, 1)}: ${shareOfPeak(relative)}`)
+          .join("; ")}
+      />
     </p>
   );
 }
@@ -86,7 +89,7 @@ function Figures({ replay, motion }: { replay: Replay; motion: "linear" | "angul
       key: "relative",
       head: "share of the peak",
       isFigure: true,
-      cell: ({ relative }) => formatNumber(relative, 2),
+      cell: ({ relative }) => <PowerText text={formatNumber(relative, 2)} />,
     },
   ];
   return (
@@ -96,7 +99,9 @@ function Figures({ replay, motion }: { replay: Replay; motion: "linear" | "angul
           {difference}
         </p>
       ))}
-      <p className="mb-2 text-13 text-quiet">Allowed: {shareOfPeak(replay.allowed)} in each unit. Largest first.</p>
+      <p className="mb-2 text-13 text-quiet">
+        Allowed: <PowerText text={shareOfPeak(replay.allowed)} /> in each unit. Largest first.
+      </p>
       <DataTable
         caption="All figures of this replay"
         columns={columns}
