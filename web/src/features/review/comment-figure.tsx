@@ -196,7 +196,7 @@ function Picker({ plot, onPick }: { plot: PlotPlace; onPick: (anchor: Anchor) =>
         height={HEIGHT + 26}
         fill="transparent"
         className="cursor-crosshair touch-pan-y"
-        aria-label="Time axis"
+        data-axis
         onPointerDown={(event) => {
           event.currentTarget.setPointerCapture(event.pointerId);
           setDrag({ start: xOf(event), now: xOf(event) });

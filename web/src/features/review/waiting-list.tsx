@@ -22,7 +22,7 @@ export function WaitingList() {
   const close = useCloseNotice();
   if (!notices || notices.length === 0) return null;
   return (
-    <section aria-labelledby="waiting">
+    <section aria-labelledby="waiting" className="max-wide:-order-1">
       <h2 id="waiting" className="border-b border-edge pb-2.5 text-15 font-bold">
         Waits for you
       </h2>
