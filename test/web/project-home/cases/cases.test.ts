@@ -41,6 +41,7 @@ describe("a table of cases", () => {
     ["tabs, a row of units", "Title\tStatic friction\tFeed\n\t\tmm/min\nA\t0.2\t3\n"],
     ["semicolons, decimal commas, units in the head", "title;μs;feed [mm/min]\r\nA;0,2;3\r\n"],
     ["commas, paths, a mark at the beginning", '\uFEFFname,contact.law.static,"base[0].rate (mm/min)"\nA,0.2,3'],
+    ["units after a comma in the head", "Title\tStatic friction\tRate, mm/min\nA\t0.2\t3"],
     ["a unit in each cell", "Title|static|Feed\nA|0.2|3 mm/min"],
   ])("is read with %s", (_, text) => {
     const { cases, faults } = read(text);

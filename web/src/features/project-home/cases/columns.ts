@@ -31,7 +31,7 @@ export function readColumns(
   fields: readonly CaseField[],
   choices: Readonly<Record<number, ColumnChoice>>,
 ): ReadColumns {
-  const heads = head.map(splitHead);
+  const heads = head.map((text) => splitHead(text, fields));
   const targets = heads.map(({ name }, i) => choices[i]?.target ?? guess(name, fields));
   const unitRow = isUnitRow(rows[0], targets, fields) ? rows[0] : null;
   const faults: string[] = [];
@@ -46,10 +46,13 @@ export function readColumns(
   return { columns, rows: unitRow ? rows.slice(1) : rows, faults: [...faults, ...repeated(columns)] };
 }
 
-/** "Feed [mm/min]", "Feed (mm/min)" → name and unit. */
-function splitHead(head: string): { name: string; unit: string } {
+/** "Feed [mm/min]", "Feed (mm/min)", "Feed, mm/min" → name and unit; a label of ours that has a comma stays whole. */
+function splitHead(head: string, fields: readonly CaseField[]): { name: string; unit: string } {
+  const whole = { name: head, unit: "" };
   const [, name, unit] = /^(.*?)\s*[[(]([^\])]*)[\])]\s*$/u.exec(head) ?? [];
-  return name === undefined ? { name: head, unit: "" } : { name, unit };
+  if (name !== undefined) return { name, unit };
+  const [, before, after] = /^(.*?)\s*,\s*([^,]*)$/u.exec(head) ?? [];
+  return before === undefined || guess(head, fields) !== "unused" ? whole : { name: before, unit: after };
 }
 
 /** What the trade calls a number whose field has another name. */
