@@ -1,13 +1,4 @@
-import {
-  hasNoReidDamping,
-  hasStraightSpring,
-  holdsMoreThanItSlides,
-  isDamped,
-  isFed,
-  isUnderdamped,
-  slidesAtOneForce,
-} from "./conditions.ts";
-import { criticalSpeedRatio, jumpSpeed } from "./critical-feed.ts";
+import { criticalSpeedRatio, hasCriticalFeed, jumpSpeed } from "./critical-feed.ts";
 import type { TextbookCompanion } from "./textbook-companion.ts";
 
 const estimate = (ratio: number): number => 1 / Math.sqrt(4 * Math.PI * ratio);
@@ -19,15 +10,7 @@ export const criticalFeedEstimate: TextbookCompanion = {
   formula: "ΔF/√(4π ζ k m)",
   source: "Form of Derjaguin, Push & Tolstoi 1957 and Brockley, Cameron & Potter 1967, from memory",
   dimension: "velocity",
-  conditions: [
-    isFed,
-    hasStraightSpring,
-    slidesAtOneForce,
-    holdsMoreThanItSlides,
-    isDamped,
-    isUnderdamped,
-    hasNoReidDamping,
-  ],
+  conditions: hasCriticalFeed,
   value: (kase) => jumpSpeed(kase) * estimate(kase.ratio),
   ofRun: () => null,
   note: ({ ratio }) => {

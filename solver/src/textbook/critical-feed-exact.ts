@@ -1,13 +1,4 @@
-import {
-  hasNoReidDamping,
-  hasStraightSpring,
-  holdsMoreThanItSlides,
-  isDamped,
-  isFed,
-  isUnderdamped,
-  slidesAtOneForce,
-} from "./conditions.ts";
-import { criticalSpeedRatio, feedBeside, jumpSpeed } from "./critical-feed.ts";
+import { criticalSpeedRatio, feedBeside, hasCriticalFeed, jumpSpeed } from "./critical-feed.ts";
 import type { TextbookCase } from "./textbook-case.ts";
 import type { TextbookCompanion } from "./textbook-companion.ts";
 
@@ -20,15 +11,7 @@ export const criticalFeedExact: TextbookCompanion = {
   formula: "velocity never regains V",
   source: "Closed form of one slip with damping, derived here",
   dimension: "velocity",
-  conditions: [
-    isFed,
-    hasStraightSpring,
-    slidesAtOneForce,
-    holdsMoreThanItSlides,
-    isDamped,
-    isUnderdamped,
-    hasNoReidDamping,
-  ],
+  conditions: hasCriticalFeed,
   value: criticalFeed,
   // one run has one feed: the lowest is found by a search over runs
   ofRun: () => null,

@@ -1,5 +1,26 @@
+import {
+  hasNoReidDamping,
+  hasStraightSpring,
+  holdsMoreThanItSlides,
+  isDamped,
+  isFed,
+  isUnderdamped,
+  slidesAtOneForce,
+} from "./conditions.ts";
 import { feedSpeed, speedOf } from "./feed.ts";
 import { slidingForce, type TextbookCase } from "./textbook-case.ts";
+import type { Condition } from "./textbook-companion.ts";
+
+/** What a lowest feed asks of a case, whatever its formula. */
+export const hasCriticalFeed: readonly Condition[] = [
+  isFed,
+  hasStraightSpring,
+  slidesAtOneForce,
+  holdsMoreThanItSlides,
+  isDamped,
+  isUnderdamped,
+  hasNoReidDamping,
+];
 
 /**
  * The speed above which a slip never regains the speed of the counterface, in units (F_s − F_k)/√(km), for 0 < ζ < 1 and a
