@@ -97,3 +97,4 @@ export {
   type CheckedThreshold,
   type ThresholdPlan,
 } from "./explore/threshold/check-threshold-question.ts";
+export { boundarySearch, type BoundaryPiece, type BoundaryPoint } from "./explore/sweep/boundary-search.ts";

@@ -1,5 +1,5 @@
 import type { Field } from "../../field.ts";
-import { numberAt, stepsOf } from "../../scenario/path.ts";
+import { stepsOf } from "../../scenario/path.ts";
 import { numericField } from "../../scenario/numeric-fields.ts";
 import { isNumberOf } from "../../scenario/reading.ts";
 import { numberFaults } from "../../scenario/rules.ts";
@@ -16,6 +16,7 @@ export class CellSetter {
   readonly scenario: Scenario;
   private readonly places: readonly Place[];
   private readonly linked: ReadonlyMap<string, Place>;
+  private readonly known = new Map<string, Place>();
 
   /** @param base a checked scenario, which stays as it is @param varied the paths set, in order */
   constructor(
@@ -32,10 +33,16 @@ export class CellSetter {
   set(values: ArrayLike<number>): Fault | null {
     const { places, scenario } = this;
     for (let i = 0; i < places.length; i++) places[i].holder[places[i].key] = values[i];
-    const follow = linkedValues(this.base, this.links, (path) => numberAt(scenario, path));
-    for (const [path, value] of follow) put(this.linked.get(path) as Place, value);
+    for (const [path, value] of linkedValues(this.base, this.links, this.read))
+      put(this.linked.get(path) as Place, value);
     return this.boundFault() ?? numberFaults(scenario)[0] ?? null;
   }
+
+  private readonly read = (path: string): number => {
+    const place = this.known.get(path) ?? placeOf(this.scenario, path);
+    this.known.set(path, place);
+    return place.holder[place.key];
+  };
 
   private boundFault(): Fault | null {
     for (const { holder, key, field, path } of [...this.places, ...this.linked.values()])

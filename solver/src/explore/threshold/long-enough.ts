@@ -1,6 +1,7 @@
 import { compileProblem } from "../../scenario/compile-problem.ts";
 import { spanFields } from "../../scenario/fields.ts";
 import type { Records, Scenario } from "../../scenario/scenario.ts";
+import { unsupported } from "../../scenario/unsupported.ts";
 import { feedSpeed } from "../../textbook/feed.ts";
 
 const longest = spanFields.find(({ key }) => key === "seconds")?.maximum ?? Infinity;
@@ -15,6 +16,7 @@ const lasting = (scenario: Scenario, seconds: number): Scenario => ({
  * again for the window that is judged, and 40 natural periods, whatever its span says.
  */
 export function longEnough(scenario: Scenario, records?: Records): Scenario {
+  if (unsupported(scenario, records) !== null) return scenario;
   const problem = compileProblem(scenario, records);
   const { law, normal, radius, stiffness, inertia } = problem;
   const speed = feedSpeed(problem);

@@ -1,6 +1,7 @@
 import { compileProblem } from "../../scenario/compile-problem.ts";
 import type { Problem } from "../../scenario/problem.ts";
 import type { Records, Scenario } from "../../scenario/scenario.ts";
+import { unsupported } from "../../scenario/unsupported.ts";
 import { feedSpeed } from "../../textbook/feed.ts";
 import { inputsAt } from "../motion-inputs.ts";
 import type { StartKind } from "./threshold.ts";
@@ -13,7 +14,7 @@ const trifle = 1e-3;
  * steady sliding too, where base or belt runs past it. A varied start is searched as it is.
  */
 export function startsFor(scenario: Scenario, path: string, records?: Records): StartKind[] {
-  if (path.startsWith("initial.")) return ["scenario"];
+  if (path.startsWith("initial.") || unsupported(scenario, records) !== null) return ["scenario"];
   const problem = compileProblem(scenario, records);
   const isDriven = ![...problem.force, ...problem.base].every((term) => term.isConstantFrom(0));
   if (feedSpeed(problem) !== null) return ["scenario", "rest", "steady-sliding"];

@@ -50,10 +50,11 @@ export function* thresholdSearch(question: ThresholdQuestion, records?: Records)
 function lineOf(question: ThresholdQuestion, start: StartKind, records: Records | undefined): Line {
   const { scenario, path, low, high, target, links = defaultLinks(scenario, [path]) } = question;
   const field = numericField(scenario, path);
+  const isFed = startsFor(scenario, path, records).includes("steady-sliding");
   return {
     bounds: field ?? {},
     range: high - low,
-    isMet: (figures) => isMet(target, figures),
+    isMet: (figures) => isMet(isFed ? withGrowth(target) : target, figures),
     scenarioAt: (value) => {
       const { scenario: moved, faults } = checkScenario(withValues(scenario, [[path, value]], links));
       if (moved === null) return { reason: faults[0].message };
@@ -63,6 +64,12 @@ function lineOf(question: ThresholdQuestion, start: StartKind, records: Records 
       return start === "steady-sliding" ? wholePeriodsLong(lasting) : lasting;
     },
   };
+}
+
+/** Under a feed or on a belt a swing that grows is stick–slip to come: who wants none wants no growth either. */
+function withGrowth(target: Target): Target {
+  if (target.kind !== "outcome" || !target.outcomes.includes("stick-slip")) return target;
+  return { ...target, outcomes: [...target.outcomes, "growing"] };
 }
 
 /** Whether a run meets a target; null where it cannot be judged. */

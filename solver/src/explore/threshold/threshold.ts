@@ -6,7 +6,8 @@ import type { Links } from "../links.ts";
 
 /**
  * What is to be so. An outcome search is met where the outcome is (or is not) one of those named; a limit search where the
- * limit at that place of the scenario is kept.
+ * limit at that place of the scenario is kept. Where base or belt runs past the body, `stick-slip` takes `growing` along: a
+ * swing that grows there is stick–slip to come.
  */
 export type Target =
   | { readonly kind: "outcome"; readonly outcomes: readonly Outcome[]; readonly isWanted: boolean }
