@@ -1,7 +1,7 @@
 import type { StoredScenario } from "@restband/api/contract";
 import { afterEach, beforeEach, describe, expect, it, vi } from "vitest";
 import { Autosave, type SaveReply, type Saving } from "../../../web/src/features/statement/saving/autosave.ts";
-import type { Work } from "../../../web/src/features/statement/saving/differences.ts";
+import type { Work } from "../../../web/src/features/statement/saving/work.ts";
 import { creepFeed, variant } from "../support/scenarios.ts";
 
 const asWas: Work = { content: creepFeed, switchedOff: [] };

@@ -65,8 +65,7 @@ async function send(route: Address, input: AnyInput): Promise<unknown> {
 
 function urlOf({ path }: Address, { params = {}, query }: AnyInput): string {
   const filled = path.replace(/:(\w+)/gu, (_, key: string) => encodeURIComponent(params[key]));
-  const asked = new URLSearchParams(query).toString();
-  return `/api${filled}${asked && `?${asked}`}`;
+  return `/api${filled}${query ? `?${new URLSearchParams(query)}` : ""}`;
 }
 
 function headers({ body, version }: AnyInput, isUnsafe: boolean): Record<string, string> {

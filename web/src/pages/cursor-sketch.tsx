@@ -1,9 +1,10 @@
-import type { RunView } from "../features/evidence/run-view.ts";
+import type { Computed } from "../compute/use-run.ts";
 import { BodySketch } from "../features/sketch/body-sketch.tsx";
-import { useCursor, type Cursor } from "./cursor.ts";
+import { useCursor, viewOf, type Cursor } from "./cursor.ts";
 
-/** The body sketch, moving with the time cursor. */
-export function CursorSketch({ view, cursor }: { view: RunView; cursor: Cursor }) {
+/** The body sketch, moving with the time cursor; nothing where there is no motion to draw. */
+export function CursorSketch({ computed, cursor }: { computed: Computed; cursor: Cursor }) {
+  const view = viewOf(computed);
   const t = useCursor(cursor, view);
-  return <BodySketch scenario={view.scenario} samples={view.samples} t={t} />;
+  return view && <BodySketch scenario={view.scenario} samples={view.samples} t={t} />;
 }

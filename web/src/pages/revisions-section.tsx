@@ -12,7 +12,7 @@ import type { Freezable } from "../features/revision/freeze-form.tsx";
 import { RevisionList } from "../features/revision/revision-list.tsx";
 import { pathsWithoutOrigin } from "../features/statement/origin/without-origin.tsx";
 import type { Saving } from "../features/statement/saving/autosave.ts";
-import { isSameScenario } from "../features/statement/saving/differences.ts";
+import { isSameScenario } from "../features/statement/saving/work.ts";
 import { paths } from "../paths.ts";
 
 const FreezeForm = lazyPart(async () => (await import("../features/revision/freeze-form.tsx")).FreezeForm);

@@ -13,12 +13,10 @@ import { useRun, type Computed } from "../compute/use-run.ts";
 import { UnitsChoice } from "../features/account/units-choice.tsx";
 import { WorkHeader } from "../features/account/work-header.tsx";
 import { Answer } from "../features/answer/answer.tsx";
-import { Cautions } from "../features/cautions/cautions.tsx";
-import { runViewOf, type RunView } from "../features/evidence/run-view.ts";
 import { takeValues } from "../features/statement/changes.ts";
 import { savedWords } from "../features/statement/saving/saved-words.ts";
 import { useDraft } from "../features/statement/saving/use-draft.ts";
-import { isSameWork } from "../features/statement/saving/differences.ts";
+import { isSameWork } from "../features/statement/saving/work.ts";
 import { sayField } from "../features/statement/say-field.ts";
 import { Statement } from "../features/statement/statement.tsx";
 import { UndoButtons } from "../features/statement/undo-buttons.tsx";
@@ -29,17 +27,14 @@ import { paths } from "../paths.ts";
 import { sharedValue } from "../shared-value.ts";
 import { lazyPart } from "../components/lazy-part.ts";
 import { useThrottled } from "../components/use-throttled.ts";
-import { useCursor, type Cursor } from "./cursor.ts";
 
 // None of these is needed for the first answer: they come after it.
 const CursorSketch = lazyPart(async () => (await import("./cursor-sketch.tsx")).CursorSketch);
 const ScenarioExchange = lazyPart(
   async () => (await import("../features/statement/exchange/scenario-exchange.tsx")).ScenarioExchange,
 );
-const Evidence = lazyPart(async () => (await import("../features/evidence/evidence.tsx")).Evidence);
+const RunSections = lazyPart(async () => (await import("./run-sections.tsx")).RunSections);
 const RevisionsSection = lazyPart(async () => (await import("./revisions-section.tsx")).RevisionsSection);
-const Checks = lazyPart(async () => (await import("../features/checks/checks.tsx")).Checks);
-const EventTable = lazyPart(async () => (await import("../features/evidence/event-table.tsx")).EventTable);
 const ReckoningLinks = lazyPart(async () => (await import("../features/reckoning/reckoning-links.tsx")).ReckoningLinks);
 const ConflictDialog = lazyPart(
   async () => (await import("../features/statement/saving/conflict-dialog.tsx")).ConflictDialog,
@@ -79,7 +74,6 @@ function OpenScenario({ project, stored }: { project: Project; stored: StoredSce
   const subject = run.computed?.scenario ?? inForce;
   const say = (path: string, value: number, towards: number) => sayField(subject, path, value, towards);
   const drawn = useThrottled(run.computed, DRAWN_EVERY_MS);
-  const view = useRunView(drawn);
   const [cursor] = useState(() => sharedValue<number | null>(null));
   const before = useBeforeEdit(run.computed, draft.merging !== null);
   const isTrying = !canEdit && !isSameWork(work, stored);
@@ -122,9 +116,9 @@ function OpenScenario({ project, stored }: { project: Project; stored: StoredSce
             ranges={ranges}
             say={say}
             sketch={
-              view && (
+              drawn && (
                 <Suspense fallback={<div className="min-h-[280px]" />}>
-                  <CursorSketch view={view} cursor={cursor} />
+                  <CursorSketch computed={drawn} cursor={cursor} />
                 </Suspense>
               )
             }
@@ -147,7 +141,9 @@ function OpenScenario({ project, stored }: { project: Project; stored: StoredSce
         <Suspense fallback={<div className="min-h-40" />}>
           <RevisionsSection {...{ stored, ownId: accountId, canEdit, run, inForce, saving, faults: faults.length }} />
         </Suspense>
-        <RunSections key={`run ${units}`} computed={drawn} view={view} cursor={cursor} isStale={run.isStale} />
+        <Suspense fallback={<div className="min-h-[1200px]" />}>
+          <RunSections key={`run ${units}`} computed={drawn} cursor={cursor} isStale={run.isStale} />
+        </Suspense>
       </WorkedPage>
       {saving.kind === "conflict" && (
         <Suspense>
@@ -177,61 +173,5 @@ function Actions({ explore, ...undo }: ComponentProps<typeof UndoButtons> & { ex
       <UndoButtons {...undo} />
       <ButtonLink to={explore}>Explore</ButtonLink>
     </>
-  );
-}
-
-/** The run made ready to be looked at; null without one that has samples. */
-function useRunView(computed: Computed | null): RunView | null {
-  return useMemo(
-    () => (computed && "result" in computed ? runViewOf(computed.scenario, computed.result) : null),
-    [computed],
-  );
-}
-
-interface RunSectionsProps {
-  computed: Computed | null;
-  view: RunView | null;
-  cursor: Cursor;
-  isStale: boolean;
-}
-
-/** Everything that shows the run itself, under one time cursor. */
-function RunSections({ computed, view, cursor, isStale }: RunSectionsProps) {
-  const t = useCursor(cursor, view);
-  if (!computed || !view) return computed && <CautionSection computed={computed} />;
-  return (
-    <>
-      <Section
-        id="evidence"
-        name="Evidence"
-        help={
-          <>
-            One cursor for everything. <span className="whitespace-nowrap">← →</span> next event, space plays.
-          </>
-        }
-      >
-        <Suspense fallback={<div className="min-h-[600px]" />}>
-          <Evidence view={view} t={t} onMove={cursor.set} isStale={isStale} />
-        </Suspense>
-      </Section>
-      <Section id="checks" name="Checks" help="The run checks itself each time it is computed.">
-        <Suspense fallback={<div className="min-h-[420px]" />}>
-          <Checks scenario={view.scenario} result={view.result} />
-        </Suspense>
-        <h3 className="mt-8 mb-2 text-15 font-semibold">Events</h3>
-        <Suspense fallback={<div className="min-h-[380px]" />}>
-          <EventTable view={view} t={t} onMove={cursor.set} />
-        </Suspense>
-      </Section>
-      <CautionSection computed={computed} />
-    </>
-  );
-}
-
-function CautionSection({ computed }: { computed: Computed }) {
-  return (
-    <Section name="Cautions" help="Always shown where they apply.">
-      <Cautions scenario={computed.scenario} result={"result" in computed ? computed.result : null} />
-    </Section>
   );
 }

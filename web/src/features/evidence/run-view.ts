@@ -26,8 +26,18 @@ export interface RunView {
   readonly end: number;
 }
 
-/** Null where a result has no samples to draw. */
+const views = new WeakMap<Result, RunView>();
+
+/** Null where a result has no samples to draw. The same result has the same view: all parts of a page share it. */
 export function runViewOf(scenario: Scenario, result: Result): RunView | null {
+  const known = views.get(result);
+  if (known?.scenario === scenario) return known;
+  const view = makeView(scenario, result);
+  if (view) views.set(result, view);
+  return view;
+}
+
+function makeView(scenario: Scenario, result: Result): RunView | null {
   const { samples } = result;
   if (!samples || samples.t.length === 0) return null;
   const end = shownEnd(scenario, result);

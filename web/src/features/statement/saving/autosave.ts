@@ -1,5 +1,5 @@
 import type { StoredScenario } from "@restband/api/contract";
-import { isSameWork, type Work } from "./differences.ts";
+import { isSameWork, type Work } from "./work.ts";
 
 /** How it stands with keeping what was typed. */
 export type Saving =

@@ -3,7 +3,8 @@ import { useState } from "react";
 import { Button } from "../../../components/button.tsx";
 import { Dialog, DialogActions } from "../../../components/dialog.tsx";
 import { sayClock } from "../../../format/words.ts";
-import { differencesOf, merged, type Difference, type Side, type Work } from "./differences.ts";
+import { differencesOf, merged, type Difference, type Side } from "./differences.ts";
+import type { Work } from "./work.ts";
 
 interface ConflictDialogProps {
   /** The version one's own draft began from. */

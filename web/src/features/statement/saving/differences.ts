@@ -1,11 +1,11 @@
-import type { SwitchedOff } from "@restband/api/contract";
-import { digestOf, jsonText, type Scenario } from "@restband/solver";
+import type { Scenario } from "@restband/solver";
 import { readPath, writePath } from "../path.ts";
 import { fieldAt, measureOf } from "../scenario-fields.ts";
 import { joined, readInput } from "../../../format/format-quantity.ts";
 import { groups } from "../groups.ts";
 import { sayTerm } from "../sentence/drive-sentence.ts";
 import { plainText } from "../sentence/plain-text.ts";
+import { isSame, type Work } from "./work.ts";
 
 export type Side = "mine" | "theirs";
 
@@ -51,12 +51,6 @@ const numbers = [
   "span.maxWork",
   "settleBand",
 ];
-
-/** What is kept of a draft: the scenario in force, and the terms switched off beside it. */
-export interface Work {
-  readonly content: Scenario;
-  readonly switchedOff: readonly SwitchedOff[];
-}
 
 /** Everything in which two versions of a scenario differ. */
 export function differencesOf(base: Work, mine: Work, theirs: Work): Difference[] {
@@ -105,9 +99,6 @@ export function merged(mine: Work, theirs: Work, choices: Readonly<Record<string
   return { content, switchedOff: (off === "theirs" ? theirs : mine).switchedOff };
 }
 
-/** Whatever the order of their members. */
-const isSame = (a: unknown, b: unknown): boolean => jsonText(a, "sorted") === jsonText(b, "sorted");
-
 /** What stands at a path, in words. */
 function say(scenario: Scenario, path: string): string {
   const value = readPath(scenario, path);
@@ -126,10 +117,3 @@ function sayWhole(scenario: Scenario, path: string): string {
   const group = groups.find(({ roots }) => roots.includes(path.split(".")[0])) ?? groups[0];
   return plainText(scenario, group.sentence(scenario));
 }
-
-/** Whether two scenarios are the same in all that is stored. */
-export const isSameScenario = (a: Scenario, b: Scenario): boolean => digestOf(a) === digestOf(b);
-
-/** Whether two versions are the same in all that is stored. */
-export const isSameWork = (a: Work, b: Work): boolean =>
-  isSameScenario(a.content, b.content) && isSame(a.switchedOff, b.switchedOff);

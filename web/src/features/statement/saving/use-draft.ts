@@ -7,8 +7,8 @@ import { laterPart } from "../../../later-part.ts";
 import type { Dispatch, Draft, DraftAction } from "../draft/draft.ts";
 import { openDraft } from "../draft/open-draft.ts";
 import { Autosave, type Base, type SaveReply, type Saving } from "./autosave.ts";
-import { isSameWork, type Work } from "./differences.ts";
 import { dropLocal, keepLocally, localText, type LocalDraft } from "./local-draft.ts";
+import { isSameWork, type Work } from "./work.ts";
 
 interface UseDraftSettings {
   stored: StoredScenario;
