@@ -65,7 +65,8 @@ async function send(route: Address, input: AnyInput): Promise<unknown> {
 
 function urlOf({ path }: Address, { params = {}, query }: AnyInput): string {
   const filled = path.replace(/:(\w+)/gu, (_, key: string) => encodeURIComponent(params[key]));
-  return `/api${filled}${query ? `?${new URLSearchParams(query)}` : ""}`;
+  const asked = new URLSearchParams(query).toString();
+  return `/api${filled}${asked && `?${asked}`}`;
 }
 
 function headers({ body, version }: AnyInput, isUnsafe: boolean): Record<string, string> {
