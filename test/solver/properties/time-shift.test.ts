@@ -70,8 +70,9 @@ test(
     fc.assert(
       fc.property(anyScenario, delay, (drawn, share) => {
         const scenario = atRest(drawn);
-        // bristles are integrated all the time: their steps fall elsewhere
-        fc.pre(scenario.contact.law.model !== "bristle");
+        // bristles are integrated all the time: their steps fall elsewhere; without friction moves may cancel the swing
+        // that they set going, and when the rest of it turns there is rounding
+        fc.pre(scenario.contact.law.model !== "bristle" && scenario.contact.law.model !== "none");
         fc.pre(unsupported(scenario) === null && !leavesInManyWays(scenario) && !movesCancel(scenario));
         const { seconds } = scenario.span;
         const later = share * seconds;
