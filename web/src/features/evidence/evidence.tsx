@@ -79,7 +79,7 @@ export function Evidence({ view: newest, t, onMove, isStale, beside }: EvidenceP
         <CursorWords view={view} t={t} />
         <ViewChoice view={view} part={part} />
       </div>
-      <div className="flex flex-wrap items-center gap-x-6">
+      <div className="flex flex-wrap items-center gap-x-6 max-desk:mb-3">
         <PanelChoice hasDrive={view.drive !== null} chosen={panels} onToggle={togglePanel} />
         {!beside && <OverlayChoice overlay={overlay} />}
       </div>

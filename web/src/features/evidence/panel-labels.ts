@@ -1,8 +1,9 @@
+import { indexAt } from "../../compute/instant.ts";
 import { say } from "../../format/format-quantity.ts";
 import { plotWidth, timeAt, xOf, yOf, type Frame, type PanelFrame, type PanelKey } from "./frame.ts";
 import { overlayAt, type Overlay } from "./overlay.ts";
 import type { RunView } from "./run-view.ts";
-import { driveSpeed, extremesOf } from "./scales.ts";
+import { driveSpeed } from "./scales.ts";
 
 /** A word at a line of the panels, px from the figure's top left to its baseline. */
 export interface PanelLabel {
@@ -24,36 +25,56 @@ export function panelLabels(view: RunView, frame: Frame, overlays: readonly Over
   const [displacement, velocity, friction] = [find("displacement"), find("velocity"), find("friction")];
   return [
     ...(displacement ? bandLabel(view, frame, displacement) : []),
-    ...(displacement ? overlayLabels(frame, displacement, overlays) : []),
+    ...(displacement ? overlayLabels(view, frame, displacement, overlays) : []),
     ...(velocity ? speedLabel(view, frame, velocity) : []),
     // Beside the panels it stands in the gutter.
     ...(friction && frame.right < 100 ? holdLabel(view, frame, friction) : []),
   ];
 }
 
-/** At a third of what is seen: above the band's upper edge, or within the band where that is at the panel's. */
+/** At a third of what is seen, or as far in as the word is long: above the band's upper edge, or within the band where that is at the panel's. */
 function bandLabel({ inputs, scenario }: RunView, frame: Frame, panel: PanelFrame): PanelLabel[] {
-  const t = frame.from + 0.3 * (frame.to - frame.from);
-  const centre = inputs.equilibrium(t);
-  if (inputs.restBand === null || centre === null || inputs.times(frame.from, frame.to) === null) return [];
-  const edge = yOf(panel, centre + inputs.restBand);
-  const width = say(inputs.restBand, { dimension: "displacement", motion: scenario.motion });
+  const { equilibrium, restBand } = inputs;
+  if (restBand === null || inputs.times(frame.from, frame.to) === null) return [];
+  const text = `rest band ±${say(restBand, { dimension: "displacement", motion: scenario.motion })}`;
+  // A band that falls leaves room to the right of a place on it, one that rises to its left.
+  const isFalling = (equilibrium(frame.to) ?? 0) < (equilibrium(frame.from) ?? 0);
+  const share = Math.max(0.3, wide(text) / plotWidth(frame));
+  const t = frame.from + (isFalling ? 1 - share : share) * (frame.to - frame.from);
+  const centre = equilibrium(t);
+  if (centre === null || share > 1) return [];
+  const edge = yOf(panel, centre + restBand);
   const y = edge - FALL > panel.top ? edge - RISE - 4 : edge + FALL;
   if (y < panel.top || y > panel.top + panel.height) return [];
-  // A band that falls leaves room to its right.
-  const anchor = (inputs.equilibrium(frame.to) ?? 0) < centre ? "start" : "end";
-  return [{ key: "band", text: `rest band ±${width}`, x: xOf(frame, t), y, anchor, tone: "band-line" }];
+  return [{ key: "band", text, x: xOf(frame, t), y, anchor: isFalling ? "start" : "end", tone: "band-line" }];
 }
 
-/** At four fifths of what is seen, or at its end. */
-function overlayLabels(frame: Frame, panel: PanelFrame, overlays: readonly Overlay[]): PanelLabel[] {
-  const wanted = frame.from + 0.8 * (frame.to - frame.from);
+/** Below its line or above it, where both motions leave room. */
+function overlayLabels(
+  { samples }: RunView,
+  frame: Frame,
+  panel: PanelFrame,
+  overlays: readonly Overlay[],
+): PanelLabel[] {
   return overlays.flatMap((overlay): PanelLabel[] => {
-    const t = Math.min(wanted, overlay.samples.t[overlay.samples.t.length - 1]);
-    const there = overlayAt(overlay, t);
-    if (!there || t < frame.from) return [];
-    const y = yOf(panel, there.x) + 12 + FALL;
-    return [{ key: overlay.key, text: shortened(overlay.label), x: xOf(frame, t), y, anchor: "end", tone: "quiet" }];
+    const text = shortened(overlay.label);
+    const spots = placesFor(text, frame)
+      .reverse()
+      .flatMap((x) => {
+        const there = overlayAt(overlay, timeAt(frame, x + wide(text) / 2));
+        if (!there) return [];
+        const y = yOf(panel, there.x);
+        return [
+          { x, y: y + FALL + 8 },
+          { x, y: y - RISE - 8 },
+        ];
+      });
+    const curves = [samples.x, overlay.samples.x].map((values, i) => ({
+      t: i === 0 ? samples.t : overlay.samples.t,
+      values,
+    }));
+    const spot = spots.find((each) => isFree(curves, frame, panel, each, text)) ?? spots[0];
+    return spot ? [{ key: overlay.key, text, ...spot, anchor: "start", tone: "quiet" }] : [];
   });
 }
 
@@ -62,48 +83,61 @@ const LONGEST = 30;
 const shortened = (title: string): string =>
   title.length > LONGEST ? `${title.slice(0, LONGEST - 1).trimEnd()}…` : title;
 
-/** About the width of a word like "feed", px. */
-const WORD = 34;
-
-/** Where the body's own curve leaves room above the line, from the left on; at the left where it nowhere does. */
+/** Above the dashed line, from the left on. */
 function speedLabel(view: RunView, frame: Frame, panel: PanelFrame): PanelLabel[] {
+  const { samples, scenario } = view;
+  const text = scenario.base.length > 0 ? "feed" : "belt";
   return driveSpeed(view).map((speed) => {
     const y = yOf(panel, speed) - RISE;
-    const places = [0, 0.2, 0.4, 0.6, 0.8, 1].map((share) => frame.left + 4 + share * (plotWidth(frame) - WORD - 8));
-    const x = places.find((place) => isFree(view, frame, panel, { x: place, y })) ?? places[0];
-    return {
-      key: "speed",
-      text: view.scenario.base.length > 0 ? "feed" : "belt",
-      x,
-      y,
-      anchor: "start",
-      tone: "quiet",
-    };
+    const places = placesFor(text, frame);
+    const curves = [{ t: samples.t, values: samples.v }];
+    const x = places.find((place) => isFree(curves, frame, panel, { x: place, y }, text)) ?? places[0];
+    return { key: "speed", text, x, y, anchor: "start", tone: "quiet" };
   });
 }
 
-/** True where the velocity keeps off a word that stands at x on y. */
-function isFree({ samples }: RunView, frame: Frame, panel: PanelFrame, { x, y }: { x: number; y: number }): boolean {
-  const [low, high] = extremesOf(samples, "v", { from: timeAt(frame, x), to: timeAt(frame, x + WORD) });
-  return yOf(panel, high) > y + RISE / 2 || yOf(panel, low) < y - FALL;
-}
-
-/** At the line that is in the picture; above it, or below it where it is at the panel's upper edge. */
-function holdLabel({ inputs, scenario }: RunView, frame: Frame, panel: PanelFrame): PanelLabel[] {
+/** At the line that is in the picture, from the right on; above it, or below it where it is at the panel's upper edge. */
+function holdLabel({ inputs, scenario, samples }: RunView, frame: Frame, panel: PanelFrame): PanelLabel[] {
   const hold = inputs.hold(frame.from);
   const level = [hold, -hold].find((force) => force > panel.low && force < panel.high);
   if (hold === 0 || level === undefined || scenario.contact.normal.ripple) return [];
   const at = yOf(panel, level);
   const y = at - FALL > panel.top ? at - RISE : at + FALL;
-  const force = say(hold, { dimension: "force", motion: scenario.motion }, { digits: 4 });
-  return [
-    {
-      key: "hold",
-      text: `holds up to ${force}`,
-      x: frame.left + plotWidth(frame) - 4,
-      y,
-      anchor: "end",
-      tone: "stick",
-    },
-  ];
+  const text = `holds up to ${say(hold, { dimension: "force", motion: scenario.motion }, { digits: 4 })}`;
+  const places = placesFor(text, frame).reverse();
+  const curves = [{ t: samples.t, values: samples.f }];
+  const x = places.find((place) => isFree(curves, frame, panel, { x: place, y }, text)) ?? places[0];
+  return [{ key: "hold", text, x, y, anchor: "start", tone: "stick" }];
+}
+
+/** About how wide a word is, px. */
+const wide = (text: string): number => 7 * text.length + 8;
+
+/** Where a word may begin, from the left to the right end of the panels. */
+const placesFor = (text: string, frame: Frame): number[] =>
+  Array.from({ length: 11 }, (_, i) => frame.left + 4 + (i / 10) * Math.max(0, plotWidth(frame) - wide(text)));
+
+interface Values {
+  readonly t: Float64Array;
+  readonly values: Float64Array;
+}
+
+/** True where no curve runs through a word that begins at x on y. */
+function isFree(
+  curves: readonly Values[],
+  frame: Frame,
+  panel: PanelFrame,
+  { x, y }: { x: number; y: number },
+  text: string,
+): boolean {
+  if (y - FALL < panel.top || y > panel.top + panel.height) return false;
+  const [first, last] = [timeAt(frame, x), timeAt(frame, x + wide(text))];
+  return curves.every(({ t, values }) => {
+    let [low, high] = [Infinity, -Infinity];
+    for (let i = indexAt(t, first); i < t.length && t[i] <= last; i++) {
+      low = Math.min(low, values[i]);
+      high = Math.max(high, values[i]);
+    }
+    return yOf(panel, high) > y + RISE / 2 || yOf(panel, low) < y - FALL;
+  });
 }
