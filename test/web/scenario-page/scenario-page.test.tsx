@@ -182,6 +182,17 @@ describe("the page of a scenario", () => {
     expect(screen.getByRole("button", { name: "Damping: 8000 N·s/m" })).toBeInTheDocument();
   });
 
+  it("takes a change back by Ctrl-Z on a narrow page too, whose buttons stand in a closed menu", async () => {
+    const isNarrow = { matches: true, addEventListener: () => undefined, removeEventListener: () => undefined };
+    vi.stubGlobal("matchMedia", () => isNarrow);
+    fakeServer(seen());
+    const { user } = openPage(at);
+    await changeDamping(user, "400");
+    expect(screen.queryByTitle("Undo")).not.toBeInTheDocument();
+    await user.keyboard("{Control>}z{/Control}");
+    expect(screen.getByRole("button", { name: "Damping: 350 N·s/m" })).toBeInTheDocument();
+  });
+
   it("does not undo an undo that is made while a save is under way", async () => {
     let answerSave = (): void => undefined;
     const put = (request: Request) =>

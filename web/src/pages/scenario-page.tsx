@@ -19,7 +19,7 @@ import { useDraft } from "../features/statement/saving/use-draft.ts";
 import { isSameWork } from "../features/statement/saving/work.ts";
 import { sayField } from "../features/statement/say-field.ts";
 import { Statement } from "../features/statement/statement.tsx";
-import { UndoButtons } from "../features/statement/undo-buttons.tsx";
+import { UndoButtons, useUndoKeys } from "../features/statement/undo-buttons.tsx";
 import { useUnitSystem } from "../format/unit-system.ts";
 import { ArchivedScenario } from "../features/project-home/archived-scenario.tsx";
 import { mayEdit } from "../features/project-home/roles.ts";
@@ -64,6 +64,7 @@ function OpenScenario({ project, stored }: { project: Project; stored: StoredSce
   const archived = project.archivedAt ? "project" : stored.archivedAt ? "scenario" : null;
   const canEdit = mayEdit(project.role) && archived === null;
   const { draft, dispatch, saving, base, work, decide } = useDraft({ stored, accountId, canEdit });
+  useUndoKeys(dispatch);
   const { inForce, faults } = draft;
   const samples = samplesFor(inForce);
   const run = useRun(

@@ -1,19 +1,24 @@
 import { Button } from "../../components/button.tsx";
 import { Icon, type IconName } from "../../components/icon.tsx";
 import { useShortcut } from "../../components/shortcuts.tsx";
-import type { Dispatch, Draft } from "./draft/draft.ts";
+import type { Dispatch, Draft, DraftAction } from "./draft/draft.ts";
 
-/** One step back and forth; the keys work wherever the focus is. */
+const undo: DraftAction = { type: "undo" };
+const redo: DraftAction = { type: "redo" };
+
+/** One step back and forth by keys, wherever the focus is. For the page: the buttons may stand in a closed menu. */
+export function useUndoKeys(dispatch: Dispatch): void {
+  useShortcut("Ctrl+z", "Undo", () => dispatch(undo));
+  useShortcut("Ctrl+Z", "Redo", () => dispatch(redo));
+  useShortcut("Ctrl+y", "Redo", () => dispatch(redo));
+}
+
+/** One step back and forth. */
 export function UndoButtons({ draft, dispatch }: { draft: Draft; dispatch: Dispatch }) {
-  const undo = (): void => dispatch({ type: "undo" });
-  const redo = (): void => dispatch({ type: "redo" });
-  useShortcut("Ctrl+z", "Undo", undo);
-  useShortcut("Ctrl+Z", "Redo", redo);
-  useShortcut("Ctrl+y", "Redo", redo);
   return (
     <span className="flex">
-      <Step name="Undo" icon="undo" isPossible={draft.past.length > 0} run={undo} />
-      <Step name="Redo" icon="redo" isPossible={draft.future.length > 0} run={redo} />
+      <Step name="Undo" icon="undo" isPossible={draft.past.length > 0} run={() => dispatch(undo)} />
+      <Step name="Redo" icon="redo" isPossible={draft.future.length > 0} run={() => dispatch(redo)} />
     </span>
   );
 }
