@@ -4,6 +4,7 @@ import { useAskForReview } from "../../api/reviews.ts";
 import { Button } from "../../components/button.tsx";
 import { Checkbox } from "../../components/choices.tsx";
 import { DialogActions } from "../../components/dialog.tsx";
+import { FieldError } from "../../components/field.tsx";
 import { ErrorNote } from "../../components/error-note.tsx";
 import { announce } from "../../components/status.tsx";
 import { TextArea } from "../../components/text-field.tsx";
@@ -51,7 +52,7 @@ export function AskForm({ revision, candidates, onClose }: AskFormProps) {
             onChange={() => toggle(accountId)}
           />
         ))}
-        {isTried && chosen.length === 0 && <p className="text-13 text-broken">Choose at least one.</p>}
+        {isTried && chosen.length === 0 && <FieldError>Choose at least one.</FieldError>}
       </fieldset>
       <TextArea
         label="What to look at"

@@ -1,4 +1,5 @@
 import type { Decision } from "@restband/api/contract";
+import { FieldError } from "../../components/field.tsx";
 
 type Answer = Decision["checklist"][number]["answer"];
 
@@ -44,7 +45,7 @@ export function ChecklistFields({ points, given, error, onAnswer }: ChecklistFie
           </li>
         ))}
       </ul>
-      {error && <p className="mt-1.5 text-13 text-broken">{error}</p>}
+      {error && <FieldError>{error}</FieldError>}
     </div>
   );
 }

@@ -113,7 +113,7 @@ function Curves({ revision, before, plot }: CurvesProps) {
           {formatNumber(t)}
         </text>
       ))}
-      <text x={plot.right + 10} y={BOTTOM + 18} className="fill-quiet text-[13px] max-desk:hidden">
+      <text x={plot.right + 24} y={BOTTOM + 18} className="fill-quiet text-[13px] max-desk:hidden">
         s
       </text>
       {before && <path d={pathOf(before.trace, plot, y)} className="fill-none stroke-quiet" strokeOpacity={0.55} />}

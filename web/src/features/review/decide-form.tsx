@@ -1,5 +1,6 @@
 import type { Replay, Review, Revision } from "@restband/api/contract";
 import { useState } from "react";
+import { ApiFailure } from "../../api/api-failure.ts";
 import { useDecide, useSelfCheck } from "../../api/reviews.ts";
 import { Button } from "../../components/button.tsx";
 import { ErrorNote } from "../../components/error-note.tsx";
@@ -15,6 +16,13 @@ interface DecideFormProps {
   review: Review;
   /** The reader's own replays of it, newest first. */
   replays: readonly Replay[];
+  /** Somebody else was faster: the server's sentence, and the reasons that were not sent. */
+  onTooLate: (late: TooLate) => void;
+}
+
+export interface TooLate {
+  readonly message: string;
+  readonly reasons: string;
 }
 
 type Answer = Review["decisions"][number]["checklist"][number]["answer"];
@@ -29,7 +37,7 @@ const said: Record<Kind, string> = {
 const fields = ["reasons", "password"];
 
 /** Reasons, checklist and password once more, then accept or return; or, working alone, mark it self-checked. */
-export function DecideForm({ revision, review, replays }: DecideFormProps) {
+export function DecideForm({ revision, review, replays, onTooLate }: DecideFormProps) {
   const { projectId, id, number, digest, frozenBy, openComments } = revision;
   const decide = useDecide(projectId, id);
   const selfCheck = useSelfCheck(projectId, id);
@@ -55,9 +63,12 @@ export function DecideForm({ revision, review, replays }: DecideFormProps) {
     if (faults.reasons || faults.password || needsChecklist) return;
     const isWhole = checklist.length === points.length;
     const body = { reasons, password, digest, replayId: replays[0]?.id ?? null, checklist: isWhole ? checklist : [] };
-    const onSuccess = () => announce(`Revision ${number} is ${said[kind]}.`);
-    if (kind === "self-check") selfCheck.mutate(body, { onSuccess });
-    else decide.mutate({ decision: kind, ...body }, { onSuccess });
+    const then = {
+      onSuccess: () => announce(`Revision ${number} is ${said[kind]}.`),
+      onError: (refusal: Error) => isDecided(refusal) && onTooLate({ message: refusal.message, reasons }),
+    };
+    if (kind === "self-check") selfCheck.mutate(body, then);
+    else decide.mutate({ decision: kind, ...body }, then);
   };
   const failure = otherFault(error, fields);
   return (
@@ -111,6 +122,8 @@ export function DecideForm({ revision, review, replays }: DecideFormProps) {
     </div>
   );
 }
+
+const isDecided = (error: Error): boolean => error instanceof ApiFailure && error.code === "decided";
 
 function checklistFault(points: readonly string[], checklist: readonly { answer: Answer }[]): string | undefined {
   if (checklist.length < points.length) return "Answer each point.";

@@ -9,7 +9,7 @@ import { sayWhen } from "../../format/when.ts";
 import { sayMany } from "../../format/words.ts";
 import { AskForm } from "./ask-form.tsx";
 import { ChecklistForm } from "./checklist-form.tsx";
-import { DecideForm } from "./decide-form.tsx";
+import { DecideForm, type TooLate } from "./decide-form.tsx";
 import { DecisionList } from "./decision-list.tsx";
 import { WithdrawForm } from "./withdraw-form.tsx";
 
@@ -28,6 +28,7 @@ const titles = { ask: "Ask for a review", withdraw: "Withdraw the revision", che
 export function ReviewPanel({ project, revision, ownId, replays }: ReviewPanelProps) {
   const { data: review, error, refetch } = useQuery(reviewQuery(revision.projectId, revision.id));
   const [open, setOpen] = useState<Open>(null);
+  const [late, setLate] = useState<TooLate | null>(null);
   if (!review)
     return error ? (
       <ErrorNote action={<Button onClick={() => void refetch()}>Try again</Button>}>{error.message}</ErrorNote>
@@ -40,10 +41,11 @@ export function ReviewPanel({ project, revision, ownId, replays }: ReviewPanelPr
   const close = () => setOpen(null);
   return (
     <>
+      {late && <Late {...late} />}
       <Asked review={review} ownId={ownId} />
       {review.decisions.length > 0 && <DecisionList decisions={review.decisions} replays={replays} />}
       {may.decide || may.selfCheck ? (
-        <DecideForm revision={revision} review={review} replays={own} />
+        <DecideForm revision={revision} review={review} replays={own} onTooLate={setLate} />
       ) : (
         <p className="max-w-(--measure)">{isInUse ? hindranceOf(review) : "The project is archived."}</p>
       )}
@@ -70,6 +72,16 @@ export function ReviewPanel({ project, revision, ownId, replays }: ReviewPanelPr
         {open === "checklist" && <ChecklistForm projectId={project.id} checklist={review.checklist} onClose={close} />}
       </Dialog>
     </>
+  );
+}
+
+/** Two decided at once: what one has written is not lost. */
+function Late({ message, reasons }: TooLate) {
+  return (
+    <ErrorNote className="mb-5">
+      <p>{message} That decision stands; yours was not kept.</p>
+      <p className="mt-1 whitespace-pre-wrap wrap-anywhere">You had written: “{reasons}”</p>
+    </ErrorNote>
   );
 }
 

@@ -26,7 +26,7 @@ export function WordsField({ label, words, others, error, rows = 3, onChange }: 
         onChange={(event) => onChange(event.target.value)}
       />
       {others.length > 0 && (
-        <p className="mt-1.5 flex flex-wrap gap-x-3 gap-y-1 text-13 text-quiet">
+        <p className="mt-1.5 flex flex-wrap items-baseline gap-x-3 gap-y-1 text-13 text-quiet">
           Tell
           {others.map(({ accountId, name }) => (
             <button
