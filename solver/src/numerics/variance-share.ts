@@ -1,5 +1,3 @@
-import { ranksOf } from "./ranks.ts";
-
 const groups = 20;
 /** Student's t at 97.5 % with `groups` − 1 degrees of freedom. */
 const t975 = 2.093024054408263;
@@ -9,14 +7,16 @@ const t975 = 2.093024054408263;
  * classes' own scatter taken out (Pearson's correlation ratio with Kelley's correction of 1935, ε²); its 95 % interval by a
  * jackknife over 20 groups (Quenouille, Tukey), all kept within 0…1. Null where y does not vary.
  *
+ * @param ranks of x, from 1 on (see `ranksOf`)
+ *
  * Few wide classes cannot follow an x that makes y swing many times over its range: the share is then too small.
  */
 export function varianceShare(
-  x: ArrayLike<number>,
+  ranks: ArrayLike<number>,
   y: ArrayLike<number>,
 ): { value: number; low: number; high: number } | null {
-  const classes = Math.max(5, Math.min(50, Math.round(Math.sqrt(x.length) / 2)));
-  const sums = groupSums(x, y, classes);
+  const classes = Math.max(5, Math.min(50, Math.round(Math.sqrt(ranks.length) / 2)));
+  const sums = groupSums(ranks, y, classes);
   const all = sums.reduce<Sums>(added, emptySums(classes));
   const value = shareOf(all);
   if (value === null) return null;
@@ -37,8 +37,7 @@ const emptySums = (classes: number): Sums => Array.from({ length: 3 * classes },
 const added = (a: Sums, b: Sums): Sums => a.map((sum, i) => sum + b[i]);
 
 /** Pairs are dealt out to the groups in turn. y is taken from its mean, so that its squares lose no digits. */
-function groupSums(x: ArrayLike<number>, y: ArrayLike<number>, classes: number): Sums[] {
-  const ranks = ranksOf(x);
+function groupSums(ranks: ArrayLike<number>, y: ArrayLike<number>, classes: number): Sums[] {
   const n = y.length;
   let mean = 0;
   for (let i = 0; i < n; i++) mean += y[i] / n;

@@ -118,7 +118,7 @@ describe("what a sample says", () => {
     const random = randomFrom(7);
     const columns = [0, 1].map(() => Float64Array.from({ length: 20_000 }, () => random() - 0.5));
     const y = columns[0].map((x, i) => 3 * x + columns[1][i] + x * columns[1][i]);
-    const shares = columns.map((x) => varianceShare(x, y));
+    const shares = columns.map((x) => varianceShare(ranksOf(x), y));
     [108 / 121, 12 / 121].forEach((expected, i) => {
       const share = shares[i];
       expect(share?.value).toBeCloseTo(expected, 2);
@@ -126,11 +126,11 @@ describe("what a sample says", () => {
       expect(share?.high).toBeGreaterThan(expected);
       expect((share?.high ?? 1) - (share?.low ?? 0)).toBeLessThan(0.05);
     });
-    const unrelated = varianceShare(Float64Array.from(y, random), y);
+    const unrelated = varianceShare(ranksOf(Float64Array.from(y, random)), y);
     expect(unrelated?.value).toBeLessThan(0.01);
     expect(
       varianceShare(
-        columns[0],
+        ranksOf(columns[0]),
         y.map(() => 5),
       ),
     ).toBeNull();

@@ -1,4 +1,4 @@
-import { deviationOf, meanOf, percentileOf, rankCorrelation } from "../../numerics/ranks.ts";
+import { correlationOf, deviationOf, meanOf, percentileOf, ranksOf } from "../../numerics/ranks.ts";
 import { varianceShare } from "../../numerics/variance-share.ts";
 import type { QuantityName } from "../../scenario/quantity-names.ts";
 import type { ConvergencePoint, Influence, QuantitySpread } from "./tolerance-summary.ts";
@@ -10,20 +10,23 @@ const mostBins = 60;
 /** 97.5 % of the normal distribution. */
 const z975 = 1.959963984540054;
 
-interface Input {
+/** An input of a study over all its draws. */
+export interface StudyInput {
   readonly path: string;
   readonly values: Float64Array;
+  readonly ranks: Float64Array;
 }
 
 /** How a quantity scatters. @param values one for each draw, null where it has none; @param inputs the draws themselves */
 export function spreadOf(
   quantity: QuantityName,
   values: readonly (number | null)[],
-  inputs: readonly Input[],
+  inputs: readonly StudyInput[],
 ): QuantitySpread {
   const there = values.flatMap((value, i) => (value === null ? [] : [i]));
   const own = Float64Array.from(there, (i) => values[i] as number);
   const sorted = Float64Array.from(own).sort();
+  const ranks = ranksOf(own);
   const isEmpty = own.length === 0;
   return {
     quantity,
@@ -34,15 +37,7 @@ export function spreadOf(
     largest: isEmpty ? 0 : sorted[sorted.length - 1],
     percentiles: isEmpty ? [] : shares.map((share) => ({ share, value: percentileOf(sorted, share) })),
     histogram: histogramOf(sorted),
-    influences: inputs
-      .map(({ path, values: column }) =>
-        influenceOf(
-          path,
-          Float64Array.from(there, (i) => column[i]),
-          own,
-        ),
-      )
-      .sort(byWeight),
+    influences: inputs.map((input) => influenceOf(input, there, own, ranks)).sort(byWeight),
     convergence: convergenceRuns(own.length).map((runs) => meanAfter(own.subarray(0, runs), runs)),
   };
 }
@@ -65,11 +60,19 @@ function histogramOf(sorted: Float64Array): QuantitySpread["histogram"] {
   return { edges: Array.from({ length: bins + 1 }, (_, i) => least + ((largest - least) * i) / bins), counts };
 }
 
-function influenceOf(path: string, input: Float64Array, values: Float64Array): Influence {
+/** @param there the draws in which the quantity has a value */
+function influenceOf(
+  input: StudyInput,
+  there: readonly number[],
+  own: Float64Array,
+  ownRanks: Float64Array,
+): Influence {
+  const isWhole = there.length === input.values.length;
+  const ranks = isWhole ? input.ranks : ranksOf(Float64Array.from(there, (i) => input.values[i]));
   return {
-    path,
-    rankCorrelation: input.length < 3 ? null : rankCorrelation(input, values),
-    varianceShare: input.length < fewestForShares ? null : varianceShare(input, values),
+    path: input.path,
+    rankCorrelation: own.length < 3 ? null : correlationOf(ranks, ownRanks),
+    varianceShare: own.length < fewestForShares ? null : varianceShare(ranks, own),
   };
 }
 

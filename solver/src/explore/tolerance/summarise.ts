@@ -1,11 +1,12 @@
 import { exactInterval, wilsonInterval } from "../../numerics/binomial-interval.ts";
+import { ranksOf } from "../../numerics/ranks.ts";
 import { cellOutcomes, readRow, rowLength, type CellFigures } from "../cells/cell-row.ts";
 import type { Scenario } from "../../scenario/scenario.ts";
 import { drawsOf } from "./draws.ts";
 import { convergenceRuns, spreadOf } from "./quantity-spread.ts";
 import { studyRows } from "./run-draws.ts";
 import { variedPaths, type TolerancePlan } from "./tolerance-plan.ts";
-import type { ConvergencePoint, Share, ToleranceSummary } from "./tolerance-summary.ts";
+import type { ConvergencePoint, Estimate, Share, ToleranceSummary } from "./tolerance-summary.ts";
 
 const confidence = 0.95;
 
@@ -22,7 +23,7 @@ export function toleranceSummary(plan: TolerancePlan, scenario: Scenario, rows: 
   if (!Number.isInteger(runs)) throw new RangeError(`${rows.length} numbers are no whole number of rows of ${length}`);
   const all = Array.from({ length: runs }, (_, i) => readRow(rows, i * length, kept, scenario.limits.length));
   const columns = columnsOf(drawsOf(plan), variedPaths(plan).length, runs);
-  const inputs = variedPaths(plan).map((path, j) => ({ path, values: columns[j] }));
+  const inputs = variedPaths(plan).map((path, j) => ({ path, values: columns[j], ranks: ranksOf(columns[j]) }));
   return {
     runs,
     refused: refusedOf(all),
@@ -74,7 +75,7 @@ function shareOf(verdicts: readonly (boolean | null)[]): Share {
   return {
     count,
     of,
-    estimate: { value: of === 0 ? 0 : count / of, ...wilsonInterval(count, of, confidence) },
+    estimate: estimateOf(count, of),
     exact: of === 0 ? { low: 0, high: 1 } : exactInterval(count, of, confidence),
     bounded: {
       low: verdicts.length === 0 ? 0 : exactInterval(count, verdicts.length, confidence).low,
@@ -83,9 +84,18 @@ function shareOf(verdicts: readonly (boolean | null)[]): Share {
   };
 }
 
+const estimateOf = (count: number, of: number): Estimate => ({
+  value: of === 0 ? 0 : count / of,
+  ...wilsonInterval(count, of, confidence),
+});
+
 function shareConvergence(verdicts: readonly (boolean | null)[]): ConvergencePoint[] {
+  let [count, of, seen] = [0, 0, 0];
   return convergenceRuns(verdicts.length).map((runs) => {
-    const { estimate } = shareOf(verdicts.slice(0, runs));
-    return { runs, estimate };
+    for (; seen < runs; seen++) {
+      if (verdicts[seen] === true) count += 1;
+      if (verdicts[seen] !== null) of += 1;
+    }
+    return { runs, estimate: estimateOf(count, of) };
   });
 }
