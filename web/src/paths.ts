@@ -1,3 +1,5 @@
+import type { Scenario } from "@restband/solver";
+
 /** The patterns the router knows, and how an address is made from each: every address of the page is spelled here. */
 export const patterns = {
   signIn: "/sign-in",
@@ -45,6 +47,8 @@ export const paths = {
 export const compareReference = {
   scenario: (id: string) => `scenario:${id}`,
   revision: (id: string) => `revision:${id}`,
+  /** A scenario that is stored nowhere, as a cell of a sweep: its whole content stands in the address. */
+  given: (scenario: Scenario) => `given:${JSON.stringify(scenario)}`,
 };
 
 /** The address asked for before signing in, or the projects. Only an address of our own is followed. */

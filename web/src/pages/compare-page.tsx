@@ -156,8 +156,8 @@ function namesOf(a: CompareSubject, b: CompareSubject): [string, string] {
   return a.name === b.name || a.title !== b.title ? [longName(a), longName(b)] : [a.name, b.name];
 }
 
-const longName = ({ name, title, revision }: CompareSubject): string =>
-  revision ? `${title}, ${name.toLowerCase()}` : title;
+const longName = ({ name, title, to, revision }: CompareSubject): string =>
+  revision || to === null ? `${title}, ${name.toLowerCase()}` : title;
 
 function Differences({ first, second, answers }: { first: Side; second: Side; answers: AnswerComparison | null }) {
   const [a, b] = [first.subject, second.subject];

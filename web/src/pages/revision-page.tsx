@@ -152,10 +152,16 @@ function Faults({ faults }: { faults: readonly string[] }) {
 /** The run computed anew from the frozen scenario: its motion, its events and its own checks, under one cursor. */
 function RunSections({ run, view, cursor }: { run: Run; view: RunView | null; cursor: Cursor }) {
   const t = useCursor(cursor, view);
+  const refusal = run.computed && "refusal" in run.computed ? run.computed.refusal.message : null;
   if (!view)
     return (
       <Section id="evidence" name="Evidence" help="Computed here from the frozen scenario.">
-        {run.failure ? (
+        {refusal !== null ? (
+          <p className="max-w-(--measure)">
+            This version of the solver does not compute it, so there is nothing to draw: {refusal}. What was frozen
+            stands above.
+          </p>
+        ) : run.failure ? (
           <ErrorNote action={<Button onClick={run.again}>Run it again</Button>}>{run.failure}</ErrorNote>
         ) : (
           <div className="min-h-[600px]">

@@ -20,7 +20,8 @@ interface SideHeadProps {
 export function SideHead({ place, reference, choices, reading, onChoose, mark, children }: SideHeadProps) {
   const { subject, trouble } = reading;
   const isListed = choices.some(({ value }) => value === reference);
-  const all = isListed ? choices : [{ value: reference ?? "", label: "Choose what to compare" }, ...choices];
+  const unlisted = subject ? `${subject.title}, given values` : "Choose what to compare";
+  const all = isListed ? choices : [{ value: reference ?? "", label: unlisted }, ...choices];
   return (
     <div className="min-w-0">
       <PlainSelect
@@ -34,9 +35,13 @@ export function SideHead({ place, reference, choices, reading, onChoose, mark, c
       {subject && (
         <>
           <p className="mt-3 flex flex-wrap items-baseline gap-x-3">
-            <Link to={subject.to} className="link font-bold">
-              {subject.name}
-            </Link>
+            {subject.to === null ? (
+              <span className="font-bold">{subject.name}</span>
+            ) : (
+              <Link to={subject.to} className="link font-bold">
+                {subject.name}
+              </Link>
+            )}
             {mark}
           </p>
           {children}
