@@ -1,7 +1,8 @@
 import type { StoredScenario } from "@restband/api/contract";
 import { simulate, type Scenario } from "@restband/solver";
 import { act, cleanup, fireEvent, screen, waitFor, within } from "@testing-library/react";
-import { afterEach, beforeEach, describe, expect, it, vi } from "vitest";
+import { afterEach, beforeAll, beforeEach, describe, expect, it, vi } from "vitest";
+import { editing } from "../../../web/src/features/statement/draft/editing-part.ts";
 import { noteConnection } from "../../../web/src/api/connection.ts";
 import type { SolverJob } from "../../../web/src/compute/solver-job.ts";
 import { readScenario } from "../../../web/src/features/statement/exchange/read-scenario.ts";
@@ -76,6 +77,8 @@ async function changeDamping(user: ReturnType<typeof openPage>["user"], text: st
   await user.keyboard(`${text}{Enter}`);
 }
 
+// A person comes after it is loaded.
+beforeAll(() => editing.ask());
 beforeEach(() => localStorage.clear());
 afterEach(() => vi.unstubAllGlobals());
 

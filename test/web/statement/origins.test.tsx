@@ -2,7 +2,8 @@ import type { Scenario } from "@restband/solver";
 import { render, screen, within } from "@testing-library/react";
 import userEvent from "@testing-library/user-event";
 import { useReducer } from "react";
-import { beforeEach, describe, expect, it, vi } from "vitest";
+import { beforeAll, beforeEach, describe, expect, it, vi } from "vitest";
+import { editing } from "../../../web/src/features/statement/draft/editing-part.ts";
 import { draftReducer } from "../../../web/src/features/statement/draft/draft-reducer.ts";
 import { openDraft } from "../../../web/src/features/statement/draft/open-draft.ts";
 import type { Draft } from "../../../web/src/features/statement/draft/draft.ts";
@@ -29,6 +30,8 @@ function open(scenario: Scenario = creepFeed) {
 
 const key = "contact.law.static";
 
+// A person comes after they are loaded.
+beforeAll(() => Promise.all([editing.ask(), import("../../../web/src/features/statement/form/group-form.tsx")]));
 beforeEach(allowLayout);
 
 describe("where a value comes from", () => {

@@ -1,11 +1,11 @@
 import type { Fault } from "@restband/solver";
-import { Suspense, useEffect, useId, useRef, useState } from "react";
+import { Suspense, use, useEffect, useId, useRef, useState, type ComponentProps } from "react";
 import { Button } from "../../components/button.tsx";
 import { FieldError } from "../../components/field.tsx";
 import { lazyPart } from "../../components/lazy-part.ts";
 import { sayMany } from "../../format/words.ts";
 import { useDraftContext } from "./draft/draft-context.ts";
-import { ValueEditor } from "./entry/value-editor.tsx";
+import { editing, type Editing } from "./draft/editing-part.ts";
 import { faultsIn, type Group } from "./groups.ts";
 import { Keeps } from "./keeps.tsx";
 import { fieldAt } from "./scenario-fields.ts";
@@ -129,7 +129,11 @@ function SentenceWithEditor({ group, faults, onAllFields }: SentenceProps) {
   return (
     <div ref={place}>
       <SentenceLine pieces={pieces} openPath={open?.path ?? null} onOpen={openAt} onAllFields={onAllFields} />
-      {open && field && <ValueEditor key={open.path} path={open.path} field={field} nib={open.nib} onClose={close} />}
+      {open && field && (
+        <Suspense>
+          <Editor key={open.path} path={open.path} field={field} nib={open.nib} onClose={close} />
+        </Suspense>
+      )}
       {faults.map(
         (fault) =>
           fault.path !== open?.path && <SentenceFault key={fault.path + fault.message} fault={fault} onOpen={openAt} />,
@@ -170,4 +174,10 @@ function SentenceFault({ fault, onOpen }: { fault: Fault; onOpen: (path: string)
       )}
     </FieldError>
   );
+}
+
+/** The editor of a value, loaded after the first paint: at once where it is there by now. */
+function Editor(props: ComponentProps<Editing["ValueEditor"]>) {
+  const { ValueEditor } = editing.now() ?? use(editing.ask());
+  return <ValueEditor {...props} />;
 }

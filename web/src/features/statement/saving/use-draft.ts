@@ -3,8 +3,8 @@ import { use, useCallback, useEffect, useMemo, useReducer, useRef, useState } fr
 import { ApiFailure } from "../../../api/api-failure.ts";
 import { useSaveScenario } from "../../../api/scenarios.ts";
 import { useHasSessionEnded } from "../../../api/session-end.ts";
-import { laterPart } from "../../../later-part.ts";
 import type { Dispatch, Draft, DraftAction } from "../draft/draft.ts";
+import { editing, type Editing } from "../draft/editing-part.ts";
 import { openDraft } from "../draft/open-draft.ts";
 import { Autosave, type Base, type SaveReply, type Saving } from "./autosave.ts";
 import { dropLocal, keepLocally, localText, type LocalDraft } from "./local-draft.ts";
@@ -29,10 +29,6 @@ export interface OpenDraft {
   /** Decides a conflict: what to go on with, over the version now stored. */
   readonly decide: (current: StoredScenario, work: Work) => void;
 }
-
-// Sentences and answer come first: whatever changes a draft needs the solver's check, which comes after them.
-const editing = laterPart(() => import("../draft/editing.ts"));
-type Editing = Awaited<ReturnType<typeof editing.ask>>;
 
 /**
  * The open scenario: what is typed, undone and kept. It begins from what was left in this browser, else from the server's
