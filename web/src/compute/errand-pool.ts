@@ -78,6 +78,8 @@ export class ErrandPool {
   }
 
   private pump(): void {
+    // One signal may call off many at once: those after the first are not begun in between.
+    this.waiting = this.waiting.filter(({ signal }) => !signal.aborted);
     while (this.waiting.length > 0) {
       const free = this.slots.filter(({ task }) => task === null);
       const slot = free.find(({ worker }) => worker) ?? free[0];

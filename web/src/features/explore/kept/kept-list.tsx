@@ -30,7 +30,7 @@ export function KeptList({ explorations, addressOf, onDelete }: KeptListProps) {
       key: "asked",
       head: "asked",
       cell: ({ id, title, kind, headline }) => (
-        <div className="max-w-[560px] whitespace-normal">
+        <div className="max-w-[560px] min-w-64 whitespace-normal">
           <Link to={addressOf(id)}>{title}</Link>
           <span className="block text-13 text-quiet">
             {kinds[kind]}
@@ -39,7 +39,11 @@ export function KeptList({ explorations, addressOf, onDelete }: KeptListProps) {
         </div>
       ),
     },
-    { key: "state", head: "state", cell: (each) => <span className="whitespace-normal">{stateWords(each)}</span> },
+    {
+      key: "state",
+      head: "state",
+      cell: (each) => <span className="block min-w-28 whitespace-normal">{stateWords(each)}</span>,
+    },
     {
       key: "by",
       head: "by",

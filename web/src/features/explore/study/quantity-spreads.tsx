@@ -72,7 +72,7 @@ function Influences({ spread: { influences }, scenario }: { spread: QuantitySpre
           isFigure: true,
           cell: ({ varianceShare }) =>
             varianceShare === null
-              ? "from 1000 draws on"
+              ? "from 1000 values on"
               : `${formatNumber(100 * varianceShare.value, 2)} % (${sayInterval(varianceShare)})`,
         },
       ]}

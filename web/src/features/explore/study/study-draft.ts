@@ -63,7 +63,7 @@ export function studyDraftOf(scenario: Scenario): StudyDraft {
   return {
     inputs: chosen.map((field) => inputDraftOf(field, scenario, "uniform")),
     correlation: "",
-    runs: "1000",
+    runs: "2000",
     seed: "1",
     sampling: "latin-hypercube",
     quantities: [],

@@ -19,11 +19,14 @@ export const sayInterval = ({ low, high }: { low: number; high: number }): strin
 export function studyHeadline({ allLimits, outcomes }: ToleranceSummary, scenario: Scenario): string {
   if (allLimits) {
     const limits = scenario.limits.length === 1 ? "its limit" : "all its limits";
-    return `The ${nounOf(scenario)} keeps ${limits} in ${shareWords(allLimits)} of the draws.`;
+    return `The ${nounOf(scenario)} keeps ${limits} in ${shareWords(allLimits)}.`;
   }
   const likeliest = [...outcomes].sort((a, b) => b.share.count - a.share.count)[0];
   if (!likeliest) return "No draw has an answer.";
-  return `The ${nounOf(scenario)} ${outcomeWords[likeliest.outcome]} in ${shareWords(likeliest.share)} of the draws.`;
+  return `The ${nounOf(scenario)} ${outcomeWords[likeliest.outcome]} in ${shareWords(likeliest.share)}.`;
 }
 
-const shareWords = ({ estimate }: Share): string => sayChance(estimate.value);
+function shareWords({ estimate, count, of }: Share): string {
+  if (count === 0) return "none of the draws";
+  return count === of ? "every draw that has an answer" : `${sayChance(estimate.value)} of the draws`;
+}

@@ -80,38 +80,45 @@ export function LineFamily({ cells, scenario, across, up, place }: LineFamilyPro
       {lines.map((line) => (
         <LinePath key={line.label} line={line} x={x} y={y} />
       ))}
+      {endLabels(lines, x, y).map(({ text, x: left, y: base }) => (
+        <text key={text} x={left} y={base} className="fill-ink">
+          {text}
+        </text>
+      ))}
     </svg>
   );
 }
 
 function LinePath({ line, x, y }: { line: Line; x: (i: number) => number; y: (value: number) => number }) {
   let d = "";
-  let isDown = false;
-  let last: { i: number; value: number } | null = null;
+  let isDrawing = false;
   line.values.forEach((value, i) => {
-    if (value !== null) {
-      d += `${isDown ? "L" : "M"}${x(i).toFixed(1)} ${y(value).toFixed(1)}`;
-      last = { i, value };
-    }
-    isDown = value !== null;
+    if (value !== null) d += `${isDrawing ? "L" : "M"}${x(i).toFixed(1)} ${y(value).toFixed(1)}`;
+    isDrawing = value !== null;
   });
-  const end = last as { i: number; value: number } | null;
   return (
-    <g>
-      <path
-        d={d}
-        className={line.isDown ? "fill-none stroke-stick" : "fill-none stroke-slip"}
-        strokeWidth={2}
-        strokeDasharray={line.isDown ? "7 4" : undefined}
-      />
-      {line.values.length === 1 && end && <circle cx={x(0)} cy={y(end.value)} r={3} className="fill-slip" />}
-      {end && (
-        <text x={x(end.i) + 8} y={y(end.value) + 4} className="fill-ink">
-          {line.label}
-        </text>
-      )}
-    </g>
+    <path
+      d={d}
+      className={line.isDown ? "fill-none stroke-stick" : "fill-none stroke-slip"}
+      strokeWidth={2}
+      strokeLinecap="round"
+      strokeDasharray={line.isDown ? "7 4" : undefined}
+    />
   );
+}
+
+const LABEL_HEIGHT = 14;
+
+/** What each line is, behind its last value; moved apart where they would lie on each other. */
+function endLabels(lines: readonly Line[], x: (i: number) => number, y: (value: number) => number) {
+  const labels = lines.flatMap(({ label, values }) => {
+    const there = values.flatMap((value, i) => (value === null ? [] : [{ i, value }]));
+    const last = there.at(-1);
+    return label === "" || !last ? [] : [{ text: label, x: x(last.i) + 8, y: y(last.value) + 4 }];
+  });
+  labels.sort((a, b) => b.y - a.y);
+  for (let i = 1; i < labels.length; i++) labels[i].y = Math.min(labels[i].y, labels[i - 1].y - LABEL_HEIGHT);
+  return labels;
 }
 
 function linesOf(cells: SweepCells, across: AxisScale, up: AxisScale | null, place: number): Line[] {

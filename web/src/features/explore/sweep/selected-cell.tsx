@@ -47,11 +47,13 @@ export function SelectedCell({ scenario, plan, cells, cell, answer, open, compar
           {computed && "result" in computed && <CellTraces scenario={computed.scenario} result={computed.result} />}
         </div>
       )}
-      {own && open && (
+      {own && (open || compare) && (
         <div className="mt-4 flex flex-wrap gap-3">
-          <Button kind="primary" onClick={() => open(own, values)}>
-            Open as scenario
-          </Button>
+          {open && (
+            <Button kind="primary" onClick={() => open(own, values)}>
+              Open as scenario
+            </Button>
+          )}
           {compare?.(own)}
         </div>
       )}

@@ -3,13 +3,14 @@ import {
   defaultLinks,
   type CheckedSweep,
   type Continuation,
+  type Fault,
   type Links,
   type QuantityName,
   type Scenario,
 } from "@restband/solver";
 import { quantityNamed } from "../../../format/quantities.ts";
 import type { ExploreField } from "../explore-field.ts";
-import { exploreFields, likeliestField, rangeAround } from "../explore-field.ts";
+import { exploreField, exploreFields, likeliestField, rangeAround } from "../explore-field.ts";
 import { readTyped, typedOf, type Typed } from "../typed-number.tsx";
 import type { Measure } from "../../../format/unit.ts";
 
@@ -69,7 +70,9 @@ const alsoLikely: readonly QuantityName[] = ["peakVelocity", "amplitude", "slipV
 export function sweepDraftOf(scenario: Scenario): SweepDraft {
   const fields = exploreFields(scenario);
   const up = likeliestField(fields);
-  const friction = fields.find(({ path }) => path === "contact.law.kinetic" || path === "contact.law.static");
+  const frictionAt = (key: string): ExploreField | undefined =>
+    fields.find(({ path }) => path === `contact.law.${key}`);
+  const friction = frictionAt("kinetic") ?? frictionAt("static");
   const across = friction && friction.path !== up?.path ? friction : (up ?? fields[0]);
   const limits = scenario.limits.flatMap(({ quantity }) => (quantityNamed(quantity) ? [quantity as QuantityName] : []));
   return {
@@ -108,6 +111,8 @@ export function planOf(draft: SweepDraft, scenario: Scenario): CheckedSweep {
   const drafts = [draft.first, ...(draft.second ? [draft.second] : [])];
   const axes = drafts.map((axis) => axisOf(axis, scenario));
   const varied = drafts.map(({ path }) => path);
+  const unread = drafts.flatMap((axis, i) => unreadOf(axis, scenario, `axes[${i}]`));
+  if (unread.length > 0) return { plan: null, faults: unread };
   return checkSweepPlan(
     {
       format: "restband-sweep/1",
@@ -137,16 +142,44 @@ export function canKeepDampingRatio({ first, second }: SweepDraft, { body }: Sce
 export const canKeepFrictionRatio = ({ first, second }: SweepDraft, scenario: Scenario): boolean =>
   Object.keys(defaultLinks(scenario, second ? [first.path, second.path] : [first.path])).length > 0;
 
+/** What of an axis cannot be read as numbers at all, each at its field. */
+function unreadOf({ path, spacing, from, to, count, list }: AxisDraft, scenario: Scenario, at: string): Fault[] {
+  const measure = exploreField(scenario, path)?.measure;
+  if (!measure) return [];
+  const readings: [string, Typed][] =
+    spacing === "listed"
+      ? valuesIn(list).map((text) => ["values", { text, unit: from.unit }])
+      : [
+          ["from", from],
+          ["to", to],
+        ];
+  const faults = readings.flatMap(([member, typed]) => {
+    const read = readTyped(typed, measure);
+    return "message" in read ? [{ path: `${at}.${member}`, message: read.message }] : [];
+  });
+  const isCounted = spacing === "listed" || /^\d+$/.test(count.trim());
+  return isCounted
+    ? faults
+    : [...faults, { path: `${at}.count`, message: "How many values? A whole number, 2 or more." }];
+}
+
+const valuesIn = (list: string): string[] => list.split(/[\s;]+/).filter((text) => text !== "");
+
 function axisOf(axis: AxisDraft, scenario: Scenario): object {
-  const measure = exploreFields(scenario).find(({ path }) => path === axis.path)?.measure;
+  const measure = exploreField(scenario, axis.path)?.measure;
   const number = (typed: Typed): number => {
     const read = measure ? readTyped(typed, measure) : { message: "" };
     return "value" in read ? read.value : NaN;
   };
   if (axis.spacing === "listed") {
-    const texts = axis.list.split(/[\s;]+/).filter((text) => text !== "");
-    return { path: axis.path, spacing: "listed", values: texts.map((text) => number({ text, unit: axis.from.unit })) };
+    const values = valuesIn(axis.list).map((text) => number({ text, unit: axis.from.unit }));
+    return { path: axis.path, spacing: "listed", values };
   }
-  const count = /^\d+$/.test(axis.count.trim()) ? Number(axis.count) : NaN;
-  return { path: axis.path, spacing: axis.spacing, from: number(axis.from), to: number(axis.to), count };
+  return {
+    path: axis.path,
+    spacing: axis.spacing,
+    from: number(axis.from),
+    to: number(axis.to),
+    count: Number(axis.count),
+  };
 }

@@ -91,7 +91,11 @@ function CuresTable({ cures: { limit, cures, withoutCure }, scenario, open }: Cu
           { key: "change", head: "change", cell: ({ path, label }) => exploreField(scenario, path)?.name ?? label },
           { key: "now", head: "now", isFigure: true, cell: (cure) => entered(cure, scenario) },
           { key: "needed", head: "needed", isFigure: true, cell: (cure) => needed(cure, scenario) },
-          { key: "remark", head: "remark", cell: (cure) => <span className="whitespace-normal">{remark(cure)}</span> },
+          {
+            key: "remark",
+            head: "remark",
+            cell: (cure) => <span className="block min-w-52 whitespace-normal">{remark(cure)}</span>,
+          },
           ...(open
             ? [
                 {

@@ -20,7 +20,9 @@ const startWords: Record<StartKind, string> = {
 
 export function sayThreshold(reading: ThresholdReading, field: ExploreField, body: string): ThresholdWords {
   const { answer, safeSide, outOfReach, target } = reading;
-  if (outOfReach) return { headline: outOfReachWords(reading, field, body), lead: [searched(reading, field)] };
+  if (outOfReach)
+    return { headline: everywhereWords(reading, field, body, outOfReach), lead: [searched(reading, field)] };
+  if (reading.searches.every(({ flips }) => flips.length === 0)) return startDecides(reading, field, body);
   if (!answer || !safeSide) return { headline: noSafeSide(reading, field, body), lead: bracketLines(reading, field) };
   const value = safeValue(answer, safeSide, field);
   const reach = safeSide === "above" ? `from ${value} of ${field.name} on` : `up to ${value} of ${field.name}`;
@@ -48,10 +50,29 @@ type TargetWords = Pick<ThresholdReading["target"], "met" | "unmet" | "short">;
 const endWords = ({ isMet, reason }: EndReading, { met, unmet, short }: TargetWords): string =>
   isMet === null ? `cannot be judged (${reason ?? "cut off"})` : isMet ? (short ?? met) : unmet;
 
-function outOfReachWords({ outOfReach, target }: ThresholdReading, field: ExploreField, body: string): string {
-  return outOfReach === "met-everywhere"
+function everywhereWords(
+  { target }: ThresholdReading,
+  field: ExploreField,
+  body: string,
+  where: "met-everywhere" | "met-nowhere",
+): string {
+  return where === "met-everywhere"
     ? `${capitalised(body)} ${target.met} at every ${field.name} looked at.`
     : `Out of reach: ${body} ${target.unmet} at every ${field.name} looked at.`;
+}
+
+/** Nothing changes over the range, but the starts differ: the way the scenario starts is the answer, the others beside it. */
+function startDecides(reading: ThresholdReading, field: ExploreField, body: string): ThresholdWords {
+  const { searches, target } = reading;
+  const isMet = searches[0].low.isMet === true;
+  const others = searches.filter(({ low }) => (low.isMet === true) !== isMet).map(({ start }) => startWords[start]);
+  return {
+    headline: everywhereWords(reading, field, body, isMet ? "met-everywhere" : "met-nowhere"),
+    lead: [
+      `${capitalised(listed(others))} it ${isMet ? target.unmet : target.met} all along.`,
+      searched(reading, field),
+    ],
+  };
 }
 
 const searched = ({ low, high }: ThresholdReading, { measure }: ExploreField): string =>
