@@ -179,10 +179,10 @@ describe("the page of a scenario", () => {
     await user.click(await screen.findByRole("button", { name: /^Damping/ }));
     await user.keyboard("8000");
     await user.keyboard("{Control>}z{/Control}");
-    expect(screen.getByRole("textbox", { name: "Damping" })).toHaveValue("350");
+    await waitFor(() => expect(screen.getByRole("textbox", { name: "Damping" })).toHaveValue("350"));
     expect(screen.getByRole("button", { name: "Redo" })).toBeEnabled();
     await user.keyboard("{Control>}{Shift>}Z{/Shift}{/Control}");
-    expect(screen.getByRole("button", { name: "Damping: 8000 N·s/m" })).toBeInTheDocument();
+    expect(await screen.findByRole("button", { name: "Damping: 8000 N·s/m" })).toBeInTheDocument();
   });
 
   it("takes a change back by Ctrl-Z on a narrow page too, whose buttons stand in a closed menu", async () => {
@@ -193,7 +193,7 @@ describe("the page of a scenario", () => {
     await changeDamping(user, "400");
     expect(screen.queryByTitle("Undo")).not.toBeInTheDocument();
     await user.keyboard("{Control>}z{/Control}");
-    expect(screen.getByRole("button", { name: "Damping: 350 N·s/m" })).toBeInTheDocument();
+    expect(await screen.findByRole("button", { name: "Damping: 350 N·s/m" })).toBeInTheDocument();
   });
 
   it("does not undo an undo that is made while a save is under way", async () => {
