@@ -1,6 +1,6 @@
 import { indexAt } from "../../compute/instant.ts";
 import { say } from "../../format/format-quantity.ts";
-import { plotWidth, timeAt, xOf, yOf, type Frame, type PanelFrame, type PanelKey } from "./frame.ts";
+import { plotWidth, timeAt, yOf, type Frame, type PanelFrame, type PanelKey } from "./frame.ts";
 import { overlayAt, type Overlay } from "./overlay.ts";
 import type { RunView } from "./run-view.ts";
 import { driveSpeed } from "./scales.ts";
@@ -32,21 +32,21 @@ export function panelLabels(view: RunView, frame: Frame, overlays: readonly Over
   ];
 }
 
-/** At a third of what is seen, or as far in as the word is long: above the band's upper edge, or within the band where that is at the panel's. */
-function bandLabel({ inputs, scenario }: RunView, frame: Frame, panel: PanelFrame): PanelLabel[] {
+/** Above the band's upper edge, or within the band where that is at the panel's; left out where the curve leaves no room. */
+function bandLabel({ inputs, scenario, samples }: RunView, frame: Frame, panel: PanelFrame): PanelLabel[] {
   const { equilibrium, restBand } = inputs;
   if (restBand === null || inputs.times(frame.from, frame.to) === null) return [];
   const text = `rest band ±${say(restBand, { dimension: "displacement", motion: scenario.motion })}`;
-  // A band that falls leaves room to the right of a place on it, one that rises to its left.
-  const isFalling = (equilibrium(frame.to) ?? 0) < (equilibrium(frame.from) ?? 0);
-  const share = Math.max(0.3, wide(text) / plotWidth(frame));
-  const t = frame.from + (isFalling ? 1 - share : share) * (frame.to - frame.from);
-  const centre = equilibrium(t);
-  if (centre === null || share > 1) return [];
-  const edge = yOf(panel, centre + restBand);
-  const y = edge - FALL > panel.top ? edge - RISE - 4 : edge + FALL;
-  if (y < panel.top || y > panel.top + panel.height) return [];
-  return [{ key: "band", text, x: xOf(frame, t), y, anchor: isFalling ? "start" : "end", tone: "band-line" }];
+  // Over its word a band is highest at one end of it: where it falls, at the beginning.
+  const spots = placesFor(text, frame).map((x) => {
+    const ends = [x, x + wide(text)].map((place) => (equilibrium(timeAt(frame, place)) ?? 0) + restBand);
+    const edge = yOf(panel, Math.max(...ends));
+    return { x, y: edge - FALL > panel.top ? edge - RISE - 2 : edge + FALL };
+  });
+  const curves = [{ t: samples.t, values: samples.x }];
+  // From a little way in on: the first places are those of what happens at the start.
+  const spot = [...spots.slice(2), ...spots].find((each) => isFree(curves, frame, panel, each, text));
+  return spot ? [{ key: "band", text, ...spot, anchor: "start", tone: "band-line" }] : [];
 }
 
 /** Below its line or above it, where both motions leave room. */

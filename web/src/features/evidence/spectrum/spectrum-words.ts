@@ -17,9 +17,12 @@ export function orderOf(frequency: number, { rate }: SpectrumWindow): string | n
 }
 
 /** "the last 10 periods of the drive". */
-export function windowWords({ rate, periods }: SpectrumWindow, part: WindowPart): string {
+export function windowWords({ from, rate, periods }: SpectrumWindow, part: WindowPart): string {
   const within = part === "seen" ? " of what is seen above" : "";
-  if (!rate || periods === null) return part === "seen" ? "what is seen above" : "the steady part of the run";
+  if (!rate || periods === null) {
+    if (part === "seen") return "what is seen above";
+    return from === 0 ? "the whole run" : "the steady part of the run";
+  }
   if (rate.name === "stick–slip") return `${periods} cycles from break-away to break-away${within}`;
   return periods === 1
     ? `the last period of the ${rate.name}${within}`
