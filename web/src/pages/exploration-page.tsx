@@ -3,6 +3,7 @@ import { useSuspenseQueries } from "@tanstack/react-query";
 import { useLocation, useParams } from "react-router-dom";
 import { explorationQuery } from "../api/explorations.ts";
 import { projectQuery } from "../api/projects.ts";
+import { ButtonLink } from "../components/button.tsx";
 import { WorkHeader } from "../features/account/work-header.tsx";
 import { SentenceGlance } from "../features/answer/answer-glance.tsx";
 import { SweepView } from "../features/explore/sweep/sweep-view.tsx";
@@ -10,7 +11,7 @@ import { StudyView } from "../features/explore/study/study-view.tsx";
 import { ThresholdAnswer } from "../features/explore/threshold/threshold-answer.tsx";
 import { storedReading } from "../features/explore/threshold/threshold-reading.ts";
 import { mayEdit } from "../features/project-home/roles.ts";
-import { paths } from "../paths.ts";
+import { compareReference, paths } from "../paths.ts";
 import type { Computed } from "../compute/use-run.ts";
 import { useOpenScenario } from "./use-open-scenario.ts";
 
@@ -42,6 +43,13 @@ export function ExplorationPage() {
             isFresh={state?.isFresh === true}
             answer={cellAnswer}
             {...(canEdit && { open })}
+            compare={(cell) => (
+              <ButtonLink
+                to={paths.compare(projectId, compareReference.scenario(scenarioId), compareReference.given(cell))}
+              >
+                Compare with the scenario
+              </ButtonLink>
+            )}
           />
         )}
         {stored.kind === "study" && (
