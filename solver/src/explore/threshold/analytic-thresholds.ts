@@ -2,41 +2,61 @@ import type { Result } from "../../result.ts";
 import { checkScenario } from "../../scenario/check-scenario.ts";
 import { numericField } from "../../scenario/numeric-fields.ts";
 import type { Records } from "../../scenario/scenario.ts";
+import {
+  hasNoReidDamping,
+  hasStraightSpring,
+  isDrivenByOneForce,
+  isUnderdamped,
+  slidesAtOneForce,
+} from "../../textbook/conditions.ts";
 import { criticalFeedExact } from "../../textbook/critical-feed-exact.ts";
 import { speedOf } from "../../textbook/feed.ts";
+import { forcedRatios } from "../../textbook/driving-force.ts";
 import { linearStability } from "../../textbook/linear-stability.ts";
+import { noStopMotion } from "../../textbook/no-stop-motion.ts";
 import { textbookCase, type TextbookCase } from "../../textbook/textbook-case.ts";
-import type { TextbookCompanion } from "../../textbook/textbook-companion.ts";
+import type { Condition, TextbookCompanion } from "../../textbook/textbook-companion.ts";
 import { solverVersion } from "../../version.ts";
 import { defaultLinks, withValues } from "../links.ts";
 import { scanValues } from "./search-values.ts";
 import type { AnalyticThreshold, StartedSearch, StartKind, Target, ThresholdQuestion } from "./threshold.ts";
 
 /** A formula that tells a threshold: it lies where `gap` is 0. */
-interface Boundary {
-  readonly companion: TextbookCompanion;
-  readonly applies: (target: Target) => boolean;
+interface Boundary extends Pick<TextbookCompanion, "key" | "label" | "formula" | "source" | "conditions"> {
   readonly start: StartKind;
   readonly gap: (kase: TextbookCase) => number;
 }
 
-const asksForNoStickSlip = (target: Target): boolean =>
-  target.kind === "outcome" && target.outcomes.includes("stick-slip") !== target.isWanted;
+const holdsAsItSlides: Condition = ({ staticForce, kineticForce }) =>
+  staticForce === kineticForce ? null : "Static and kinetic friction differ, which the formula leaves out.";
 
+/** All of them tell where stick–slip ends. */
 const boundaries: readonly Boundary[] = [
+  { ...criticalFeedExact, start: "rest", gap: (kase) => speedOf(kase) - criticalFeedExact.value(kase) },
+  { ...linearStability, start: "steady-sliding", gap: (kase) => linearStability.value(kase) },
   {
-    companion: criticalFeedExact,
-    applies: asksForNoStickSlip,
+    key: "no-stop-limit",
+    label: "Largest friction without stops",
+    formula: "ẋ keeps its sign between turning points",
+    source: "Den Hartog 1931, Trans. ASME 53, 107; with damping from memory, recomputed",
+    conditions: [
+      hasStraightSpring,
+      isDrivenByOneForce,
+      slidesAtOneForce,
+      isUnderdamped,
+      hasNoReidDamping,
+      holdsAsItSlides,
+    ],
     start: "rest",
-    gap: (kase) => speedOf(kase) - criticalFeedExact.value(kase),
-  },
-  {
-    companion: linearStability,
-    applies: asksForNoStickSlip,
-    start: "steady-sliding",
-    gap: (kase) => linearStability.value(kase),
+    gap: (kase) => {
+      const { r, beta } = forcedRatios(kase);
+      return noStopMotion(r, kase.ratio, beta)?.isWithoutStop ? 1 : -1;
+    },
   },
 ];
+
+const asksForNoStickSlip = (target: Target): boolean =>
+  target.kind === "outcome" && target.outcomes.includes("stick-slip") !== target.isWanted;
 
 /** The formulas read the scenario alone. */
 const unrun: Result = {
@@ -60,11 +80,11 @@ export function analyticThresholds(
   searches: readonly StartedSearch[],
   records?: Records,
 ): AnalyticThreshold[] {
+  if (!asksForNoStickSlip(question.target)) return [];
   return boundaries.flatMap((boundary) => {
-    if (!boundary.applies(question.target)) return [];
     const roots = rootsOf(boundary, question, records);
     if (roots.length === 0) return [];
-    const { key, label, formula, source } = boundary.companion;
+    const { key, label, formula, source } = boundary;
     const middles = (searches.find(({ start }) => start === boundary.start)?.flips ?? []).map(
       ({ below, above }) => (below.value + above.value) / 2,
     );
@@ -80,13 +100,13 @@ export function analyticThresholds(
 }
 
 /** Where the gap changes its sign between values of the range, halved to rounding. */
-function rootsOf({ companion, gap }: Boundary, question: ThresholdQuestion, records: Records | undefined): number[] {
+function rootsOf({ conditions, gap }: Boundary, question: ThresholdQuestion, records: Records | undefined): number[] {
   const { scenario, path, low, high, links = defaultLinks(scenario, [path]) } = question;
   const gapAt = (value: number): number => {
     const moved = checkScenario(withValues(scenario, [[path, value]], links)).scenario;
     if (moved === null) return NaN;
     const kase = textbookCase(moved, unrun, { records });
-    return companion.conditions.some((condition) => condition(kase) !== null) ? NaN : gap(kase);
+    return conditions.some((condition) => condition(kase) !== null) ? NaN : gap(kase);
   };
   const values = scanValues(low, high, points, numericField(scenario, path) ?? {});
   const gaps = values.map(gapAt);

@@ -172,6 +172,36 @@ describe("the lowest feed without stick-slip", () => {
   );
 });
 
+describe("the largest friction without stops under a harmonic force", () => {
+  /* β = F/P by r = Ω/ω after Den Hartog's S and U, recomputed by a hand that is not this solver's. */
+  it.each([
+    [0.7, 0.722071],
+    [0.8, 0.817406],
+    [1.25, 0.698821],
+    [2, 0.596285],
+  ])("r %d: β %d", { timeout: 30_000 }, (r, beta) => {
+    const scenario = buildScenario({
+      body: { inertia: 1, stiffness: 1 },
+      contact: { law: { model: "coulomb", static: 0.4, kinetic: 0.4 }, normal: { preload: 1 } },
+      force: [{ kind: "harmonic", amplitude: 1, hz: r / (2 * Math.PI) }],
+      span: { seconds: (100 * 2 * Math.PI) / r, untilRest: false },
+    });
+    const found = search({
+      scenario,
+      path: "contact.law.kinetic",
+      low: 0.3,
+      high: 0.95,
+      points: 14,
+      target: { kind: "outcome", outcomes: ["stick-slip"], isWanted: false },
+    });
+    expect(found).toMatchObject({ safeSide: "below", dependsOnStart: false });
+    for (const end of [found.answer?.below, found.answer?.above])
+      expect(Math.abs((end?.value ?? NaN) / beta - 1)).toBeLessThan(1e-4);
+    expect(found.analytic.map(({ key }) => key)).toEqual(["no-stop-limit"]);
+    expect(found.analytic[0].value).toBeCloseTo(beta, 5);
+  });
+});
+
 describe("a belt that slides or sticks, as the start has it", () => {
   /*
    * ẍ = −x − 0.1 ẋ + μ(V − ẋ), μ = 0.5 + 0.5 exp(−|v|/0.5): parameters after Stender, Hoffmann & Papangelo 2020. Steady sliding is
