@@ -96,7 +96,7 @@ function speedLabel(view: RunView, frame: Frame, panel: PanelFrame): PanelLabel[
   });
 }
 
-/** At the line that is in the picture, from the right on; above it, or below it where it is at the panel's upper edge. */
+/** At the line that is in the picture: above it, or below it where it is at the panel's upper edge; left out where there is no room. */
 function holdLabel({ inputs, scenario, samples }: RunView, frame: Frame, panel: PanelFrame): PanelLabel[] {
   const hold = inputs.hold(frame.from);
   const level = [hold, -hold].find((force) => force > panel.low && force < panel.high);
@@ -106,8 +106,8 @@ function holdLabel({ inputs, scenario, samples }: RunView, frame: Frame, panel: 
   const text = `holds up to ${say(hold, { dimension: "force", motion: scenario.motion }, { digits: 4 })}`;
   const places = placesFor(text, frame).reverse();
   const curves = [{ t: samples.t, values: samples.f }];
-  const x = places.find((place) => isFree(curves, frame, panel, { x: place, y }, text)) ?? places[0];
-  return [{ key: "hold", text, x, y, anchor: "start", tone: "stick" }];
+  const x = places.find((place) => isFree(curves, frame, panel, { x: place, y }, text));
+  return x === undefined ? [] : [{ key: "hold", text, x, y, anchor: "start", tone: "stick" }];
 }
 
 /** About how wide a word is, px. */
@@ -137,7 +137,8 @@ function isFree(
     for (let i = indexAt(t, first); i < t.length && t[i] <= last; i++) {
       low = Math.min(low, values[i]);
       high = Math.max(high, values[i]);
+      if (yOf(panel, high) <= y + RISE / 2 && yOf(panel, low) >= y - FALL) return false;
     }
-    return yOf(panel, high) > y + RISE / 2 || yOf(panel, low) < y - FALL;
+    return true;
   });
 }
