@@ -4,6 +4,7 @@ import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { failureSchema, type Route, type RouteName, routes } from "../../api/src/contract.ts";
 import type { Browser } from "../support/browser.ts";
 import { createProject, createScenario, emailOf, password, signUp, smallScenario } from "../support/people.ts";
+import { cellsOf, createExploration, runner, smallSweep, tileContent } from "../support/explorations.ts";
 import { freezeBody, smallComment, smallReplay } from "../support/revisions.ts";
 import { startTestServer, type TestServer } from "../support/test-server.ts";
 
@@ -26,6 +27,11 @@ const goodBodies: Record<string, Record<string, unknown>> = {
   createCases: { contents: [smallScenario] },
   duplicateScenario: { title: "Copy" },
   moveScenario: { toProjectId: crypto.randomUUID() },
+  createExploration: smallSweep,
+  claimExploration: { runner, solverVersion: smallSweep.solverVersion },
+  releaseExploration: { runner },
+  saveTile: { runner, content: tileContent(cellsOf(0)) },
+  concludeExploration: { headline: "Slides smoothly from 8.35 mm/s.", answer: {} },
   freezeScenario: freezeBody({ content: checkScenario(smallScenario).scenario!, digest: "0".repeat(64) }),
   keepReplay: smallReplay,
   askForReview: { reviewers: [crypto.randomUUID()], message: "" },
@@ -38,11 +44,14 @@ const goodBodies: Record<string, Record<string, unknown>> = {
 };
 
 /** What a query has to hold. */
-const goodQueries: Partial<Record<RouteName, string>> = { readContents: `?ids=${crypto.randomUUID()}&` };
+const goodQueries: Partial<Record<RouteName, string>> = {
+  readContents: `?ids=${crypto.randomUUID()}&`,
+  readTiles: "?numbers=0&",
+};
 
 let server: TestServer;
 let owner: Browser & { accountId: string };
-let params: Record<"projectId" | "scenarioId" | "accountId" | "revisionId" | "commentId" | "noticeId", string>;
+let params: Record<string, string>;
 
 beforeAll(async () => {
   const generous = { account: { attempts: 1e6, seconds: 60 }, origin: { attempts: 1e6, seconds: 60 } };
@@ -51,7 +60,9 @@ beforeAll(async () => {
   const projectId = await createProject(owner);
   const [revisionId, commentId, noticeId] = Array.from({ length: 3 }, () => crypto.randomUUID());
   const scenarioId = (await createScenario(owner, projectId)).id;
-  params = { projectId, scenarioId, accountId: owner.accountId, revisionId, commentId, noticeId };
+  const explorationId = (await createExploration(owner, projectId, scenarioId)).id;
+  const others = { revisionId, commentId, noticeId, explorationId, number: "0" };
+  params = { projectId, scenarioId, accountId: owner.accountId, ...others };
 });
 afterAll(() => server.stop());
 
@@ -74,7 +85,8 @@ describe.each(withBody)("the body of %s", (name) => {
   it.each(Object.keys(goodBodies[name]))("needs %s, and of the right type", async (key) => {
     const rest = Object.fromEntries(Object.entries(goodBodies[name]).filter(([other]) => other !== key));
     expect(await fail({ body: rest })).toMatchObject({ status: 400, fields: [{ path: key }] });
-    expect(await fail({ body: { ...rest, [key]: 7 } })).toMatchObject({ status: 400, fields: [{ path: key }] });
+    const wrong = typeof goodBodies[name][key] === "number" ? "seven" : 7;
+    expect(await fail({ body: { ...rest, [key]: wrong } })).toMatchObject({ status: 400, fields: [{ path: key }] });
   });
 
   it.each([

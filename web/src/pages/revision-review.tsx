@@ -1,7 +1,8 @@
 import type { Project, Replay, Revision } from "@restband/api/contract";
 import { fieldPaths } from "@restband/solver";
 import { useQuery } from "@tanstack/react-query";
-import { Suspense, useMemo } from "react";
+import { Suspense, useEffect, useMemo } from "react";
+import { useLocation } from "react-router-dom";
 import { membersQuery } from "../api/members.ts";
 import { lazyPart } from "../components/lazy-part.ts";
 import { Section } from "../components/section.tsx";
@@ -30,6 +31,7 @@ export function RevisionComments({ project, revision, ownId }: RevisionPartProps
       }),
     [content],
   );
+  useScrollTo("#comments");
   const canComment = project.role !== "reader" && project.archivedAt === null;
   return (
     <Section id="comments" name="Comments" help="Pinned to instants and spans of time, to a value or to the whole.">
@@ -38,6 +40,14 @@ export function RevisionComments({ project, revision, ownId }: RevisionPartProps
       </Suspense>
     </Section>
   );
+}
+
+/** Goes to a part of the page that a link has named: it was not there yet when the address was followed. */
+function useScrollTo(hash: string): void {
+  const { hash: asked, key } = useLocation();
+  useEffect(() => {
+    if (asked === hash) document.querySelector(hash)?.scrollIntoView();
+  }, [asked, hash, key]);
 }
 
 /** Who was asked to review it, and what was decided. */
