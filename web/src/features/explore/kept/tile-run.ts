@@ -135,6 +135,15 @@ export class TileRun<Store extends TileStore> {
     }
   }
 
+  /** Takes tiles that were computed elsewhere; those that are there stay as they are. */
+  bringIn(tiles: readonly Float64Array[]): void {
+    this.stop();
+    tiles.forEach((rows, tile) => {
+      if (!this.store.hasTile(tile)) this.take(tile, rows, true);
+    });
+    this.tell();
+  }
+
   /** Frees the workers at once; what is computed stays. */
   stop(): void {
     this.controller?.abort();

@@ -17,6 +17,7 @@ import { searchLimitLines, type LimitLine } from "./limit-lines.ts";
 import { MapChoice, useShown } from "./map-choice.tsx";
 import { MapLegend } from "./map-legend.tsx";
 import { SelectedCell } from "./selected-cell.tsx";
+import { SolveElsewhere } from "./solve-elsewhere.tsx";
 import { sweepCsv } from "./sweep-csv.ts";
 import { SweepHead } from "./sweep-head.tsx";
 import { SweepMap } from "./sweep-map.tsx";
@@ -108,6 +109,12 @@ export function SweepView({ projectId, stored, canEdit, isFresh, answer, open, c
                   <LineFamily cells={cells} scenario={scenario} across={across} up={up} place={shown.place} />
                 </div>
               )}
+              <SolveElsewhere
+                scenario={scenario}
+                plan={plan}
+                title={stored.title}
+                {...(canEdit && !run.isComplete && { onTiles: (tiles) => run.bringIn(tiles) })}
+              />
             </>
           )}
         </div>

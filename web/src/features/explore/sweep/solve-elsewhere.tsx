@@ -1,0 +1,75 @@
+import { cellLines, readAnswers, type Scenario, type SweepPlan } from "@restband/solver";
+import { useState } from "react";
+import { Button } from "../../../components/button.tsx";
+import { ErrorNote } from "../../../components/error-note.tsx";
+import { FileButton } from "../../../components/file-button.tsx";
+import { fileNameOf, saveFile } from "../../../components/save-file.ts";
+import { announce } from "../../../components/status.tsx";
+
+interface SolveElsewhereProps {
+  scenario: Scenario;
+  plan: SweepPlan;
+  title: string;
+  /** Takes the tiles of answers that agree; absent where the person may not save. */
+  onTiles?: (tiles: readonly Float64Array[]) => void;
+}
+
+const MOST_BYTES = 100e6;
+const MOST_SHOWN = 3;
+
+/** The cells as a file to be solved by other machines, and the way back for their answers. */
+export function SolveElsewhere({ scenario, plan, title, onTiles }: SolveElsewhereProps) {
+  const [faults, setFaults] = useState<readonly string[]>([]);
+  if (plan.continuation !== "none") return null;
+  const read = (text: string): void => {
+    const seed = crypto.getRandomValues(new Int32Array(1))[0];
+    const answers = readAnswers(scenario, plan, text.split("\n"), { seed });
+    setFaults(answers.faults.map(({ path, message }) => (path === "" ? message : `${path}: ${message}`)));
+    if (!answers.tiles) return;
+    onTiles?.(answers.tiles);
+    announce(`All cells are here. ${answers.recomputed} of them were run again and agree.`);
+  };
+  return (
+    <details className="mt-8 border-t border-line pt-4">
+      <summary className="link w-fit">Solve it on other machines</summary>
+      <p className="mt-3 max-w-(--measure)">
+        The file holds the scenario and a line for each cell. Any number of machines solve it, each its part, with
+        Restband’s command line. What they answer is taken back by its digest, and twenty cells are run again here.
+      </p>
+      <pre className="figures mt-3 max-w-full overflow-x-auto text-13">
+        npm run --silent solve -- --lines &lt; cells.jsonl &gt; answers.jsonl
+      </pre>
+      <div className="mt-4 flex flex-wrap gap-3">
+        <Button
+          onClick={() =>
+            saveFile(
+              fileNameOf(`${title} cells`, "jsonl"),
+              "application/x-ndjson",
+              [...cellLines(scenario, plan), ""].join("\n"),
+            )
+          }
+        >
+          Save the cells
+        </Button>
+        {onTiles && (
+          <FileButton
+            accept=".jsonl,.ndjson,.txt"
+            most={MOST_BYTES}
+            onText={read}
+            onRefused={(sentence) => setFaults([sentence])}
+          >
+            Bring in the answers
+          </FileButton>
+        )}
+      </div>
+      {faults.length > 0 && (
+        <ErrorNote className="mt-4">
+          {faults.slice(0, MOST_SHOWN).map((fault) => (
+            <p key={fault}>{fault}</p>
+          ))}
+          {faults.length > MOST_SHOWN && <p>And {faults.length - MOST_SHOWN} more. Nothing was taken.</p>}
+        </ErrorNote>
+      )}
+    </details>
+  );
+}
