@@ -36,7 +36,7 @@ export function RevisionsSection(props: RevisionsSectionProps) {
   const { projectId, id: scenarioId, digest } = stored;
   const [frozen, setFrozen] = useState<Freezable | null>(null);
   const navigate = useNavigate();
-  useArrival();
+  useArrival(props.run.computed !== null);
   const open = (): void => {
     const wanted = freezableOf(props);
     if (typeof wanted === "string") announce(wanted);
@@ -63,12 +63,13 @@ export function RevisionsSection(props: RevisionsSectionProps) {
   );
 }
 
-/** Who followed a link to the revisions is taken to them: they come later than the page. */
-function useArrival(): void {
+/** Who followed a link to the revisions is taken to them, once the answer above has its room. */
+function useArrival(isAnswered: boolean): void {
   const { hash } = useLocation();
   useEffect(() => {
-    if (hash === "#revisions") document.getElementById("revisions")?.scrollIntoView();
-  }, [hash]);
+    if (hash === "#revisions" && isAnswered)
+      requestAnimationFrame(() => document.getElementById("revisions")?.scrollIntoView());
+  }, [hash, isAnswered]);
 }
 
 /** What can be frozen: the stored version with its answer; a sentence where there is no such thing just now. */
