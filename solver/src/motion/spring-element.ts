@@ -29,7 +29,7 @@ export function orientSide(s: Stance): void {
 function springOfStick(form: Form, s: Stance): Phase {
   if (form.isCarriedWithBase()) return 0;
   if (s.velocity !== 0) return Math.sign(s.velocity) as Phase;
-  return (-Math.sign(form.inputs.evaluate(0).baseAcceleration) || 1) as Phase;
+  return (-Math.sign(form.inputs.evaluate(0).baseAcceleration) || s.spring || 1) as Phase;
 }
 
 /** At ḋ = 0 in a slip: 0 where |need| ≤ ρ k |d|, else the side of the force that cannot be held. */
@@ -54,7 +54,7 @@ export function chooseBoth(form: Form, s: Stance): void {
   const element = form.elementSlope * Math.abs(s.position);
   const slide = form.slide * v.normal;
   const grip = form.grip * v.normal;
-  const ahead = Math.sign(carrier - v.baseAcceleration) || 1;
+  const ahead = Math.sign(carrier - v.baseAcceleration) || s.spring || 1;
   const isWithin = (force: number, room: number): boolean => room > 0 && Math.abs(force) <= room * (1 + heldTolerance);
   if (isWithin(inertia * carrier - free + ahead * element, grip)) {
     s.contact = 0;

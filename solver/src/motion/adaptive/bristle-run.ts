@@ -58,6 +58,7 @@ class BristleRun {
       if (this.ended !== null) break;
       y = this.passCorner(y);
     }
+    if (store.count === 0) store.push(0, problem.seconds, (i) => y[i]); // no step could be taken: all that is known is the start
     segments[segments.length - 1].lastStep = store.count - 1;
     marks.push({ t: this.t, kind: "end", segment: segments.length - 1 });
     return new BristleMotion(problem, store, segments, marks, this.ended, this.t);
