@@ -92,6 +92,17 @@ describe("the pool of errands", () => {
   });
 });
 
+it("says so where the browser starts no workers", async () => {
+  const pool = new ErrandPool({
+    size: 1,
+    start: () => {
+      throw new Error("no workers");
+    },
+  });
+  await expect(pool.send(runs("a"), live)).rejects.toThrow("This browser starts no workers");
+  await expect(pool.send(runs("b"), live)).rejects.toThrow("This browser starts no workers");
+});
+
 describe("going through an exploration", () => {
   it("shares the runs out and gives the replies back in the order asked, told how far it is", async () => {
     const pool = poolOf(2);

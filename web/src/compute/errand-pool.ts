@@ -92,7 +92,11 @@ export class ErrandPool {
   private begin(slot: Slot, task: Task): void {
     slot.task = task;
     task.attempts += 1;
-    const worker = (slot.worker ??= this.open(slot));
+    const worker = slot.worker ?? this.open(slot);
+    if (!worker) {
+      slot.task = null;
+      return task.reject(new Error("This browser starts no workers; without them nothing is computed."));
+    }
     const settle = (act: () => void): void => {
       if (slot.task !== task || slot.worker !== worker) return;
       slot.task = null;
@@ -106,10 +110,14 @@ export class ErrandPool {
     );
   }
 
-  private open(slot: Slot): ErrandWorker {
-    const worker = this.settings.start();
-    worker.onCrash(() => slot.worker === worker && this.crash(slot));
-    return worker;
+  private open(slot: Slot): ErrandWorker | null {
+    try {
+      const worker = (slot.worker = this.settings.start());
+      worker.onCrash(() => slot.worker === worker && this.crash(slot));
+      return worker;
+    } catch {
+      return null;
+    }
   }
 
   private crash(slot: Slot): void {

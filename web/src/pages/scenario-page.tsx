@@ -9,7 +9,7 @@ import { ButtonLink } from "../components/button.tsx";
 import { Section, WorkedPage } from "../components/section.tsx";
 import { samplesFor } from "../compute/samples-for.ts";
 import { useRanges } from "../compute/use-ranges.ts";
-import { useRun, type Computed } from "../compute/use-run.ts";
+import { useRun, type Computed, type Run } from "../compute/use-run.ts";
 import { UnitsChoice } from "../features/account/units-choice.tsx";
 import { WorkHeader } from "../features/account/work-header.tsx";
 import { Answer } from "../features/answer/answer.tsx";
@@ -36,6 +36,9 @@ const ScenarioExchange = lazyPart(
 const RunSections = lazyPart(async () => (await import("./run-sections.tsx")).RunSections);
 const RevisionsSection = lazyPart(async () => (await import("./revisions-section.tsx")).RevisionsSection);
 const ReckoningLinks = lazyPart(async () => (await import("../features/reckoning/reckoning-links.tsx")).ReckoningLinks);
+const HoldingGlance = lazyPart(
+  async () => (await import("../features/explore/threshold/holding-glance.tsx")).HoldingGlance,
+);
 const ConflictDialog = lazyPart(
   async () => (await import("../features/statement/saving/conflict-dialog.tsx")).ConflictDialog,
 );
@@ -132,9 +135,7 @@ function OpenScenario({ project, stored }: { project: Project; stored: StoredSce
             aside={aside}
             refusal={run.computed && "refusal" in run.computed ? run.computed.refusal : null}
           />
-          <div className="mt-3">
-            <UnitsChoice>for you, on every page; a unit chosen for one value stays with it</UnitsChoice>
-          </div>
+          <StatementFoot run={run} explore={paths.explore(project.id, stored.id)} />
           <Suspense>
             <ScenarioExchange scenario={inForce} dispatch={dispatch} />
           </Suspense>
@@ -165,6 +166,20 @@ function useBeforeEdit(computed: Computed | null, isEditing: boolean): Computed 
   const [settled, setSettled] = useState(computed);
   if (!isEditing && settled !== computed) setSettled(computed);
   return isEditing && settled !== computed ? settled : null;
+}
+
+/** Under the values: how far the answer holds around them, and the units they are shown in. */
+function StatementFoot({ run: { computed, isStale }, explore }: { run: Run; explore: string }) {
+  return (
+    <>
+      <Suspense>
+        <HoldingGlance scenario={!isStale && computed && "result" in computed ? computed.scenario : null} to={explore} />
+      </Suspense>
+      <div className="mt-3">
+        <UnitsChoice>for you, on every page; a unit chosen for one value stays with it</UnitsChoice>
+      </div>
+    </>
+  );
 }
 
 /** What can be done from the head of the page. */
