@@ -173,7 +173,10 @@ function StatementFoot({ run: { computed, isStale }, explore }: { run: Run; expl
   return (
     <>
       <Suspense>
-        <HoldingGlance scenario={!isStale && computed && "result" in computed ? computed.scenario : null} to={explore} />
+        <HoldingGlance
+          scenario={!isStale && computed && "result" in computed ? computed.scenario : null}
+          to={explore}
+        />
       </Suspense>
       <div className="mt-3">
         <UnitsChoice>for you, on every page; a unit chosen for one value stays with it</UnitsChoice>
