@@ -47,6 +47,17 @@ describe("a scenario", () => {
     expect(saved).toMatchObject({ version: 2, digest: made.digest, content: made.content });
   });
 
+  it("keeps every point of a long record, though its digest names the record alone", async () => {
+    const times = Array.from({ length: 1500 }, (_, i) => i / 100);
+    const record = { kind: "record", times, values: times.map((t) => Math.sin(t)) };
+    const content = { ...titled("Long record"), force: [record] };
+    const made = await createScenario(ada, projectId, content);
+    const read = await ada.get<StoredScenario>("readScenario", { params: { projectId, scenarioId: made.id } });
+    expect(read.content.force).toEqual([record]);
+    expect(read.digest).toBe(digestOf(checkScenario(content).scenario!));
+    expect((await save(ada, made.id, 1, read.content).call()).body).toMatchObject({ version: 2, digest: made.digest });
+  });
+
   it("keeps terms that are switched off beside its content, through saves that say nothing of them", async () => {
     const off = {
       place: "force",

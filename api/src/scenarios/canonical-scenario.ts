@@ -1,10 +1,13 @@
-import { canonicalText, checkScenario, digestOf, type Scenario } from "@restband/solver";
+import { checkScenario, digestOf, jsonText, type Scenario } from "@restband/solver";
 import { refusedContent, type FieldFault } from "../errors.ts";
 
 /** A list tells no more of a title; the content has all of it. */
 const LONGEST_TITLE = 300;
 
-/** What is kept of a checked scenario: its canonical text, the SHA-256 of it (lower-case hex), and what lists tell of it. */
+/**
+ * What is kept of a checked scenario: its text, keys sorted and defaults written, long records with all their points; the
+ * SHA-256 of its canonical text (lower-case hex), in which they are named by digest; and what lists tell of it.
+ */
 export interface CanonicalScenario {
   readonly text: string;
   readonly digest: string;
@@ -39,7 +42,7 @@ function within(root: string, { path, message }: FieldFault): FieldFault {
 
 function kept(scenario: Scenario): CanonicalScenario {
   const title = scenario.title.slice(0, LONGEST_TITLE);
-  return { text: canonicalText(scenario), digest: digestOf(scenario), title, purpose: scenario.purpose };
+  return { text: jsonText(scenario, "sorted"), digest: digestOf(scenario), title, purpose: scenario.purpose };
 }
 
 /** The members in which two canonical texts differ: what a trail tells of a save. */
