@@ -45,16 +45,6 @@ export function createScenariosService(database: Database, members: MembersServi
       return read(transaction, projectId, subjectId);
     });
 
-  /** Puts a scenario away or takes it out again. Doing it twice is no fault, and is told once. */
-  const mark = ({ projectId, scenarioId: subjectId }: Place, accountId: string, at: Date | null) =>
-    database.transaction(async (transaction) => {
-      const { title, isArchived } = await lock(transaction, projectId, subjectId);
-      if (isArchived === (at !== null)) return;
-      await markScenarioArchived(transaction, subjectId, at);
-      const act = at ? "scenario.archived" : "scenario.restored";
-      await recordAct(transaction, { projectId, accountId, act, subjectId, detail: { title } });
-    });
-
   return {
     list: (projectId: string) => listScenarios(database, projectId),
     read: (projectId: string, id: string) => read(database, projectId, id),
@@ -107,9 +97,25 @@ export function createScenariosService(database: Database, members: MembersServi
 
     move: (place: Place, toProjectId: string, accountId: string) =>
       move(database, members, { place, toProjectId, accountId }),
-    archive: (place: Place, accountId: string) => mark(place, accountId, new Date()),
-    restore: (place: Place, accountId: string) => mark(place, accountId, null),
+    archive: (place: Place, accountId: string) => mark(database, place, accountId, new Date()),
+    restore: (place: Place, accountId: string) => mark(database, place, accountId, null),
   };
+}
+
+/** Puts a scenario away or takes it out again. Doing it twice is no fault, and is told once. */
+function mark(
+  database: Database,
+  { projectId, scenarioId: subjectId }: Place,
+  accountId: string,
+  at: Date | null,
+): Promise<void> {
+  return database.transaction(async (transaction) => {
+    const { title, isArchived } = await lock(transaction, projectId, subjectId);
+    if (isArchived === (at !== null)) return;
+    await markScenarioArchived(transaction, subjectId, at);
+    const act = at ? "scenario.archived" : "scenario.restored";
+    await recordAct(transaction, { projectId, accountId, act, subjectId, detail: { title } });
+  });
 }
 
 /**
