@@ -33,11 +33,12 @@ export function SolveElsewhere({ scenario, plan, title, onTiles }: SolveElsewher
     <details className="mt-8 border-t border-line pt-4">
       <summary className="link w-fit">Solve it on other machines</summary>
       <p className="mt-3 max-w-(--measure)">
-        The file holds the scenario and a line for each cell. Any number of machines solve it, each its part, with
-        Restband’s command line. What they answer is taken back by its digest, and twenty cells are run again here.
+        The file holds a first line with the scenario, then a line for each cell. Any number of machines solve it with
+        Restband’s command line, each the first line and its part of the others. The answers go back behind the same
+        first line: it tells the sweep they are of. Twenty cells are run again here before any is taken.
       </p>
       <pre className="figures mt-3 max-w-full overflow-x-auto text-13">
-        npm run --silent solve -- --lines &lt; cells.jsonl &gt; answers.jsonl
+        {"head -1 cells.jsonl > answers.jsonl\nnpm run --silent solve -- --lines < cells.jsonl >> answers.jsonl"}
       </pre>
       <div className="mt-4 flex flex-wrap gap-3">
         <Button

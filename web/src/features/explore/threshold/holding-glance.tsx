@@ -18,7 +18,10 @@ export function HoldingGlance({ scenario, to }: HoldingGlanceProps) {
   return (
     <p className="mt-4 max-w-[820px] text-13 text-quiet">
       The answer holds for {ranges.map((range) => rangeWords(range, scenario)).join("; ")}. Each value alone, the others
-      as entered. <Link to={to}>More of it</Link>
+      as entered.{" "}
+      <Link to={to} className="link whitespace-nowrap">
+        More of it
+      </Link>
     </p>
   );
 }
