@@ -161,7 +161,7 @@ describe("two people at one sweep", () => {
     expect(failure).toMatchObject({
       status: 409,
       code: "other-solver",
-      message: "It was begun by solver 0.1.0; this page has 9.9.9. Begin it anew.",
+      message: "It was begun by solver 0.2.0; this page has 9.9.9. Begin it anew.",
     });
   });
 });

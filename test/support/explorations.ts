@@ -9,7 +9,7 @@ export const smallSweep = {
   kind: "sweep",
   title: "kinetic friction in 5 steps",
   scenarioVersion: 1,
-  solverVersion: "0.1.0",
+  solverVersion: "0.2.0",
   plan: { axes: [] },
   tileCells: [2, 2, 1],
   cellValues: 2,

@@ -35,7 +35,7 @@ export const decisionOn = ({ digest }: Revision) => ({
 
 export const smallReplay = {
   way: "same-method",
-  solverVersion: "0.1.0",
+  solverVersion: "0.2.0",
   verdict: "agrees",
   allowed: 1e-9,
   differences: [],

@@ -17,7 +17,7 @@ agrees: largest difference 3.4e-12 of the run's peak, 1e-06 allowed
 
 describe("what the Python file printed", () => {
   it("is read figure by figure, the largest first", () => {
-    const draft = readScriptOutput(printed, "0.1.0");
+    const draft = readScriptOutput(printed, "0.2.0");
     expect(draft).toMatchObject({ way: "script", verdict: "agrees", differences: [] });
     expect(draft?.deviations).toHaveLength(6);
     expect(draft?.deviations[0]).toEqual({
@@ -32,22 +32,22 @@ describe("what the Python file printed", () => {
 
   it("is judged by its figures, whatever its last line says", () => {
     const wrong = printed.replace("1.00e-10    3.4e-12", "1.00e-03    3.4e-05  <-- more than allowed");
-    expect(readScriptOutput(wrong, "0.1.0")?.verdict).toBe("differs");
+    expect(readScriptOutput(wrong, "0.2.0")?.verdict).toBe("differs");
   });
 
   it("tells events that are not the same, and values on one side only", () => {
     const wrong = printed
       .replace("8 found", "9 found")
       .replace("m         4.83e-14    5.9e-13", "m        has a value on one side only");
-    expect(readScriptOutput(wrong, "0.1.0")?.differences).toEqual([
+    expect(readScriptOutput(wrong, "0.2.0")?.differences).toEqual([
       "restOffset has a value on one side only.",
       "There are 8 events in the revision and 9 in the file's run.",
     ]);
   });
 
   it("is refused where it is cut off or something else", () => {
-    expect(readScriptOutput(printed.slice(0, 600), "0.1.0")).toBeNull();
-    expect(readScriptOutput("agrees: largest difference 0", "0.1.0")).toBeNull();
-    expect(readScriptOutput("", "0.1.0")).toBeNull();
+    expect(readScriptOutput(printed.slice(0, 600), "0.2.0")).toBeNull();
+    expect(readScriptOutput("agrees: largest difference 0", "0.2.0")).toBeNull();
+    expect(readScriptOutput("", "0.2.0")).toBeNull();
   });
 });
