@@ -50,6 +50,7 @@ export function ExplorePage() {
       />
       <WorkedPage key={units}>
         <Section name="Threshold" help="From which value on something is so. Both sides are run.">
+          <h1 className="sr-only">Explore {name}</h1>
           <ThresholdSection
             {...frame}
             {...(canEdit && {

@@ -64,7 +64,9 @@ export function KeptList({ explorations, addressOf, onDelete }: KeptListProps) {
         ]
       : []),
   ];
-  return <DataTable caption="Asked before" rows={explorations} keyOf={({ id }) => id} columns={columns} />;
+  return (
+    <DataTable caption="Searches, sweeps and studies" rows={explorations} keyOf={({ id }) => id} columns={columns} />
+  );
 }
 
 function stateWords({ state, tiles, tilesSaved, isStale, scenarioVersion }: ExplorationSummary): string {

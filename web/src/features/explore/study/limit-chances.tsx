@@ -61,7 +61,7 @@ function ShareTable({ caption, rows }: { caption: string; rows: readonly Row[] }
       rows={rows}
       keyOf={({ name }) => name}
       columns={[
-        { key: "name", head: "", cell: ({ name }) => name },
+        { key: "name", head: "what", cell: ({ name }) => name },
         { key: "share", head: "share", isFigure: true, cell: ({ share }) => sayChance(share.estimate.value) },
         { key: "interval", head: "95 % interval", isFigure: true, cell: ({ share }) => sayInterval(share.estimate) },
         { key: "bounded", head: "with refused draws", isFigure: true, cell: ({ share }) => sayInterval(share.bounded) },

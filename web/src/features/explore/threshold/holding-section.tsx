@@ -15,7 +15,7 @@ export function HoldingSection({ scenario }: { scenario: Scenario }) {
   return (
     <>
       <DataTable
-        caption="How far it holds"
+        caption="Room around each value"
         rows={ranges}
         keyOf={({ path }) => path}
         columns={[
