@@ -93,9 +93,7 @@ export class Form {
   /** True where u̇ = ẏ up to the next corner, so that a stuck body keeps its deflection. */
   isCarriedWithBase(): boolean {
     if (this.contactCarrier === "base") return true;
-    const { base } = this.inputs;
-    const isSteady = base[2] === 0 && base[3] === 0 && this.inputs.baseBound(1) === 0;
-    return isSteady && base[1] === this.problem.beltVelocity;
+    return this.inputs.isBaseSteady() && this.inputs.base[1] === this.problem.beltVelocity;
   }
 
   private takeStick(s: Stance): void {

@@ -177,6 +177,11 @@ export class Inputs {
     return this.problem.ripple === null ? 0 : Math.abs(this.problem.ripple.amplitude) * raised(this.rippleOmega, power);
   }
 
+  /** True where ẏ is constant up to the next corner. */
+  isBaseSteady(): boolean {
+    return this.base[2] === 0 && this.base[3] === 0 && this.baseBound(1) === 0;
+  }
+
   /** True where the polynomials or a sweep move the inputs on, so that nothing repeats itself. */
   isSwept(): boolean {
     for (let j = 1; j < 4; j++) {

@@ -71,3 +71,20 @@ test.each([0.25, 0.1])("a body that nothing holds and nothing pushes stays, what
   expect(events.map(({ kind }) => kind)).toEqual(["start", "end"]);
   expect(outcome).toBe("never-moved");
 });
+
+// v_r = (v0 + (a0 + ω v0) t) e^{−ωt} at critical damping: it comes as near to 0 as one likes and is never there
+test.each([1 - 1e-10, 1, 1.2])("a body that settles to run along with its belt never stops on it: ζ = %f", (ratio) => {
+  const { events, ended } = run({
+    body: { inertia: 1, stiffness: 1, viscous: 2 * ratio },
+    contact: {
+      law: { model: "coulomb", static: 1, kinetic: 0 },
+      normal: { preload: 1 },
+      counterface: { velocity: 0.7 },
+    },
+    base: [{ kind: "ramp", rate: 0.7 }],
+    initial: { displacement: -3, velocity: 0.1 },
+    span: { seconds: 300 },
+  });
+  expect(ended).toBe("time");
+  expect(events.map(({ kind }) => kind).filter((kind) => kind === "stop")).toEqual([]);
+});

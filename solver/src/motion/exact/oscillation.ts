@@ -172,10 +172,15 @@ export class Oscillation {
       this.noise += 4 * unitRoundoff * Math.abs(this.beltVelocity);
     } else {
       const v = this.inputs.evaluate(tau);
-      this.slip = this.velocity + v.baseVelocity - this.beltVelocity;
+      const apart = v.baseVelocity - this.beltVelocity;
+      this.slip = this.velocity + apart;
       this.slipRate = this.acceleration + v.baseAcceleration;
       this.slipSecond = this.jerk + v.baseJerk;
-      this.noise += 4 * unitRoundoff * (Math.abs(v.baseVelocity) + Math.abs(this.beltVelocity));
+      // of a steady base ẏ is known exactly: a body that settles to run along with it is not stopped by rounding
+      const size = this.inputs.isBaseSteady()
+        ? Math.abs(apart)
+        : Math.abs(v.baseVelocity) + Math.abs(this.beltVelocity);
+      this.noise += 4 * unitRoundoff * size;
     }
   }
 
