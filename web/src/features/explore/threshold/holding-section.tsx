@@ -41,14 +41,14 @@ const entered = (range: HoldingRange, scenario: Scenario): string =>
   joined(readInput(range.entered, measureOf(range, scenario)));
 
 /** Rounded to the side on which it still holds. */
-export function endWords(range: HoldingRange, side: "low" | "high", scenario: Scenario): string {
+function endWords(range: HoldingRange, side: "low" | "high", scenario: Scenario): string {
   const end = range[side];
   if (end.value === range.entered && end.flip === null) return "–";
   const words = sayTowards(end.value, measureOf(range, scenario), side === "low" ? "up" : "down");
   return end.flip === null ? `beyond ${words}` : words;
 }
 
-export function changeWords({ change }: HoldingEnd, { limits }: Scenario): string {
+function changeWords({ change }: HoldingEnd, { limits }: Scenario): string {
   if (change === null) return "nothing changes";
   if (change.kind === "outcome") return "another outcome";
   return `${(quantityNamed(limits[change.limit].quantity)?.label ?? limits[change.limit].quantity).toLowerCase()}: other verdict`;
