@@ -1,81 +1,21 @@
-import type { StoredScenario } from "@restband/api/contract";
-import { simulate, type Scenario } from "@restband/solver";
-import { act, cleanup, fireEvent, screen, waitFor, within } from "@testing-library/react";
+import { fireEvent, screen, waitFor, within } from "@testing-library/react";
 import { afterEach, beforeAll, beforeEach, describe, expect, it, vi } from "vitest";
 import { editing } from "../../../web/src/features/statement/draft/editing-part.ts";
-import { noteConnection } from "../../../web/src/api/connection.ts";
-import type { SolverJob } from "../../../web/src/compute/solver-job.ts";
 import { readScenario } from "../../../web/src/features/statement/exchange/read-scenario.ts";
-import {
-  fakeServer,
-  ines,
-  members,
-  ok,
-  project,
-  refuse,
-  session,
-  type Answers,
-  type Request,
-} from "../support/fake-server.ts";
+import { fakeServer, ok, ines } from "../support/fake-server.ts";
 import { openPage } from "../support/open-page.tsx";
 import { creepFeed, variant } from "../support/scenarios.ts";
+import { answer, at, beyondTitle, changeDamping, saves, seen } from "../support/scenario-page.tsx";
 
 // A whole page with the solver in one thread: seconds on a busy machine.
 vi.setConfig({ testTimeout: 30_000 });
 
-const beyond = { path: "contact.law.model", message: "not computed by this version" };
-const beyondTitle = "Beyond this version";
-
-// The solver itself, without a thread of its own; and no drawing library, which jsdom has no ground for.
-vi.mock("../../../web/src/compute/start-worker.ts", () => ({
-  startWorker: () => ({
-    run: ({ scenario, options }: SolverJob) =>
-      Promise.resolve(
-        scenario.title === beyondTitle ? { error: { ...beyond, faults: [beyond] } } : simulate(scenario, options),
-      ),
-    terminate: () => undefined,
-    onCrash: () => undefined,
-  }),
-}));
-vi.mock("../../../web/src/components/plot.tsx", () => ({
-  Plot: ({ label }: { label: string }) => <div role="img" aria-label={label} />,
-}));
-
-const id = "00000000-0000-4000-8000-000000000100";
-const at = `/projects/${project.id}/scenarios/${id}`;
-
-const stored = (content: Scenario = creepFeed, version = 3): StoredScenario => ({
-  id,
-  projectId: project.id,
-  version,
-  content,
-  digest: "0".repeat(64),
-  switchedOff: [],
-  archivedAt: null,
-  createdAt: project.createdAt,
-  updatedAt: "2026-12-01T14:02:00.000Z",
-  updatedBy: { accountId: members[1].accountId, name: "Tomas Wik" },
-});
-
-/** The server after a save: what came in, one version on. */
-const saved = ({ body, headers }: Request) =>
-  ok(stored((body as { content: Scenario }).content, Number(headers["If-Match"].replaceAll('"', "")) + 1));
-
-const seen = (content: Scenario = creepFeed, role = "editor", more: Answers = {}): Answers => ({
-  "GET /session": ok(session(ines)),
-  [`GET /projects/${project.id}`]: ok({ ...project, role }),
-  [`GET ${at}`]: ok(stored(content)),
-  [`PUT ${at}`]: saved,
-  ...more,
-});
-
-const saves = (requests: Request[]): Request[] => requests.filter(({ method }) => method === "PUT");
-const answer = (): Promise<HTMLElement> => screen.findByRole("heading", { level: 1 });
-
-async function changeDamping(user: ReturnType<typeof openPage>["user"], text: string): Promise<void> {
-  await user.click(await screen.findByRole("button", { name: /^Damping/ }));
-  await user.keyboard(`${text}{Enter}`);
-}
+vi.mock("../../../web/src/compute/start-worker.ts", async () =>
+  (await import("../support/scenario-page.tsx")).workerInOneThread(),
+);
+vi.mock("../../../web/src/components/plot.tsx", async () =>
+  (await import("../support/scenario-page.tsx")).plotWithoutDrawing(),
+);
 
 // A person comes after it is loaded.
 beforeAll(() => editing.ask());
@@ -171,162 +111,6 @@ describe("the page of a scenario", () => {
     const { user } = openPage(at);
     await user.click(await screen.findByRole("button", { name: "copy" }));
     expect(readScenario(await navigator.clipboard.readText()).scenario).toEqual(creepFeed);
-  });
-
-  it("takes a change back by Ctrl-Z, also while the field has the focus", async () => {
-    fakeServer(seen());
-    const { user } = openPage(at);
-    await user.click(await screen.findByRole("button", { name: /^Damping/ }));
-    await user.keyboard("8000");
-    await user.keyboard("{Control>}z{/Control}");
-    await waitFor(() => expect(screen.getByRole("textbox", { name: "Damping" })).toHaveValue("350"));
-    expect(screen.getByRole("button", { name: "Redo" })).toBeEnabled();
-    await user.keyboard("{Control>}{Shift>}Z{/Shift}{/Control}");
-    expect(await screen.findByRole("button", { name: "Damping: 8000 N·s/m" })).toBeInTheDocument();
-  });
-
-  it("takes a change back by Ctrl-Z on a narrow page too, whose buttons stand in a closed menu", async () => {
-    const isNarrow = { matches: true, addEventListener: () => undefined, removeEventListener: () => undefined };
-    vi.stubGlobal("matchMedia", () => isNarrow);
-    fakeServer(seen());
-    const { user } = openPage(at);
-    await changeDamping(user, "400");
-    expect(screen.queryByTitle("Undo")).not.toBeInTheDocument();
-    await user.keyboard("{Control>}z{/Control}");
-    expect(await screen.findByRole("button", { name: "Damping: 350 N·s/m" })).toBeInTheDocument();
-  });
-
-  it("does not undo an undo that is made while a save is under way", async () => {
-    let answerSave = (): void => undefined;
-    const put = (request: Request) =>
-      new Promise<ReturnType<typeof saved>>((resolve) => {
-        answerSave = () => resolve(saved(request));
-      });
-    const requests = fakeServer(seen(creepFeed, "editor", { [`PUT ${at}`]: put }));
-    const { user } = openPage(at);
-    await changeDamping(user, "400");
-    await waitFor(() => expect(saves(requests)).toHaveLength(1));
-    await user.click(screen.getByTitle("Undo")); // the header's: a message about what was brought in has one of its own
-    answerSave();
-    await waitFor(() => expect(saves(requests)).toHaveLength(2));
-    expect(saves(requests)[1].body).toMatchObject({ content: { body: { viscous: 350 } } });
-    expect(saves(requests)[1].headers["If-Match"]).toBe('"4"');
-    expect(screen.getByRole("button", { name: "Damping: 350 N·s/m" })).toBeInTheDocument();
-  });
-
-  it("sends what is waiting when the page is left at once", async () => {
-    const requests = fakeServer(seen());
-    const { user } = openPage(at);
-    await changeDamping(user, "400");
-    cleanup();
-    await waitFor(() => expect(saves(requests)).toHaveLength(1));
-    expect(saves(requests)[0].body).toMatchObject({ content: { body: { viscous: 400 } } });
-  });
-
-  it("takes a newer version of somebody else's over while nothing of its own is open", async () => {
-    let content = creepFeed;
-    let version = 3;
-    fakeServer(seen(creepFeed, "editor", { [`GET ${at}`]: () => ok(stored(content, version)) }));
-    openPage(at);
-    await answer();
-    content = variant({ body: { ...creepFeed.body, viscous: 8000 } });
-    version = 4;
-    // A connection lost and found has everything on the page read again.
-    act(() => noteConnection(false));
-    act(() => noteConnection(true));
-    expect(await screen.findByRole("button", { name: "Damping: 8000 N·s/m" })).toBeInTheDocument();
-  });
-
-  it("never sends what is refused, and says how many fields are open", async () => {
-    const requests = fakeServer(seen());
-    const { user } = openPage(at);
-    await changeDamping(user, "-5");
-    expect(await screen.findByText("saved, 1 field to put right")).toBeInTheDocument();
-    expect(await answer()).toHaveTextContent("26 times a second");
-    await act(() => new Promise((resolve) => setTimeout(resolve, 1000)));
-    expect(saves(requests)).toEqual([]);
-  });
-
-  it("keeps what was typed in this browser until the server has it", async () => {
-    fakeServer(seen(creepFeed, "editor", { [`PUT ${at}`]: refuse(503, "database-gone", "The database is gone.") }));
-    const first = openPage(at);
-    await changeDamping(first.user, "400");
-    await first.user.click(screen.getByRole("button", { name: /^Mass/ }));
-    await first.user.keyboard("heavy");
-    await screen.findByText(/^not saved since \d\d:\d\d, trying again/);
-    cleanup();
-
-    const requests = fakeServer(seen());
-    openPage(at);
-    expect(await screen.findByRole("button", { name: "Damping: 400 N·s/m" })).toBeInTheDocument();
-    expect(screen.getByRole("button", { name: "Mass: heavy" })).toBeInTheDocument();
-    await waitFor(() => expect(saves(requests)).toHaveLength(1));
-    expect(saves(requests)[0].body).toMatchObject({ content: { body: { viscous: 400, inertia: 120 } } });
-  });
-
-  it("shows both versions where somebody else saved meanwhile, and saves what is chosen", async () => {
-    const theirs = variant({ title: "Z carriage, oiled", body: { ...creepFeed.body, viscous: 777 } });
-    let isFirst = true;
-    const put = (request: Request) => {
-      const reply = isFirst
-        ? {
-            status: 409,
-            body: { error: { code: "conflict", message: "Changed.", fields: [], current: stored(theirs, 4) } },
-          }
-        : saved(request);
-      isFirst = false;
-      return reply;
-    };
-    const requests = fakeServer(seen(creepFeed, "editor", { [`PUT ${at}`]: put }));
-    const { user } = openPage(at);
-    await changeDamping(user, "400");
-    const dialog = within(await screen.findByRole("dialog", { name: "Two versions of this scenario" }));
-    expect(dialog.getByText(/^Tomas Wik saved version 4/)).toBeInTheDocument();
-    const damping = within(dialog.getByRole("group", { name: "Damping" }));
-    expect(damping.getByRole("radio", { name: /^yours 400/ })).toBeChecked();
-    expect(
-      within(dialog.getByRole("group", { name: "Title" })).getByRole("radio", { name: /^Tomas Wik/ }),
-    ).toBeChecked();
-    await user.click(damping.getByRole("radio", { name: /^Tomas Wik 777/ }));
-    await user.click(damping.getByRole("radio", { name: /^yours/ }));
-    await user.click(dialog.getByRole("button", { name: "Save this" }));
-    await waitFor(() => expect(saves(requests)).toHaveLength(2));
-    expect(saves(requests)[1].headers["If-Match"]).toBe('"4"');
-    expect(saves(requests)[1].body).toMatchObject({ content: { title: "Z carriage, oiled", body: { viscous: 400 } } });
-    expect(screen.queryByRole("dialog")).not.toBeInTheDocument();
-  });
-
-  it("says that it is archived, lets all be tried, and takes changes again once it is restored", async () => {
-    let archivedAt: string | null = "2026-12-01T15:00:00.000Z";
-    const requests = fakeServer({
-      ...seen(),
-      [`GET ${at}`]: () => ok({ ...stored(), archivedAt }),
-      [`POST ${at}/restore`]: () => {
-        archivedAt = null;
-        return { status: 204 };
-      },
-    });
-    const { user } = openPage(at);
-    await answer();
-    expect(screen.getByText("the scenario is archived")).toBeInTheDocument();
-    await changeDamping(user, "8000");
-    await screen.findByText("not saved: the scenario is archived");
-    await user.click(screen.getByRole("button", { name: "Restore" }));
-    await screen.findByText("saved");
-    await changeDamping(user, "8000");
-    await waitFor(() => expect(saves(requests)).toHaveLength(1));
-  });
-
-  it("lets a reader try everything and sends nothing", async () => {
-    const requests = fakeServer(seen(creepFeed, "reader"));
-    const { user } = openPage(at);
-    expect(await screen.findByText("you read this as a reader")).toBeInTheDocument();
-    await changeDamping(user, "8000");
-    expect(await screen.findByText("not saved: you are a reader")).toBeInTheDocument();
-    await waitFor(async () => expect(await answer()).toHaveTextContent("slides smoothly"));
-    await act(() => new Promise((resolve) => setTimeout(resolve, 1000)));
-    expect(saves(requests)).toEqual([]);
-    expect(localStorage).toHaveLength(0);
   });
 
   it("says which part is not computed, and keeps the scenario", async () => {
