@@ -7,6 +7,7 @@ import { run } from "./processes.mjs";
 import { main, root, say, Trouble } from "./project.mjs";
 import { findRunning } from "./running.mjs";
 import { untilStopped } from "./shutdown.mjs";
+import { signingKey } from "./signing-key.mjs";
 
 /** Prints a link, good once and for seven days, by which the person of an address becomes a site administrator. */
 await main(() => {
@@ -27,6 +28,7 @@ async function createLink(email, atEnd) {
     RESTBAND_MIGRATIONS_URL: database.urls.migrations,
     RESTBAND_GRANT_TO: database.grantTo,
     RESTBAND_DEMO_PASSWORD: demoPassword(),
+    RESTBAND_SIGNING_KEY: signingKey(),
   });
   const output = await runBuilt("create-administrator", [email], { RESTBAND_DATABASE_URL: database.urls.server });
   const { token, fault } = JSON.parse(output);
