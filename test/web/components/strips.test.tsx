@@ -82,7 +82,6 @@ describe("the margin ruler", () => {
 
 it("powers of ten are set small by the page", () => {
   const { container } = render(<PowerText text="9.2·10⁻¹³ mJ" />);
-  expect(container).toContainHTML("9.2·10");
   expect(container.querySelector("sup")).toHaveTextContent("−13");
   expect(container).toHaveTextContent("9.2·10−13 mJ");
 });
