@@ -209,7 +209,7 @@ test("A10, published at tutorsglobe.com (…51688231): F = 0.15 k q0 loses 0.60 
   expect(result.quantities.halfCycles).toBe(3);
 });
 
-test("A11, published at brainmass.com/physics/work/4960: n = (k x0/f − 1)/4 oscillations, where that is a multiple of 1/2", () => {
+test("A11, published at brainmass.com (4960): n = (k x0/f − 1)/4 oscillations, where that is a multiple of 1/2", () => {
   for (const halves of [1, 2, 5, 12, 31]) {
     const x0 = 2 * halves + 1;
     const { result } = release({ inertia: 1, stiffness: 1, normal: 1, fixed: 1, kinetic: 1, x0 });
