@@ -1,7 +1,6 @@
-import { parentPort, workerData } from "node:worker_threads";
+import { parentPort } from "node:worker_threads";
 import { recompute } from "./recompute.ts";
-import type { KeptResult } from "./revisions-schema.ts";
+import type { RunOrder } from "./recompute-pool.ts";
 
-/** One run on a thread of its own, which whoever started it may end at any time. */
-const { text, claimed } = workerData as { text: string; claimed: KeptResult };
-parentPort?.postMessage(recompute(text, claimed));
+/** Runs on a thread of its own, one after another; whoever started it may end it at any time. */
+parentPort?.on("message", ({ scenario, claimed }: RunOrder) => parentPort?.postMessage(recompute(scenario, claimed)));

@@ -27,10 +27,9 @@ export interface Hindrance {
 
 /**
  * Runs a scenario and compares it with what is claimed of it.
- * @param text a checked scenario's canonical text
+ * @param scenario checked, with the points of all its records
  */
-export function recompute(text: string, claimed: KeptResult): Recomputed | Hindrance {
-  const scenario = JSON.parse(text) as Scenario;
+export function recompute(scenario: Scenario, claimed: KeptResult): Recomputed | Hindrance {
   const own = simulate(scenario, { samples: POINTS });
   if ("error" in own) return own.error;
   const result = keptResultOf(own);

@@ -1,4 +1,4 @@
-import { canonicalText } from "@restband/solver";
+import { canonicalText, type Scenario } from "@restband/solver";
 import { saversOf, recordAct } from "../activity/activity-service.ts";
 import { holdChain } from "../chain/chain.ts";
 import type { Database } from "../database/database.ts";
@@ -37,12 +37,12 @@ export function createRevisionsService(database: Database, recompute: Recompute)
     return {
       ...{ projectId, scenarioId, scenarioVersion: seen, title: stored.content.title, text, digest: stored.digest },
       ...{ units: freeze.units, withoutOrigin: pathsWithoutOrigin(stored.content), frozenBy },
-      ...(await outcomeOf(text, freeze)),
+      ...(await outcomeOf(stored.content, freeze)),
     };
   }
 
-  async function outcomeOf(text: string, { result: claimed, trace }: Freeze) {
-    const own = await recompute(text, claimed);
+  async function outcomeOf(scenario: Scenario, { result: claimed, trace }: Freeze) {
+    const own = await recompute({ scenario, claimed });
     if (own === null) return { isRecomputed: false, isSensitive: false, result: claimed, trace };
     if ("message" in own) throw refusedContent("not-computed", [{ path: `content.${own.path}`, message: own.message }]);
     if (own.agreement.verdict === "differs")
