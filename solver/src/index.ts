@@ -55,6 +55,7 @@ export {
   cellOutcomes,
   cellRefusals,
   keptAt,
+  quantityAt,
   readRow,
   rowHead,
   rowLength,
@@ -97,4 +98,5 @@ export {
   type CheckedThreshold,
   type ThresholdPlan,
 } from "./explore/threshold/check-threshold-question.ts";
-export { boundarySearch, type BoundaryPiece, type BoundaryPoint } from "./explore/sweep/boundary-search.ts";
+export * from "./explore/sweep/limit-lines.ts";
+export { textbookBeside, type TextbookBeside } from "./explore/sweep/textbook-beside.ts";

@@ -11,6 +11,7 @@ const names = [
   "quiet",
   "slip",
   "stick",
+  "broken",
   "band",
   "band-line",
   "measured",

@@ -70,9 +70,7 @@ export function readRow(row: Float64Array, offset: number, plan: RowPlan, limits
     outcome: isRefused ? null : cellOutcomes[code],
     refusal: isRefused ? refusalOf(code) : null,
     kept: Array.from({ length: limits }, (_, i) => keptAt(row[offset + 1], i)),
-    quantities: plan.quantities.map((_, i) =>
-      isRefused || isAbsent(row[offset + 2], i) ? null : row[offset + rowHead + i],
-    ),
+    quantities: plan.quantities.map((_, i) => quantityAt(row, offset, i)),
   };
 }
 
@@ -85,7 +83,11 @@ export function keptAt(limits: number, i: number): boolean | null {
   return digit === 1 ? true : digit === 2 ? false : null;
 }
 
-const isAbsent = (bits: number, i: number): boolean => Math.floor(bits / 2 ** i) % 2 === 1;
+/** The i-th quantity of the row at an offset; null where it has no value, and in a cell without an outcome. */
+export function quantityAt(row: Float64Array, offset: number, i: number): number | null {
+  const isAbsent = row[offset] < 0 || Math.floor(row[offset + 2] / 2 ** i) % 2 === 1;
+  return isAbsent ? null : row[offset + rowHead + i];
+}
 
 /** The number that holds the verdicts of all limits. */
 export function limitsCode(verdicts: readonly LimitVerdict[]): number {

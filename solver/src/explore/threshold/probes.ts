@@ -95,20 +95,19 @@ export function bracketsOf(line: Line, ends: readonly ThresholdEnd[]): Bracket[]
     .flatMap((above, i) => (isKnownMet(ends[i]) === isKnownMet(above) ? [] : [{ line, below: ends[i], above }]));
 }
 
-/** Halves brackets, a run for each at a time, until all are as close as people read numbers, or so many times. */
-export function* refine(brackets: readonly Bracket[], count: RunCount, most = Infinity): Exploring<Bracket[]> {
+/** Halves brackets, a run for each at a time, until all are as close as people read numbers. */
+export function* refine(brackets: readonly Bracket[], count: RunCount): Exploring<Bracket[]> {
   const all = [...brackets];
-  for (let halvings = 0; halvings < most; halvings++) {
+  for (;;) {
     const next = all.flatMap((bracket, i) => {
       const value = valueBetween(bracket.below.value, bracket.above.value, bracket.line.range, bracket.line.bounds);
       return value === null ? [] : [{ i, line: bracket.line, value }];
     });
-    if (next.length === 0) break;
+    if (next.length === 0) return all;
     const ends = yield* runProbes(next, count);
     next.forEach(({ i }, k) => {
       const isBelow = isKnownMet(ends[k]) === isKnownMet(all[i].below);
       all[i] = isBelow ? { ...all[i], below: ends[k] } : { ...all[i], above: ends[k] };
     });
   }
-  return all;
 }

@@ -73,7 +73,7 @@ function withGrowth(target: Target): Target {
 }
 
 /** Whether a run meets a target; null where it cannot be judged. */
-export function isMet(target: Target, { outcome, limits }: RunFigures): boolean | null {
+function isMet(target: Target, { outcome, limits }: RunFigures): boolean | null {
   if (target.kind === "outcome") return outcome === null ? null : target.outcomes.includes(outcome) === target.isWanted;
   if (target.kind === "limit") return limits[target.limit].kept;
   if (limits.some(({ kept }) => kept === false)) return false;

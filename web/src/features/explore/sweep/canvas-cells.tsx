@@ -3,13 +3,9 @@ import { useEffect, useRef } from "react";
 import { usePlotTheme, type PlotTheme } from "../../../components/plot-theme.ts";
 import type { SweepCells } from "./sweep-cells.ts";
 import { cornerOf, type MapFrame } from "./map-frame.ts";
-import { outcomeMarks, type OutcomeMark } from "./outcome-marks.ts";
+import { outcomeMarks, verdictMarks, type OutcomeMark } from "./outcome-marks.ts";
 import { rampColours } from "./colour-ramp.ts";
-
-/** What a cell of a drawn map shows: its outcome, or a value between the ends of a scale. */
-export type Shown =
-  | { readonly kind: "outcome" }
-  | { readonly kind: "quantity"; readonly place: number; readonly low: number; readonly high: number };
+import { shareOn, type Shown } from "./shown.ts";
 
 interface CanvasCellsProps {
   cells: SweepCells;
@@ -60,13 +56,19 @@ function paintOf(context: CanvasRenderingContext2D, cells: SweepCells, shown: Sh
       return code === null || code < 0 ? null : patterns[code];
     };
   }
+  if (shown.kind === "limit") {
+    const [kept, broken] = [verdictMarks.kept, verdictMarks.broken].map((mark) => patternOf(context, mark, theme));
+    return (cell) => {
+      const isKept = cells.kept(cell, shown.limit);
+      return isKept === null ? null : isKept ? kept : broken;
+    };
+  }
   const colours = rampColours(theme);
-  const span = shown.high - shown.low || 1;
   return (cell) => {
-    const value = cells.read(cell)?.quantities[shown.place] ?? null;
-    if (value === null) return null;
-    const share = Math.min(1, Math.max(0, (value - shown.low) / span));
-    return colours[Math.min(colours.length - 1, Math.floor(share * colours.length))];
+    const value = cells.quantity(cell, shown.place);
+    return value === null
+      ? null
+      : colours[Math.min(colours.length - 1, Math.floor(shareOn(shown, value) * colours.length))];
   };
 }
 
@@ -76,7 +78,7 @@ function patternOf(
   { token, hatch }: OutcomeMark,
   theme: PlotTheme,
 ): string | CanvasPattern {
-  const colour = token === "broken" ? theme.ink : theme[token];
+  const colour = theme[token];
   if (hatch === "plain") return colour;
   const size = hatch === "dots" || hatch === "diagonal" ? 6 : 8;
   const tile = document.createElement("canvas");

@@ -1,7 +1,7 @@
 import { contours as contoursOf } from "d3-contour";
 import { memo } from "react";
-import type { Shown } from "./canvas-cells.tsx";
 import type { MapFrame } from "./map-frame.ts";
+import { shareOn, type Shown } from "./shown.ts";
 import type { SweepCells } from "./sweep-cells.ts";
 
 interface ContoursProps {
@@ -16,12 +16,12 @@ interface ContoursProps {
 export const Contours = memo(function Contours({ cells, frame, first, shown }: ContoursProps) {
   const { columns, rows, left, top, cellWidth, cellHeight } = frame;
   if (columns < 2 || rows < 2 || shown.high <= shown.low) return null;
-  const values = Array.from({ length: columns * rows }, (_, i) => {
+  const shares = Array.from({ length: columns * rows }, (_, i) => {
     const [column, row] = [i % columns, rows - 1 - Math.floor(i / columns)];
-    return cells.read(first + row * columns + column)?.quantities[shown.place] ?? shown.low;
+    const value = cells.quantity(first + row * columns + column, shown.place);
+    return value === null ? 0 : shareOn(shown, value);
   });
-  const thresholds = contourLevels(shown.low, shown.high);
-  const lines = contoursOf().size([columns, rows]).thresholds(thresholds)(values);
+  const lines = contoursOf().size([columns, rows]).thresholds(levels)(shares);
   return (
     <g className="fill-none stroke-ink" strokeWidth={1} opacity={0.75}>
       {lines.map(({ value, coordinates }) => (
@@ -46,7 +46,4 @@ export const Contours = memo(function Contours({ cells, frame, first, shown }: C
 });
 
 const LEVELS = 6;
-
-/** The values of the lines between the ends of a scale. */
-export const contourLevels = (low: number, high: number): number[] =>
-  Array.from({ length: LEVELS - 1 }, (_, i) => low + ((i + 1) * (high - low)) / LEVELS);
+const levels = Array.from({ length: LEVELS - 1 }, (_, i) => (i + 1) / LEVELS);

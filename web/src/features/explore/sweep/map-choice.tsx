@@ -1,55 +1,29 @@
-import type { SweepPlan } from "@restband/solver";
-import { useMemo, useState } from "react";
+import type { Scenario, SweepPlan } from "@restband/solver";
 import { PlainSelect } from "../../../components/select.tsx";
 import { quantityNamed } from "../../../format/quantities.ts";
-import type { Shown } from "./canvas-cells.tsx";
-import type { SweepCells } from "./sweep-cells.ts";
-
-const OUTCOME = "outcome";
-
-/** What the map shows, and the scale it is shown on: the least and the largest value there are. */
-export function useShown(cells: SweepCells, edition: number) {
-  const [choice, choose] = useState<string>(OUTCOME);
-  const shown = useMemo(
-    (): Shown =>
-      choice === OUTCOME
-        ? { kind: "outcome" }
-        : scaleOf(
-            cells,
-            cells.plan.quantities.findIndex((name) => name === choice),
-          ),
-    // The cells are the same object all along: the edition tells that there are more of them.
-    // eslint-disable-next-line react-hooks/exhaustive-deps
-    [choice, cells, edition],
-  );
-  return { choice, shown, choose };
-}
-
-function scaleOf(cells: SweepCells, place: number): Shown {
-  let [low, high] = [Infinity, -Infinity];
-  for (let cell = 0; cell < cells.count; cell++) {
-    const value = cells.read(cell)?.quantities[place] ?? null;
-    if (value === null) continue;
-    low = Math.min(low, value);
-    high = Math.max(high, value);
-  }
-  return low <= high ? { kind: "quantity", place, low, high } : { kind: "quantity", place, low: 0, high: 0 };
-}
+import { limitChoice, type Shown } from "./shown.ts";
 
 interface MapChoiceProps {
   plan: SweepPlan;
+  scenario: Scenario;
   choice: string;
   onChoose: (choice: string) => void;
+  shown: Shown;
+  onLog: (isLog: boolean) => void;
   isBoth: boolean;
   isDown: boolean;
   onBranch: (isDown: boolean) => void;
 }
 
-/** Outcome or one of the quantities; which branch, where there are two. */
-export function MapChoice({ plan, choice, onChoose, isBoth, isDown, onBranch }: MapChoiceProps) {
+const nameOf = (quantity: string): string => quantityNamed(quantity)?.label ?? quantity;
+
+/** Outcome, a limit or one of the quantities, on which scale; which branch, where there are two. */
+export function MapChoice(props: MapChoiceProps) {
+  const { plan, scenario, choice, onChoose, shown, onLog, isBoth, isDown, onBranch } = props;
   const choices = [
-    { value: OUTCOME, label: "Outcome" },
-    ...plan.quantities.map((name) => ({ value: name, label: quantityNamed(name)?.label ?? name })),
+    { value: "outcome", label: "Outcome" },
+    ...scenario.limits.map(({ quantity }, i) => ({ value: limitChoice(i), label: `Limit: ${nameOf(quantity)}` })),
+    ...plan.quantities.map((name) => ({ value: name, label: nameOf(name) })),
   ];
   return (
     <>
@@ -59,6 +33,17 @@ export function MapChoice({ plan, choice, onChoose, isBoth, isDown, onBranch }: 
         value={choice}
         onChange={(event) => onChoose(event.target.value)}
       />
+      {shown.kind === "quantity" && shown.canBeLog && (
+        <PlainSelect
+          aria-label="Scale"
+          choices={[
+            { value: "even", label: "on an even scale" },
+            { value: "log", label: "on a scale of ratios" },
+          ]}
+          value={shown.isLog ? "log" : "even"}
+          onChange={(event) => onLog(event.target.value === "log")}
+        />
+      )}
       {isBoth && (
         <PlainSelect
           aria-label="Branch"

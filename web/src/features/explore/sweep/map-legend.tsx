@@ -3,9 +3,9 @@ import { usePlotTheme } from "../../../components/plot-theme.ts";
 import { say } from "../../../format/format-quantity.ts";
 import { outcomeWords } from "../../../format/outcomes.ts";
 import { measureOfQuantity, quantityNamed } from "../../../format/quantities.ts";
-import type { Shown } from "./canvas-cells.tsx";
 import { rampColours } from "./colour-ramp.ts";
-import { outcomeMarks } from "./outcome-marks.ts";
+import { outcomeMarks, verdictMarks } from "./outcome-marks.ts";
+import { valueOn, type Shown } from "./shown.ts";
 import type { SweepCells } from "./sweep-cells.ts";
 
 interface MapLegendProps {
@@ -20,6 +20,7 @@ interface MapLegendProps {
 /** What the patterns of the map mean; or the scale of the quantity, with its ends. */
 export function MapLegend({ shown, cells, quantity, scenario }: MapLegendProps) {
   if (shown.kind === "quantity") return <Scale shown={shown} quantity={quantity} scenario={scenario} />;
+  if (shown.kind === "limit") return <Verdicts />;
   const codes = new Set<number>();
   let isPending = false;
   for (let cell = 0; cell < cells.count; cell++) {
@@ -53,6 +54,22 @@ export function MapLegend({ shown, cells, quantity, scenario }: MapLegendProps) 
           still to come
         </li>
       )}
+    </ul>
+  );
+}
+
+function Verdicts() {
+  return (
+    <ul className="mt-3 flex flex-wrap gap-x-6 gap-y-2 text-13 text-quiet" aria-label="What the patterns mean">
+      {(["kept", "broken"] as const).map((verdict) => (
+        <li key={verdict} className="flex items-center gap-2">
+          <svg width="36" height="22" aria-hidden="true" className="bg-raised forced-color-adjust-none">
+            <rect width={36} height={22} fill={verdictMarks[verdict].fill} />
+          </svg>
+          {verdict}
+        </li>
+      ))}
+      <li>Open: cannot be judged, or no answer.</li>
     </ul>
   );
 }
@@ -98,7 +115,9 @@ function Scale({ shown, quantity, scenario }: ScaleProps) {
         ))}
       </svg>
       <span className="figures">{say(shown.high, measure)}</span>
-      <span>Lines part the scale in six.</span>
+      <span>
+        Lines part the scale in six{shown.isLog && <> by ratio; its middle is {say(valueOn(shown, 0.5), measure)}</>}.
+      </span>
     </div>
   );
 }

@@ -21,3 +21,9 @@ export const outcomeMarks: Record<Outcome, OutcomeMark> = {
   "too-short": { fill: "url(#hatch-never)", token: "quiet", hatch: "dots" },
   "not-settled": { fill: "url(#hatch-not-settled)", token: "slip", hatch: "waves" },
 };
+
+/** Likewise of a limit: kept is solid, broken is crossed, as on its ruler. */
+export const verdictMarks = {
+  kept: outcomeMarks["smooth-sliding"],
+  broken: outcomeMarks.growing,
+} as const satisfies Record<string, OutcomeMark>;

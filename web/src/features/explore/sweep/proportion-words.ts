@@ -1,10 +1,10 @@
-import type { Scenario, SweepPlan } from "@restband/solver";
+import type { LimitLine, Scenario, SweepPlan } from "@restband/solver";
 import { nounOf } from "../../../format/noun.ts";
-import { outcomeWords } from "../../../format/outcomes.ts";
 import { exploreField } from "../explore-field.ts";
 import { sayTowards } from "../say-value.ts";
 import { say } from "../../../format/format-quantity.ts";
-import type { LimitLine } from "./limit-lines.ts";
+import { sideWords } from "./line-names.ts";
+import { isSmoothLimit, longestOf } from "./use-limit-lines.ts";
 
 /** Points that a rule of proportion may not miss by more than so much. */
 const MOST_OFF = 0.03;
@@ -16,8 +16,7 @@ const FEWEST = 4;
  */
 export function proportionWords(lines: readonly LimitLine[], plan: SweepPlan, scenario: Scenario): string | null {
   if (plan.axes.length < 2) return null;
-  const limits = lines.filter(({ between }) => between[1] === "smooth-sliding");
-  const line = limits.reduce<LimitLine | null>((a, b) => (a && a.points.length >= b.points.length ? a : b), null);
+  const line = longestOf(lines.filter(isSmoothLimit));
   if (!line || line.points.length < FEWEST) return null;
   const ratios = line.points.map(({ across, up }) => up / across);
   const mean = ratios.reduce((sum, each) => sum + each, 0) / ratios.length;
@@ -26,5 +25,5 @@ export function proportionWords(lines: readonly LimitLine[], plan: SweepPlan, sc
   if (!across || !up) return null;
   const step = 10 ** Math.floor(Math.log10(Math.max(...line.points.map((point) => Math.abs(point.across)))));
   const needed = sayTowards(mean * step, up.measure, "up", { digits: 2 });
-  return `Smooth sliding needs about ${needed} of ${up.name} for every ${say(step, across.measure)} of ${across.name}. Below that the ${nounOf(scenario)} ${outcomeWords[line.between[0]]}.`;
+  return `Smooth sliding needs about ${needed} of ${up.name} for every ${say(step, across.measure)} of ${across.name}. Below that the ${nounOf(scenario)} ${sideWords(line.between[0])}.`;
 }

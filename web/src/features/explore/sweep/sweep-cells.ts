@@ -1,4 +1,13 @@
-import { cellCount, readRow, rowLength, tileCells, type CellFigures, type SweepPlan } from "@restband/solver";
+import {
+  cellCount,
+  keptAt,
+  quantityAt,
+  readRow,
+  rowLength,
+  tileCells,
+  type CellFigures,
+  type SweepPlan,
+} from "@restband/solver";
 
 /** The cells of a sweep that are there so far, by their number. */
 export class SweepCells {
@@ -53,5 +62,15 @@ export class SweepCells {
   /** The outcome's code alone, negative where it is refused; null while the cell is not there. */
   code(cell: number): number | null {
     return this.isThere[cell] === 1 ? this.figures[cell * this.length] : null;
+  }
+
+  /** The value of the quantity at a place of the plan; null where there is none, and while the cell is not there. */
+  quantity(cell: number, place: number): number | null {
+    return this.isThere[cell] === 1 ? quantityAt(this.figures, cell * this.length, place) : null;
+  }
+
+  /** The verdict of a limit; null where it cannot be judged, and while the cell is not there. */
+  kept(cell: number, limit: number): boolean | null {
+    return this.isThere[cell] === 1 ? keptAt(this.figures[cell * this.length + 1], limit) : null;
   }
 }

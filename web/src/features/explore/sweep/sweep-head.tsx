@@ -1,6 +1,5 @@
 import type { StoredExploration } from "@restband/api/contract";
-import type { Scenario } from "@restband/solver";
-import type { LimitLine } from "./limit-lines.ts";
+import type { LimitLine, Scenario } from "@restband/solver";
 import { proportionWords } from "./proportion-words.ts";
 import type { SweepCells } from "./sweep-cells.ts";
 import { sweepHeadline } from "./sweep-headline.ts";

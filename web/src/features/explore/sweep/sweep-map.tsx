@@ -1,17 +1,21 @@
+import type { LimitLine, Scenario } from "@restband/solver";
 import { useId, type KeyboardEvent, type MouseEvent } from "react";
 import { useWidth } from "../../../components/use-width.ts";
 import { outcomeWords } from "../../../format/outcomes.ts";
 import type { AxisScale } from "./axis-scale.ts";
-import { CanvasCells, type Shown } from "./canvas-cells.tsx";
-import type { LimitLine } from "./limit-lines.ts";
-import { cellAt, cornerOf, mapFrame, pointOf, type MapFrame } from "./map-frame.ts";
-import { regionLabels } from "./region-labels.ts";
+import { CanvasCells } from "./canvas-cells.tsx";
+import { MapAxes } from "./map-axes.tsx";
+import { cellAt, cornerOf, mapFrame, type MapFrame } from "./map-frame.ts";
+import { MapLines } from "./map-lines.tsx";
+import { regionLabels, type RegionLabel } from "./region-labels.ts";
+import type { Shown } from "./shown.ts";
 import { StripCells } from "./strip-cells.tsx";
 import type { SweepCells } from "./sweep-cells.ts";
 import { Contours } from "./contours.tsx";
 
 interface SweepMapProps {
   cells: SweepCells;
+  scenario: Scenario;
   across: AxisScale;
   up: AxisScale | null;
   /** Number of the first cell of the branch shown. */
@@ -29,10 +33,11 @@ const MOST_STRIPS = 1600;
 
 /** The map of a sweep: cells, searched lines, names of the regions, axes; the arrow keys move the selection. */
 export function SweepMap(props: SweepMapProps) {
-  const { cells, across, up, first, shown, selected, onSelect, onOpen, edition } = props;
+  const { cells, scenario, across, up, first, shown, lines, selected, onSelect, onOpen, edition } = props;
   const [ref, width] = useWidth<HTMLDivElement>(834);
   const frame = mapFrame(width, across, up);
   const asStrips = shown.kind === "outcome" && frame.columns * frame.rows <= MOST_STRIPS;
+  const labels = shown.kind !== "quantity" && up ? regionLabels(cells, first, frame, shown) : [];
   const labelId = useId();
   const press = (event: KeyboardEvent): void => {
     const moved = movedBy(event.key, selected ?? 0, frame);
@@ -70,9 +75,9 @@ export function SweepMap(props: SweepMapProps) {
         >
           {asStrips && <StripCells {...{ cells, frame, first, edition }} />}
           {shown.kind === "quantity" && up && <Contours {...{ cells, frame, first, shown, edition }} />}
-          {up && <Lines frame={frame} across={across} up={up} lines={props.lines} />}
-          {shown.kind === "outcome" && up && <Regions frame={frame} cells={cells} first={first} edition={edition} />}
-          <Axes frame={frame} across={across} up={up} />
+          {up && <MapLines {...{ frame, across, up, shown, lines, scenario }} taken={labels} />}
+          <Regions labels={labels} />
+          <MapAxes {...{ frame, across, up, selected }} />
           {selected !== null && <Selection frame={frame} cell={selected} />}
         </svg>
       </div>
@@ -117,43 +122,9 @@ function Selection({ frame, cell }: { frame: MapFrame; cell: number }) {
   );
 }
 
-interface LinesProps {
-  frame: MapFrame;
-  across: AxisScale;
-  up: AxisScale;
-  lines: readonly LimitLine[];
-}
-
-/** Thick: where sliding ends. Dashed: every other change. */
-function Lines({ frame, across, up, lines }: LinesProps) {
-  return lines.map(({ between, points }, i) => {
-    const places = points.flatMap((point) => {
-      const [a, u] = [across.placeOf(point.across), up.placeOf(point.up)];
-      return a === null || u === null ? [] : [pointOf(frame, a, u)];
-    });
-    if (places.length === 0) return null;
-    const d = places.map(({ x, y }, k) => `${k === 0 ? "M" : "L"}${x.toFixed(1)} ${y.toFixed(1)}`).join("");
-    const isLimit = between.includes("smooth-sliding");
-    if (places.length === 1)
-      return <circle key={i} cx={places[0].x} cy={places[0].y} r={3} className="fill-ink stroke-paper" />;
-    return (
-      <g key={i}>
-        <path d={d} className="fill-none stroke-paper" strokeWidth={isLimit ? 6.5 : 4} strokeLinejoin="round" />
-        <path
-          d={d}
-          className="fill-none stroke-ink"
-          strokeWidth={isLimit ? 2.5 : 1.5}
-          strokeDasharray={isLimit ? undefined : "5 4"}
-          strokeLinejoin="round"
-        />
-      </g>
-    );
-  });
-}
-
 /** The name of each region, on plain ground, where it is widest. */
-function Regions({ frame, cells, first }: { frame: MapFrame; cells: SweepCells; first: number; edition: number }) {
-  return regionLabels(cells, first, frame).map(({ words, x, y, width }) => (
+function Regions({ labels }: { labels: readonly RegionLabel[] }) {
+  return labels.map(({ words, x, y, width }) => (
     <g key={words}>
       <rect x={x - width / 2} y={y - 12} width={width} height={23} rx={2} className="fill-paper" opacity={0.94} />
       <text x={x} y={y + 5} textAnchor="middle" className="fill-ink text-[15px] font-bold">
@@ -161,44 +132,4 @@ function Regions({ frame, cells, first }: { frame: MapFrame; cells: SweepCells; 
       </text>
     </g>
   ));
-}
-
-function Axes({ frame, across, up }: { frame: MapFrame; across: AxisScale; up: AxisScale | null }) {
-  const bottom = frame.top + frame.rows * frame.cellHeight;
-  const right = frame.left + frame.columns * frame.cellWidth;
-  const name = ({ name: text, unit }: AxisScale): string => (unit.label === "" ? text : `${text}, ${unit.label}`);
-  return (
-    <g className="text-[12.5px]">
-      {across.ticks.map(({ place, text }) => {
-        const { x } = pointOf(frame, place, 0);
-        return (
-          <g key={text}>
-            <path d={`M${x} ${bottom + 1}v5`} className="stroke-edge" />
-            <text x={x} y={bottom + 19} textAnchor="middle" className="figures fill-ink">
-              {text}
-            </text>
-          </g>
-        );
-      })}
-      <text x={right} y={bottom + 40} textAnchor="end" className="fill-quiet text-[13px]">
-        {name(across)}
-      </text>
-      {up?.ticks.map(({ place, text }) => {
-        const { y } = pointOf(frame, 0, place);
-        return (
-          <g key={text}>
-            <path d={`M${frame.left - 6} ${y}h5`} className="stroke-edge" />
-            <text x={frame.left - 10} y={y + 4} textAnchor="end" className="figures fill-ink">
-              {text}
-            </text>
-          </g>
-        );
-      })}
-      {up && (
-        <text x={0} y={14} className="fill-quiet text-[13px]">
-          {name(up)}
-        </text>
-      )}
-    </g>
-  );
 }

@@ -1,28 +1,28 @@
 import type { StoredExploration } from "@restband/api/contract";
-import { cellCount, type Scenario, type SweepPlan } from "@restband/solver";
-import { useEffect, useMemo, useState, type ReactNode } from "react";
+import { cellCount, type Scenario } from "@restband/solver";
+import { useMemo, useState, type ReactNode } from "react";
 import { Button } from "../../../components/button.tsx";
 import { fileNameOf, saveFile } from "../../../components/save-file.ts";
-import { useExploring } from "../../../compute/use-exploring.ts";
 import type { Computed } from "../../../compute/use-run.ts";
 import { useUnitSystem } from "../../../format/unit-system.ts";
 import { TileProgress } from "../kept/tile-progress.tsx";
-import { tileRunOf, type TileRun } from "../kept/tile-run.ts";
+import { tileRunOf } from "../kept/tile-run.ts";
 import { useTileRun } from "../kept/use-tile-run.ts";
 import { storedSweep, sweepWork } from "./stored-sweep.ts";
-import type { SweepCells } from "./sweep-cells.ts";
 import { sweepHeadline } from "./sweep-headline.ts";
 import { axisScale } from "./axis-scale.ts";
-import { searchLimitLines, type LimitLine } from "./limit-lines.ts";
-import { MapChoice, useShown } from "./map-choice.tsx";
+import { MapChoice } from "./map-choice.tsx";
 import { MapLegend } from "./map-legend.tsx";
+import { MapNotes } from "./map-notes.tsx";
 import { SelectedCell } from "./selected-cell.tsx";
+import { useShown } from "./shown.ts";
 import { SolveElsewhere } from "./solve-elsewhere.tsx";
 import { sweepCsv } from "./sweep-csv.ts";
 import { SweepHead } from "./sweep-head.tsx";
 import { SweepMap } from "./sweep-map.tsx";
 import { SweepTable } from "./sweep-table.tsx";
 import { LineFamily } from "./line-family.tsx";
+import { useLimitLines } from "./use-limit-lines.ts";
 
 interface SweepViewProps {
   projectId: string;
@@ -59,20 +59,23 @@ export function SweepView({ projectId, stored, canEdit, isFresh, answer, open, c
     () => Math.floor(across.count / 3) + across.count * Math.floor((up?.count ?? 1) / 2),
   );
   const [isTable, setTable] = useState(false);
-  const { choice, shown, choose } = useShown(cells, edition);
-  const lines = useLimitLines(run, scenario, plan);
+  const { choice, shown, choose, setLog } = useShown(cells, edition);
+  const lines = useLimitLines(run, scenario, plan, shown);
   const selectedCell = first + selected;
   return (
     <>
-      <SweepHead stored={stored} scenario={scenario} cells={cells} lines={lines.lines} edition={edition} />
+      <SweepHead stored={stored} scenario={scenario} cells={cells} lines={lines.outcomes.lines} edition={edition} />
       <div className="grid gap-x-12 gap-y-8 border-t border-line pt-6 wide:grid-cols-[minmax(0,1fr)_388px]">
         <div className="min-w-0">
           <TileProgress run={run} stored={stored} canEdit={canEdit} noun="cells" />
           <div className="my-4 flex flex-wrap items-center gap-3">
             <MapChoice
               plan={plan}
+              scenario={scenario}
               choice={choice}
               onChoose={choose}
+              shown={shown}
+              onLog={setLog}
               isBoth={isBoth}
               isDown={isDown}
               onBranch={setDown}
@@ -98,12 +101,13 @@ export function SweepView({ projectId, stored, canEdit, isFresh, answer, open, c
           ) : (
             <>
               <SweepMap
-                {...{ cells, across, up, first, shown, selected, edition }}
-                lines={first === 0 && !isBoth ? lines.lines : []}
+                {...{ cells, scenario, across, up, first, shown, selected, edition }}
+                lines={lines.shown.lines}
                 onSelect={setSelected}
                 onOpen={open && (() => document.getElementById("open-cell")?.click())}
               />
               <MapLegend shown={shown} cells={cells} quantity={choice} scenario={scenario} edition={edition} />
+              <MapNotes found={lines.shown} shown={shown} plan={plan} scenario={scenario} />
               {shown.kind === "quantity" && (
                 <div className="mt-6">
                   <LineFamily cells={cells} scenario={scenario} across={across} up={up} place={shown.place} />
@@ -126,15 +130,3 @@ export function SweepView({ projectId, stored, canEdit, isFresh, answer, open, c
     </>
   );
 }
-
-/** The searched boundaries, once all cells are there; of one field there are none. */
-function useLimitLines(run: TileRun<SweepCells>, scenario: Scenario, plan: SweepPlan): { lines: readonly LimitLine[] } {
-  const search = useExploring<LimitLine[]>();
-  const { begin } = search;
-  const isWanted = run.isComplete && plan.axes.length === 2 && plan.continuation === "none";
-  useEffect(() => {
-    if (isWanted) void begin(searchLimitLines(scenario, plan, run.store));
-  }, [begin, isWanted, plan, run, scenario]);
-  return { lines: search.state.kind === "done" ? search.state.value : none };
-}
-const none: readonly LimitLine[] = [];
