@@ -1,6 +1,6 @@
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { insertOneTimeLink } from "../../api/src/accounts/one-time-links-store.ts";
-import { type Role, type RouteName, roles, routes, type Session } from "../../api/src/contract.ts";
+import { type Role, type RouteName, roles, routes } from "../../api/src/contract.ts";
 import { permissions, permit } from "../../api/src/middleware/permit.ts";
 import type { Browser, Request } from "../support/browser.ts";
 import { cellsOf, createExploration, runner, smallSweep, tileContent } from "../support/explorations.ts";
@@ -89,56 +89,80 @@ const mayCall: Record<RouteName, readonly Person[]> = {
 };
 
 let server: TestServer;
+let accountIds: Record<string, string>;
 beforeAll(async () => {
   const generous = { account: { attempts: 1000, seconds: 60 }, origin: { attempts: 1000, seconds: 60 } };
   server = await startTestServer({ throttle: generous });
   const names = ["owner", "editor", "reviewer", "reader", "second", "spare", "stranger", "foreign"];
-  await Promise.all(names.map((name) => signUp(server, name)));
+  const signedUp = await Promise.all(names.map((name) => signUp(server, name)));
+  accountIds = Object.fromEntries(names.map((name, i) => [name, signedUp[i].accountId]));
   await makeAdministrator();
 });
 afterAll(() => server.stop());
 
 /**
- * A project with one of each role, a second owner, one more reader, and a scenario; everybody freshly signed in. What is
- * asked of a revision finds one that the editor froze, with a comment.
+ * A project with one of each role, a second owner, one more reader, and a scenario; and what the route is asked of: an
+ * exploration with a tile, a revision that the editor froze with a comment, another project to move to.
  */
 async function layProject(name: RouteName) {
-  const [owner, editor, reviewer, reader, spare, stranger, administrator] = await Promise.all(
-    ["owner", "editor", "reviewer", "reader", "spare", "stranger", "administrator"].map(arrive),
-  );
+  const arrive = ofSessions.has(name) ? signIn : stay;
+  const names = ["owner", "editor", "reviewer", "reader", "stranger", "administrator"];
+  const [owner, editor, reviewer, reader, stranger, administrator] = await Promise.all(names.map(arrive));
+  const anonymous = await server.browser().open();
+  const browsers: Record<Person, Browser> = { anonymous, stranger, owner, editor, reviewer, reader, administrator };
   const projectId = await createProject(owner);
   const scenario = await createScenario(owner, projectId);
   const { id: scenarioId } = scenario;
-  const { id: explorationId } = await createExploration(owner, projectId, scenarioId, { tileCells: [2] });
-  const tile = { runner, content: tileContent(cellsOf(0)) };
-  await owner.get("saveTile", { params: { projectId, explorationId, number: "0" }, body: tile });
   for (const role of ["editor", "reviewer", "reader"] as const) await addMember(owner, projectId, emailOf(role), role);
   await addMember(owner, projectId, emailOf("second"), "owner");
   await addMember(owner, projectId, emailOf("spare"), "reader");
-  const toProjectId = await createProject(owner, "The other hall");
-  await addMember(owner, toProjectId, emailOf("editor"), "editor");
-  const anonymous = await server.browser().open();
-  const browsers: Record<Person, Browser> = { anonymous, stranger, owner, editor, reviewer, reader, administrator };
-  const accounts = await Promise.all([spare, reviewer].map((browser) => browser.get<Session>("readSession")));
-  const [accountId, reviewerId] = accounts.map(({ account }) => account!.id);
-  const revision = routes[name].path.includes(":revisionId") ? await createRevision(editor, projectId) : null;
-  const revisionId = revision?.id ?? crypto.randomUUID();
-  const commentId = revision ? (await createComment(editor, revision)).id : crypto.randomUUID();
-  const own = { projectId, scenarioId, explorationId, revisionId, commentId, accountId };
+  const asks = (id: string) => routes[name].path.includes(`:${id}`);
+  const revision = asks("revisionId") ? await createRevision(editor, projectId) : null;
+  const own = {
+    ...{ projectId, scenarioId, accountId: accountIds.spare },
+    explorationId: asks("explorationId") ? await layExploration(owner, projectId, scenarioId) : crypto.randomUUID(),
+    revisionId: revision?.id ?? crypto.randomUUID(),
+    commentId: revision ? (await createComment(editor, revision)).id : crypto.randomUUID(),
+  };
   return {
     browsers,
     params: { ...own, number: "0", noticeId: crypto.randomUUID() },
     scenario,
     revision,
-    reviewerId,
+    reviewerId: accountIds.reviewer,
     newcomer: emailOf("stranger"),
-    toProjectId,
+    toProjectId: name === "moveScenario" ? await layOtherProject(owner) : crypto.randomUUID(),
   };
+}
+
+async function layExploration(owner: Browser, projectId: string, scenarioId: string): Promise<string> {
+  const { id: explorationId } = await createExploration(owner, projectId, scenarioId, { tileCells: [2] });
+  const body = { runner, content: tileContent(cellsOf(0)) };
+  await owner.get("saveTile", { params: { projectId, explorationId, number: "0" }, body });
+  return explorationId;
+}
+
+async function layOtherProject(owner: Browser): Promise<string> {
+  const projectId = await createProject(owner, "The other hall");
+  await addMember(owner, projectId, emailOf("editor"), "editor");
+  return projectId;
 }
 
 type Laid = Awaited<ReturnType<typeof layProject>>;
 
-const arrive = (name: string) => server.browser().signIn(emailOf(name), password);
+/** Routes that end a session or put another in its place: asked by people who sign in for them alone. */
+const ofSessions = new Set<RouteName>(["signUp", "claimAccount", "signIn", "signOut"]);
+
+const signIn = (name: string) => server.browser().signIn(emailOf(name), password);
+
+const staying = new Map<string, Promise<Browser>>();
+
+/** Somebody signed in, who stays so from one test to the next. */
+function stay(name: string): Promise<Browser> {
+  const browser = staying.get(name) ?? signIn(name);
+  staying.set(name, browser);
+  return browser;
+}
 
 async function makeAdministrator(): Promise<void> {
   const token = await insertOneTimeLink(server.database, { email: emailOf("administrator"), makesAdministrator: true });
@@ -262,7 +286,7 @@ describe.each(routeNames.filter((name) => routes[name].path.includes(":projectId
   it("gives nothing of one project to the owner of another, not even that it exists", async () => {
     const laid = await layProject(name);
     const { params } = laid;
-    const owner = await arrive("foreign");
+    const owner = await stay("foreign");
     const projectId = await createProject(owner);
     const request = requestFor(name, laid);
     const theirs = await owner.call(name, { params, ...request });
