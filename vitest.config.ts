@@ -23,6 +23,8 @@ export default defineConfig({
         oxc: { jsx: { runtime: "automatic" as const } },
       },
       project("api", ["test/api/**/*.test.ts"], {
+        // each file has a server and a database of its own: to load the code anew for each shows nothing more
+        isolate: false,
         testTimeout: minutes(1),
         hookTimeout: minutes(1),
         globalSetup: ["test/support/database-setup.ts"],
