@@ -7,7 +7,6 @@ import {
   sweepDraftOf,
   type SweepDraft,
 } from "../../../web/src/features/explore/sweep/sweep-draft.ts";
-import { studyDraftOf, studyPlanOf } from "../../../web/src/features/explore/study/study-draft.ts";
 import { creepFeed, variant } from "../support/scenarios.ts";
 
 const draft = sweepDraftOf(creepFeed);
@@ -71,30 +70,5 @@ describe("a sweep as it is typed", () => {
     expect(suggestedSeconds(variant({ base: [] }))).toBe(0.5);
     expect(secondsOf({ ...draft, seconds: { text: "0", unit: "s" } }, creepFeed)).toBeNull();
     expect(secondsOf({ ...draft, seconds: { text: "200", unit: "ms" } }, creepFeed)).toBe(0.2);
-  });
-});
-
-describe("a study as it is typed", () => {
-  it("starts from the values known as ranges", () => {
-    const known = variant({
-      origins: { "contact.law.static": { kind: "catalogue", source: "sheet", entered: "0.15", low: 0.13, high: 0.18 } },
-    });
-    expect(studyPlanOf(studyDraftOf(known), known).plan?.inputs).toEqual([
-      { path: "contact.law.static", distribution: { kind: "uniform", low: 0.13, high: 0.18 } },
-    ]);
-  });
-
-  it("says what is wrong at its field: draws, seed, a correlation that cannot be", () => {
-    const study = studyDraftOf(creepFeed);
-    const pathsOf = (change: object) => studyPlanOf({ ...study, ...change }, creepFeed).faults.map(({ path }) => path);
-    expect(pathsOf({})).toEqual([]);
-    expect(pathsOf({ runs: "12" })).toEqual(["runs"]);
-    expect(pathsOf({ seed: "luck" })).toEqual(["seed"]);
-    expect(pathsOf({ correlation: "1.5" })).toEqual(["correlations[0].value"]);
-    const reversed = {
-      ...study.inputs[0],
-      numbers: { low: { text: "0.2", unit: "" }, high: { text: "0.1", unit: "" } },
-    };
-    expect(pathsOf({ inputs: [reversed] })).toEqual(["inputs[0].distribution.high"]);
   });
 });

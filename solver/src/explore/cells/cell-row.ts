@@ -50,6 +50,8 @@ export type CellRefusal = keyof typeof cellRefusals;
 
 /** Verdicts of limits fit a number's 53 bits. */
 export const mostLimits = 25;
+/** Asked for besides those that limits name. */
+export const mostQuantities = 29;
 
 /** What a row says, read back. */
 export interface CellFigures {

@@ -6,7 +6,7 @@ import type { z } from "../../scenario/zod.ts";
 import { defaultLinks, linkFaults } from "../links.ts";
 import { shapeFaults } from "../shape-faults.ts";
 import { numericField } from "../../scenario/numeric-fields.ts";
-import { mostLimits } from "../cells/cell-row.ts";
+import { mostLimitFaults } from "../cells/most-limit-faults.ts";
 import { mostCellsOf } from "./tiles.ts";
 import { mostCells, type SweepAxis, type SweepPlan, sweepPlanSchema } from "./sweep-plan.ts";
 
@@ -44,14 +44,7 @@ function sweepFaults(input: unknown, issues: Issues, scenario: Scenario): Fault[
     ...sameTwice(varied),
     ...sizeFaults(plan),
     ...linkFaults(plan.links, scenario, varied),
-    ...(scenario.limits.length > mostLimits
-      ? [
-          {
-            path: "",
-            message: `A sweep judges at most ${mostLimits} limits; the scenario has ${scenario.limits.length}.`,
-          },
-        ]
-      : []),
+    ...mostLimitFaults("A sweep", scenario),
   ];
 }
 

@@ -1,6 +1,7 @@
 import { quantityNames, type QuantityName } from "../../scenario/quantity-names.ts";
 import { z } from "../../scenario/zod.ts";
 import { linksSchema, type Links } from "../links.ts";
+import { mostQuantities } from "../cells/cell-row.ts";
 
 /** The values one field takes, in order: from–to in `count` steps, evenly or by equal ratios, or listed. SI. */
 export type SweepAxis =
@@ -33,7 +34,6 @@ export interface SweepPlan {
 }
 
 export const mostCells = 250_000;
-export const mostQuantities = 29;
 
 const axisSchema = z.union([
   z.strictObject({

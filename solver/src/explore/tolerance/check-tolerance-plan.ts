@@ -3,11 +3,14 @@ import type { Fault, Scenario } from "../../scenario/scenario.ts";
 import { quoted } from "../../scenario/sentences.ts";
 import type { z } from "../../scenario/zod.ts";
 import { defaultLinks, linkFaults } from "../links.ts";
+import { mostLimitFaults } from "../cells/most-limit-faults.ts";
 import { shapeFaults } from "../shape-faults.ts";
+import { scoreCorrelations } from "./rank-order.ts";
 import { numericField } from "../../scenario/numeric-fields.ts";
 import {
   type Distribution,
   type JointInput,
+  type RankCorrelation,
   type TolerancePlan,
   correlationMatrix,
   tolerancePlanSchema,
@@ -53,6 +56,7 @@ function toleranceFaults(input: unknown, issues: Issues, scenario: Scenario): Fa
     ...plan.joint.flatMap((joint, i) => below(`joint[${i}]`, jointFaults(joint))),
     ...correlationFaults(plan),
     ...linkFaults(plan.links, scenario, varied),
+    ...mostLimitFaults("A study", scenario),
   ];
 }
 
@@ -104,9 +108,22 @@ function jointFaults({ paths, means, covariance }: JointInput): Fault[] {
     return [{ path: "covariance", message: `The covariance of ${n} values has ${n} rows of ${n} numbers.` }];
   if (covariance.some((row, i) => row.some((value, j) => value !== covariance[j][i])))
     return [{ path: "covariance", message: "A covariance is symmetric: row i, column j equals row j, column i." }];
-  if (choleskyOf(covariance) === null)
-    return [{ path: "covariance", message: "No values scatter like this: a covariance must be positive definite." }];
+  const negative = covariance.findIndex((row, i) => !(row[i] > 0));
+  if (negative >= 0)
+    return [{ path: `covariance[${negative}][${negative}]`, message: "A variance must be more than 0." }];
+  if (choleskyOf(covariance) === null) return [{ path: "covariance", message: impossible(covariance) }];
   return [];
+}
+
+/** Why no values scatter so: two that go together more closely than fully, else all at once. */
+function impossible(covariance: JointInput["covariance"]): string {
+  for (let i = 0; i < covariance.length; i++)
+    for (let j = 0; j < i; j++) {
+      const correlation = covariance[i][j] / Math.sqrt(covariance[i][i] * covariance[j][j]);
+      if (Math.abs(correlation) >= 1)
+        return `No values scatter like this: a covariance must be positive definite. Value ${i + 1} and value ${j + 1} would correlate by ${correlation.toPrecision(3)}; less than 1 is possible.`;
+    }
+  return "No values scatter like this: a covariance must be positive definite. Each two of them could stand, all together cannot.";
 }
 
 function correlationFaults({ inputs, correlations }: TolerancePlan): Fault[] {
@@ -117,9 +134,15 @@ function correlationFaults({ inputs, correlations }: TolerancePlan): Fault[] {
       return [{ path, message: "A correlation joins two of the inputs, by their place in the list from 0." }];
     if (!(Math.abs(value) < 1))
       return [{ path: `${path}.value`, message: `A rank correlation lies between -1 and 1; it is ${value}.` }];
-    return [];
+    const isTwice = correlations.findIndex((other) => isSamePair(other, { first, second })) < i;
+    return isTwice ? [{ path: `${path}.second`, message: "These two have a correlation already." }] : [];
   });
   if (single.length > 0 || correlations.length === 0) return single;
-  if (choleskyOf(correlationMatrix(inputs.length, correlations)) !== null) return [];
+  if (choleskyOf(scoreCorrelations(correlationMatrix(inputs.length, correlations))) !== null) return [];
   return [{ path: "correlations", message: "These correlations cannot all hold at once." }];
 }
+
+type Pair = Pick<RankCorrelation, "first" | "second">;
+
+const isSamePair = (a: Pair, b: Pair): boolean =>
+  (a.first === b.first && a.second === b.second) || (a.first === b.second && a.second === b.first);

@@ -8,7 +8,7 @@ import { correlationOf, ranksOf } from "../../numerics/ranks.ts";
  * closely as a sample can (Iman & Conover 1982): normal scores in random order are given those correlations, what chance
  * gave them taken out, and each column follows the ranks of its scores.
  *
- * @param target Spearman's correlations, symmetric with 1 on the diagonal, positive definite
+ * @param target Spearman's correlations, symmetric with 1 on the diagonal; their `scoreCorrelations` positive definite
  */
 export function inRankOrder(
   columns: readonly Float64Array[],
@@ -18,7 +18,7 @@ export function inRankOrder(
   const runs = columns[0].length;
   const ladder = Float64Array.from({ length: runs }, (_, i) => normalQuantile((i + 1) / (runs + 1)));
   const scores = columns.map(() => Float64Array.from(shuffled(runs, random), (place) => ladder[place]));
-  const wanted = choleskyOf(target.map((row, i) => row.map((value, j) => (i === j ? 1 : pearsonOf(value)))));
+  const wanted = choleskyOf(scoreCorrelations(target));
   const byChance = choleskyOf(scores.map((a) => scores.map((b) => correlationOf(a, b) ?? 0)));
   if (wanted === null || byChance === null) return [...columns];
   const turned = scores.map(() => new Float64Array(runs));
@@ -32,8 +32,12 @@ export function inRankOrder(
   return columns.map((column, j) => orderedBy(column, turned[j]));
 }
 
-/** The correlation of normal scores whose ranks correlate so (Pearson 1907). */
-const pearsonOf = (spearman: number): number => 2 * Math.sin((Math.PI * spearman) / 6);
+/**
+ * The correlations of normal scores whose ranks correlate so: 2 sin(πρ/6) (Pearson 1907). They are a little larger than those
+ * of the ranks: the ones may be possible together and the others not.
+ */
+export const scoreCorrelations = (target: readonly (readonly number[])[]): number[][] =>
+  target.map((row, i) => row.map((value, j) => (i === j ? 1 : 2 * Math.sin((Math.PI * value) / 6))));
 
 function orderedBy(column: Float64Array, guide: Float64Array): Float64Array {
   const sorted = Float64Array.from(column).sort();

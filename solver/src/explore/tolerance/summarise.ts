@@ -3,6 +3,7 @@ import { ranksOf } from "../../numerics/ranks.ts";
 import { cellOutcomes, readRow, rowLength, type CellFigures } from "../cells/cell-row.ts";
 import type { Scenario } from "../../scenario/scenario.ts";
 import { drawsOf } from "./draws.ts";
+import { refusedDraws } from "./refused-draws.ts";
 import { convergenceRuns, spreadOf } from "./quantity-spread.ts";
 import { studyRows } from "./run-draws.ts";
 import { variedPaths, type TolerancePlan } from "./tolerance-plan.ts";
@@ -22,11 +23,12 @@ export function toleranceSummary(plan: TolerancePlan, scenario: Scenario, rows: 
   const runs = rows.length / length;
   if (!Number.isInteger(runs)) throw new RangeError(`${rows.length} numbers are no whole number of rows of ${length}`);
   const all = Array.from({ length: runs }, (_, i) => readRow(rows, i * length, kept, scenario.limits.length));
-  const columns = columnsOf(drawsOf(plan), variedPaths(plan).length, runs);
+  const draws = drawsOf(plan);
+  const columns = columnsOf(draws, variedPaths(plan).length, runs);
   const inputs = variedPaths(plan).map((path, j) => ({ path, values: columns[j], ranks: ranksOf(columns[j]) }));
   return {
     runs,
-    refused: refusedOf(all),
+    refused: refusedDraws(scenario, plan, draws, all),
     limits: scenario.limits.map((_, i) => {
       const verdicts = all.map(({ kept: each, refusal }) => (refusal === null ? each[i] : null));
       return { kept: shareOf(verdicts), convergence: shareConvergence(verdicts) };
@@ -48,16 +50,6 @@ export function toleranceSummary(plan: TolerancePlan, scenario: Scenario, rows: 
 
 function columnsOf(draws: Float64Array, width: number, runs: number): Float64Array[] {
   return Array.from({ length: width }, (_, j) => Float64Array.from({ length: runs }, (__, i) => draws[i * width + j]));
-}
-
-function refusedOf(all: readonly CellFigures[]): ToleranceSummary["refused"] {
-  const found = new Map<NonNullable<CellFigures["refusal"]>, { count: number; first: number }>();
-  all.forEach(({ refusal }, i) => {
-    if (refusal === null) return;
-    const one = found.get(refusal) ?? { count: 0, first: i };
-    found.set(refusal, { ...one, count: one.count + 1 });
-  });
-  return [...found].map(([refusal, one]) => ({ refusal, ...one })).sort((a, b) => b.count - a.count);
 }
 
 /** All limits of a draw together; null where one that is not broken cannot be judged. */

@@ -1,6 +1,7 @@
 import { quantityNames, type QuantityName } from "../../scenario/quantity-names.ts";
 import { z } from "../../scenario/zod.ts";
 import { linksSchema, type Links } from "../links.ts";
+import { mostQuantities } from "../cells/cell-row.ts";
 
 /**
  * How a number scatters, SI. `uniform`: low…high. `normal`: mean and standard deviation. `truncated`: the same, cut at low
@@ -39,6 +40,8 @@ export interface JointInput {
   readonly paths: readonly string[];
   readonly means: readonly number[];
   readonly covariance: readonly (readonly number[])[];
+  /** Where the numbers come from, in words: a fit, a measurement, a paper. */
+  readonly source?: string;
 }
 
 export interface TolerancePlan {
@@ -58,6 +61,8 @@ export interface TolerancePlan {
 
 export const fewestRuns = 100;
 export const mostRuns = 100_000;
+/** Letters of a source. */
+export const mostSource = 200;
 
 const distributionSchema = z.discriminatedUnion("kind", [
   z.strictObject({ kind: z.literal("uniform"), low: z.number(), high: z.number() }),
@@ -82,13 +87,14 @@ export const tolerancePlanSchema: z.ZodType<TolerancePlan> = z.strictObject({
       paths: z.array(z.string()),
       means: z.array(z.number()),
       covariance: z.array(z.array(z.number())),
+      source: z.string().max(mostSource).optional(),
     }),
   ),
   links: linksSchema,
   seed: z.int(),
   runs: z.int().min(fewestRuns).max(mostRuns),
   sampling: z.enum(["latin-hypercube", "random"]),
-  quantities: z.array(z.enum(quantityNames)),
+  quantities: z.array(z.enum(quantityNames)).max(mostQuantities),
 });
 
 /** The paths of all that scatters, in the order of a draw's values. */

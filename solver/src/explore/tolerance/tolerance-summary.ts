@@ -56,10 +56,21 @@ export interface ConvergencePoint {
   readonly estimate: Estimate;
 }
 
+/** Draws that have no outcome for one and the same reason. */
+export interface RefusedDraws {
+  readonly refusal: CellRefusal;
+  readonly count: number;
+  /** The number at fault, where values cannot stand together; null otherwise. */
+  readonly path: string | null;
+  /** One of the draws, and what is wrong with it in a sentence that holds its own figures; null where runs were cut off. */
+  readonly first: number;
+  readonly example: string | null;
+}
+
 export interface ToleranceSummary {
   readonly runs: number;
-  /** Draws without an outcome, by why; `first` is one of them, whose scenario tells more. */
-  readonly refused: readonly { readonly refusal: CellRefusal; readonly count: number; readonly first: number }[];
+  /** Draws without an outcome, by why, the most first. */
+  readonly refused: readonly RefusedDraws[];
   /** One for each limit of the scenario: the probability that it is kept. */
   readonly limits: readonly { readonly kept: Share; readonly convergence: readonly ConvergencePoint[] }[];
   /** That all limits are kept together; null without limits. */

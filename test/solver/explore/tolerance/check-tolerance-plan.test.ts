@@ -95,7 +95,24 @@ describe("a plan of a tolerance study", () => {
         ],
       },
       "joint[0].covariance",
-      /positive definite/,
+      /positive definite\. Value 2 and value 1 would correlate by 2\.00/,
+    ],
+    [
+      "a variance of 0",
+      { inputs: [], joint: [{ paths: ["body.stiffness"], means: [1], covariance: [[0]] }] },
+      "joint[0].covariance[0][0]",
+      /more than 0/,
+    ],
+    [
+      "the same pair twice",
+      {
+        correlations: [
+          { first: 0, second: 1, value: 0.2 },
+          { first: 1, second: 0, value: 0.3 },
+        ],
+      },
+      "correlations[1].second",
+      /already/,
     ],
     [
       "a covariance that is not symmetric",
@@ -137,6 +154,20 @@ describe("a plan of a tolerance study", () => {
       { first: 0, second: 2, value: -0.9 },
     ];
     expect(faultsOf({ inputs, correlations }).map(({ path }) => path)).toEqual(["correlations"]);
+  });
+
+  it("refuses correlations whose scores cannot hold, though their ranks might: else none of them would be drawn", () => {
+    const path = ["body.stiffness", "body.inertia", "contact.normal.preload"];
+    const inputs = path.map((each) => ({ path: each, distribution: { kind: "uniform", low: 1, high: 2 } }));
+    // of three equal negative ones −1/2 is the least; as correlations of scores −0.49 is −0.507
+    const equal = (value: number) => [0, 1, 2].map((i) => ({ first: i, second: (i + 1) % 3, value }));
+    expect(faultsOf({ inputs, correlations: equal(-0.49) }).map((fault) => fault.path)).toEqual(["correlations"]);
+    expect(faultsOf({ inputs, correlations: equal(-0.48) })).toEqual([]);
+  });
+
+  it("takes the source of a covariance along", () => {
+    const joint = [{ paths: ["body.stiffness"], means: [800], covariance: [[4]], source: "Fit of ring-down 3" }];
+    expect(checkTolerancePlan(plan({ inputs: [], joint }), scenario).plan?.joint).toEqual(joint);
   });
 
   it("never throws", () => {

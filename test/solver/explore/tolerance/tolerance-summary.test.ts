@@ -81,7 +81,17 @@ describe("what a tolerance study says", () => {
   it("counts draws that are refused, and bounds the probability by them", () => {
     // static friction below the kinetic 0.15 cannot be: a quarter of 0.1…0.3
     const summary = study(released, { inputs: [uniform("contact.law.static", 0.1, 0.3)], links: {} });
-    expect(summary.refused).toEqual([{ refusal: "refused", count: 250, first: expect.any(Number) as number }]);
+    expect(summary.refused).toEqual([
+      {
+        refusal: "refused",
+        count: 250,
+        path: "contact.law.static",
+        first: expect.any(Number) as number,
+        example: expect.stringMatching(
+          /^Static friction cannot be smaller than kinetic friction; they are 0\.1/,
+        ) as string,
+      },
+    ]);
     const { kept } = summary.limits[0];
     // kept up to 0.24: 450 of the 750 that can be
     expect([kept.count, kept.of]).toEqual([450, 750]);
@@ -89,6 +99,15 @@ describe("what a tolerance study says", () => {
     expect(kept.bounded.low).toBe(exactInterval(450, 1000, 0.95).low);
     expect(kept.bounded.high).toBe(exactInterval(700, 1000, 0.95).high);
     expect(summary.spreads[0].count).toBe(750);
+  });
+
+  it("groups draws that are refused by their reason, whatever their figures", () => {
+    const inputs = [uniform("contact.law.static", 0.14, 0.24), uniform("contact.normal.preload", -5, 15)];
+    const { refused } = study(released, { inputs, links: {} });
+    expect(refused.map(({ path, count }) => [path, count])).toEqual([
+      ["contact.normal.preload", 250],
+      ["contact.law.static", expect.closeTo(75, -2)],
+    ]);
   });
 
   it("of the draws there are so far", () => {

@@ -1,6 +1,7 @@
 import { Button } from "../../../components/button.tsx";
 import { SelectField } from "../../../components/select.tsx";
 import type { ExploreField } from "../explore-field.ts";
+import { FieldChoice } from "../field-choice.tsx";
 import { TypedNumber } from "../typed-number.tsx";
 import { distributionMembers, type DistributionKind, type InputDraft } from "./study-draft.ts";
 
@@ -28,14 +29,7 @@ export function InputForm({ input, fields, faultAt, onField, onKind, onChange, o
   return (
     <fieldset className="flex min-w-0 flex-wrap items-start gap-x-4 gap-y-4">
       <legend className="sr-only">{field.name} scatters</legend>
-      <SelectField
-        label="Scatters"
-        className="w-64 max-w-full"
-        error={faultAt("path")}
-        choices={fields.map(({ path, name }) => ({ value: path, label: name }))}
-        value={input.path}
-        onChange={(event) => onField(event.target.value)}
-      />
+      <FieldChoice label="Scatters" fields={fields} value={input.path} error={faultAt("path")} onChange={onField} />
       <SelectField
         label="how"
         choices={kinds}

@@ -1,22 +1,14 @@
-import {
-  drawScenario,
-  drawsOf,
-  type Scenario,
-  type Share,
-  type TolerancePlan,
-  type ToleranceSummary,
-} from "@restband/solver";
-import { useMemo } from "react";
+import type { Scenario, Share, ToleranceSummary } from "@restband/solver";
 import { DataTable } from "../../../components/data-table.tsx";
 import { formatNumber } from "../../../format/format-number.ts";
 import { outcomeWords } from "../../../format/outcomes.ts";
 import { quantityNamed } from "../../../format/quantities.ts";
+import { Refused } from "./refused.tsx";
 import { sayChance, sayInterval } from "./study-words.ts";
 
 interface LimitChancesProps {
   summary: ToleranceSummary;
   scenario: Scenario;
-  plan: TolerancePlan;
 }
 
 interface Row {
@@ -25,7 +17,7 @@ interface Row {
 }
 
 /** How likely each limit is kept, each outcome comes, with intervals; what was refused is counted and bounds them. */
-export function LimitChances({ summary, scenario, plan }: LimitChancesProps) {
+export function LimitChances({ summary, scenario }: LimitChancesProps) {
   const { limits, allLimits, outcomes, refused } = summary;
   const kept: Row[] = limits.map(({ kept: share }, i) => {
     const { quantity } = scenario.limits[i];
@@ -46,7 +38,7 @@ export function LimitChances({ summary, scenario, plan }: LimitChancesProps) {
         caption="What becomes of the draws"
         rows={outcomes.map(({ outcome, share }) => ({ name: outcomeWords[outcome], share }))}
       />
-      {refused.length > 0 && <Refused summary={summary} scenario={scenario} plan={plan} />}
+      {refused.length > 0 && <Refused summary={summary} scenario={scenario} />}
       {limits.length > 0 && <Convergence summary={summary} scenario={scenario} />}
     </section>
   );
@@ -76,33 +68,8 @@ function ShareTable({ caption, rows }: { caption: string; rows: readonly Row[] }
   );
 }
 
-/** Draws without an answer are told with one example each, never dropped. */
-function Refused({ summary: { refused }, scenario, plan }: LimitChancesProps) {
-  const draws = useMemo(() => drawsOf(plan), [plan]);
-  return (
-    <ul className="mb-6 max-w-(--measure) list-disc pl-5">
-      {refused.map(({ refusal, count, first }) => {
-        const reason = drawScenario(scenario, plan, draws, first).faults[0]?.message;
-        return (
-          <li key={refusal}>
-            {formatNumber(count, 9)} draws have no answer: {reason ?? refusalWords[refusal] ?? "the run failed."} They
-            are counted for and against in the bounds.
-          </li>
-        );
-      })}
-    </ul>
-  );
-}
-
-const refusalWords: Partial<Record<ToleranceSummary["refused"][number]["refusal"], string>> = {
-  refused: "their values cannot stand together.",
-  "not-computed": "this version has no method for them.",
-  "max-events": "the run reached the most events it is allowed.",
-  "max-work": "the run reached the most work it is allowed.",
-};
-
 /** How the share of the first limit has settled with the draws. */
-function Convergence({ summary: { limits }, scenario }: Pick<LimitChancesProps, "summary" | "scenario">) {
+function Convergence({ summary: { limits }, scenario }: LimitChancesProps) {
   return (
     <details>
       <summary className="link w-fit">How it has settled with the draws</summary>

@@ -1,14 +1,27 @@
 import type { Scenario, TolerancePlan } from "@restband/solver";
 import { useMemo, useState } from "react";
 import { Button } from "../../../components/button.tsx";
+import { Checkbox } from "../../../components/choices.tsx";
 import { ErrorNote } from "../../../components/error-note.tsx";
 import { FieldError } from "../../../components/field.tsx";
 import { SelectField } from "../../../components/select.tsx";
-import { TextField } from "../../../components/text-field.tsx";
-import { exploreFields } from "../explore-field.ts";
+import { exploreFields, type ExploreField } from "../explore-field.ts";
+import { FigureField } from "../figure-field.tsx";
 import { QuantityChoice } from "../quantity-choice.tsx";
+import { CorrelationsForm } from "./correlations-form.tsx";
 import { InputForm } from "./input-form.tsx";
-import { inputDraftOf, studyDraftOf, studyPlanOf, type InputDraft, type StudyDraft } from "./study-draft.ts";
+import { jointDraftOf } from "./joint-draft.ts";
+import { JointForm } from "./joint-form.tsx";
+import {
+  canKeepFrictionRatio,
+  inputDraftOf,
+  scatteredPaths,
+  studyDraftOf,
+  studyPlanOf,
+  withInputs,
+  type InputDraft,
+  type StudyDraft,
+} from "./study-draft.ts";
 import { studyTitle } from "./study-title.ts";
 
 interface StudyBuilderProps {
@@ -26,8 +39,8 @@ export function StudyBuilder({ scenario, onRun }: StudyBuilderProps) {
   });
   const { plan, faults } = studyPlanOf(draft, scenario);
   const set = (change: Partial<StudyDraft>): void => setDraft((old) => ({ ...old, ...change }));
-  const faultAt = (path: string): string | undefined => faults.find((fault) => fault.path.startsWith(path))?.message;
-  const general = faults.filter(({ path }) => !/^(inputs\[|runs|seed|correlations)/.test(path));
+  const faultAt = (path: string): string | undefined => faults.find((fault) => fault.path === path)?.message;
+  const general = faults.filter(({ path }) => !placed.test(path));
 
   const begin = async (): Promise<void> => {
     if (!plan || run.isBusy) return setRun((old) => ({ ...old, isTried: true }));
@@ -47,45 +60,37 @@ export function StudyBuilder({ scenario, onRun }: StudyBuilderProps) {
         void begin();
       }}
     >
-      <Inputs scenario={scenario} inputs={draft.inputs} faultAt={faultAt} onChange={(inputs) => set({ inputs })} />
+      <WhatScatters draft={draft} scenario={scenario} faultAt={faultAt} setDraft={setDraft} />
       <div className="flex flex-wrap items-start gap-x-4 gap-y-4">
-        <TextField
+        <FigureField
           label="Draws"
           className="w-28"
-          isFigure
-          inputMode="numeric"
+          isWhole
           value={draft.runs}
           error={faultAt("runs")}
-          onChange={(event) => set({ runs: event.target.value })}
+          onChange={(runs) => set({ runs })}
         />
         <SelectField
           label="drawn as"
-          choices={[
-            { value: "latin-hypercube", label: "a Latin hypercube" },
-            { value: "random", label: "plain random numbers" },
-          ]}
+          choices={samplings}
           value={draft.sampling}
           onChange={(event) => set({ sampling: event.target.value as StudyDraft["sampling"] })}
         />
-        <TextField
+        <FigureField
           label="Seed"
-          className="w-24"
-          isFigure
-          inputMode="numeric"
+          isWhole
           value={draft.seed}
           error={faultAt("seed")}
-          onChange={(event) => set({ seed: event.target.value })}
+          onChange={(seed) => set({ seed })}
         />
-        {draft.inputs.length > 1 && (
-          <TextField
-            label="Rank correlation of the first two"
-            className="w-64"
-            isFigure
-            help="Between −1 and 1; empty for none."
-            value={draft.correlation}
-            error={faultAt("correlations")}
-            onChange={(event) => set({ correlation: event.target.value })}
-          />
+        {canKeepFrictionRatio(draft, scenario) && (
+          <div className="desk:pt-8">
+            <Checkbox
+              label="Keep the ratio of static to kinetic friction"
+              checked={draft.keepsFrictionRatio}
+              onChange={(event) => set({ keepsFrictionRatio: event.target.checked })}
+            />
+          </div>
         )}
       </div>
       <QuantityChoice
@@ -109,34 +114,101 @@ export function StudyBuilder({ scenario, onRun }: StudyBuilderProps) {
   );
 }
 
+/** Faults that stand at a field of theirs. */
+const placed =
+  /^(inputs\[\d+\]\.(path|distribution\.\w+)|runs|seed|correlations(\[\d+\]\.(first|second|value))?|joint\[\d+\]\.(paths\[\d+\]|means\[\d+\]|covariance(\[\d+\]\[\d+\])?|source))$/;
+
+const samplings = [
+  { value: "latin-hypercube", label: "a Latin hypercube" },
+  { value: "random", label: "plain random numbers" },
+];
+
+interface WhatScattersProps {
+  draft: StudyDraft;
+  scenario: Scenario;
+  faultAt: (path: string) => string | undefined;
+  setDraft: (change: (old: StudyDraft) => StudyDraft) => void;
+}
+
+/** The values that scatter one by one, how two of them go together, and those that scatter by a covariance. */
+function WhatScatters({ draft, scenario, faultAt, setDraft }: WhatScattersProps) {
+  const fields = useMemo(() => exploreFields(scenario), [scenario]);
+  const { inputs, correlations, joint } = draft;
+  const set = (change: Partial<StudyDraft>): void => setDraft((old) => ({ ...old, ...change }));
+  const scattered = scatteredPaths(draft);
+  const free = fields.filter(({ path }) => !scattered.includes(path));
+  return (
+    <>
+      <Inputs
+        scenario={scenario}
+        fields={fields}
+        inputs={inputs}
+        isLast={scattered.length === 1}
+        free={free}
+        faultAt={faultAt}
+        onChange={(next) => setDraft((old) => withInputs(old, next))}
+      />
+      {inputs.length > 1 && (
+        <CorrelationsForm
+          correlations={correlations}
+          inputs={inputs.flatMap(({ path }) => fields.find((field) => field.path === path) ?? [])}
+          faultAt={(member) => faultAt(`correlations${member}`)}
+          onChange={(next) => set({ correlations: next })}
+        />
+      )}
+      {joint.map((each, i) => (
+        <JointForm
+          key={i}
+          draft={each}
+          fields={fields}
+          free={free}
+          faultAt={(member) => faultAt(`joint[${i}].${member}`)}
+          onChange={(next) => set({ joint: joint.map((other, k) => (k === i ? next : other)) })}
+          onRemove={() => set({ joint: joint.filter((_, k) => k !== i) })}
+        />
+      ))}
+      {free.length > 1 && (
+        <Button className="self-start" onClick={() => set({ joint: [...joint, jointDraftOf(free.slice(0, 2))] })}>
+          Let values scatter by a covariance
+        </Button>
+      )}
+    </>
+  );
+}
+
 interface InputsProps {
   scenario: Scenario;
+  fields: readonly ExploreField[];
   inputs: readonly InputDraft[];
+  /** Nothing else scatters: it cannot be left out. */
+  isLast: boolean;
+  free: readonly ExploreField[];
   faultAt: (path: string) => string | undefined;
   onChange: (inputs: InputDraft[]) => void;
 }
 
-function Inputs({ scenario, inputs, faultAt, onChange }: InputsProps) {
-  const fields = useMemo(() => exploreFields(scenario), [scenario]);
+function Inputs({ scenario, fields, inputs, isLast, free, faultAt, onChange }: InputsProps) {
   const put = (i: number, input: InputDraft): void => onChange(inputs.map((each, k) => (k === i ? input : each)));
   const fieldOf = (path: string) => fields.find((field) => field.path === path) ?? fields[0];
-  const free = fields.find(({ path }) => inputs.every((input) => input.path !== path));
   return (
     <>
       {inputs.map((input, i) => (
         <InputForm
-          key={input.path}
+          key={i}
           input={input}
           fields={fields}
           faultAt={(member) => faultAt(`inputs[${i}].${member}`)}
           onField={(path) => put(i, inputDraftOf(fieldOf(path), scenario, input.kind))}
           onKind={(kind) => put(i, inputDraftOf(fieldOf(input.path), scenario, kind))}
           onChange={(next) => put(i, next)}
-          {...(inputs.length > 1 && { onRemove: () => onChange(inputs.filter((_, k) => k !== i)) })}
+          {...(!isLast && { onRemove: () => onChange(inputs.filter((_, k) => k !== i)) })}
         />
       ))}
-      {free && (
-        <Button className="self-start" onClick={() => onChange([...inputs, inputDraftOf(free, scenario, "uniform")])}>
+      {free.length > 0 && (
+        <Button
+          className="self-start"
+          onClick={() => onChange([...inputs, inputDraftOf(free[0], scenario, "uniform")])}
+        >
           Let another value scatter
         </Button>
       )}

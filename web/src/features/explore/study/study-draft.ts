@@ -1,5 +1,6 @@
 import {
   checkTolerancePlan,
+  defaultLinks,
   type CheckedTolerance,
   type Distribution,
   type QuantityName,
@@ -7,6 +8,8 @@ import {
 } from "@restband/solver";
 import { exploreFields, type ExploreField } from "../explore-field.ts";
 import { readTyped, typedOf, type Typed } from "../typed-number.tsx";
+import { correlationsOf, stillStanding, type CorrelationDraft } from "./correlation-draft.ts";
+import { jointOf, type JointDraft } from "./joint-draft.ts";
 
 export type DistributionKind = Distribution["kind"];
 
@@ -42,9 +45,13 @@ export interface InputDraft {
 }
 
 export interface StudyDraft {
+  /** Values that scatter one by one, and the rank correlations among them. */
   readonly inputs: readonly InputDraft[];
-  /** Rank correlation of the first two inputs; empty for none. */
-  readonly correlation: string;
+  readonly correlations: readonly CorrelationDraft[];
+  /** Values that scatter together by a covariance. */
+  readonly joint: readonly JointDraft[];
+  /** Where one friction coefficient scatters the other keeps its ratio. */
+  readonly keepsFrictionRatio: boolean;
   readonly runs: string;
   readonly seed: string;
   readonly sampling: "latin-hypercube" | "random";
@@ -62,7 +69,9 @@ export function studyDraftOf(scenario: Scenario): StudyDraft {
   const chosen = known.length > 0 ? known : friction.length > 0 ? friction : fields.slice(0, 1);
   return {
     inputs: chosen.map((field) => inputDraftOf(field, scenario, "uniform")),
-    correlation: "",
+    correlations: [],
+    joint: [],
+    keepsFrictionRatio: true,
     runs: "2000",
     seed: "1",
     sampling: "latin-hypercube",
@@ -95,18 +104,40 @@ export function inputDraftOf(field: ExploreField, scenario: Scenario, kind: Dist
   };
 }
 
-/** What is typed as a plan, or every fault at its path. */
+/** The paths of all that scatters. */
+export const scatteredPaths = ({ inputs, joint }: StudyDraft): string[] => [
+  ...inputs.map(({ path }) => path),
+  ...joint.flatMap(({ members }) => members.map(({ path }) => path)),
+];
+
+/** The draft with other inputs: a correlation whose value scatters no more goes with it. */
+export const withInputs = (draft: StudyDraft, inputs: readonly InputDraft[]): StudyDraft => ({
+  ...draft,
+  inputs,
+  correlations: stillStanding(
+    draft.correlations,
+    inputs.map(({ path }) => path),
+  ),
+});
+
+export const canKeepFrictionRatio = (draft: StudyDraft, scenario: Scenario): boolean =>
+  Object.keys(defaultLinks(scenario, scatteredPaths(draft))).length > 0;
+
+/** What is typed as a plan, or every fault at its path. Numbers that cannot be read are told before all else. */
 export function studyPlanOf(draft: StudyDraft, scenario: Scenario): CheckedTolerance {
   const fields = exploreFields(scenario);
-  const correlation = Number(draft.correlation.replace(",", "."));
+  const paths = draft.inputs.map(({ path }) => path);
+  const correlated = correlationsOf(draft.correlations, paths);
+  const joint = draft.joint.map((each, i) => jointOf(each, fields, `joint[${i}]`));
+  const unread = [...correlated.faults, ...joint.flatMap(({ faults }) => faults)];
+  if (unread.length > 0) return { plan: null, faults: unread };
   return checkTolerancePlan(
     {
       format: "restband-tolerance/1",
       inputs: draft.inputs.map((input) => ({ path: input.path, distribution: distributionOf(input, fields) })),
-      correlations:
-        draft.correlation.trim() === "" || draft.inputs.length < 2 ? [] : [{ first: 0, second: 1, value: correlation }],
-      joint: [],
-      links: {},
+      correlations: correlated.correlations,
+      joint: joint.map((each) => each.joint),
+      links: draft.keepsFrictionRatio ? defaultLinks(scenario, scatteredPaths(draft)) : {},
       seed: wholeOf(draft.seed),
       runs: wholeOf(draft.runs),
       sampling: draft.sampling,

@@ -50,7 +50,7 @@ export function StudyView({ projectId, stored, canEdit, isFresh }: StudyViewProp
         <TileProgress run={run} stored={stored} canEdit={canEdit} noun="draws" />
         {summary && (
           <>
-            <LimitChances summary={summary} scenario={scenario} plan={plan} />
+            <LimitChances summary={summary} scenario={scenario} />
             <QuantitySpreads summary={summary} scenario={scenario} />
           </>
         )}

@@ -1,8 +1,9 @@
 import { controlClass, Field } from "../../../components/field.tsx";
 import { SelectField } from "../../../components/select.tsx";
-import { TextField } from "../../../components/text-field.tsx";
 import { classNames } from "../../../components/class-names.ts";
 import type { ExploreField } from "../explore-field.ts";
+import { FieldChoice } from "../field-choice.tsx";
+import { FigureField } from "../figure-field.tsx";
 import { TypedNumber } from "../typed-number.tsx";
 import type { AxisDraft, Spacing } from "./sweep-draft.ts";
 
@@ -30,14 +31,7 @@ export function AxisForm({ name, axis, fields, faultAt, onField, onChange }: Axi
     <fieldset className="min-w-0">
       <legend className="sr-only">{name}</legend>
       <div className="flex flex-wrap items-start gap-x-4 gap-y-4">
-        <SelectField
-          label={name}
-          className="w-64 max-w-full"
-          error={faultAt("path")}
-          choices={fields.map(({ path, name: label }) => ({ value: path, label }))}
-          value={axis.path}
-          onChange={(event) => onField(event.target.value)}
-        />
+        <FieldChoice label={name} fields={fields} value={axis.path} error={faultAt("path")} onChange={onField} />
         <SelectField
           label="spread"
           choices={spacings}
@@ -62,14 +56,12 @@ export function AxisForm({ name, axis, fields, faultAt, onField, onChange }: Axi
               error={faultAt("to")}
               onChange={(to) => set({ to })}
             />
-            <TextField
+            <FigureField
               label="values"
-              className="w-24"
-              isFigure
-              inputMode="numeric"
+              isWhole
               value={axis.count}
               error={faultAt("count")}
-              onChange={(event) => set({ count: event.target.value })}
+              onChange={(count) => set({ count })}
             />
           </>
         )}

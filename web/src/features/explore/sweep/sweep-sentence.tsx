@@ -1,7 +1,7 @@
 import { axisValues, type Continuation, type Scenario, type SweepAxis, type SweepPlan } from "@restband/solver";
 import { say } from "../../../format/format-quantity.ts";
-import { formatNumber } from "../../../format/format-number.ts";
 import { exploreField } from "../explore-field.ts";
+import { linkWords } from "../link-words.ts";
 
 const startsWords: Record<Continuation, string> = {
   none: "",
@@ -15,7 +15,8 @@ export function SweepSentence({ plan, scenario }: { plan: SweepPlan; scenario: S
   const seconds = say(scenario.span.seconds, { dimension: "time", motion: scenario.motion });
   return (
     <p className="leading-[1.7]">
-      What happens when {plan.axes.map((axis) => axisWords(axis, scenario)).join(" and ")}?{linkWords(plan, scenario)}
+      What happens when {plan.axes.map((axis) => axisWords(axis, scenario)).join(" and ")}?
+      {linkWords(plan.links, scenario)}
       {startsWords[plan.continuation]} Each run lasts {seconds}.
     </p>
   );
@@ -30,14 +31,4 @@ function axisWords(axis: SweepAxis, scenario: Scenario): string {
   return values.length === 1
     ? `${field.name} is ${low}`
     : `${field.name} runs from ${low} to ${high} in ${values.length} values${spread}`;
-}
-
-function linkWords({ links }: SweepPlan, scenario: Scenario): string {
-  return Object.entries(links)
-    .map(([path, link]) => {
-      if ("keep" in link) return " The damping keeps its ratio.";
-      const [name, of] = [path, link.of].map((each) => exploreField(scenario, each)?.name ?? each);
-      return ` ${name.charAt(0).toUpperCase()}${name.slice(1)} is ${formatNumber(link.factor, 4)} times ${of}.`;
-    })
-    .join("");
 }
