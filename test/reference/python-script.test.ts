@@ -3,7 +3,7 @@ import { digestOf, pythonScript, simulate, type Result, type Scenario } from "@r
 import { runPython } from "../support/python.ts";
 import { buildScenario } from "../support/scenario-builder.ts";
 
-/** Five runs that between them meet every rule of stick and slip; the file integrates what the solver knows in closed form. */
+/** Runs that between them meet every rule of stick and slip; the file integrates what the solver knows in closed form. */
 const scenarios: Record<string, Scenario> = {
   "a decay to rest on an incline": buildScenario({
     body: { inertia: 3, stiffness: 1200, viscous: 2 },
@@ -21,6 +21,16 @@ const scenarios: Record<string, Scenario> = {
       { kind: "pulse", shape: "triangle", peak: 8, start: 0.7, duration: 0.4 },
     ],
     span: { seconds: 9, untilRest: false },
+  }),
+  "a spring with damping of its own between a shaken base and the ground": buildScenario({
+    body: { inertia: 2, stiffness: 500 },
+    solid: { model: "displacement-proportional", lossFactor: 0.25 },
+    contact: { law: { model: "coulomb", static: 0.8, kinetic: 0.6 }, normal: { preload: 10 } },
+    base: [
+      { kind: "harmonic", amplitude: 0.03, hz: 1.3 },
+      { kind: "ramp", rate: 0.01, start: 0, stop: 2 },
+    ],
+    span: { seconds: 5, untilRest: false },
   }),
   "a feed that sticks and slips": buildScenario({
     body: { inertia: 120, stiffness: 4e6, viscous: 350 },

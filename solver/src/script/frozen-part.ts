@@ -4,6 +4,8 @@ import type { MotionEvent } from "../result.ts";
 import type { Scenario } from "../scenario/scenario.ts";
 import { pythonNumber as n, pythonText, pythonValue } from "./literals.ts";
 
+const dimensions = ["displacement", "velocity", "acceleration", "force", "power"] as const;
+
 /** Events are written out up to so many; of more, the first are compared one by one, and all by their count. */
 const mostEvents = 5_000;
 
@@ -27,7 +29,8 @@ export function frozenPart(motion: Scenario["motion"], { quantities, events, eve
     "UNITS = {",
     ...names.map((name) => `    ${pythonText(name)}: ${pythonText(unit(quantityOf(name).dimension))},`),
     "}",
-    `EVENT_UNITS = (${(["time", "displacement", "velocity", "force"] as const).map((d) => pythonText(unit(d))).join(", ")})`,
+    `UNIT_OF = {${dimensions.map((d) => `${pythonText(d)}: ${pythonText(unit(d))}`).join(", ")}}`,
+    'EVENT_UNITS = ("s", UNIT_OF["displacement"], UNIT_OF["velocity"], UNIT_OF["force"])',
     "# kind, t, x, v, f just after it",
     "EVENTS = [",
     ...rows.map(({ kind, t, x, v, f }) => `    (${pythonText(kind)}, ${[t, x, v, f].map(n).join(", ")}),`),

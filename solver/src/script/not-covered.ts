@@ -22,13 +22,5 @@ export function pythonGap(scenario: Scenario, ended: Result["ended"]): string | 
     return "A stored record is not written out as a Python file; one whose points stand in the scenario is.";
   if (terms.some((term) => "times" in term && term.times.length > mostPoints))
     return `A record of more than ${mostPoints} points is not written out as a Python file.`;
-  if (hasMovingElement(scenario))
-    return "Displacement-proportional solid damping on a base that moves against the counterface is not written out as a Python file.";
   return null;
-}
-
-/** Solid damping has its own reversals where the spring's stretch and the slip are not the same motion. */
-function hasMovingElement({ solid, contact, base }: Scenario): boolean {
-  if (solid.model !== "displacement-proportional" || contact.counterface === "base") return false;
-  return contact.counterface !== "ground" || base.some(({ kind }) => kind !== "constant");
 }

@@ -6,6 +6,8 @@ import { inputText } from "./input-text.ts";
 import { pythonText } from "./literals.ts";
 import { motionText } from "./motion-text.ts";
 import { quantitiesText } from "./quantities-text.ts";
+import { runText } from "./run-text.ts";
+import { settingsText } from "./settings-text.ts";
 import { scenarioConstants, scenarioFunctions } from "./scenario-part.ts";
 import { steadyPart } from "./steady-part.ts";
 
@@ -37,11 +39,12 @@ export function pythonScript(scenario: Scenario, claim: Claim): string {
     "\n# ---- The scenario's functions -----------------------------------------------------------------------------------\n",
     scenarioFunctions(scenario),
     steadyPart(scenario, problem),
-    settings,
     "# ---- What is claimed -----------------------------------------------------------------------------------------------\n",
     frozenPart(motion, claim),
-    scaleText,
+    "# ---- Corners and sizes -------------------------------------------------------------------------------------------",
+    settingsText,
     motionText,
+    runText,
     quantitiesText,
     comparisonText,
   ].join("\n");
@@ -72,42 +75,4 @@ from scipy.optimize import brentq, minimize_scalar
 
 TURN = 2 * np.pi
 INFINITE = np.inf
-`;
-
-const settings = `
-ALLOWED = 1e-6  # of the run's peak
-RTOL, ATOL = 1e-11, 1e-13  # of the integration; ATOL a share of the run's peaks
-HELD = 1e-10  # a need that passes the hold by less is held: rounding must not decide
-NOISE = 1e-11  # v_r below this share of its peak is 0
-LOOKS, LOOKS_A_PERIOD = 12, 64  # at a step of a slip, at a period of the inputs while stuck
-LONGEST_STEP = 1 / (20 * FASTEST_HZ) if FASTEST_HZ else np.inf
-
-
-def lost_contact_times():
-    """When N falls to 0 and when it comes back."""
-    if abs(RIPPLE) <= NORMAL:
-        return []
-    angle = np.arccos(-NORMAL / RIPPLE)
-    turns = np.arange(-2, int(SECONDS * RIPPLE_HZ) + 3)
-    shifts = [TURN * turns + angle - np.radians(RIPPLE_PHASE), TURN * turns - angle - np.radians(RIPPLE_PHASE)]
-    return list(np.concatenate(shifts) / (TURN * RIPPLE_HZ))
-
-
-CORNERS = sorted({float(t) for t in [*INPUT_CORNERS, *lost_contact_times()] if np.isfinite(t)})
-
-
-def steady_start(end):
-    """The steady window: the last ten periods of the lowest frequency, the last half under a feed or on a belt, else all."""
-    if PERIODIC:
-        return max(0.0, end - 10 / LOWEST_HZ)
-    return end / 2 if FED or COUNTERFACE == "belt" else 0.0
-
-`;
-
-const scaleText = `# Peaks of d and v_r, for the absolute tolerances alone.
-SCALES = np.array([
-    (CLAIM.get("driveForcePeak") or 0.0) / STIFFNESS if STIFFNESS else CLAIM.get("peakDisplacement") or 0.0,
-    CLAIM.get("slipVelocityPeak") or 0.0,
-])
-SCALES = np.where(SCALES > 0, SCALES, 1.0)
 `;

@@ -25,22 +25,22 @@ class Window:
         return self.integral(of) / (self.end - self.start)
 
     def largest(self, of):
-        """The largest value; the best node and its neighbours are polished."""
-        best, where = -np.inf, None
+        """The largest value: of the nodes, and of the crests between them that may stand higher, each polished."""
+        largest, tops = -np.inf, []
         for stretch, values, _, pieces in self.tables:
-            column = of(values) + 0.0 * values["t"]
-            guess = crests(values["t"], column)
-            i = int(np.argmax(guess))
-            if guess[i] > best:
-                best, where = guess[i], (stretch, values["t"], column, pieces, i)
-        stretch, times, column, pieces, i = where
-        low, high = times[max(0, i - 1)], times[min(len(times) - 1, i + 1)]
-        found = float(np.max(column))
-        if high > low:
+            times, column = values["t"], of(values) + 0.0 * values["t"]
+            guess = crests(times, column)
+            largest = max(largest, float(np.max(column)))
+            if np.min(column) == np.max(column):
+                continue
+            tops += [(guess[i], stretch, pieces, times[max(0, i - 1)], times[min(len(times) - 1, i + 1)]) for i in np.flatnonzero(guess >= largest)]
+        for guess, stretch, pieces, low, high in sorted(tops, key=lambda top: -top[0])[:MOST_TOPS]:
+            if guess < largest or not high > low:
+                continue
             look = lambda t: -float(of(stretch.state(t, piece_of(pieces, t))))
             tolerance = 1e-9 * (high - low)
-            found = max(found, -minimize_scalar(look, bounds=(low, high), method="bounded", options={"xatol": tolerance}).fun)
-        return found
+            largest = max(largest, -minimize_scalar(look, bounds=(low, high), method="bounded", options={"xatol": tolerance}).fun)
+        return largest
 
     def peak(self, of):
         return max(self.largest(of), self.largest(lambda s: -of(s)))
@@ -60,8 +60,8 @@ def piece_of(pieces, t):
 def tabulated(stretch, low, high):
     """Values by name at the nodes of every piece between low and high, and their weights."""
     pieces = [(max(low, a), min(high, b), p) for a, b, p in stretch.pieces if a < high and b > low or a == b]
-    if stretch.side == 0:
-        cuts = np.linspace(low, high, 5 + int((high - low) * FASTEST_HZ * 20))
+    if not pieces:
+        cuts = np.sort([*np.linspace(low, high, 5 + int((high - low) * FASTEST_HZ * 20)), *stretch.kinks(low, high)])
         pieces = [(a, b, None) for a, b in zip(cuts[:-1], cuts[1:])]
     parts, weights = [], np.zeros(1)
     for a, b, piece in pieces:
@@ -144,7 +144,7 @@ def quantities(events, stretches):
     q["restTime"] = rest
     at_rest = None
     if rest is not None:
-        here = next((s for s in stretches if s.start <= rest <= s.end and s.side == 0), stretches[-1])
+        here = next(s for s in reversed(stretches) if s.start <= rest)
         at_rest = here.state(rest)
     q["restDisplacement"] = at_rest and at_rest["x"]
     level = equilibrium(force(rest, here.at) + WEIGHT) if rest is not None and rest >= FORCE_CONSTANT_FROM else None

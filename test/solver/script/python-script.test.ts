@@ -43,12 +43,8 @@ describe("the Python file of a scenario", () => {
     }
   });
 
-  it("says why there is none for a run that was cut off or a spring with reversals of its own", () => {
+  it("says why there is none for a run that was cut off", () => {
     expect(pythonGap(decay, "max-events")).toMatch(/cut off/u);
-    const solid = { model: "displacement-proportional", lossFactor: 0.1 } as const;
-    expect(pythonGap({ ...decay, solid }, "time")).toBeNull();
-    const fed = { ...decay, solid, base: [{ kind: "ramp", rate: 1, start: 0, stop: "none" }] } as Scenario;
-    expect(pythonGap(fed, "time")).toMatch(/solid damping/u);
   });
 });
 

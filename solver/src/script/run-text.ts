@@ -1,0 +1,230 @@
+/** Python: the motion of a body that sticks and slips, integrated from event to event. */
+export const runText = `
+# ---- The motion ----------------------------------------------------------------------------------------------------
+
+
+def slide(start, d, slip, side, pull, at, end):
+    """Integrates a slip to the first time that v_r, d' or d passes 0, or to end; the pieces, the time, d and v_r there, and which."""
+    half = int(np.sign(d)) or pull
+    is_apart = SOLID_SHARE and spring_sense(at, at) != 0  # v_r and d' are not the same motion
+
+    def rates(t, z):
+        _, y1, y2 = base(t, at)
+        _, u1, u2 = counterface(t, at)
+        d, slip = z
+        stretch = slip + u1 - y1
+        spring = STIFFNESS * d + CUBIC * d**3 + (DAMPING + SOLID_VISCOUS) * stretch
+        solid = pull * half * SOLID_SHARE * STIFFNESS * d
+        contact = -side * RADIUS * slide_friction(max(side * slip, 0.0), t, at)
+        return stretch, (force(t, at) - spring - solid + WEIGHT + contact) / MASS - floor(t, at) - u2
+
+    def watched(t, z):
+        """What ends the slip where it falls below 0."""
+        values = [("contact", side * z[1], NOISE * SCALES[1])]
+        if SOLID_SHARE:
+            values.append(("half", half * z[0], NOISE * SCALES[0]))
+        if is_apart:
+            values.append(("spring", pull * (z[1] + drift_of_spring(t, at)), NOISE * SCALES[1]))
+        return values
+
+    solver = DOP853(rates, start, (d, slip), end, rtol=RTOL, atol=ATOL * SCALES, max_step=LONGEST_STEP)
+    pieces, above = [], {}
+    while solver.status == "running":
+        message = solver.step()
+        if solver.status == "failed":
+            sys.exit(f"The integration failed at t = {solver.t}: {message}")
+        piece, old, new = solver.dense_output(), solver.t_old, solver.t
+        pieces.append((old, new, piece))
+        for t in np.linspace(old, new, LOOKS + 1)[1:]:
+            found = []
+            for i, (name, value, noise) in enumerate(watched(t, piece(t))):
+                look = lambda s: watched(s, piece_at(pieces, s))[i][1]
+                if value > noise:
+                    above[name] = t
+                elif value < -noise or t == end and is_zero_at(t, value, look, new - old):
+                    found.append((found_zero(look, above.get(name, start), t), name))
+            if found:
+                zero, name = min(found)
+                zero = end if end - zero < NEAR * end else zero
+                pieces = [(a, min(b, zero), p) for a, b, p in pieces if a <= zero]
+                d, slip = piece_at(pieces, zero)
+                return pieces, zero, 0.0 if name == "half" else d, {"contact": 0.0, "spring": -drift_of_spring(zero, at)}.get(name, slip), name
+    return pieces, end, solver.y[0], solver.y[1], None
+
+
+def is_zero_at(t, value, look, step):
+    """Whether what is watched passes 0 at t but for rounding; one that only approaches 0 does not."""
+    gain = (value - look(t - 1e-4 * step)) / (1e-4 * step)
+    return gain < 0 and abs(value / gain) < NEAR * t
+
+
+def piece_at(pieces, t):
+    for old, _, piece in reversed(pieces):
+        if t >= old:
+            return piece(t)
+    return pieces[0][2](t)
+
+
+def found_zero(g, low, high):
+    """Where g passes from above 0 to below it."""
+    return brentq(g, low, high, xtol=1e-15 * max(1.0, high), rtol=9e-16) if g(low) > 0 > g(high) else (low if g(low) <= 0 else high)
+
+
+def first_passed(hold, start, end):
+    """When a hold is first passed, told where the need equals what there is, and a time soon after; None twice if not before end."""
+    times = looks_at(start, end)
+    passed = lambda t: over(*hold(t))
+    for first in range(0, len(times) - 1, 4096):
+        some = times[first : first + 4097]
+        found = np.flatnonzero(passed(some) + 0.0 * some > 0)
+        if len(found) == 0:
+            continue
+        i = found[0]
+        if i == 0:
+            return some[0], some[0]
+        finest = {"xtol": 1e-15 * max(1.0, end), "rtol": 9e-16}
+        broken = brentq(passed, some[i - 1], some[i], **finest)
+        equal = lambda t: abs(hold(t)[0]) - hold(t)[1]
+        return brentq(equal, some[i - 1], broken, **finest) if equal(some[i - 1]) < 0 < equal(broken) else broken, some[i]
+    return None, None
+
+
+def stick(start, x, at, end, pull=None):
+    """When the needed force first passes what friction can hold, and the side it then slips to; None if not before end.
+
+    Without pull, d' may turn on the way.
+    """
+    origin = counterface(start, at)[0]
+
+    def needed(t):
+        d = x + counterface(t, at)[0] - origin - base(t, at)[0]
+        return needed_force(t, at, d, spring_sense(t, at) if pull is None else pull)
+
+    broken, after = first_passed(needed, start, end)
+    return broken, 0 if broken is None else -int(np.sign(needed(after)[0]))
+
+
+def breaks_later(t, x):
+    """Whether a body stuck at t breaks away if the inputs go on for ever."""
+    for end in [corner for corner in CORNERS if corner > t] + [None]:
+        at = (t + end) / 2 if end else t + 1.0
+        if end is None and (STIFFNESS + CUBIC * (x - base(t, at)[0]) ** 2) * STRETCH_RATE != FORCE_RATE:
+            return True
+        if stick(t, x, at, end or t + (LOOK_AHEAD or 1.0))[0] is not None:
+            return True
+        if end:
+            x, t = x + counterface(end, at)[0] - counterface(t, at)[0], end
+    return False
+
+
+def run():
+    """The events and stretches of the whole run."""
+    t, x, v, side, pull, met = 0.0, START_PLACE, START_VELOCITY, None, None, None
+    events, stretches = [], []
+    for t, end, at in between(CORNERS):
+        side, pull, tell = entered(t, x, v, side, pull, met, at)
+        met = None
+        if not events:
+            events.append(event("start", t, x, v, side, pull, at))
+        if tell:
+            events.append(event(tell, t, x, v, side, pull, at))
+        while t < end:
+            if side == 0 and UNTIL_REST and t >= CONSTANT_FROM and not breaks_later(t, x):
+                stretches.append(Stretch(t, at, 0, pull, x))
+                return events + [event("end", t, x, v, 0, pull, at)], stretches
+            now = Stretch(t, at, side, pull, x)
+            stretches.append(now)
+            d, slip, tell = x - base(t, at)[0], v - counterface(t, at)[1], None
+            if side == 0:
+                broken, leaves = stick(t, x, at, end, pull)
+                now.end = t = end if broken is None else broken
+                x, v = now.end_state()["x"], counterface(t, at)[1]
+                if broken is not None:
+                    side, tell = leaves, "break-away"
+                    pull = pull or side
+            elif pull == 0:
+                broken, after = first_passed(lambda s: needed_solid(s, at, d, side), t, end)
+                now.end = t = end if broken is None else broken
+                x, v = d + base(t, at)[0], base(t, at)[1]
+                if broken is not None:
+                    pull = int(np.sign(needed_solid(after, at, d, side)[0]))
+            else:
+                now.pieces, t, d, slip, met = slide(t, d, slip, side, pull, at, end)
+                now.end = t
+                x, v = d + base(t, at)[0], slip + counterface(t, at)[1]
+                if met and (t < end or end == SECONDS):
+                    stretch = 0.0 if met == "spring" else slip + drift_of_spring(t, at)
+                    side, pull, tell = settled(t, d, slip, stretch, side, pull, at)
+                    met = None
+            if tell:
+                events.append(event(tell, t, x, v, side, pull, at))
+    events.append(event("end", t, x, v, side, pull, at))
+    return events, stretches
+
+
+def entered(t, x, v, side, pull, met, at):
+    """What a corner does: side and pull after it, and the event. met tells what has come to 0 on it."""
+    slip, stretch, d = v - counterface(t, at)[1], v - base(t, at)[1], x - base(t, at)[0]
+    tiny = 1e-12 * max(abs(v), FACE_SPEED)
+    if side is None:
+        side = int(np.sign(slip)) if abs(slip) > tiny else 0
+    if met == "contact" or (side == 0 or COUNTERFACE == "base") and abs(slip) <= tiny:
+        slip = 0.0
+    elif COUNTERFACE != "base" and side * slip < 0:
+        slip = -slip  # nothing has jumped, so it has not turned
+    if met == "spring" or pull == 0 and abs(stretch) <= tiny:
+        stretch = 0.0
+    if 0.0 in (slip, stretch) and spring_sense(t, at) == 0:
+        slip = stretch = 0.0
+    return settled(t, d, slip, stretch, side, pull, at)
+
+
+def settled(t, d, slip, stretch, side, pull, at):
+    """How a body goes on just after t: its side, its pull, and the event; v_r and d' are exactly 0 where they have come to 0."""
+    ahead = int(spring_sense(at, at)) if SOLID_SHARE else 0
+    before, along = side, int(np.sign(stretch))
+    if slip != 0.0:
+        side = int(np.sign(slip))
+        if ahead == 0:
+            pull = side
+        elif along:
+            pull = along
+        else:
+            held = needed_solid(t, at, d, side)
+            pull = 0 if over(*held) <= 0 else int(np.sign(held[0]))
+    elif ahead == 0 or along:
+        held = needed_force(t, at, d, along if ahead else 0)
+        side = 0 if holds(*held, before) else -int(np.sign(held[0])) or before
+        pull = along if ahead else side
+    else:
+        side, pull = settled_both(t, d, before, ahead, at)
+    return side, pull, None if side == before else "stop" if side == 0 else "break-away" if before == 0 else "turn"
+
+
+def settled_both(t, d, before, ahead, at):
+    """The same where v_r and d' are 0 at once for an instant: m a = free - S sgn(a - y'') - f sgn(a - u'') has one solution a."""
+    if holds(*needed_force(t, at, d, ahead), before):
+        return 0, ahead
+    if over(*needed_solid(t, at, d, -ahead)) <= 0:
+        return -ahead, 0
+    y2, u2 = base(t, at)[2], counterface(t, at)[2]
+    free = force(t, at) - STIFFNESS * d - CUBIC * d**3 + WEIGHT
+    least = RADIUS * slide_friction(0.0, t, at) + SOLID_SHARE * STIFFNESS * abs(d)
+    if free - least > MASS * max(y2, u2):
+        return 1, 1
+    if free + least < MASS * min(y2, u2):
+        return -1, -1
+    return -ahead, ahead
+
+
+def holds(needed, room, rounding, before):
+    """Whether v_r stays 0; with no friction at all it only passes."""
+    return (LAW != "none" or room > 0 or before == 0) and over(needed, room, rounding) <= 0
+
+
+def event(kind, t, x, v, side, pull, at):
+    """An event with the friction force just after it."""
+    d, slip = x - base(t, at)[0], v - counterface(t, at)[1]
+    here = Stretch(t, at, side, pull, x).state(t, (lambda s: (d, slip)) if side else None)
+    return kind, t, x, v, float(here["f"])
+`;
