@@ -1,6 +1,6 @@
 import type { StoredExploration } from "@restband/api/contract";
 import { useSuspenseQueries } from "@tanstack/react-query";
-import { useLocation, useParams } from "react-router-dom";
+import { useParams } from "react-router-dom";
 import { explorationQuery } from "../api/explorations.ts";
 import { projectQuery } from "../api/projects.ts";
 import { ButtonLink } from "../components/button.tsx";
@@ -23,7 +23,6 @@ export function ExplorationPage() {
   });
   const canEdit = mayEdit(project.role) && project.archivedAt === null;
   const open = useOpenScenario(projectId);
-  const { state } = useLocation() as { state: { isFresh?: boolean } | null };
   return (
     <>
       <title>{`${stored.title} · Restband`}</title>
@@ -40,7 +39,6 @@ export function ExplorationPage() {
           <SweepView
             key={stored.id}
             {...{ projectId, stored, canEdit }}
-            isFresh={state?.isFresh === true}
             answer={cellAnswer}
             {...(canEdit && { open })}
             compare={(cell) => (
@@ -52,9 +50,7 @@ export function ExplorationPage() {
             )}
           />
         )}
-        {stored.kind === "study" && (
-          <StudyView key={stored.id} {...{ projectId, stored, canEdit }} isFresh={state?.isFresh === true} />
-        )}
+        {stored.kind === "study" && <StudyView key={stored.id} {...{ projectId, stored, canEdit }} />}
         {stored.kind === "search" && <KeptSearch stored={stored} {...(canEdit && { open })} />}
       </main>
     </>

@@ -11,6 +11,7 @@ import { Section, WorkedPage } from "../components/section.tsx";
 import { announce } from "../components/status.tsx";
 import { WorkHeader } from "../features/account/work-header.tsx";
 import { KeptList } from "../features/explore/kept/kept-list.tsx";
+import { noteRunning } from "../features/explore/kept/running-here.ts";
 import { sweepToKeep } from "../features/explore/sweep/stored-sweep.ts";
 import { SweepBuilder } from "../features/explore/sweep/sweep-builder.tsx";
 import { studyToKeep } from "../features/explore/study/stored-study.ts";
@@ -99,7 +100,8 @@ function useKeep(projectId: string, scenarioId: string) {
     },
     async andOpen(draft: ExplorationDraft): Promise<void> {
       const { id } = await create(scenarioId, draft);
-      await navigate(paths.exploration(projectId, scenarioId, id), { state: { isFresh: true } });
+      noteRunning(id);
+      await navigate(paths.exploration(projectId, scenarioId, id));
     },
   };
 }

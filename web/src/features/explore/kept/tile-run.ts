@@ -7,6 +7,7 @@ import { CalledOff, type TileErrand } from "../../../compute/errand.ts";
 import { explorePool } from "../../../compute/explore-pools.ts";
 import { runTiles } from "../../../compute/run-tiles.ts";
 import { runnerId } from "./runner-id.ts";
+import { noteRunning, noteStopped } from "./running-here.ts";
 
 /** The rows of a sweep or a study that are there so far. */
 export interface TileStore {
@@ -28,10 +29,14 @@ export interface TileWork<Store extends TileStore> {
 export type TileState =
   | { readonly kind: "waiting" }
   | { readonly kind: "running"; readonly elapsed: number; readonly doneBefore: number }
+  /** Another page computes it. */
+  | { readonly kind: "elsewhere" }
   | { readonly kind: "failed"; readonly message: string };
 
 const AT_A_TIME = 4;
 const TRY_AGAIN_MS = 3000;
+/** What a server says that will say so again: it knows no such exploration any more, or takes no such tile. */
+const FINAL = [400, 404, 413, 422];
 
 /**
  * A sweep or a study while it is open or computed: it lives outside the page's parts, so that it goes on while somebody looks
@@ -51,6 +56,8 @@ export class TileRun<Store extends TileStore> {
   private edition = 0;
   private readonly listeners = new Set<() => void>();
   private controller: AbortController | null = null;
+  /** Why the server takes no more of it; null while it does. */
+  private refusal: string | null = null;
   private reading: Promise<void> = Promise.resolve();
 
   constructor(
@@ -90,16 +97,19 @@ export class TileRun<Store extends TileStore> {
     for (let i = 0; i < missing.length; i += AT_A_TIME) {
       const tiles = await readTiles(this.projectId, this.explorationId, missing.slice(i, i + AT_A_TIME));
       for (const { number, rows } of tiles) this.store.setTile(number, rows);
+      if (this.isComplete) noteStopped(this.explorationId);
       this.tell();
     }
   }
 
   /**
-   * Computes what is missing, until it is complete or stopped. `isKept` false: the person may not save, it is computed
-   * for this page alone.
+   * Computes what is missing, until it is complete or stopped; where another page does so already, that one goes on. `isKept`
+   * false: the person may not save, it is computed for this page alone.
    */
   async start(isKept: boolean): Promise<void> {
     if (this.state.kind === "running") return;
+    this.refusal = null;
+    if (isKept) noteRunning(this.explorationId);
     const controller = (this.controller = new AbortController());
     const since = performance.now();
     const doneBefore = this.store.done;
@@ -128,11 +138,19 @@ export class TileRun<Store extends TileStore> {
           progress();
         },
       });
+      if (this.isComplete) noteStopped(this.explorationId);
       this.set({ kind: "waiting" });
     } catch (error) {
       this.under.clear();
-      this.set(error instanceof CalledOff ? { kind: "waiting" } : { kind: "failed", message: sentenceOf(error) });
+      this.set(this.endOf(error));
     }
+  }
+
+  private endOf(error: unknown): TileState {
+    if (error instanceof ApiFailure && error.code === "running") return { kind: "elsewhere" };
+    if (error instanceof CalledOff)
+      return this.refusal === null ? { kind: "waiting" } : { kind: "failed", message: this.refusal };
+    return { kind: "failed", message: sentenceOf(error) };
   }
 
   /** Takes tiles that were computed elsewhere; those that are there stay as they are. */
@@ -146,6 +164,7 @@ export class TileRun<Store extends TileStore> {
 
   /** Frees the workers at once; what is computed stays. */
   stop(): void {
+    noteStopped(this.explorationId);
     this.controller?.abort();
     void call("releaseExploration", { ...this.at, body: { runner: runnerId() } }).catch(() => undefined);
   }
@@ -169,7 +188,7 @@ export class TileRun<Store extends TileStore> {
     }
   }
 
-  /** Saves one tile after the other; a server that is gone is tried again, one that refuses is not. */
+  /** Saves one tile after the other; a server that is gone is tried again, one that refuses ends the run. */
   private async save(): Promise<void> {
     if (this.isSaving) return;
     this.isSaving = true;
@@ -181,12 +200,20 @@ export class TileRun<Store extends TileStore> {
         this.trouble = null;
       } catch (error) {
         this.trouble = error instanceof ApiFailure ? error.message : "Saving has failed.";
-        if (error instanceof ApiFailure && error.status === 404) this.unsaved.clear();
+        if (error instanceof ApiFailure && FINAL.includes(error.status)) this.giveUp(error.message);
         else await new Promise((resolve) => setTimeout(resolve, TRY_AGAIN_MS));
       }
       this.tell();
     }
     this.isSaving = false;
+  }
+
+  private giveUp(refusal: string): void {
+    this.unsaved.clear();
+    this.refusal = refusal;
+    noteStopped(this.explorationId);
+    if (this.state.kind === "running") this.controller?.abort();
+    else this.set({ kind: "failed", message: refusal });
   }
 
   private set(state: TileState): void {

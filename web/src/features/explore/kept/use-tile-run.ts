@@ -3,32 +3,37 @@ import { useQueryClient } from "@tanstack/react-query";
 import { useEffect, useRef, useSyncExternalStore } from "react";
 import { call } from "../../../api/client.ts";
 import { explorationQuery, explorationsQuery, type Conclusion } from "../../../api/explorations.ts";
+import { isRunningHere } from "./running-here.ts";
 import type { TileRun, TileStore } from "./tile-run.ts";
 
 interface TileRunSettings {
   readonly projectId: string;
   readonly stored: StoredExploration;
   readonly canEdit: boolean;
-  /** True where it has just been asked for: it begins by itself. */
-  readonly isFresh: boolean;
   /** What it says once all its rows are there; null until that is known. */
   readonly conclusion: Conclusion | null;
 }
 
-/** Fills a run with what is saved, tells each change, begins it where it is fresh and concludes it when it is complete. */
+/**
+ * Fills a run with what is saved, tells each change, and concludes it when it is complete. What this browser was computing goes
+ * on by itself, as soon as no other page does.
+ */
 export function useTileRun(run: TileRun<TileStore>, settings: TileRunSettings): void {
-  const { projectId, stored, canEdit, isFresh, conclusion } = settings;
+  const { projectId, stored, canEdit, conclusion } = settings;
   useSyncExternalStore(run.subscribe, run.editionNow);
   const client = useQueryClient();
   useEffect(() => void run.fetch(stored.saved), [run, stored.saved]);
 
-  const hasBegun = useRef(false);
-  const isToBegin = isFresh && stored.headline === null;
+  const isOpen = canEdit && stored.headline === null;
   useEffect(() => {
-    if (!isToBegin || hasBegun.current) return;
-    hasBegun.current = true;
-    void run.start(true);
-  }, [run, isToBegin]);
+    if (isOpen && !run.isComplete && isRunningHere(stored.id)) void run.start(true);
+  }, [run, isOpen, stored.id, stored.state]);
+
+  const isElsewhere = run.state.kind === "elsewhere";
+  useEffect(() => {
+    // Read anew it says who computes it, and is read again as long as somebody does.
+    if (isElsewhere) void client.invalidateQueries({ queryKey: explorationQuery(projectId, stored.id).queryKey });
+  }, [client, isElsewhere, projectId, stored.id]);
 
   const isConcluding = useRef(false);
   const isToConclude = canEdit && stored.headline === null && run.isComplete && run.unsavedCount === 0;

@@ -16,11 +16,10 @@ interface StudyViewProps {
   projectId: string;
   stored: StoredExploration;
   canEdit: boolean;
-  isFresh: boolean;
 }
 
 /** A tolerance study: how likely each limit is kept, how each quantity scatters, and what matters most. */
-export function StudyView({ projectId, stored, canEdit, isFresh }: StudyViewProps) {
+export function StudyView({ projectId, stored, canEdit }: StudyViewProps) {
   useUnitSystem();
   const scenario = stored.content;
   const plan = useMemo(() => storedStudy(stored), [stored]);
@@ -30,7 +29,7 @@ export function StudyView({ projectId, stored, canEdit, isFresh }: StudyViewProp
     () => (summary?.runs === plan.runs ? { headline: studyHeadline(summary, scenario), answer: {} } : null),
     [summary, plan.runs, scenario],
   );
-  useTileRun(run, { projectId, stored, canEdit, isFresh, conclusion });
+  useTileRun(run, { projectId, stored, canEdit, conclusion });
   return (
     <>
       <div className="grid gap-x-12 gap-y-5 pb-8 wide:grid-cols-[minmax(0,1fr)_388px]">

@@ -28,15 +28,13 @@ interface SweepViewProps {
   projectId: string;
   stored: StoredExploration;
   canEdit: boolean;
-  /** True where it has just been asked for: it begins by itself. */
-  isFresh: boolean;
   answer: (computed: Computed) => ReactNode;
   compare?: (cell: Scenario) => ReactNode;
   open?: (scenario: Scenario, title: string) => Promise<void>;
 }
 
 /** A sweep: what it says, its map as it fills, the selected cell, and everything as a table. */
-export function SweepView({ projectId, stored, canEdit, isFresh, answer, open, compare }: SweepViewProps) {
+export function SweepView({ projectId, stored, canEdit, answer, open, compare }: SweepViewProps) {
   useUnitSystem();
   const { plan, scenario } = useMemo(() => storedSweep(stored), [stored]);
   const run = tileRunOf(projectId, stored, () => sweepWork(plan, scenario));
@@ -45,7 +43,7 @@ export function SweepView({ projectId, stored, canEdit, isFresh, answer, open, c
     () => (isComplete ? { headline: sweepHeadline(run.store), answer: {} } : null),
     [run, isComplete],
   );
-  useTileRun(run, { projectId, stored, canEdit, isFresh, conclusion });
+  useTileRun(run, { projectId, stored, canEdit, conclusion });
   const cells = run.store;
   const edition = run.editionNow();
   const [across, up] = useMemo(() => {
