@@ -61,6 +61,8 @@ export interface Route extends Address {
   readonly response?: z.ZodType;
   /** True where the request must carry `If-Match: "<version>"`. */
   readonly ifMatch?: boolean;
+  /** True where the body may carry the points of records, and is as large as an upload then. */
+  readonly carriesRecords?: boolean;
 }
 
 const id = z.uuid();
@@ -125,6 +127,7 @@ export const routes = {
     ...addresses.createScenario,
     params: projectParams,
     body: scenarioDraftSchema,
+    carriesRecords: true,
     status: 201,
     response: scenarioSchema,
   },
@@ -133,6 +136,7 @@ export const routes = {
     ...addresses.saveScenario,
     params: scenarioParams,
     body: scenarioDraftSchema,
+    carriesRecords: true,
     ifMatch: true,
     status: 200,
     response: scenarioSchema,

@@ -6,6 +6,7 @@ import { grantToServer } from "./database/grants.ts";
 import { migrateUp } from "./database/migrate.ts";
 import { demoPeople } from "./demo/demo-people.ts";
 import { removeDemo } from "./demo/remove-demo.ts";
+import { removeUnusedRecords } from "./records/records-service.ts";
 import { seedDemo } from "./demo/seed-demo.ts";
 
 /**
@@ -29,6 +30,7 @@ try {
   const migrated = await migrateUp(database);
   // Whoever could clear a signature could have it made anew by a restart: only what a migration has laid just now is signed.
   if (migrated.includes("20261201101000-chain-activity")) await signHeads(database);
+  await removeUnusedRecords(database);
   if (grantTo) await grantToServer(database, grantTo);
   if (options["reset-demo"]) await removeDemo(database);
   if (options["reset-demo"] || (await isEmpty())) await seedDemo(database, password);

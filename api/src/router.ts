@@ -19,6 +19,8 @@ const throttled = new Set<RouteName>([
 const methods = { GET: "get", POST: "post", PUT: "put", PATCH: "patch", DELETE: "delete" } as const;
 
 const readJson = express.json({ limit: "1mb" });
+/** 200,000 points take 9 MB at most; a scenario may have more than one record. */
+const readRecords = express.json({ limit: "20mb" });
 
 /**
  * Registers every route of the contract, all by the same steps: permitted? from our pages? too often? well formed?
@@ -33,7 +35,7 @@ export function createRouter(handlers: Handlers, findCaller: FindCaller, throttl
       permit(name, findCaller),
       csrf,
       ...(throttled.has(name) ? [throttle.countOrigin] : []),
-      ...(route.body ? [readJson] : []),
+      ...(route.body ? [route.carriesRecords ? readRecords : readJson] : []),
       validate(route),
       handle(route, handlers[name] as Handler<RouteName>),
     );

@@ -1,7 +1,7 @@
 /** The door of the solver: all that others may use. */
 export { z } from "./scenario/zod.ts";
 export * from "./scenario/scenario.ts";
-export { canonicalForm, canonicalText, digestOf, recordDigest } from "./scenario/canonical.ts";
+export { canonicalForm, canonicalText, digestOf, recordDigest, storedForm } from "./scenario/canonical.ts";
 export { checkScenario, type Checked } from "./scenario/check-scenario.ts";
 export { checkTerm, type CheckedTerm } from "./scenario/check-term.ts";
 export { compileProblem, gravity, normalForce } from "./scenario/compile-problem.ts";

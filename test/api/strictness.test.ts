@@ -99,12 +99,19 @@ describe.each(withBody)("the body of %s", (name) => {
       415,
       "not-json",
     ],
-    ["too much", { text: JSON.stringify({ name: "x".repeat(1_100_000) }) }, 413, "too-large"],
     ["nothing", { headers: { "Content-Type": "application/json" } }, 400, undefined],
   ])("may not be %s", async (_, request, status, code) => {
     const failure = await fail(request);
     expect(failure.status).toBe(status);
     if (code) expect(failure.code).toBe(code);
+  });
+
+  it("may not be too large, and the answer says how large it may be", async () => {
+    const most = (routes[name] as Route).carriesRecords ? 20 : 1;
+    const text = JSON.stringify({ name: "x".repeat(most * 2 ** 20) });
+    expect(await fail({ text })).toMatchObject({
+      ...{ status: 413, code: "too-large", message: `The body is larger than ${most} MB.` },
+    });
   });
 });
 

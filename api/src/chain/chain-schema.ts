@@ -5,11 +5,11 @@ import { addresses } from "../addresses.ts";
 export const chainFaultSchema = z.strictObject({
   /** Null for the acts that concern no project. */
   projectId: z.uuid().nullable(),
-  /** "revisions" and the like; "chains" for a row that is gone, and for the end of the chain. */
+  /** "revisions" and the like; "chains" for a row that is gone, and for the end of the chain; "records" for points. */
   table: z.string(),
-  /** The row's own id; null where it is gone. */
+  /** The row's own id, of points their digest; null where it is gone. */
   id: z.string().nullable(),
-  /** Its place in the chain, from 1. */
+  /** Its place in the chain, from 1; 0 for points, which have none. */
   sequence: z.number().int(),
   message: z.string(),
 });

@@ -1,6 +1,6 @@
 import { type Database, signingKeyOf } from "../database/database.ts";
 import type { ChainFault, Integrity } from "./chain-schema.ts";
-import { chainedTables, nowhere } from "./chained-tables.ts";
+import { addedTables, nowhere } from "./chained-tables.ts";
 import { type Walk, walkChain } from "./walk.ts";
 
 /** A walk over everything is done again once so many times its own duration has passed. */
@@ -82,8 +82,8 @@ function sparing<T>(work: () => Promise<T>): (isFresh: boolean) => Promise<T> {
 
 /** True where the database itself refuses to change what is only ever added to. */
 async function refusesChanges(database: Database): Promise<boolean> {
-  for (const table of chainedTables) {
-    for (const statement of ["UPDATE ?? SET sequence = sequence WHERE 1 = 0", "DELETE FROM ?? WHERE 1 = 0"]) {
+  for (const table of addedTables) {
+    for (const statement of ["UPDATE ?? SET project_id = project_id WHERE 1 = 0", "DELETE FROM ?? WHERE 1 = 0"]) {
       if (!(await isDenied(database, statement, table))) return false;
     }
   }

@@ -5,6 +5,9 @@
 export const chainedTables = ["activity", "revisions", "replays", "review_requests", "decisions", "comments"] as const;
 export type ChainedTable = (typeof chainedTables)[number];
 
+/** All tables that are only ever added to: the links of chains, and the points of records that they name by digest. */
+export const addedTables = [...chainedTables, "records"] as const;
+
 /** Rows that carry a signature of their own, to be proved by themselves wherever they are taken. */
 export const signedTables: ReadonlySet<ChainedTable> = new Set(["revisions", "decisions"]);
 

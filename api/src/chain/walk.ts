@@ -1,4 +1,5 @@
 import { type Database, signingKeyOf } from "../database/database.ts";
+import { digestsIn, recordFaults } from "../records/records-service.ts";
 import type { ChainFault } from "./chain-schema.ts";
 import { type ChainedTable, chainedTables, nowhere, signedTables } from "./chained-tables.ts";
 import { hashOf, type Row, signedHeadText, signedRowText } from "./link.ts";
@@ -47,6 +48,7 @@ export async function walkChain(database: Database, projectId: string | null): P
       for (const link of found) walker.pass(link);
     }
     for (const link of await linksOf(transaction, projectId, head.sequence + 1, Infinity)) walker.pass(link);
+    if (projectId) walker.passRecords(await recordFaults(transaction, projectId, walker.records));
     return walker.end(head);
   });
 }
@@ -70,6 +72,8 @@ class Walker {
   readonly #projectId: string | null;
   readonly #key: SigningKey;
   readonly #faults: ChainFault[] = [];
+  /** Digests of the records that what was frozen names. */
+  readonly records: string[] = [];
   #rows = 0;
   #sequence = 0;
   /** Of the row passed last; null where that one is gone. */
@@ -86,9 +90,15 @@ class Walker {
     this.#noteGap(row.sequence);
     if (this.#hash && !row.previous_hash.equals(this.#hash)) note("It does not follow the row before it.");
     for (const fault of rowFaults(table, row, this.#key)) note(fault);
+    if (table === "revisions") this.records.push(...digestsIn(String(row.content)));
     this.#rows += 1;
     this.#sequence = row.sequence;
     this.#hash = row.hash;
+  }
+
+  /** Points are no links of the chain: they stand or fall with the digest that a link names. */
+  passRecords(faults: readonly { digest: string; message: string }[]): void {
+    for (const { digest, message } of faults) this.#note({ table: "records", id: digest, sequence: 0, message });
   }
 
   /** Rows that are gone, and rows that stand twice at one place. */

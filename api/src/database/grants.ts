@@ -1,8 +1,8 @@
-import { chainedTables } from "../chain/chained-tables.ts";
+import { addedTables } from "../chain/chained-tables.ts";
 import type { Database } from "./database.ts";
 
 /** Tables to which the server only ever adds: its account can neither change nor remove what stands there. */
-const appendOnly = new Set<string>(chainedTables);
+const appendOnly = new Set<string>(addedTables);
 
 /** Tables the server's account has no business with. */
 const closed = new Set(["knex_migrations_lock"]);

@@ -1,4 +1,4 @@
-import { chainedTables } from "../chain/chained-tables.ts";
+import { addedTables } from "../chain/chained-tables.ts";
 import type { Database } from "../database/database.ts";
 import { normaliseEmail } from "../accounts/email.ts";
 import { demoPeople } from "./demo-people.ts";
@@ -15,7 +15,7 @@ export async function removeDemo(database: Database): Promise<void> {
       .where({ role: "owner" })
       .distinct("project_id");
     const ids = (await projects).map((row: { project_id: string }) => row.project_id);
-    for (const table of [...chainedTables, "chains", "notices", "checklists", "scenarios", "members"])
+    for (const table of [...addedTables, "chains", "notices", "checklists", "scenarios", "members"])
       await transaction(table).whereIn("project_id", ids).delete();
     await transaction("projects").whereIn("id", ids).delete();
     await removePeople(transaction, people);

@@ -2,6 +2,7 @@ import { digestOf, type Scenario, type z } from "@restband/solver";
 import { recordAct } from "../activity/activity-service.ts";
 import type { Database } from "../database/database.ts";
 import { Refusal } from "../errors.ts";
+import { withPoints } from "../records/records-service.ts";
 import type { ScenariosService } from "../scenarios/scenarios-service.ts";
 import { explorationOf, missing, summaryOf } from "./exploration-rows.ts";
 import { createRunners, type Place } from "./exploration-runners.ts";
@@ -27,7 +28,8 @@ export function createExplorationsService(database: Database, scenarios: Scenari
   const read = async (db: Database, { projectId, explorationId }: Place): Promise<StoredExploration> => {
     const row = (await findExploration(db, projectId, explorationId)) ?? missing();
     const { content } = await scenarios.read(projectId, row.scenario_id);
-    return explorationOf(row, await listTileNumbers(db, explorationId), inputDigestOf(content));
+    const exploration = explorationOf(row, await listTileNumbers(db, explorationId), inputDigestOf(content));
+    return { ...exploration, content: await withPoints(db, projectId, exploration.content) };
   };
 
   const runners = createRunners(database);

@@ -1,5 +1,5 @@
 import { randomUUID } from "node:crypto";
-import type { Scenario, z } from "@restband/solver";
+import { canonicalForm, type Scenario, type z } from "@restband/solver";
 import type { Database } from "../database/database.ts";
 import type { explorationDraftSchema, ExplorationKind, StoredTile } from "./explorations-schema.ts";
 
@@ -132,7 +132,7 @@ export async function insertExploration(database: Database, insertion: Insertion
     kind: draft.kind,
     title: draft.title,
     headline: draft.conclusion?.headline ?? null,
-    content: JSON.stringify(insertion.content),
+    content: JSON.stringify(canonicalForm(insertion.content)),
     scenario_version: draft.scenarioVersion,
     input_digest: Buffer.from(insertion.inputDigest, "hex"),
     solver_version: draft.solverVersion,

@@ -35,9 +35,11 @@ function refusalOf(error: unknown): Refusal | null {
 
 /** What express and its body parser throw about a request that is not even well formed. */
 function malformed(error: unknown): Refusal | null {
-  const { type, status } = Object(error) as { type?: string; status?: number };
+  const { type, status, limit = 0 } = Object(error) as { type?: string; status?: number; limit?: number };
   if (type === "entity.parse.failed") return new Refusal(400, "not-json", "The body is no JSON.");
-  if (type === "entity.too.large") return new Refusal(413, "too-large", "The body is larger than 1 MB.");
+  if (type === "entity.too.large") {
+    return new Refusal(413, "too-large", `The body is larger than ${Math.round(limit / 2 ** 20)} MB.`);
+  }
   const isTheirs = status !== undefined && status >= 400 && status < 500;
   return isTheirs ? new Refusal(status, "bad-request", "The request is not well formed.") : null;
 }

@@ -3,6 +3,7 @@ import { saversOf, recordAct } from "../activity/activity-service.ts";
 import { holdChain } from "../chain/chain.ts";
 import type { Database } from "../database/database.ts";
 import { notFound, Refusal, refusedContent } from "../errors.ts";
+import { pathsWithoutPoints, withPoints } from "../records/records-service.ts";
 import { holdVersion, readVersion } from "../scenarios/scenarios-service.ts";
 import { disagreements, unknownQuantities } from "./disagreement.ts";
 import type { Recompute } from "./recompute-pool.ts";
@@ -33,6 +34,8 @@ export function createRevisionsService(database: Database, recompute: Recompute)
     if (stored.digest !== freeze.digest) throw otherDigest();
     const unknown = unknownQuantities(freeze.result);
     if (unknown.length > 0) throw refusedContent("refused-result", unknown);
+    const lost = pathsWithoutPoints(stored.content);
+    if (lost.length > 0) throw refusedContent("lost-points", lost.map(lossAt));
     const text = canonicalText(stored.content);
     return {
       ...{ projectId, scenarioId, scenarioVersion: seen, title: stored.content.title, text, digest: stored.digest },
@@ -82,20 +85,28 @@ export function createRevisionsService(database: Database, recompute: Recompute)
       return listReplays(database, place.revisionId);
     },
 
-    /** Keeps that somebody ran a revision again, and what came of it. */
-    async keepReplay(place: RevisionPlace, draft: ReplayDraft, accountId: string): Promise<Replay> {
-      demandConsistent(draft);
-      return database.transaction(async (transaction) => {
-        const { number, scenarioId } = await demand(transaction, place);
-        await insertReplay(transaction, place, draft, accountId);
-        const { way, verdict } = draft;
-        const detail = { revisionId: place.revisionId, number, way, verdict };
-        await recordAct(transaction, act({ ...place, scenarioId }, accountId, "revision.replayed", detail));
-        const [kept] = await listReplays(transaction, place.revisionId);
-        return kept;
-      });
-    },
+    keepReplay: (place: RevisionPlace, draft: ReplayDraft, accountId: string) =>
+      keepReplay(database, place, draft, accountId),
   };
+}
+
+/** Keeps that somebody ran a revision again, and what came of it. */
+async function keepReplay(
+  database: Database,
+  place: RevisionPlace,
+  draft: ReplayDraft,
+  accountId: string,
+): Promise<Replay> {
+  demandConsistent(draft);
+  return database.transaction(async (transaction) => {
+    const { number, scenarioId } = await demand(transaction, place);
+    await insertReplay(transaction, place, draft, accountId);
+    const { way, verdict } = draft;
+    const detail = { revisionId: place.revisionId, number, way, verdict };
+    await recordAct(transaction, act({ ...place, scenarioId }, accountId, "revision.replayed", detail));
+    const [kept] = await listReplays(transaction, place.revisionId);
+    return kept;
+  });
 }
 
 function act(
@@ -116,7 +127,10 @@ async function list(database: Database, projectId: string, scenarioId?: string):
 async function read(database: Database, place: RevisionPlace): Promise<Revision> {
   const frozen = await demand(database, place);
   const [standing] = await standingsOf(database, [frozen]);
-  return { ...frozen, ...standing, authors: await authorsOf(database, frozen) };
+  const content = await withPoints(database, place.projectId, frozen.content);
+  const lost = pathsWithoutPoints(content).map((path) => `The points of ${path} are not those it was frozen with.`);
+  const faults = [...frozen.faults, ...lost];
+  return { ...frozen, content, faults, ...standing, authors: await authorsOf(database, frozen) };
 }
 
 async function demand(database: Database, { projectId, revisionId }: RevisionPlace) {
@@ -138,6 +152,11 @@ function demandNews(last: RevisionSummary, next: Omit<NewRevision, "number">): v
   if (isDone || last.digest !== next.digest || last.solverVersion !== next.result.solverVersion) return;
   throw new Refusal(409, "frozen-already", `Revision ${last.number} is this very scenario. Nothing has changed since.`);
 }
+
+const lossAt = (path: string) => ({
+  path: `content.${path}`,
+  message: "The points of this record are no longer there as they were kept. Bring them in again.",
+});
 
 function otherDigest(): Refusal {
   const message = "The page shows something else than what is stored. Reload it and freeze again.";

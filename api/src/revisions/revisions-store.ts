@@ -3,7 +3,7 @@ import type { Scenario } from "@restband/solver";
 import { append } from "../chain/chain.ts";
 import { type Link, rowFaults } from "../chain/walk.ts";
 import { type Database, signingKeyOf } from "../database/database.ts";
-import { isOfDigest } from "./digest.ts";
+import { sha256Of } from "../sha256.ts";
 import type { KeptResult, Revision, RevisionSummary, Trace } from "./revisions-schema.ts";
 
 const TABLE = "revisions";
@@ -111,7 +111,7 @@ export async function insertRevision(transaction: Database, revision: NewRevisio
 }
 
 function faultsOf(database: Database, { frozen_by_name: _joined, ...row }: RevisionRow): string[] {
-  const isOwn = isOfDigest(row.content, row.digest);
+  const isOwn = sha256Of(row.content).equals(row.digest);
   return [
     ...rowFaults(TABLE, row, signingKeyOf(database)),
     ...(isOwn ? [] : ["Its text has another digest than the one it was frozen with."]),

@@ -1,9 +1,18 @@
+import type { Scenario } from "@restband/solver";
 import { recordAct } from "../activity/activity-service.ts";
 import type { Act } from "../activity/activity.ts";
 import type { Database } from "../database/database.ts";
 import { archived, notAllowed, notFound, Refusal } from "../errors.ts";
 import type { MembersService } from "../members/members-service.ts";
-import { canonicalCases, canonicalOf, changedMembers, retitled } from "./canonical-scenario.ts";
+import {
+  fillingOf,
+  keepRecords,
+  moveRecords,
+  type NamedRecord,
+  storedPoints,
+  withPoints,
+} from "../records/records-service.ts";
+import { canonicalCases, canonicalOf, changedMembers } from "./canonical-scenario.ts";
 import type { ScenarioSummary, StoredScenario, SwitchedOff } from "./scenarios-schema.ts";
 import {
   findContents,
@@ -17,6 +26,7 @@ import {
   type LockedScenario,
   markScenarioArchived,
   moveScenario,
+  textsOf,
   updateScenario,
 } from "./scenarios-store.ts";
 import { checkedSwitchedOff } from "./switched-off.ts";
@@ -29,6 +39,12 @@ interface Draft {
   readonly switchedOff?: readonly SwitchedOff[];
 }
 
+/** What a request keeps: the scenario, and the records that it or its terms switched off name. */
+type Kept = KeptScenario & { readonly records: readonly NamedRecord[] };
+
+/** Points that one answer with several contents holds at most, beyond those of the first. */
+const MOST_POINTS = 200_000;
+
 /** A scenario by the ids in a path. */
 interface Place {
   readonly projectId: string;
@@ -37,8 +53,9 @@ interface Place {
 
 export function createScenariosService(database: Database, members: MembersService) {
   /** Writes a new scenario and the act that made it. */
-  const add = (projectId: string, content: KeptScenario, accountId: string, act: Act) =>
+  const add = (projectId: string, content: Kept, accountId: string, act: Act) =>
     database.transaction(async (transaction) => {
+      await keepRecords(transaction, projectId, content.records);
       const subjectId = await insertScenario(transaction, projectId, content, accountId);
       const detail = { version: 1, digest: content.digest, title: content.title };
       await recordAct(transaction, { projectId, accountId, act, subjectId, detail });
@@ -48,30 +65,21 @@ export function createScenariosService(database: Database, members: MembersServi
   return {
     list: (projectId: string) => listScenarios(database, projectId),
     read: (projectId: string, id: string) => read(database, projectId, id),
-    /** The contents of those of the scenarios that are in the project. */
-    readContents: (projectId: string, ids: readonly string[]) => findContents(database, projectId, ids),
+    readContents: (projectId: string, ids: readonly string[]) => readContents(database, projectId, ids),
     create: async (projectId: string, draft: Draft, accountId: string): Promise<StoredScenario> =>
       add(projectId, keptOf(draft), accountId, "scenario.created"),
 
-    /** Makes a scenario of each input, or none of any. */
-    async createCases(projectId: string, inputs: readonly unknown[], accountId: string): Promise<ScenarioSummary[]> {
-      const contents = canonicalCases(inputs);
-      return database.transaction(async (transaction) => {
-        const ids = await insertScenarios(transaction, projectId, contents, accountId);
-        await recordAct(transaction, { projectId, accountId, act: "cases.created", detail: { count: ids.length } });
-        const made = await listScenarios(transaction, projectId, ids);
-        return ids.flatMap((id) => made.find((each) => each.id === id) ?? []);
-      });
-    },
+    createCases: (projectId: string, inputs: readonly unknown[], accountId: string) =>
+      createCases(database, projectId, inputs, accountId),
 
     async duplicate({ projectId, scenarioId }: Place, title: string, accountId: string): Promise<StoredScenario> {
       const { content, switchedOff } = await read(database, projectId, scenarioId);
-      const copy = { ...retitled(JSON.stringify(content), title), switchedOff };
-      return add(projectId, copy, accountId, "scenario.duplicated");
+      return add(projectId, keptOf({ content: { ...content, title }, switchedOff }), accountId, "scenario.duplicated");
     },
 
     /**
-     * Replaces the version the person has seen by the next one. What is answered is read before anybody else can save.
+     * Replaces the version the person has seen by the next one. What is answered is read before anybody else can save; its
+     * long records come back as they were sent, with their points or named by digest.
      * @throws Refusal 409 with what is stored where somebody else was faster, 422 with every faulty field
      */
     async save(
@@ -85,13 +93,14 @@ export function createScenariosService(database: Database, members: MembersServi
         const stored = await lock(transaction, projectId, subjectId);
         if (stored.version !== seen) throw staleVersion(await read(transaction, projectId, subjectId));
         if (stored.isArchived) throw archived("scenario");
+        await keepRecords(transaction, projectId, content.records);
         const version = seen + 1;
         await updateScenario(transaction, subjectId, version, content, accountId);
         const { digest, title, text } = content;
         const changed = changedMembers(stored.content, text);
         const detail = { version, digest, title, changed: changed.join(" ") };
         await recordAct(transaction, { projectId, accountId, act: "scenario.saved", subjectId, detail });
-        return read(transaction, projectId, subjectId);
+        return areNamed(content) ? demand(transaction, projectId, subjectId) : read(transaction, projectId, subjectId);
       });
     },
 
@@ -100,6 +109,36 @@ export function createScenariosService(database: Database, members: MembersServi
     archive: (place: Place, accountId: string) => mark(database, place, accountId, new Date()),
     restore: (place: Place, accountId: string) => mark(database, place, accountId, null),
   };
+}
+
+/**
+ * The contents of those of the scenarios that are in the project, in the order asked: the first, and as many of the others
+ * as an answer holds.
+ */
+async function readContents(database: Database, projectId: string, ids: readonly string[]) {
+  const found = await findContents(database, projectId, ids);
+  let points = 0;
+  const held = found.filter(({ content }, i) => (points += storedPoints(content)) <= MOST_POINTS || i === 0);
+  const fill = (content: Scenario) => withPoints(database, projectId, content);
+  return Promise.all(held.map(async (each) => ({ ...each, content: await fill(each.content) })));
+}
+
+/** Makes a scenario of each input, or none of any. */
+async function createCases(
+  database: Database,
+  projectId: string,
+  inputs: readonly unknown[],
+  accountId: string,
+): Promise<ScenarioSummary[]> {
+  const contents = canonicalCases(inputs);
+  const records = contents.flatMap((content) => content.records);
+  return database.transaction(async (transaction) => {
+    await keepRecords(transaction, projectId, records);
+    const ids = await insertScenarios(transaction, projectId, contents, accountId);
+    await recordAct(transaction, { projectId, accountId, act: "cases.created", detail: { count: ids.length } });
+    const made = await listScenarios(transaction, projectId, ids);
+    return ids.flatMap((id) => made.find((each) => each.id === id) ?? []);
+  });
 }
 
 /** Puts a scenario away or takes it out again. Doing it twice is no fault, and is told once. */
@@ -134,6 +173,7 @@ async function move(
     const { title } = await lock(transaction, projectId, subjectId);
     if (projectId === toProjectId) return;
     if (await hasRevisions(transaction, subjectId)) throw keptByRevisions();
+    await moveRecords(transaction, await textsOf(transaction, subjectId), { from: projectId, to: toProjectId });
     await moveScenario(transaction, subjectId, toProjectId);
     const told = { accountId, subjectId, detail: { title } };
     await recordAct(transaction, { ...told, projectId, act: "scenario.moved-out" });
@@ -142,8 +182,11 @@ async function move(
 }
 
 /** @throws Refusal 422 with every faulty field */
-function keptOf({ content, switchedOff }: Draft): KeptScenario {
-  return { ...canonicalOf(content), switchedOff: switchedOff && checkedSwitchedOff(switchedOff) };
+function keptOf({ content, switchedOff }: Draft): Kept {
+  const canonical = canonicalOf(content);
+  if (!switchedOff) return canonical;
+  const off = checkedSwitchedOff(switchedOff);
+  return { ...canonical, switchedOff: off.kept, records: [...canonical.records, ...off.records] };
 }
 
 /**
@@ -167,10 +210,29 @@ export async function holdVersion(transaction: Database, place: Place, seen: num
   if (stored.isArchived) throw archived("scenario");
 }
 
-async function read(database: Database, projectId: string, id: string): Promise<StoredScenario> {
+/** True where all records were sent by their digests: their points are known to whoever sent them. */
+const areNamed = ({ records }: Kept): boolean => records.every(({ given }) => given === null);
+
+/** A scenario as it is kept, its long records named by digest. */
+async function demand(database: Database, projectId: string, id: string): Promise<StoredScenario> {
   const scenario = await findScenario(database, projectId, id);
   if (!scenario) throw notFound();
   return scenario;
+}
+
+/** A scenario with the points of its records. */
+async function read(database: Database, projectId: string, id: string): Promise<StoredScenario> {
+  const scenario = await demand(database, projectId, id);
+  const fill = await fillingOf(
+    database,
+    projectId,
+    scenario.switchedOff.map(({ term }) => term),
+  );
+  return {
+    ...scenario,
+    content: await withPoints(database, projectId, scenario.content),
+    switchedOff: scenario.switchedOff.map((off) => ({ ...off, term: fill(off.term) })),
+  };
 }
 
 async function lock(transaction: Database, projectId: string, id: string): Promise<LockedScenario> {

@@ -64,7 +64,7 @@ export async function findScenario(database: Database, projectId: string, id: st
   return row ? scenarioOf(row) : null;
 }
 
-/** The contents of those of the scenarios that are in the project. */
+/** The contents of those of the scenarios that are in the project, in the order asked. */
 export async function findContents(
   database: Database,
   projectId: string,
@@ -74,7 +74,10 @@ export async function findContents(
     .where({ project_id: projectId })
     .whereIn("id", ids)
     .select<Pick<ScenarioRow, "id" | "digest" | "content">[]>("id", "digest", "content");
-  return rows.map(({ id, digest, content }) => ({ id, digest: digest.toString("hex"), content: parsed(content) }));
+  const found = rows.map(({ id, digest, content }) => ({
+    ...{ id, digest: digest.toString("hex"), content: parsed(content) },
+  }));
+  return found.sort((a, b) => ids.indexOf(a.id) - ids.indexOf(b.id));
 }
 
 export interface LockedScenario {
@@ -148,6 +151,13 @@ export async function markScenarioArchived(database: Database, id: string, at: D
 /** True for a scenario of which something was frozen: that stays where its trail is. */
 export async function hasRevisions(database: Database, id: string): Promise<boolean> {
   return (await database("revisions").where({ scenario_id: id }).first("id")) !== undefined;
+}
+
+/** Every text that belongs to a scenario and may name records. */
+export async function textsOf(database: Database, id: string): Promise<string[]> {
+  const own = await database(TABLE).where({ id }).select<Record<string, string>[]>("content", "switched_off");
+  const asked = await database("explorations").where({ scenario_id: id }).select<Record<string, string>[]>("content");
+  return [...own, ...asked].flatMap((row) => Object.values(row));
 }
 
 export async function moveScenario(database: Database, id: string, toProjectId: string): Promise<void> {

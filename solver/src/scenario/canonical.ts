@@ -28,7 +28,8 @@ export function canonicalForm(scenario: Scenario): Scenario {
   return { ...scenario, force: scenario.force.map(storedForm), base: scenario.base.map(storedForm) };
 }
 
-function storedForm(term: Term): Term {
+/** A term as it is kept: a long record by its digest. */
+export function storedForm(term: Term): Term {
   if (!("times" in term) || term.times.length <= inlinePoints) return term;
   const { kind, times, values } = term;
   return { kind, digest: recordDigest(times, values), points: times.length } as Term;
