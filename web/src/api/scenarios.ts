@@ -1,7 +1,8 @@
-import type { StoredScenario, SwitchedOff } from "@restband/api/contract";
+import type { StoredScenario } from "@restband/api/contract";
 import type { Scenario } from "@restband/solver";
 import { queryOptions, useMutation, useQueryClient, type QueryClient } from "@tanstack/react-query";
 import { call } from "./client.ts";
+import { sendNamed, withPointsOf, type Work } from "./long-records.ts";
 
 /** All scenarios of a project without their contents, last touched first; archived ones too. */
 export const scenariosQuery = (projectId: string) =>
@@ -42,11 +43,6 @@ export function useCreateScenario(projectId: string) {
   });
 }
 
-interface Off {
-  /** Terms kept beside the content. */
-  readonly switchedOff: readonly SwitchedOff[];
-}
-
 /**
  * Saves a scenario over the version it was made from; a later version in its place is a 409 whose `current` is that
  * version. Saves of one scenario go one at a time, in the order asked.
@@ -55,12 +51,13 @@ export function useSaveScenario(projectId: string, scenarioId: string) {
   const client = useQueryClient();
   return useMutation({
     scope: { id: `scenario ${scenarioId}` },
-    mutationFn: ({ content, switchedOff, version }: Pick<StoredScenario, "content" | "version"> & Off) =>
-      call("saveScenario", {
-        params: { projectId, scenarioId },
-        body: { content: { ...content }, switchedOff: [...switchedOff] },
-        version,
-      }),
+    mutationFn: async ({ version, ...work }: Work & { version: number }) => {
+      const send = ([{ content, switchedOff }]: readonly Work[]) => {
+        const body = { content: { ...content }, switchedOff: [...switchedOff] };
+        return call("saveScenario", { params: { projectId, scenarioId }, body, version });
+      };
+      return withPointsOf(work, await sendNamed([work], send));
+    },
     onSuccess: (stored) => keep(client, stored),
   });
 }
@@ -70,7 +67,13 @@ export function useCreateCases(projectId: string) {
   const client = useQueryClient();
   return useMutation({
     mutationFn: (scenarios: readonly Scenario[]) =>
-      call("createCases", { params: { projectId }, body: { contents: scenarios.map((each) => ({ ...each })) } }),
+      sendNamed(
+        scenarios.map((content) => ({ content, switchedOff: [] })),
+        (works) => {
+          const contents = works.map(({ content }) => ({ ...content }));
+          return call("createCases", { params: { projectId }, body: { contents } });
+        },
+      ),
     onSuccess: () => refreshLists(client, projectId),
   });
 }
