@@ -1,4 +1,4 @@
-import { beforeEach, describe, expect, it } from "vitest";
+import { beforeEach, describe, expect, it, vi } from "vitest";
 import type { RunReply } from "@restband/solver";
 import { BrokenOff, CalledOff, type Errand, type ErrandWorker } from "../../../web/src/compute/errand.ts";
 import { ErrandPool } from "../../../web/src/compute/errand-pool.ts";
@@ -74,6 +74,16 @@ describe("the pool of errands", () => {
     const c = pool.send(runs("c"), live);
     workers[3].errands[0].done(replies("C"));
     expect(await c).toEqual([{ reason: "C" }]);
+  });
+
+  it("leaves nothing with a signal that outlives its errands", async () => {
+    const pool = poolOf(1);
+    const { signal } = new AbortController();
+    const [added, removed] = [vi.spyOn(signal, "addEventListener"), vi.spyOn(signal, "removeEventListener")];
+    const a = pool.send(runs("a"), signal);
+    workers[0].errands[0].done(replies("A"));
+    await a;
+    expect(removed.mock.calls[0][1]).toBe(added.mock.calls[0][1]);
   });
 
   it("ends the worker of what is called off at once, and forgets what waits", async () => {

@@ -53,13 +53,18 @@ export class ErrandPool {
    * @throws CalledOff once the signal is aborted, BrokenOff where two workers died of it, or what the solver threw
    */
   send<E extends Errand>(errand: E, signal: AbortSignal, tell: TellDone = () => undefined): Promise<AnswerTo<E>> {
-    return new Promise((resolve, reject) => {
+    let leave = (): void => undefined;
+    const answer = new Promise<AnswerTo<E>>((resolve, reject) => {
       const task: Task = { errand, signal, tell, resolve: resolve as Task["resolve"], reject, attempts: 0 };
       if (signal.aborted) return reject(new CalledOff());
-      signal.addEventListener("abort", () => this.callOff(task), { once: true });
+      const callOff = (): void => this.callOff(task);
+      signal.addEventListener("abort", callOff, { once: true });
+      leave = () => signal.removeEventListener("abort", callOff);
       this.waiting.push(task);
       this.pump();
     });
+    // A signal may outlive thousands of errands: none of them is held by it any longer than it lasts.
+    return answer.finally(() => leave());
   }
 
   private callOff(task: Task): void {

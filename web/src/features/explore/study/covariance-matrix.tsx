@@ -38,7 +38,7 @@ export function CovarianceMatrix({ draft, fields, faultAt, onChange }: Covarianc
         <tbody>
           {draft.entries.map((row, i) => (
             <tr key={names[i]}>
-              <th scope="row" className="py-1 pr-2 text-left align-top font-normal leading-[38px]">
+              <th scope="row" className="py-3 pr-2 text-left align-top leading-[1.2] font-normal">
                 {names[i]}
               </th>
               {row.map((text, j) => (
@@ -91,6 +91,6 @@ function Entry({ label, unit, text, fault, onChange }: EntryProps) {
 /** The unit of an entry, made of those of the two means; a correlation has none. */
 function entryUnit(form: JointDraft["form"], units: readonly string[], i: number, j: number): string {
   if (form === "correlations") return i === j ? units[i] : "";
-  if (units[i] === units[j]) return units[i] === "" ? "" : `(${units[i]})²`;
+  if (units[i] === units[j]) return /^\p{L}*$/u.test(units[i]) ? `${units[i]}${units[i] && "²"}` : `(${units[i]})²`;
   return [units[i], units[j]].filter((unit) => unit !== "").join(" × ");
 }

@@ -136,7 +136,7 @@ function WhatScatters({ draft, scenario, faultAt, setDraft }: WhatScattersProps)
   const { inputs, correlations, joint } = draft;
   const set = (change: Partial<StudyDraft>): void => setDraft((old) => ({ ...old, ...change }));
   const scattered = scatteredPaths(draft);
-  const free = fields.filter(({ path }) => !scattered.includes(path));
+  const free = likelyFirst(fields.filter(({ path }) => !scattered.includes(path)));
   return (
     <>
       <Inputs
@@ -175,6 +175,12 @@ function WhatScatters({ draft, scenario, faultAt, setDraft }: WhatScattersProps)
     </>
   );
 }
+
+/** What is something before what is nothing, the machine before how it starts and how long it is looked at. */
+const likelyFirst = (fields: readonly ExploreField[]): ExploreField[] =>
+  [...fields].sort((a, b) => Number(isLikely(b)) - Number(isLikely(a)));
+
+const isLikely = ({ path, value }: ExploreField): boolean => value !== 0 && !/^(initial|span)\./.test(path);
 
 interface InputsProps {
   scenario: Scenario;
