@@ -83,7 +83,7 @@ export function sweepServer(scenario: Scenario, plan: SweepPlan): ExplorationSer
     createdBy: { accountId: ines.id, name: ines.name },
     content: scenario,
     solverVersion,
-    plan: kept.plan as Record<string, unknown>,
+    plan: kept.plan,
     answer: conclusion?.answer ?? null,
     saved: [...tiles.keys()],
     runner: server.runner === null ? null : { accountId: ines.id, name: server.runner },
