@@ -12,6 +12,7 @@ export type { Problem } from "./scenario/problem.ts";
 export { quantityNames, type QuantityName } from "./scenario/quantity-names.ts";
 export { movedInputs } from "./scenario/moved-inputs.ts";
 export { needsAdaptive } from "./scenario/needs-adaptive.ts";
+export { pathsWithoutOrigin } from "./scenario/without-origin.ts";
 export { unsupported } from "./scenario/unsupported.ts";
 
 export type { Bounds, Choice, ChoiceOption, Dimension, Field, Rows } from "./field.ts";

@@ -8,8 +8,8 @@ import type { MembersService } from "../members/members-service.ts";
 import { tell } from "../notices/notices-service.ts";
 import type { RevisionPlace, RevisionsService } from "../revisions/revisions-service.ts";
 import type { Revision } from "../revisions/revisions-schema.ts";
-import { valueAt } from "../revisions/without-origin.ts";
 import type { Anchor, Comment, commentDraftSchema, replyDraftSchema } from "./comments-schema.ts";
+import { valueAt } from "./value-at.ts";
 import { type Entry, insertEntry, listComments } from "./comments-store.ts";
 
 export type CommentsService = ReturnType<typeof createCommentsService>;

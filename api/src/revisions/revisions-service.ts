@@ -1,4 +1,4 @@
-import { canonicalText, type Scenario } from "@restband/solver";
+import { canonicalText, pathsWithoutOrigin, type Scenario } from "@restband/solver";
 import { saversOf, recordAct } from "../activity/activity-service.ts";
 import { holdChain } from "../chain/chain.ts";
 import type { Database } from "../database/database.ts";
@@ -11,7 +11,6 @@ import { insertReplay, listReplays } from "./replays-store.ts";
 import type { Freeze, Replay, ReplayDraft, Revision, RevisionSummary } from "./revisions-schema.ts";
 import { findFrozen, type Frozen, insertRevision, listFrozen, type NewRevision } from "./revisions-store.ts";
 import { lastAcceptedBefore, standingsOf } from "./standing-store.ts";
-import { pathsWithoutOrigin } from "./without-origin.ts";
 
 export type RevisionsService = ReturnType<typeof createRevisionsService>;
 

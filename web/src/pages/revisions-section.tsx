@@ -10,7 +10,7 @@ import { announce } from "../components/status.tsx";
 import type { Run } from "../compute/use-run.ts";
 import type { Freezable } from "../features/revision/freeze-form.tsx";
 import { RevisionList } from "../features/revision/revision-list.tsx";
-import { pathsWithoutOrigin } from "../features/statement/origin/without-origin.tsx";
+import { withoutOrigin } from "../features/statement/origin/without-origin.tsx";
 import type { Saving } from "../features/statement/saving/autosave.ts";
 import { isSameScenario } from "../features/statement/saving/work.ts";
 import { paths } from "../paths.ts";
@@ -84,8 +84,5 @@ function freezableOf({ stored, run, inForce, saving, faults }: RevisionsSectionP
   return { projectId, scenarioId, version, digest, scenario: computed.scenario, result: computed.result };
 }
 
-/** What the revision will list: limits and the settle band are what is wanted, and come from nowhere. */
-const missingIn = ({ scenario }: Freezable): string[] =>
-  pathsWithoutOrigin(scenario)
-    .filter(({ path }) => !/^(?:limits|settleBand)\b/u.test(path))
-    .map(({ label }) => label);
+/** What the revision will list. */
+const missingIn = ({ scenario }: Freezable): string[] => withoutOrigin(scenario).map(({ label }) => label);

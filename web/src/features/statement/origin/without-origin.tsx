@@ -1,30 +1,19 @@
-import type { Scenario } from "@restband/solver";
+import { pathsWithoutOrigin, type Scenario } from "@restband/solver";
 import { useState, type RefObject } from "react";
 import { sayMany, capitalised } from "../../../format/words.ts";
 import { useDraftContext } from "../draft/draft-context.ts";
-import { groups } from "../groups.ts";
-import { numberAt } from "../scenario-fields.ts";
+import { fieldAt } from "../scenario-fields.ts";
 
-/** What the sentences show as numbers but nobody has said the origin of. */
-export function pathsWithoutOrigin(scenario: Scenario): { path: string; label: string }[] {
-  return groups
-    .flatMap(({ sentence }) => sentence(scenario))
-    .flatMap((piece) => (piece.kind === "value" && !piece.word ? piece : []))
-    .filter(({ path }) => !scenario.origins[path] && !needsNone(scenario, path))
-    .map(({ path, field }) => ({ path, label: field.label }));
-}
-
-/** Nothing, one face, one metre of radius, and how long a run is followed come from nowhere. */
-function needsNone(scenario: Scenario, path: string): boolean {
-  const value = numberAt(scenario, path);
-  return value === 0 || (value === 1 && /\.(?:faces|radius)$/u.test(path)) || path.startsWith("span.");
+/** The values nobody has said the origin of, each as its field is called. */
+export function withoutOrigin(scenario: Scenario): { path: string; label: string }[] {
+  return pathsWithoutOrigin(scenario).map((path) => ({ path, label: fieldAt(scenario, path)?.label ?? path }));
 }
 
 /** A quiet list of the values without an origin, each a way to where it is edited. */
 export function WithoutOrigin({ statement }: { statement: RefObject<HTMLElement | null> }) {
   const { draft } = useDraftContext();
   const [isOpen, setOpen] = useState(false);
-  const missing = pathsWithoutOrigin(draft.sheet.wanted);
+  const missing = withoutOrigin(draft.sheet.wanted);
   if (missing.length === 0) return null;
   return (
     <div className="border-t border-line pt-3 text-13 text-quiet">
