@@ -44,7 +44,7 @@ export function simulateProblem(problem: Problem, isExact: boolean, options: Sim
 function describe(motion: Motion, options: SimulateOptions): Result {
   const judged = judge(motion, { quantities: options.quantities, energy: options.energy ?? true });
   const points = options.samples ?? defaultSamples;
-  return {
+  const result: Result = {
     format: "restband-result/1",
     method: motion.method,
     solverVersion,
@@ -54,6 +54,8 @@ function describe(motion: Motion, options: SimulateOptions): Result {
     samples: points > 0 ? sampleMotion(motion, points) : null,
     ...(options.at === undefined ? {} : { at: valuesAt(motion, options.at) }),
   };
+  motion.release();
+  return result;
 }
 
 function eventsOf(motion: Motion): MotionEvent[] {

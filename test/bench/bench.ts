@@ -56,7 +56,7 @@ function measure(yardsticks: readonly Yardstick[]): Row[] {
   for (const { ways } of own) for (const [, { work }] of ways) timeOf(work, 0.3); // warm-up
   for (let round = 0; round < rounds; round++) {
     for (const { name, ways } of own) {
-      for (const [way, { share, work }] of ways) take(name, way, timeOf(work) / share, work());
+      for (const [way, { share, work, tell }] of ways) take(name, way, timeOf(work) / share, tell());
     }
     for (const yardstick of yardsticks) {
       if ("absent" in yardstick) continue;

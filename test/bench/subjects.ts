@@ -1,4 +1,4 @@
-import { compileProblem, needsAdaptive, simulate, type Scenario } from "@restband/solver";
+import { compileProblem, needsAdaptive, simulate, type Problem, type Scenario } from "@restband/solver";
 import { runAdaptive } from "../../solver/src/motion/adaptive/run-adaptive.ts";
 import { runExact } from "../../solver/src/motion/exact/run-exact.ts";
 import type { Motion } from "../../solver/src/motion/motion.ts";
@@ -30,17 +30,33 @@ export const subjects: readonly Subject[] = [
 
 const asked = ["amplitude", "peakVelocity", "stickFraction", "restTime", "driveForcePeak"];
 
+/** One way this solver is asked: what is timed, of how many cells, and what comes of it, told untimed. */
+export interface Way {
+  share: number;
+  work: () => void;
+  tell: () => Tally;
+}
+
 /** The ways this solver is asked, each over all its cells. */
-export function waysOf({ cells, fewCells }: Subject): Record<string, { share: number; work: () => Tally }> {
+export function waysOf({ cells, fewCells }: Subject): Record<string, Way> {
   const problems = cells.map((cell) => compileProblem(cell));
-  const isExact = needsAdaptive(cells[0]) === null;
   const few = problems.filter((_, i) => i % Math.ceil(problems.length / fewCells) === 0);
-  const adaptive = { share: few.length, work: () => sum(few.map((problem) => runAdaptive(problem))) };
-  const exact = { share: cells.length, work: () => sum(problems.map((problem) => runExact(problem))) };
+  const adaptive = wayOf(few, (problem) => runAdaptive(problem));
+  const isExact = needsAdaptive(cells[0]) === null;
   return {
-    propagation: isExact ? exact : adaptive,
-    simulate: { share: cells.length, work: () => simulateAll(cells) },
+    propagation: isExact ? wayOf(problems, (problem) => runExact(problem)) : adaptive,
+    simulate: { share: cells.length, work: () => simulateAll(cells), tell: () => ({ events: NaN, x: NaN }) },
     ...(isExact ? { "odex restarts": adaptive } : {}),
+  };
+}
+
+function wayOf(problems: readonly Problem[], run: (problem: Problem) => Motion): Way {
+  return {
+    share: problems.length,
+    work: () => {
+      for (const problem of problems) run(problem).release();
+    },
+    tell: () => sum(problems.map(run)),
   };
 }
 
@@ -56,7 +72,6 @@ function sum(motions: readonly Motion[]): Tally {
 }
 
 /** Outcome and five quantities, no samples, no ledger. */
-function simulateAll(cells: readonly Scenario[]): Tally {
+function simulateAll(cells: readonly Scenario[]): void {
   for (const cell of cells) simulate(cell, { samples: 0, quantities: asked, energy: false, events: false });
-  return { events: NaN, x: NaN };
 }

@@ -47,6 +47,9 @@ export class Inputs {
   /** |A| and |Y| of each harmonic. */
   readonly forceSize: Float64Array;
   readonly baseSize: Float64Array;
+  /** cos ωτ and sin ωτ of each harmonic at the last `turn`, those of the ripple of N after the last. */
+  readonly cosine: Float64Array;
+  readonly sine: Float64Array;
   readonly normal: number;
   /** True where nothing ever moves the base. */
   readonly isBaseStill: boolean;
@@ -70,8 +73,16 @@ export class Inputs {
   };
 
   private readonly problem: Problem;
-  /** The τ that `values` are of. */
+  /** The τ that `values` are of, and `cosine` and `sine`. */
   private at = NaN;
+  private turnedAt = NaN;
+  /** True where no term ever changes but by swinging: one layout then serves all instants, the harmonics turned. */
+  private readonly isTimeless: boolean;
+  private isLaidOut = false;
+  /** The next corner of the terms. */
+  private corner = Infinity;
+  /** Where each harmonic comes from. */
+  private readonly sources: Harmonic[] = [];
   /** Parts of the force that are neither polynomial nor harmonic, and those acting at the origin. */
   private readonly smooth: readonly SmoothPart[];
   private acting: readonly SmoothPart[] = [];
@@ -82,6 +93,9 @@ export class Inputs {
     this.problem = problem;
     this.normal = problem.normal;
     this.isBaseStill = problem.base.length === 0;
+    this.isTimeless = [...problem.force, ...problem.base].every(
+      ({ nature }) => nature === "constant" || nature === "harmonic",
+    );
     this.smooth = problem.force.flatMap((term) => (term.smooth === undefined ? [] : [term.smooth]));
     const room = harmonicsPerTerm * (problem.force.length + problem.base.length);
     this.omega = new Float64Array(room);
@@ -91,35 +105,54 @@ export class Inputs {
     this.baseIm = new Float64Array(room);
     this.forceSize = new Float64Array(room);
     this.baseSize = new Float64Array(room);
+    this.cosine = new Float64Array(room + 1);
+    this.sine = new Float64Array(room + 1);
   }
 
   /** Takes t as origin, with right-hand values where an input has a corner there. */
   locate(t: number): void {
-    const { problem } = this;
     this.origin = t;
     this.at = NaN;
+    this.turnedAt = NaN;
+    if (!this.isTimeless || !this.isLaidOut) this.layOut(t);
+    this.turnAmplitudes(t);
+    this.end = this.problem.ripple === null ? this.corner : Math.min(this.corner, this.locateRipple(t));
+  }
+
+  private layOut(t: number): void {
+    const { problem } = this;
+    this.isLaidOut = true;
     this.force.fill(0);
     this.base.fill(0);
     this.acceleration.fill(0);
     this.force[0] = problem.weight;
     this.count = 0;
-    let end = Infinity;
+    this.corner = Infinity;
     for (const term of problem.force) {
       term.addPolynomial(t, this.force);
-      end = Math.min(end, term.nextCorner(t));
-      this.addHarmonics(term, t, this.forceRe, this.forceIm, this.forceSize);
+      this.corner = Math.min(this.corner, term.nextCorner(t));
+      this.addHarmonics(term, t, this.forceSize);
     }
     for (const term of problem.base) {
       this.addBase(term, t);
-      end = Math.min(end, term.nextCorner(t));
-      this.addHarmonics(term, t, this.baseRe, this.baseIm, this.baseSize);
+      this.corner = Math.min(this.corner, term.nextCorner(t));
+      this.addHarmonics(term, t, this.baseSize);
     }
     if (!problem.isRelative) {
       this.acceleration[0] = 2 * this.base[2];
       this.acceleration[1] = 6 * this.base[3];
     }
     if (this.smooth.length > 0) this.acting = this.smooth.filter((part) => part.from <= t && t < part.to);
-    this.end = Math.min(end, this.locateRipple(t));
+  }
+
+  /** The complex amplitudes at t of the harmonics laid out. */
+  private turnAmplitudes(t: number): void {
+    for (let i = 0; i < this.count; i++) {
+      rotate(this.sources[i], t, this.rotated);
+      const isOfBase = this.baseSize[i] > 0;
+      (isOfBase ? this.baseRe : this.forceRe)[i] = this.rotated.re;
+      (isOfBase ? this.baseIm : this.forceIm)[i] = this.rotated.im;
+    }
   }
 
   /** Adds a term's y (or ÿ); where terms cancel each other nothing is left of them, not their rounding: a base at rest rests. */
@@ -147,14 +180,28 @@ export class Inputs {
     v.normal = this.normal;
     v.normalRate = 0;
     v.normalSecond = 0;
-    for (let i = 0; i < this.count; i++) this.addHarmonicValues(i, tau);
-    if (this.rippleOmega > 0) this.addRippleValues(tau);
+    this.turn(tau);
+    for (let i = 0; i < this.count; i++) this.addHarmonicValues(i);
+    if (this.rippleOmega > 0) this.addRippleValues();
     for (const part of this.acting) {
       v.force += part.value(this.origin + tau);
       v.forceRate += part.rate(this.origin + tau);
       v.forceSecond += part.second(this.origin + tau);
     }
     return v;
+  }
+
+  /** Fills `cosine` and `sine` at τ = t − origin. */
+  turn(tau: number): void {
+    if (tau === this.turnedAt) return;
+    this.turnedAt = tau;
+    for (let i = 0; i < this.count; i++) this.turnOne(i, this.omega[i] * tau);
+    if (this.rippleOmega > 0) this.turnOne(this.count, this.rippleOmega * tau);
+  }
+
+  private turnOne(i: number, angle: number): void {
+    this.cosine[i] = Math.cos(angle);
+    this.sine[i] = Math.sin(angle);
   }
 
   /** Σ |A| ω^n over the force harmonics (n ≤ 3 with a sweep): no n-th derivative of their sum is larger. */
@@ -198,16 +245,14 @@ export class Inputs {
     return fastest;
   }
 
-  private addHarmonics(term: CompiledTerm, t: number, re: Float64Array, im: Float64Array, size: Float64Array): void {
+  private addHarmonics(term: CompiledTerm, t: number, size: Float64Array): void {
     const harmonics = term.harmonics(t);
     for (let n = 0; n < harmonics.length; n++) {
       const i = this.count++;
       this.omega[i] = 2 * Math.PI * harmonics[n].hz;
       this.forceRe[i] = this.forceIm[i] = this.baseRe[i] = this.baseIm[i] = 0;
       this.forceSize[i] = this.baseSize[i] = 0;
-      rotate(harmonics[n], t, this.rotated);
-      re[i] = this.rotated.re;
-      im[i] = this.rotated.im;
+      this.sources[i] = harmonics[n];
       size[i] = Math.abs(harmonics[n].amplitude);
     }
   }
@@ -231,11 +276,11 @@ export class Inputs {
     return t + ((next - theta) % (2 * Math.PI)) / this.rippleOmega;
   }
 
-  private addHarmonicValues(i: number, tau: number): void {
+  private addHarmonicValues(i: number): void {
     const v = this.values;
     const w = this.omega[i];
-    const c = Math.cos(w * tau);
-    const s = Math.sin(w * tau);
+    const c = this.cosine[i];
+    const s = this.sine[i];
     const w2 = w * w;
     const force = this.forceRe[i] * c - this.forceIm[i] * s;
     v.force += force;
@@ -251,11 +296,11 @@ export class Inputs {
     v.baseSnap += w2 * w2 * base;
   }
 
-  private addRippleValues(tau: number): void {
+  private addRippleValues(): void {
     const v = this.values;
     const w = this.rippleOmega;
-    const c = Math.cos(w * tau);
-    const s = Math.sin(w * tau);
+    const c = this.cosine[this.count];
+    const s = this.sine[this.count];
     const ripple = this.rippleRe * c - this.rippleIm * s;
     v.normal = Math.max(0, v.normal + ripple); // 0 to rounding where the contact is about to go
     v.normalRate -= w * (this.rippleRe * s + this.rippleIm * c);

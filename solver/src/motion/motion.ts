@@ -32,6 +32,8 @@ export interface Motion {
    * not end in a stick or the question could not be settled within the work allowed.
    */
   readonly nextBreakAway: number;
+  /** Gives what the run is kept in to the next one: who has read all they want of it may say so. Nothing can be asked after that. */
+  release(): void;
 }
 
 /** An event and the segment whose right-hand values are its own. */

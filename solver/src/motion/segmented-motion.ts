@@ -9,20 +9,42 @@ import { newStance, type Segments } from "./stance.ts";
 
 /** A run as a chain of segments, asked again at any instant: each is set up anew from its start. */
 export class SegmentedMotion implements Motion {
-  readonly problem: Problem;
   private readonly stance = newStance();
+  private made: Form | null = null;
+  private marks: readonly MotionMark[] | null = null;
   private loaded = -1;
 
   constructor(
-    private readonly form: Form,
+    readonly problem: Problem,
+    private readonly makeForm: () => Form,
     readonly method: Motion["method"],
     private readonly segments: Segments,
-    readonly events: readonly MotionMark[],
     readonly ended: Ended,
     readonly end: number,
     readonly nextBreakAway: number,
-  ) {
-    this.problem = form.problem;
+  ) {}
+
+  get events(): readonly MotionMark[] {
+    return (this.marks ??= this.makeMarks());
+  }
+
+  private makeMarks(): readonly MotionMark[] {
+    const { segments } = this;
+    const marks: MotionMark[] = [{ t: 0, kind: "start", segment: 0 }];
+    for (let i = 0; i < segments.count; i++) {
+      const kind = segments.happening(i);
+      if (kind !== null) marks.push({ t: segments.from(i), kind, segment: i });
+    }
+    marks.push({ t: this.end, kind: "end", segment: segments.count - 1 });
+    return marks;
+  }
+
+  release(): void {
+    this.segments.release();
+  }
+
+  private get form(): Form {
+    return (this.made ??= this.makeForm());
   }
 
   get count(): number {

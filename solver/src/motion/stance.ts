@@ -38,51 +38,79 @@ export function copyStance(from: Stance, into: Stance): void {
   into.side = from.side;
 }
 
-/** The segments of a run in flat arrays that grow by doubling. */
+/** What may stand at the start of a segment; null where only the segment changes. */
+const happenings = [null, "stop", "turn", "break-away"] as const;
+export type Happening = (typeof happenings)[number];
+
+/** Numbers a segment: its stance's six, and one for its signs and its happening. */
+const width = 7;
+const signs = 27;
+
+/** A buffer given back, for the next run to take: what a sweep's thousands of runs would else allocate each. */
+let spare: Float64Array | null = null;
+
+/** The segments of a run, and what happened at the start of each, in one flat array that grows by doubling. */
 export class Segments {
   count = 0;
-  private t = new Float64Array(64);
-  private place = new Float64Array(64);
-  private position = new Float64Array(64);
-  private velocity = new Float64Array(64);
-  private slip = new Float64Array(64);
-  private acceleration = new Float64Array(64);
-  private contact = new Int8Array(64);
-  private spring = new Int8Array(64);
-  private side = new Int8Array(64);
+  /** How many starts have a happening. */
+  happened = 0;
+  private numbers: Float64Array;
 
-  push(s: Stance): void {
-    if (this.count === this.t.length) this.grow();
-    const i = this.count++;
-    this.t[i] = s.t;
-    this.place[i] = s.place;
-    this.position[i] = s.position;
-    this.velocity[i] = s.velocity;
-    this.slip[i] = s.slip;
-    this.acceleration[i] = s.acceleration;
-    this.contact[i] = s.contact;
-    this.spring[i] = s.spring;
-    this.side[i] = s.side;
+  constructor() {
+    this.numbers = spare ?? new Float64Array(64 * width);
+    spare = null;
+  }
+
+  /** Gives the buffer to the next run; nothing can be asked after that. */
+  release(): void {
+    if (spare === null || spare.length < this.numbers.length) spare = this.numbers;
+    this.numbers = new Float64Array(0);
+    this.count = 0;
+  }
+
+  push(s: Stance, happening: Happening): void {
+    const at = this.count++ * width;
+    if (at === this.numbers.length) this.grow();
+    const { numbers } = this;
+    numbers[at] = s.t;
+    numbers[at + 1] = s.place;
+    numbers[at + 2] = s.position;
+    numbers[at + 3] = s.velocity;
+    numbers[at + 4] = s.slip;
+    numbers[at + 5] = s.acceleration;
+    let code = s.contact + 1 + 3 * (s.spring + 1) + 9 * (s.side + 1);
+    if (happening !== null) {
+      this.happened++;
+      code += signs * (happening === "stop" ? 1 : happening === "turn" ? 2 : 3);
+    }
+    numbers[at + 6] = code;
   }
 
   load(i: number, into: Stance): void {
-    into.t = this.t[i];
-    into.place = this.place[i];
-    into.position = this.position[i];
-    into.velocity = this.velocity[i];
-    into.slip = this.slip[i];
-    into.acceleration = this.acceleration[i];
-    into.contact = this.contact[i] as Phase;
-    into.spring = this.spring[i] as Phase;
-    into.side = this.side[i] as Phase;
+    const { numbers } = this;
+    const at = i * width;
+    into.t = numbers[at];
+    into.place = numbers[at + 1];
+    into.position = numbers[at + 2];
+    into.velocity = numbers[at + 3];
+    into.slip = numbers[at + 4];
+    into.acceleration = numbers[at + 5];
+    const code = numbers[at + 6] % signs;
+    into.contact = ((code % 3) - 1) as Phase;
+    into.spring = ((Math.floor(code / 3) % 3) - 1) as Phase;
+    into.side = (Math.floor(code / 9) - 1) as Phase;
   }
 
   from(i: number): number {
-    return this.t[i];
+    return this.numbers[i * width];
   }
 
   phase(i: number): Phase {
-    return this.contact[i] as Phase;
+    return ((this.numbers[i * width + 6] % 3) - 1) as Phase;
+  }
+
+  happening(i: number): Happening {
+    return happenings[Math.floor(this.numbers[i * width + 6] / signs)];
   }
 
   /** The last segment with from ≤ t. */
@@ -91,27 +119,15 @@ export class Segments {
     let high = this.count - 1;
     while (low < high) {
       const middle = (low + high + 1) >> 1;
-      if (this.t[middle] <= t) low = middle;
+      if (this.from(middle) <= t) low = middle;
       else high = middle - 1;
     }
     return low;
   }
 
   private grow(): void {
-    const size = 2 * this.t.length;
-    this.t = grown(this.t, new Float64Array(size));
-    this.place = grown(this.place, new Float64Array(size));
-    this.position = grown(this.position, new Float64Array(size));
-    this.velocity = grown(this.velocity, new Float64Array(size));
-    this.slip = grown(this.slip, new Float64Array(size));
-    this.acceleration = grown(this.acceleration, new Float64Array(size));
-    this.contact = grown(this.contact, new Int8Array(size));
-    this.spring = grown(this.spring, new Int8Array(size));
-    this.side = grown(this.side, new Int8Array(size));
+    const larger = new Float64Array(2 * this.numbers.length);
+    larger.set(this.numbers);
+    this.numbers = larger;
   }
-}
-
-function grown<A extends Float64Array | Int8Array>(old: A, larger: A): A {
-  larger.set(old);
-  return larger;
 }

@@ -1,14 +1,11 @@
 import { firstZero, type Watched, type Work } from "../numerics/first-zero.ts";
-import type { EventKind, Phase } from "../result.ts";
+import type { Phase } from "../result.ts";
 import type { Problem } from "../scenario/problem.ts";
 import { Form, type SlipMaker } from "./form.ts";
 import type { Cause, Ending } from "./slip.ts";
 import { chooseBoth, orient, orientSide } from "./spring-element.ts";
-import type { Stance } from "./stance.ts";
+import type { Happening, Stance } from "./stance.ts";
 import { BaseSlipWatch, CarriedStretchWatch, HoldWatch, ShareWatch, heldTolerance } from "./watch.ts";
-
-/** What happened at the end of a step; null where only the segment changes (a corner, a spring passing its free length). */
-export type Happening = Extract<EventKind, "stop" | "turn" | "break-away"> | null;
 
 /**
  * Takes a body from one happening to the next: the rules of stick and slip at v_r = 0, of the second

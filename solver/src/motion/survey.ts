@@ -1,4 +1,4 @@
-import { gaussNodes, gaussWeights } from "../numerics/gauss-legendre.ts";
+import { ruleFor, type PanelRule } from "../numerics/panel-rule.ts";
 import { peak } from "../numerics/peak.ts";
 import type { Motion } from "./motion.ts";
 import { emptyState, type State } from "./state.ts";
@@ -28,18 +28,36 @@ interface Tally {
   max: number;
   sum: number;
   gross: number;
-  /** Node values of the panel in hand, ends included. */
+  /** Values at the nodes of the panel in hand, ends included. */
   readonly values: Float64Array;
 }
 
-const nodes = gaussNodes.length + 2;
+/** As many nodes as a panel has at most. */
+const mostNodes = 12;
+/** Where the polynomial through the nodes is this close to the motion itself, of its range, it tells where a top is. */
+const trusted = 1e-9;
+
+/** A survey under way. */
+interface Pass {
+  readonly motion: Motion;
+  readonly tallies: readonly Tally[];
+  readonly state: State;
+}
+
+/** A panel in hand: part of segment i, with its rule. */
+interface Panel {
+  i: number;
+  from: number;
+  to: number;
+  rule: PanelRule;
+}
 
 /**
  * Goes over [from, to] once for all channels. Each smooth stretch is cut into panels over which nothing turns by more
- * than two radians; integrals by ten-point Gauss on each (products of two such channels to rounding), extremes from the
- * same nodes and the panel's ends, a top between nodes polished by Brent's method. A top narrower than the spacing of
- * nodes (at most 0.3 rad of the fastest rate, 0.6 for a product) would be missed; closed forms have none. A segment that
- * only repeats itself is gone over for one period.
+ * than two radians; integrals by Gauss's rule on each (products of two such channels to rounding), extremes from the same
+ * nodes and the panel's ends, a top between them where the polynomial through all of them has it, by Brent's method, and its
+ * value from the motion there. A top narrower than the spacing of nodes (at most 0.3 rad of the fastest rate, 0.6 for a
+ * product) would be missed; closed forms have none. A segment that only repeats itself is gone over for one period.
  *
  * @param channels functions of the state; ask the result with the same function objects
  * @param integrands channels of which only integrals are asked: their tops are not looked for, which saves most of the work
@@ -53,127 +71,102 @@ export function survey(
 ): Survey {
   const withExtremes = new Set(channels);
   const tallies = [...new Set([...channels, ...integrands])].map((one) => newTally(one, withExtremes.has(one)));
-  const state = emptyState();
-  const times = new Float64Array(nodes);
+  const pass = { motion, tallies, state: emptyState() };
   for (let i = motion.find(from); i < motion.count && motion.from(i) <= to; i++) {
     const end = Math.min(to, motion.to(i));
     let start = Math.max(from, motion.from(i));
     const period = motion.period(i, start);
     const repeats = period > 0 ? Math.floor((end - start) / period) : 0;
     if (repeats > 1) {
-      goOver(motion, i, start, start + period, repeats, tallies, times, state);
+      goOver(pass, i, start, start + period, repeats);
       start += repeats * period;
     }
-    if (start <= end) goOver(motion, i, start, end, 1, tallies, times, state);
+    if (start <= end) goOver(pass, i, start, end, 1);
   }
   return new Tallied(tallies, to - from);
 }
 
-/** Panel by panel from start to end; what is found there counts `repeats` times. */
-function goOver(
-  motion: Motion,
-  i: number,
-  start: number,
-  end: number,
-  repeats: number,
-  tallies: readonly Tally[],
-  times: Float64Array,
-  state: State,
-): void {
-  for (let from = start; ;) {
-    const width = 2 * motion.panel(i, from);
-    const isLast = !(from + width > from && from + 1.001 * width < end);
-    const stop = isLast ? end : from + width;
-    surveyPanel(motion, i, from, stop, repeats, tallies, times, state);
-    if (isLast) return;
-    from = stop;
-  }
-}
-
 function newTally(channel: Channel, hasExtremes: boolean): Tally {
-  return {
-    channel,
-    hasExtremes,
-    min: Infinity,
-    max: -Infinity,
-    sum: 0,
-    gross: 0,
-    values: new Float64Array(nodes),
-  };
+  return { channel, hasExtremes, min: Infinity, max: -Infinity, sum: 0, gross: 0, values: new Float64Array(mostNodes) };
 }
 
-function surveyPanel(
-  motion: Motion,
-  i: number,
-  start: number,
-  stop: number,
-  repeats: number,
-  tallies: readonly Tally[],
-  times: Float64Array,
-  state: State,
-): void {
-  const width = stop - start;
-  for (let n = 0; n < nodes; n++) {
-    const at = n === 0 ? -1 : n === nodes - 1 ? 1 : gaussNodes[n - 1];
-    times[n] = n === nodes - 1 ? stop : start + ((1 + at) / 2) * width;
-    motion.read(i, times[n], state);
-    for (const tally of tallies) tally.values[n] = tally.channel(state);
+/** Panel by panel from start to end; what is found there counts `repeats` times. */
+function goOver(pass: Pass, i: number, start: number, end: number, repeats: number): void {
+  for (let from = start; ;) {
+    const width = 2 * pass.motion.panel(i, from);
+    const isLast = !(from + width > from && from + 1.001 * width < end);
+    const to = isLast ? end : from + width;
+    surveyPanel(pass, { i, from, to, rule: ruleFor(width < Infinity ? (2 * (to - from)) / width : 2) }, repeats);
+    if (isLast) return;
+    from = to;
   }
-  for (const tally of tallies) {
+}
+
+function surveyPanel({ motion, tallies, state }: Pass, panel: Panel, repeats: number): void {
+  const { nodes, weights } = panel.rule;
+  for (let n = 0; n < nodes.length; n++) {
+    motion.read(panel.i, n === nodes.length - 1 ? panel.to : timeAt(panel, nodes[n]), state);
+    for (let k = 0; k < tallies.length; k++) tallies[k].values[n] = tallies[k].channel(state);
+  }
+  const half = (repeats * (panel.to - panel.from)) / 2;
+  for (let k = 0; k < tallies.length; k++) {
+    const tally = tallies[k];
     let sum = 0;
     let gross = 0;
-    for (let n = 0; n < gaussWeights.length; n++) {
-      const part = gaussWeights[n] * tally.values[n + 1];
+    for (let n = 1; n < nodes.length - 1; n++) {
+      const part = weights[n] * tally.values[n];
       sum += part;
       gross += Math.abs(part);
     }
-    tally.sum += (repeats * sum * width) / 2;
-    tally.gross += (repeats * gross * width) / 2;
-    if (tally.hasExtremes) takeExtremes(motion, i, tally, times, state);
+    tally.sum += sum * half;
+    tally.gross += gross * half;
+    if (tally.hasExtremes) takeExtremes(motion, panel, tally, state);
   }
 }
 
-function takeExtremes(motion: Motion, i: number, tally: Tally, times: Float64Array, state: State): void {
+function timeAt({ from, to }: Panel, u: number): number {
+  return from + ((1 + u) / 2) * (to - from);
+}
+
+function takeExtremes(motion: Motion, panel: Panel, tally: Tally, state: State): void {
   const { values } = tally;
-  for (let n = 0; n < nodes; n++) {
-    if (values[n] > tally.max) tally.max = values[n];
-    if (values[n] < tally.min) tally.min = values[n];
+  const { nodes } = panel.rule;
+  const last = nodes.length - 1;
+  let low = values[0];
+  let high = values[0];
+  for (let n = 1; n <= last; n++) {
+    if (values[n] > high) high = values[n];
+    if (values[n] < low) low = values[n];
   }
-  for (let n = 1; n + 1 < nodes; n++) polish(motion, i, tally, times, state, n, times[n], values[n]);
+  if (high > tally.max) tally.max = high;
+  if (low < tally.min) tally.min = low;
+  // a top stands out of its neighbours by less than the panel's range: most panels cannot reach the extremes so far
+  if (high + (high - low) <= tally.max && low - (high - low) >= tally.min) return;
+  for (let n = 1; n < last; n++) polish(motion, panel, tally, state, n, nodes[n], values[n]);
   // between the outermost node and the end of the panel no node can stand out: the parabola through three of them tells
-  for (const n of [1, nodes - 2]) {
-    const t = vertex(times, values, n);
-    const isOutside = n === 1 ? t > times[0] && t < times[1] : t > times[n] && t < times[n + 1];
+  for (const n of [1, last - 1]) {
+    const u = vertex(nodes, values, n);
+    const isOutside = n === 1 ? u > -1 && u < nodes[1] : u > nodes[n] && u < 1;
     if (!isOutside) continue;
-    motion.read(i, t, state);
-    const value = tally.channel(state);
-    const outer = n === 1 ? 0 : n + 1;
+    const value = panel.rule.interpolate(values, u);
+    const outer = n === 1 ? 0 : last;
     if (value > Math.max(values[n], values[outer]) || value < Math.min(values[n], values[outer])) {
-      polish(motion, i, tally, times, state, n, t, value);
+      polish(motion, panel, tally, state, n, u, value);
     }
   }
 }
 
 /** Where the parabola through nodes n − 1, n, n + 1 has its top or bottom; NaN where it is a line. */
-function vertex(times: Float64Array, values: Float64Array, n: number): number {
-  const left = times[n] - times[n - 1];
-  const right = times[n] - times[n + 1];
+function vertex(nodes: Float64Array, values: Float64Array, n: number): number {
+  const left = nodes[n] - nodes[n - 1];
+  const right = nodes[n] - nodes[n + 1];
   const r = left * (values[n] - values[n + 1]);
   const q = right * (values[n] - values[n - 1]);
-  return times[n] - (0.5 * (left * r - right * q)) / (r - q);
+  return nodes[n] - (0.5 * (left * r - right * q)) / (r - q);
 }
 
-/** Takes the top or bottom about t, between the nodes on both sides of n, into the tally if it could be a new extreme. */
-function polish(
-  motion: Motion,
-  i: number,
-  tally: Tally,
-  times: Float64Array,
-  state: State,
-  n: number,
-  t: number,
-  at: number,
-): void {
+/** Takes the top or bottom about u, between the nodes on both sides of n, into the tally if it could be a new extreme. */
+function polish(motion: Motion, panel: Panel, tally: Tally, state: State, n: number, u: number, at: number): void {
   const { values } = tally;
   const isTop = at >= values[n - 1] && at >= values[n + 1];
   const isBottom = at <= values[n - 1] && at <= values[n + 1];
@@ -182,13 +175,18 @@ function polish(
   const best = isTop ? tally.max : -tally.min;
   const bend = Math.max(Math.abs(at - values[n - 1]), Math.abs(at - values[n + 1]));
   if (sign * at + bend <= best) return;
-  const value = (time: number): number => {
-    motion.read(i, time, state);
+  const { rule } = panel;
+  const { nodes } = rule;
+  const read = (where: number): number => {
+    motion.read(panel.i, timeAt(panel, where), state);
     return sign * tally.channel(state);
   };
-  const top = peak(value, times[n - 1], t, times[n + 1], sign * at);
-  if (isTop) tally.max = Math.max(tally.max, top);
-  else tally.min = Math.min(tally.min, -top);
+  const top = peak((where) => sign * rule.interpolate(values, where), nodes[n - 1], u, nodes[n + 1], sign * at);
+  if (top.value + trusted * bend <= best) return;
+  let value = read(top.place);
+  if (Math.abs(value - top.value) > trusted * bend) value = peak(read, nodes[n - 1], u, nodes[n + 1], read(u)).value;
+  if (isTop) tally.max = Math.max(tally.max, value);
+  else tally.min = Math.min(tally.min, -value);
 }
 
 class Tallied implements Survey {

@@ -100,25 +100,39 @@ function touchesAt(w: Watched, end: number, blur: number): boolean {
 }
 
 /** The first positive zero of w + w'h + w''h²/2, Infinity without one. */
-function modelZero(value: number, first: number, second: number): number {
+export function modelZero(value: number, first: number, second: number): number {
   return firstRoot(value, first, second / 2);
 }
 
 /**
- * A step h ≤ span with w + w'h + w''h²/2 − Mh³/6 > 0 on (0, h). On (0, H) the cubic is at least the parabola with
- * curvature w'' − MH/3, whose root is a safe step; a smaller H makes that parabola tighter.
+ * A step h ≤ span with w + w'h + w''h²/2 − Mh³/6 > 0 on (0, h), for w ≥ 0. From w = 0 it is that cubic's own root. Else, on
+ * (0, H), the cubic is at least the parabola with curvature w'' − MH/3, whose root is a safe step; a smaller H makes that
+ * parabola tighter.
  */
-function safeStep(value: number, first: number, second: number, bound: number, span: number): number {
-  if (value === 0 && first === 0) return second > 0 ? Math.min(span, (2.999 * second) / bound) : 0;
-  let stretch = span;
+export function safeStep(value: number, first: number, second: number, bound: number, span: number): number {
+  if (value === 0) return fromZero(first, second / 2, bound, span);
+  // the cubic's root is no farther than this, each term on its own being outweighed
+  let stretch = Math.cbrt((6 * value) / bound);
+  if (first > 0) stretch += Math.sqrt((6 * first) / bound);
+  if (second > 0) stretch += (3 * second) / bound;
+  if (!(stretch < span)) stretch = span;
   let safe = 0;
   for (let i = 0; i < 4; i++) {
     const root = firstRoot(value, first, second / 2 - (bound * stretch) / 6);
     if (root >= stretch) return stretch;
-    safe = Math.max(safe, root);
+    if (root < 1.05 * safe) return Math.max(safe, root);
+    safe = root;
     stretch = Math.min(stretch, root * 1.7);
   }
   return safe;
+}
+
+/** The positive root of w' + κh − Mh²/6, without cancellation; 0 where w' < 0 or w falls at once. */
+function fromZero(first: number, kappa: number, bound: number, span: number): number {
+  if (first < 0 || (first === 0 && !(kappa > 0))) return 0;
+  const root = Math.sqrt(kappa * kappa + (2 * bound * first) / 3);
+  if (kappa < 0) return Math.min(span, (2 * first) / (root - kappa));
+  return bound > 0 ? Math.min(span, (2.999 * (kappa + root)) / bound) : span;
 }
 
 /** The first positive zero of w + w'h + κh² for w ≥ 0 (h = 0 not counted), without cancellation; Infinity without one. */

@@ -42,6 +42,10 @@ export class BristleMotion implements Motion {
     return this.segments.length;
   }
 
+  release(): void {
+    // its steps are kept in arrays of their own, for no other run to take
+  }
+
   from(i: number): number {
     return this.segments[i].from;
   }

@@ -31,17 +31,21 @@ export class Chain {
   /** q = σ² − ω₀²; its sign tells over- from underdamped. */
   discriminant = 0;
 
+  /** The fastest and slowest rate of the free motion, 1/s, and the time after which its fast part has died away, s. */
+  fast = 0;
+  slow = 0;
+  fastDies = Infinity;
+
   set(sigma: number, squared: number): void {
     this.sigma = sigma;
     this.squared = squared;
     this.natural = Math.sqrt(squared);
     this.discriminant = (sigma - this.natural) * (sigma + this.natural);
     this.damped = Math.sqrt(Math.max(0, -this.discriminant));
-  }
-
-  /** Largest |λ|, 1/s. */
-  get fastest(): number {
-    return this.discriminant > 0 ? this.sigma + Math.sqrt(this.discriminant) : this.natural;
+    const q = this.discriminant;
+    this.fast = q <= 0 ? this.natural : sigma + Math.sqrt(q);
+    this.slow = q <= 0 ? 0 : squared / this.fast;
+    this.fastDies = q > 0 ? 40 / this.fast : sigma > 0 ? 40 / sigma : Infinity;
   }
 
   /** @param depth how many of the integrals are asked for, at least 1; the others may be left as they were */

@@ -74,18 +74,18 @@ export class ExactSlip implements Slip {
   }
 
   panel(tau: number): number {
-    const { fast, slow, fastDies } = this.oscillation;
+    const { fast, slow, fastDies } = this.oscillation.chain;
     const rate = Math.max(this.inputs.fastest(), tau < fastDies ? fast : slow);
     return rate > 0 ? 1 / rate : Infinity;
   }
 
   isSteady(tau: number): boolean {
-    const { slow, fastDies } = this.oscillation;
+    const { slow, fastDies } = this.oscillation.chain;
     return tau >= fastDies && slow === 0;
   }
 
   private get scale(): number {
-    const rate = Math.max(this.oscillation.fast, this.inputs.fastest());
+    const rate = Math.max(this.oscillation.chain.fast, this.inputs.fastest());
     return rate > 0 ? 2 / rate : Infinity;
   }
 }

@@ -1,6 +1,8 @@
 import type { Inputs } from "../inputs.ts";
 import type { Carrier } from "../carried.ts";
 import { Chain } from "./chain.ts";
+import { FreeMode } from "./free-mode.ts";
+import { ResonantAnswer } from "./resonant-answer.ts";
 import { StartSeries } from "./start-series.ts";
 import type { Stance } from "../stance.ts";
 
@@ -31,11 +33,6 @@ export class Oscillation {
   /** What rounding may have done to `velocity` (or `slip`): ulps of the sum of its terms' magnitudes, m/s. */
   noise = 0;
 
-  /** The fastest and slowest rate of the free motion, 1/s, and the time after which its fast part has died away. */
-  fast = 0;
-  slow = 0;
-  fastDies = Infinity;
-
   /** The τ at which `evaluate` and `evaluateSlip` were last asked: asking again costs nothing. */
   private at = NaN;
   private slipAt = NaN;
@@ -46,7 +43,7 @@ export class Oscillation {
   private startVelocity = 0;
   private inputs!: Inputs;
   private readonly series = new StartSeries();
-  private readonly chain = new Chain();
+  readonly chain = new Chain();
   /** A_j, so that the polynomial part is Σ A_j τ^j/j!, m/s². */
   private readonly push = new Float64Array(4);
   /** True where only A₀ acts, so that of the chain's integrals one is enough. */
@@ -59,16 +56,26 @@ export class Oscillation {
   private readonly particularRe: Float64Array;
   private readonly particularIm: Float64Array;
   private readonly isResonant: Uint8Array;
+  private isNearResonance = false;
   private sumRe = 0;
   private sumRate = 0;
   private magnitude = 0;
+  /** True where the sum of modes applies: underdamped and far from critical, constant push, no harmonic next to resonance. */
+  private isSwing = false;
+  /** The free motion, and A₀/ω₀², about which it swings. */
+  private readonly free = new FreeMode();
+  private settled = 0;
+  /** Size of the free motion at its start and at the last `evaluate`, and bounds of d⃛ and d⁗ of the harmonics' steady answer. */
+  private startSwing = 0;
+  private swing = 0;
+  private steadyJerk = 0;
+  private steadySnap = 0;
   /** Up to this τ the power series is used. */
   private seriesReach = Infinity;
   /** ∂³ and ∂² bounds of the harmonic forcing per m. */
   private secondForcing = 0;
   private thirdForcing = 0;
-  private readonly response = { position: 0, velocity: 0 };
-  private readonly phi = { re: 0, im: 0 };
+  private readonly answer = new ResonantAnswer();
 
   /** @param room the most harmonics there can be, the ripple of N included */
   constructor(
@@ -96,6 +103,7 @@ export class Oscillation {
     this.sigma = body.viscous / (2 * inertia);
     this.squared = body.stiffness / inertia;
     this.chain.set(this.sigma, this.squared);
+    this.answer.set(this.sigma, this.chain.damped);
     this.start = stance.position;
     this.startVelocity = stance.velocity;
     const { push } = this;
@@ -110,10 +118,19 @@ export class Oscillation {
     const fastest = Math.max(2 * this.sigma, Math.sqrt(this.squared), inputs.fastest());
     this.seriesReach = fastest > 0 ? 1 / fastest : Infinity;
     this.series.begin(inputs, body, slide, stance, isOnBase, this.seriesReach);
-    this.takeRates();
     this.at = NaN;
     this.slipAt = NaN;
     if (!Number.isNaN(stance.acceleration)) push[0] += this.knownAcceleration(stance) - this.startAcceleration();
+    this.isSwing = this.isPushSteady && !this.isNearResonance && this.chain.damped > 0.3 * this.chain.fast;
+    if (this.isSwing) this.takeSwing();
+  }
+
+  /** From d(0) = 0 and ḋ(0), told from d₀. */
+  private takeSwing(): void {
+    this.settled = this.push[0] / this.squared;
+    this.free.set(this.sigma, this.chain.damped);
+    this.free.begin(-this.settled - this.sumRe, this.startVelocity - this.sumRate);
+    this.startSwing = this.free.size;
   }
 
   /** d̈ at the start, from v̇_r known exactly. */
@@ -128,18 +145,15 @@ export class Oscillation {
     return sum - 2 * this.sigma * this.startVelocity;
   }
 
-  private takeRates(): void {
-    const q = this.chain.discriminant;
-    this.fast = q <= 0 ? Math.sqrt(this.squared) : this.sigma + Math.sqrt(q);
-    this.slow = q <= 0 ? 0 : this.squared / this.fast;
-    this.fastDies = q > 0 ? 40 / this.fast : this.sigma > 0 ? 40 / this.sigma : Infinity;
-  }
-
   evaluate(tau: number): void {
     if (tau === this.at && tau !== this.slipAt) return; // after evaluateSlip the noise is that of v_r
     this.at = tau;
     this.slipAt = NaN;
-    if (tau > this.seriesReach) return this.evaluateClosed(tau);
+    this.swing = this.startSwing;
+    if (tau > this.seriesReach) {
+      if (this.isSwing && this.chain.fast * tau > 1) return this.evaluateSwing(tau);
+      return this.evaluateClosed(tau);
+    }
     const { series } = this;
     series.evaluate(tau);
     this.position = this.start + series.position;
@@ -184,20 +198,26 @@ export class Oscillation {
     }
   }
 
-  /** Bound of |d⁗| on [τ, τ + reach], from the energy of the twice differentiated equation (see `first-zero.ts`). */
+  /**
+   * Bound of |d⁗| on [τ, τ + reach]: of a sum of modes their magnitudes, which never grow; else from the energy of the
+   * twice differentiated equation (see `first-zero.ts`).
+   */
   snapBound(reach: number): number {
+    if (this.isSwing) return this.steadySnap + this.squared * this.squared * this.swing;
     return Math.sqrt(this.snap * this.snap + this.squared * this.jerk * this.jerk) + reach * this.thirdForcing;
   }
 
   /** Bound of |d⃛| on [τ, τ + reach], likewise. */
   jerkBound(reach: number): number {
+    if (this.isSwing) return this.steadyJerk + this.squared * this.chain.fast * this.swing;
     const now = this.jerk * this.jerk + this.squared * this.acceleration * this.acceleration;
     return Math.sqrt(now) + reach * this.secondForcing;
   }
 
   private takeHarmonics(inputs: Inputs, inertia: number, slide: number): void {
     this.count = 0;
-    this.sumRe = this.sumRate = this.magnitude = 0;
+    this.isNearResonance = false;
+    this.sumRe = this.sumRate = this.magnitude = this.steadyJerk = this.steadySnap = 0;
     this.secondForcing = Math.abs(this.push[2]);
     this.thirdForcing = Math.abs(this.push[3]);
     for (let i = 0; i < inputs.count; i++) {
@@ -224,6 +244,7 @@ export class Oscillation {
     const { damped } = this.chain;
     this.isResonant[i] = damped > 0 && sigma * sigma + (omega - damped) ** 2 < 0.0025 * squared ? 1 : 0;
     if (this.isResonant[i]) {
+      this.isNearResonance = true;
       this.particularRe[i] = this.particularIm[i] = 0;
       this.magnitude += amplitude / damped;
       return;
@@ -238,7 +259,37 @@ export class Oscillation {
     this.particularIm[i] = pIm;
     this.sumRe += pRe;
     this.sumRate -= omega * pIm;
-    this.magnitude += Math.sqrt(pRe * pRe + pIm * pIm) * omega;
+    const speed = Math.sqrt(pRe * pRe + pIm * pIm) * omega;
+    this.magnitude += speed;
+    this.steadyJerk += speed * omega * omega;
+    this.steadySnap += speed * omega * omega * omega;
+  }
+
+  /** d₀ + A₀/ω₀² + Re(Z e^{λτ}) + Σ Re(P e^{iΩτ}): what `evaluateClosed` comes to where nothing in it cancels. */
+  private evaluateSwing(tau: number): void {
+    const { inputs, free } = this;
+    free.look(tau);
+    let position = this.settled + free.position;
+    let { velocity, acceleration, jerk, snap } = free;
+    inputs.turn(tau);
+    for (let i = 0; i < this.count; i++) {
+      const w = this.omega[i];
+      const w2 = w * w;
+      const value = this.particularRe[i] * inputs.cosine[i] - this.particularIm[i] * inputs.sine[i];
+      const rate = -w * (this.particularRe[i] * inputs.sine[i] + this.particularIm[i] * inputs.cosine[i]);
+      position += value;
+      velocity += rate;
+      acceleration -= w2 * value;
+      jerk -= w2 * rate;
+      snap += w2 * w2 * value;
+    }
+    this.position = this.start + position;
+    this.velocity = velocity;
+    this.acceleration = acceleration;
+    this.jerk = jerk;
+    this.snap = snap;
+    this.swing = free.size;
+    this.noise = 8 * unitRoundoff * (free.speed + this.magnitude + Math.abs(velocity));
   }
 
   private evaluateClosed(tau: number): void {
@@ -261,18 +312,20 @@ export class Oscillation {
     }
     let forcingRate = push[1] + tau * (push[2] + (tau * push[3]) / 2);
     let forcingSecond = push[2] + tau * push[3];
+    this.inputs.turn(tau);
     for (let i = 0; i < this.count; i++) {
       const w = this.omega[i];
-      const c = Math.cos(w * tau);
-      const s = Math.sin(w * tau);
+      const c = this.inputs.cosine[i];
+      const s = this.inputs.sine[i];
       const value = this.re[i] * c - this.im[i] * s;
       forcingRate -= w * (this.re[i] * s + this.im[i] * c);
       forcingSecond -= w * w * value;
       if (this.isResonant[i]) {
-        this.respondResonant(i, tau, c, s);
-        position += this.response.position;
-        velocity += this.response.velocity;
-        acceleration += value - 2 * sigma * this.response.velocity - squared * this.response.position;
+        const { answer } = this;
+        answer.evaluate(this.re[i], this.im[i], w, tau, c, s);
+        position += answer.position;
+        velocity += answer.velocity;
+        acceleration += value - 2 * sigma * answer.velocity - squared * answer.position;
       } else {
         position += this.particularRe[i] * c - this.particularIm[i] * s;
         velocity -= w * (this.particularRe[i] * s + this.particularIm[i] * c);
@@ -295,51 +348,4 @@ export class Oscillation {
         Math.abs(this.sumRe * squared * impulse) +
         Math.abs(velocity));
   }
-
-  /** The response from rest to a harmonic next to resonance: Im-free form of exp[λ, λ̄, iΩ]τ, see the class comment. */
-  private respondResonant(i: number, tau: number, c: number, s: number): void {
-    const w = this.omega[i];
-    const { damped } = this.chain;
-    const decay = Math.exp(-this.sigma * tau);
-    const lc = decay * Math.cos(damped * tau);
-    const ls = decay * Math.sin(damped * tau);
-    // near = τ e^{λτ} φ₁(δτ) = (e^{iΩτ} − e^{λτ})/δ, δ = iΩ − λ
-    const difference = w - damped;
-    const distance = this.sigma * this.sigma + difference * difference;
-    let nearRe: number;
-    let nearIm: number;
-    if (distance * tau * tau < 1) {
-      phi1(this.sigma * tau, difference * tau, this.phi);
-      nearRe = tau * (lc * this.phi.re - ls * this.phi.im);
-      nearIm = tau * (lc * this.phi.im + ls * this.phi.re);
-    } else {
-      nearRe = ((c - lc) * this.sigma + (s - ls) * difference) / distance;
-      nearIm = ((s - ls) * this.sigma - (c - lc) * difference) / distance;
-    }
-    // far = (e^{iΩτ} − e^{λ̄τ})/(iΩ − λ̄)
-    const sum = w + damped;
-    const size = this.sigma * this.sigma + sum * sum;
-    const farRe = ((c - lc) * this.sigma + (s + ls) * sum) / size;
-    const farIm = ((s + ls) * this.sigma - (c - lc) * sum) / size;
-    // Both obey D' = iΩ D + e^{bτ}; G = (near − far)/(2i ω_d).
-    const gRe = (nearIm - farIm) / (2 * damped);
-    const gIm = -(nearRe - farRe) / (2 * damped);
-    const rateRe = -w * gIm + ls / damped;
-    const rateIm = w * gRe;
-    this.response.position = this.re[i] * gRe - this.im[i] * gIm;
-    this.response.velocity = this.re[i] * rateRe - this.im[i] * rateIm;
-  }
-}
-
-/** φ₁(z) = (e^z − 1)/z for z = x + iy with |z| < 1, by its series. */
-function phi1(x: number, y: number, out: { re: number; im: number }): void {
-  let re = 1;
-  let im = 0;
-  for (let n = 22; n >= 1; n--) {
-    const r = re;
-    re = 1 + (x * r - y * im) / (n + 1);
-    im = (x * im + y * r) / (n + 1);
-  }
-  out.re = re;
-  out.im = im;
 }
