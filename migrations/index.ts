@@ -21,6 +21,7 @@ import * as createExplorations from "./20261201102000-create-explorations.ts";
 import * as addSwitchedOff from "./20261201103000-add-switched-off.ts";
 import * as addAccountUnits from "./20261201103100-add-account-units.ts";
 import * as createRecords from "./20261201104000-create-records.ts";
+import * as createIdempotencyKeys from "./20261201105000-create-idempotency-keys.ts";
 
 /** Every change of the database, in order. The names are recorded in it: never renamed, never edited once merged. */
 export const migrations = [
@@ -47,4 +48,5 @@ export const migrations = [
   { name: "20261201103000-add-switched-off", ...addSwitchedOff },
   { name: "20261201103100-add-account-units", ...addAccountUnits },
   { name: "20261201104000-create-records", ...createRecords },
+  { name: "20261201105000-create-idempotency-keys", ...createIdempotencyKeys },
 ];

@@ -22,6 +22,7 @@ import { session } from "./middleware/session.ts";
 import { createThrottle } from "./middleware/throttle.ts";
 import { noticesRoutes } from "./notices/notices-routes.ts";
 import { createNoticesService } from "./notices/notices-service.ts";
+import { createOnce } from "./once/once.ts";
 import { pages } from "./pages.ts";
 import { projectsRoutes } from "./projects/projects-routes.ts";
 import { createProjectsService } from "./projects/projects-service.ts";
@@ -80,7 +81,7 @@ function createApi(config: Config, database: Database, chain: ChainService) {
     ...commentsRoutes(createCommentsService(database, members, revisions)),
     ...noticesRoutes(createNoticesService(database)),
   };
-  return createRouter(handlers, members.findCaller, throttle);
+  return createRouter(handlers, members.findCaller, throttle, createOnce(database));
 }
 
 const neverCached: RequestHandler = (_request, response, next) => {

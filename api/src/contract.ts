@@ -61,6 +61,8 @@ export interface Route extends Address {
   readonly response?: z.ZodType;
   /** True where the request must carry `If-Match: "<version>"`. */
   readonly ifMatch?: boolean;
+  /** True where the same `Idempotency-Key` stands for the same act: it is done once, and answered alike for 24 hours. */
+  readonly isOnce?: boolean;
   /** True where the body may carry the points of records, and is as large as an upload then. */
   readonly carriesRecords?: boolean;
 }
@@ -83,7 +85,13 @@ export const routes = {
   signIn: { ...addresses.signIn, body: signInSchema, status: 200, response: sessionSchema },
   signOut: { ...addresses.signOut, status: 204 },
   listProjects: { ...addresses.listProjects, status: 200, response: z.array(projectSchema) },
-  createProject: { ...addresses.createProject, body: projectDraftSchema, status: 201, response: projectSchema },
+  createProject: {
+    ...addresses.createProject,
+    body: projectDraftSchema,
+    isOnce: true,
+    status: 201,
+    response: projectSchema,
+  },
   readProject: { ...addresses.readProject, params: projectParams, status: 200, response: projectSchema },
   changeProject: {
     ...addresses.changeProject,
@@ -128,6 +136,7 @@ export const routes = {
     params: projectParams,
     body: scenarioDraftSchema,
     carriesRecords: true,
+    isOnce: true,
     status: 201,
     response: scenarioSchema,
   },
@@ -152,6 +161,7 @@ export const routes = {
     ...addresses.createCases,
     params: projectParams,
     body: casesDraftSchema,
+    isOnce: true,
     status: 201,
     response: z.array(scenarioSummarySchema),
   },
@@ -159,6 +169,7 @@ export const routes = {
     ...addresses.duplicateScenario,
     params: scenarioParams,
     body: duplicateSchema,
+    isOnce: true,
     status: 201,
     response: scenarioSchema,
   },
@@ -175,6 +186,7 @@ export const routes = {
     ...addresses.createExploration,
     params: scenarioParams,
     body: explorationDraftSchema,
+    isOnce: true,
     status: 201,
     response: explorationSchema,
   },

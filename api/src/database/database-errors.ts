@@ -8,6 +8,8 @@ const GONE_NUMBERS = new Set([
   1927, // connection was killed
 ]);
 
+const ROLLED_BACK = new Set([1205, 1213]);
+
 const GONE_CODES = new Set([
   "ECONNREFUSED",
   "ECONNRESET",
@@ -31,6 +33,9 @@ export function isDatabaseGone(error: unknown): boolean {
     message.includes("in closed state")
   );
 }
+
+/** True where the database itself says that it has taken a transaction back. */
+export const isRolledBack = (error: unknown): boolean => ROLLED_BACK.has(partsOf(error).errno);
 
 /** True where the row would repeat a value of the named unique index. */
 export function isDuplicate(error: unknown, index: string): boolean {

@@ -59,6 +59,33 @@ describe("the client", () => {
     expect(requests[1]).toMatchObject({ path, headers: { "If-Match": '"7"' } });
   });
 
+  it("sends what got no answer again under the same key, and anything else under another", async () => {
+    const keys: string[] = [];
+    let isLost = true;
+    fakeServer({
+      "GET /session": ok(session(ines)),
+      "POST /projects": ({ headers }) => {
+        keys.push(headers["Idempotency-Key"]);
+        return isLost ? Promise.reject(new TypeError("Failed to fetch")) : { status: 201, body: project };
+      },
+    });
+    await failureOf(call("createProject", { body: draft }));
+    await failureOf(call("createProject", { body: { ...draft, name: "Hall 4" } }));
+    isLost = false;
+    await call("createProject", { body: draft });
+    await call("createProject", { body: draft });
+    const [lost, other, repeated, next] = keys;
+    expect(repeated).toBe(lost);
+    expect(lost).toMatch(/^[0-9a-f]{32}$/u);
+    expect(new Set([lost, other, next]).size).toBe(3);
+  });
+
+  it("gives no key to what carries a password", async () => {
+    const requests = fakeServer({ "GET /session": ok(session(null)), "POST /session": ok(session(ines)) });
+    await call("signIn", { body: { email: ines.email, password: "p" } });
+    expect(requests[1].headers["Idempotency-Key"]).toBeUndefined();
+  });
+
   it("tells a refusal with its code, sentence and fields", async () => {
     const fields = [{ path: "name", message: "Give it a name." }];
     fakeServer({

@@ -30,6 +30,9 @@ interface AnyInput {
 // The session's own; every answer that holds a session renews it.
 let csrfToken: string | null = null;
 
+// Keys of requests that got no answer: sent again, they are the same request, which the server does once.
+const unanswered = new Map<string, string>();
+
 /**
  * Calls a route of the server by its name and returns its answer.
  * @throws {ApiFailure} whatever goes wrong: refused, not found, signed out, no server, an answer that cannot be read.
@@ -37,21 +40,41 @@ let csrfToken: string | null = null;
 export async function call<Name extends RouteName>(name: Name, input: Input<Name>): Promise<Answer<Name>> {
   const given: AnyInput = input;
   try {
-    return (await send(addresses[name], given)) as Answer<Name>;
+    return (await sendOnce(addresses[name], given)) as Answer<Name>;
   } catch (error) {
     // Another tab signed in anew: the token is stale, nothing was done yet, once more with the new one.
     if (!(error instanceof ApiFailure && error.code === "csrf-token")) throw error;
     csrfToken = null;
-    return (await send(addresses[name], given)) as Answer<Name>;
+    return (await sendOnce(addresses[name], given)) as Answer<Name>;
   }
 }
 
-async function send(route: Address, input: AnyInput): Promise<unknown> {
+/** Sends a request; what adds something has a key, the same one again where its answer was lost. Passwords are kept nowhere. */
+async function sendOnce(route: Address, input: AnyInput): Promise<unknown> {
+  if (route.method !== "POST" || "password" in Object(input.body)) return send(route, input);
+  const request = JSON.stringify([urlOf(route, input), input.version, input.body]);
+  const key = unanswered.get(request) ?? newKey();
+  unanswered.set(request, key);
+  try {
+    const answer = await send(route, input, key);
+    unanswered.delete(request);
+    return answer;
+  } catch (error) {
+    if (error instanceof ApiFailure && !error.isUnreachable && error.code !== "under-way") unanswered.delete(request);
+    throw error;
+  }
+}
+
+/** 128 random bits; also where the page is not served over a secure connection. */
+const newKey = (): string =>
+  Array.from(crypto.getRandomValues(new Uint8Array(16)), (byte) => byte.toString(16).padStart(2, "0")).join("");
+
+async function send(route: Address, input: AnyInput, key?: string): Promise<unknown> {
   const isUnsafe = route.method !== "GET";
   if (isUnsafe && csrfToken === null) await send(addresses.readSession, { signal: input.signal });
   const response = await reach(urlOf(route, input), {
     method: route.method,
-    headers: headers(input, isUnsafe),
+    headers: { ...headers(input, isUnsafe), ...(key && { "Idempotency-Key": key }) },
     body: input.body === undefined ? undefined : JSON.stringify(input.body),
     signal: input.signal,
     credentials: "same-origin",
@@ -100,7 +123,8 @@ async function read(response: Response): Promise<unknown> {
   }
 }
 
-/** Forgets the session's token: for tests, and when a session has ended. */
+/** Forgets the session's token and what it has asked: for tests, and when a session has ended. */
 export function forgetToken(): void {
   csrfToken = null;
+  unanswered.clear();
 }
