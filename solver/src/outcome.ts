@@ -1,7 +1,7 @@
 import { isConstantFrom } from "./quantities/drive.ts";
 import type { Reading } from "./quantities/reading.ts";
 import type { Ended, Outcome } from "./result.ts";
-import { trendOf, type Trend } from "./trend.ts";
+import { isRisingOver, partsOf, trendOf, type Trend } from "./trend.ts";
 
 /** True where a run was stopped before it came to its own end. */
 export function isCutOff(ended: Ended): boolean {
@@ -27,15 +27,19 @@ function outcomeOfStick({ motion, breakAways, steadyBreakAways }: Reading): Outc
 }
 
 function outcomeOfMotion(reading: Reading): Outcome {
-  const trend = trendOf(reading);
+  const parts = partsOf(reading);
+  const isStopping = reading.steadyStops.length > 0;
+  // What does not swing further from part to part does not grow: of a body that stops no more need be known, which is most of the work.
+  if (isStopping && !isRisingOver(parts)) return "stick-slip";
+  const trend = trendOf(reading, parts);
   if (grows(trend)) return "growing";
-  if (reading.steadyStops.length > 0) return "stick-slip";
+  if (isStopping) return "stick-slip";
   if (settles(reading)) return "settles";
   return isSteady(trend) || runsEvenly(reading) ? "smooth-sliding" : "not-settled";
 }
 
-function grows({ isRising, limit, amplitudes }: Trend): boolean {
-  return isRising && (limit === null || limit > 2 * amplitudes[amplitudes.length - 1]);
+function grows({ isRising, limit, amplitudes, isNothing }: Trend): boolean {
+  return isRising && (limit === null || limit > 2 * amplitudes[amplitudes.length - 1]) && !isNothing();
 }
 
 /** Left alone, the body slows down without ever stopping. */
@@ -46,11 +50,11 @@ function settles(reading: Reading): boolean {
 }
 
 /** Neither the amplitude nor the mean has 2 % left to go. */
-function isSteady({ amplitudes, limit, amplitude, mean, halves }: Trend): boolean {
+function isSteady({ amplitudes, limit, amplitude, mean, halves, isNothing }: Trend): boolean {
   const room = 0.02 * Math.max(amplitude, Math.abs(mean));
   const last = amplitudes[amplitudes.length - 1];
   const drift = limit === null ? Math.max(...amplitudes) - Math.min(...amplitudes) : Math.abs(limit - last);
-  return drift <= room && Math.abs(halves[1] - halves[0]) <= room;
+  return Math.abs(halves[1] - halves[0]) <= room && (drift <= room || isNothing());
 }
 
 /** The velocity of the last tenth of the run varies by less than 2 % of its mean. */

@@ -1,3 +1,4 @@
+import type { Extent } from "./quantities/extent.ts";
 import type { Reading } from "./quantities/reading.ts";
 
 /** Where the motion of the steady window is going: the excursion (x, or d under a feed) in its parts, one after another. */
@@ -8,6 +9,8 @@ export interface Trend {
   readonly limit: number | null;
   /** True where each amplitude is above the one before. */
   readonly isRising: boolean;
+  /** True where the last amplitude is but rounding beside the run's peak. To be asked where it matters: it takes a look at the whole run. */
+  readonly isNothing: () => boolean;
   /** Half peak-to-peak and mean of the whole window, and the means of its halves. */
   readonly amplitude: number;
   readonly mean: number;
@@ -17,33 +20,36 @@ export interface Trend {
 /** Amplitudes that differ by less, relative, count as equal; a last one below this share of the run's peak counts as 0. */
 const resolution = 1e-9;
 
-/** Source of the extrapolation: A. C. Aitken 1926, Proc. R. Soc. Edinburgh 46:289 (not held). */
-export function trendOf(reading: Reading): Trend {
+/** The parts of the steady window, one after another; nothing of them is looked at before it is asked for. */
+export function partsOf(reading: Reading): Extent[] {
   const { from, to, parts } = reading.window;
-  const extents = Array.from({ length: parts }, (_, i) =>
+  return Array.from({ length: parts }, (_, i) =>
     reading.over(from + ((to - from) * i) / parts, from + ((to - from) * (i + 1)) / parts, "excursion"),
   );
+}
+
+/** Whether each part swings further than the one before. Looks no further than the first that does not. */
+export const isRisingOver = (parts: readonly Extent[]): boolean =>
+  parts.every((part, i) => i === 0 || isAbove(part.halfSwing("excursion"), parts[i - 1].halfSwing("excursion")));
+
+const isAbove = (value: number, before: number): boolean => value > before * (1 + resolution);
+
+/** Source of the extrapolation: A. C. Aitken 1926, Proc. R. Soc. Edinburgh 46:289 (not held). @param extents as `partsOf` has them */
+export function trendOf(reading: Reading, extents: readonly Extent[]): Trend {
+  const parts = extents.length;
   const amplitudes = extents.map((extent) => extent.halfSwing("excursion"));
   const means = extents.map((extent) => extent.mean("excursion"));
-  const limit = limitOf(amplitudes);
-  const isRising = rises(amplitudes);
-  const last = amplitudes[parts - 1];
-  // Asked only where it matters: it takes a look at the whole run.
-  const isZero = (isRising || limit !== last) && last < resolution * reading.whole.peak("excursion");
   const highest = Math.max(...extents.map((extent) => extent.max("excursion")));
   const lowest = Math.min(...extents.map((extent) => extent.min("excursion")));
   return {
     amplitudes,
-    limit: isZero ? last : limit,
-    isRising: isRising && !isZero,
+    limit: limitOf(amplitudes),
+    isRising: isRisingOver(extents),
+    isNothing: () => amplitudes[parts - 1] < resolution * reading.whole.peak("excursion"),
     amplitude: (highest - lowest) / 2,
     mean: average(means),
     halves: [average(means.slice(0, parts / 2)), average(means.slice(parts / 2))],
   };
-}
-
-function rises(amplitudes: readonly number[]): boolean {
-  return amplitudes.every((value, i) => i === 0 || value > amplitudes[i - 1] * (1 + resolution));
 }
 
 /** a₃ − Δ₂²/(Δ₂ − Δ₁) of the last three; the last where the last two are equal, null where |Δ₂| ≥ |Δ₁|. */
