@@ -4,8 +4,8 @@ import { sweepPlan } from "./sweep-plan.ts";
 
 /* Runs its tiles once to be warm, says so, and runs them again when told to. */
 
-const { tiles } = workerData as { tiles: number[] };
-const { scenario, plan } = sweepPlan([]);
+const { tiles, quantities = [] } = workerData as { tiles: number[]; quantities?: string[] };
+const { scenario, plan } = sweepPlan(quantities);
 const work = () => tiles.forEach((tile) => runTile(scenario, plan, tile));
 
 work();

@@ -1,7 +1,7 @@
-import { mkdtempSync, rmSync } from "node:fs";
+import { mkdtempSync, readFileSync, rmSync } from "node:fs";
 import { tmpdir } from "node:os";
 import { join } from "node:path";
-import { type BrowserContext, chromium } from "playwright-core";
+import { type Browser, type BrowserContext, chromium } from "playwright-core";
 import { openDatabaseServer } from "../../../api/scripts/database-server.mjs";
 import { openDatabase } from "../../../api/src/database/database.ts";
 import { grantToServer } from "../../../api/src/database/grants.ts";
@@ -16,8 +16,12 @@ type Person = Awaited<ReturnType<typeof signUp>>;
 export interface BenchSite {
   /** The person as a program: for what a bench needs to be there. */
   readonly person: Person;
-  /** A browser of that person's that has been nowhere yet, not even in its cache. */
-  visit(): Promise<BrowserContext>;
+  /** Somebody else, who is in no project yet. */
+  readonly other: Person;
+  /** A browser of a person's that has been nowhere yet, not even in its cache. */
+  visit(who?: Person): Promise<BrowserContext>;
+  /** The most memory that any page of the browser has had so far, its workers included, MB; NaN where the system does not tell. */
+  pageMemory(): Promise<number>;
   close(): Promise<void>;
 }
 
@@ -30,10 +34,12 @@ export async function openSite(webRoot: string): Promise<BenchSite> {
   await database.destroy();
   const server = await startTestServer({ databaseUrl: databaseServer.urls.server, webRoot, logLevel: "silent" });
   const person = await signUp(server, "Ada");
+  const other = await signUp(server, "Bo");
   const browser = await chromium.launch(launchOptions);
   return {
     person,
-    async visit() {
+    other,
+    async visit(who = person) {
       const context = await browser.newContext({
         baseURL: server.address,
         viewport: { width: 1440, height: 900 },
@@ -41,10 +47,11 @@ export async function openSite(webRoot: string): Promise<BenchSite> {
       });
       // What turns these files into JavaScript names every inner function by a call that a page does not know.
       await context.addInitScript("globalThis.__name ??= (named) => named");
-      const [name, value] = (person.cookie ?? "").split(/=(.*)/su);
+      const [name, value] = (who.cookie ?? "").split(/=(.*)/su);
       await context.addCookies([{ name, value, url: server.address }]);
       return context;
     },
+    pageMemory: () => pageMemory(browser),
     async close() {
       await browser.close();
       await server.stop();
@@ -52,4 +59,22 @@ export async function openSite(webRoot: string): Promise<BenchSite> {
       rmSync(folder, { recursive: true, force: true });
     },
   };
+}
+
+/** From the kernel's own account of the processes that the browser says render pages. */
+async function pageMemory(browser: Browser): Promise<number> {
+  const session = await browser.newBrowserCDPSession();
+  const { processInfo } = await session.send("SystemInfo.getProcessInfo");
+  await session.detach();
+  const peaks = processInfo.filter(({ type }) => type === "renderer").map(({ id }) => peakOf(id));
+  return Math.max(...peaks);
+}
+
+function peakOf(process: number): number {
+  try {
+    const [, kB] = /VmHWM:\s+(\d+) kB/.exec(readFileSync(`/proc/${process}/status`, "utf8")) ?? [];
+    return Number(kB) / 1000;
+  } catch {
+    return NaN;
+  }
 }
