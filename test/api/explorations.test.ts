@@ -1,7 +1,16 @@
+import { quantityNames } from "@restband/solver";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import type { ExplorationSummary, Project, StoredExploration, StoredTile } from "../../api/src/contract.ts";
 import type { Browser } from "../support/browser.ts";
-import { cellsOf, createExploration, otherRunner, runner, smallSweep, tileContent } from "../support/explorations.ts";
+import {
+  cellsOf,
+  createExploration,
+  otherRunner,
+  runner,
+  smallSweep,
+  sweepOf,
+  tileContent,
+} from "../support/explorations.ts";
 import { addMember, createProject, createScenario, signUp, smallScenario } from "../support/people.ts";
 import { startTestServer, type TestServer } from "../support/test-server.ts";
 
@@ -67,14 +76,15 @@ describe("a sweep", () => {
 
   it("gives its tiles back to the last bit, to whoever may read it", async () => {
     const { id } = await begin();
-    const numbers = Float64Array.from([0.1, -0, 1e-308, Number.MAX_VALUE]);
-    expect((await save(ada, id, 1, runner, tileContent(numbers))).status).toBe(204);
-    expect((await read(bo, id)).saved).toEqual([1]);
-    const tiles = await bo.get<StoredTile[]>("readTiles", { params: at(id), query: "?numbers=0,1" });
-    expect(tiles.map(({ number }) => number)).toEqual([1]);
+    const numbers = Float64Array.from([0.1, -0, 1e-308, Number.MAX_VALUE, 0, 0, 0, 0, 0]);
+    expect((await save(ada, id, 2, runner, tileContent(numbers))).status).toBe(204);
+    expect((await read(bo, id)).saved).toEqual([2]);
+    const tiles = await bo.get<StoredTile[]>("readTiles", { params: at(id), query: "?numbers=0,2" });
+    expect(tiles.map(({ number }) => number)).toEqual([2]);
     const bytes = Buffer.from(tiles[0].content, "base64");
     const back = new Float64Array(bytes.buffer.slice(bytes.byteOffset, bytes.byteOffset + bytes.length));
-    expect([...back].map((value, i) => Object.is(value, numbers[i]))).toEqual([true, true, true, true]);
+    expect([...back].every((value, i) => Object.is(value, numbers[i]))).toBe(true);
+    expect(back).toHaveLength(9);
   });
 
   it("takes a tile once, whoever sends it how often", async () => {
@@ -90,11 +100,11 @@ describe("a sweep", () => {
     const { id } = await begin();
     const short = await ada.fail("saveTile", {
       params: at(id, 2),
-      body: { runner, content: tileContent(cellsOf(0)) },
+      body: { runner, content: tileContent(cellsOf(1)) },
     });
     expect(short.status).toBe(400);
     expect(short.fields).toEqual([
-      { path: "content", message: "Tile 2 has 16 bytes: 1 cells of 2 numbers. These are 32." },
+      { path: "content", message: "Tile 2 has 72 bytes: 3 cells of 3 numbers. These are 144." },
     ]);
     const beyond = await ada.fail("saveTile", {
       params: at(id, 3),
@@ -167,20 +177,87 @@ describe("two people at one sweep", () => {
 });
 
 it("a full store is told with what to do, and has room again when something is deleted", async () => {
-  const { id } = await begin({ tileCells: Array(300).fill(800), cellValues: 100 });
+  const wide = sweepOf(500, quantityNames.slice(0, 29), 500);
+  const { id } = await begin(wide);
   const params = { projectId, scenarioId };
-  const body = { ...smallSweep, tileCells: Array(112).fill(900), cellValues: 100 };
+  for (const _ of [2, 3]) await createExploration(ada, projectId, scenarioId, wide);
+  const body = sweepOf(500, quantityNames.slice(0, 29), 80);
   const failure = await ada.fail("createExploration", { params, body });
   expect(failure).toMatchObject({ status: 507, code: "full-store" });
   expect(failure.message).toMatch(/hold 192 of 200 MB\. Delete one to make room, or ask for fewer cells\.$/);
   await ada.get("deleteExploration", { params: at(id) });
-  expect((await createExploration(ada, projectId, scenarioId, body)).tiles).toBe(112);
+  expect((await createExploration(ada, projectId, scenarioId, body)).tiles).toBe(body.tileCells.length);
 });
 
 it("a tile larger than a request is not planned", async () => {
   const body = { ...smallSweep, tileCells: [4096], cellValues: 100 };
   const failure = await ada.fail("createExploration", { params: { projectId, scenarioId }, body });
   expect(failure.fields).toEqual([{ path: "tileCells", message: "A tile has no more than 720000 bytes." }]);
+});
+
+describe("a plan", () => {
+  const refused = async (more: object) => {
+    const { id } = await createScenario(ada, projectId);
+    const request = { params: { projectId, scenarioId: id }, body: { ...smallSweep, ...more } };
+    const failure = await ada.fail("createExploration", request);
+    expect(failure).toMatchObject({ status: 422, code: "refused-plan" });
+    return failure.fields;
+  };
+  const { sweep } = smallSweep.plan;
+  const [axis] = sweep.axes;
+  const study = { format: "restband-tolerance/1", inputs: [], runs: 200, seed: 1 };
+
+  it.each<[string, object, string]>([
+    [
+      "of a field the scenario has not",
+      { sweep: { ...sweep, axes: [{ ...axis, path: "body.weight" }] } },
+      "sweep.axes[0].path",
+    ],
+    ["of an empty range", { sweep: { ...sweep, axes: [{ ...axis, to: 0.1 }] } }, "sweep.axes[0].to"],
+    ["of no shape", { sweep: { axes: [] } }, "sweep.format"],
+    ["with more beside it", { sweep, note: "<script>" }, "note"],
+    ["that lasts no time", { sweep, seconds: 0 }, "seconds"],
+  ])("of a sweep is refused %s, at its place", async (_, plan, path) => {
+    const fields = await refused({ plan: { seconds: 5, ...plan } });
+    expect(fields.map((field) => field.path)).toContain(`plan.${path}`);
+  });
+
+  it("of a sweep has rows of its own size, cut into its own tiles", async () => {
+    expect(await refused({ cellValues: 4 })).toEqual([
+      { path: "cellValues", message: "A row of this plan has 3 numbers, not 4." },
+    ]);
+    expect(await refused({ tileCells: [3, 3, 6] })).toEqual([
+      { path: "tileCells", message: "These are not the tiles of a plan of 12 cells." },
+    ]);
+  });
+
+  it("is kept whole, with what may be left out written out", async () => {
+    const { links: _links, continuation: _continuation, ...short } = sweep;
+    const { plan } = await begin({ plan: { sweep: short, seconds: 5 } });
+    expect(plan).toMatchObject({ sweep: { ...short, continuation: "none", links: {} }, seconds: 5 });
+  });
+
+  it("of a study is refused with nothing that scatters", async () => {
+    const fields = await refused({ kind: "study", plan: { study } });
+    expect(fields[0].path).toMatch(/^plan\.study\./);
+  });
+
+  it("of a study is kept with a row for each of its runs", async () => {
+    const path = "contact.law.kinetic";
+    const inputs = [{ path, distribution: { kind: "uniform", low: 0.1, high: 0.18 } }];
+    const plan = { study: { ...study, inputs } };
+    const rows = { kind: "study", plan, tileCells: [100, 100], cellValues: 3 };
+    expect((await begin(rows)).plan).toMatchObject(plan);
+    expect((await refused({ ...rows, tileCells: [100] })).map((field) => field.path)).toEqual(["tileCells"]);
+  });
+
+  it("of a search names a number of the scenario, and goes up", async () => {
+    const plan = { path: "contact.law.static", low: 0.1, high: 0.4, target: "stick-slip" };
+    const search = { kind: "search", tileCells: [], cellValues: 1, plan };
+    expect((await begin(search)).plan).toEqual(plan);
+    const wrong = await refused({ ...search, plan: { ...plan, path: "title", high: 0.1 } });
+    expect(wrong.map((field) => field.path)).toEqual(["plan.path", "plan.high"]);
+  });
 });
 
 it("goes with its scenario into another project, and away with it", async () => {

@@ -3,7 +3,7 @@ import { insertOneTimeLink } from "../../api/src/accounts/one-time-links-store.t
 import { type Role, type RouteName, roles, routes } from "../../api/src/contract.ts";
 import { permissions, permit } from "../../api/src/middleware/permit.ts";
 import type { Browser, Request } from "../support/browser.ts";
-import { cellsOf, createExploration, runner, smallSweep, tileContent } from "../support/explorations.ts";
+import { cellsOf, createExploration, runner, smallSweep, sweepOf, tileContent } from "../support/explorations.ts";
 import {
   addMember,
   createProject,
@@ -135,9 +135,12 @@ async function layProject(name: RouteName) {
   };
 }
 
+/** Done as soon as its only tile is there. */
+const oneTile = sweepOf(2);
+
 async function layExploration(owner: Browser, projectId: string, scenarioId: string): Promise<string> {
-  const { id: explorationId } = await createExploration(owner, projectId, scenarioId, { tileCells: [2] });
-  const body = { runner, content: tileContent(cellsOf(0)) };
+  const { id: explorationId } = await createExploration(owner, projectId, scenarioId, oneTile);
+  const body = { runner, content: tileContent(cellsOf(0, oneTile)) };
   await owner.get("saveTile", { params: { projectId, explorationId, number: "0" }, body });
   return explorationId;
 }
@@ -222,7 +225,7 @@ function requestFor(
     case "readTiles":
       return { query: "?numbers=0" };
     case "saveTile":
-      return { body: { runner, content: tileContent(cellsOf(0)) } };
+      return { body: { runner, content: tileContent(cellsOf(0, oneTile)) } };
     case "concludeExploration":
       return { body: { headline: "Slides smoothly from 8.35 mm/s.", answer: {} } };
     case "changeMember":

@@ -5,6 +5,7 @@ import { Refusal } from "../errors.ts";
 import { withPoints } from "../records/records-service.ts";
 import type { ScenariosService } from "../scenarios/scenarios-service.ts";
 import { explorationOf, missing, summaryOf } from "./exploration-rows.ts";
+import { demandPlan } from "./plan-rules.ts";
 import { createRunners, type Place } from "./exploration-runners.ts";
 import type { explorationDraftSchema, ExplorationSummary, StoredExploration } from "./explorations-schema.ts";
 import {
@@ -46,7 +47,7 @@ export function createExplorationsService(database: Database, scenarios: Scenari
     read: (place: Place) => read(database, place),
 
     /**
-     * @throws Refusal 409 where the scenario has another version by now, 507 where the project's store is full
+     * @throws Refusal 409 where the scenario has another version by now, 422 for a plan that is none of it, 507 where the project's store is full
      */
     async create(
       projectId: string,
@@ -56,10 +57,17 @@ export function createExplorationsService(database: Database, scenarios: Scenari
     ): Promise<StoredExploration> {
       const { content, version } = await scenarios.read(projectId, scenarioId);
       if (version !== draft.scenarioVersion) throw otherVersion(version);
+      const planned = { ...draft, plan: demandPlan(draft, content) };
       const id = await database.transaction(async (transaction) => {
         await demandRoom(transaction, projectId, draft);
         const inputDigest = inputDigestOf(content);
-        const made = await insertExploration(transaction, { scenarioId, accountId, content, inputDigest, draft });
+        const made = await insertExploration(transaction, {
+          scenarioId,
+          accountId,
+          content,
+          inputDigest,
+          draft: planned,
+        });
         await recordAct(transaction, trailed("exploration.created", { projectId, scenarioId, accountId }, draft));
         return made;
       });
