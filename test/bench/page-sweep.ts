@@ -73,7 +73,7 @@ function report(workers: number, rounds: readonly { bare: number; kept: PageSwee
   console.log(
     [
       `  meanwhile ${(1000 / median(frames)).toFixed(0)} frames a second, p95 of a frame ${frames[Math.floor(0.95 * frames.length)].toFixed(0)} ms`,
-      `most memory of the page ${Math.max(...rounds.map((round) => round.kept.memory)).toFixed(0)} MB`,
+      `most memory of the page ${median(rounds.map((round) => round.kept.memory.after)).toFixed(0)} MB (before it began ${median(rounds.map((round) => round.kept.memory.before)).toFixed(0)})`,
     ].join(", "),
   );
 }

@@ -13,8 +13,8 @@ export interface PageSweep {
   readonly stored: number;
   /** Lengths of the frames meanwhile, ms. */
   readonly frames: number[];
-  /** The most memory the page has had, MB. */
-  readonly memory: number;
+  /** The most memory the page has had before it began, and at its end, MB. */
+  readonly memory: { readonly before: number; readonly after: number };
 }
 
 /** A project with a scenario to be swept, seen by somebody who may save and by somebody who may only read. */
@@ -53,6 +53,7 @@ export async function measurePageSweep(
   await page.goto(`/projects/${projectId}/scenarios/${scenarioId}/explore/${id}`);
   await page.getByRole("button", { name: "Resume" }).waitFor();
   await page.waitForLoadState("networkidle");
+  const before = await site.pageMemory();
   await beginFrames(page);
   const begun = performance.now();
   await page.getByRole("button", { name: "Resume" }).click();
@@ -61,7 +62,7 @@ export async function measurePageSweep(
   const frames = await framesOf(page);
   while (isKept && (await savedOf(site, projectId, id)) < tiles) await page.waitForTimeout(20);
   const stored = (performance.now() - begun) / 1000;
-  const memory = await site.pageMemory();
+  const memory = { before, after: await site.pageMemory() };
   await context.close();
   return { computed, stored, frames, memory };
 }
