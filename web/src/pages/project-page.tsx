@@ -13,7 +13,7 @@ import { useShortcut } from "../components/shortcuts.tsx";
 import { WorkHeader } from "../features/account/work-header.tsx";
 import { knownOf } from "../features/project-home/arrange.ts";
 import { useGlances, type Glances } from "../features/project-home/glances/use-glances.ts";
-import { headline } from "../features/project-home/headline.ts";
+import { headline, inReview } from "../features/project-home/headline.ts";
 import { ImportDialog } from "../features/project-home/import-dialog.tsx";
 import { Lately } from "../features/project-home/lately.tsx";
 import { PeopleColumn } from "../features/project-home/people-column.tsx";
@@ -63,7 +63,7 @@ export function ProjectPage() {
         className="page-width grid grow content-start gap-x-16 gap-y-12 py-8 desk:py-9 wide:grid-cols-[minmax(0,1fr)_292px]"
       >
         <div className="min-w-0">
-          <h1 className="text-24 font-semibold desk:text-34">{headlineOf(scenarios, glances)}</h1>
+          <h1 className="text-24 font-semibold desk:text-34">{headlineOf(scenarios, glances, frozen)}</h1>
           <ProjectAbout project={project} />
           <ProjectScenarios
             project={project}
@@ -104,11 +104,16 @@ export function ProjectPage() {
 }
 
 /** What is archived does not count. */
-function headlineOf(scenarios: readonly ScenarioSummary[], glances: Glances): string {
+function headlineOf(
+  scenarios: readonly ScenarioSummary[],
+  glances: Glances,
+  frozen: ReadonlyMap<string, readonly RevisionSummary[]>,
+): string {
   const used = scenarios.filter(({ archivedAt }) => archivedAt === null);
   return headline(
     used.length,
     used.flatMap(({ digest }) => knownOf(glances.of(digest))?.standing ?? []),
+    inReview(used.flatMap(({ id }) => frozen.get(id)?.[0].state ?? [])),
   );
 }
 

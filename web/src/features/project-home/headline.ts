@@ -1,3 +1,4 @@
+import type { RevisionState } from "@restband/api/contract";
 import type { LimitVerdict } from "@restband/solver";
 import { capitalised, listed, sayCount, sayMany } from "../../format/words.ts";
 
@@ -22,19 +23,45 @@ export function limitsWords(limits: readonly LimitVerdict[]): string {
   return `${all} kept`;
 }
 
+/** How many scenarios stand so in a review, by their newest revision. */
+export interface InReview {
+  readonly waiting: number;
+  readonly returned: number;
+}
+
+/** By the states of the newest revisions. */
+export const inReview = (states: readonly RevisionState[]): InReview => ({
+  waiting: states.filter((state) => state === "in-review").length,
+  returned: states.filter((state) => state === "returned").length,
+});
+
 /**
  * The project in a sentence or two. What has not been computed yet is not counted, and the sentence says so.
  *
  * @param count all scenarios of the project
  * @param standings those computed so far
  */
-export function headline(count: number, standings: readonly Standing[]): string {
+export function headline(count: number, standings: readonly Standing[], reviews: InReview): string {
   if (count === 0) return "No scenario yet.";
-  const opening = `${capitalised(sayMany(count, "scenario"))}.`;
   const isWhole = standings.length === count;
-  const verdict = isWhole ? wholeVerdict(standings) : breaking(standings, count);
-  if (verdict === "") return opening;
-  return `${opening} ${capitalised(verdict)}${isWhole ? "" : `, of ${sayCount(standings.length)} computed so far`}.`;
+  const review = reviewed(reviews, count);
+  const verdict = isWhole ? wholeVerdict(standings) : partialVerdict(standings, count);
+  // A count of what is computed so far speaks of the verdict alone.
+  const sentences = isWhole ? [listed([...verdict, ...review])] : [...verdict, listed(review)];
+  const told = [sayMany(count, "scenario"), ...sentences].filter((sentence) => sentence !== "");
+  return told.map((sentence) => `${capitalised(sentence)}.`).join(" ");
+}
+
+function reviewed({ waiting, returned }: InReview, count: number): string[] {
+  return [
+    waiting > 0 ? `${who(waiting, count)} ${waiting === 1 ? "waits" : "wait"} for a decision` : "",
+    returned > 0 ? `${who(returned, count)} ${returned === 1 ? "was" : "were"} returned` : "",
+  ].filter((part) => part !== "");
+}
+
+function partialVerdict(standings: readonly Standing[], count: number): string[] {
+  const broken = breaking(standings, count);
+  return broken === "" ? [] : [`${broken}, of ${sayCount(standings.length)} computed so far`];
 }
 
 const numberOf = (standing: Standing, standings: readonly Standing[]): number =>
@@ -53,14 +80,13 @@ function breaking(standings: readonly Standing[], count: number): string {
 }
 
 /** Faults first; without any, what is kept. */
-function wholeVerdict(standings: readonly Standing[]): string {
+function wholeVerdict(standings: readonly Standing[]): string[] {
   const count = standings.length;
   const unjudged = numberOf("unjudged", standings);
   const doubt = unjudged > 0 ? `${who(unjudged, count)} cannot be judged` : "";
-  const faults = listed([breaking(standings, count), doubt].filter(Boolean));
+  const faults = [breaking(standings, count), doubt].filter(Boolean);
   const kept = numberOf("kept", standings);
-  if (faults !== "" || kept === 0) return faults;
-  return kept < count
-    ? "none breaks its limits"
-    : `${who(kept, count)} ${kept === 1 ? "keeps its" : "keep their"} limits`;
+  if (faults.length > 0 || kept === 0) return faults;
+  if (kept < count) return ["none breaks its limits"];
+  return [`${who(kept, count)} ${kept === 1 ? "keeps its" : "keep their"} limits`];
 }
