@@ -32,6 +32,16 @@ const scenarios: Record<string, Scenario> = {
     ],
     span: { seconds: 5, untilRest: false },
   }),
+  "bristles that creep, let go and catch again": buildScenario({
+    body: { inertia: 1, stiffness: 800, viscous: 2 },
+    contact: {
+      law: { model: "bristle", static: 0.4, kinetic: 0.25, velocity: 0.01, stiffness: 4e4, damping: 150, fluid: 0.5 },
+      normal: { preload: 20, ripple: { amplitude: 6, hz: 3, phase: 40 } },
+      counterface: { velocity: 0.02 },
+    },
+    force: [{ kind: "step", value: 2, start: 0.9 }],
+    span: { seconds: 1.5, untilRest: false },
+  }),
   "a feed that sticks and slips": buildScenario({
     body: { inertia: 120, stiffness: 4e6, viscous: 350 },
     contact: { law: { model: "coulomb", static: 0.15, kinetic: 0.12 }, normal: { preload: 800, weight: true } },

@@ -2,14 +2,21 @@ import type { Law } from "../scenario/scenario.ts";
 import { pythonList, pythonNumber as n } from "./literals.ts";
 
 type LawOf<Model extends Law["model"]> = Extract<Law, { model: Model }>;
-type Model = Exclude<Law["model"], "bristle">;
+type Model = Law["model"];
 
 /** `friction(v)` of each law in Python: the body of the function, and lines before it. v ≥ 0 is the speed of the faces. */
 const writers: { readonly [M in Model]: (law: LawOf<M>) => LawPart } = {
   none: () => ({ body: ["return 0.0 * v"] }),
   coulomb: (law) => ({ body: [`return np.where(v > 0, ${n(law.kinetic)}, ${n(law.static)})`] }),
   stribeck: ({ static: atRest, kinetic, velocity, exponent }) => ({
-    body: [`return ${n(kinetic)} + (${n(atRest)} - ${n(kinetic)}) * np.exp(-((v / ${n(velocity)}) ** ${n(exponent)}))`],
+    body: [falling(atRest, kinetic, velocity, exponent)],
+  }),
+  bristle: ({ static: atRest, kinetic, velocity, stiffness, damping }) => ({
+    setUp: [
+      `BRISTLE_STIFFNESS, BRISTLE_DAMPING = ${n(stiffness)}, ${n(damping)}  # s0, s1; s2 is FLUID`,
+      `BRISTLE_VELOCITY = ${n(velocity)}  # vs`,
+    ],
+    body: [falling(atRest, kinetic, velocity, 2)],
   }),
   table: ({ points }) => ({
     setUp: [
@@ -21,6 +28,9 @@ const writers: { readonly [M in Model]: (law: LawOf<M>) => LawPart } = {
   }),
 };
 
+const falling = (atRest: number, kinetic: number, velocity: number, exponent: number) =>
+  `return ${n(kinetic)} + (${n(atRest)} - ${n(kinetic)}) * np.exp(-((v / ${n(velocity)}) ** ${n(exponent)}))`;
+
 export interface LawPart {
   readonly setUp?: readonly string[];
   readonly body: readonly string[];
@@ -28,7 +38,7 @@ export interface LawPart {
 
 /** A law in Python; `not-covered.ts` has seen to it that there is a writer. */
 export function lawPart(law: Law): LawPart {
-  const write = writers[law.model as Model] as (law: Law) => LawPart;
+  const write = writers[law.model] as (law: Law) => LawPart;
   return write(law);
 }
 

@@ -14,8 +14,7 @@ export function pythonGap(scenario: Scenario, ended: Result["ended"]): string | 
   const { contact, force, base } = scenario;
   if (ended !== "rest" && ended !== "time")
     return "The run was cut off before its end, so there is no whole motion to check.";
-  if (!isLawWritten(contact.law.model))
-    return "A friction law with a deflection of its own is not written out as a Python file.";
+  if (!isLawWritten(contact.law.model)) return "Its friction law is not written out as a Python file.";
   const terms = [...force, ...base];
   if (!terms.every(({ kind }) => isWritten(kind))) return "One of the inputs is not written out as a Python file.";
   if (terms.some((term) => "digest" in term))

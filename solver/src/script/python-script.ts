@@ -1,5 +1,6 @@
 import { compileProblem } from "../scenario/compile-problem.ts";
 import type { Scenario } from "../scenario/scenario.ts";
+import { bristleText } from "./bristle-text.ts";
 import { comparisonText } from "./comparison-text.ts";
 import { frozenPart, type Frozen } from "./frozen-part.ts";
 import { inputText } from "./input-text.ts";
@@ -43,8 +44,7 @@ export function pythonScript(scenario: Scenario, claim: Claim): string {
     frozenPart(motion, claim),
     "# ---- Corners and sizes -------------------------------------------------------------------------------------------",
     settingsText,
-    motionText,
-    runText,
+    ...(scenario.contact.law.model === "bristle" ? [bristleText] : [motionText, runText]),
     quantitiesText,
     comparisonText,
   ].join("\n");
@@ -69,7 +69,7 @@ import sys
 
 import numpy as np
 from numpy.polynomial.chebyshev import chebvander
-from scipy.integrate import DOP853
+from scipy.integrate import DOP853, LSODA
 from scipy.interpolate import CubicHermiteSpline
 from scipy.optimize import brentq, minimize_scalar
 

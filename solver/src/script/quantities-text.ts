@@ -184,13 +184,13 @@ def quantities(events, stretches):
     used = stuck.largest(share) if stuck.tables else -1.0
     if friction(0.0) > 0 and any(pressing(t) > 0 for t in breaks):
         used = 1.0
-    q["holdUse"] = None if used < 0 else min(1.0, used)
+    q["holdUse"] = None if used < 0 or LAW == "bristle" else min(1.0, used)
     q["slipPerCycle"] = None if cycles is None else steady.integral(lambda s: np.abs(s["slip"])) / cycles
     q["driftPerCycle"] = None if cycles is None else steady.integral(read("slip")) / cycles
     q["driveForcePeak"] = whole.peak(read("drive"))
     q["driveForceRms"] = np.sqrt(whole.mean(lambda s: s["drive"] ** 2)) if end > 0 else abs(stretches[-1].end_state()["drive"])
     heat = lambda s: -s["f"] * s["slip"]
-    q["frictionPowerPeak"] = whole.peak(heat)
+    q["frictionPowerPeak"] = whole.largest(heat)
     q["frictionPowerMean"] = steady.mean(heat) if end > start else float(heat(stretches[-1].end_state()))
     carried = "x" if DRIVEN_BY_BASE else "crossing"
     q["transmissibility"] = steady.half_swing(read(carried)) / DRIVE_AMPLITUDE if DRIVE_AMPLITUDE else None

@@ -58,18 +58,6 @@ def is_zero_at(t, value, look, step):
     return gain < 0 and abs(value / gain) < NEAR * t
 
 
-def piece_at(pieces, t):
-    for old, _, piece in reversed(pieces):
-        if t >= old:
-            return piece(t)
-    return pieces[0][2](t)
-
-
-def found_zero(g, low, high):
-    """Where g passes from above 0 to below it."""
-    return brentq(g, low, high, xtol=1e-15 * max(1.0, high), rtol=9e-16) if g(low) > 0 > g(high) else (low if g(low) <= 0 else high)
-
-
 def first_passed(hold, start, end):
     """When a hold is first passed, told where the need equals what there is, and a time soon after; None twice if not before end."""
     times = looks_at(start, end)

@@ -34,6 +34,18 @@ def sign_changes(g, low, high):
     return [float(t) for t in times[1:-1][values[1:-1] == 0]] + [brentq(g, times[i], times[i + 1], xtol=1e-15) for i in passed]
 
 
+def piece_at(pieces, t):
+    for old, _, piece in reversed(pieces):
+        if t >= old:
+            return piece(t)
+    return pieces[0][2](t)
+
+
+def found_zero(g, low, high):
+    """Where g passes from above 0 to below it."""
+    return brentq(g, low, high, xtol=1e-15 * max(1.0, high), rtol=9e-16) if g(low) > 0 > g(high) else (low if g(low) <= 0 else high)
+
+
 def drift_of_spring(t, at):
     """d' of a stuck body: u' - y'."""
     return counterface(t, at)[1] - base(t, at)[1]
@@ -49,7 +61,11 @@ def meeting_times():
 
 def between(corners):
     """From, to and middle of the stretches of the run between corners."""
-    ends = [0.0] + [corner for corner in corners if 0 < corner < SECONDS] + [SECONDS]
+    ends = [0.0]
+    for corner in corners:
+        if 1e-14 * SECONDS < corner - ends[-1] and corner <= SECONDS * (1 - 1e-14):  # two that rounding parts are one
+            ends.append(corner)
+    ends.append(SECONDS)
     return [(low, high, (low + high) / 2) for low, high in zip(ends, ends[1:])]
 
 

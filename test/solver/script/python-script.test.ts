@@ -25,15 +25,8 @@ describe("the Python file of a scenario", () => {
     ]);
   });
 
-  it("writes out every friction law but the one with a deflection of its own", () => {
-    const gaps = frictionLaws.map(({ model }) => [model, pythonGap(withLaw(model), "time") === null]);
-    expect(Object.fromEntries(gaps)).toEqual({
-      none: true,
-      coulomb: true,
-      stribeck: true,
-      table: true,
-      bristle: false,
-    });
+  it("writes out every friction law", () => {
+    for (const { model } of frictionLaws) expect(pythonGap(withLaw(model), "time"), model).toBeNull();
   });
 
   it("writes out every kind of input", () => {
