@@ -35,6 +35,7 @@ export type TileState =
 
 const AT_A_TIME = 4;
 const TRY_AGAIN_MS = 3000;
+const TELL_EVERY_MS = 200;
 /** What a server says that will say so again: it knows no such exploration any more, or takes no such tile. */
 const FINAL = [400, 404, 413, 422];
 
@@ -54,6 +55,7 @@ export class TileRun<Store extends TileStore> {
   private readonly unsaved = new Map<number, Float64Array>();
   private isSaving = false;
   private edition = 0;
+  private news: ReturnType<typeof setTimeout> | null = null;
   private readonly listeners = new Set<() => void>();
   private controller: AbortController | null = null;
   /** Why the server takes no more of it; null while it does. */
@@ -217,11 +219,20 @@ export class TileRun<Store extends TileStore> {
   }
 
   private set(state: TileState): void {
+    const isOther = state.kind !== this.state.kind;
     this.state = state;
-    this.tell();
+    if (isOther) this.tellNow();
+    else this.tell();
   }
 
+  /** Rows come much faster than they can be drawn: news waits for each other, so that workers are never kept waiting by a page that draws. */
   private tell(): void {
+    this.news ??= setTimeout(() => this.tellNow(), TELL_EVERY_MS);
+  }
+
+  private tellNow(): void {
+    if (this.news !== null) clearTimeout(this.news);
+    this.news = null;
     this.edition += 1;
     for (const listener of this.listeners) listener();
   }
