@@ -42,6 +42,12 @@ const scenarios: Record<string, Scenario> = {
     force: [{ kind: "step", value: 2, start: 0.9 }],
     span: { seconds: 1.5, untilRest: false },
   }),
+  "a slide shaken by a long record": buildScenario({
+    body: { inertia: 20, stiffness: 8e4, viscous: 60 },
+    contact: { law: { model: "coulomb", static: 0.2, kinetic: 0.15 }, normal: { preload: 600 } },
+    base: [{ kind: "record", ...swing(1200, 3) }],
+    span: { seconds: 3.2 },
+  }),
   "a feed that sticks and slips": buildScenario({
     body: { inertia: 120, stiffness: 4e6, viscous: 350 },
     contact: { law: { model: "coulomb", static: 0.15, kinetic: 0.12 }, normal: { preload: 800, weight: true } },
@@ -103,6 +109,12 @@ describe("a scenario as a Python file", () => {
     expect(status).toBe(1);
   });
 });
+
+/** A swing that speeds up, at so many even times. */
+function swing(points: number, seconds: number): { times: number[]; values: number[] } {
+  const times = Array.from({ length: points }, (_, i) => (seconds * i) / (points - 1));
+  return { times, values: times.map((t) => 0.004 * Math.sin(2 * Math.PI * (1 + 0.5 * t) * t)) };
+}
 
 function run(scenario: Scenario): Result {
   const result = simulate(scenario, { samples: 0 });

@@ -4,7 +4,7 @@ import { jsonText } from "../json-text.ts";
 import type { Scenario, Term } from "./scenario.ts";
 
 /** Records longer than this are named by their digest in the canonical form. */
-const inlinePoints = 1000;
+export const inlinePoints = 1000;
 
 /**
  * The canonical text of a checked scenario (RFC 8785): keys sorted, numbers as ECMAScript prints them, −0 as 0, every
@@ -35,10 +35,14 @@ export function storedForm(term: Term): Term {
   return { kind, digest: recordDigest(times, values), points: times.length } as Term;
 }
 
-/** What a stored record is named by: SHA-256 of its times, then its values, as little-endian Float64, −0 as 0. */
-export function recordDigest(times: ArrayLike<number>, values: ArrayLike<number>): string {
+/** What a stored record is named by: SHA-256 of its bytes, lower-case hex. */
+export const recordDigest = (times: ArrayLike<number>, values: ArrayLike<number>): string =>
+  bytesToHex(sha256(recordBytes(times, values)));
+
+/** The bytes of a record: its times, then its values, as little-endian Float64, −0 as 0. */
+export function recordBytes(times: ArrayLike<number>, values: ArrayLike<number>): Uint8Array {
   const view = new DataView(new ArrayBuffer(8 * (times.length + values.length)));
   for (let i = 0; i < times.length; i++) view.setFloat64(8 * i, times[i] + 0, true);
   for (let i = 0; i < values.length; i++) view.setFloat64(8 * (times.length + i), values[i] + 0, true);
-  return bytesToHex(sha256(new Uint8Array(view.buffer)));
+  return new Uint8Array(view.buffer);
 }

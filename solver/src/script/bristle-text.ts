@@ -30,6 +30,10 @@ class Stretch:
             "y1": y1, "y2": y2, "force": force(t, self.at), "drive": drive, "crossing": drive,
         }
 
+    def names(self):
+        """Of the values that state tells."""
+        return list(self.end_state())
+
     def end_state(self):
         return self.state(self.end, self.pieces[-1][2])
 

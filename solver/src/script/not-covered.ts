@@ -3,9 +3,6 @@ import type { Scenario } from "../scenario/scenario.ts";
 import { isLawWritten } from "./law-part.ts";
 import { isWritten } from "./term-parts.ts";
 
-/** A longer record would make a file that nobody reads and that runs for hours. */
-const mostPoints = 20_000;
-
 /**
  * Why there is no Python file for a scenario, as a sentence for people; null where there is one. `ended` is how the run came
  * to its end: one that was cut off has no motion to compare.
@@ -17,9 +14,6 @@ export function pythonGap(scenario: Scenario, ended: Result["ended"]): string | 
   if (!isLawWritten(contact.law.model)) return "Its friction law is not written out as a Python file.";
   const terms = [...force, ...base];
   if (!terms.every(({ kind }) => isWritten(kind))) return "One of the inputs is not written out as a Python file.";
-  if (terms.some((term) => "digest" in term))
-    return "A stored record is not written out as a Python file; one whose points stand in the scenario is.";
-  if (terms.some((term) => "times" in term && term.times.length > mostPoints))
-    return `A record of more than ${mostPoints} points is not written out as a Python file.`;
+  if (terms.some((term) => "digest" in term)) return "The points of one of its records are not at hand.";
   return null;
 }

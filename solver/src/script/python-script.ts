@@ -65,7 +65,11 @@ const header = ({ name, digest, solverVersion }: Claim, motion: Scenario["motion
 # Solver that made the numbers: ${pythonText(solverVersion)}
 # Units: SI; ${motion === "linear" ? "m, kg, s, N" : "rad, kg m2, s, N m"}; frequencies in Hz, phases in degrees.
 
+import base64
+import hashlib
 import sys
+from bisect import bisect_left
+from itertools import groupby
 
 import numpy as np
 from numpy.polynomial.chebyshev import chebvander

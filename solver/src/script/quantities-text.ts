@@ -9,35 +9,33 @@ WEIGHTS = np.linalg.solve(chebvander(NODES, 8).T, np.where(EVEN, 2.0 / np.where(
 
 
 class Window:
-    """The run from one time to another as tables of values, a table for each stretch."""
+    """The run from one time to another, as tables of its values."""
 
     def __init__(self, stretches, start, end):
-        self.start, self.end, self.tables = start, end, []
-        for stretch in stretches:
-            low, high = max(start, stretch.start), min(end, stretch.end)
-            if low < high or low == high == stretch.start == stretch.end and stretch.side == 0:
-                self.tables.append((stretch, *tabulated(stretch, low, high)))
+        self.start, self.end = start, end
+        self.stretches = [s for s in stretches if max(start, s.start) < min(end, s.end) or start <= s.start == s.end <= end and s.side == 0]
+        self.tables = [Table(side, list(some), start, end) for side, some in groupby(self.stretches, lambda s: s.side)]
 
     def integral(self, of):
-        return sum(float(np.dot(weights, of(values))) for _, values, weights, _ in self.tables)
+        return sum(float(np.dot(table.weights, of(table.values))) for table in self.tables)
 
     def mean(self, of):
         return self.integral(of) / (self.end - self.start)
 
-    def largest(self, of):
+    def largest(self, of, sides=(-1, 0, 1)):
         """The largest value: of the nodes, and of the crests between them that may stand higher, each polished."""
         largest, tops = -np.inf, []
-        for stretch, values, _, pieces in self.tables:
-            times, column = values["t"], of(values) + 0.0 * values["t"]
+        for table in [table for table in self.tables if table.side in sides]:
+            times, column = table.values["t"], of(table.values) + 0.0 * table.values["t"]
             guess = crests(times, column)
             largest = max(largest, float(np.max(column)))
             if np.min(column) == np.max(column):
                 continue
-            tops += [(guess[i], stretch, pieces, times[max(0, i - 1)], times[min(len(times) - 1, i + 1)]) for i in np.flatnonzero(guess >= largest)]
-        for guess, stretch, pieces, low, high in sorted(tops, key=lambda top: -top[0])[:MOST_TOPS]:
+            tops += [(guess[i], times[max(0, i - 1)], times[min(len(times) - 1, i + 1)], table) for i in np.flatnonzero(guess >= largest)]
+        for guess, low, high, table in sorted(tops, key=lambda top: -top[0])[:MOST_TOPS]:
             if guess < largest or not high > low:
                 continue
-            look = lambda t: -float(of(stretch.state(t, piece_of(pieces, t))))
+            look = lambda t: -float(of(table.at(t)))
             tolerance = 1e-9 * (high - low)
             largest = max(largest, -minimize_scalar(look, bounds=(low, high), method="bounded", options={"xatol": tolerance}).fun)
         return largest
@@ -49,16 +47,29 @@ class Window:
         return (self.largest(of) + self.largest(lambda s: -of(s))) / 2
 
     def stuck(self):
-        share = sum(min(self.end, s.end) - max(self.start, s.start) for s, *_ in self.tables if s.side == 0)
-        return share / (self.end - self.start)
+        times = [min(self.end, s.end) - max(self.start, s.start) for s in self.stretches if s.side == 0]
+        return sum(times) / (self.end - self.start)
 
 
-def piece_of(pieces, t):
-    return next((piece for _, end, piece in pieces if t <= end), pieces[-1][2]) if pieces else None
+class Table:
+    """Stretches of one side that follow each other: values by name at the nodes of their pieces, and the weights of these."""
+
+    def __init__(self, side, stretches, start, end):
+        self.side = side
+        rows, weights, pieces = zip(*(tabulated(s, max(start, s.start), min(end, s.end)) for s in stretches))
+        self.values = dict(zip(stretches[0].names(), np.concatenate(rows, axis=1)))
+        self.weights = np.concatenate(weights)
+        self.pieces = [piece for some in pieces for piece in some]
+        self.ends = [end for end, _, _ in self.pieces]
+
+    def at(self, t):
+        """Values by name at a time between nodes."""
+        _, stretch, piece = self.pieces[min(bisect_left(self.ends, t), len(self.ends) - 1)]
+        return stretch.state(t, piece)
 
 
 def tabulated(stretch, low, high):
-    """Values by name at the nodes of every piece between low and high, and their weights."""
+    """Rows of values at the nodes of every piece between low and high, their weights, and the pieces by their ends."""
     pieces = [(max(low, a), min(high, b), p) for a, b, p in stretch.pieces if a < high and b > low or a == b]
     if not pieces:
         cuts = np.sort([*np.linspace(low, high, 5 + int((high - low) * FASTEST_HZ * 20)), *stretch.kinks(low, high)])
@@ -67,14 +78,12 @@ def tabulated(stretch, low, high):
     for a, b, piece in pieces:
         times = (a + b) / 2 + (b - a) / 2 * NODES
         times[0], times[-1] = a, b
-        values = stretch.state(times, piece)
         first = 1 if parts else 0  # two pieces share the node between them
-        parts.append({name: (value + 0.0 * times)[first:] for name, value in values.items()})
+        parts.append(np.array([value + 0.0 * times for value in stretch.state(times, piece).values()])[:, first:])
         share = (b - a) / 2 * WEIGHTS
         weights[-1] += share[0]
         weights = np.concatenate([weights, share[1:]])
-    values = {name: np.concatenate([part[name] for part in parts]) for name in parts[0]}
-    return values, weights, [piece for piece in pieces if piece[2]]
+    return np.concatenate(parts, axis=1), weights, [(b, stretch, piece) for _, b, piece in pieces]
 
 
 def crests(t, values):
@@ -118,10 +127,11 @@ def equilibrium(load):
 
 
 def quantities(events, stretches):
-    """Every quantity by name; None where it has no meaning."""
+    """Every quantity by name, None where it has no meaning; and the whole run as a window."""
     end = stretches[-1].end
     start = steady_start(end)
-    whole, steady = Window(stretches, 0.0, end), Window(stretches, start, end)
+    whole = Window(stretches, 0.0, end)
+    steady = Window(stretches, start, end) if start > 0 else whole
     times = lambda kind: [t for k, t, *_ in events if k == kind]
     breaks, stops, turns = times("break-away"), times("stop"), times("turn")
     blur = 1e-12 * end
@@ -180,8 +190,7 @@ def quantities(events, stretches):
 
     grip = lambda s: friction(0.0) * RADIUS * s["pressed"]
     share = lambda s: np.where(grip(s) > 0, np.abs(s["f"]) / np.where(grip(s) > 0, grip(s), 1.0), -1.0)
-    stuck = Window([s for s in stretches if s.side == 0], 0.0, end)
-    used = stuck.largest(share) if stuck.tables else -1.0
+    used = whole.largest(share, sides=(0,))
     if friction(0.0) > 0 and any(pressing(t) > 0 for t in breaks):
         used = 1.0
     q["holdUse"] = None if used < 0 or LAW == "bristle" else min(1.0, used)
@@ -194,21 +203,20 @@ def quantities(events, stretches):
     q["frictionPowerMean"] = steady.mean(heat) if end > start else float(heat(stretches[-1].end_state()))
     carried = "x" if DRIVEN_BY_BASE else "crossing"
     q["transmissibility"] = steady.half_swing(read(carried)) / DRIVE_AMPLITUDE if DRIVE_AMPLITUDE else None
-    return {name: None if value is None else float(value) for name, value in q.items()}
+    return {name: None if value is None else float(value) for name, value in q.items()}, whole
 
 
 def settle_time(stretches, since, travelled, end):
     """From the end of the last travel to the last time |d| stood outside the band; both ends of the crossing are polished."""
-    for stretch, values, _, pieces in reversed(Window(stretches, since, end).tables):
-        over = np.abs(values["d"]) - SETTLE_BAND
+    for table in reversed(Window(stretches, since, end).tables):
+        over = np.abs(table.values["d"]) - SETTLE_BAND
         outside = np.flatnonzero(over > 0)
         if len(outside) == 0:
             continue
-        i = outside[-1]
+        i, times = outside[-1], table.values["t"]
         if i == len(over) - 1:
-            return values["t"][i] - travelled
-        look = lambda t: abs(float(stretch.state(t, piece_of(pieces, t))["d"])) - SETTLE_BAND
-        return brentq(look, values["t"][i], values["t"][i + 1], xtol=1e-15) - travelled
+            return times[i] - travelled
+        return brentq(lambda t: abs(float(table.at(t)["d"])) - SETTLE_BAND, times[i], times[i + 1], xtol=1e-15) - travelled
     return 0.0
 
 

@@ -8,6 +8,7 @@ NOISE = 1e-11  # v_r below this share of its peak is 0
 NEAR = 1e-11  # of the time: a zero that close to a corner falls on it
 LOOKS, LOOKS_A_PERIOD = 12, 64  # at a step of a slip, at a period of the inputs while stuck
 MOST_TOPS = 64  # crests that are polished to find a peak
+MANY = 20_000  # corners of the inputs
 LONGEST_STEP = 1 / (20 * FASTEST_HZ) if FASTEST_HZ else np.inf
 
 

@@ -1,4 +1,6 @@
+import { inlinePoints, recordBytes, recordDigest } from "../scenario/canonical.ts";
 import type { Term, TermKind } from "../scenario/scenario.ts";
+import { base64Lines } from "./base64.ts";
 import { pythonList, pythonNumber as n } from "./literals.ts";
 
 /**
@@ -63,7 +65,7 @@ const writers: Writers = {
   "acceleration-record": (term, name) => points(name, term, "zero"),
 };
 
-/** A term in Python; a record carries its points inline (`not-covered.ts` has seen to that). */
+/** A term in Python; a record carries its points (`not-covered.ts` has seen to it that they are there). */
 export function termPart(term: Term, name: string): TermPart {
   const write = writers[term.kind] as (term: Term, name: string) => TermPart;
   return write(term, name);
@@ -123,10 +125,24 @@ function travel(name: string, [distance, speed, acceleration, start, count, dwel
 
 function points(name: string, term: TermOf<"record" | "acceleration-record">, outside: "held" | "zero"): TermPart {
   const { times, values } = "times" in term ? term : { times: [], values: [] };
+  const isHeld = outside === "held" ? "True" : "False";
+  const isLong = times.length > inlinePoints;
   return {
-    setUp: [`${name} = Record(${pythonList(times)}, ${pythonList(values)}, ${outside === "held" ? "True" : "False"})`],
+    setUp: isLong
+      ? packed(name, times, values, isHeld)
+      : [`${name} = Record(${pythonList(times)}, ${pythonList(values)}, ${isHeld})`],
     value: [`${name}.value(t, at)`, `${name}.rate(at)`, "0.0"],
     corners: [`${name}.times`],
     constantFrom: `${name}.end()`,
   };
+}
+
+/** A long record as the bytes that its digest is of. */
+function packed(name: string, times: readonly number[], values: readonly number[], isHeld: string): string[] {
+  return [
+    `# ${times.length} times and as many values, little-endian doubles as base64; the code goes on below them`,
+    `${name} = Record(*unpacked("${recordDigest(times, values)}", """`,
+    ...base64Lines(recordBytes(times, values)),
+    `"""), ${isHeld})`,
+  ];
 }

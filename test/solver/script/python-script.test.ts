@@ -1,5 +1,14 @@
+import { createHash } from "node:crypto";
 import { describe, expect, it } from "vitest";
-import { excitationTerms, frictionLaws, pythonGap, pythonScript, simulate, type Scenario } from "@restband/solver";
+import {
+  excitationTerms,
+  frictionLaws,
+  pythonGap,
+  pythonScript,
+  recordDigest,
+  simulate,
+  type Scenario,
+} from "@restband/solver";
 import { buildScenario, coulombForces } from "../../support/scenario-builder.ts";
 
 const decay = buildScenario({
@@ -19,10 +28,23 @@ describe("the Python file of a scenario", () => {
 
   it("keeps a title on its own line of comment, whatever stands in it", () => {
     const text = scriptOf({ ...decay, title: 'a"""\nimport os\r\n\\' });
-    expect(text.split(/\r\n|\r|\n/u).filter((line) => line.startsWith("import "))).toEqual([
-      "import sys",
-      "import numpy as np",
-    ]);
+    expect(text).toContain(String.raw`# "a\"\"\"\nimport os\r\n\\"`);
+    expect(text).not.toMatch(/^import os/mu);
+  });
+
+  it("carries a long record as the very bytes that its digest is of", () => {
+    const times = Array.from({ length: 1001 }, (_, i) => i / 3);
+    const values = times.map((t) => -t * t);
+    const text = scriptOf({
+      ...decay,
+      force: [{ kind: "record", times, values }],
+      span: { ...decay.span, seconds: 1 },
+    });
+    const [, digest, block] = /unpacked\(\s*"(\w+)",\s*"""\n(.*?)"""/su.exec(text) ?? [];
+    const bytes = Buffer.from(block, "base64");
+    expect(digest).toBe(recordDigest(times, values));
+    expect(createHash("sha256").update(bytes).digest("hex")).toBe(digest);
+    expect(bytes.readDoubleLE(8 * 1000)).toBe(times[1000]);
   });
 
   it("writes out every friction law", () => {
