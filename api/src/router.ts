@@ -4,7 +4,7 @@ import { csrf } from "./middleware/csrf.ts";
 import { type FindCaller, permit } from "./middleware/permit.ts";
 import type { Throttle } from "./middleware/throttle.ts";
 import { validate } from "./middleware/validate.ts";
-import type { Once } from "./once/once.ts";
+import { noteBody, type Once } from "./once/once.ts";
 import type { Call, Handler, Handlers } from "./route-handler.ts";
 
 /** Routes at which passwords or tokens may be tried. */
@@ -19,9 +19,9 @@ const throttled = new Set<RouteName>([
 
 const methods = { GET: "get", POST: "post", PUT: "put", PATCH: "patch", DELETE: "delete" } as const;
 
-const readJson = express.json({ limit: "1mb" });
+const readJson = express.json({ limit: "1mb", verify: noteBody });
 /** 200,000 points take 9 MB at most; a scenario may have more than one record. */
-const readRecords = express.json({ limit: "20mb" });
+const readRecords = express.json({ limit: "20mb", verify: noteBody });
 
 /**
  * Registers every route of the contract, all by the same steps: permitted? from our pages? too often? well formed?

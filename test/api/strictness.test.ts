@@ -106,6 +106,20 @@ describe.each(withBody)("the body of %s", (name) => {
     if (code) expect(failure.code).toBe(code);
   });
 
+  it("may not be so deep, or in so many pieces, that it would take long to check", async () => {
+    const deep = `{"content": ${"[".repeat(100_000)}${"]".repeat(100_000)}}`;
+    const pieces = `{"content": {"force": [${"0,".repeat(100_000)}0]}}`;
+    for (const [text, what] of [
+      [deep, "is nested more than 64 levels deep"],
+      [pieces, "has more than 100,000 members"],
+    ]) {
+      const headers = { "Idempotency-Key": `deep-${crypto.randomUUID()}` };
+      expect(await fail({ text, headers })).toMatchObject({
+        ...{ status: 413, code: "too-large", message: `The body ${what}.` },
+      });
+    }
+  });
+
   it("may not be too large, and the answer says how large it may be", async () => {
     const most = (routes[name] as Route).carriesRecords ? 20 : 1;
     const text = JSON.stringify({ name: "x".repeat(most * 2 ** 20) });

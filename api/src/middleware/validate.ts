@@ -2,6 +2,7 @@ import { z } from "@restband/solver";
 import type { RequestHandler } from "express";
 import type { Route } from "../contract.ts";
 import { badRequest, Refusal } from "../errors.ts";
+import { demandModest } from "./modest.ts";
 import { faultsOf } from "./zod-faults.ts";
 
 const nothing = z.strictObject({});
@@ -12,6 +13,7 @@ export function validate(route: Route): RequestHandler {
     if (route.body && !request.is("json")) {
       throw new Refusal(415, "not-json", "The body has to be JSON, with the content type application/json.");
     }
+    if (route.body) demandModest(request.body);
     Object.assign(response.locals, {
       params: parsed(route.params ?? nothing, request.params),
       query: parsed(route.query ?? nothing, request.query),

@@ -1,3 +1,4 @@
+import type { IncomingMessage } from "node:http";
 import type { Request } from "express";
 import type { Database } from "../database/database.ts";
 import { isRolledBack } from "../database/database-errors.ts";
@@ -57,8 +58,18 @@ function keyOf(request: Request): string | null {
   throw badRequest([{ path: "Idempotency-Key", message: "16 to 100 letters, digits, hyphens or underscores." }]);
 }
 
-const digestOf = ({ method, originalUrl, headers, body }: Request): Buffer =>
-  sha256Of(JSON.stringify([method, originalUrl, headers["if-match"] ?? null, body as unknown]));
+const bodies = new WeakMap<IncomingMessage, Buffer>();
+
+/** Notes what a body is, byte for byte, for the request that has a key; run by whoever reads the body. */
+export function noteBody(request: IncomingMessage, _response: unknown, bytes: Buffer): void {
+  if (request.headers["idempotency-key"] !== undefined) bodies.set(request, sha256Of(bytes));
+}
+
+function digestOf(request: Request): Buffer {
+  const { method, originalUrl, headers } = request;
+  const body = bodies.get(request)?.toString("hex") ?? "";
+  return sha256Of([method, originalUrl, headers["if-match"] ?? "", body].join("\n"));
+}
 
 function otherRequest(): Refusal {
   const message = "This Idempotency-Key belongs to another request. A new request has a new key.";
