@@ -78,6 +78,22 @@ describe.each(looks)("axe finds nothing, %s,", (_, options) => {
     expect(await axeFindings(page)).toEqual([]);
   });
 
+  it("on what is asked of a scenario next", async () => {
+    const page = await journey.visit(options);
+    await signIn(page, demoPeople.ines.email);
+    await page.getByRole("link", { name: "Hall 3 refit" }).click();
+    await openScenario(page, "Z carriage, creep feed");
+    await page.waitForURL(/scenarios\/[0-9a-f-]{36}$/);
+    await page.goto(`${page.url()}/explore`);
+    const tolerance = page.getByRole("region", { name: "Tolerance" });
+    await tolerance.getByRole("button", { name: "Let two of them go together" }).click();
+    await tolerance.getByRole("button", { name: "Let values scatter by a covariance" }).click();
+    await tolerance.getByLabel(/^Correlation of/).fill("2");
+    await tolerance.getByText("Between −1 and 1.").waitFor();
+    await page.getByRole("region", { name: "Room around each value" }).waitFor();
+    expect(await axeFindings(page)).toEqual([]);
+  });
+
   it("on a scenario, with an editor open, and with every field open", async () => {
     const page = await journey.visit(options);
     await signIn(page, demoPeople.ines.email);

@@ -1,5 +1,6 @@
 import type { Page } from "playwright-core";
 import { afterAll, afterEach, beforeAll, expect, it } from "vitest";
+import { axeFindings } from "../support/axe.ts";
 import { Journey } from "../support/journey.ts";
 import { addMember, createProject, createScenario, emailOf, signUp } from "../support/people.ts";
 import { signIn } from "../support/steps.ts";
@@ -81,6 +82,8 @@ it("a sweep of two fields fills, is kept over a reload, and a reader sees the sa
   expect([350, 0.35]).toContain(Number(needed));
 
   await page.getByText("Of 30 cells").first().waitFor();
+  await page.getByText("limit of smooth sliding", { exact: true }).waitFor();
+  expect(await axeFindings(page)).toEqual([]);
   await page.reload();
   await rule.waitFor({ timeout: 60_000 });
   const reader = await journey.visit();
@@ -93,6 +96,32 @@ it("a sweep of two fields fills, is kept over a reload, and a reader sees the sa
   const before = await map.textContent();
   await map.press("ArrowRight");
   await expect.poll(() => map.textContent()).not.toBe(before);
+});
+
+it("a study lets values scatter by a covariance that is pasted, and says how likely the limit is kept", async () => {
+  const page = await explore("Ada");
+  const tolerance = page.getByRole("region", { name: "Tolerance" });
+  await tolerance.getByRole("button", { name: "Let values scatter by a covariance" }).click();
+  await tolerance.getByText("Paste a fit").click();
+  // a mass of 1000 ± 10 kg and a stiffness of 100 ± 2 N/μm, correlated by −0.5
+  await tolerance.getByRole("combobox", { name: "Scatter together" }).selectOption("mass");
+  await tolerance.getByRole("combobox", { name: "with", exact: true }).selectOption("stiffness");
+  await tolerance.getByLabel("Estimates, then their covariance row by row").fill("1000 100\n100 -10\n-10 4");
+  await tolerance.getByRole("button", { name: "Take it over" }).click();
+  await tolerance.getByLabel("Source").fill("Pull test 2");
+  const kinetic = tolerance.getByRole("group", { name: "kinetic friction scatters" });
+  await kinetic.getByLabel("to", { exact: true }).fill("0.4");
+  await tolerance.getByLabel("Draws").fill("200");
+  await tolerance.getByRole("button", { name: "Run the study" }).click();
+  await page.getByRole("heading", { level: 1, name: /keeps its limit in/ }).waitFor();
+  const asked = "mass and stiffness together, normal about 1000 kg and 100 N/μm with deviations of 10 kg and 2 N/μm";
+  await page.getByText(`${asked}, correlated by −0.5 (Pull test 2)`.replace(/ (?=kg|N)/g, "\u00a0")).waitFor();
+  await page.getByText(/draws have no answer: their static friction cannot stand with the rest\./).waitFor();
+  await page.getByText("An example").click();
+  await page
+    .getByText(/^Draw \d+: Static friction cannot be smaller than kinetic friction; they are 0\.\d{1,4} and/)
+    .waitFor();
+  expect(await axeFindings(page)).toEqual([]);
 });
 
 it("what cannot be swept is said at its field, and nothing typed is lost", async () => {
