@@ -1,13 +1,12 @@
 import { resultOf, type Project, type Revision } from "@restband/api/contract";
 import { useQuery, useSuspenseQueries } from "@tanstack/react-query";
-import { Suspense, useLayoutEffect, useMemo, useState } from "react";
+import { useLayoutEffect, useMemo, useState } from "react";
 import { useParams } from "react-router-dom";
 import { projectQuery } from "../api/projects.ts";
 import { integrityQuery, replaysQuery, revisionQuery } from "../api/revisions.ts";
 import { useAccount } from "../api/session.ts";
 import { Button, ButtonLink } from "../components/button.tsx";
 import { ErrorNote } from "../components/error-note.tsx";
-import { lazyPart } from "../components/lazy-part.ts";
 import { ProgressLine } from "../components/progress-line.tsx";
 import { Section, WorkedPage } from "../components/section.tsx";
 import { samplesFor } from "../compute/samples-for.ts";
@@ -27,11 +26,8 @@ import { lendUnitSystem, ownUnitSystem, useUnitSystem, type UnitSystem } from ".
 import { compareReference, paths } from "../paths.ts";
 import { sharedValue } from "../shared-value.ts";
 import { useCursor, type Cursor } from "./cursor.ts";
+import { eventKeys, RunEvidence } from "./run-evidence.tsx";
 import { RevisionComments, RevisionReview } from "./revision-review.tsx";
-
-const Evidence = lazyPart(async () => (await import("../features/evidence/evidence.tsx")).Evidence);
-const Checks = lazyPart(async () => (await import("../features/checks/checks.tsx")).Checks);
-const EventTable = lazyPart(async () => (await import("../features/evidence/event-table.tsx")).EventTable);
 
 /** One revision as a worked page: what was claimed, asked and frozen; replays, evidence, checks, cautions. */
 export function RevisionPage() {
@@ -171,29 +167,15 @@ function RunSections({ run, view, cursor }: { run: Run; view: RunView | null; cu
       </Section>
     );
   return (
-    <>
-      <Section
-        id="evidence"
-        name="Evidence"
-        help={
-          <>
-            Computed here from the frozen scenario. <span className="whitespace-nowrap">← →</span> next event.
-          </>
-        }
-      >
-        <Suspense fallback={<div className="min-h-[600px]" />}>
-          <Evidence view={view} t={t} onMove={cursor.set} isStale={false} />
-        </Suspense>
-      </Section>
-      <Section id="checks" name="Checks" help="Of the run computed here.">
-        <Suspense fallback={<div className="min-h-[420px]" />}>
-          <Checks scenario={view.scenario} result={view.result} />
-        </Suspense>
-        <h3 className="mt-8 mb-2 text-15 font-semibold">Events</h3>
-        <Suspense fallback={<div className="min-h-[380px]" />}>
-          <EventTable view={view} t={t} onMove={cursor.set} />
-        </Suspense>
-      </Section>
-    </>
+    <RunEvidence
+      view={view}
+      t={t}
+      onMove={cursor.set}
+      isStale={false}
+      help={{
+        evidence: <>Computed here from the frozen scenario. {eventKeys} next event.</>,
+        checks: "Of the run computed here.",
+      }}
+    />
   );
 }
