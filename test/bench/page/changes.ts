@@ -1,22 +1,15 @@
 import type { Page } from "playwright-core";
+import { timeTexts } from "./typed-texts.ts";
 
 /** What became of the changes of a value: from the moment each was typed to the frame that shows its answer, ms. */
 export async function timeChanges(page: Page, texts: readonly string[]): Promise<number[]> {
   await watchAnswer(page);
-  const field = page
-    .getByRole("group", { name: /^Change / })
-    .getByRole("textbox")
-    .first();
-  const times: number[] = [];
-  for (const text of texts) {
-    const painted = page.evaluate(() => (window as unknown as BenchWindow).benchPainted());
-    await field.fill(text);
-    times.push(await painted);
-    // As a person does, who reads the answer before typing again: what is drawn later is drawn meanwhile.
-    await page.waitForTimeout(400);
-  }
-  return times;
+  const painted = (): Promise<number> => page.evaluate(() => (window as unknown as BenchWindow).benchPainted());
+  // As a person does, who reads the answer before typing again: what is drawn later is drawn meanwhile.
+  return timeTexts(page, texts, painted, READING_MS);
 }
+
+const READING_MS = 400;
 
 interface BenchWindow extends Window {
   /** The next change's time from its input to the frame that shows its answer, ms. */

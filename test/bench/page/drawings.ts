@@ -1,19 +1,10 @@
 import type { Page } from "playwright-core";
+import { timeTexts } from "./typed-texts.ts";
 
 /** From each change of the value whose editor is open to the frame that shows its plots, ms. */
 export async function timeDrawings(page: Page, texts: readonly string[]): Promise<number[]> {
   await watchPlots(page);
-  const field = page
-    .getByRole("group", { name: /^Change / })
-    .getByRole("textbox")
-    .first();
-  const times: number[] = [];
-  for (const text of texts) {
-    const drawn = page.evaluate(() => (window as unknown as BenchWindow).benchDrawn());
-    await field.fill(text);
-    times.push(await drawn);
-  }
-  return times;
+  return timeTexts(page, texts, () => page.evaluate(() => (window as unknown as BenchWindow).benchDrawn()));
 }
 
 interface BenchWindow extends Window {

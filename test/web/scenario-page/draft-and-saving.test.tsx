@@ -1,26 +1,11 @@
+import "../support/page-alone.ts";
 import { act, cleanup, screen, waitFor, within } from "@testing-library/react";
-import { afterEach, beforeAll, beforeEach, describe, expect, it, vi } from "vitest";
-import { editing } from "../../../web/src/features/statement/draft/editing-part.ts";
+import { describe, expect, it, vi } from "vitest";
 import { noteConnection } from "../../../web/src/api/connection.ts";
 import { fakeServer, ok, refuse, type Request } from "../support/fake-server.ts";
 import { openPage } from "../support/open-page.tsx";
 import { creepFeed, variant } from "../support/scenarios.ts";
 import { answer, at, changeDamping, saved, saves, seen, stored } from "../support/scenario-page.tsx";
-
-// A whole page with the solver in one thread: seconds on a busy machine.
-vi.setConfig({ testTimeout: 30_000 });
-
-vi.mock("../../../web/src/compute/start-worker.ts", async () =>
-  (await import("../support/scenario-page.tsx")).workerInOneThread(),
-);
-vi.mock("../../../web/src/components/plot.tsx", async () =>
-  (await import("../support/scenario-page.tsx")).plotWithoutDrawing(),
-);
-
-// A person comes after it is loaded.
-beforeAll(() => editing.ask());
-beforeEach(() => localStorage.clear());
-afterEach(() => vi.unstubAllGlobals());
 
 describe("what is changed on the page of a scenario", () => {
   it("takes a change back by Ctrl-Z, also while the field has the focus", async () => {

@@ -2,9 +2,8 @@ import type { Scenario, TolerancePlan } from "@restband/solver";
 import { useMemo, useState } from "react";
 import { Button } from "../../../components/button.tsx";
 import { Checkbox } from "../../../components/choices.tsx";
-import { ErrorNote } from "../../../components/error-note.tsx";
-import { FieldError } from "../../../components/field.tsx";
 import { SelectField } from "../../../components/select.tsx";
+import { AskingForm } from "../asking-form.tsx";
 import { exploreFields, type ExploreField } from "../explore-field.ts";
 import { FigureField } from "../figure-field.tsx";
 import { QuantityChoice } from "../quantity-choice.tsx";
@@ -32,33 +31,15 @@ interface StudyBuilderProps {
 /** Asks for a tolerance study; every fault stands at its field, and nothing typed is lost. */
 export function StudyBuilder({ scenario, onRun }: StudyBuilderProps) {
   const [draft, setDraft] = useState<StudyDraft>(() => studyDraftOf(scenario));
-  const [run, setRun] = useState<{ isTried: boolean; isBusy: boolean; failure: string | null }>({
-    isTried: false,
-    isBusy: false,
-    failure: null,
-  });
   const { plan, faults } = studyPlanOf(draft, scenario);
   const set = (change: Partial<StudyDraft>): void => setDraft((old) => ({ ...old, ...change }));
   const faultAt = (path: string): string | undefined => faults.find((fault) => fault.path === path)?.message;
-  const general = faults.filter(({ path }) => !placed.test(path));
-
-  const begin = async (): Promise<void> => {
-    if (!plan || run.isBusy) return setRun((old) => ({ ...old, isTried: true }));
-    setRun({ isTried: true, isBusy: true, failure: null });
-    try {
-      await onRun(plan, studyTitle(plan, scenario));
-      setRun({ isTried: true, isBusy: false, failure: null });
-    } catch (error) {
-      setRun({ isTried: true, isBusy: false, failure: error instanceof Error ? error.message : String(error) });
-    }
-  };
   return (
-    <form
-      className="flex flex-col gap-6"
-      onSubmit={(event) => {
-        event.preventDefault();
-        void begin();
-      }}
+    <AskingForm
+      act="Run the study"
+      faults={faults}
+      isPlaced={(path) => placed.test(path)}
+      onRun={plan && (() => onRun(plan, studyTitle(plan, scenario)))}
     >
       <WhatScatters draft={draft} scenario={scenario} faultAt={faultAt} setDraft={setDraft} />
       <div className="flex flex-wrap items-start gap-x-4 gap-y-4">
@@ -98,19 +79,7 @@ export function StudyBuilder({ scenario, onRun }: StudyBuilderProps) {
         chosen={draft.quantities}
         onChange={(quantities) => set({ quantities })}
       />
-      {run.isTried && general.map(({ message }) => <FieldError key={message}>{message}</FieldError>)}
-      {run.failure && <ErrorNote>{run.failure}</ErrorNote>}
-      <div className="flex flex-wrap items-center gap-4">
-        <Button type="submit" kind="primary" isBusy={run.isBusy}>
-          Run the study
-        </Button>
-        {!plan && (
-          <span className="text-13 text-quiet">
-            {faults.length} field{faults.length === 1 ? "" : "s"} to put right
-          </span>
-        )}
-      </div>
-    </form>
+    </AskingForm>
   );
 }
 

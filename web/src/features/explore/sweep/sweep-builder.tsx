@@ -3,10 +3,9 @@ import { useMemo, useState } from "react";
 import { Button } from "../../../components/button.tsx";
 import { QuantityChoice } from "../quantity-choice.tsx";
 import { Checkbox } from "../../../components/choices.tsx";
-import { ErrorNote } from "../../../components/error-note.tsx";
-import { FieldError } from "../../../components/field.tsx";
 import { SelectField } from "../../../components/select.tsx";
 import { formatNumber } from "../../../format/format-number.ts";
+import { AskingForm } from "../asking-form.tsx";
 import { exploreFields } from "../explore-field.ts";
 import { tileSizes } from "../../../compute/run-tiles.ts";
 import { AxisForm } from "./axis-form.tsx";
@@ -40,27 +39,11 @@ const continuations: { value: Continuation; label: string }[] = [
 /** Asks for a sweep of one or two fields; every fault stands at its field, and nothing typed is lost. */
 export function SweepBuilder({ scenario, onRun }: SweepBuilderProps) {
   const [draft, setDraft] = useState<SweepDraft>(() => sweepDraftOf(scenario));
-  const [isTried, setTried] = useState(false);
-  const [run, setRun] = useState<{ isBusy: boolean; failure: string | null }>({ isBusy: false, failure: null });
   const fields = useMemo(() => exploreFields(scenario), [scenario]);
   const { plan, faults } = planOf(draft, scenario);
   const seconds = secondsOf(draft, scenario);
   const set = (change: Partial<SweepDraft>): void => setDraft((old) => ({ ...old, ...change }));
   const faultAt = (path: string): string | undefined => faults.find((fault) => fault.path.startsWith(path))?.message;
-  const placed = ["axes[0].", "axes[1]."];
-  const general = faults.filter(({ path }) => !placed.some((place) => path.startsWith(place)));
-
-  const begin = async (): Promise<void> => {
-    setTried(true);
-    if (!plan || seconds === null || run.isBusy) return;
-    setRun({ isBusy: true, failure: null });
-    try {
-      await onRun({ plan, seconds }, sweepTitle(plan, scenario));
-      setRun({ isBusy: false, failure: null });
-    } catch (error) {
-      setRun({ isBusy: false, failure: error instanceof Error ? error.message : String(error) });
-    }
-  };
   const axisProps = (i: number, axis: AxisDraft, put: (axis: AxisDraft) => void) => ({
     axis,
     fields,
@@ -72,12 +55,12 @@ export function SweepBuilder({ scenario, onRun }: SweepBuilderProps) {
     },
   });
   return (
-    <form
-      className="flex flex-col gap-6"
-      onSubmit={(event) => {
-        event.preventDefault();
-        void begin();
-      }}
+    <AskingForm
+      act="Run the sweep"
+      faults={faults}
+      isPlaced={(path) => /^axes\[[01]\]\.|^continuation$/.test(path)}
+      {...(plan && { remark: `${cellsOf(plan)} cells` })}
+      onRun={plan && seconds !== null ? () => onRun({ plan, seconds }, sweepTitle(plan, scenario)) : null}
     >
       <AxisForm name="Across" {...axisProps(0, draft.first, (first) => set({ first }))} />
       {draft.second ? (
@@ -105,15 +88,7 @@ export function SweepBuilder({ scenario, onRun }: SweepBuilderProps) {
         chosen={draft.quantities}
         onChange={(quantities) => set({ quantities })}
       />
-      {isTried && general.map(({ message }) => <FieldError key={message}>{message}</FieldError>)}
-      {run.failure && <ErrorNote>{run.failure}</ErrorNote>}
-      <div className="flex flex-wrap items-center gap-4">
-        <Button type="submit" kind="primary" isBusy={run.isBusy}>
-          Run the sweep
-        </Button>
-        <span className="text-13 text-quiet">{plan ? `${cellsOf(plan)} cells` : toPutRight(faults.length)}</span>
-      </div>
-    </form>
+    </AskingForm>
   );
 }
 
@@ -167,4 +142,3 @@ const cellsOf = (plan: SweepPlan): string =>
     tileSizes(plan).reduce((sum, each) => sum + each, 0),
     9,
   );
-const toPutRight = (count: number): string => `${count} field${count === 1 ? "" : "s"} to put right`;
