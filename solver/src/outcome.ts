@@ -1,7 +1,7 @@
 import { isConstantFrom } from "./quantities/drive.ts";
 import type { Reading } from "./quantities/reading.ts";
 import type { Ended, Outcome } from "./result.ts";
-import { isRisingOver, partsOf, trendOf, type Trend } from "./trend.ts";
+import { isRisingOver, trendOf, type Trend } from "./trend.ts";
 
 /** True where a run was stopped before it came to its own end. */
 export function isCutOff(ended: Ended): boolean {
@@ -27,11 +27,10 @@ function outcomeOfStick({ motion, breakAways, steadyBreakAways }: Reading): Outc
 }
 
 function outcomeOfMotion(reading: Reading): Outcome {
-  const parts = partsOf(reading);
   const isStopping = reading.steadyStops.length > 0;
   // What does not swing further from part to part does not grow: of a body that stops no more need be known, which is most of the work.
-  if (isStopping && !isRisingOver(parts)) return "stick-slip";
-  const trend = trendOf(reading, parts);
+  if (isStopping && !isRisingOver(reading.parts)) return "stick-slip";
+  const trend = trendOf(reading);
   if (grows(trend)) return "growing";
   if (isStopping) return "stick-slip";
   if (settles(reading)) return "settles";

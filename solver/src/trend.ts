@@ -20,22 +20,15 @@ export interface Trend {
 /** Amplitudes that differ by less, relative, count as equal; a last one below this share of the run's peak counts as 0. */
 const resolution = 1e-9;
 
-/** The parts of the steady window, one after another; nothing of them is looked at before it is asked for. */
-export function partsOf(reading: Reading): Extent[] {
-  const { from, to, parts } = reading.window;
-  return Array.from({ length: parts }, (_, i) =>
-    reading.over(from + ((to - from) * i) / parts, from + ((to - from) * (i + 1)) / parts, "excursion"),
-  );
-}
-
 /** Whether each part swings further than the one before. Looks no further than the first that does not. */
 export const isRisingOver = (parts: readonly Extent[]): boolean =>
   parts.every((part, i) => i === 0 || isAbove(part.halfSwing("excursion"), parts[i - 1].halfSwing("excursion")));
 
 const isAbove = (value: number, before: number): boolean => value > before * (1 + resolution);
 
-/** Source of the extrapolation: A. C. Aitken 1926, Proc. R. Soc. Edinburgh 46:289 (not held). @param extents as `partsOf` has them */
-export function trendOf(reading: Reading, extents: readonly Extent[]): Trend {
+/** Source of the extrapolation: A. C. Aitken 1926, Proc. R. Soc. Edinburgh 46:289 (not held). */
+export function trendOf(reading: Reading): Trend {
+  const extents = reading.parts;
   const parts = extents.length;
   const amplitudes = extents.map((extent) => extent.halfSwing("excursion"));
   const means = extents.map((extent) => extent.mean("excursion"));

@@ -29,8 +29,9 @@ const harmonicsPerTerm = 4;
  */
 export class Inputs {
   origin = 0;
-  /** The first corner after the origin, Infinity where none is left. */
+  /** The first corner after the origin, Infinity where none is left; and the first of the terms, the ripple of N aside. */
   end = Infinity;
+  corner = Infinity;
   /** Σ force[j] τ^j = F without harmonics, plus the weight W. */
   readonly force = new Float64Array(4);
   /** Σ base[j] τ^j = y without harmonics. */
@@ -79,8 +80,6 @@ export class Inputs {
   /** True where no term ever changes but by swinging: one layout then serves all instants, the harmonics turned. */
   private readonly isTimeless: boolean;
   private isLaidOut = false;
-  /** The next corner of the terms. */
-  private corner = Infinity;
   /** Where each harmonic comes from. */
   private readonly sources: Harmonic[] = [];
   /** Parts of the force that are neither polynomial nor harmonic, and those acting at the origin. */
@@ -122,9 +121,8 @@ export class Inputs {
   private layOut(t: number): void {
     const { problem } = this;
     this.isLaidOut = true;
-    this.force.fill(0);
-    this.base.fill(0);
-    this.acceleration.fill(0);
+    // one by one: `fill` costs more than all the rest of a short layout
+    for (let j = 0; j < 4; j++) this.force[j] = this.base[j] = this.acceleration[j] = 0;
     this.force[0] = problem.weight;
     this.count = 0;
     this.corner = Infinity;
@@ -159,7 +157,7 @@ export class Inputs {
   private addBase(term: CompiledTerm, t: number): void {
     const { base, before } = this;
     if (term.isAcceleration) return term.addPolynomial(t, this.acceleration);
-    before.set(base);
+    for (let j = 1; j < 4; j++) before[j] = base[j];
     term.addPolynomial(t, base);
     for (let j = 1; j < 4; j++) if (Math.abs(base[j]) <= 2 ** -50 * Math.abs(before[j])) base[j] = 0;
   }

@@ -20,10 +20,10 @@ export function nextBreakAway(problem: Problem, stance: Stance, allowed: number,
   const s = { ...stance };
   const { inputs } = stepper.form;
   inputs.locate(s.t);
-  while (inputs.end < Infinity) {
+  // a ripple that lets the contact go has corners for ever: it is looked over like any other harmonic
+  while (inputs.corner < Infinity) {
     if (++work.spent > allowed) return NaN;
-    const end = inputs.end;
-    if (stepper.step(s, end) === "break-away") return s.t;
+    if (stepper.step(s, inputs.corner) === "break-away") return s.t;
     if (stepper.outOfWork) return NaN;
   }
   const period = lookOver(ratesOf(problem, inputs));

@@ -72,7 +72,7 @@ export class SegmentedMotion implements Motion {
     const { form, problem, stance } = this;
     const tau = t - stance.t;
     const isSlip = form.kind === "slip";
-    if (isSlip) form.slip.evaluate(tau);
+    if (isSlip) form.slip.read(tau);
     else form.carried.evaluate(tau);
     const v = form.inputs.evaluate(tau);
     state.t = t;
@@ -102,6 +102,7 @@ export class SegmentedMotion implements Motion {
   period(i: number, t: number): number {
     this.load(i);
     const { inputs, slip, kind } = this.form;
+    if ((this.to(i) - t) * inputs.fastest() < 4 * Math.PI) return 0; // too short to repeat itself
     if (kind === "slip" && !slip.isSteady(t - this.stance.t)) return 0;
     if (kind !== "slip" && this.form.contactCarrier === "belt") return 0;
     if (inputs.isSwept()) return 0;

@@ -48,6 +48,8 @@ export interface Slip {
   /** Follows the slip up to τ = ending.tau, and makes that sooner if something ends it before. */
   follow(ending: Ending, watches: SlipWatches, blur: number, work: Work): void;
   evaluate(tau: number): void;
+  /** As `evaluate`, for those who only read: right to rounding of what d and v_r are made of, not of what is left of them. */
+  read(tau: number): void;
   /** A stretch from τ on over which nothing turns by more than about one radian, s. */
   panel(tau: number): number;
   /** True where the transient has died away at τ, so that with periodic inputs the slip repeats itself. */

@@ -123,8 +123,18 @@ export class Stepper {
         this.holdWatch.sign = side;
         this.look(this.holdWatch, scale, cause, from, to, to === end ? this.blur : 0);
       }
+      if (this.ending.tau < end || this.ending.cause === cause) this.forgive(end);
       if (this.outOfWork) return;
     }
+  }
+
+  /** Where the contact goes room is 0, but a body that needs no force stays where it is: what need is then is rounding. */
+  private forgive(end: number): void {
+    const { carried } = this.form;
+    carried.evaluate(this.ending.tau);
+    if (!(carried.roomRate < 0) || Math.abs(carried.need) > carried.needRounding()) return;
+    this.ending.tau = end;
+    this.ending.cause = "corner";
   }
 
   /** Both sides over the same stretch, so that a mirrored run costs the same work. */

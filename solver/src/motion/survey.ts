@@ -1,4 +1,4 @@
-import { ruleFor, type PanelRule } from "../numerics/panel-rule.ts";
+import { ruleFor, vertex, widestPanel, type PanelRule } from "../numerics/panel-rule.ts";
 import { peak } from "../numerics/peak.ts";
 import type { Motion } from "./motion.ts";
 import { emptyState, type State } from "./state.ts";
@@ -54,9 +54,9 @@ interface Panel {
 
 /**
  * Goes over [from, to] once for all channels. Each smooth stretch is cut into panels over which nothing turns by more
- * than two radians; integrals by Gauss's rule on each (products of two such channels to rounding), extremes from the same
+ * than about half a turn; integrals by Gauss's rule on each (products of two such channels to rounding), extremes from the same
  * nodes and the panel's ends, a top between them where the polynomial through all of them has it, by Brent's method, and its
- * value from the motion there. A top narrower than the spacing of nodes (at most 0.3 rad of the fastest rate, 0.6 for a
+ * value from the motion there. A top narrower than the spacing of nodes (at most 0.5 rad of the fastest rate, 1 for a
  * product) would be missed; closed forms have none. A segment that only repeats itself is gone over for one period.
  *
  * @param channels functions of the state; ask the result with the same function objects
@@ -93,10 +93,14 @@ function newTally(channel: Channel, hasExtremes: boolean): Tally {
 /** Panel by panel from start to end; what is found there counts `repeats` times. */
 function goOver(pass: Pass, i: number, start: number, end: number, repeats: number): void {
   for (let from = start; ;) {
-    const width = 2 * pass.motion.panel(i, from);
+    const width = widestPanel * pass.motion.panel(i, from);
     const isLast = !(from + width > from && from + 1.001 * width < end);
     const to = isLast ? end : from + width;
-    surveyPanel(pass, { i, from, to, rule: ruleFor(width < Infinity ? (2 * (to - from)) / width : 2) }, repeats);
+    surveyPanel(
+      pass,
+      { i, from, to, rule: ruleFor(width < Infinity ? (widestPanel * (to - from)) / width : widestPanel) },
+      repeats,
+    );
     if (isLast) return;
     from = to;
   }
@@ -156,15 +160,6 @@ function takeExtremes(motion: Motion, panel: Panel, tally: Tally, state: State):
   }
 }
 
-/** Where the parabola through nodes n − 1, n, n + 1 has its top or bottom; NaN where it is a line. */
-function vertex(nodes: Float64Array, values: Float64Array, n: number): number {
-  const left = nodes[n] - nodes[n - 1];
-  const right = nodes[n] - nodes[n + 1];
-  const r = left * (values[n] - values[n + 1]);
-  const q = right * (values[n] - values[n - 1]);
-  return nodes[n] - (0.5 * (left * r - right * q)) / (r - q);
-}
-
 /** Takes the top or bottom about u, between the nodes on both sides of n, into the tally if it could be a new extreme. */
 function polish(motion: Motion, panel: Panel, tally: Tally, state: State, n: number, u: number, at: number): void {
   const { values } = tally;
@@ -175,16 +170,17 @@ function polish(motion: Motion, panel: Panel, tally: Tally, state: State, n: num
   const best = isTop ? tally.max : -tally.min;
   const bend = Math.max(Math.abs(at - values[n - 1]), Math.abs(at - values[n + 1]));
   if (sign * at + bend <= best) return;
-  const { rule } = panel;
-  const { nodes } = rule;
+  const { nodes } = panel.rule;
+  const place = panel.rule.top(values, n, isTop);
+  const expected = sign * panel.rule.interpolate(values, place);
+  if (expected + trusted * bend <= best) return;
   const read = (where: number): number => {
     motion.read(panel.i, timeAt(panel, where), state);
     return sign * tally.channel(state);
   };
-  const top = peak((where) => sign * rule.interpolate(values, where), nodes[n - 1], u, nodes[n + 1], sign * at);
-  if (top.value + trusted * bend <= best) return;
-  let value = read(top.place);
-  if (Math.abs(value - top.value) > trusted * bend) value = peak(read, nodes[n - 1], u, nodes[n + 1], read(u)).value;
+  let value = read(place);
+  const isTold = Math.abs(value - expected) <= trusted * bend && value >= sign * at;
+  if (!isTold) value = peak(read, nodes[n - 1], u, nodes[n + 1], read(u));
   if (isTop) tally.max = Math.max(tally.max, value);
   else tally.min = Math.min(tally.min, -value);
 }

@@ -33,16 +33,54 @@ export class PanelRule {
     }
     return over / under;
   }
+
+  /**
+   * Where that polynomial has its top (or bottom) next to node n, by Newton's method on differences; where it is led out of
+   * the neighbourhood of the node, it stays at its edge.
+   */
+  top(values: ArrayLike<number>, n: number, isTop: boolean): number {
+    const { nodes } = this;
+    const apart = 1e-3;
+    const lowest = nodes[n - 1];
+    const highest = nodes[n + 1];
+    let u = vertex(nodes, values, n);
+    if (!(u > lowest && u < highest)) u = nodes[n];
+    for (let i = 0; i < 8; i++) {
+      const here = this.interpolate(values, u);
+      const before = this.interpolate(values, u - apart);
+      const after = this.interpolate(values, u + apart);
+      const bend = before - 2 * here + after;
+      if (isTop ? !(bend < 0) : !(bend > 0)) return u;
+      const step = (apart * (before - after)) / (2 * bend);
+      u = Math.min(highest, Math.max(lowest, u + step));
+      if (Math.abs(step) < 1e-5) return u;
+    }
+    return u;
+  }
 }
 
-const rules = [3, 4, 6, 10].map((count) => new PanelRule(count));
+/** Where the parabola through nodes n − 1, n, n + 1 has its top or bottom; NaN where it is a line. */
+export function vertex(nodes: ArrayLike<number>, values: ArrayLike<number>, n: number): number {
+  const left = nodes[n] - nodes[n - 1];
+  const right = nodes[n] - nodes[n + 1];
+  const r = left * (values[n] - values[n + 1]);
+  const q = right * (values[n] - values[n - 1]);
+  return nodes[n] - (0.5 * (left * r - right * q)) / (r - q);
+}
+
+const rules = [3, 4, 6, 8, 10].map((count) => new PanelRule(count));
+/** The widest panel each rule is for, rad. */
+const widths = [0.03, 0.1, 0.5, 1.2];
+export const widestPanel = 3.2;
 
 /**
- * The rule for a panel over which the fastest rate turns by so many radians, at most 2: the integral of a product of two
- * such functions is then right to about 1e-13 of its size.
+ * The rule for a panel over which the fastest rate turns by so many radians, at most `widestPanel`: the integral of a
+ * product of two such functions is then right to about 1e-13 of its size (by the rule's remainder, 25.4.30 of the same
+ * book), the polynomial through the nodes to 1e-9.
  */
 export function ruleFor(radians: number): PanelRule {
-  return rules[radians <= 0.03 ? 0 : radians <= 0.1 ? 1 : radians <= 0.5 ? 2 : 3];
+  const i = widths.findIndex((width) => radians <= width);
+  return rules[i < 0 ? rules.length - 1 : i];
 }
 
 /** Legendre's polynomial of degree n and its derivative at x, by their recurrence. */

@@ -1,16 +1,11 @@
 const golden = (3 - Math.sqrt(5)) / 2;
 
-export interface Peak {
-  place: number;
-  value: number;
-}
-
 /**
  * The largest value of f on [a, b], f(m) with a < m < b being at least f(a) and f(b): Brent's method (R. P. Brent,
  * Algorithms for Minimization without Derivatives, 1973, ch. 5). The place is found to about 1e-8 of the bracket, the
  * value therefore to rounding.
  */
-export function peak(f: (x: number) => number, a: number, m: number, b: number, fm: number): Peak {
+export function peak(f: (x: number) => number, a: number, m: number, b: number, fm: number): number {
   let x = m;
   let w = m;
   let v = m;
@@ -54,7 +49,7 @@ export function peak(f: (x: number) => number, a: number, m: number, b: number, 
     if (i > 3 && fx - Math.max(fw, fv) <= 2 ** -53 * Math.abs(fx) && Math.abs(step) < 1e-4 * (b - a + Math.abs(step)))
       break;
   }
-  return { place: x, value: fx };
+  return fx;
 }
 
 /** The step from x to the top of the parabola through three points; NaN where there is none. */

@@ -7,31 +7,51 @@ import type { AnyChannel, ChannelName, Channels } from "./channels.ts";
 const rounding = 1e-14;
 
 /**
- * Extremes, means and integrals of channels over a window of a run. The channels named beforehand are surveyed together
- * when the first of them is asked for; one not named costs a pass of its own.
+ * A stretch of a run. The channels named beforehand are surveyed together when the first of them is asked for; one not named
+ * costs a pass of its own.
  */
-export class Extent {
+export class Strip {
   private readonly surveys = new Map<AnyChannel, Survey>();
 
   constructor(
-    private readonly motion: Motion,
-    private readonly channels: Channels,
+    readonly motion: Motion,
+    readonly channels: Channels,
     readonly from: number,
     readonly to: number,
     private readonly named: readonly AnyChannel[],
   ) {}
 
+  surveyOf(name: AnyChannel): Survey {
+    const made = this.surveys.get(name);
+    if (made !== undefined) return made;
+    const together = this.named.includes(name) ? this.named : [name];
+    const survey = this.channels.survey(this.motion, this.from, this.to, together);
+    for (const each of together) this.surveys.set(each, survey);
+    return survey;
+  }
+}
+
+/** Extremes, means and integrals of channels over a window of a run: strips one after another, one at least. */
+export class Extent {
+  constructor(private readonly strips: readonly Strip[]) {}
+
   min(name: ChannelName): number {
-    return this.surveyOf(name).min(this.channels.of(name));
+    return this.strips.reduce(
+      (min, strip) => Math.min(min, strip.surveyOf(name).min(strip.channels.of(name))),
+      Infinity,
+    );
   }
 
   max(name: ChannelName): number {
-    return this.surveyOf(name).max(this.channels.of(name));
+    return this.strips.reduce(
+      (max, strip) => Math.max(max, strip.surveyOf(name).max(strip.channels.of(name))),
+      -Infinity,
+    );
   }
 
   /** Larger of |min| and |max|. */
   peak(name: ChannelName): number {
-    return this.surveyOf(name).peak(this.channels.of(name));
+    return Math.max(Math.abs(this.min(name)), Math.abs(this.max(name)));
   }
 
   /** Half peak-to-peak. */
@@ -41,30 +61,26 @@ export class Extent {
 
   /** ∫ dt over the window; 0 where rounding is all there is of it. */
   integral(name: AnyChannel): number {
-    const surveyed = this.surveyOf(name);
-    const channel = this.channels.of(name);
-    const integral = surveyed.integral(channel);
-    return Math.abs(integral) <= rounding * surveyed.gross(channel) ? 0 : integral;
+    let integral = 0;
+    let gross = 0;
+    for (const strip of this.strips) {
+      const channel = strip.channels.of(name);
+      integral += strip.surveyOf(name).integral(channel);
+      gross += strip.surveyOf(name).gross(channel);
+    }
+    return Math.abs(integral) <= rounding * gross ? 0 : integral;
   }
 
   /** Mean over time; the value itself where the window is an instant. */
   mean(name: AnyChannel): number {
-    const { from, to } = this;
-    return to > from ? this.integral(name) / (to - from) : this.valueAt(to, name);
+    const [first] = this.strips;
+    const { to } = this.strips[this.strips.length - 1];
+    return to > first.from ? this.integral(name) / (to - first.from) : valueAt(first, to, name);
   }
+}
 
-  private valueAt(t: number, name: AnyChannel): number {
-    const state = emptyState();
-    this.motion.read(this.motion.find(t), t, state);
-    return this.channels.of(name)(state);
-  }
-
-  private surveyOf(name: AnyChannel): Survey {
-    const made = this.surveys.get(name);
-    if (made !== undefined) return made;
-    const together = this.named.includes(name) ? this.named : [name];
-    const survey = this.channels.survey(this.motion, this.from, this.to, together);
-    for (const each of together) this.surveys.set(each, survey);
-    return survey;
-  }
+function valueAt({ motion, channels }: Strip, t: number, name: AnyChannel): number {
+  const state = emptyState();
+  motion.read(motion.find(t), t, state);
+  return channels.of(name)(state);
 }

@@ -4,7 +4,7 @@ import type { EventKind } from "../result.ts";
 import type { Problem } from "../scenario/problem.ts";
 import { Channels, type AnyChannel } from "./channels.ts";
 import { isFed, lowestHz } from "./drive.ts";
-import { Extent } from "./extent.ts";
+import { Extent, Strip } from "./extent.ts";
 import { restTimeOf } from "./rest.ts";
 import { steadyWindow, type SteadyWindow } from "./steady-window.ts";
 
@@ -18,9 +18,10 @@ export class Reading {
   readonly turns: readonly number[];
   /** True where the base feeds: then displacements are told of d. */
   readonly isFed: boolean;
-  /** Over the whole run, and over its steady window. */
+  /** Over the whole run, over its steady window (which ends with the run), and over the equal parts of that. */
   readonly whole: Extent;
   readonly steady: Extent;
+  readonly parts: readonly Extent[];
   private readonly channels: Channels;
   private rest: number | null | undefined;
 
@@ -38,13 +39,24 @@ export class Reading {
     this.turns = timesOf(motion, "turn");
     this.isFed = isFed(problem);
     this.channels = new Channels(problem);
-    this.whole = new Extent(motion, this.channels, 0, end, whole);
-    this.steady = new Extent(motion, this.channels, this.window.from, this.window.to, steady);
+    const { from } = this.window;
+    const parts = this.cut([...new Set<AnyChannel>([...whole, ...steady, "excursion"])]);
+    const before = from > 0 ? [new Strip(motion, this.channels, 0, from, whole)] : [];
+    this.whole = new Extent([...before, ...parts]);
+    this.steady = new Extent(parts);
+    this.parts = parts.map((part) => new Extent([part]));
   }
 
   /** Any other stretch of the run. */
   over(from: number, to: number, ...names: AnyChannel[]): Extent {
-    return new Extent(this.motion, this.channels, from, to, names);
+    return new Extent([new Strip(this.motion, this.channels, from, to, names)]);
+  }
+
+  /** The steady window in its parts, each to be gone over once for all that is asked of it. */
+  private cut(names: readonly AnyChannel[]): readonly Strip[] {
+    const { from, to, parts } = this.window;
+    const at = (i: number): number => (i === parts ? to : from + ((to - from) * i) / parts);
+    return Array.from({ length: parts }, (_, i) => new Strip(this.motion, this.channels, at(i), at(i + 1), names));
   }
 
   /** All there is to know at t, right-hand values at an event. */

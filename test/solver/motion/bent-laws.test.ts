@@ -44,3 +44,48 @@ test("bristles outlive a contact that fades away and comes back", () => {
   });
   expect(Math.abs(energy!.residual)).toBeLessThan(1e-8 * energy!.heatContact);
 });
+
+test("a jump of the counterface breaks a body on bristles away, and stuck means slow from there on", () => {
+  const threshold = 1e-3;
+  const { events, samples } = run(
+    {
+      body: { inertia: 1, stiffness: 1, viscous: 2 },
+      contact: {
+        law: { model: "bristle", static: 1, kinetic: 1, velocity: 1, stiffness: 50, damping: 1, fluid: 0 },
+        normal: { preload: 1 },
+        counterface: "base",
+      },
+      base: [{ kind: "ramp", rate: 0.5, start: 1 }],
+      span: { seconds: 6, untilRest: false },
+    },
+    { samples: 3000 },
+  );
+  expect(events[1]).toMatchObject({ t: 1, kind: "break-away" });
+  expect(events[2]?.kind).toBe("stop");
+  samples!.t.forEach((t, i) => {
+    const slip = samples!.v[i] - (t >= 1 ? 0.5 : 0);
+    if (Math.abs(Math.abs(slip) - threshold) > 1e-6)
+      expect([t, samples!.phase[i] === 0]).toEqual([t, Math.abs(slip) < threshold]);
+  });
+});
+
+test("friction that drops with infinite slope at rest is told to eight digits from the start of a slip on", () => {
+  const peaks = [1e-10, 1e-12].map((tolerance) => {
+    const { quantities } = run(
+      {
+        body: { inertia: 1, stiffness: 0, viscous: 2 },
+        contact: {
+          law: { model: "stribeck", static: 1, kinetic: 0, velocity: 1, exponent: 0.5, fluid: 0 },
+          normal: { preload: 1 },
+          counterface: "base",
+        },
+        force: [{ kind: "ramp", rate: -0.159, start: 0.0002 }],
+        initial: { displacement: -6 },
+        span: { seconds: 25, untilRest: false },
+      },
+      { tolerance, quantities: ["peakDisplacement"] },
+    );
+    return quantities.peakDisplacement ?? NaN;
+  });
+  expect(Math.abs(peaks[0] - peaks[1])).toBeLessThan(1e-8 * peaks[1]);
+});

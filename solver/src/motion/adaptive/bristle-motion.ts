@@ -1,3 +1,4 @@
+import { widestPanel } from "../../numerics/panel-rule.ts";
 import type { Ended, Phase } from "../../result.ts";
 import type { Problem } from "../../scenario/problem.ts";
 import { Inputs } from "../inputs.ts";
@@ -98,7 +99,7 @@ export class BristleMotion implements Motion {
   panel(i: number, t: number): number {
     const { firstStep, lastStep } = this.segments[i];
     const step = this.store.find(t, firstStep, lastStep);
-    return step === lastStep ? Infinity : (this.store.to(step) - t) / 2;
+    return step === lastStep ? Infinity : (this.store.to(step) - t) / widestPanel;
   }
 
   period(): number {

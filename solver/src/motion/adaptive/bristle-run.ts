@@ -113,16 +113,28 @@ class BristleRun {
       store.evaluate(step, t, this.at);
       return body.slipOf(t - inputs.origin, this.at);
     };
-    for (const t of crossings(slipAt, this.threshold, a, b)) {
-      const isStuck = this.segments[this.segments.length - 1].phase === 0;
-      const after = slipAt(Math.min(b, t + 1e-9 * (b - a)));
+    const found = crossings(slipAt, this.threshold, a, b);
+    for (let k = 0; k < found.length; k++) {
+      const t = found[k];
+      const next = found[k + 1] ?? b;
+      const isTold = next - t > 8 * Number.EPSILON * t;
+      if (!isTold && k + 1 < found.length) continue; // the same crossing again
+      const after = slipAt((t + next) / 2);
+      const wasStuck = this.segments[this.segments.length - 1].phase === 0;
+      const isStuck = isTold ? this.phaseOf(after) === 0 : !wasStuck;
+      if (isStuck === wasStuck) continue;
       this.t = t;
-      this.open(isStuck ? (Math.sign(after) as Phase) : 0);
-      this.marks.push({ t, kind: isStuck ? "break-away" : "stop", segment: this.segments.length - 1 });
-      if (this.marks.length - 1 >= this.problem.maxEvents) this.ended = "max-events";
+      this.happen(isStuck ? 0 : (Math.sign(after) as Phase));
       if (this.ended !== null) return;
     }
     this.t = b;
+  }
+
+  /** A stop (phase 0) or a break-away, now. */
+  private happen(phase: Phase): void {
+    this.open(phase);
+    this.marks.push({ t: this.t, kind: phase === 0 ? "stop" : "break-away", segment: this.segments.length - 1 });
+    if (this.marks.length - 1 >= this.problem.maxEvents) this.ended = "max-events";
   }
 
   /** A corner keeps ẋ, so ḋ jumps with ẏ; where the contact is lost the bristles spring back. */
@@ -131,8 +143,13 @@ class BristleRun {
     const before = inputs.evaluate(this.t - inputs.origin).baseVelocity;
     inputs.locate(this.t);
     const v = inputs.evaluate(0);
-    this.open(segments[segments.length - 1].phase);
+    const { phase } = segments[segments.length - 1];
     const jump = problem.isRelative ? 0 : before - v.baseVelocity;
+    const isJump = Math.abs(jump) > 1e-12 * Math.max(Math.abs(before), Math.abs(v.baseVelocity));
+    // a counterface that jumps takes v_r with it
+    const after = isJump && problem.counterface === "base" ? this.phaseOf(y[1] + jump) : phase;
+    if ((after === 0) === (phase === 0)) this.open(after);
+    else this.happen(after);
     return [y[0], y[1] + jump, v.normal > 0 ? y[2] : 0];
   }
 

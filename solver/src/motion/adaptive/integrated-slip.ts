@@ -1,5 +1,7 @@
 import { bracketedRoot, firstFall } from "../../numerics/bracketed-root.ts";
+import type { CompiledLaw } from "../../friction/friction-law.ts";
 import type { Work } from "../../numerics/first-zero.ts";
+import { widestPanel } from "../../numerics/panel-rule.ts";
 import type { Problem } from "../../scenario/problem.ts";
 import type { Inputs } from "../inputs.ts";
 import { slidingFriction } from "../sliding-friction.ts";
@@ -40,6 +42,7 @@ export class IntegratedSlip implements Slip {
   private fastest = 0;
   private readonly at = new Float64Array(2);
   private readonly noiseShare: number;
+  private readonly isSharp: boolean;
   /** What passed 0 at the end of the slip in hand. */
   private watched: ((t: number) => number) | null = null;
 
@@ -49,6 +52,7 @@ export class IntegratedSlip implements Slip {
     private readonly tolerance = usualTolerance,
   ) {
     this.noiseShare = noiseTolerances * tolerance;
+    this.isSharp = isSharpAtRest(problem.law);
   }
 
   begin(_: Inputs, body: BodyValues, stance: Stance): void {
@@ -74,13 +78,32 @@ export class IntegratedSlip implements Slip {
     this.noise = this.noiseShare * this.fastest;
     this.hasRisen = Math.abs(stance.slip) > this.noise;
     this.watched = null;
-    const reached = this.integrate(stance.t, limit, [stance.position, stance.velocity], work, (from, to) => {
+    const look = (from: number, to: number): boolean => {
       this.endsWithin(from, to, ending, watches);
       return ending.cause === "corner";
-    });
-    if (ending.cause !== "corner") return this.retake(ending, work);
-    if (reached < limit) work.spent = Infinity;
-    else if (this.stopsAt(ending.tau, 1e-9 / rate)) ending.cause = "contact";
+    };
+    let from = stance.t;
+    let state = [stance.position, stance.velocity];
+    for (const to of this.stretches(limit, 1 / rate)) {
+      const reached = this.integrate(from, to, state, work, look);
+      if (ending.cause !== "corner") return this.retake(ending, work);
+      if (reached < to) return void (work.spent = Infinity);
+      this.evaluate(to - stance.t);
+      from = to;
+      state = [this.position, this.velocity];
+    }
+    if (this.stopsAt(ending.tau, 1e-9 / rate)) ending.cause = "contact";
+  }
+
+  /**
+   * Where integration starts anew on the way to `limit`. Friction that drops with infinite slope at rest has no error
+   * estimate there: a slip from rest then goes by stretches that grow tenfold, over each of which it is smooth.
+   */
+  private stretches(limit: number, unit: number): number[] {
+    const { t, slip } = this.stance;
+    if (!this.isSharp || slip !== 0) return [limit];
+    const ends = Array.from({ length: 8 }, (_, i) => t + unit * 10 ** (i - 9));
+    return [...ends.filter((end) => end > t && end < limit), limit];
   }
 
   /** Steps on from a state at `from`; each is stored, then told to `onStep`, which says whether to go on. */
@@ -151,12 +174,16 @@ export class IntegratedSlip implements Slip {
     this.slip = problem.counterface === "base" ? this.velocity : this.velocity + base - problem.beltVelocity;
   }
 
+  read(tau: number): void {
+    this.evaluate(tau);
+  }
+
   panel(tau: number): number {
     const { store } = this;
     const t = this.stance.t + tau;
     if (this.last < this.first) return Infinity;
     const step = store.find(t, this.first, this.last);
-    return step === this.last ? Infinity : (store.to(step) - t) / 2;
+    return step === this.last ? Infinity : (store.to(step) - t) / widestPanel;
   }
 
   isSteady(): boolean {
@@ -297,4 +324,9 @@ export class IntegratedSlip implements Slip {
     const slope = law.slope(radius * Math.abs(this.stance.slip)) * normal;
     return slope > 0 && Number.isFinite(slope) ? (radius ** 2 * slope) / inertia : 0;
   }
+}
+
+/** True where μ(v) leaves rest with infinite slope (a Stribeck exponent below 1): its slope then has no limit at v = 0. */
+function isSharpAtRest(law: CompiledLaw): boolean {
+  return law.constant === null && Math.abs(law.slope(1e-18)) > 1.5 * Math.abs(law.slope(1e-12));
 }

@@ -73,6 +73,10 @@ export class ExactSlip implements Slip {
     this.oscillation.evaluateSlip(tau);
   }
 
+  read(tau: number): void {
+    this.oscillation.read(tau);
+  }
+
   panel(tau: number): number {
     const { fast, slow, fastDies } = this.oscillation.chain;
     const rate = Math.max(this.inputs.fastest(), tau < fastDies ? fast : slow);

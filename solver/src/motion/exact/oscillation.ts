@@ -4,6 +4,7 @@ import { Chain } from "./chain.ts";
 import { FreeMode } from "./free-mode.ts";
 import { ResonantAnswer } from "./resonant-answer.ts";
 import { StartSeries } from "./start-series.ts";
+import { SteadyAnswer } from "./steady-answer.ts";
 import type { Stance } from "../stance.ts";
 
 const unitRoundoff = 2 ** -53;
@@ -48,33 +49,17 @@ export class Oscillation {
   private readonly push = new Float64Array(4);
   /** True where only A₀ acts, so that of the chain's integrals one is enough. */
   private isPushSteady = true;
-  private count = 0;
-  private readonly omega: Float64Array;
-  private readonly re: Float64Array;
-  private readonly im: Float64Array;
-  /** P of each harmonic; 0 for the resonant ones. */
-  private readonly particularRe: Float64Array;
-  private readonly particularIm: Float64Array;
-  private readonly isResonant: Uint8Array;
-  private isNearResonance = false;
-  private sumRe = 0;
-  private sumRate = 0;
-  private magnitude = 0;
+  private readonly steady: SteadyAnswer;
   /** True where the sum of modes applies: underdamped and far from critical, constant push, no harmonic next to resonance. */
   private isSwing = false;
   /** The free motion, and A₀/ω₀², about which it swings. */
   private readonly free = new FreeMode();
   private settled = 0;
-  /** Size of the free motion at its start and at the last `evaluate`, and bounds of d⃛ and d⁗ of the harmonics' steady answer. */
+  /** Size of the free motion at its start and at the last `evaluate`. */
   private startSwing = 0;
   private swing = 0;
-  private steadyJerk = 0;
-  private steadySnap = 0;
   /** Up to this τ the power series is used. */
   private seriesReach = Infinity;
-  /** ∂³ and ∂² bounds of the harmonic forcing per m. */
-  private secondForcing = 0;
-  private thirdForcing = 0;
   private readonly answer = new ResonantAnswer();
 
   /** @param room the most harmonics there can be, the ripple of N included */
@@ -83,12 +68,7 @@ export class Oscillation {
     private readonly carrier: Carrier,
     private readonly beltVelocity: number,
   ) {
-    this.omega = new Float64Array(room);
-    this.re = new Float64Array(room);
-    this.im = new Float64Array(room);
-    this.particularRe = new Float64Array(room);
-    this.particularIm = new Float64Array(room);
-    this.isResonant = new Uint8Array(room);
+    this.steady = new SteadyAnswer(room);
   }
 
   /** Starts a slip from a stance at the inputs' origin; `slide` = s r μk. */
@@ -121,7 +101,7 @@ export class Oscillation {
     this.at = NaN;
     this.slipAt = NaN;
     if (!Number.isNaN(stance.acceleration)) push[0] += this.knownAcceleration(stance) - this.startAcceleration();
-    this.isSwing = this.isPushSteady && !this.isNearResonance && this.chain.damped > 0.3 * this.chain.fast;
+    this.isSwing = this.isPushSteady && !this.steady.hasResonance && this.chain.damped > 0.3 * this.chain.fast;
     if (this.isSwing) this.takeSwing();
   }
 
@@ -129,7 +109,7 @@ export class Oscillation {
   private takeSwing(): void {
     this.settled = this.push[0] / this.squared;
     this.free.set(this.sigma, this.chain.damped);
-    this.free.begin(-this.settled - this.sumRe, this.startVelocity - this.sumRate);
+    this.free.begin(-this.settled - this.steady.position, this.startVelocity - this.steady.velocity);
     this.startSwing = this.free.size;
   }
 
@@ -141,7 +121,7 @@ export class Oscillation {
 
   private startAcceleration(): number {
     let sum = this.push[0];
-    for (let i = 0; i < this.count; i++) sum += this.re[i];
+    for (let i = 0; i < this.steady.count; i++) sum += this.steady.forcingRe[i];
     return sum - 2 * this.sigma * this.startVelocity;
   }
 
@@ -162,6 +142,27 @@ export class Oscillation {
     this.jerk = series.jerk;
     this.snap = series.snap;
     this.noise = series.noise;
+  }
+
+  /** d, ḋ, d̈ and v_r for those who only read: the series in fewer derivatives, the modes wherever they cancel by two digits at most. */
+  read(tau: number): void {
+    if (tau === this.slipAt) return;
+    if (tau > this.seriesReach || (this.isSwing && this.chain.fast * tau > 0.1)) return this.readModes(tau);
+    const { series } = this;
+    this.at = this.slipAt = NaN;
+    series.read(tau);
+    this.position = this.start + series.position;
+    this.velocity = series.velocity;
+    this.acceleration = series.acceleration;
+    this.slip = series.slip;
+  }
+
+  private readModes(tau: number): void {
+    if (!this.isSwing || !(this.chain.fast * tau > 0.1)) return this.evaluateSlip(tau);
+    this.at = this.slipAt = NaN;
+    this.evaluateSwing(tau);
+    this.slip = this.velocity;
+    if (this.carrier !== "base") this.slip += this.inputs.evaluate(tau).baseVelocity - this.beltVelocity;
   }
 
   /** As `evaluate`, and v_r with its derivatives. */
@@ -203,80 +204,46 @@ export class Oscillation {
    * twice differentiated equation (see `first-zero.ts`).
    */
   snapBound(reach: number): number {
-    if (this.isSwing) return this.steadySnap + this.squared * this.squared * this.swing;
-    return Math.sqrt(this.snap * this.snap + this.squared * this.jerk * this.jerk) + reach * this.thirdForcing;
+    if (this.isSwing) return this.steady.snap + this.squared * this.squared * this.swing;
+    return (
+      Math.sqrt(this.snap * this.snap + this.squared * this.jerk * this.jerk) +
+      reach * (Math.abs(this.push[3]) + this.steady.forcingThird)
+    );
   }
 
   /** Bound of |d⃛| on [τ, τ + reach], likewise. */
   jerkBound(reach: number): number {
-    if (this.isSwing) return this.steadyJerk + this.squared * this.chain.fast * this.swing;
+    if (this.isSwing) return this.steady.jerk + this.squared * this.chain.fast * this.swing;
     const now = this.jerk * this.jerk + this.squared * this.acceleration * this.acceleration;
-    return Math.sqrt(now) + reach * this.secondForcing;
+    return Math.sqrt(now) + reach * (Math.abs(this.push[2]) + this.steady.forcingSecond);
   }
 
   private takeHarmonics(inputs: Inputs, inertia: number, slide: number): void {
-    this.count = 0;
-    this.isNearResonance = false;
-    this.sumRe = this.sumRate = this.magnitude = this.steadyJerk = this.steadySnap = 0;
-    this.secondForcing = Math.abs(this.push[2]);
-    this.thirdForcing = Math.abs(this.push[3]);
+    this.steady.begin(this.sigma, this.squared, this.chain.damped);
     for (let i = 0; i < inputs.count; i++) {
       const w = inputs.omega[i];
       const re = inputs.forceRe[i] / inertia + w * w * inputs.baseRe[i];
       const im = inputs.forceIm[i] / inertia + w * w * inputs.baseIm[i];
-      this.addHarmonic(w, re, im);
+      this.steady.add(w, re, im);
     }
     if (inputs.rippleOmega > 0) {
       const share = -slide / inertia;
-      this.addHarmonic(inputs.rippleOmega, share * inputs.rippleRe, share * inputs.rippleIm);
+      this.steady.add(inputs.rippleOmega, share * inputs.rippleRe, share * inputs.rippleIm);
     }
-  }
-
-  private addHarmonic(omega: number, re: number, im: number): void {
-    const i = this.count++;
-    this.omega[i] = omega;
-    this.re[i] = re;
-    this.im[i] = im;
-    const amplitude = Math.sqrt(re * re + im * im);
-    this.secondForcing += amplitude * omega * omega;
-    this.thirdForcing += amplitude * omega * omega * omega;
-    const { sigma, squared } = this;
-    const { damped } = this.chain;
-    this.isResonant[i] = damped > 0 && sigma * sigma + (omega - damped) ** 2 < 0.0025 * squared ? 1 : 0;
-    if (this.isResonant[i]) {
-      this.isNearResonance = true;
-      this.particularRe[i] = this.particularIm[i] = 0;
-      this.magnitude += amplitude / damped;
-      return;
-    }
-    const natural = Math.sqrt(squared);
-    const zRe = (natural - omega) * (natural + omega);
-    const zIm = 2 * sigma * omega;
-    const z2 = zRe * zRe + zIm * zIm;
-    const pRe = (re * zRe + im * zIm) / z2;
-    const pIm = (im * zRe - re * zIm) / z2;
-    this.particularRe[i] = pRe;
-    this.particularIm[i] = pIm;
-    this.sumRe += pRe;
-    this.sumRate -= omega * pIm;
-    const speed = Math.sqrt(pRe * pRe + pIm * pIm) * omega;
-    this.magnitude += speed;
-    this.steadyJerk += speed * omega * omega;
-    this.steadySnap += speed * omega * omega * omega;
   }
 
   /** d₀ + A₀/ω₀² + Re(Z e^{λτ}) + Σ Re(P e^{iΩτ}): what `evaluateClosed` comes to where nothing in it cancels. */
   private evaluateSwing(tau: number): void {
-    const { inputs, free } = this;
+    const { inputs, free, steady } = this;
     free.look(tau);
     let position = this.settled + free.position;
     let { velocity, acceleration, jerk, snap } = free;
     inputs.turn(tau);
-    for (let i = 0; i < this.count; i++) {
-      const w = this.omega[i];
+    for (let i = 0; i < steady.count; i++) {
+      const w = steady.omega[i];
       const w2 = w * w;
-      const value = this.particularRe[i] * inputs.cosine[i] - this.particularIm[i] * inputs.sine[i];
-      const rate = -w * (this.particularRe[i] * inputs.sine[i] + this.particularIm[i] * inputs.cosine[i]);
+      const value = steady.re[i] * inputs.cosine[i] - steady.im[i] * inputs.sine[i];
+      const rate = -w * (steady.re[i] * inputs.sine[i] + steady.im[i] * inputs.cosine[i]);
       position += value;
       velocity += rate;
       acceleration -= w2 * value;
@@ -289,47 +256,47 @@ export class Oscillation {
     this.jerk = jerk;
     this.snap = snap;
     this.swing = free.size;
-    this.noise = 8 * unitRoundoff * (free.speed + this.magnitude + Math.abs(velocity));
+    this.noise = 8 * unitRoundoff * (free.speed + this.steady.speed + Math.abs(velocity));
   }
 
   private evaluateClosed(tau: number): void {
-    const { chain, push, sigma, squared } = this;
+    const { chain, push, sigma, squared, steady } = this;
     chain.evaluate(tau, this.isPushSteady ? 1 : 4);
     const { rate, impulse, integrals } = chain;
-    const steady = integrals[0];
-    const free = this.startVelocity - this.sumRate;
+    const once = integrals[0];
+    const free = this.startVelocity - this.steady.velocity;
     const fromRest = rate + 2 * sigma * impulse;
-    const push0 = push[0] + this.sumRe * squared;
-    let position = free * impulse - this.sumRe * fromRest;
+    const push0 = push[0] + this.steady.position * squared;
+    let position = free * impulse - this.steady.position * fromRest;
     let velocity = free * rate + push0 * impulse;
     // by derivative, not from the equation: a free motion that has died away must not leave the forces' rounding behind
     let acceleration = push0 * rate - free * (2 * sigma * rate + squared * impulse);
-    if (this.isPushSteady) position += push[0] * steady;
+    if (this.isPushSteady) position += push[0] * once;
     else {
-      position += push[0] * steady + push[1] * integrals[1] + push[2] * integrals[2] + push[3] * integrals[3];
-      velocity += push[1] * steady + push[2] * integrals[1] + push[3] * integrals[2];
-      acceleration += push[1] * impulse + push[2] * steady + push[3] * integrals[1];
+      position += push[0] * once + push[1] * integrals[1] + push[2] * integrals[2] + push[3] * integrals[3];
+      velocity += push[1] * once + push[2] * integrals[1] + push[3] * integrals[2];
+      acceleration += push[1] * impulse + push[2] * once + push[3] * integrals[1];
     }
     let forcingRate = push[1] + tau * (push[2] + (tau * push[3]) / 2);
     let forcingSecond = push[2] + tau * push[3];
     this.inputs.turn(tau);
-    for (let i = 0; i < this.count; i++) {
-      const w = this.omega[i];
+    for (let i = 0; i < steady.count; i++) {
+      const w = steady.omega[i];
       const c = this.inputs.cosine[i];
       const s = this.inputs.sine[i];
-      const value = this.re[i] * c - this.im[i] * s;
-      forcingRate -= w * (this.re[i] * s + this.im[i] * c);
+      const value = steady.forcingRe[i] * c - steady.forcingIm[i] * s;
+      forcingRate -= w * (steady.forcingRe[i] * s + steady.forcingIm[i] * c);
       forcingSecond -= w * w * value;
-      if (this.isResonant[i]) {
+      if (steady.isResonant[i]) {
         const { answer } = this;
-        answer.evaluate(this.re[i], this.im[i], w, tau, c, s);
+        answer.evaluate(steady.forcingRe[i], steady.forcingIm[i], w, tau, c, s);
         position += answer.position;
         velocity += answer.velocity;
         acceleration += value - 2 * sigma * answer.velocity - squared * answer.position;
       } else {
-        position += this.particularRe[i] * c - this.particularIm[i] * s;
-        velocity -= w * (this.particularRe[i] * s + this.particularIm[i] * c);
-        acceleration -= w * w * (this.particularRe[i] * c - this.particularIm[i] * s);
+        position += steady.re[i] * c - steady.im[i] * s;
+        velocity -= w * (steady.re[i] * s + steady.im[i] * c);
+        acceleration -= w * w * (steady.re[i] * c - steady.im[i] * s);
       }
     }
     this.position = this.start + position;
@@ -344,8 +311,8 @@ export class Oscillation {
         Math.abs(push[0] * impulse) +
         // the integrals' own cancellation: they come from the equation, divided by ω₀²
         Math.min(tau * tau, 1 / squared) * (Math.abs(push[1]) + tau * (Math.abs(push[2]) + tau * Math.abs(push[3]))) +
-        this.magnitude +
-        Math.abs(this.sumRe * squared * impulse) +
+        this.steady.speed +
+        Math.abs(this.steady.position * squared * impulse) +
         Math.abs(velocity));
   }
 }

@@ -46,6 +46,8 @@ export class StartSeries {
   private readonly stretch = new Float64Array(terms);
   private readonly sliding = new Float64Array(terms);
   private turned = new Float64Array(0);
+  /** Number of harmonics, the ripple of N the last of them. */
+  private count = 0;
 
   /** Nothing is computed until it is asked for; the inputs must stay where they are until then. */
   begin(
@@ -71,24 +73,24 @@ export class StartSeries {
     const count = this.termsFor(tau);
     if (this.made < count) this.make(count);
     const { stretch } = this;
+    // Horner's scheme for the value and its derivatives over their factorials together
     let p = 0;
     let v = 0;
     let a = 0;
     let j = 0;
     let s = 0;
-    for (let n = count - 1; n >= 1; n--) {
-      const c = stretch[n];
-      p = p * tau + c;
-      v = v * tau + n * c;
-      if (n >= 2) a = a * tau + n * (n - 1) * c;
-      if (n >= 3) j = j * tau + n * (n - 1) * (n - 2) * c;
-      if (n >= 4) s = s * tau + n * (n - 1) * (n - 2) * (n - 3) * c;
+    for (let n = count - 1; n >= 0; n--) {
+      s = s * tau + j;
+      j = j * tau + a;
+      a = a * tau + v;
+      v = v * tau + p;
+      p = p * tau + stretch[n];
     }
-    this.position = p * tau;
+    this.position = p;
     this.velocity = v;
-    this.acceleration = a;
-    this.jerk = j;
-    this.snap = s;
+    this.acceleration = 2 * a;
+    this.jerk = 6 * j;
+    this.snap = 24 * s;
     this.noise = this.noiseOf(v, stretch[1], stretch[2], tau);
   }
 
@@ -100,15 +102,37 @@ export class StartSeries {
     let a = 0;
     let j = 0;
     for (let n = count - 2; n >= 0; n--) {
-      const c = sliding[n];
-      v = v * tau + c;
-      if (n >= 1) a = a * tau + n * c;
-      if (n >= 2) j = j * tau + n * (n - 1) * c;
+      j = j * tau + a;
+      a = a * tau + v;
+      v = v * tau + sliding[n];
     }
     this.slip = v;
     this.slipRate = a;
-    this.slipSecond = j;
+    this.slipSecond = 2 * j;
     this.noise = this.noiseOf(v, sliding[0], sliding[1], tau);
+  }
+
+  /** d, ḋ, d̈ and v_r alone. */
+  read(tau: number): void {
+    const count = this.termsFor(tau);
+    if (this.made < count) this.make(count);
+    const { stretch, sliding } = this;
+    let p = 0;
+    let v = 0;
+    let a = 0;
+    for (let n = count - 1; n >= 0; n--) {
+      a = a * tau + v;
+      v = v * tau + p;
+      p = p * tau + stretch[n];
+    }
+    this.position = p;
+    this.velocity = v;
+    this.acceleration = 2 * a;
+    this.slip = this.velocity;
+    if (this.isOnBase) return;
+    let slip = 0;
+    for (let n = count - 2; n >= 0; n--) slip = slip * tau + sliding[n];
+    this.slip = slip;
   }
 
   /** A known start (at rest, acceleration exact) leaves only the rounding of what is there. */
@@ -137,13 +161,15 @@ export class StartSeries {
     for (let n = this.made - 2; n + 2 < count; n++) {
       const held = n === 0 ? stance.position : stretch[n];
       const pull = 2 * sigma * (n + 1) * stretch[n + 1] + squared * held;
-      let next = (this.forceAt(n) - pull) / ((n + 2) * (n + 1));
-      const base = this.baseAt(n + 2);
+      // beyond their degree polynomial inputs have nothing more to add
+      const isForced = n < 4 || this.count > 0;
+      let next = ((isForced ? this.forceAt(n) : 0) - pull) / ((n + 2) * (n + 1));
+      const base = isForced ? this.baseAt(n + 2) : 0;
       if (isOnBase) next -= base;
       if (n === 0 && !Number.isNaN(known)) next = known;
       stretch[n + 2] = isOnBase ? next : next - base;
       sliding[n + 1] = (n + 2) * next;
-      this.turn(n);
+      if (this.count > 0) this.turn(n);
     }
     this.made = count;
   }
@@ -151,8 +177,8 @@ export class StartSeries {
   /** The harmonics' complex amplitudes (force per m; base), to be turned by iω/(n + 1) from one coefficient to the next. */
   private startTurning(): void {
     const { inputs, inertia } = this;
-    const size = 4 * (inputs.count + 1);
-    if (this.turned.length < size) this.turned = new Float64Array(size);
+    this.count = inputs.count + (inputs.rippleOmega > 0 ? 1 : 0);
+    if (this.turned.length < 4 * this.count) this.turned = new Float64Array(4 * this.count);
     const { turned } = this;
     for (let i = 0; i < inputs.count; i++) {
       turned[4 * i] = inputs.forceRe[i] / inertia;
@@ -160,6 +186,7 @@ export class StartSeries {
       turned[4 * i + 2] = inputs.baseRe[i];
       turned[4 * i + 3] = inputs.baseIm[i];
     }
+    if (this.count === inputs.count) return;
     const ripple = 4 * inputs.count;
     turned[ripple] = (-this.slide * inputs.rippleRe) / inertia;
     turned[ripple + 1] = (-this.slide * inputs.rippleIm) / inertia;
@@ -167,7 +194,7 @@ export class StartSeries {
 
   private turn(n: number): void {
     const { inputs, turned } = this;
-    for (let i = 0; i <= inputs.count; i++) {
+    for (let i = 0; i < this.count; i++) {
       const step = (i < inputs.count ? inputs.omega[i] : inputs.rippleOmega) / (n + 1);
       for (let k = 4 * i; k < 4 * i + 4; k += 2) {
         const re = turned[k];
@@ -182,7 +209,7 @@ export class StartSeries {
     const { inputs, inertia, turned } = this;
     let sum = 0;
     if (n < 4) sum = (inputs.force[n] - (n === 0 ? this.slide * inputs.normal : 0)) / inertia;
-    for (let i = 0; i <= inputs.count; i++) sum += turned[4 * i];
+    for (let i = 0; i < this.count; i++) sum += turned[4 * i];
     return sum;
   }
 
