@@ -2,8 +2,9 @@ import type { QuantitySpread } from "@restband/solver";
 import { useWidth } from "../../../components/use-width.ts";
 import { formatNumber } from "../../../format/format-number.ts";
 import { quantityNamed } from "../../../format/quantities.ts";
-import { fromSi, type Measure } from "../../../format/unit.ts";
+import { fromSi, toSi, type Measure } from "../../../format/unit.ts";
 import { unitFor } from "../../../format/units.ts";
+import { roundSteps } from "../round-steps.ts";
 
 const HEIGHT = 240;
 const LEFT = 44;
@@ -20,6 +21,8 @@ export function Histogram({ spread, measure }: { spread: QuantitySpread; measure
   const x = (value: number): number => LEFT + ((value - low) / (high - low || 1)) * (width - LEFT - 8);
   const y = (count: number): number => TOP + (1 - count / most) * (HEIGHT - TOP - BOTTOM);
   const text = (value: number): string => formatNumber(fromSi(value, unit), 3);
+  // Of a value that does not scatter there is but one.
+  const ticks = low < high ? roundSteps(fromSi(low, unit), fromSi(high, unit), 5) : [fromSi(low, unit)];
   const name = quantityNamed(spread.quantity)?.label ?? spread.quantity;
   const bottom = HEIGHT - BOTTOM;
   return (
@@ -53,15 +56,15 @@ export function Histogram({ spread, measure }: { spread: QuantitySpread; measure
         />
       ))}
       <path d={`M${LEFT} ${bottom}H${width - 8}`} className="stroke-ink" />
-      {[low, (low + high) / 2, high].map((value, i) => (
+      {ticks.map((value) => (
         <text
-          key={i}
-          x={x(value)}
+          key={value}
+          x={Math.min(x(toSi(value, unit)), width - 12)}
           y={bottom + 18}
-          textAnchor={i === 0 ? "start" : i === 1 ? "middle" : "end"}
+          textAnchor="middle"
           className="figures fill-ink"
         >
-          {text(value)}
+          {formatNumber(value, 4)}
         </text>
       ))}
       <text x={width - 8} y={bottom + 38} textAnchor="end" className="fill-quiet text-[13px]">

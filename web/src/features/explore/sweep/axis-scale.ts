@@ -3,6 +3,7 @@ import { formatNumber } from "../../../format/format-number.ts";
 import { fromSi, toSi, type Unit } from "../../../format/unit.ts";
 import { unitFor } from "../../../format/units.ts";
 import { exploreField } from "../explore-field.ts";
+import { roundSteps } from "../round-steps.ts";
 
 /** An axis of a map: cells stand side by side at equal distances, so places are counted in cells, 0 to `count`. */
 export interface AxisScale {
@@ -58,20 +59,7 @@ function placeAmong(value: number, values: readonly number[], isLog: boolean): n
 
 /** Values people read: 1-2-5 steps, or 1, 2, 5 of each decade. */
 function roundValues(from: number, to: number, spacing: "linear" | "log"): number[] {
-  return spacing === "log" ? decades(from, to) : evenSteps(from, to);
-}
-
-function evenSteps(from: number, to: number): number[] {
-  const step = roundStep((to - from) / 7);
-  const values: number[] = [];
-  for (let n = Math.ceil(from / step - 1e-9); n * step <= to + 1e-9 * step; n++)
-    values.push(Number((n * step).toPrecision(12)));
-  return values;
-}
-
-function roundStep(rough: number): number {
-  const decade = 10 ** Math.floor(Math.log10(Math.abs(rough)));
-  return decade * ([1, 2, 5, 10].find((digit) => digit * decade >= Math.abs(rough)) ?? 10);
+  return spacing === "log" ? decades(from, to) : roundSteps(from, to);
 }
 
 function decades(from: number, to: number): number[] {

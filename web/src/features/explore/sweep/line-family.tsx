@@ -2,8 +2,9 @@ import type { Scenario } from "@restband/solver";
 import { useWidth } from "../../../components/use-width.ts";
 import { formatNumber } from "../../../format/format-number.ts";
 import { measureOfQuantity, quantityNamed } from "../../../format/quantities.ts";
-import { fromSi } from "../../../format/unit.ts";
+import { fromSi, toSi } from "../../../format/unit.ts";
 import { unitFor } from "../../../format/units.ts";
+import { roundSteps } from "../round-steps.ts";
 import type { AxisScale } from "./axis-scale.ts";
 import type { SweepCells } from "./sweep-cells.ts";
 
@@ -57,13 +58,13 @@ export function LineFamily({ cells, scenario, across, up, place }: LineFamilyPro
         {label}
         {unit.label && `, ${unit.label}`}
       </text>
-      {[0, 0.25, 0.5, 0.75, 1].map((share) => {
-        const value = low + share * (high - low);
+      {roundSteps(fromSi(low, unit), fromSi(high, unit), 5).map((value) => {
+        const at = y(toSi(value, unit));
         return (
-          <g key={share}>
-            <path d={`M${LEFT} ${y(value)}H${width - RIGHT}`} className={share === 0 ? "stroke-edge" : "stroke-line"} />
-            <text x={LEFT - 8} y={y(value) + 4} textAnchor="end" className="figures fill-ink">
-              {formatNumber(fromSi(value, unit), 3)}
+          <g key={value}>
+            <path d={`M${LEFT} ${at}H${width - RIGHT}`} className={value === 0 ? "stroke-edge" : "stroke-line"} />
+            <text x={LEFT - 8} y={at + 4} textAnchor="end" className="figures fill-ink">
+              {formatNumber(value, 4)}
             </text>
           </g>
         );

@@ -24,9 +24,12 @@ export function MapAxes({ frame, across, up, selected }: MapAxesProps) {
     <g className="text-[12.5px]">
       {across.ticks.map(({ place, text }) => {
         const { x } = pointOf(frame, place, 0);
-        return at && Math.abs(at.x - x) < ROOM_ACROSS ? null : <TickAcross key={text} {...{ x, bottom, text }} />;
+        const isNear = at && Math.abs(at.x - x) < ROOM_ACROSS;
+        return isNear ? null : <TickAcross key={text} width={frame.width} {...{ x, bottom, text }} />;
       })}
-      {at && own && <TickAcross x={at.x} bottom={bottom} text={across.text(across.values[own.column])} isBold />}
+      {at && own && (
+        <TickAcross width={frame.width} x={at.x} bottom={bottom} text={across.text(across.values[own.column])} isBold />
+      )}
       <text x={right} y={bottom + 40} textAnchor="end" className="fill-quiet text-[13px]">
         {nameOf(across)}
       </text>
@@ -49,12 +52,22 @@ const nameOf = ({ name, unit }: AxisScale): string => (unit.label === "" ? name 
 /** About half a figure of the mono face, px: a tick at the rim keeps its text on the sheet. */
 const HALF_FIGURE = 3.8;
 
-function TickAcross({ x, bottom, text, isBold }: { x: number; bottom: number; text: string; isBold?: boolean }) {
+interface TickAcrossProps {
+  /** Of the map. */
+  width: number;
+  x: number;
+  bottom: number;
+  text: string;
+  isBold?: boolean;
+}
+
+function TickAcross({ width, x, bottom, text, isBold }: TickAcrossProps) {
+  const half = text.length * HALF_FIGURE;
   return (
     <g>
       <path d={`M${x} ${bottom + 1}v${isBold ? 7 : 5}`} {...strokeOf(isBold)} />
       <text
-        x={Math.max(x, text.length * HALF_FIGURE)}
+        x={Math.min(Math.max(x, half), width - half)}
         y={bottom + 19}
         textAnchor="middle"
         className={isBold ? "figures fill-ink font-bold" : "figures fill-ink"}

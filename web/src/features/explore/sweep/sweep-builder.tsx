@@ -17,6 +17,7 @@ import {
   secondsOf,
   sweepDraftOf,
   timeMeasure,
+  usualSpacing,
   type AxisDraft,
   type SweepDraft,
 } from "./sweep-draft.ts";
@@ -51,7 +52,8 @@ export function SweepBuilder({ scenario, onRun }: SweepBuilderProps) {
     onChange: put,
     onField: (path: string) => {
       const field = fields.find((each) => each.path === path);
-      if (field) put(axisDraftOf(field, scenario, axis.spacing, Number(axis.count) || 12));
+      const spacing = axis.spacing === "listed" ? "listed" : usualSpacing(path);
+      if (field) put(axisDraftOf(field, scenario, spacing, Number(axis.count) || 12));
     },
   });
   return (
@@ -75,7 +77,7 @@ export function SweepBuilder({ scenario, onRun }: SweepBuilderProps) {
           className="self-start"
           onClick={() => {
             const other = fields.find(({ path }) => path !== draft.first.path);
-            if (other) set({ second: axisDraftOf(other, scenario, "linear", 12) });
+            if (other) set({ second: axisDraftOf(other, scenario, usualSpacing(other.path), 12) });
           }}
         >
           Vary a second field

@@ -76,8 +76,8 @@ export function sweepDraftOf(scenario: Scenario): SweepDraft {
   const across = friction && friction.path !== up?.path ? friction : (up ?? fields[0]);
   const limits = scenario.limits.flatMap(({ quantity }) => (quantityNamed(quantity) ? [quantity as QuantityName] : []));
   return {
-    first: axisDraftOf(across, scenario, across.path.startsWith("contact.law.") ? "linear" : "log", 16),
-    second: up && up.path !== across.path ? axisDraftOf(up, scenario, "log", 14) : null,
+    first: axisDraftOf(across, scenario, usualSpacing(across.path), 16),
+    second: up && up.path !== across.path ? axisDraftOf(up, scenario, usualSpacing(up.path), 14) : null,
     keepsDampingRatio: false,
     keepsFrictionRatio: true,
     continuation: "none",
@@ -85,6 +85,10 @@ export function sweepDraftOf(scenario: Scenario): SweepDraft {
     seconds: typedOf(suggestedSeconds(scenario), timeMeasure(scenario)),
   };
 }
+
+/** Frictions, starts and slopes are looked at evenly; what may be many times as much, in equal ratios. */
+export const usualSpacing = (path: string): Spacing =>
+  /^(contact\.law\.|initial\.|incline)/.test(path) ? "linear" : "log";
 
 export function axisDraftOf(field: ExploreField, scenario: Scenario, spacing: Spacing, count: number): AxisDraft {
   const isFriction = field.path.startsWith("contact.law.") && field.dimension === "none" && field.value <= 1;

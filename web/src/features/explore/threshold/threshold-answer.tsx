@@ -85,9 +85,13 @@ function Analytic({ reading, field }: { reading: ThresholdReading; field: Explor
           key: "difference",
           head: "the search differs",
           isFigure: true,
-          cell: ({ difference }) => (difference === null ? "–" : `${formatNumber(100 * difference, 3)} %`),
+          cell: ({ difference }) => (difference === null ? "–" : differenceWords(difference)),
         },
       ]}
     />
   );
 }
+
+/** A bracket is a ten-thousandth wide: below a thousandth of a percent there is nothing to tell. */
+const differenceWords = (difference: number): string =>
+  Math.abs(difference) < 1e-5 ? "under 0.001 %" : `${formatNumber(100 * difference, 2)} %`;
