@@ -10,6 +10,8 @@ const minutes = (n: number) => n * 60_000;
 
 export default defineConfig({
   test: {
+    // all cores: vitest would keep one for itself, which it hardly uses
+    maxWorkers: "100%",
     projects: [
       // generous: a shared machine may be ten times slower for a while, and no test asserts a time
       project("unit", ["test/solver/**/*.test.ts", "test/laws/**/*.test.ts"], { testTimeout: minutes(1) }),
@@ -33,7 +35,9 @@ export default defineConfig({
         globalSetup: ["test/support/build-setup.ts", "test/support/database-setup.ts"],
         testTimeout: minutes(3),
         hookTimeout: minutes(2),
+        // one after another, after all others: each has a browser and a server beside it
         fileParallelism: false,
+        sequence: { groupOrder: 1 },
       }),
     ],
   },

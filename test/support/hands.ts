@@ -25,6 +25,7 @@ export const mouse: Hands = {
   },
   change: async (page, label, text) => {
     await valueOf(page, label).click();
+    await editorOf(page, label).waitFor();
     await page.keyboard.type(text);
     await editorOf(page, label).getByRole("button", { name: "Done" }).click();
     await editorOf(page, label).waitFor({ state: "detached" });
