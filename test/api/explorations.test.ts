@@ -260,6 +260,13 @@ describe("a plan", () => {
   });
 });
 
+it("is not concluded before its tiles are there, not even when it is begun", async () => {
+  const { id } = await createScenario(ada, projectId);
+  const conclusion = { headline: "Slides smoothly everywhere.", answer: {} };
+  const request = { params: { projectId, scenarioId: id }, body: { ...smallSweep, conclusion } };
+  expect(await ada.fail("createExploration", request)).toMatchObject({ status: 400, fields: [{ path: "conclusion" }] });
+});
+
 it("goes with its scenario into another project, and away with it", async () => {
   const { id } = await begin();
   const toProjectId = (await ada.get<Project>("createProject", { body: { name: "Hall 4", description: "" } })).id;

@@ -1,5 +1,7 @@
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
+import { createAccountsService } from "../../api/src/accounts/accounts-service.ts";
 import type { Member, Project } from "../../api/src/contract.ts";
+import { createMembersService } from "../../api/src/members/members-service.ts";
 import { addMember, createProject, signUp } from "../support/people.ts";
 import { startTestServer, type TestServer } from "../support/test-server.ts";
 
@@ -124,4 +126,21 @@ it("writes each act into the trail", async () => {
     { act: "member.changed", detail: { before: "reader", role: "editor" } },
     { act: "member.removed", account_id: ray.accountId, subject_id: ray.accountId, detail: { before: "editor" } },
   ]);
+});
+
+describe("an owner who is none any more when the change comes to be made", () => {
+  it("changes nobody's role and removes nobody, but may go", async () => {
+    const [una, vic] = [await signUp(server, "Una"), await signUp(server, "Vic")];
+    const projectId = await createProject(una);
+    await addMember(una, projectId, vic.email, "reviewer");
+    const members = createMembersService(server.database, createAccountsService(server.database));
+    await expect(members.change(projectId, una.accountId, "reader", vic.accountId)).rejects.toMatchObject({
+      ...{ status: 403, message: "Your role in this project is reviewer; this takes owner." },
+    });
+    await expect(members.remove(projectId, una.accountId, vic.accountId)).rejects.toMatchObject({ status: 403 });
+    const stranger = crypto.randomUUID();
+    await expect(members.change(projectId, vic.accountId, "owner", stranger)).rejects.toMatchObject({ status: 404 });
+    await members.remove(projectId, vic.accountId, vic.accountId);
+    expect((await members.list(projectId)).map(({ name }) => name)).toEqual(["Una"]);
+  });
 });

@@ -1,4 +1,4 @@
-import { afterAll, beforeAll, describe, expect, it } from "vitest";
+import { afterAll, beforeAll, describe, expect, it, vi } from "vitest";
 import type { ActivityEntry, Notice, Replay, Review, Revision, StoredScenario } from "../../api/src/contract.ts";
 import type { Browser } from "../support/browser.ts";
 import { addMember, createProject, createScenario, signUp, smallScenario } from "../support/people.ts";
@@ -251,4 +251,31 @@ it("keeps the scenario's name with each act", async () => {
   await freeze(bo, scenario);
   const [act] = await ada.get<ActivityEntry[]>("listActivity", { params: { projectId } });
   expect(act).toMatchObject({ act: "revision.frozen", subject: { name: "Tail clamp", isThere: true } });
+});
+
+describe("a role that is lost while its holder waits for others", () => {
+  const isWaiting = async () => {
+    const [rows] = await server.database.raw<[object[]]>(
+      "SELECT trx_id FROM information_schema.innodb_trx WHERE trx_state = 'LOCK WAIT'",
+    );
+    return rows.length > 0;
+  };
+
+  it.each([
+    ["reader", 403],
+    [null, 404],
+  ])("decides nothing any more: now %s", async (role, status) => {
+    const revision = await createRevision(bo, projectId);
+    const others = await server.database.transaction();
+    await others("chains").where({ project_id: projectId }).forUpdate().first();
+    const decision = decide(di, revision, "accept");
+    // The database tells nothing new to who asks more often than ten times a second.
+    await vi.waitUntil(isWaiting, { interval: 200, timeout: 10_000 }).catch(() => others.rollback());
+    const membership = server.database("members").where({ project_id: projectId, account_id: di.accountId });
+    await (role ? membership.clone().update({ role }) : membership.clone().delete());
+    await others.commit();
+    expect((await decision).status).toBe(status);
+    expect(await stateOf(revision)).toBe("open");
+    if (role) await membership.clone().update({ role: "reviewer" });
+  });
 });

@@ -1,3 +1,4 @@
+import { setTimeout as sleep } from "node:timers/promises";
 import { type Database, signingKeyOf } from "../database/database.ts";
 import type { ChainFault, Integrity } from "./chain-schema.ts";
 import { addedTables, nowhere } from "./chained-tables.ts";
@@ -18,7 +19,14 @@ export type ChainService = ReturnType<typeof createChainService>;
 /** Tells whether what is only ever added to is as it was written. */
 export function createChainService(database: Database) {
   const walkAll = sparing(() => walkEverything(database));
+  const walks = new Map<string, Promise<Walk>>();
   let guarded: Promise<boolean> | null = null;
+
+  function walkOnce(projectId: string): Promise<Walk> {
+    const walk = walks.get(projectId) ?? walkChain(database, projectId).finally(() => walks.delete(projectId));
+    walks.set(projectId, walk);
+    return walk;
+  }
 
   /** Tried once: rights of an account do not change under a running server. */
   const isGuarded = () => (guarded ??= refusesChanges(database).catch(forgetGuard));
@@ -34,9 +42,9 @@ export function createChainService(database: Database) {
     /** The chains of all projects. Not older than twenty times what it takes; `isFresh`: as they are now. */
     readAll: ({ isFresh }: { isFresh: boolean }): Promise<WholeWalk> => walkAll(isFresh),
 
-    /** The chain of one project, as it is now. */
+    /** The chain of one project, as it is now; who asks while somebody else does gets the same. */
     async read(projectId: string): Promise<Integrity> {
-      const { rows, faults } = await walkChain(database, projectId);
+      const { rows, faults } = await walkOnce(projectId);
       return {
         isWhole: faults.length === 0,
         checkedAt: new Date().toISOString(),
@@ -63,19 +71,23 @@ async function walkEverything(database: Database): Promise<WholeWalk> {
   };
 }
 
-/** Repeats work only after a rest in proportion to what it took, and never twice at the same time. */
+/**
+ * Repeats work only after a rest in proportion to what it took, and never twice at the same time. Who wants it fresh waits at
+ * least as long as it took: anybody may ask, and is to take half of the database's time at most.
+ */
 function sparing<T>(work: () => Promise<T>): (isFresh: boolean) => Promise<T> {
   let running: Promise<T> | null = null;
-  let last: { value: T; until: number } | null = null;
+  let last: { value: T; ended: number; took: number } | null = null;
   const run = async () => {
+    if (last) await sleep(last.ended + last.took - performance.now());
     const began = performance.now();
     const value = await work();
     const ended = performance.now();
-    last = { value, until: ended + REST * (ended - began) };
+    last = { value, ended, took: ended - began };
     return value;
   };
   return (isFresh) => {
-    if (!isFresh && last && performance.now() < last.until) return Promise.resolve(last.value);
+    if (!isFresh && last && performance.now() < last.ended + REST * last.took) return Promise.resolve(last.value);
     return (running ??= run().finally(() => (running = null)));
   };
 }

@@ -68,7 +68,7 @@ async function freezeAndAsk(
   const result = run(content);
   const body = { digest, units: "millimetre" as const, result: keptResultOf(result), trace: traceOf(result.samples!) };
   const revision = await revisions.freeze({ projectId, scenarioId }, version, body, maker.id);
-  const actor = { account: maker, role: "owner" as const };
+  const actor = { account: maker };
   await reviews.ask(placeOf(revision), { reviewers: [reviewer.id], message }, actor);
   return revision;
 }
@@ -91,7 +91,7 @@ function decide(
   decision: Pick<Parameters<DecisionsService["decide"]>[1], "decision" | "reasons" | "checklist">,
 ): Promise<void> {
   // Nobody types it here: who seeds the demo knows the password of all its people.
-  const signer = { account: reviewer, role: "reviewer" as const, confirm: () => Promise.resolve() };
+  const signer = { account: reviewer, confirm: () => Promise.resolve() };
   const given = { ...decision, digest: revision.digest, replayId, password: "" };
   return decisions.decide(placeOf(revision), given, signer);
 }

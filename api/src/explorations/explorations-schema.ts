@@ -39,6 +39,10 @@ export const explorationDraftSchema = z
     /** Where it is answered already. */
     conclusion: conclusionSchema.optional(),
   })
+  .refine(({ kind, conclusion }) => kind === "search" || conclusion === undefined, {
+    path: ["conclusion"],
+    message: "Only a search is answered before its cells are there.",
+  })
   .refine(({ tileCells }) => countOf(tileCells) <= mostCells, {
     path: ["tileCells"],
     message: `No more than ${mostCells} cells.`,

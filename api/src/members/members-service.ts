@@ -2,7 +2,7 @@ import type { z } from "@restband/solver";
 import type { AccountsService } from "../accounts/accounts-service.ts";
 import { recordAct } from "../activity/activity-service.ts";
 import type { Database } from "../database/database.ts";
-import { notFound, Refusal, refusedContent } from "../errors.ts";
+import { notAllowed, notFound, Refusal, refusedContent } from "../errors.ts";
 import type { Member, memberAddSchema, Role } from "./members-schema.ts";
 import {
   deleteMember,
@@ -47,7 +47,7 @@ export function createMembersService(database: Database, accounts: AccountsServi
 
     async change(projectId: string, accountId: string, role: Role, by: string): Promise<Member> {
       await database.transaction(async (transaction) => {
-        const before = await lockMember(transaction, projectId, accountId, role);
+        const before = await lockMember(transaction, { projectId, accountId, by }, role);
         await updateMember(transaction, projectId, accountId, role);
         await recordAct(transaction, {
           projectId,
@@ -63,7 +63,7 @@ export function createMembersService(database: Database, accounts: AccountsServi
     /** Removes a member, by an owner or by itself. */
     async remove(projectId: string, accountId: string, by: string): Promise<void> {
       await database.transaction(async (transaction) => {
-        const before = await lockMember(transaction, projectId, accountId, null);
+        const before = await lockMember(transaction, { projectId, accountId, by }, null);
         await deleteMember(transaction, projectId, accountId);
         await recordAct(transaction, {
           projectId,
@@ -82,14 +82,19 @@ export function membersIn(transaction: Database, projectId: string): Promise<Mem
   return listMembers(transaction, projectId);
 }
 
-/** Locks the members until the transaction ends and makes sure that an owner is left once one of them has its next role. */
+/**
+ * Locks the members until the transaction ends and makes sure that who asks is an owner still, and that an owner is left once
+ * the member has its next role. Anybody may go.
+ */
 async function lockMember(
   transaction: Database,
-  projectId: string,
-  accountId: string,
+  { projectId, accountId, by }: { projectId: string; accountId: string; by: string },
   next: Role | null,
 ): Promise<Role> {
   const roles = await lockRoles(transaction, projectId);
+  const asking = roles.get(by) ?? noSuchMember();
+  const isGoing = by === accountId && next === null;
+  if (asking !== "owner" && !isGoing) throw notAllowed(`Your role in this project is ${asking}; this takes owner.`);
   const before = roles.get(accountId) ?? noSuchMember();
   const owners = [...roles.values()].filter((role) => role === "owner").length;
   if (before === "owner" && next !== "owner" && owners === 1) {

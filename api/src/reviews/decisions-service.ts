@@ -3,13 +3,13 @@ import { recordAct } from "../activity/activity-service.ts";
 import type { Act } from "../activity/activity.ts";
 import { holdChain } from "../chain/chain.ts";
 import type { Database } from "../database/database.ts";
-import { Refusal, refusedContent } from "../errors.ts";
+import { notAllowed, Refusal, refusedContent } from "../errors.ts";
 import { endWaiting, tell } from "../notices/notices-service.ts";
 import type { RevisionPlace, RevisionsService } from "../revisions/revisions-service.ts";
 import type { Revision } from "../revisions/revisions-schema.ts";
 import { demandAnswers } from "./checklist-rules.ts";
 import { findChecklist } from "./checklists-store.ts";
-import { demandAlone, demandForeign, demandUndecided, type Standpoint } from "./review-rules.ts";
+import { demandAlone, demandDecider, demandMaker, demandUndecided, type Standpoint } from "./review-rules.ts";
 import type { Checklist, Decision, decideSchema, withdrawSchema } from "./reviews-schema.ts";
 import { insertDecision, listDecisions, listRequests, type NewDecision } from "./reviews-store.ts";
 import type { Actor, ReadStandpoint } from "./standpoint.ts";
@@ -67,7 +67,7 @@ export function createDecisionsService(
      */
     decide(place: RevisionPlace, { decision, ...given }: Decide, signer: Signer): Promise<void> {
       return decide(place, signer, { kind: decision, ...given }, (standpoint, checklist) => {
-        demandForeign(standpoint.revision, signer.account);
+        demandDecider(standpoint);
         demandUndecided(standpoint.revision, standpoint.decisions);
         demandAnswers(given.checklist, checklist, { isAccepting: decision === "accept" });
       });
@@ -76,6 +76,7 @@ export function createDecisionsService(
     /** Marks one's own revision as looked through by oneself, where nobody else in the project could. */
     selfCheck(place: RevisionPlace, given: Omit<Decide, "decision">, signer: Signer): Promise<void> {
       return decide(place, signer, { kind: "self-check", ...given }, (standpoint, checklist) => {
+        demandMaker(standpoint);
         demandAlone(standpoint);
         demandUndecided(standpoint.revision, standpoint.decisions);
         demandAnswers(given.checklist, checklist, { isAccepting: true });
@@ -85,7 +86,8 @@ export function createDecisionsService(
     /** Takes a revision back for good. Everything said to it stays. */
     withdraw(place: RevisionPlace, given: z.infer<typeof withdrawSchema>, signer: Signer): Promise<void> {
       const decision: Signed = { kind: "withdraw", replayId: null, checklist: [], ...given };
-      return decide(place, signer, decision, ({ revision: { state } }) => {
+      return decide(place, signer, decision, ({ role, revision: { state } }) => {
+        if (role !== "owner") throw notAllowed(`Your role in this project is ${role}; this takes owner.`);
         if (state !== "returned" && state !== "withdrawn") return;
         throw new Refusal(409, "decided", `This revision is ${state} already.`);
       });

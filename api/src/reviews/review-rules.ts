@@ -1,4 +1,3 @@
-import type { Account } from "../accounts/accounts-schema.ts";
 import { notAllowed, Refusal } from "../errors.ts";
 import type { Member, Role } from "../members/members-schema.ts";
 import type { Revision, RevisionState } from "../revisions/revisions-schema.ts";
@@ -44,9 +43,11 @@ export function mayOf(standpoint: Standpoint, candidates: number): Review["may"]
 /** Why somebody may not decide, as a sentence; null where they may. */
 export function hindranceOf({ accountId, role, revision, decisions }: Standpoint): string | null {
   if (!undecided.has(revision.state)) return decidedSentence(decisions);
-  if (!deciders.includes(role)) return `Your role in this project is ${role}; owners and reviewers decide.`;
+  if (!deciders.includes(role)) return roleSentence(role);
   return isOwn(revision, accountId) ? ownSentence : null;
 }
+
+const roleSentence = (role: Role) => `Your role in this project is ${role}; owners and reviewers decide.`;
 
 const ownSentence =
   "This is your own work: you froze it, or saved a change in it since the last accepted revision. Somebody else decides.";
@@ -59,9 +60,15 @@ function selfCheckHindrance({ accountId, revision, members }: Standpoint): strin
   return `${others.join(", ")} can decide on it. Self-checked is for work that nobody else in the project can look at.`;
 }
 
-/** @throws Refusal 403 for one's own work */
-export function demandForeign(revision: Revision, { id }: Account): void {
-  if (isOwn(revision, id)) throw notAllowed(ownSentence);
+/** @throws Refusal 403 for a role that does not decide, and for one's own work */
+export function demandDecider({ role, revision, accountId }: Standpoint): void {
+  if (!deciders.includes(role)) throw notAllowed(roleSentence(role));
+  if (isOwn(revision, accountId)) throw notAllowed(ownSentence);
+}
+
+/** @throws Refusal 403 for a role that makes nothing that others decide on */
+export function demandMaker({ role }: Standpoint): void {
+  if (!makers.includes(role)) throw notAllowed(`Your role in this project is ${role}; this takes owner or editor.`);
 }
 
 /** @throws Refusal 403 for work that is not one's own, or that somebody else could decide on */

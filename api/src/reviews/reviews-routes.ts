@@ -19,9 +19,8 @@ export function reviewsRoutes(
   decisions: DecisionsService,
   sessions: SessionsService,
 ): HandlersOf<Names> {
-  const signer = ({ account, role, request }: Actor & { request: Request }): Signer => ({
+  const signer = ({ account, request }: Actor & { request: Request }): Signer => ({
     account,
-    role,
     confirm: (password) => sessions.confirm(request, account, password),
   });
   return {

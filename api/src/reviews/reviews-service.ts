@@ -8,7 +8,15 @@ import { tell } from "../notices/notices-service.ts";
 import type { RevisionPlace } from "../revisions/revisions-service.ts";
 import type { Revision } from "../revisions/revisions-schema.ts";
 import { findChecklist, saveChecklist } from "./checklists-store.ts";
-import { decidersOf, demandUndecided, hindranceOf, isOwn, mayOf, type Standpoint } from "./review-rules.ts";
+import {
+  decidersOf,
+  demandMaker,
+  demandUndecided,
+  hindranceOf,
+  isOwn,
+  mayOf,
+  type Standpoint,
+} from "./review-rules.ts";
 import type { askSchema, Checklist, Review } from "./reviews-schema.ts";
 import { insertRequest, listRequests } from "./reviews-store.ts";
 import type { Actor, ReadStandpoint } from "./standpoint.ts";
@@ -39,6 +47,7 @@ export function createReviewsService(database: Database, readStandpoint: ReadSta
       return database.transaction(async (transaction) => {
         await holdChain(transaction, place.projectId);
         const standpoint = await readStandpoint(transaction, place, actor);
+        demandMaker(standpoint);
         demandUndecided(standpoint.revision, standpoint.decisions);
         demandAskable(reviewers, standpoint, await listRequests(transaction, place.revisionId));
         const by = actor.account.id;

@@ -39,12 +39,12 @@ export function createRevisionsService(database: Database, recompute: Recompute)
     return {
       ...{ projectId, scenarioId, scenarioVersion: seen, title: stored.content.title, text, digest: stored.digest },
       ...{ units: freeze.units, withoutOrigin: pathsWithoutOrigin(stored.content), frozenBy },
-      ...(await outcomeOf(stored.content, freeze)),
+      ...(await outcomeOf(stored.content, freeze, frozenBy)),
     };
   }
 
-  async function outcomeOf(scenario: Scenario, { result: claimed, trace }: Freeze) {
-    const own = await recompute({ scenario, claimed });
+  async function outcomeOf(scenario: Scenario, { result: claimed, trace }: Freeze, accountId: string) {
+    const own = await recompute({ scenario, claimed }, accountId);
     if (own === null) return { isRecomputed: false, isSensitive: false, result: claimed, trace };
     if ("message" in own) throw refusedContent("not-computed", [{ path: `content.${own.path}`, message: own.message }]);
     if (own.agreement.verdict === "differs")
