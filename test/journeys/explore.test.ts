@@ -96,6 +96,9 @@ it("a sweep of two fields fills, is kept over a reload, and a reader sees the sa
   const before = await map.textContent();
   await map.press("ArrowRight");
   await expect.poll(() => map.textContent()).not.toBe(before);
+  await page.getByRole("button", { name: "Open as scenario" }).waitFor();
+  await map.press("Enter");
+  await page.waitForURL(/scenarios\/(?!.*explore)/);
 });
 
 it("a study lets values scatter by a covariance that is pasted, and says how likely the limit is kept", async () => {

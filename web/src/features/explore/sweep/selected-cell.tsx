@@ -9,6 +9,9 @@ import { exploreField } from "../explore-field.ts";
 import { CellTraces } from "./cell-traces.tsx";
 import type { SweepCells } from "./sweep-cells.ts";
 
+/** The button that opens the cell: Enter in the map presses it. */
+export const openCellId = "open-cell";
+
 interface SelectedCellProps extends ExploreFrame {
   plan: SweepPlan;
   cells: SweepCells;
@@ -50,7 +53,7 @@ export function SelectedCell({ scenario, plan, cells, cell, answer, open, compar
       {own && (open || compare) && (
         <div className="mt-4 flex flex-wrap gap-3">
           {open && (
-            <Button kind="primary" onClick={() => open(own, values)}>
+            <Button id={openCellId} kind="primary" onClick={() => open(own, values)}>
               Open as scenario
             </Button>
           )}

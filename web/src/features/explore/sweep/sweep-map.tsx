@@ -73,6 +73,7 @@ export function SweepMap(props: SweepMapProps) {
           className="absolute inset-0 forced-color-adjust-none"
           aria-hidden="true"
         >
+          {!asStrips && <Rim frame={frame} />}
           {asStrips && <StripCells {...{ cells, frame, first, edition }} />}
           {shown.kind === "quantity" && up && <Contours {...{ cells, frame, first, shown, edition }} />}
           {up && <MapLines {...{ frame, across, up, shown, lines, scenario }} taken={labels} />}
@@ -109,6 +110,12 @@ function selectionWords({ selected, cells, first, across, up }: SweepMapProps): 
   const and = up ? `, ${up.name} ${up.text(up.values[row])} ${up.unit.label}` : "";
   const what = !figures ? "still to come" : figures.outcome ? outcomeWords[figures.outcome] : "no answer";
   return `Selected: ${at}${and}: ${what}.`;
+}
+
+/** Where the map is, also before any of its cells is. */
+function Rim({ frame: { left, top, columns, cellWidth, rows, cellHeight } }: { frame: MapFrame }) {
+  const box = { x: left, y: top, width: columns * cellWidth, height: rows * cellHeight };
+  return <rect {...box} className="fill-none stroke-line" />;
 }
 
 function Selection({ frame, cell }: { frame: MapFrame; cell: number }) {

@@ -14,7 +14,7 @@ import { axisScale } from "./axis-scale.ts";
 import { MapChoice } from "./map-choice.tsx";
 import { MapLegend } from "./map-legend.tsx";
 import { MapNotes } from "./map-notes.tsx";
-import { SelectedCell } from "./selected-cell.tsx";
+import { openCellId, SelectedCell } from "./selected-cell.tsx";
 import { useShown } from "./shown.ts";
 import { SolveElsewhere } from "./solve-elsewhere.tsx";
 import { sweepCsv } from "./sweep-csv.ts";
@@ -102,7 +102,7 @@ export function SweepView({ projectId, stored, canEdit, answer, open, compare }:
                 {...{ cells, scenario, across, up, first, shown, selected, edition }}
                 lines={lines.shown.lines}
                 onSelect={setSelected}
-                onOpen={open && (() => document.getElementById("open-cell")?.click())}
+                onOpen={open && (() => document.getElementById(openCellId)?.click())}
               />
               <MapLegend shown={shown} cells={cells} quantity={choice} scenario={scenario} edition={edition} />
               <MapNotes found={lines.shown} shown={shown} plan={plan} scenario={scenario} />
