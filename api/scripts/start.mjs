@@ -68,12 +68,13 @@ async function openAndKeep(atEnd) {
   return database;
 }
 
-async function prepare({ urls, grantTo }, isReset) {
+async function prepare({ urls, grantTo, seenEnds }, isReset) {
   const env = {
     RESTBAND_MIGRATIONS_URL: urls.migrations,
     RESTBAND_GRANT_TO: grantTo,
     RESTBAND_DEMO_PASSWORD: demoPassword(),
     RESTBAND_SIGNING_KEY: signingKey(),
+    RESTBAND_SEEN_ENDS: seenEnds,
   };
   const args = [join(root, "api/dist/prepare.js"), ...(isReset ? ["--reset-demo"] : [])];
   const output = await run(process.execPath, args, { quiet: true, env });
@@ -92,6 +93,7 @@ async function serve({ database, host, port }, atEnd) {
       RESTBAND_DATABASE_URL: database.urls.server,
       RESTBAND_SESSION_SECRET: sessionSecret(),
       RESTBAND_SIGNING_KEY: signingKey(),
+      RESTBAND_SEEN_ENDS: database.seenEnds,
       RESTBAND_WEB_ROOT: join(root, "web/dist"),
     },
   });

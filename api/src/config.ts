@@ -13,6 +13,8 @@ const environmentSchema = z.object({
   RESTBAND_SIGNING_KEY: z.string(),
   /** Fingerprints of keys that signed before this one, with commas between them. */
   RESTBAND_FORMER_FINGERPRINTS: z.string().default(""),
+  /** Where the ends of trails are kept that were seen, outside the database. Empty: for as long as the process lasts. */
+  RESTBAND_SEEN_ENDS: z.string().default(""),
   /** The built pages. */
   RESTBAND_WEB_ROOT: z.string().optional(),
   /** What express calls `trust proxy`: how many proxies stand in front, or their addresses. Empty: none. */
@@ -32,6 +34,7 @@ export interface Config {
   readonly databaseUrl: string;
   readonly sessionSecret: string;
   readonly signingKey: SigningKey;
+  readonly seenEndsFile: string | null;
   readonly webRoot: string | null;
   readonly trustProxy: string | number | false;
   readonly logLevel: string;
@@ -62,6 +65,7 @@ export function readConfig(environment: NodeJS.ProcessEnv): Config {
     databaseUrl: data.RESTBAND_DATABASE_URL,
     sessionSecret: data.RESTBAND_SESSION_SECRET,
     signingKey: openSigningKey(data.RESTBAND_SIGNING_KEY, listed(data.RESTBAND_FORMER_FINGERPRINTS)),
+    seenEndsFile: data.RESTBAND_SEEN_ENDS || null,
     webRoot: data.RESTBAND_WEB_ROOT ?? null,
     trustProxy: trustProxyOf(data.RESTBAND_TRUST_PROXY),
     logLevel: data.RESTBAND_LOG_LEVEL,

@@ -1,5 +1,6 @@
 import { parseArgs } from "node:util";
 import { signHeads } from "./chain/chain.ts";
+import { openSeenEnds } from "./chain/seen-ends.ts";
 import { openSigningKey } from "./chain/signing-key.ts";
 import { openDatabase } from "./database/database.ts";
 import { grantToServer } from "./database/grants.ts";
@@ -20,6 +21,7 @@ const {
   RESTBAND_GRANT_TO: grantTo,
   RESTBAND_DEMO_PASSWORD: password,
   RESTBAND_SIGNING_KEY: key,
+  RESTBAND_SEEN_ENDS: seenEndsFile,
 } = process.env;
 if (!url || !password || !key) {
   throw new Error("RESTBAND_MIGRATIONS_URL, RESTBAND_DEMO_PASSWORD and RESTBAND_SIGNING_KEY have to be set.");
@@ -32,7 +34,7 @@ try {
   if (migrated.includes("20261201101000-chain-activity")) await signHeads(database);
   await removeUnusedRecords(database);
   if (grantTo) await grantToServer(database, grantTo);
-  if (options["reset-demo"]) await removeDemo(database);
+  if (options["reset-demo"]) openSeenEnds(seenEndsFile || null).forget(await removeDemo(database));
   if (options["reset-demo"] || (await isEmpty())) await seedDemo(database, password);
   console.log(JSON.stringify({ migrated, demoPeople: await findDemoPeople() }));
 } finally {

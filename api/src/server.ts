@@ -1,6 +1,7 @@
 import { createServer, type Server } from "node:http";
 import type { AddressInfo } from "node:net";
 import { createApp } from "./app.ts";
+import { openSeenEnds } from "./chain/seen-ends.ts";
 import { readConfig } from "./config.ts";
 import { openDatabase } from "./database/database.ts";
 import { createLog } from "./middleware/request-log.ts";
@@ -10,7 +11,7 @@ const GRACE_MILLISECONDS = 5000;
 
 const config = readConfig(process.env);
 const log = createLog(config.logLevel);
-const database = openDatabase(config.databaseUrl, config.signingKey);
+const database = openDatabase(config.databaseUrl, config.signingKey, openSeenEnds(config.seenEndsFile));
 
 if (!(await isReady(database))) throw new Error("The database lacks migrations: npm start carries them out.");
 const server = await listen(createServer(createApp(config, database, log)));

@@ -1,6 +1,10 @@
-import { afterAll, beforeAll, beforeEach, describe, expect, it } from "vitest";
+import { mkdtemp, rm } from "node:fs/promises";
+import { tmpdir } from "node:os";
+import { join } from "node:path";
+import { afterAll, beforeAll, beforeEach, describe, expect, it, vi } from "vitest";
 import { createChainService } from "../../api/src/chain/chain-service.ts";
 import { signHeads } from "../../api/src/chain/chain.ts";
+import { openSeenEnds } from "../../api/src/chain/seen-ends.ts";
 import { openSigningKey } from "../../api/src/chain/signing-key.ts";
 import type { Comment, Integrity, Review, Revision } from "../../api/src/contract.ts";
 import { openDatabase } from "../../api/src/database/database.ts";
@@ -100,7 +104,10 @@ describe("the chain", () => {
     expect(await faults()).toEqual([`chains: ${last.sequence} rows were added, ${last.sequence - 1} are there.`]);
     const head = { sequence: last.sequence - 1, hash: last.previous_hash };
     await server.database("chains").where({ project_id: projectId }).update(head);
-    expect(await faults()).toEqual(["chains: Its signature does not fit."]);
+    expect(await faults()).toEqual([
+      "chains: Its signature does not fit.",
+      `chains: ${last.sequence} rows were there when it was last looked at, ${last.sequence - 1} are left.`,
+    ]);
   });
 
   it("shows rows that were changed and hashed anew, signed with another key or not at all", async () => {
@@ -114,6 +121,61 @@ describe("the chain", () => {
     expect(await faults()).toEqual([
       `decisions: It is signed with a key this server does not know, ${other.fingerprint}.`,
     ]);
+  });
+});
+
+describe("a trail that was put back", () => {
+  const tables = ["activity", "revisions", "replays", "review_requests", "decisions", "comments"];
+  const headOf = () => server.database("chains").where({ project_id: projectId });
+
+  it("to an end that was signed, with all that came after it gone, is shown", async () => {
+    const before = await headOf().first<object & { sequence: number }>();
+    await createScenario(ada, projectId);
+    await createScenario(ada, projectId);
+    await server.database("activity").where({ project_id: projectId }).where("sequence", ">", before.sequence).delete();
+    await headOf().update(before);
+    const { sequence } = before;
+    const lost = `chains: ${sequence + 2} rows were there when it was last looked at, ${sequence} are left.`;
+    expect(await faults()).toEqual([lost]);
+    // Written on from there it is as long again, and other than it was.
+    await createScenario(ada, projectId);
+    await createScenario(ada, projectId);
+    expect(await faults()).toEqual(["activity: Another row stood at this place when it was last looked at."]);
+  });
+
+  it("or is gone with its project and its end, is shown", async () => {
+    for (const table of [...tables, "chains", "checklists", "scenarios", "members", "notices"])
+      await server.database(table).where({ project_id: projectId }).delete();
+    await server.database("projects").where({ id: projectId }).delete();
+    const { ready: isReady, chain } = await ready();
+    const own = chain.faults.filter((fault) => fault.projectId === projectId);
+    expect(isReady).toBe(false);
+    expect(own.map(({ message }) => message)).toEqual([
+      "There is no end of the chain.",
+      expect.stringMatching(/^\d+ rows were there when it was last looked at, 0 are left\.$/),
+    ]);
+  });
+
+  it("is shown by the next process too, which has seen nothing itself", async () => {
+    const folder = await mkdtemp(join(tmpdir(), "restband-"));
+    const seenEndsFile = join(folder, "seen-ends.json");
+    const own = await createTestDatabase();
+    const first = await startTestServer({ databaseUrl: own.url, seenEndsFile });
+    const owner = await signUp(first, "Ona");
+    const id = await createProject(owner);
+    const before = await own.database("chains").where({ project_id: id }).first<{ sequence: number }>();
+    await createScenario(owner, id);
+    await vi.waitUntil(() => openSeenEnds(seenEndsFile).of(id)?.sequence === before.sequence + 1, { interval: 50 });
+    await first.stop();
+    await own.database("activity").where({ project_id: id }).where("sequence", ">", before.sequence).delete();
+    await own.database("chains").where({ project_id: id }).update(before);
+    const next = await startTestServer({ databaseUrl: own.url, seenEndsFile });
+    const { body } = await next.browser().send<Ready>("GET", "/ready?deep");
+    expect(body.chain.faults.map((fault) => fault.projectId)).toEqual([id]);
+    expect(body.chain.faults[0].message).toMatch(/^\d+ rows were there/);
+    await next.stop();
+    await own.drop();
+    await rm(folder, { recursive: true });
   });
 });
 

@@ -1,6 +1,7 @@
 import { createServer } from "node:http";
 import type { AddressInfo } from "node:net";
 import { createApp } from "../../api/src/app.ts";
+import { openSeenEnds } from "../../api/src/chain/seen-ends.ts";
 import { type Config, defaultLimits } from "../../api/src/config.ts";
 import { type Database, openDatabase } from "../../api/src/database/database.ts";
 import { createLog } from "../../api/src/middleware/request-log.ts";
@@ -28,6 +29,7 @@ export async function startTestServer(settings: Partial<Config> = {}): Promise<T
     databaseUrl: own?.url ?? "",
     sessionSecret: "a secret that signs the cookies of tests",
     signingKey: testKey,
+    seenEndsFile: null,
     webRoot: null,
     trustProxy: false,
     logLevel: "info",
@@ -35,7 +37,7 @@ export async function startTestServer(settings: Partial<Config> = {}): Promise<T
     ...settings,
   };
   const log: string[] = [];
-  const database = openDatabase(config.databaseUrl, config.signingKey);
+  const database = openDatabase(config.databaseUrl, config.signingKey, openSeenEnds(config.seenEndsFile));
   const server = createServer(createApp(config, database, createLog("info", { write: (line) => void log.push(line) })));
   await new Promise<void>((resolve) => server.listen(config.port, config.host, resolve));
   const address = `http://127.0.0.1:${(server.address() as AddressInfo).port}`;

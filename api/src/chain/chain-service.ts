@@ -1,5 +1,5 @@
 import { setTimeout as sleep } from "node:timers/promises";
-import { type Database, signingKeyOf } from "../database/database.ts";
+import { type Database, seenEndsOf, signingKeyOf } from "../database/database.ts";
 import type { ChainFault, Integrity } from "./chain-schema.ts";
 import { addedTables, nowhere } from "./chained-tables.ts";
 import { type Walk, walkChain } from "./walk.ts";
@@ -61,7 +61,8 @@ async function walkEverything(database: Database): Promise<WholeWalk> {
   const checkedAt = new Date();
   const projects = await database("projects").select<{ id: string }[]>("id");
   const heads = await database("chains").select<{ project_id: string }[]>("project_id");
-  const ids = new Set([...projects.map(({ id }) => id), ...heads.map(({ project_id: id }) => id), nowhere]);
+  const there = [...projects.map(({ id }) => id), ...heads.map(({ project_id: id }) => id)];
+  const ids = new Set([...there, ...seenEndsOf(database).projects(), nowhere]);
   const walks: Walk[] = [];
   for (const id of ids) walks.push(await walkChain(database, id === nowhere ? null : id));
   return {

@@ -1,5 +1,7 @@
-import { type Database, signingKeyOf } from "../database/database.ts";
+import type { Knex } from "knex";
+import { type Database, seenEndsOf, signingKeyOf } from "../database/database.ts";
 import { type ChainedTable, nowhere, signedTables } from "./chained-tables.ts";
+import type { SeenEnd } from "./seen-ends.ts";
 import { hashOf, type Row, signedHeadText, signedRowText } from "./link.ts";
 
 interface Head {
@@ -40,6 +42,13 @@ export async function append(transaction: Database, table: ChainedTable, row: Ro
   const signed = signedTables.has(table) ? signature(transaction, signedRowText(table, hash)) : {};
   await transaction(table).insert({ ...row, ...link, ...signed });
   await moveHead(transaction, projectId ?? nowhere, { sequence: place.sequence, hash });
+  noteOnceDone(transaction, projectId ?? nowhere, { sequence: place.sequence, hash: hash.toString("hex") });
+}
+
+/** Notes an end once its transaction stands; one that is taken back was never seen. */
+function noteOnceDone(transaction: Database, projectId: string, end: SeenEnd): void {
+  const note = () => seenEndsOf(transaction).note(projectId, end);
+  (transaction as Knex.Transaction).executionPromise.then(note, () => undefined);
 }
 
 async function moveHead(transaction: Database, projectId: string, { sequence, hash }: Head): Promise<void> {

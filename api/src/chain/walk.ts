@@ -1,8 +1,9 @@
-import { type Database, signingKeyOf } from "../database/database.ts";
+import { type Database, seenEndsOf, signingKeyOf } from "../database/database.ts";
 import { digestsIn, recordFaults } from "../records/records-service.ts";
 import type { ChainFault } from "./chain-schema.ts";
 import { type ChainedTable, chainedTables, nowhere, signedTables } from "./chained-tables.ts";
 import { hashOf, type Row, signedHeadText, signedRowText } from "./link.ts";
+import type { SeenEnd } from "./seen-ends.ts";
 import { fingerprintOf, isSignedBy, type SigningKey } from "./signing-key.ts";
 
 /** Rows of one table read at a time. */
@@ -29,19 +30,30 @@ interface Found {
 export interface Walk {
   readonly rows: number;
   readonly faults: readonly ChainFault[];
+  /** Null where the chain has none. */
+  readonly end: SeenEnd | null;
 }
 
 /**
  * Goes through the whole chain of a project, oldest row first: each row at its place, as it was when its hash was made, after
- * the row it names, signed where its table asks for it; and the end where its signed head says. Reads one state of the
- * database, so that what is added meanwhile is no fault.
+ * the row it names, signed where its table asks for it; and the end where its signed head says, no less far than it was seen
+ * before. Reads one state of the database, so that what is added meanwhile is no fault.
  */
 export async function walkChain(database: Database, projectId: string | null): Promise<Walk> {
+  const seenEnds = seenEndsOf(database);
+  // Before the database is read: what is seen afterwards may be newer than what is read.
+  const seen = seenEnds.of(projectId ?? nowhere);
+  const walk = await walkFrom(database, projectId, seen);
+  if (walk.end && walk.faults.length === 0) seenEnds.note(projectId ?? nowhere, walk.end);
+  return walk;
+}
+
+function walkFrom(database: Database, projectId: string | null, seen: SeenEnd | undefined): Promise<Walk> {
   return database.transaction(async (transaction) => {
     const head = await transaction("chains")
       .where({ project_id: projectId ?? nowhere })
       .first<Head>();
-    const walker = new Walker(projectId, signingKeyOf(database));
+    const walker = new Walker(projectId, signingKeyOf(database), seen);
     if (!head) return walker.lacksHead();
     for (let from = 1; from <= head.sequence; from += STRIDE) {
       const found = await linksOf(transaction, projectId, from, from + STRIDE);
@@ -71,6 +83,7 @@ async function linksOf(database: Database, projectId: string | null, from: numbe
 class Walker {
   readonly #projectId: string | null;
   readonly #key: SigningKey;
+  readonly #seen: SeenEnd | undefined;
   readonly #faults: ChainFault[] = [];
   /** Digests of the records that what was frozen names. */
   readonly records: string[] = [];
@@ -79,9 +92,10 @@ class Walker {
   /** Of the row passed last; null where that one is gone. */
   #hash: Buffer | null = Buffer.alloc(32);
 
-  constructor(projectId: string | null, key: SigningKey) {
+  constructor(projectId: string | null, key: SigningKey, seen: SeenEnd | undefined) {
     this.#projectId = projectId;
     this.#key = key;
+    this.#seen = seen;
   }
 
   pass({ table, row }: Found): void {
@@ -90,6 +104,8 @@ class Walker {
     this.#noteGap(row.sequence);
     if (this.#hash && !row.previous_hash.equals(this.#hash)) note("It does not follow the row before it.");
     for (const fault of rowFaults(table, row, this.#key)) note(fault);
+    if (row.sequence === this.#seen?.sequence && row.hash.toString("hex") !== this.#seen.hash)
+      note("Another row stood at this place when it was last looked at.");
     if (table === "revisions") this.records.push(...digestsIn(String(row.content)));
     this.#rows += 1;
     this.#sequence = row.sequence;
@@ -118,16 +134,26 @@ class Walker {
     else if (this.#hash && !head.hash.equals(this.#hash)) note("The last row is not the one that was added last.");
     const text = signedHeadText(this.#projectId ?? nowhere, head.sequence, head.hash);
     for (const fault of signatureFaults(head, text, this.#key)) note(fault);
-    return this.#walk();
+    this.#noteLoss(head.sequence);
+    return this.#walk({ sequence: head.sequence, hash: head.hash.toString("hex") });
+  }
+
+  /** Rows that are gone together with the end that told of them. */
+  #noteLoss(sequence: number): void {
+    const before = this.#seen?.sequence ?? 0;
+    if (before <= sequence) return;
+    const message = `${before} rows were there when it was last looked at, ${sequence} are left.`;
+    this.#note({ table: "chains", id: null, sequence, message });
   }
 
   lacksHead(): Walk {
     this.#note({ table: "chains", id: null, sequence: 0, message: "There is no end of the chain." });
-    return this.#walk();
+    this.#noteLoss(0);
+    return this.#walk(null);
   }
 
-  #walk(): Walk {
-    return { rows: this.#rows, faults: this.#faults };
+  #walk(end: SeenEnd | null): Walk {
+    return { rows: this.#rows, faults: this.#faults, end };
   }
 
   #note(fault: Omit<ChainFault, "projectId">): void {

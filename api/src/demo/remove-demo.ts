@@ -5,10 +5,11 @@ import { demoPeople } from "./demo-people.ts";
 
 /**
  * Takes the demo away again: the projects that people of the demo own, all that is in them, and the people themselves
- * where no other project has them. Needs the migrations account, for the trail of those projects goes too.
+ * where no other project has them. Needs the migrations account, for the trail of those projects goes too. Returns the ids
+ * of the projects.
  */
-export async function removeDemo(database: Database): Promise<void> {
-  await database.transaction(async (transaction) => {
+export function removeDemo(database: Database): Promise<string[]> {
+  return database.transaction(async (transaction) => {
     const people = await peopleOf(transaction);
     const projects = transaction("members")
       .whereIn("account_id", people)
@@ -19,6 +20,7 @@ export async function removeDemo(database: Database): Promise<void> {
       await transaction(table).whereIn("project_id", ids).delete();
     await transaction("projects").whereIn("id", ids).delete();
     await removePeople(transaction, people);
+    return ids;
   });
 }
 
