@@ -108,6 +108,7 @@ class AnswerReader {
     const first = this.isAnswered.indexOf(0);
     if (first < 0) return [];
     const count = this.isAnswered.reduce((sum, is) => sum + 1 - is, 0);
+    if (count === 1) return [{ path: "", message: `Cell ${first} has no answer.` }];
     return [{ path: "", message: `${count} cells have no answer; the first of them is cell ${first}.` }];
   }
 

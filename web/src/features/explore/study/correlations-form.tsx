@@ -3,7 +3,7 @@ import { FieldError } from "../../../components/field.tsx";
 import type { ExploreField } from "../explore-field.ts";
 import { FieldChoice } from "../field-choice.tsx";
 import { FigureField } from "../figure-field.tsx";
-import { freePairs, type CorrelationDraft } from "./correlation-draft.ts";
+import type { CorrelationDraft } from "./correlation-draft.ts";
 
 interface CorrelationsFormProps {
   correlations: readonly CorrelationDraft[];
@@ -18,7 +18,6 @@ interface CorrelationsFormProps {
 export function CorrelationsForm({ correlations, inputs, faultAt, onChange }: CorrelationsFormProps) {
   const put = (at: number, change: Partial<CorrelationDraft>): void =>
     onChange(correlations.map((each, i) => (i === at ? { ...each, ...change } : each)));
-  const free = freePairs(inputs, correlations);
   const together = faultAt("");
   return (
     <>
@@ -56,11 +55,6 @@ export function CorrelationsForm({ correlations, inputs, faultAt, onChange }: Co
         </fieldset>
       ))}
       {together && <FieldError>{together}</FieldError>}
-      {free.length > 0 && (
-        <Button className="self-start" onClick={() => onChange([...correlations, { ...free[0], text: "0.5" }])}>
-          Let two of them go together
-        </Button>
-      )}
     </>
   );
 }

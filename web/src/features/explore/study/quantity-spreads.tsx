@@ -7,7 +7,7 @@ import { say } from "../../../format/format-quantity.ts";
 import { measureOfQuantity, quantityNamed } from "../../../format/quantities.ts";
 import { exploreField } from "../explore-field.ts";
 import { Histogram } from "./histogram.tsx";
-import { sayInterval } from "./study-words.ts";
+import { sayChance, sayInterval } from "./study-words.ts";
 
 /** How one quantity scatters: its histogram, percentiles, and what it hangs on. */
 export function QuantitySpreads({ summary, scenario }: { summary: ToleranceSummary; scenario: Scenario }) {
@@ -73,7 +73,7 @@ function Influences({ spread: { influences }, scenario }: { spread: QuantitySpre
           cell: ({ varianceShare }) =>
             varianceShare === null
               ? "from 1000 values on"
-              : `${formatNumber(100 * varianceShare.value, 2)} % (${sayInterval(varianceShare)})`,
+              : `${sayChance(varianceShare.value)} (${sayInterval(varianceShare)})`,
         },
       ]}
     />

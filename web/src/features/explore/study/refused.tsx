@@ -9,7 +9,8 @@ export function Refused({ summary: { refused, runs }, scenario }: { summary: Tol
       <ul className="list-disc pl-5">
         {refused.map((group) => (
           <li key={`${group.refusal} ${group.first}`} className="mb-1">
-            {formatNumber(group.count, 9)} of {formatNumber(runs, 9)} draws have no answer: {reasonOf(group, scenario)}
+            {formatNumber(group.count, 9)} of {formatNumber(runs, 9)} draws {group.count === 1 ? "has" : "have"} no
+            answer: {reasonOf(group, scenario)}
             {group.example !== null && (
               <details className="text-13 text-quiet">
                 <summary className="link w-fit">An example</summary>

@@ -7,6 +7,7 @@ import { AskingForm } from "../asking-form.tsx";
 import { exploreFields, type ExploreField } from "../explore-field.ts";
 import { FigureField } from "../figure-field.tsx";
 import { QuantityChoice } from "../quantity-choice.tsx";
+import { freePairs } from "./correlation-draft.ts";
 import { CorrelationsForm } from "./correlations-form.tsx";
 import { InputForm } from "./input-form.tsx";
 import { jointDraftOf } from "./joint-draft.ts";
@@ -106,6 +107,7 @@ function WhatScatters({ draft, scenario, faultAt, setDraft }: WhatScattersProps)
   const set = (change: Partial<StudyDraft>): void => setDraft((old) => ({ ...old, ...change }));
   const scattered = scatteredPaths(draft);
   const free = likelyFirst(fields.filter(({ path }) => !scattered.includes(path)));
+  const pairs = freePairs(inputs, correlations);
   return (
     <>
       <Inputs
@@ -113,7 +115,6 @@ function WhatScatters({ draft, scenario, faultAt, setDraft }: WhatScattersProps)
         fields={fields}
         inputs={inputs}
         isLast={scattered.length === 1}
-        free={free}
         faultAt={faultAt}
         onChange={(next) => setDraft((old) => withInputs(old, next))}
       />
@@ -136,11 +137,23 @@ function WhatScatters({ draft, scenario, faultAt, setDraft }: WhatScattersProps)
           onRemove={() => set({ joint: joint.filter((_, k) => k !== i) })}
         />
       ))}
-      {free.length > 1 && (
-        <Button className="self-start" onClick={() => set({ joint: [...joint, jointDraftOf(free.slice(0, 2))] })}>
-          Let values scatter by a covariance
-        </Button>
-      )}
+      <div className="flex flex-wrap gap-3">
+        {free.length > 0 && (
+          <Button onClick={() => set({ inputs: [...inputs, inputDraftOf(free[0], scenario, "uniform")] })}>
+            Let another value scatter
+          </Button>
+        )}
+        {pairs.length > 0 && (
+          <Button onClick={() => set({ correlations: [...correlations, { ...pairs[0], text: "0.5" }] })}>
+            Let two of them go together
+          </Button>
+        )}
+        {free.length > 1 && (
+          <Button onClick={() => set({ joint: [...joint, jointDraftOf(free.slice(0, 2))] })}>
+            Let values scatter by a covariance
+          </Button>
+        )}
+      </div>
     </>
   );
 }
@@ -157,12 +170,11 @@ interface InputsProps {
   inputs: readonly InputDraft[];
   /** Nothing else scatters: it cannot be left out. */
   isLast: boolean;
-  free: readonly ExploreField[];
   faultAt: (path: string) => string | undefined;
   onChange: (inputs: InputDraft[]) => void;
 }
 
-function Inputs({ scenario, fields, inputs, isLast, free, faultAt, onChange }: InputsProps) {
+function Inputs({ scenario, fields, inputs, isLast, faultAt, onChange }: InputsProps) {
   const put = (i: number, input: InputDraft): void => onChange(inputs.map((each, k) => (k === i ? input : each)));
   const fieldOf = (path: string) => fields.find((field) => field.path === path) ?? fields[0];
   return (
@@ -179,14 +191,6 @@ function Inputs({ scenario, fields, inputs, isLast, free, faultAt, onChange }: I
           {...(!isLast && { onRemove: () => onChange(inputs.filter((_, k) => k !== i)) })}
         />
       ))}
-      {free.length > 0 && (
-        <Button
-          className="self-start"
-          onClick={() => onChange([...inputs, inputDraftOf(free[0], scenario, "uniform")])}
-        >
-          Let another value scatter
-        </Button>
-      )}
     </>
   );
 }

@@ -3,17 +3,18 @@ import { formatNumber } from "../../../format/format-number.ts";
 import { listed } from "../../../format/words.ts";
 import type { SweepCells } from "./sweep-cells.ts";
 
-/** What several cells do. */
-const doings: Record<Outcome, string> = {
-  "never-moved": "never move",
-  "came-to-rest": "come to rest",
-  "too-short": "are too short to tell",
-  growing: "grow",
-  "stick-slip": "stick and slip",
-  settles: "settle",
-  "not-settled": "have not settled",
-  "smooth-sliding": "slide smoothly",
+/** What several cells do, and what one does. */
+const doings: Record<Outcome, readonly [string, string]> = {
+  "never-moved": ["never move", "never moves"],
+  "came-to-rest": ["come to rest", "comes to rest"],
+  "too-short": ["are too short to tell", "is too short to tell"],
+  growing: ["grow", "grows"],
+  "stick-slip": ["stick and slip", "sticks and slips"],
+  settles: ["settle", "settles"],
+  "not-settled": ["have not settled", "has not settled"],
+  "smooth-sliding": ["slide smoothly", "slides smoothly"],
 };
+const unanswered = ["have no answer", "has no answer"] as const;
 
 /** How many cells came to what, the most first: "Of 224 cells 150 stick and slip and 74 slide smoothly." */
 export function sweepHeadline(cells: SweepCells): string {
@@ -34,5 +35,8 @@ function countsOf(cells: SweepCells): { doing: string; count: number }[] {
   }
   return [...counts]
     .sort(([a, x], [b, y]) => Number(b >= 0) - Number(a >= 0) || y - x)
-    .map(([code, count]) => ({ doing: code < 0 ? "have no answer" : doings[cellOutcomes[code]], count }));
+    .map(([code, count]) => {
+      const [many, one] = code < 0 ? unanswered : doings[cellOutcomes[code]];
+      return { doing: count === 1 ? one : many, count };
+    });
 }
