@@ -29,13 +29,14 @@ class Window:
             times, column = table.values["t"], of(table.values) + 0.0 * table.values["t"]
             guess = crests(times, column)
             largest = max(largest, float(np.max(column)))
+            least = largest - 0.05 * (np.max(column) - np.min(column))
             if np.min(column) == np.max(column):
                 continue
-            tops += [(guess[i], times[max(0, i - 1)], times[min(len(times) - 1, i + 1)], table) for i in np.flatnonzero(guess >= largest)]
+            tops += [(guess[i], times[max(0, i - 1)], times[min(len(times) - 1, i + 1)], table) for i in np.flatnonzero(is_crest(guess) & (guess >= least))]
         for guess, low, high, table in sorted(tops, key=lambda top: -top[0])[:MOST_TOPS]:
-            if guess < largest or not high > low:
-                continue
             look = lambda t: -float(of(table.at(t)))
+            if not high > low:
+                continue
             tolerance = 1e-9 * (high - low)
             largest = max(largest, -minimize_scalar(look, bounds=(low, high), method="bounded", options={"xatol": tolerance}).fun)
         return largest
@@ -84,6 +85,12 @@ def tabulated(stretch, low, high):
         weights[-1] += share[0]
         weights = np.concatenate([weights, share[1:]])
     return np.concatenate(parts, axis=1), weights, [(b, stretch, piece) for _, b, piece in pieces]
+
+
+def is_crest(values):
+    """Whether no neighbour stands higher."""
+    padded = np.concatenate([[-np.inf], values, [-np.inf]])
+    return (values >= padded[:-2]) & (values >= padded[2:])
 
 
 def crests(t, values):

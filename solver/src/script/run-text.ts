@@ -28,7 +28,7 @@ def slide(start, d, slip, side, pull, at, end):
         return values
 
     solver = DOP853(rates, start, (d, slip), end, rtol=RTOL, atol=ATOL * SCALES, max_step=LONGEST_STEP)
-    pieces, above = [], {}
+    pieces, above, looks = [], {}, [(start, side * slip)]
     while solver.status == "running":
         message = solver.step()
         if solver.status == "failed":
@@ -43,6 +43,8 @@ def slide(start, d, slip, side, pull, at, end):
                     above[name] = t
                 elif value < -noise or t == end and is_zero_at(t, value, look, new - old):
                     found.append((found_zero(look, above.get(name, start), t), name))
+            looks = [*looks[-2:], (t, side * piece(t)[1])]
+            found = found or touched(looks, lambda s: side * piece_at(pieces, s)[1])
             if found:
                 zero, name = min(found)
                 zero = end if end - zero < NEAR * end else zero
@@ -50,6 +52,14 @@ def slide(start, d, slip, side, pull, at, end):
                 d, slip = piece_at(pieces, zero)
                 return pieces, zero, 0.0 if name == "half" else d, {"contact": 0.0, "spring": -drift_of_spring(zero, at)}.get(name, slip), name
     return pieces, end, solver.y[0], solver.y[1], None
+
+
+def touched(looks, speed):
+    """Where |v_r| has come down to 0 and goes up again, between the last three looks."""
+    if len(looks) < 3 or not looks[0][1] > looks[1][1] < looks[2][1] or looks[1][1] > 1e-2 * SCALES[1]:
+        return []
+    low = minimize_scalar(speed, bounds=(looks[0][0], looks[2][0]), method="bounded", options={"xatol": 1e-12 * looks[2][0]})
+    return [(low.x, "contact")] if low.fun < TOUCH * SCALES[1] else []
 
 
 def is_zero_at(t, value, look, step):
@@ -155,12 +165,13 @@ def entered(t, x, v, side, pull, met, at):
     slip, stretch, d = v - counterface(t, at)[1], v - base(t, at)[1], x - base(t, at)[0]
     tiny = 1e-12 * max(abs(v), FACE_SPEED)
     if side is None:
-        side = int(np.sign(slip)) if abs(slip) > tiny else 0
-    if met == "contact" or (side == 0 or COUNTERFACE == "base") and abs(slip) <= tiny:
+        side = int(np.sign(slip)) if abs(slip) > 1e-12 * max(abs(v), abs(counterface(t, at)[1])) else 0
+        slip = slip if side else 0.0
+    elif met == "contact" or (side == 0 or COUNTERFACE == "base") and abs(slip) <= tiny:
         slip = 0.0
     elif COUNTERFACE != "base" and side * slip < 0:
         slip = -slip  # nothing has jumped, so it has not turned
-    if met == "spring" or pull == 0 and abs(stretch) <= tiny:
+    if met == "spring" or not pull and abs(stretch) <= tiny:
         stretch = 0.0
     if 0.0 in (slip, stretch) and spring_sense(t, at) == 0:
         slip = stretch = 0.0

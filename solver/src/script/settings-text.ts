@@ -5,9 +5,10 @@ RTOL, ATOL = 1e-13, 1e-15  # of the integration; ATOL a share of the run's peaks
 HELD = 1e-10  # a need that passes what holds by a smaller share is held: rounding must not decide
 ROUNDING = 1e-15  # of the parts of a sum: what their sum may be off
 NOISE = 1e-11  # v_r below this share of its peak is 0
+TOUCH = 1e-10  # v_r that comes back from below this share of its peak has been 0
 NEAR = 1e-11  # of the time: a zero that close to a corner falls on it
 LOOKS, LOOKS_A_PERIOD = 12, 64  # at a step of a slip, at a period of the inputs while stuck
-MOST_TOPS = 64  # crests that are polished to find a peak
+MOST_TOPS = 32  # crests that are polished to find a peak
 MANY = 20_000  # corners of the inputs
 LONGEST_STEP = 1 / (20 * FASTEST_HZ) if FASTEST_HZ else np.inf
 
@@ -43,8 +44,11 @@ def piece_at(pieces, t):
 
 
 def found_zero(g, low, high):
-    """Where g passes from above 0 to below it."""
-    return brentq(g, low, high, xtol=1e-15 * max(1.0, high), rtol=9e-16) if g(low) > 0 > g(high) else (low if g(low) <= 0 else high)
+    """Where g passes from above 0 to below it; from 0 it may have risen by less than what was looked for."""
+    rises = [time for time in (low, *(low + (high - low) * 10.0 ** -np.arange(0.5, 14, 0.5))) if g(time) > 0]
+    if not rises:
+        return low + 1e-12 * (high - low)
+    return brentq(g, max(rises), high, xtol=1e-15 * max(1.0, high), rtol=9e-16) if g(high) < 0 else high
 
 
 def drift_of_spring(t, at):
@@ -83,10 +87,12 @@ CORNERS = sorted({float(t) for t in [*INPUT_CORNERS, *lost_contact_times()] if n
 CORNERS = sorted({*CORNERS, *meeting_times()})
 FACE_SPEED = fastest_face()
 
-# Peaks of d and v_r, for the absolute tolerances alone.
+# Peaks of d and v_r, for the absolute tolerances alone; no smaller than what a thousandth of the grip would do.
+RATE = max(np.sqrt(STIFFNESS / MASS), TURN * FASTEST_HZ, 1 / SECONDS)
+LEAST = 1e-3 * friction(0.0) * (NORMAL + abs(RIPPLE)) * RADIUS / (MASS * RATE)
 SCALES = np.array([
-    (CLAIM.get("driveForcePeak") or 0.0) / STIFFNESS if STIFFNESS else CLAIM.get("peakDisplacement") or 0.0,
-    CLAIM.get("slipVelocityPeak") or 0.0,
+    max((CLAIM.get("driveForcePeak") or 0.0) / STIFFNESS if STIFFNESS else CLAIM.get("peakDisplacement") or 0.0, LEAST / RATE),
+    max(CLAIM.get("slipVelocityPeak") or 0.0, LEAST),
 ])
 SCALES = np.where(SCALES > 0, SCALES, 1.0)
 
