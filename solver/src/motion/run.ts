@@ -18,7 +18,7 @@ export type Progress = (fraction: number) => boolean;
 /** A quicker way for some problems: what it is not sure of it leaves undefined, and NaN, for the rules in full. */
 export interface ShortCut {
   start(s: Stance): Happening | undefined;
-  step(s: Stance, limit: number): Happening | undefined;
+  step(s: Stance): Happening | undefined;
   nextBreakAway(s: Stance): number;
 }
 
@@ -81,9 +81,9 @@ class Run {
 
   /** One segment; why the run has ended with it, null where it goes on. */
   private advance(): Ended | null {
-    const { problem, stance, segments } = this;
+    const { stance, segments } = this;
     this.work.spent++;
-    const shortly = this.shortCut?.step(stance, problem.seconds);
+    const shortly = this.shortCut?.step(stance);
     const what = shortly === undefined ? this.stepInFull() : shortly;
     if (this.work.spent > this.work.allowed) return "max-work";
     segments.push(stance, what);

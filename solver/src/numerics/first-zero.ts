@@ -1,3 +1,5 @@
+import { firstRoot, SafeStep } from "./safe-step.ts";
+
 /**
  * A function whose first zero is looked for: smooth on the interval, with its first two derivatives at hand and a bound
  * of the third ahead. `evaluate(τ)` fills `value`, `first`, `second` and `noise` (what rounding may have done to `value`).
@@ -65,9 +67,9 @@ export function firstZero(w: Watched, from: number, end: number, scale: number, 
     const step = Math.max(safe, 2 * ulp * tau, hasRisen ? 0 : Math.max(2 * last, 1e3 * ulp * span));
     if (tau + step >= end) return Infinity;
     if (guess === Infinity && safe < span) {
-      const ahead = Math.min(end - tau, 4 * step + span);
-      const bound = w.thirdBound(ahead);
-      guess = newton(w, tau + step, tau + ahead, tau + modelZero(value, first, second));
+      const within = Math.min(end - tau, 4 * step + span);
+      const bound = w.thirdBound(within);
+      guess = newton(w, tau + step, tau + within, tau + modelZero(value, first, second));
       if (guess !== Infinity) clearFrom = guess - safeStep(0, -w.first, w.second, bound, guess - tau);
       if (tau + safe >= clearFrom) return bottomOf(w, guess, end);
     }
@@ -100,47 +102,20 @@ function touchesAt(w: Watched, end: number, blur: number): boolean {
 }
 
 /** The first positive zero of w + w'h + w''h²/2, Infinity without one. */
-export function modelZero(value: number, first: number, second: number): number {
+function modelZero(value: number, first: number, second: number): number {
   return firstRoot(value, first, second / 2);
 }
 
-/**
- * A step h ≤ span with w + w'h + w''h²/2 − Mh³/6 > 0 on (0, h), for w ≥ 0. From w = 0 it is that cubic's own root. Else, on
- * (0, H), the cubic is at least the parabola with curvature w'' − MH/3, whose root is a safe step; a smaller H makes that
- * parabola tighter.
- */
-export function safeStep(value: number, first: number, second: number, bound: number, span: number): number {
-  if (value === 0) return fromZero(first, second / 2, bound, span);
-  // the cubic's root is no farther than this, each term on its own being outweighed
-  let stretch = Math.cbrt((6 * value) / bound);
-  if (first > 0) stretch += Math.sqrt((6 * first) / bound);
-  if (second > 0) stretch += (3 * second) / bound;
-  if (!(stretch < span)) stretch = span;
-  let safe = 0;
-  for (let i = 0; i < 4; i++) {
-    const root = firstRoot(value, first, second / 2 - (bound * stretch) / 6);
-    if (root >= stretch) return stretch;
-    if (root < 1.05 * safe) return Math.max(safe, root);
-    safe = root;
-    stretch = Math.min(stretch, root * 1.7);
-  }
-  return safe;
-}
+const ahead = new SafeStep();
 
-/** The positive root of w' + κh − Mh²/6, without cancellation; 0 where w' < 0 or w falls at once. */
-function fromZero(first: number, kappa: number, bound: number, span: number): number {
-  if (first < 0 || (first === 0 && !(kappa > 0))) return 0;
-  const root = Math.sqrt(kappa * kappa + (2 * bound * first) / 3);
-  if (kappa < 0) return Math.min(span, (2 * first) / (root - kappa));
-  return bound > 0 ? Math.min(span, (2.999 * (kappa + root)) / bound) : span;
-}
-
-/** The first positive zero of w + w'h + κh² for w ≥ 0 (h = 0 not counted), without cancellation; Infinity without one. */
-function firstRoot(value: number, first: number, kappa: number): number {
-  const square = first * first - 4 * kappa * value;
-  if (square < 0) return Infinity;
-  if (first < 0) return (2 * value) / (-first + Math.sqrt(square));
-  return kappa < 0 ? (first + Math.sqrt(square)) / (-2 * kappa) : Infinity;
+function safeStep(value: number, first: number, second: number, bound: number, span: number): number {
+  ahead.value = value;
+  ahead.first = first;
+  ahead.second = second;
+  ahead.bound = bound;
+  ahead.span = span;
+  ahead.find();
+  return ahead.step;
 }
 
 /** A falling zero in (from, to] by Newton's method, w being left evaluated there; Infinity where it does not lead to one. */

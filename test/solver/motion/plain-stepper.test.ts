@@ -83,7 +83,7 @@ test("a steady motion with stops is told by the short cut alone", () => {
   const stance = newStance();
   const stepper = PlainStepper.of(problem);
   const happenings = [stepper?.start(stance)];
-  while (stance.t < 1000) happenings.push(stepper?.step(stance, 1000));
+  while (stance.t < 1000) happenings.push(stepper?.step(stance));
   expect(happenings.length).toBeGreaterThan(250);
   expect(happenings).not.toContain(undefined);
 });

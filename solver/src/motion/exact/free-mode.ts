@@ -1,5 +1,7 @@
 /** The free swing of an underdamped body about where it would settle, Re(Z e^{λτ}) with λ = −σ + iω_d, and its derivatives. */
 export class FreeMode {
+  /** The τ to look at, s. */
+  tau = 0;
   /** At the τ last looked at: the swing and its first four derivatives. */
   position = 0;
   velocity = 0;
@@ -29,8 +31,9 @@ export class FreeMode {
     this.size = Math.sqrt(position * position + im * im);
   }
 
-  look(tau: number): void {
-    const { sigma, damped } = this;
+  /** At `tau`, a field like all the rest so that looking allocates nothing. */
+  look(): void {
+    const { sigma, damped, tau } = this;
     const decay = sigma > 0 ? Math.exp(-sigma * tau) : 1;
     const c = decay * Math.cos(damped * tau);
     const s = decay * Math.sin(damped * tau);

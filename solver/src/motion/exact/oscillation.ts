@@ -235,7 +235,8 @@ export class Oscillation {
   /** d₀ + A₀/ω₀² + Re(Z e^{λτ}) + Σ Re(P e^{iΩτ}): what `evaluateClosed` comes to where nothing in it cancels. */
   private evaluateSwing(tau: number): void {
     const { inputs, free, steady } = this;
-    free.look(tau);
+    free.tau = tau;
+    free.look();
     let position = this.settled + free.position;
     let { velocity, acceleration, jerk, snap } = free;
     inputs.turn(tau);

@@ -10,11 +10,14 @@ export class PlainInputs {
   steadyForce = 0;
   /** Rate of y without the harmonic. */
   feed = 0;
-  /** F̂ and Ŷ at the instant last turned to. */
+  /** The instant to turn to, s: a field, so that turning allocates nothing. */
+  t = 0;
+  /** F̂, Ŷ and y at the instant last turned to. */
   forceRe = 0;
   forceIm = 0;
   baseRe = 0;
   baseIm = 0;
+  base = 0;
 
   private start = 0;
   /** Re F̂, Im F̂, Re Ŷ, Im Ŷ at t = 0. */
@@ -46,23 +49,21 @@ export class PlainInputs {
     return inputs;
   }
 
-  /** Turns the amplitudes to t; whole turns are taken out before the multiplication by 2π. */
-  turnTo(t: number): void {
-    if (this.omega === 0 || t === this.turnedTo) return;
+  /** Turns the amplitudes to `t`; whole turns are taken out before the multiplication by 2π. */
+  turn(): void {
+    const { t, amplitudes } = this;
+    if (t === this.turnedTo) return;
     this.turnedTo = t;
-    const turns = this.hz * t;
-    const angle = turn * (turns - Math.round(turns));
-    const c = Math.cos(angle);
-    const s = Math.sin(angle);
-    const { amplitudes } = this;
-    this.forceRe = amplitudes[0] * c - amplitudes[1] * s;
-    this.forceIm = amplitudes[0] * s + amplitudes[1] * c;
-    this.baseRe = amplitudes[2] * c - amplitudes[3] * s;
-    this.baseIm = amplitudes[2] * s + amplitudes[3] * c;
-  }
-
-  /** y at the instant turned to, which is t. */
-  base(t: number): number {
-    return this.start + this.feed * t + this.baseRe;
+    if (this.omega > 0) {
+      const turns = this.hz * t;
+      const angle = turn * (turns - Math.round(turns));
+      const c = Math.cos(angle);
+      const s = Math.sin(angle);
+      this.forceRe = amplitudes[0] * c - amplitudes[1] * s;
+      this.forceIm = amplitudes[0] * s + amplitudes[1] * c;
+      this.baseRe = amplitudes[2] * c - amplitudes[3] * s;
+      this.baseIm = amplitudes[2] * s + amplitudes[3] * c;
+    }
+    this.base = this.start + this.feed * t + this.baseRe;
   }
 }

@@ -1,4 +1,4 @@
-import { modelZero, safeStep } from "../../numerics/first-zero.ts";
+import { firstRoot, SafeStep } from "../../numerics/safe-step.ts";
 import type { Problem } from "../../scenario/problem.ts";
 import type { Stance } from "../stance.ts";
 import { FreeMode } from "./free-mode.ts";
@@ -17,6 +17,9 @@ const mostSteps = 100;
  * The hot loop of a sweep: its scratch is in fields, so that nothing is allocated.
  */
 export class PlainSlip {
+  /** How far `findZero` looks, and how close to that a zero is not clear, s. */
+  end = 0;
+  blur = 0;
   /** Where `findZero` found the first zero, s: Infinity where there is none before the end, NaN where it is not clear. */
   zero = NaN;
   /** w = s v_r and two derivatives at the τ last looked at, what rounding may have done to it, and d − d₀. */
@@ -32,8 +35,6 @@ export class PlainSlip {
   private readonly damped: number;
   private readonly omega: number;
   private readonly isOnBase: boolean;
-  /** ḋ of a body carried along, the harmonic aside, m/s. */
-  private readonly carried: number;
   /** 1/(ω₀² − Ω² + 2iσΩ). */
   private readonly answerRe: number;
   private readonly answerIm: number;
@@ -46,15 +47,23 @@ export class PlainSlip {
   private xRe = 0;
   private xIm = 0;
   private settled = 0;
+  private tau = 0;
   private lookedAt = NaN;
+  /** The search under way: how far it has come, how far it guesses, the zero it has guessed, the step that is safe. */
+  private left = 0;
+  private right = 0;
+  private root = Infinity;
+  private readonly ahead = new SafeStep();
   /** How long the last slip to either side took. */
   private lastUp = NaN;
   private lastDown = NaN;
 
+  /** @param carried ḋ of a body carried along, the harmonic aside, m/s. @param slide friction while sliding, N */
   constructor(
     private readonly problem: Problem,
     private readonly inputs: PlainInputs,
-    carried: number,
+    private readonly carried: number,
+    private readonly slide: number,
   ) {
     const { inertia, stiffness, viscous, solid, counterface } = problem;
     const { omega } = inputs;
@@ -66,7 +75,6 @@ export class PlainSlip {
     this.farthest = (2 * Math.PI) / natural;
     this.omega = omega;
     this.isOnBase = counterface === "base";
-    this.carried = carried;
     const re = (natural - omega) * (natural + omega);
     const im = 2 * this.sigma * omega;
     this.answerRe = re / (re * re + im * im);
@@ -80,8 +88,8 @@ export class PlainSlip {
     return isOscillating && (this.omega === 0 || squared * Math.sqrt(answerRe * answerRe + answerIm * answerIm) < 70);
   }
 
-  /** Sets up the slip from `s`, the inputs being turned to s.t; `slide` is the friction, N. What is known of its start is put in exactly. */
-  begin(s: Stance, slide: number): void {
+  /** Sets up the slip from `s`, the inputs being turned to s.t. What is known of its start is put in exactly. */
+  begin(s: Stance): void {
     const { sigma, squared, omega, inputs, isOnBase } = this;
     const { inertia } = this.problem;
     const hRe = inputs.forceRe / inertia + omega * omega * inputs.baseRe;
@@ -89,7 +97,7 @@ export class PlainSlip {
     const pRe = hRe * this.answerRe - hIm * this.answerIm;
     const pIm = hRe * this.answerIm + hIm * this.answerRe;
     const baseAcceleration = isOnBase ? 0 : -omega * omega * inputs.baseRe;
-    let push = (inputs.steadyForce - s.contact * slide) / inertia - squared * s.position;
+    let push = (inputs.steadyForce - s.contact * this.slide) / inertia - squared * s.position;
     let acceleration = push + hRe - 2 * sigma * s.velocity;
     if (!Number.isNaN(s.acceleration)) {
       const known = s.acceleration - baseAcceleration;
@@ -112,12 +120,13 @@ export class PlainSlip {
     this.second = side * (forcingRate - 2 * sigma * acceleration - squared * s.velocity);
   }
 
-  /** w, its derivatives and d − d₀ at τ. */
-  look(tau: number): void {
+  /** w, its derivatives and d − d₀ at `tau`. */
+  private look(): void {
+    const { free, omega, side, tau } = this;
     if (tau === this.lookedAt) return;
     this.lookedAt = tau;
-    const { free, omega, side } = this;
-    free.look(tau);
+    free.tau = tau;
+    free.look();
     let value = free.velocity - this.carried;
     let first = free.acceleration;
     let second = free.jerk;
@@ -148,63 +157,93 @@ export class PlainSlip {
     return Math.sqrt(xRe * xRe + xIm * xIm) * w2 * w2 + this.free.size * squared * squared;
   }
 
-  /**
-   * Puts the first zero of w in (0, end] into `zero` and leaves w looked at there, at the end where there is none.
-   * @param blur a zero closer to the end than this, s, is not clear
-   */
-  findZero(end: number, blur: number): void {
+  /** Puts the first zero of w in (0, end] into `zero` and leaves w looked at there, at the end where there is none. */
+  findZero(): void {
+    const { end } = this;
     this.zero = NaN;
     if (this.w < 0 || (this.w === 0 && !(this.first > 0 || (this.first === 0 && this.second > 0)))) return;
-    let bound = this.thirdBound();
-    let left = 0;
-    let ahead = safeStep(this.w, this.first, this.second, bound, end);
     let guess = this.side > 0 ? this.lastUp : this.lastDown;
-    if (Number.isNaN(guess)) guess = modelZero(this.w, this.first, this.second);
-    let root = Infinity;
+    if (Number.isNaN(guess)) guess = firstRoot(this.w, this.first, this.second / 2);
+    this.left = 0;
+    this.root = Infinity;
     let clearFrom = Infinity;
+    this.findAhead();
     for (let n = 0; n < mostSteps; n++) {
-      if (root === Infinity && guess > left && this.polish(left, Math.min(end, left + this.farthest), guess)) {
-        root = this.lookedAt;
-        clearFrom = root - safeStep(0, -this.first, this.second, bound, root);
+      const { ahead } = this;
+      const reached = this.left + ahead.step;
+      if (this.root === Infinity && guess > this.left) {
+        this.root = guess;
+        this.right = Math.min(end, this.left + this.farthest);
+        this.polish();
+        if (this.root < Infinity) {
+          ahead.value = 0;
+          ahead.first = -this.first;
+          ahead.second = this.second;
+          ahead.span = this.root;
+          ahead.find();
+          clearFrom = this.root - ahead.step;
+        }
       }
-      if (left + ahead >= clearFrom) return this.accept(root);
-      if (left + ahead >= end) {
-        this.look(end);
-        if (this.w > this.noise - blur * Math.min(0, this.first)) this.zero = Infinity;
+      if (reached >= clearFrom) return this.accept();
+      if (reached >= end) {
+        this.tau = end;
+        this.look();
+        if (this.w > this.noise - this.blur * Math.min(0, this.first)) this.zero = Infinity;
         return;
       }
-      left += ahead;
-      this.look(left);
-      if (this.w <= this.noise) return this.accept(left);
-      bound = this.thirdBound();
-      ahead = safeStep(this.w, this.first, this.second, bound, end - left);
-      guess = left + modelZero(this.w, this.first, this.second);
+      this.left = this.tau = reached;
+      this.look();
+      if (this.w <= this.noise) {
+        this.root = reached;
+        return this.accept();
+      }
+      this.findAhead();
+      guess = reached + firstRoot(this.w, this.first, this.second / 2);
     }
   }
 
-  /** Halley's method from a guess; true where it comes to a falling zero in (left, right), which is then the τ looked at. */
-  private polish(left: number, right: number, guess: number): boolean {
-    let r = guess;
+  /** How far ahead of `left`, where w was looked at, no zero can be. */
+  private findAhead(): void {
+    const { ahead } = this;
+    ahead.value = this.w;
+    ahead.first = this.first;
+    ahead.second = this.second;
+    ahead.bound = this.thirdBound();
+    ahead.span = this.end - this.left;
+    ahead.find();
+  }
+
+  /** Halley's method from `root`; it becomes the falling zero in (left, right) that it leads to, looked at last, or Infinity. */
+  private polish(): void {
+    const { left, right } = this;
+    let r = this.root;
+    this.root = Infinity;
     for (let i = 0; i < 8; i++) {
-      if (!(r > left && r < right)) return false;
-      this.look(r);
+      if (!(r > left && r < right)) return;
+      this.tau = r;
+      this.look();
       const { w, first, second } = this;
-      if (!(first < 0)) return false;
-      if (Math.abs(w) <= this.noise / 8) return true;
+      if (!(first < 0)) return;
+      if (Math.abs(w) <= this.noise / 8) {
+        this.root = r;
+        return;
+      }
       const step = (2 * w * first) / (2 * first * first - w * second);
       r -= step;
       // of third order: what is left after so small a step is rounding
       if (Math.abs(step) > 1e-6 * r) continue;
-      this.look(r);
-      return this.first < 0 && r > left && r < right;
+      this.tau = r;
+      this.look();
+      if (this.first < 0 && r > left && r < right) this.root = r;
+      return;
     }
-    return false;
   }
 
-  /** A zero is taken where w falls through it for certain, and where its closed form has not cancelled. */
-  private accept(root: number): void {
-    this.look(root);
-    const { first, second, noise } = this;
+  /** The root is taken where w falls through it for certain, and where its closed form has not cancelled. */
+  private accept(): void {
+    this.tau = this.root;
+    this.look();
+    const { root, first, second, noise } = this;
     const isCrossing = first < 0 && first * first > 64 * noise * Math.abs(second);
     if (!isCrossing || !(noise < -1e-13 * first * root)) return;
     this.zero = root;

@@ -32,7 +32,8 @@ export class PlainStepper {
   private swingRe = 0;
   private swingIm = 0;
   private size = 0;
-  /** The side of need that `stickLasts` found to be lost. */
+  /** What `findStickEnd` found: how long the stick lasts, s, and the side of need that is lost. */
+  private lasts = NaN;
   private lostSide: Phase = 0;
 
   /** A stepper for the problem; null where it is not a plain one. */
@@ -56,17 +57,17 @@ export class PlainStepper {
     this.viscous = viscous + solid.viscous;
     this.isOnBase = counterface === "base";
     this.carried = this.isOnBase ? 0 : beltVelocity - inputs.feed;
-    this.slip = new PlainSlip(problem, inputs, this.carried);
+    this.slip = new PlainSlip(problem, inputs, this.carried, this.slide);
   }
 
   /** Places a body at t = 0 as `Stepper.start` does. */
   start(s: Stance): Happening | undefined {
     const { inputs, isOnBase } = this;
     const { initial, beltVelocity } = this.problem;
-    inputs.turnTo(0);
     s.t = 0;
+    this.turnInputs(s);
     s.place = initial.displacement;
-    s.position = initial.displacement - inputs.base(0);
+    s.position = initial.displacement - inputs.base;
     const baseVelocity = inputs.feed - inputs.omega * inputs.baseIm;
     s.velocity = initial.velocity - baseVelocity;
     s.acceleration = NaN;
@@ -78,66 +79,70 @@ export class PlainStepper {
     return null;
   }
 
-  /** Takes `s` to the end of its segment, not beyond `limit`, and tells what happened there. */
-  step(s: Stance, limit: number): Happening | undefined {
-    this.inputs.turnTo(s.t);
-    return s.contact === 0 ? this.stick(s, limit) : this.slideOn(s, limit);
+  /** Takes `s` to the end of its segment, not beyond that of the run, and tells what happened there. */
+  step(s: Stance): Happening | undefined {
+    this.turnInputs(s);
+    return s.contact === 0 ? this.stick(s) : this.slideOn(s);
   }
 
   /** When a body stuck at `s` breaks away if the inputs go on for ever: Infinity where never, NaN where it is not clear. */
   nextBreakAway(s: Stance): number {
-    this.inputs.turnTo(s.t);
-    return s.t + this.stickLasts(s);
+    this.turnInputs(s);
+    this.findStickEnd(s);
+    return s.t + this.lasts;
   }
 
-  private slideOn(s: Stance, limit: number): Happening | undefined {
+  private slideOn(s: Stance): Happening | undefined {
     const { slip, inputs } = this;
-    const end = limit - s.t;
-    const blur = clear * limit;
-    slip.begin(s, this.slide);
-    slip.findZero(end, blur);
-    if (slip.zero === Infinity) return this.slideTo(s, limit);
-    if (!(slip.zero < end - blur)) return undefined;
+    const { seconds } = this.problem;
+    slip.begin(s);
+    slip.end = seconds - s.t;
+    slip.blur = clear * seconds;
+    slip.findZero();
+    if (slip.zero === Infinity) return this.slideToEnd(s);
+    if (!(slip.zero < slip.end - slip.blur)) return undefined;
     const { t, position } = s;
     s.t += slip.zero;
     s.position += slip.moved;
-    inputs.turnTo(s.t);
+    this.turnInputs(s);
     const happening = this.meet(s, s.contact);
     if (happening === undefined) {
       s.t = t;
       s.position = position;
       return undefined;
     }
-    s.place = s.position + inputs.base(s.t);
+    s.place = s.position + inputs.base;
     return happening;
   }
 
-  /** Still sliding at the limit, where the slip has been looked at. */
-  private slideTo(s: Stance, limit: number): Happening {
+  /** Still sliding at the end of the run, where the slip has been looked at. */
+  private slideToEnd(s: Stance): Happening {
     const { slip, inputs } = this;
-    s.t = limit;
+    s.t = this.problem.seconds;
     s.position += slip.moved;
     s.slip = slip.side * slip.w;
-    inputs.turnTo(limit);
+    this.turnInputs(s);
     s.velocity = s.slip + this.carriedVelocity();
-    s.place = s.position + inputs.base(limit);
+    s.place = s.position + inputs.base;
     s.acceleration = NaN;
     return null;
   }
 
-  private stick(s: Stance, limit: number): Happening | undefined {
+  private stick(s: Stance): Happening | undefined {
     const { inputs, isOnBase } = this;
-    const lasts = this.stickLasts(s);
-    const isOver = s.t + lasts < limit;
-    if (Number.isNaN(lasts) || Math.abs(s.t + lasts - limit) <= clear * limit) return undefined;
-    const tau = isOver ? lasts : limit - s.t;
+    const { seconds } = this.problem;
+    this.findStickEnd(s);
+    const { lasts } = this;
+    const isOver = s.t + lasts < seconds;
+    if (Number.isNaN(lasts) || Math.abs(s.t + lasts - seconds) <= clear * seconds) return undefined;
+    const tau = isOver ? lasts : seconds - s.t;
     const before = inputs.baseRe;
-    s.t = isOver ? s.t + lasts : limit;
-    inputs.turnTo(s.t);
+    s.t = isOver ? s.t + lasts : seconds;
+    this.turnInputs(s);
     if (!isOnBase) {
       s.place += this.problem.beltVelocity * tau;
       s.position += this.carried * tau - (inputs.baseRe - before);
-    } else s.place = s.position + inputs.base(s.t);
+    } else s.place = s.position + inputs.base;
     s.velocity = this.carriedVelocity();
     s.acceleration = NaN;
     return isOver ? this.breakAway(s) : null;
@@ -150,29 +155,33 @@ export class PlainStepper {
     return "break-away";
   }
 
-  /** How long a body stuck at `s` stays so, the inputs being turned to s.t: Infinity for ever, NaN where it is not clear. */
-  private stickLasts(s: Stance): number {
+  /**
+   * Puts into `lasts` how long a body stuck at `s` stays so, the inputs being turned to s.t: Infinity for ever, NaN where it is
+   * not clear.
+   */
+  private findStickEnd(s: Stance): void {
     const { grip, swingRe, swingIm } = this.weigh(s);
     const drift = this.isOnBase ? 0 : this.problem.stiffness * this.carried;
     const swing = Math.sqrt(swingRe * swingRe + swingIm * swingIm);
+    this.lasts = NaN;
     if (swing === 0) {
       this.lostSide = Math.sign(drift) as Phase;
-      return drift === 0 ? Infinity : (grip - this.lostSide * this.need) / Math.abs(drift);
+      this.lasts = drift === 0 ? Infinity : (grip - this.lostSide * this.need) / Math.abs(drift);
+      return;
     }
-    if (drift !== 0) return NaN;
+    if (drift !== 0) return;
     const still = this.need - swingRe;
     const upper = (grip - still) / swing;
     const lower = (-grip - still) / swing;
-    if (Math.abs(upper - 1) < clear || Math.abs(lower + 1) < clear) return NaN;
+    if (Math.abs(upper - 1) < clear || Math.abs(lower + 1) < clear) return;
     const angle = Math.atan2(swingIm, swingRe);
     // need = still + swing cos(angle + Ωτ) rises through +grip in its lower half turn, falls through −grip in its upper one
     const up = upper < 1 ? turnsAhead(-Math.acos(Math.max(-1, upper)) - angle) : Infinity;
     const down = lower > -1 ? turnsAhead(Math.acos(Math.min(1, lower)) - angle) : Infinity;
     const soonest = Math.min(up, down);
     this.lostSide = up < down ? 1 : -1;
-    if (soonest === Infinity) return Infinity;
     const isClear = soonest > clear && soonest < turn - clear && Math.abs(up - down) > clear;
-    return isClear ? soonest / this.inputs.omega : NaN;
+    if (soonest === Infinity || isClear) this.lasts = soonest / this.inputs.omega;
   }
 
   /** Fills in need of a body carried along at `s`, the inputs being turned to s.t: its value, its harmonic part, its size. */
@@ -194,6 +203,11 @@ export class PlainStepper {
     this.swingIm = -forceIm - stiffness * baseIm - viscous * omega * baseRe;
     this.need = spring - inputs.steadyForce + viscous * this.carried + drag - forceRe;
     return this;
+  }
+
+  private turnInputs(s: Stance): void {
+    this.inputs.t = s.t;
+    this.inputs.turn();
   }
 
   /** ḋ of a body that its counterface carries along, the inputs being turned to its instant. */
