@@ -1,4 +1,4 @@
-import { checkSweepPlan, runTile, type Scenario, type SweepPlan } from "@restband/solver";
+import { answerRun, cellLines, cellOf, checkSweepPlan, runTile, type Scenario, type SweepPlan } from "@restband/solver";
 import { screen, waitFor, within } from "@testing-library/react";
 import { afterEach, beforeEach, describe, expect, it, vi } from "vitest";
 import { noteRunning } from "../../../web/src/features/explore/kept/running-here.ts";
@@ -64,6 +64,25 @@ describe("the page of a sweep", () => {
     ).toBeVisible();
     expect(screen.queryByRole("button", { name: "Resume" })).not.toBeInTheDocument();
     expect(server.tiles.size).toBe(1);
+  });
+
+  it("takes in what other machines have solved, and refuses what does not agree", async () => {
+    const server = sweepServer(scenario, plan);
+    const { user } = openPage(server.at);
+    await user.click(await screen.findByText("Solve it on other machines"));
+    const [header, ...cells] = cellLines(scenario, plan);
+    const answers = cells.map((_, index) => {
+      const run = answerRun({ scenario: cellOf(scenario, plan, index).scenario!, quantities: ["stickFraction"] });
+      return "reason" in run ? "" : JSON.stringify([index, run.outcome, run.quantities.stickFraction]);
+    });
+    const bring = (lines: readonly string[]) =>
+      user.upload(screen.getByLabelText("Bring in the answers"), new File([lines.join("\n")], "answers.jsonl"));
+    await bring([header, ...answers.slice(1)]);
+    expect(await screen.findByText("Cell 0 has no answer.")).toBeInTheDocument();
+    expect(server.tiles.size).toBe(0);
+    await bring([header, ...answers]);
+    await waitFor(() => expect(conclusions(server)).toHaveLength(1));
+    expect(screen.queryByText("Cell 0 has no answer.")).not.toBeInTheDocument();
   });
 
   it("names the line between sticking and sliding, says how it was found, and shows a limit and a scale of ratios", async () => {

@@ -2,6 +2,7 @@ import type { StoredExploration } from "@restband/api/contract";
 import {
   answerRun,
   drawsOf,
+  readAnswers,
   runDraws,
   runTile,
   solverVersion,
@@ -46,6 +47,8 @@ function answerTo(errand: Errand): ErrandAnswers[Errand["kind"]] {
       return runDraws(errand.scenario, errand.plan, drawsOf(errand.plan), [errand.from, errand.to]) as Float64Array;
     case "summary":
       return toleranceSummary(errand.plan, errand.scenario, errand.rows);
+    case "answers":
+      return readAnswers(errand.scenario, errand.plan, errand.text.split("\n"), { seed: errand.seed });
   }
 }
 

@@ -1,4 +1,12 @@
-import type { RunAsk, RunReply, Scenario, SweepPlan, TolerancePlan, ToleranceSummary } from "@restband/solver";
+import type {
+  ReadAnswers,
+  RunAsk,
+  RunReply,
+  Scenario,
+  SweepPlan,
+  TolerancePlan,
+  ToleranceSummary,
+} from "@restband/solver";
 
 /** One tile of a sweep, or some draws of a study: what comes back as rows. */
 export type TileErrand =
@@ -12,7 +20,7 @@ export type TileErrand =
       readonly to: number;
     };
 
-/** What a worker can be sent for: runs of an exploration, rows, or what the rows of a study say. */
+/** What a worker can be sent for: runs of an exploration, rows, what the rows of a study say, or what others have solved. */
 export type Errand =
   | { readonly kind: "runs"; readonly runs: readonly RunAsk[] }
   | TileErrand
@@ -21,6 +29,15 @@ export type Errand =
       readonly scenario: Scenario;
       readonly plan: TolerancePlan;
       readonly rows: Float64Array;
+    }
+  | {
+      readonly kind: "answers";
+      readonly scenario: Scenario;
+      readonly plan: SweepPlan;
+      /** The lines as they were brought in. */
+      readonly text: string;
+      /** Chooses the cells that are run again. */
+      readonly seed: number;
     };
 
 /** What it brings: a reply for each run; rows; a summary. */
@@ -29,6 +46,7 @@ export interface ErrandAnswers {
   readonly tile: Float64Array;
   readonly draws: Float64Array;
   readonly summary: ToleranceSummary;
+  readonly answers: ReadAnswers;
 }
 
 export type AnswerTo<E extends Errand> = ErrandAnswers[E["kind"]];

@@ -2,10 +2,12 @@ import * as Comlink from "comlink";
 import {
   answerRun,
   drawsOf,
+  readAnswers,
   runDraws,
   runTile,
   toleranceSummary,
   type Draws,
+  type ReadAnswers,
   type RunAsk,
   type RunReply,
   type Scenario,
@@ -31,6 +33,9 @@ const api = {
 
   summary: (scenario: Scenario, plan: TolerancePlan, rows: Float64Array): ToleranceSummary =>
     toleranceSummary(plan, scenario, rows),
+
+  answers: (scenario: Scenario, plan: SweepPlan, text: string, seed: number): ReadAnswers =>
+    readAnswers(scenario, plan, text.split("\n"), { seed }),
 };
 
 export type ExploreApi = typeof api;

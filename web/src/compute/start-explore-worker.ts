@@ -17,6 +17,8 @@ export function startExploreWorker(): ErrandWorker {
           return remote.draws(errand.scenario, errand.plan, [errand.from, errand.to], Comlink.proxy(tell));
         case "summary":
           return remote.summary(errand.scenario, errand.plan, errand.rows);
+        case "answers":
+          return remote.answers(errand.scenario, errand.plan, errand.text, errand.seed);
       }
     },
     terminate() {

@@ -1,10 +1,11 @@
-import { cellLines, readAnswers, type Scenario, type SweepPlan } from "@restband/solver";
+import { cellLines, type Scenario, type SweepPlan } from "@restband/solver";
 import { useState } from "react";
 import { Button } from "../../../components/button.tsx";
 import { ErrorNote } from "../../../components/error-note.tsx";
 import { FileButton } from "../../../components/file-button.tsx";
 import { fileNameOf, saveFile } from "../../../components/save-file.ts";
 import { announce } from "../../../components/status.tsx";
+import { idlePool } from "../../../compute/explore-pools.ts";
 
 interface SolveElsewhereProps {
   scenario: Scenario;
@@ -20,14 +21,23 @@ const MOST_SHOWN = 3;
 /** The cells as a file to be solved by other machines, and the way back for their answers. */
 export function SolveElsewhere({ scenario, plan, title, onTiles }: SolveElsewhereProps) {
   const [faults, setFaults] = useState<readonly string[]>([]);
+  const [isReading, setReading] = useState(false);
   if (plan.continuation !== "none") return null;
-  const read = (text: string): void => {
+  const read = async (text: string): Promise<void> => {
+    setReading(true);
     const seed = crypto.getRandomValues(new Int32Array(1))[0];
-    const answers = readAnswers(scenario, plan, text.split("\n"), { seed });
-    setFaults(answers.faults.map(({ path, message }) => (path === "" ? message : `${path}: ${message}`)));
-    if (!answers.tiles) return;
-    onTiles?.(answers.tiles);
-    announce(`All cells are here. ${answers.recomputed} of them were run again and agree.`);
+    const errand = { kind: "answers" as const, scenario, plan, text, seed };
+    try {
+      const answers = await idlePool.send(errand, new AbortController().signal);
+      setFaults(answers.faults.map(({ path, message }) => (path === "" ? message : `${path}: ${message}`)));
+      if (!answers.tiles) return;
+      onTiles?.(answers.tiles);
+      announce(`All cells are here. ${answers.recomputed} of them were run again and agree.`);
+    } catch (error) {
+      setFaults([error instanceof Error ? error.message : String(error)]);
+    } finally {
+      setReading(false);
+    }
   };
   return (
     <details className="mt-8 border-t border-line pt-4">
@@ -56,13 +66,14 @@ export function SolveElsewhere({ scenario, plan, title, onTiles }: SolveElsewher
           <FileButton
             accept=".jsonl,.ndjson,.txt"
             most={MOST_BYTES}
-            onText={read}
+            onText={(text) => void read(text)}
             onRefused={(sentence) => setFaults([sentence])}
           >
             Bring in the answers
           </FileButton>
         )}
       </div>
+      {isReading && <p className="late mt-3 text-13 text-quiet">Reading the answers, and running some of them again</p>}
       {faults.length > 0 && (
         <ErrorNote className="mt-4">
           {faults.slice(0, MOST_SHOWN).map((fault) => (
