@@ -30,7 +30,7 @@ export function ReplayRow({ replay, revision, ownId }: ReplayRowProps) {
   const version = replay.solverVersion === result.solverVersion ? "" : `, solver ${replay.solverVersion}`;
   return (
     <li className="border-b border-line py-2">
-      <div className="grid items-baseline gap-x-6 gap-y-1 desk:grid-cols-[250px_minmax(0,1fr)_auto_auto]">
+      <div className="grid items-baseline gap-x-6 gap-y-1 desk:grid-cols-[250px_minmax(0,1fr)_90px_240px]">
         <p>
           {wayWords(replay.way, result.method)}
           {version}
@@ -40,7 +40,7 @@ export function ReplayRow({ replay, revision, ownId }: ReplayRowProps) {
           <PowerText text={largestWords(replay, content.motion)} />
         </p>
         <StateMark {...replayVerdicts[replay.verdict]} />
-        <p className="text-13 text-quiet">
+        <p className="text-13 text-quiet desk:text-right">
           {who}, <time dateTime={replay.at}>{sayWhen(new Date(replay.at))}</time>
           {" · "}
           <button type="button" className="link" aria-expanded={isOpen} onClick={() => setOpen(!isOpen)}>
@@ -48,6 +48,11 @@ export function ReplayRow({ replay, revision, ownId }: ReplayRowProps) {
           </button>
         </p>
       </div>
+      {replay.verdict === "sensitive" && (
+        <p className="mt-1 text-13 text-quiet">
+          <PowerText text={replayVerdicts.sensitive.says} />
+        </p>
+      )}
       {replay.convergence.length > 0 && <Convergence replay={replay} />}
       {isOpen && <Figures replay={replay} motion={content.motion} />}
     </li>

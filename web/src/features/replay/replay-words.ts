@@ -14,7 +14,7 @@ export const replayVerdicts = {
   sensitive: {
     word: "sensitive",
     tone: "quiet",
-    says: "Not reproducible to this precision: inputs moved by 1e-12 move the run as much.",
+    says: "Not reproducible to this precision: inputs moved by 10⁻¹² of themselves move the run as much.",
   },
 } as const;
 
