@@ -124,6 +124,23 @@ describe("the page of a revision", () => {
     expect(await section("Replay")).toHaveTextContent("Frozen by solver 0.0.9");
   });
 
+  it("says what it means that a replay is sensitive, and which solver ran it", async () => {
+    const by = { accountId: ines.id, name: ines.name };
+    const figures = {
+      verdict: "sensitive",
+      allowed: 1e-9,
+      differences: ["The events are not the same."],
+      deviations: [],
+    };
+    const run = { way: "other-method", solverVersion: "0.0.9", convergence: [] };
+    const kept = { ...run, ...figures, id: "r0", revisionId: id, by, at: "2026-12-01T09:12:00.000Z" };
+    fakeServer(seen(frozen(), { [`GET ${at}/replays`]: () => ok([kept]) }));
+    openPage(at);
+    const row = await within(await section("Replay")).findByRole("listitem");
+    expect(row).toHaveTextContent("Other method, adaptive, solver 0.0.9");
+    expect(row).toHaveTextContent(/Not reproducible to this precision: inputs moved by 10/u);
+  });
+
   it("offers no Python file where there is none, and says why", async () => {
     fakeServer(seen(frozen({ ...creepFeed, span: { ...creepFeed.span, maxEvents: 1 } })));
     openPage(at);
