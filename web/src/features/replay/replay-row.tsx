@@ -3,18 +3,11 @@ import { useState } from "react";
 import { DataTable, type Column } from "../../components/data-table.tsx";
 import { Figure } from "../../components/figure.tsx";
 import { PowerText } from "../../components/power-text.tsx";
-import { StateMark } from "../../components/state-mark.tsx";
+import { sensitiveWords, VerdictMark } from "../../components/verdict-mark.tsx";
 import { formatNumber } from "../../format/format-number.ts";
 import { readQuantity } from "../../format/format-quantity.ts";
 import { sayWhen } from "../../format/when.ts";
-import {
-  deviationMeasure,
-  deviationName,
-  largestWords,
-  replayVerdicts,
-  shareOfPeak,
-  wayWords,
-} from "./replay-words.ts";
+import { deviationMeasure, deviationName, largestWords, shareOfPeak, wayWords } from "./replay-words.ts";
 
 interface ReplayRowProps {
   replay: Replay;
@@ -39,7 +32,7 @@ export function ReplayRow({ replay, revision, ownId }: ReplayRowProps) {
           <span className="text-13 text-quiet">largest difference </span>
           <PowerText text={largestWords(replay, content.motion)} />
         </p>
-        <StateMark {...replayVerdicts[replay.verdict]} />
+        <VerdictMark verdict={replay.verdict} />
         <p className="text-13 text-quiet desk:text-right">
           {who}, <time dateTime={replay.at}>{sayWhen(new Date(replay.at))}</time>
           {" · "}
@@ -50,7 +43,7 @@ export function ReplayRow({ replay, revision, ownId }: ReplayRowProps) {
       </div>
       {replay.verdict === "sensitive" && (
         <p className="mt-1 text-13 text-quiet">
-          <PowerText text={replayVerdicts.sensitive.says} />
+          <PowerText text={sensitiveWords} />
         </p>
       )}
       {replay.convergence.length > 0 && <Convergence replay={replay} />}

@@ -8,16 +8,6 @@ import type { Measure } from "../../format/unit.ts";
 type Deviation = ReplayDraft["deviations"][number];
 type Motion = Scenario["motion"];
 
-export const replayVerdicts = {
-  agrees: { word: "agrees", tone: "kept", says: "Every quantity and event is within what is allowed." },
-  differs: { word: "differs", tone: "broken", says: "Something is not the same." },
-  sensitive: {
-    word: "sensitive",
-    tone: "quiet",
-    says: "Not reproducible to this precision: inputs moved by 10⁻¹² of themselves move the run as much.",
-  },
-} as const;
-
 const eventColumns: Readonly<Record<string, { label: string; dimension: Measure["dimension"] }>> = {
   t: { label: "time", dimension: "time" },
   x: { label: "position", dimension: "displacement" },

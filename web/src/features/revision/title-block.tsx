@@ -1,6 +1,7 @@
 import type { Integrity, Replay, Revision } from "@restband/api/contract";
 import type { ReactNode } from "react";
 import { StateMark } from "../../components/state-mark.tsx";
+import { VerdictMark } from "../../components/verdict-mark.tsx";
 import { sayMoment } from "../../format/when.ts";
 import { RevisionMark } from "./revision-mark.tsx";
 
@@ -11,12 +12,6 @@ interface TitleBlockProps {
   /** Undefined until it is read. */
   integrity: Integrity | undefined;
 }
-
-const verdicts = {
-  agrees: { word: "agrees", tone: "kept" },
-  differs: { word: "differs", tone: "broken" },
-  sensitive: { word: "sensitive", tone: "quiet" },
-} as const;
 
 /** What stands at the head of a drawing: number, date, who prepared it, who replayed it, how it stands, digest and seal. */
 export function TitleBlock({ revision, replays, integrity }: TitleBlockProps) {
@@ -42,7 +37,7 @@ export function TitleBlock({ revision, replays, integrity }: TitleBlockProps) {
       <Line name="replayed">
         {last ? (
           <>
-            {last.by.name} <StateMark {...verdicts[last.verdict]} className="float-right" />
+            {last.by.name} <VerdictMark verdict={last.verdict} className="float-right" />
           </>
         ) : (
           <span className="text-quiet">{replays ? "not yet" : ""}</span>
