@@ -5,6 +5,7 @@ import {
   jointDraftOf,
   withEntry,
   withFit,
+  withForm,
   withMember,
   withoutMember,
 } from "../../../web/src/features/explore/study/joint-draft.ts";
@@ -100,6 +101,16 @@ describe("values that go together", () => {
     const { plan } = planOf({ joint: [withFit(springAndMass, fit)] });
     expect(plan?.joint[0].means).toEqual([4.1e6, 118]);
     expect(plan?.joint[0].covariance[1]).toEqual([expect.closeTo(-2e5, 6), 9]);
+  });
+
+  it("told the other way, it is the same scatter", () => {
+    const draft = withEntry(withEntry(springAndMass, [0, 0], "0.1"), [1, 0], "-0.5");
+    const told = withForm(draft, "covariance");
+    expect(told.entries).toEqual([["0.01"], ["−0.3", "36"]]);
+    const covariance = (joint: typeof draft) => planOf({ joint: [joint] }).plan?.joint[0].covariance.flat() ?? [];
+    covariance(told).forEach((value, i) => expect(value / covariance(draft)[i]).toBeCloseTo(1, 9));
+    expect(withForm(told, "correlations").entries).toEqual([["0.1"], ["−0.5", "6"]]);
+    expect(withForm(withEntry(draft, [1, 1], "six"), "covariance").entries[1][1]).toBe("six");
   });
 
   it("with one more, or one fewer", () => {

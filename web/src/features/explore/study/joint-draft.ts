@@ -51,6 +51,23 @@ export const withEntry = (draft: JointDraft, [i, j]: readonly [number, number], 
   entries: draft.entries.map((row, k) => (k === i ? row.map((each, l) => (l === j ? text : each)) : row)),
 });
 
+/** The same scatter told the other way; entries that cannot be read stay as they are typed. */
+export function withForm(draft: JointDraft, form: JointDraft["form"]): JointDraft {
+  const read = draft.entries.map((row) => row.map((text) => parseNumber(text.trim())));
+  const numbers = read.map((row) => row.map((each) => (each && "value" in each ? each.value : NaN)));
+  if (form === draft.form || numbers.flat().some(Number.isNaN)) return { ...draft, form };
+  const deviations = numbers.map((row, i) => (draft.form === "covariance" ? Math.sqrt(row[i]) : row[i]));
+  const entries = numbers.map((row, i) =>
+    row.map((value, j) => {
+      const product = deviations[i] * deviations[j];
+      const other =
+        form === "covariance" ? (i === j ? product : value * product) : i === j ? deviations[i] : value / product;
+      return Number.isFinite(other) ? formatExactly(Number(other.toPrecision(9))) : draft.entries[i][j];
+    }),
+  );
+  return { ...draft, form, entries };
+}
+
 /** The same draft with what a fit found. A fit of a measurement comes in here, typed, pasted or by itself. */
 export const withFit = (draft: JointDraft, { estimates, covariance }: FitReading): JointDraft => ({
   ...draft,

@@ -6,7 +6,7 @@ import type { ExploreField } from "../explore-field.ts";
 import { FieldChoice } from "../field-choice.tsx";
 import { TypedNumber, typedOf } from "../typed-number.tsx";
 import { CovarianceMatrix } from "./covariance-matrix.tsx";
-import { withFit, withMember, withoutMember, type JointDraft } from "./joint-draft.ts";
+import { withFit, withForm, withMember, withoutMember, type JointDraft } from "./joint-draft.ts";
 import { PasteFit } from "./paste-fit.tsx";
 
 interface JointFormProps {
@@ -69,7 +69,7 @@ export function JointForm({ draft, fields, free, faultAt, onChange, onRemove }: 
           { value: "covariance", label: "their covariance" },
         ]}
         value={draft.form}
-        onChange={(event) => onChange({ ...draft, form: event.target.value as JointDraft["form"] })}
+        onChange={(event) => onChange(withForm(draft, event.target.value as JointDraft["form"]))}
       />
       <CovarianceMatrix draft={draft} fields={fields} faultAt={faultAt} onChange={onChange} />
       {impossible && <FieldError>{impossible}</FieldError>}
