@@ -23,24 +23,17 @@ export const explorationQuery = (projectId: string, explorationId: string) =>
 /** What can be done with the explorations of a project; lists are read anew after what changes them. */
 export function useExplorationActs(projectId: string) {
   const client = useQueryClient();
-  const at = (explorationId: string) => ({ params: { projectId, explorationId } });
   const refresh = (scenarioId: string): void =>
     void client.invalidateQueries({ queryKey: explorationsQuery(projectId, scenarioId).queryKey });
-  const keep = (stored: StoredExploration): StoredExploration => {
-    client.setQueryData(explorationQuery(projectId, stored.id).queryKey, stored);
-    refresh(stored.scenarioId);
-    return stored;
-  };
   return {
-    create: async (scenarioId: string, body: ExplorationDraft) =>
-      keep(await call("createExploration", { params: { projectId, scenarioId }, body })),
-    claim: async (id: string, runner: string, solverVersion: string) =>
-      keep(await call("claimExploration", { ...at(id), body: { runner, solverVersion } })),
-    release: (id: string, runner: string) => call("releaseExploration", { ...at(id), body: { runner } }),
-    conclude: (id: string, body: Conclusion) => call("concludeExploration", { ...at(id), body }),
-    read: async (id: string) => keep(await call("readExploration", at(id))),
-    remove: async (scenarioId: string, id: string) => {
-      await call("deleteExploration", at(id));
+    async create(scenarioId: string, body: ExplorationDraft): Promise<StoredExploration> {
+      const stored = await call("createExploration", { params: { projectId, scenarioId }, body });
+      client.setQueryData(explorationQuery(projectId, stored.id).queryKey, stored);
+      refresh(scenarioId);
+      return stored;
+    },
+    async remove(scenarioId: string, explorationId: string): Promise<void> {
+      await call("deleteExploration", { params: { projectId, explorationId } });
       refresh(scenarioId);
     },
   };
