@@ -124,6 +124,9 @@ describe("a sweep", () => {
     await save(ada, id, 1);
     await ada.get("concludeExploration", { params: at(id), body });
     expect(await read(bo, id)).toMatchObject({ state: "done", headline: body.headline, answer: { cells: 5 } });
+    const other = { headline: "Never slides smoothly.", answer: {} };
+    await bo.get("concludeExploration", { params: at(id), body: other });
+    expect(await read(ada, id)).toMatchObject({ headline: body.headline, answer: { cells: 5 } });
   });
 });
 

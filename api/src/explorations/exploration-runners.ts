@@ -72,13 +72,17 @@ export function createRunners(database: Database) {
       return findTiles(database, explorationId, numbers);
     },
 
-    /** @throws Refusal 409 while tiles are missing */
+    /**
+     * Keeps what came of it; once kept it stays, for the same tiles say the same to everybody.
+     * @throws Refusal 409 while tiles are missing
+     */
     async conclude(place: Place, conclusion: z.output<typeof conclusionSchema>): Promise<void> {
       await database.transaction(async (transaction) => {
         const row = (await lockExploration(transaction, place.projectId, place.explorationId)) ?? missing();
         const all = tilesOf(row).length;
         const left = all - Number(row.saved);
         if (left > 0) throw new Refusal(409, "not-done", `${left} of ${all} tiles are not there yet.`);
+        if (row.headline !== null) return;
         await concludeExploration(transaction, place.explorationId, conclusion);
         await holdExploration(transaction, place.explorationId, null);
       });
