@@ -75,15 +75,13 @@ def tabulated(stretch, low, high):
     if not pieces:
         cuts = np.sort([*np.linspace(low, high, 5 + int((high - low) * FASTEST_HZ * 20)), *stretch.kinks(low, high)])
         pieces = [(a, b, None) for a, b in zip(cuts[:-1], cuts[1:])]
-    parts, weights = [], np.zeros(1)
+    parts, weights = [], np.zeros(8 * len(pieces) + 1)
     for a, b, piece in pieces:
         times = (a + b) / 2 + (b - a) / 2 * NODES
         times[0], times[-1] = a, b
         first = 1 if parts else 0  # two pieces share the node between them
         parts.append(np.array([value + 0.0 * times for value in stretch.state(times, piece).values()])[:, first:])
-        share = (b - a) / 2 * WEIGHTS
-        weights[-1] += share[0]
-        weights = np.concatenate([weights, share[1:]])
+        weights[8 * len(parts) - 8 : 8 * len(parts) + 1] += (b - a) / 2 * WEIGHTS
     return np.concatenate(parts, axis=1), weights, [(b, stretch, piece) for _, b, piece in pieces]
 
 

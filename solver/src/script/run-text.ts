@@ -27,6 +27,8 @@ def slide(start, d, slip, side, pull, at, end):
             values.append(("spring", pull * (z[1] + drift_of_spring(t, at)), NOISE * SCALES[1]))
         return values
 
+    speed = lambda t: side * piece_at(pieces, t)[1]
+    gain = lambda t: side * rates(t, piece_at(pieces, t))[1]
     solver = DOP853(rates, start, (d, slip), end, rtol=RTOL, atol=ATOL * SCALES, max_step=LONGEST_STEP)
     pieces, above, looks = [], {}, [(start, side * slip)]
     while solver.status == "running":
@@ -44,7 +46,7 @@ def slide(start, d, slip, side, pull, at, end):
                 elif value < -noise or t == end and is_zero_at(t, value, look, new - old):
                     found.append((found_zero(look, above.get(name, start), t), name))
             looks = [*looks[-2:], (t, side * piece(t)[1])]
-            found = found or touched(looks, lambda s: side * piece_at(pieces, s)[1])
+            found = found or touched(looks, speed, gain)
             if found:
                 zero, name = min(found)
                 zero = end if end - zero < NEAR * end else zero
@@ -54,12 +56,15 @@ def slide(start, d, slip, side, pull, at, end):
     return pieces, end, solver.y[0], solver.y[1], None
 
 
-def touched(looks, speed):
-    """Where |v_r| has come down to 0 and goes up again, between the last three looks."""
-    if len(looks) < 3 or not looks[0][1] > looks[1][1] < looks[2][1] or looks[1][1] > 1e-2 * SCALES[1]:
+def touched(looks, speed, gain):
+    """Where |v_r| has come down to 0 and goes up again between the last three looks; what stays near 0 only approaches it."""
+    if len(looks) < 3:
         return []
-    low = minimize_scalar(speed, bounds=(looks[0][0], looks[2][0]), method="bounded", options={"xatol": 1e-12 * looks[2][0]})
-    return [(low.x, "contact")] if low.fun < TOUCH * SCALES[1] else []
+    (low, before), (middle, least), (high, after) = looks
+    if not before > least < after or least > 1e-2 * SCALES[1] or min(before, after) < 1e3 * TOUCH * SCALES[1]:
+        return []
+    bottom = brentq(gain, low, high, xtol=1e-15 * max(1.0, high)) if gain(low) < 0 < gain(high) else middle
+    return [(bottom, "contact")] if speed(bottom) < TOUCH * SCALES[1] else []
 
 
 def is_zero_at(t, value, look, step):
