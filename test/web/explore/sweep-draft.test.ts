@@ -68,7 +68,9 @@ describe("a sweep as it is typed", () => {
     // ln 100 over the decay of 350/(2·120) a second, and 40 periods of 34.4 ms: 4.54 s.
     expect(suggestedSeconds(creepFeed)).toBe(5);
     expect(suggestedSeconds(variant({ base: [] }))).toBe(0.5);
-    expect(secondsOf({ ...draft, seconds: { text: "0", unit: "s" } }, creepFeed)).toBeNull();
-    expect(secondsOf({ ...draft, seconds: { text: "200", unit: "ms" } }, creepFeed)).toBe(0.2);
+    const lasting = (text: string, unit = "s") => secondsOf({ ...draft, seconds: { text, unit } }, creepFeed);
+    expect(lasting("0")).toEqual({ message: "A run lasts longer than nothing." });
+    expect(lasting("1e9")).toEqual({ message: expect.stringMatching(/^A run lasts .* at most\.$/) as string });
+    expect(lasting("200", "ms")).toEqual({ value: 0.2 });
   });
 });

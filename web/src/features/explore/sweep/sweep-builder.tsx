@@ -59,10 +59,12 @@ export function SweepBuilder({ scenario, onRun }: SweepBuilderProps) {
   return (
     <AskingForm
       act="Run the sweep"
-      faults={faults}
-      isPlaced={(path) => /^axes\[[01]\]\.|^continuation$/.test(path)}
+      faults={"message" in seconds ? [...faults, { path: "seconds", message: seconds.message }] : faults}
+      isPlaced={(path) => /^axes\[[01]\]\.|^continuation$|^seconds$/.test(path)}
       {...(plan && { remark: `${cellsOf(plan)} cells` })}
-      onRun={plan && seconds !== null ? () => onRun({ plan, seconds }, sweepTitle(plan, scenario)) : null}
+      onRun={
+        plan && "value" in seconds ? () => onRun({ plan, seconds: seconds.value }, sweepTitle(plan, scenario)) : null
+      }
     >
       <AxisForm name="Across" {...axisProps(0, draft.first, (first) => set({ first }))} />
       {draft.second ? (
@@ -103,6 +105,7 @@ interface HowRunProps {
 
 /** Where each cell starts, how long it runs, and what follows what is varied. */
 function HowRun({ draft, scenario, set, fault }: HowRunProps) {
+  const seconds = secondsOf(draft, scenario);
   return (
     <div className="flex flex-wrap items-start gap-x-8 gap-y-4">
       <SelectField
@@ -116,7 +119,7 @@ function HowRun({ draft, scenario, set, fault }: HowRunProps) {
         label="Each run lasts"
         typed={draft.seconds}
         measure={timeMeasure(scenario)}
-        error={secondsOf(draft, scenario) === null ? "A run lasts longer than nothing." : undefined}
+        error={"message" in seconds ? seconds.message : undefined}
         onChange={(typed) => set({ seconds: typed })}
       />
       <div className="flex flex-col gap-2 desk:pt-8">

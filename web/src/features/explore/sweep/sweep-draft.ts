@@ -8,6 +8,7 @@ import {
   type QuantityName,
   type Scenario,
 } from "@restband/solver";
+import { say } from "../../../format/format-quantity.ts";
 import { quantityNamed } from "../../../format/quantities.ts";
 import type { ExploreField } from "../explore-field.ts";
 import { exploreField, exploreFields, likeliestField, rangeAround } from "../explore-field.ts";
@@ -104,10 +105,14 @@ export function axisDraftOf(field: ExploreField, scenario: Scenario, spacing: Sp
   };
 }
 
-/** How long each run lasts, s; null where it cannot be read or is not above 0. */
-export function secondsOf({ seconds }: SweepDraft, scenario: Scenario): number | null {
+/** How long each run lasts, s; or what is wrong with it. What cannot be read is told by its own field. */
+export function secondsOf({ seconds }: SweepDraft, scenario: Scenario): { value: number } | { message: string } {
   const read = readTyped(seconds, timeMeasure(scenario));
-  return "value" in read && read.value > 0 ? read.value : null;
+  if ("message" in read) return read;
+  const { maximum = Infinity } = exploreField(scenario, "span.seconds") ?? {};
+  if (!(read.value > 0)) return { message: "A run lasts longer than nothing." };
+  if (read.value <= maximum) return read;
+  return { message: `A run lasts ${say(maximum, timeMeasure(scenario))} at most.` };
 }
 
 /** What is typed as a plan, or every fault at its path. Numbers that cannot be read are told by their own field. */
