@@ -14,6 +14,8 @@ export interface CompiledLaw {
   slope(v: number): number;
   /** b of the term b·v added to the friction force, N·s/m. */
   readonly fluid: number;
+  /** True where μ(v) leaves rest with infinite slope, so that an integrator's error estimate cannot see it there. */
+  readonly isSteepAtRest?: boolean;
   /** Speeds at which μ(v) is not smooth (nodes of a table): the adaptive method restarts there. */
   readonly corners: readonly number[];
   /** Laws with a deflection of their own (LuGre): present only there. */

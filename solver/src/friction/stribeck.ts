@@ -68,6 +68,7 @@ export const stribeck: FrictionLaw<"stribeck", Stribeck> = {
       },
       fluid,
       corners: [],
+      isSteepAtRest: exponent < 1,
     };
   },
 };

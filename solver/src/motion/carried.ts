@@ -128,7 +128,7 @@ export class Carried {
     this.evaluate(0);
     let swing = (Math.abs(this.slide) + this.grip) * inputs.rippleBound(0) + inputs.forceBound(0);
     let drift = Math.abs(inputs.force[1]);
-    let isCurved = inputs.force[2] !== 0 || inputs.force[3] !== 0;
+    let isCurved = inputs.force[2] !== 0 || inputs.force[3] !== 0 || inputs.hasSweep;
     if (this.carrier === "base") {
       swing += this.inertia * inputs.baseBound(2);
       isCurved ||= inputs.acceleration[1] !== 0;

@@ -227,12 +227,17 @@ export class Inputs {
     return this.base[2] === 0 && this.base[3] === 0 && this.baseBound(1) === 0;
   }
 
+  /** True where a sweep acts. */
+  get hasSweep(): boolean {
+    return this.acting.length > 0;
+  }
+
   /** True where the polynomials or a sweep move the inputs on, so that nothing repeats itself. */
   isSwept(): boolean {
     for (let j = 1; j < 4; j++) {
       if (this.force[j] !== 0 || this.base[j] !== 0 || this.acceleration[j] !== 0) return true;
     }
-    return this.acting.length > 0;
+    return this.hasSweep;
   }
 
   /** The fastest angular frequency acting, rad/s; 0 without harmonics. */

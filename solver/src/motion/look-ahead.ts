@@ -77,12 +77,17 @@ function driftHorizon(problem: Problem, stepper: Stepper, s: Stance): number {
   return (2 * (Math.abs(carried.need) + room + 2 * swing)) / (1 - problem.solid.proportional);
 }
 
-/** Rate at which the needed force grows for ever, N/s; of a spring that stiffens (k3) at least this, up to its sign. */
+/**
+ * Rate at which the needed force grows for ever, N/s; of a spring that stiffens (k3) at least this, up to its sign. 0 where
+ * spring and force ramp cancel but for their rounding.
+ */
 function endlessRate(problem: Problem, inputs: Inputs, s: Stance): number {
   if (problem.counterface === "base") return inputs.force[1];
   const stretchRate = problem.beltVelocity - inputs.base[1];
   const stiffness = problem.stiffness + problem.cubic * s.position ** 2;
-  return stiffness * stretchRate - inputs.force[1];
+  const spring = stiffness * stretchRate;
+  const rate = spring - inputs.force[1];
+  return Math.abs(rate) > 2 ** -50 * (Math.abs(spring) + Math.abs(inputs.force[1])) ? rate : 0;
 }
 
 /** How long periodic inputs are looked at, s: a hair over their common period, or 1,000 of the slowest; 0 without any. */

@@ -70,6 +70,7 @@ export class Stepper {
   /** Takes `s` to the end of its segment, not beyond `limit`, and tells what happened there. */
   step(s: Stance, limit: number): Happening {
     const { form } = this;
+    this.work.spent++; // even a step of no length costs something, so that none goes on for ever
     const end = Math.min(form.inputs.end, limit);
     form.take(s);
     this.ending.tau = end - s.t;

@@ -146,32 +146,57 @@ function takeExtremes(motion: Motion, panel: Panel, tally: Tally, state: State):
   if (low < tally.min) tally.min = low;
   // a top stands out of its neighbours by less than the panel's range: most panels cannot reach the extremes so far
   if (high + (high - low) <= tally.max && low - (high - low) >= tally.min) return;
-  for (let n = 1; n < last; n++) polish(motion, panel, tally, state, n, nodes[n], values[n]);
-  // between the outermost node and the end of the panel no node can stand out: the parabola through three of them tells
-  for (const n of [1, last - 1]) {
-    const u = vertex(nodes, values, n);
-    const isOutside = n === 1 ? u > -1 && u < nodes[1] : u > nodes[n] && u < 1;
-    if (!isOutside) continue;
-    const value = panel.rule.interpolate(values, u);
-    const outer = n === 1 ? 0 : last;
-    if (value > Math.max(values[n], values[outer]) || value < Math.min(values[n], values[outer])) {
-      polish(motion, panel, tally, state, n, u, value);
-    }
+  for (let n = 1; n < last; n++) {
+    const isTop = values[n] >= values[n - 1] && values[n] >= values[n + 1];
+    const isBottom = values[n] <= values[n - 1] && values[n] <= values[n + 1];
+    if (isTop === isBottom) continue;
+    const bend = Math.max(Math.abs(values[n] - values[n - 1]), Math.abs(values[n] - values[n + 1]));
+    polish(motion, panel, tally, state, {
+      isTop,
+      at: values[n],
+      bend,
+      u: vertex(nodes, values, n),
+      a: nodes[n - 1],
+      b: nodes[n + 1],
+    });
   }
+  takeAtEnd(motion, panel, tally, state, -1);
+  takeAtEnd(motion, panel, tally, state, 1);
 }
 
-/** Takes the top or bottom about u, between the nodes on both sides of n, into the tally if it could be a new extreme. */
-function polish(motion: Motion, panel: Panel, tally: Tally, state: State, n: number, u: number, at: number): void {
+/** Between the end of a panel and the node next to it no node can stand out: there the slope at the end tells. */
+function takeAtEnd(motion: Motion, panel: Panel, tally: Tally, state: State, end: -1 | 1): void {
   const { values } = tally;
-  const isTop = at >= values[n - 1] && at >= values[n + 1];
-  const isBottom = at <= values[n - 1] && at <= values[n + 1];
-  if (isTop === isBottom) return;
+  const { nodes } = panel.rule;
+  const edge = end < 0 ? 0 : nodes.length - 1;
+  const next = edge - end;
+  const width = nodes[next] - nodes[edge];
+  // on the way inwards
+  const rise = panel.rule.slopeAtEnd(values, end) * width;
+  const fall = values[edge] - values[next];
+  if (rise === 0 || rise * fall < 0) return;
+  const u = nodes[edge] + (width * rise) / (2 * (rise + fall));
+  const [a, b] = end < 0 ? [nodes[edge], nodes[next]] : [nodes[next], nodes[edge]];
+  polish(motion, panel, tally, state, { isTop: rise > 0, at: values[edge], bend: Math.abs(rise), u, a, b });
+}
+
+/** A top (or bottom) between a and b, near u; `at` is what is known of it, and it stands no more than `bend` out of that. */
+interface Bump {
+  isTop: boolean;
+  at: number;
+  bend: number;
+  u: number;
+  a: number;
+  b: number;
+}
+
+/** Takes a top or bottom into the tally if it could be a new extreme. */
+function polish(motion: Motion, panel: Panel, tally: Tally, state: State, { isTop, at, bend, u, a, b }: Bump): void {
   const sign = isTop ? 1 : -1;
   const best = isTop ? tally.max : -tally.min;
-  const bend = Math.max(Math.abs(at - values[n - 1]), Math.abs(at - values[n + 1]));
   if (sign * at + bend <= best) return;
-  const { nodes } = panel.rule;
-  const place = panel.rule.top(values, n, isTop);
+  const { values } = tally;
+  const place = panel.rule.top(values, u > a && u < b ? u : (a + b) / 2, a, b, isTop);
   const expected = sign * panel.rule.interpolate(values, place);
   if (expected + trusted * bend <= best) return;
   const read = (where: number): number => {
@@ -180,7 +205,7 @@ function polish(motion: Motion, panel: Panel, tally: Tally, state: State, n: num
   };
   let value = read(place);
   const isTold = Math.abs(value - expected) <= trusted * bend && value >= sign * at;
-  if (!isTold) value = peak(read, nodes[n - 1], u, nodes[n + 1], read(u));
+  if (!isTold) value = peak(read, a, place > a && place < b ? place : (a + b) / 2, b, value);
   if (isTop) tally.max = Math.max(tally.max, value);
   else tally.min = Math.min(tally.min, -value);
 }

@@ -39,7 +39,7 @@ export function firstFall(g: (x: number) => number, a: number, b: number, floor 
   for (let n = 1; n <= looks; n++) {
     const x = n === looks ? b : a + ((b - a) * n) / looks;
     const gx = g(x);
-    if (gx <= floor) return gLast > 0 ? bracketedRoot(g, last, x, gLast, gx) : x;
+    if (gx <= floor) return gLast > 0 ? bracketedRoot(g, last, x, gLast, gx) : fallAfterStart(g, a, x, gx);
     if (floor === 0) {
       let bottom: Dip | null = null;
       if (n === 1 && gx >= gLast) bottom = dipAtEdge(g, a, x, gLast, gx);
@@ -53,6 +53,16 @@ export function firstFall(g: (x: number) => number, a: number, b: number, floor 
     gLast = gx;
   }
   return Infinity;
+}
+
+/** The fall of a g that no look has seen above 0: it has risen, if at all, right after a. The look itself where it never has. */
+function fallAfterStart(g: (x: number) => number, a: number, x: number, gx: number): number {
+  for (let share = 1 / 2; share > 2 ** -40; share /= 2) {
+    const risen = a + share * (x - a);
+    const value = g(risen);
+    if (value > 0) return bracketedRoot(g, risen, x, value, gx);
+  }
+  return x;
 }
 
 /** Where g dips, and how far. */

@@ -11,12 +11,16 @@ export class PanelRule {
   /** Weights of the integral over u; 0 at the ends. */
   readonly weights: Float64Array;
   private readonly barycentric: Float64Array;
+  /** What each value adds to the slope at u = −1. */
+  private readonly slopes: Float64Array;
 
   constructor(count: number) {
     const roots = legendreRoots(count);
     this.nodes = Float64Array.from([-1, ...roots, 1]);
     this.weights = Float64Array.from([0, ...roots.map((x) => weightAt(x, count)), 0]);
     this.barycentric = this.nodes.map((u) => 1 / this.nodes.reduce((product, other) => product * (u - other || 1), 1));
+    this.slopes = this.nodes.map((u, i) => (i === 0 ? 0 : this.barycentric[i] / this.barycentric[0] / (-1 - u)));
+    this.slopes[0] = -this.slopes.reduce((sum, share) => sum + share, 0);
   }
 
   /** The polynomial through the values at the nodes, at u. */
@@ -34,17 +38,23 @@ export class PanelRule {
     return over / under;
   }
 
+  /** Its slope at u = −1, or +1, per unit of u. */
+  slopeAtEnd(values: ArrayLike<number>, end: -1 | 1): number {
+    // nodes and weights lie alike on both sides: one row of the differentiation matrix serves both ends
+    const { slopes } = this;
+    const last = slopes.length - 1;
+    let sum = 0;
+    for (let i = 0; i <= last; i++) sum += slopes[i] * values[end < 0 ? i : last - i];
+    return -end * sum;
+  }
+
   /**
-   * Where that polynomial has its top (or bottom) next to node n, by Newton's method on differences; where it is led out of
-   * the neighbourhood of the node, it stays at its edge.
+   * Where it has its top (or bottom) between a and b, by Newton's method on differences from u on; where it is led out, it
+   * stays at the edge.
    */
-  top(values: ArrayLike<number>, n: number, isTop: boolean): number {
-    const { nodes } = this;
+  top(values: ArrayLike<number>, from: number, a: number, b: number, isTop: boolean): number {
     const apart = 1e-3;
-    const lowest = nodes[n - 1];
-    const highest = nodes[n + 1];
-    let u = vertex(nodes, values, n);
-    if (!(u > lowest && u < highest)) u = nodes[n];
+    let u = from;
     for (let i = 0; i < 8; i++) {
       const here = this.interpolate(values, u);
       const before = this.interpolate(values, u - apart);
@@ -52,7 +62,7 @@ export class PanelRule {
       const bend = before - 2 * here + after;
       if (isTop ? !(bend < 0) : !(bend > 0)) return u;
       const step = (apart * (before - after)) / (2 * bend);
-      u = Math.min(highest, Math.max(lowest, u + step));
+      u = Math.min(b, Math.max(a, u + step));
       if (Math.abs(step) < 1e-5) return u;
     }
     return u;

@@ -1,5 +1,4 @@
 import { bracketedRoot, firstFall } from "../../numerics/bracketed-root.ts";
-import type { CompiledLaw } from "../../friction/friction-law.ts";
 import type { Work } from "../../numerics/first-zero.ts";
 import { widestPanel } from "../../numerics/panel-rule.ts";
 import type { Problem } from "../../scenario/problem.ts";
@@ -42,7 +41,6 @@ export class IntegratedSlip implements Slip {
   private fastest = 0;
   private readonly at = new Float64Array(2);
   private readonly noiseShare: number;
-  private readonly isSharp: boolean;
   /** What passed 0 at the end of the slip in hand. */
   private watched: ((t: number) => number) | null = null;
 
@@ -52,7 +50,6 @@ export class IntegratedSlip implements Slip {
     private readonly tolerance = usualTolerance,
   ) {
     this.noiseShare = noiseTolerances * tolerance;
-    this.isSharp = isSharpAtRest(problem.law);
   }
 
   begin(_: Inputs, body: BodyValues, stance: Stance): void {
@@ -101,7 +98,7 @@ export class IntegratedSlip implements Slip {
    */
   private stretches(limit: number, unit: number): number[] {
     const { t, slip } = this.stance;
-    if (!this.isSharp || slip !== 0) return [limit];
+    if (!this.problem.law.isSteepAtRest || slip !== 0) return [limit];
     const ends = Array.from({ length: 8 }, (_, i) => t + unit * 10 ** (i - 9));
     return [...ends.filter((end) => end > t && end < limit), limit];
   }
@@ -324,9 +321,4 @@ export class IntegratedSlip implements Slip {
     const slope = law.slope(radius * Math.abs(this.stance.slip)) * normal;
     return slope > 0 && Number.isFinite(slope) ? (radius ** 2 * slope) / inertia : 0;
   }
-}
-
-/** True where μ(v) leaves rest with infinite slope (a Stribeck exponent below 1): its slope then has no limit at v = 0. */
-function isSharpAtRest(law: CompiledLaw): boolean {
-  return law.constant === null && Math.abs(law.slope(1e-18)) > 1.5 * Math.abs(law.slope(1e-12));
 }
