@@ -105,7 +105,7 @@ describe("the page of a sweep", () => {
     expect(screen.getAllByText("kept").length).toBeGreaterThan(1);
     await user.selectOptions(pick, "Peak velocity");
     await user.selectOptions(screen.getByRole("combobox", { name: "Scale" }), "on a scale of ratios");
-    expect(screen.getByText(/^Lines part the scale in six by ratio; its middle is /)).toBeInTheDocument();
+    expect(screen.getByText(/^By ratio; its middle is /)).toBeInTheDocument();
   });
 
   it("tells both branches of cells that follow one another", async () => {

@@ -19,7 +19,8 @@ interface MapLegendProps {
 
 /** What the patterns of the map mean; or the scale of the quantity, with its ends. */
 export function MapLegend({ shown, cells, quantity, scenario }: MapLegendProps) {
-  if (shown.kind === "quantity") return <Scale shown={shown} quantity={quantity} scenario={scenario} />;
+  if (shown.kind === "quantity")
+    return <Scale shown={shown} quantity={quantity} scenario={scenario} hasLines={cells.plan.axes.length === 2} />;
   if (shown.kind === "limit") return <Verdicts />;
   const codes = new Set<number>();
   let isPending = false;
@@ -93,9 +94,11 @@ interface ScaleProps {
   shown: Extract<Shown, { kind: "quantity" }>;
   quantity: string;
   scenario: Scenario;
+  /** Of one field alone there are none. */
+  hasLines: boolean;
 }
 
-function Scale({ shown, quantity, scenario }: ScaleProps) {
+function Scale({ shown, quantity, scenario, hasLines }: ScaleProps) {
   const colours = rampColours(usePlotTheme());
   const measure = measureOfQuantity(quantity, scenario.motion);
   const width = 220;
@@ -115,9 +118,8 @@ function Scale({ shown, quantity, scenario }: ScaleProps) {
         ))}
       </svg>
       <span className="figures">{say(shown.high, measure)}</span>
-      <span>
-        Lines part the scale in six{shown.isLog && <> by ratio; its middle is {say(valueOn(shown, 0.5), measure)}</>}.
-      </span>
+      {shown.isLog && <span>By ratio; its middle is {say(valueOn(shown, 0.5), measure)}.</span>}
+      {hasLines && <span>Lines part the scale in six.</span>}
     </div>
   );
 }
