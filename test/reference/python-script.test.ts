@@ -55,6 +55,15 @@ const scenarios: Record<string, Scenario> = {
     span: { seconds: 0.8, untilRest: false },
     settleBand: 1e-5,
   }),
+  "a body that comes back to its belt's speed at each break-away": buildScenario({
+    body: { inertia: 1, stiffness: 40 },
+    contact: {
+      law: { model: "coulomb", static: 0.3, kinetic: 0.3 },
+      normal: { preload: 10 },
+      counterface: { velocity: 0.1 },
+    },
+    span: { seconds: 4, untilRest: false },
+  }),
   "a body on a belt with falling friction": buildScenario({
     body: { inertia: 2, stiffness: 800, cubic: 3e4, viscous: 0.5 },
     contact: {

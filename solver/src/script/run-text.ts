@@ -88,7 +88,8 @@ def first_passed(hold, start, end):
         finest = {"xtol": 1e-15 * max(1.0, end), "rtol": 9e-16}
         broken = brentq(passed, some[i - 1], some[i], **finest)
         equal = lambda t: abs(hold(t)[0]) - hold(t)[1]
-        return brentq(equal, some[i - 1], broken, **finest) if equal(some[i - 1]) < 0 < equal(broken) else broken, some[i]
+        below = [t for t in some[:i] if equal(t) < 0]
+        return brentq(equal, below[-1], broken, **finest) if below and equal(broken) > 0 else broken, some[i]
     return None, None
 
 
