@@ -75,11 +75,7 @@ def follow(start, z, side, sense, at, end):
     # LSODA goes over to an implicit method by itself where the bristles are stiff
     solver = LSODA(rates, start, z, end, rtol=10 * RTOL, atol=100 * ATOL * SCALES, max_step=LONGEST_STEP)
     pieces, above, noise = [], {}, min(NOISE * SCALES[1], 1e-6 * CREEP)
-    while solver.status == "running":
-        message = solver.step()
-        if solver.status == "failed":
-            sys.exit(f"The integration failed at t = {solver.t}: {message}")
-        piece, old, new = solver.dense_output(), solver.t_old, solver.t
+    for old, new, piece in steps_of(solver):
         pieces.append((old, new, piece))
         for t in np.linspace(old, new, LOOKS + 1)[1:]:
             found = []

@@ -31,11 +31,7 @@ def slide(start, d, slip, side, pull, at, end):
     gain = lambda t: side * rates(t, piece_at(pieces, t))[1]
     solver = DOP853(rates, start, (d, slip), end, rtol=RTOL, atol=ATOL * SCALES, max_step=LONGEST_STEP)
     pieces, above, looks = [], {}, [(start, side * slip)]
-    while solver.status == "running":
-        message = solver.step()
-        if solver.status == "failed":
-            sys.exit(f"The integration failed at t = {solver.t}: {message}")
-        piece, old, new = solver.dense_output(), solver.t_old, solver.t
+    for old, new, piece in steps_of(solver):
         pieces.append((old, new, piece))
         for t in np.linspace(old, new, LOOKS + 1)[1:]:
             found = []

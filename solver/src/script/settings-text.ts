@@ -36,6 +36,15 @@ def sign_changes(g, low, high):
     return [float(t) for t in times[1:-1][values[1:-1] == 0]] + [brentq(g, times[i], times[i + 1], xtol=1e-15) for i in passed]
 
 
+def steps_of(solver):
+    """The steps of an integration, one by one: from, to, and the integrator's own interpolant."""
+    while solver.status == "running":
+        message = solver.step()
+        if solver.status == "failed":
+            sys.exit(f"The integration failed at t = {solver.t}: {message}")
+        yield solver.t_old, solver.t, solver.dense_output()
+
+
 def piece_at(pieces, t):
     for old, _, piece in reversed(pieces):
         if t >= old:
