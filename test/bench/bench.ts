@@ -6,6 +6,7 @@ import { accuracies, type Accuracy } from "./accuracy.ts";
 import { allocationOf, median, timeOf } from "./measure.ts";
 import { floorAcceleration } from "./problems.ts";
 import { subjects, waysOf, type Tally } from "./subjects.ts";
+import { verdicts } from "./targets.ts";
 import { inC, inCvode, inSciPy, type Yardstick } from "./yardsticks.ts";
 
 /*
@@ -97,6 +98,8 @@ function report(rows: readonly Row[], yardsticks: readonly Yardstick[], accuracy
   console.log("\nEvents of the exact method beside forty digits, at most apart");
   if (typeof accuracy === "string") console.log(`  ${accuracy}`);
   else for (const { problem, events, t, x } of accuracy) console.log(`  ${problem}  ${events} events  ${t} s  ${x} m`);
+  console.log("\nTargets");
+  for (const line of verdicts(rows, accuracy)) console.log(`  ${line}`);
   console.log(`\n${absent.join("\n")}`);
   console.log("all of it in .local/bench.json");
 }

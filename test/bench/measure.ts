@@ -26,11 +26,17 @@ export function median(values: readonly number[]): number {
 /** Bytes one call leaves behind or throws away, typed arrays included; needs node's --expose-gc. NaN without it. */
 export function allocationOf(work: () => void): number {
   if (globalThis.gc === undefined) return NaN;
-  work();
+  const calls = 20;
+  for (let i = 0; i < 10 * calls; i++) work(); // until the compiler has settled
+  return Math.max(0, taken(work, calls) - taken(work, 0)) / calls;
+}
+
+/** Bytes so many calls take, and the reading of it with them: a median. */
+function taken(work: () => void, calls: number): number {
   const readings = Array.from({ length: 7 }, () => {
     globalThis.gc?.();
     const before = process.memoryUsage();
-    work();
+    for (let i = 0; i < calls; i++) work();
     const after = process.memoryUsage();
     return after.heapUsed - before.heapUsed + after.arrayBuffers - before.arrayBuffers;
   });
