@@ -1,2 +1,2 @@
 /** Stands in every result; moves with `package.json` and `CHANGELOG.md` whenever any result moves. */
-export const solverVersion = "0.2.0";
+export const solverVersion = "0.3.0";
