@@ -69,23 +69,32 @@ def is_zero_at(t, value, look, step):
     return gain < 0 and abs(value / gain) < NEAR * t
 
 
+def top_near(g, times, i):
+    """Where g is largest between the looks about times[i]."""
+    low, high = times[max(0, i - 1)], times[min(len(times) - 1, i + 1)]
+    return minimize_scalar(lambda t: -g(t), bounds=(low, high), method="bounded", options={"xatol": 1e-9 * (high - low)}).x
+
+
 def first_passed(hold, start, end):
     """When a hold is first passed, told where the need equals what there is, and a time soon after; None twice if not before end."""
     times = looks_at(start, end)
     passed = lambda t: over(*hold(t))
     for first in range(0, len(times) - 1, 4096):
         some = times[first : first + 4097]
-        found = np.flatnonzero(passed(some) + 0.0 * some > 0)
-        if len(found) == 0:
+        values = passed(some) + 0.0 * some
+        found = np.flatnonzero(crests(some, values) > 0)  # between two looks a hold may be passed and regained
+        found = [i for i in found if values[i] > 0 or passed(top_near(passed, some, i)) > 0]
+        if not found:
             continue
         i = found[0]
         if i == 0:
             return some[0], some[0]
+        after = some[i] if values[i] > 0 else top_near(passed, some, i)
         finest = {"xtol": 1e-15 * max(1.0, end), "rtol": 9e-16}
-        broken = brentq(passed, some[i - 1], some[i], **finest)
+        broken = brentq(passed, some[i - 1], after, **finest)
         equal = lambda t: abs(hold(t)[0]) - hold(t)[1]
         below = [t for t in some[:i] if equal(t) < 0]
-        return brentq(equal, below[-1], broken, **finest) if below and equal(broken) > 0 else broken, some[i]
+        return brentq(equal, below[-1], broken, **finest) if below and equal(broken) > 0 else broken, after
     return None, None
 
 
