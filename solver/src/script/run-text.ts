@@ -117,7 +117,8 @@ def breaks_later(t, x):
     """Whether a body stuck at t breaks away if the inputs go on for ever."""
     for end in [corner for corner in CORNERS if corner > t] + [None]:
         at = (t + end) / 2 if end else t + 1.0
-        if end is None and (STIFFNESS + CUBIC * (x - base(t, at)[0]) ** 2) * STRETCH_RATE != FORCE_RATE:
+        pull_rate = (STIFFNESS + CUBIC * (x - base(t, at)[0]) ** 2) * STRETCH_RATE
+        if end is None and not np.isclose(pull_rate, FORCE_RATE, rtol=1e-12, atol=0.0):
             return True
         if stick(t, x, at, end or t + (LOOK_AHEAD or 1.0))[0] is not None:
             return True
