@@ -1,12 +1,7 @@
-import type { StoredScenario, SwitchedOff } from "@restband/api/contract";
-import type { Scenario, Term } from "@restband/solver";
+import type { StoredScenario } from "@restband/api/contract";
+import type { Term } from "@restband/solver";
 import { ApiFailure } from "./api-failure.ts";
-
-/** A scenario, and its terms that are switched off. */
-export interface Work {
-  readonly content: Scenario;
-  readonly switchedOff: readonly SwitchedOff[];
-}
+import type { Work } from "./work.ts";
 
 /** Records of more points are kept by the server once, and named from then on. */
 const LONG = 1000;

@@ -2,7 +2,8 @@ import type { StoredScenario } from "@restband/api/contract";
 import type { Scenario } from "@restband/solver";
 import { queryOptions, useMutation, useQueryClient, type QueryClient } from "@tanstack/react-query";
 import { call } from "./client.ts";
-import { sendNamed, withPointsOf, type Work } from "./long-records.ts";
+import { sendNamed, withPointsOf } from "./long-records.ts";
+import type { Work } from "./work.ts";
 
 /** All scenarios of a project without their contents, last touched first; archived ones too. */
 export const scenariosQuery = (projectId: string) =>
