@@ -305,18 +305,24 @@ export class Stepper {
     s.position = moved.position;
     s.velocity = moved.velocity;
     s.acceleration = NaN;
-    const before = form.inputs.evaluate(tau).baseVelocity;
+    const { values } = form.inputs;
+    form.inputs.evaluate(tau);
+    const before = values.baseVelocity;
+    let hurry = Math.abs(values.baseAcceleration);
     s.t = end;
-    this.place(s, tau, form.inputs.values.base);
+    this.place(s, tau, values.base);
     if (!isCorner) return null;
     form.inputs.locate(end);
-    const after = form.inputs.evaluate(0).baseVelocity;
-    const scale = Math.max(startSpeed, Math.abs(before), Math.abs(after));
-    const isJump = Math.abs(after - before) > 1e-12 * scale;
+    form.inputs.evaluate(0);
+    const after = values.baseVelocity;
+    hurry += Math.abs(values.baseAcceleration);
+    // the corner's own time is rounded: what ẏ does in that while is no jump
+    const tolerance = 1e-12 * Math.max(startSpeed, Math.abs(before), Math.abs(after)) + this.blur * hurry;
+    const isJump = Math.abs(after - before) > tolerance;
     if (isJump && !problem.isRelative) s.velocity += before - after;
     const slipsNow = isJump && form.contactCarrier === "base" && !problem.isRelative;
     if (slipsNow) s.slip = s.velocity;
-    return this.enter(s, slipsNow, isZero, 1e-12 * scale);
+    return this.enter(s, slipsNow, isZero, tolerance);
   }
 
   /** v_r of a stick (0), or of a body locked to its base over ground or belt. */

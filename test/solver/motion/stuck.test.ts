@@ -58,3 +58,16 @@ test.each([
   });
   expect([ended, outcome]).toEqual(["time", expected]);
 });
+
+test("moves of a micrometre late in a run do not shake a body off its base by rounding", () => {
+  const contact = coulombForces(0.15, 0.2);
+  const { events, quantities } = run({
+    body: { inertia: 10, stiffness: 1e4 },
+    contact: { ...contact, normal: { preload: 200 }, counterface: "base" },
+    base: [{ kind: "staircase", increment: 1e-6, count: 300, dwell: 1, speed: 0.01, acceleration: 1, start: 0.3 }],
+    span: { seconds: 300, untilRest: false },
+  });
+  expect(events).toHaveLength(2);
+  // m a = 10 N of the 40 N that hold
+  expect(quantities.holdUse).toBeCloseTo(0.25, 9);
+});

@@ -99,3 +99,20 @@ describe("transmissibility", () => {
     expect(shaken({ force: [{ kind: "constant", value: 1 }] })).not.toBeNull();
   });
 });
+
+test("the mean place of a body without a spring that slides on is that of where it was", () => {
+  // only its velocity repeats itself; the mean of evenly told places (trapezium rule) is the expected value
+  const contact = coulombForces(0.8, 1);
+  const { quantities, samples } = run(
+    {
+      body: { inertia: 1, stiffness: 0, viscous: 2 },
+      contact: { ...contact, normal: { preload: 1, ripple: { amplitude: 0.5, hz: 0.2, phase: 0 } } },
+      force: [{ kind: "constant", value: 3 }],
+      span: { seconds: 50, untilRest: false },
+    },
+    { samples: 20_001 },
+  );
+  const { x } = samples!;
+  const mean = (x.reduce((sum, place) => sum + place, 0) - (x[0] + x[x.length - 1]) / 2) / (x.length - 1);
+  expect(Math.abs(quantities.meanDisplacement! - mean)).toBeLessThan(1e-6 * mean);
+});

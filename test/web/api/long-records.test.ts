@@ -2,7 +2,8 @@ import type { StoredScenario } from "@restband/api/contract";
 import { canonicalForm, checkScenario } from "@restband/solver";
 import { describe, expect, it } from "vitest";
 import { ApiFailure } from "../../../web/src/api/api-failure.ts";
-import { sendNamed, withPointsOf, type Work } from "../../../web/src/api/long-records.ts";
+import { sendNamed, withPointsOf } from "../../../web/src/api/long-records.ts";
+import type { Work } from "../../../web/src/api/work.ts";
 import { longRecord, recordScenario } from "../../support/long-record.ts";
 
 const content = checkScenario(recordScenario()).scenario!;

@@ -85,7 +85,8 @@ export class ExactSlip implements Slip {
 
   isSteady(tau: number): boolean {
     const { slow, fastDies } = this.oscillation.chain;
-    return tau >= fastDies && slow === 0;
+    // without a spring only the velocity repeats itself, not the place
+    return tau >= fastDies && slow === 0 && this.oscillation.squared > 0;
   }
 
   private get scale(): number {
