@@ -36,7 +36,12 @@ export function DataTable<Row>({
   className,
 }: DataTableProps<Row>) {
   return (
-    <div className={classNames("relative overflow-x-auto", className)} tabIndex={0} role="region" aria-label={caption}>
+    <div
+      className={classNames("scroll-edges relative overflow-x-auto", className)}
+      tabIndex={0}
+      role="region"
+      aria-label={caption}
+    >
       <table className="w-full border-collapse text-15">
         <caption className={isCaptionShown ? "pb-2 text-left font-bold" : "sr-only"}>{caption}</caption>
         <thead>
