@@ -273,7 +273,7 @@ export class Stepper {
     if (s.contact === 0) return this.meetBoth(s, 0);
     if (form.kind === "lock") {
       s.acceleration = form.inputs.values.baseAcceleration; // need is exactly what could just be held: d̈ = 0
-      s.spring = -Math.sign(form.carried.need) as Phase;
+      s.spring = -this.lostSide as Phase;
       orientSide(s);
       return null;
     }

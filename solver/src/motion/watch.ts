@@ -71,15 +71,16 @@ export class ShareWatch extends Watch {
   }
 
   /**
-   * Looks for the next crossing on one side, whichever way it goes; at a crossing, told to within the clock's `blur` s, the
-   * rate tells which.
+   * Looks for the next crossing on one side, whichever way it goes; at a crossing, told to within the clock's `blur` s, what
+   * the value is about to do tells which. One that stays where it is crosses nothing.
    */
   begin(side: 1 | -1, blur: number): void {
     this.side = side;
     this.sign = 1;
     this.evaluate(0);
     const isAtCrossing = Math.abs(this.value) <= 1e-12 * this.carried.room + blur * Math.abs(this.first);
-    this.sign = (isAtCrossing ? this.first : this.value) < 0 ? -1 : 1;
+    const ahead = isAtCrossing ? this.first || this.second || this.value : this.value;
+    this.sign = ahead < 0 ? -1 : 1;
   }
 }
 

@@ -71,3 +71,31 @@ test("moves of a micrometre late in a run do not shake a body off its base by ro
   // m a = 10 N of the 40 N that hold
   expect(quantities.holdUse).toBeCloseTo(0.25, 9);
 });
+
+test("a spring force of exactly what the contact holds is held, and what the spring's own damping adds is not asked for", () => {
+  const tie = 1e-6 * (1 + 1.2e-13);
+  const { ended, outcome, events } = run({
+    body: { inertia: 1, stiffness: 1e6, viscous: 2000 },
+    solid: { model: "displacement-proportional", lossFactor: 0.6 },
+    contact: { ...coulombForces(0.5, 1), counterface: "base" },
+    initial: { displacement: tie },
+    span: { seconds: 1, untilRest: false, maxWork: 1000 },
+  });
+  expect([ended, outcome, events.length]).toEqual(["time", "never-moved", 2]);
+});
+
+test("a force that grows from nothing moves a body that only its spring's damping holds, where nothing is stretched yet", () => {
+  const { ended, samples } = run(
+    {
+      body: { inertia: 1, stiffness: 1 },
+      solid: { model: "displacement-proportional", lossFactor: 0.15 },
+      contact: { law: { model: "none" }, counterface: { velocity: -0.16 } },
+      force: [{ kind: "ramp", rate: -0.5 }],
+      span: { seconds: 0.1, untilRest: false, maxWork: 1000 },
+    },
+    { samples: 3 },
+  );
+  expect(ended).toBe("time");
+  // d ≈ rate t³/6m: stiffness and its damping come in at t⁵
+  expect(samples!.x[2]).toBeCloseTo((-0.5 * 0.1 ** 3) / 6, 6);
+});
