@@ -48,6 +48,8 @@ const signs = 27;
 
 /** A buffer given back, for the next run to take: what a sweep's thousands of runs would else allocate each. */
 let spare: Float64Array | null = null;
+/** Numbers a spare buffer holds at most (8 MB): one very long run is not worth keeping the room for. */
+const mostSpare = 2 ** 20;
 
 /** The segments of a run, and what happened at the start of each, in one flat array that grows by doubling. */
 export class Segments {
@@ -63,7 +65,8 @@ export class Segments {
 
   /** Gives the buffer to the next run; nothing can be asked after that. */
   release(): void {
-    if (spare === null || spare.length < this.numbers.length) spare = this.numbers;
+    const { length } = this.numbers;
+    if (length <= mostSpare && (spare === null || spare.length < length)) spare = this.numbers;
     this.numbers = new Float64Array(0);
     this.count = 0;
   }
