@@ -63,8 +63,10 @@ export function firstZero(w: Watched, from: number, end: number, scale: number, 
     const safe = safeStep(Math.max(0, value), first, second, w.thirdBound(span), span);
     if (tau + safe >= clearFrom) return bottomOf(w, guess, end);
     if (tau + safe >= end) return touchesAt(w, end, blur) ? end : Infinity;
-    // below its own rounding a start from zero tells nothing: leave it by doubling steps
-    const step = Math.max(safe, 2 * ulp * tau, hasRisen ? 0 : Math.max(2 * last, 1e3 * ulp * span));
+    // below its own rounding a start from zero tells nothing: leave it by half the safe step, where w stands highest, then by
+    // doubling steps
+    const onwards = hasRisen ? safe : Math.max(safe / 2, 2 * last, 1e3 * ulp * span);
+    const step = Math.max(onwards, 2 * ulp * tau);
     if (tau + step >= end) return Infinity;
     if (guess === Infinity && safe < span) {
       const within = Math.min(end - tau, 4 * step + span);

@@ -88,3 +88,22 @@ test.each([1 - 1e-10, 1, 1.2])("a body that settles to run along with its belt n
   expect(ended).toBe("time");
   expect(events.map(({ kind }) => kind).filter((kind) => kind === "stop")).toEqual([]);
 });
+
+test("a free body that a force on the turn pushes back at first turns where the parabola of its velocity does", () => {
+  // m ẍ = −F + r t from rest: ẋ is 0 again at 2F/r
+  const [force, rate] = [-4.57e-4, 0.53];
+  const { events } = run(
+    {
+      body: { inertia: 1, stiffness: 0 },
+      contact: { law: { model: "none" } },
+      force: [
+        { kind: "constant", value: force },
+        { kind: "ramp", rate },
+      ],
+      span: { seconds: 2, untilRest: false },
+    },
+    { quantities: [] },
+  );
+  const turn = events.find(({ kind }) => kind === "turn");
+  expect(turn!.t).toBeCloseTo((-2 * force) / rate, 12);
+});
