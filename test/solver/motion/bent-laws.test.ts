@@ -123,3 +123,35 @@ test("a slip too short to rise out of the integrator's error still ends where v_
   expect(events[turn + 1].kind).toBe("stop");
   expect(events[turn + 1].t - events[turn].t).toBeCloseTo(0.00060237, 7);
 });
+
+test.each([0, 25.132741228718345])(
+  "a slip that starts with no acceleration stops at one time, whenever it begins: %d s",
+  (later) => {
+    // 2.023608598 s at a hundredth of the tolerance, from either start
+    const times = [0, 1.8849555921538759, 5.654866776461628].map((t) => t + later);
+    const { events } = run({
+      body: { inertia: 1, stiffness: 0 },
+      contact: {
+        law: {
+          model: "table",
+          points: [
+            [0, 0.492],
+            [1, 0.02],
+            [2, 0.321],
+          ],
+        },
+        normal: { preload: 1, faces: 2 },
+      },
+      force: [
+        {
+          kind: "record",
+          times: later === 0 ? times : [0, ...times],
+          values: later === 0 ? [0, -1, -0.006327172401290972] : [0, 0, -1, -0.006327172401290972],
+        },
+      ],
+      span: { seconds: 25.132741228718345 + later, untilRest: false },
+    });
+    const stop = events.find(({ kind }) => kind === "stop");
+    expect(Math.abs(stop!.t - later - 2.023608598)).toBeLessThan(1e-8);
+  },
+);

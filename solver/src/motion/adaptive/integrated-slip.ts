@@ -134,24 +134,34 @@ export class IntegratedSlip implements Slip {
     });
   }
 
-  /** Takes the last step again, to end at what was found within it, and tells its time by the new one. */
+  /**
+   * Takes the last step again, to end at what was found within it, and tells its time by the new one; again where that moves it
+   * by more than a straight line can tell.
+   */
   private retake(ending: Ending, work: Work): void {
     const { stance, store } = this;
     const from = store.from(this.last);
-    const to = stance.t + ending.tau;
     const fallsAt = this.watched;
     // right after its start a step needs no second one
-    const isLate = to - from > 1e-6 * (store.to(this.last) - from);
+    const isLate = stance.t + ending.tau - from > 1e-6 * (store.to(this.last) - from);
     if (fallsAt === null || ending.isTouch || !isLate) return;
     store.evaluate(this.last, from, this.at);
-    store.count = --this.last + 1;
-    const reached = this.integrate(from, to, [...this.at], work, () => true);
-    if (reached < to) work.spent = Infinity;
-    const apart = 1e-3 * (to - from);
-    const value = fallsAt(to);
-    const slope = (value - fallsAt(to - apart)) / apart;
-    const later = -value / slope;
-    if (Math.abs(later) <= apart) ending.tau += later;
+    const start = [...this.at];
+    const before = this.last - 1;
+    for (let tries = 0; tries < 4; tries++) {
+      const to = stance.t + ending.tau;
+      this.last = before;
+      store.count = before + 1;
+      const reached = this.integrate(from, to, start, work, () => true);
+      if (reached < to) return void (work.spent = Infinity);
+      const apart = 1e-3 * (to - from);
+      const value = fallsAt(to);
+      const slope = (value - fallsAt(to - apart)) / apart;
+      const later = -value / slope;
+      if (!(Math.abs(later) < (to - from) / 2)) return;
+      ending.tau += later;
+      if (Math.abs(later) <= apart) return;
+    }
   }
 
   /** True where v_r reaches 0 at τ to within `blur` s. */
