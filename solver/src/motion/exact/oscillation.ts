@@ -147,7 +147,8 @@ export class Oscillation {
   /** d, ḋ, d̈ and v_r for those who only read: the series in fewer derivatives, the modes wherever they cancel by two digits at most. */
   read(tau: number): void {
     if (tau === this.slipAt) return;
-    if (tau > this.seriesReach || (this.isSwing && this.chain.fast * tau > 0.1)) return this.readModes(tau);
+    if (this.isSwing && this.chain.fast * tau > 0.1) return this.readSwing(tau);
+    if (tau > this.seriesReach) return this.evaluateSlip(tau);
     const { series } = this;
     this.at = this.slipAt = NaN;
     series.read(tau);
@@ -157,8 +158,7 @@ export class Oscillation {
     this.slip = series.slip;
   }
 
-  private readModes(tau: number): void {
-    if (!this.isSwing || !(this.chain.fast * tau > 0.1)) return this.evaluateSlip(tau);
+  private readSwing(tau: number): void {
     this.at = this.slipAt = NaN;
     this.evaluateSwing(tau);
     this.slip = this.velocity;
